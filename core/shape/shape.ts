@@ -79,9 +79,12 @@ export const firstMoment = (shape: Shape, y: number): number => {
 /** Width of the shape at the level y, mm: in the web its thickness. At a level where it jumps, the narrower side; 0 outside the shape. */
 export const thickness = (shape: Shape, y: number): number => {
   if (y < shape.top || y > shape.bottom) return 0;
+  const { bands } = shape;
   let narrowest = Number.POSITIVE_INFINITY;
-  for (const it of bandsOf(shape)) {
-    if (it.top <= y && y <= it.bottom) narrowest = Math.min(narrowest, widthAt(it, y));
+  for (let i = 0; i < bands.length; i++) {
+    const it = bands[i]!;
+    const touches = it.top <= y && y <= it.bottom && it.top < shape.bottom && it.bottom > shape.top;
+    if (touches) narrowest = Math.min(narrowest, widthAt(it, y));
   }
   return narrowest;
 };

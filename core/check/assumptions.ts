@@ -1,0 +1,36 @@
+import type { End } from '../end/schema.ts';
+import type { Standard } from '../standards/standard.ts';
+import { fieldName, filled, type Words } from '../words/words.ts';
+import type { Note } from './report.ts';
+
+/** Everything that was taken as true without being given, and the limits that hold for every end. */
+export const assumptionsOf = (end: End, standard: Standard, channel: boolean, words: Words): Note[] => {
+  const notes: Note[] = [];
+  const say = (code: string, values: Record<string, unknown> = {}, path?: string) =>
+    notes.push({ code, text: filled(words.assumptions[code] ?? code, values), ...(path && { path }) });
+  for (const code of ['restraint', 'static', 'bearing']) say(code);
+  const { joint } = end;
+  const { bolts } = joint;
+  if (bolts.threads === undefined) say('threads-assumed', {}, 'joint.bolts.threads');
+  else say(`threads-${bolts.threads}`);
+  for (const code of ['no-axial', 'support', 'square', 'material']) say(code);
+  if (channel) say('channel-shear-centre');
+  if (end.level === undefined) say('level-assumed', { value: standard.level }, 'level');
+  if (bolts.holes === undefined) say('holes-assumed', { value: standard.materials.holesAssumed }, 'joint.bolts.holes');
+  if (bolts.columns === undefined) say('columns-assumed', {}, 'joint.bolts.columns');
+  if (end.tie === undefined) say('tie-assumed', {}, 'tie');
+  for (const edge of ['top', 'bottom'] as const) {
+    if (end[edge] && end[edge].radius === undefined) {
+      say('radius-assumed', { field: capital(fieldName(words, `${edge}.radius`)) }, `${edge}.radius`);
+    }
+  }
+  if (joint.kind === 'fin-plate' && joint.weld.electrode === undefined) {
+    say('electrode-assumed', { value: `${standard.materials.electrode} MPa` }, 'joint.weld.electrode');
+  }
+  if (end.support?.section !== undefined && end.support.topOfSteel === undefined) {
+    say('top-of-steel-assumed', {}, 'support.topOfSteel');
+  }
+  return notes;
+};
+
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -1,0 +1,127 @@
+import type { FitName, PartName, StrengthName } from '../end/checkNames.ts';
+import type { Gate, Limit } from '../end/gates.ts';
+import type { Joint } from '../end/schema.ts';
+import { type NumberReader, numberOf, testOf } from '../formula/number.ts';
+import { joints } from '../joints/index.ts';
+import {
+  type FitPart,
+  type FitRule,
+  isNoRule,
+  type NoRule,
+  type Standard,
+  type StrengthRule,
+  type Way,
+} from '../standards/standard.ts';
+
+type Test = (facts: never) => boolean;
+
+interface GatePlan {
+  readonly test: Test;
+  readonly reason: string;
+}
+
+interface LimitPlan extends GatePlan {
+  readonly always: boolean;
+  readonly noNumber: boolean;
+}
+
+export interface WayPlan {
+  readonly demand: NumberReader;
+  readonly resistance: NumberReader;
+  readonly load: 'V' | 'T';
+  readonly off: readonly GatePlan[];
+  readonly limits: readonly LimitPlan[];
+  readonly unbounded?: Test;
+  readonly informs?: Test;
+}
+
+export interface StrengthPlan {
+  readonly id: StrengthName;
+  readonly part: PartName;
+  readonly rule: StrengthRule | NoRule;
+  /** Reason code where the standard has no rule; empty otherwise. */
+  readonly noRule: string;
+  readonly ways: readonly WayPlan[];
+}
+
+export interface FitPartPlan {
+  readonly given: NumberReader;
+  readonly least?: NumberReader;
+  readonly most?: NumberReader;
+  readonly off: readonly GatePlan[];
+  readonly clash?: Test;
+}
+
+export interface FitPlan {
+  readonly id: FitName;
+  readonly part: PartName;
+  readonly rule: FitRule | NoRule;
+  readonly noRule: string;
+  readonly breach: 'fails' | 'refer';
+  readonly parts: readonly FitPartPlan[];
+}
+
+/** A joint's list joined with a standard's rules, composed once into closures. */
+export interface Plan {
+  readonly standard: Standard;
+  readonly strength: readonly StrengthPlan[];
+  readonly fit: readonly FitPlan[];
+}
+
+const gatePlan = ({ when, reason }: Gate): GatePlan => ({ test: testOf(when), reason });
+const limitPlan = (limit: Limit): LimitPlan => ({
+  ...gatePlan(limit),
+  always: limit.always,
+  noNumber: limit.noNumber ?? false,
+});
+
+const wayPlan = (way: Way): WayPlan => ({
+  demand: numberOf(way.demand),
+  resistance: numberOf(way.resistance),
+  load: way.load,
+  off: (way.off ?? []).map(gatePlan),
+  limits: (way.limits ?? []).map(limitPlan),
+  ...(way.unbounded && { unbounded: testOf(way.unbounded) }),
+  ...(way.informs && { informs: testOf(way.informs) }),
+});
+
+const fitPartPlan = (part: FitPart): FitPartPlan => ({
+  given: numberOf(part.given),
+  ...(part.least && { least: numberOf(part.least) }),
+  ...(part.most && { most: numberOf(part.most) }),
+  off: (part.off ?? []).map(gatePlan),
+  ...(part.clash && { clash: testOf(part.clash) }),
+});
+
+const reasonOf = (rule: StrengthRule | FitRule | NoRule): string =>
+  isNoRule(rule) ? (rule.covered ? 'covered' : 'no-rule') : '';
+
+const made = new Map<string, Plan>();
+
+/** The plan of one standard and kind of joint, made at first use. */
+export const planOf = (standard: Standard, kind: Joint['kind']): Plan => {
+  const key = `${standard.id} ${kind}`;
+  const known = made.get(key);
+  if (known) return known;
+  const list = joints[kind];
+  const plan: Plan = {
+    standard,
+    strength: list.strength.map(([id, part]) => {
+      const rule = standard.strength[id];
+      return { id, part, rule, noRule: reasonOf(rule), ways: isNoRule(rule) ? [] : rule.ways.map(wayPlan) };
+    }),
+    fit: list.fit.map(([id, part]) => {
+      const rule = standard.fit[id];
+      return {
+        id,
+        part,
+        rule,
+        noRule: reasonOf(rule),
+        breach: isNoRule(rule) ? 'refer' : rule.breach,
+        parts: isNoRule(rule) ? [] : rule.parts.map(fitPartPlan),
+      };
+    }),
+  };
+  made.set(key, plan);
+  return plan;
+};

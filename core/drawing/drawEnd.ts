@@ -1,0 +1,80 @@
+import type { Facts } from '../end/facts.ts';
+import { centreLines, holes } from './bolts.ts';
+import { callouts, weldMark } from './callouts.ts';
+import { dimensions } from './dimensions.ts';
+import type { Box, Drawing, Line, Stroke } from './drawing.ts';
+import { elevation } from './outline.ts';
+import { plateBox, plateEdges } from './plate.ts';
+import { sentences } from './sentences.ts';
+import { forceUnit, length, reaction } from './sizes.ts';
+import { faceSpan, supportBox, supportSection } from './support.ts';
+import type { DrawingWords } from './words.ts';
+
+/** Beam drawn beyond the last cope or the plate: this share of its depth, and no less than the length in mm. */
+const BEYOND = 0.28;
+const LEAST_BEYOND = 110;
+
+/**
+ * The elevation of one end with everything that is said on it. Facts in N and mm; the reaction shown is `facts.V`, so pass the end's own.
+ * Any facts with finite numbers give a drawing; ends that cannot be made are drawn as they are described.
+ */
+export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
+  const right = drawnLength(facts);
+  const box = pieceBox(facts, right);
+  const { h, support } = facts;
+  return {
+    box,
+    strokes: [
+      ...supportSection(facts),
+      ...plateEdges(facts),
+      ...plateAtFace(facts),
+      ...elevation(facts, right),
+      ...centreLines(facts),
+    ],
+    holes: holes(facts),
+    breaks: [{ x: right, top: 0, bottom: h }],
+    dimensions: [
+      ...dimensions(facts, words, box),
+      {
+        axis: 'y',
+        from: { x: right, y: 0 },
+        to: { x: right, y: h },
+        at: { side: 'right', base: right, lane: 1 },
+        line: [{ text: `(${length(h, words.units)})`, role: 'derived' }],
+        value: h,
+      },
+    ],
+    callouts: callouts(facts, words, right),
+    weld: weldMark(facts, words),
+    face: { x: -facts.g, ...faceSpan(facts), line: [{ text: support.here ? 'face of web' : 'support face', role: 'second' }] },
+    reaction: reactionLine(facts, words),
+    sentences: sentences(facts, words),
+  };
+};
+
+/** Length of beam that is drawn, mm from its end. */
+export const drawnLength = (it: Facts): number =>
+  Math.max(it.ct, it.cb, plateBox(it).right, 0) + Math.max(BEYOND * it.h, LEAST_BEYOND);
+
+const pieceBox = (it: Facts, right: number): Box => {
+  const plate = plateBox(it);
+  const support = supportBox(it);
+  return {
+    left: Math.min(0, plate.left, support?.left ?? 0),
+    top: Math.min(0, plate.top, support?.top ?? 0),
+    right: Math.max(right, support?.right ?? 0),
+    bottom: Math.max(it.h, plate.bottom, support?.bottom ?? 0),
+  };
+};
+
+/** The plate's edge along the support's face, where the weld runs. */
+const plateAtFace = (it: Facts): Stroke[] => {
+  const { left: x, top, bottom } = plateBox(it);
+  return [{ kind: 'outline', from: { x, y: top }, to: [{ x, y: bottom }] }];
+};
+
+const reactionLine = (it: Facts, { units }: DrawingWords): Line => [
+  { text: 'V', role: 'note', italic: true },
+  { text: reaction(it.V, units), role: 'size', path: 'reaction' },
+  { text: forceUnit(units), role: 'second' },
+];

@@ -1,0 +1,87 @@
+import type { Box, Point } from './drawing.ts';
+
+/** What stands on the drawing so far: words find their places by how much they would cover. */
+export interface Ground {
+  /** A line that words should keep off; `weight` says how much. Lines of the same owner do not disturb it. */
+  line(from: Point, to: Point, weight: number, owner?: object): void;
+  /** A box that nothing else may stand on. */
+  take(box: Box): void;
+  /** What covering this box would cost; counting stops beyond `enough`. */
+  cost(box: Box, owner?: object, enough?: number): number;
+  /** What a leader along this line would cost. */
+  crossing(from: Point, to: Point): number;
+}
+
+/** Words on words. */
+const WORDS = 1000;
+/** A leader through words, and over a line of weight 1. */
+const LEADER_WORDS = 120;
+const LEADER_LINE = 0.12;
+
+interface Segment {
+  readonly ax: number;
+  readonly ay: number;
+  readonly bx: number;
+  readonly by: number;
+  readonly weight: number;
+  readonly owner: object | undefined;
+}
+
+export const createGround = (): Ground => {
+  const segments: Segment[] = [];
+  const boxes: Box[] = [];
+  return {
+    line: (from, to, weight, owner) => {
+      segments.push({ ax: from.x, ay: from.y, bx: to.x, by: to.y, weight, owner });
+    },
+    take: (box) => {
+      boxes.push(box);
+    },
+    cost: (box, owner, enough = Number.POSITIVE_INFINITY) => {
+      let sum = 0;
+      for (const it of boxes) if (overlaps(it, box)) sum += WORDS;
+      for (let i = 0; i < segments.length && sum < enough; i++) {
+        const it = segments[i]!;
+        if (it.owner !== undefined && it.owner === owner) continue;
+        if (meets(it, box)) sum += it.weight;
+      }
+      return sum;
+    },
+    crossing: (from, to) => {
+      const leader: Segment = { ax: from.x, ay: from.y, bx: to.x, by: to.y, weight: 0, owner: undefined };
+      let sum = 0;
+      for (const it of boxes) if (meets(leader, it)) sum += LEADER_WORDS;
+      for (const it of segments) if (cross(leader, it)) sum += LEADER_LINE * it.weight;
+      return sum;
+    },
+  };
+};
+
+export const overlaps = (a: Box, b: Box): boolean =>
+  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
+
+/** True where a segment touches the inside of a box: the part of it within the box's four sides is not empty. */
+const meets = ({ ax, ay, bx, by }: Segment, { left, top, right, bottom }: Box): boolean => {
+  if ((ax < left && bx < left) || (ax > right && bx > right)) return false;
+  if ((ay < top && by < top) || (ay > bottom && by > bottom)) return false;
+  const dx = bx - ax;
+  const dy = by - ay;
+  let start = 0;
+  let end = 1;
+  if (dx !== 0) {
+    const [p, q] = [(left - ax) / dx, (right - ax) / dx];
+    start = Math.max(start, Math.min(p, q));
+    end = Math.min(end, Math.max(p, q));
+  }
+  if (dy !== 0) {
+    const [p, q] = [(top - ay) / dy, (bottom - ay) / dy];
+    start = Math.max(start, Math.min(p, q));
+    end = Math.min(end, Math.max(p, q));
+  }
+  return start <= end;
+};
+
+const cross = (a: Segment, b: Segment): boolean =>
+  side(a, b.ax, b.ay) * side(a, b.bx, b.by) < 0 && side(b, a.ax, a.ay) * side(b, a.bx, a.by) < 0;
+
+const side = ({ ax, ay, bx, by }: Segment, x: number, y: number): number => (bx - ax) * (y - ay) - (by - ay) * (x - ax);

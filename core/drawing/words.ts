@@ -1,0 +1,17 @@
+import type { UnitSystem } from '../units/systems.ts';
+
+/** What the drawing writes but the facts do not carry: names as they stand in the end, and the trade's words of the region. */
+export interface DrawingWords {
+  readonly units: UnitSystem;
+  /** Designation of the section, such as `UB 406 × 178 × 60`. */
+  readonly section: string;
+  /** Such as `M20` and `8.8`. */
+  readonly boltSize: string;
+  readonly boltGrade: string;
+  /** Such as `drilled` or `punched`. */
+  readonly holes: string;
+  /** `notch` or `cope`. */
+  readonly cope: string;
+  /** Of the part that the web is bolted to, such as `fin plate`, `single plate` or `ply`. */
+  readonly plate: string;
+}

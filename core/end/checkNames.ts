@@ -1,0 +1,46 @@
+/** Ways of failing that are measured by the end reaction (or by the tie force): public names, the same in JSON, screen, test and sheet. */
+export const strengthNames = [
+  'web-gross-shear',
+  'cope-shear',
+  'web-net-shear',
+  'web-block',
+  'web-tearout',
+  'cope-bending',
+  'cope-buckling',
+  'web-bearing',
+  'web-tie',
+  'stress-full',
+  'stress-cope',
+  'bolt-shear',
+  'plate-bearing',
+  'plate-tearout',
+  'plate-gross-shear',
+  'plate-net-shear',
+  'plate-block',
+  'plate-bending',
+  'plate-buckling',
+  'weld',
+] as const;
+
+/** Rules of geometry that carry no force. */
+export const fitNames = [
+  'fit-pitch',
+  'fit-gauge',
+  'fit-edge-web',
+  'fit-edge-plate',
+  'fit-end',
+  'fit-plate-depth',
+  'fit-cope-length',
+  'fit-cope-depth',
+  'fit-cope-radius',
+  'fit-cope-clearance',
+  'fit-setback',
+  'fit-rotation',
+  'fit-wrench',
+] as const;
+
+export type StrengthName = (typeof strengthNames)[number];
+export type FitName = (typeof fitNames)[number];
+export type CheckName = StrengthName | FitName;
+/** What a check speaks of. */
+export type PartName = 'web' | 'bolts' | 'plate' | 'weld' | 'end';

@@ -1,0 +1,66 @@
+import type { Section } from '../shape/section.ts';
+import { cutShape, firstMoment, type Shape, thickness } from '../shape/shape.ts';
+import { shearPeak } from '../shape/shearStress.ts';
+import type { CutFacts } from './facts.ts';
+
+/** Copes of one end, mm; a length and depth of 0 means none. */
+export interface Copes {
+  readonly g: number;
+  readonly ct: number;
+  readonly dt: number;
+  readonly cb: number;
+  readonly db: number;
+}
+
+/** The section that an end has not got. */
+export const noCut: CutFacts = {
+  here: false,
+  shape: null,
+  topCut: false,
+  depth: 0,
+  c: 0,
+  dc: 0,
+  ec: 0,
+  A: 0,
+  I: 0,
+  W: 0,
+  Q: 0,
+  t: 0,
+};
+
+const cutAt = (shape: Shape, topCut: boolean, c: number, dc: number, g: number): CutFacts => {
+  const { at } = shearPeak(shape);
+  return {
+    here: true,
+    shape,
+    topCut,
+    depth: shape.depth,
+    c,
+    dc,
+    ec: g + c,
+    A: shape.area,
+    I: shape.inertia,
+    W: topCut ? shape.modulusTop : shape.modulusBottom,
+    Q: firstMoment(shape, at),
+    t: thickness(shape, at),
+  };
+};
+
+/**
+ * The sections behind the copes: a tee behind a single cope; the web cut at both edges at the shorter cope's face,
+ * and the tee beyond it at the longer one's where the lengths differ.
+ */
+export const cutsOf = (section: Section, copes: Copes): { rectangle: CutFacts; tee: CutFacts } => {
+  const { g, ct, dt, cb, db } = copes;
+  const top = () => cutAt(cutShape(section, dt, 0), true, ct, dt, g);
+  const bottom = () => cutAt(cutShape(section, 0, db), false, cb, db, g);
+  if (dt > 0 && db > 0) {
+    const [c, dc] = ct <= cb ? [ct, dt] : [cb, db];
+    const rectangle = cutAt(cutShape(section, dt, db), true, c, dc, g);
+    if (ct === cb) return { rectangle, tee: noCut };
+    return { rectangle, tee: ct > cb ? top() : bottom() };
+  }
+  if (dt > 0) return { rectangle: noCut, tee: top() };
+  if (db > 0) return { rectangle: noCut, tee: bottom() };
+  return { rectangle: noCut, tee: noCut };
+};

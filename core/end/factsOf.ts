@@ -1,0 +1,149 @@
+import type { Section } from '../shape/section.ts';
+import { firstMoment, type Shape, thickness, wholeShape } from '../shape/shape.ts';
+import { shearPeak } from '../shape/shearStress.ts';
+import { INCH } from '../units/systems.ts';
+import { cutsOf } from './cuts.ts';
+import type { Facts, SupportFacts } from './facts.ts';
+import type { End } from './schema.ts';
+
+/** What a standard says of the materials, bolts and holes of one end. MPa, mm. */
+export interface Strengths {
+  readonly fy: number;
+  readonly fu: number;
+  readonly fyp: number;
+  readonly fup: number;
+  readonly fub: number;
+  readonly Xu: number;
+  readonly d: number;
+  readonly d0: number;
+  readonly dn: number;
+}
+
+/** No supporting beam's section is known. */
+export const noSupport: SupportFacts = { here: false, b: 0, tw: 0, tf: 0, r: 0, h: 0, topOfSteel: 0 };
+
+/** mm in one length unit of a file. */
+export const lengthSize = (end: Pick<End, 'units'>): number => (end.units === 'mm-kN' ? 1 : INCH);
+
+interface WholeShear {
+  readonly whole: Shape;
+  readonly I: number;
+  readonly Q: number;
+  readonly t: number;
+}
+
+const shearOf = new WeakMap<Section, WholeShear>();
+
+const wholeShear = (section: Section): WholeShear => {
+  const known = shearOf.get(section);
+  if (known) return known;
+  const whole = wholeShape(section);
+  const { at } = shearPeak(whole);
+  const made = { whole, I: whole.inertia, Q: firstMoment(whole, at), t: thickness(whole, at) };
+  shearOf.set(section, made);
+  return made;
+};
+
+/** Columns that stand inside a cope of this length: those before the first whose hole lies wholly beyond its face. */
+const columnsInside = (c: number, eEnd: number, q: number, m: number, d0: number): number => {
+  let inside = 0;
+  while (inside < m && c >= eEnd + inside * q - d0 / 2) inside += 1;
+  return inside;
+};
+
+const holeAtFace = (c: number, eEnd: number, q: number, m: number, d0: number): boolean => {
+  for (let j = 0; j < m; j += 1) if (Math.abs(eEnd + j * q - c) < d0 / 2) return true;
+  return false;
+};
+
+/** Turns an end, in its own units, and what is known of its materials into facts in N and mm. The reaction is left at 1 N. */
+export const factsOf = (
+  end: End,
+  section: Section,
+  strengths: Strengths,
+  support: SupportFacts,
+  options: Readonly<Record<string, string>>,
+): Facts => {
+  const k = lengthSize(end);
+  const { joint } = end;
+  const { bolts } = joint;
+  const ply = joint.kind === 'fin-plate' ? joint.plate : joint.ply;
+  const g = end.setback * k;
+  const ct = (end.top?.length ?? 0) * k;
+  const dt = (end.top?.depth ?? 0) * k;
+  const cb = (end.bottom?.length ?? 0) * k;
+  const db = (end.bottom?.depth ?? 0) * k;
+  const n = bolts.rows;
+  const m = bolts.columns ?? 1;
+  const p = n > 1 ? (bolts.pitch ?? 0) * k : 0;
+  const q = m > 1 ? (bolts.gauge ?? 0) * k : 0;
+  const y1 = joint.firstRow * k;
+  const yn = y1 + (n - 1) * p;
+  const eEnd = joint.endDistance * k;
+  const { d0 } = strengths;
+  const { h, b, tf, tw, r } = section;
+  const cuts = cutsOf(section, { g, ct, dt, cb, db });
+  const shear = wholeShear(section);
+  const eTop = ply.topEdge * k;
+  const eBot = ply.bottomEdge * k;
+  return {
+    V: 1,
+    T: 0,
+    section,
+    h,
+    b,
+    tf,
+    tw,
+    r,
+    channel: section.family === 'channel',
+    fy: strengths.fy,
+    fu: strengths.fu,
+    fyp: strengths.fyp,
+    fup: strengths.fup,
+    fub: strengths.fub,
+    Xu: strengths.Xu,
+    g,
+    ct,
+    dt,
+    rt: (end.top?.radius ?? 0) * k,
+    cb,
+    db,
+    rb: (end.bottom?.radius ?? 0) * k,
+    ho: h - dt - db,
+    n,
+    m,
+    p,
+    q,
+    y1,
+    yn,
+    eEnd,
+    at: y1 - dt,
+    ab: h - db - yn,
+    mTop: dt > 0 ? columnsInside(ct, eEnd, q, m, d0) : 0,
+    mBottom: db > 0 ? columnsInside(cb, eEnd, q, m, d0) : 0,
+    d: strengths.d,
+    d0,
+    dn: strengths.dn,
+    threadsIn: bolts.threads !== 'out',
+    planes: 1,
+    z: g + eEnd + ((m - 1) * q) / 2,
+    z1: g + eEnd,
+    tp: ply.thickness * k,
+    hp: eTop + (n - 1) * p + eBot,
+    eTop,
+    eBot,
+    ex: ply.edge * k,
+    leg: joint.kind === 'fin-plate' ? joint.weld.leg * k : 0,
+    kind: joint.kind,
+    whole: shear.whole,
+    I: shear.I,
+    Q: shear.Q,
+    t: shear.t,
+    rectangle: cuts.rectangle,
+    tee: cuts.tee,
+    holeAtCopeFace: (dt > 0 && holeAtFace(ct, eEnd, q, m, d0)) || (db > 0 && holeAtFace(cb, eEnd, q, m, d0)),
+    flangeLeft: (dt > 0 && dt < tf) || (db > 0 && db < tf),
+    support,
+    options,
+  };
+};

@@ -1,0 +1,36 @@
+import { type Condition, not } from '../formula/tree.ts';
+import { flag } from './given.ts';
+
+/** A condition under which a check says something else than a number's verdict; `reason` is a code of core/words. */
+export interface Gate {
+  readonly when: Condition;
+  readonly reason: string;
+}
+
+/** A limit beyond which a licensed engineer must decide. `always`: even where the number fails; else `fails` stays `fails`. */
+export interface Limit extends Gate {
+  readonly always: boolean;
+  /** True where the formula's number would mean nothing, so that none is given. */
+  readonly noNumber?: boolean;
+}
+
+export const coped = flag('the end is coped', (f) => f.rectangle.here || f.tee.here);
+export const oneBolt = flag('one bolt alone', (f) => f.n === 1 && f.m === 1);
+export const oneRow = flag('one bolt row', (f) => f.n === 1);
+export const oneColumn = flag('one bolt column', (f) => f.m === 1);
+export const noColumnInCope = flag('an intact flange lies above every column', (f) => f.mTop === 0);
+export const isChannel = flag('a channel', (f) => f.channel);
+const noTie = flag('no tie force', (f) => f.T === 0);
+
+/** Off where the end is not coped. */
+export const uncoped: Gate = { when: not(coped), reason: 'no-cope' };
+export const intactFlange: Gate = { when: noColumnInCope, reason: 'intact-flange' };
+export const singleRow: Gate = { when: oneRow, reason: 'single-row' };
+export const noTieForce: Gate = { when: noTie, reason: 'no-tie' };
+
+/** What no standard's formula for the end's own section covers, whatever the number says. */
+export const copeLimits: readonly Limit[] = [
+  { when: flag('a hole at the face of a cope', (f) => f.holeAtCopeFace), reason: 'hole-at-cope-face', always: true },
+  { when: flag('a cope shallower than the flange', (f) => f.flangeLeft), reason: 'flange-left', always: true },
+];
+export const channelCope: Limit = { when: isChannel, reason: 'channel-cope', always: true, noNumber: true };

@@ -1,0 +1,98 @@
+import { flagOf, foundOf, givenOf } from '../formula/tree.ts';
+import type { CutFacts, Facts } from './facts.ts';
+
+const given = givenOf<Facts>();
+/** A yes-or-no fact of the end. */
+export const flag = flagOf<Facts>();
+/** A quantity that a solver finds from facts of the end. */
+export const found = foundOf<Facts>();
+
+/** End reaction and tie force, N. */
+export const V = given('V', '0,1', (f) => f.V);
+export const T = given('T', '0,1', (f) => f.T);
+
+/** The uncut beam, mm. */
+export const h = given('h', '1,0', (f) => f.h);
+export const b = given('b', '1,0', (f) => f.b);
+export const tf = given('t_f', '1,0', (f) => f.tf);
+export const tw = given('t_w', '1,0', (f) => f.tw);
+export const r = given('r', '1,0', (f) => f.r);
+
+/** Strengths of web, plate or ply, bolts and weld metal, MPa. */
+export const fy = given('f_y', '-2,1', (f) => f.fy);
+export const fu = given('f_u', '-2,1', (f) => f.fu);
+export const fyp = given('f_yp', '-2,1', (f) => f.fyp);
+export const fup = given('f_up', '-2,1', (f) => f.fup);
+export const fub = given('f_ub', '-2,1', (f) => f.fub);
+export const Xu = given('X_u', '-2,1', (f) => f.Xu);
+
+/** Setback, copes, what remains at the end, mm. */
+export const g = given('g', '1,0', (f) => f.g);
+export const ct = given('c_t', '1,0', (f) => f.ct);
+export const dt = given('d_t', '1,0', (f) => f.dt);
+export const rt = given('ρ_t', '1,0', (f) => f.rt);
+export const cb = given('c_b', '1,0', (f) => f.cb);
+export const db = given('d_b', '1,0', (f) => f.db);
+export const rb = given('ρ_b', '1,0', (f) => f.rb);
+export const ho = given('h_o', '1,0', (f) => f.ho);
+
+/** Bolt pattern, mm. */
+export const n = given('n', '0,0', (f) => f.n);
+export const m = given('m', '0,0', (f) => f.m);
+/** Columns inside the top cope. */
+export const mTop = given('m', '0,0', (f) => f.mTop);
+export const p = given('p', '1,0', (f) => f.p);
+export const q = given('q', '1,0', (f) => f.q);
+export const y1 = given('y_1', '1,0', (f) => f.y1);
+export const eEnd = given('e_end', '1,0', (f) => f.eEnd);
+export const at = given('a_t', '1,0', (f) => f.at);
+export const ab = given('a_b', '1,0', (f) => f.ab);
+export const d = given('d', '1,0', (f) => f.d);
+export const d0 = given('d_0', '1,0', (f) => f.d0);
+/** Hole diameter for net areas. */
+export const dn = given('d′', '1,0', (f) => f.dn);
+export const planes = given('n_s', '0,0', (f) => f.planes);
+/** Support's face to the centroid of the bolts, and to the first column. */
+export const z = given('z', '1,0', (f) => f.z);
+export const z1 = given('z_1', '1,0', (f) => f.z1);
+
+/** Plate or ply, and its weld, mm. */
+export const tp = given('t_p', '1,0', (f) => f.tp);
+export const hp = given('h_p', '1,0', (f) => f.hp);
+export const eTop = given('e_top', '1,0', (f) => f.eTop);
+export const eBot = given('e_bot', '1,0', (f) => f.eBot);
+export const ex = given('e_x', '1,0', (f) => f.ex);
+export const leg = given('s', '1,0', (f) => f.leg);
+
+/** Full section: second moment; first moment and thickness at the peak of V Q/(I t). */
+export const whole = {
+  I: given('I', '4,0', (f) => f.I),
+  Q: given('Q', '3,0', (f) => f.Q),
+  t: given('t', '1,0', (f) => f.t),
+};
+
+const cut = (of: (f: Facts) => CutFacts) => ({
+  depth: given('h_o', '1,0', (f) => of(f).depth),
+  c: given('c', '1,0', (f) => of(f).c),
+  dc: given('d_c', '1,0', (f) => of(f).dc),
+  ec: given('e_c', '1,0', (f) => of(f).ec),
+  I: given('I', '4,0', (f) => of(f).I),
+  W: given('W', '3,0', (f) => of(f).W),
+  Q: given('Q', '3,0', (f) => of(f).Q),
+  t: given('t', '1,0', (f) => of(f).t),
+});
+
+/** What remains behind a cope, at that cope's face. */
+export type Cut = ReturnType<typeof cut>;
+export const rectangle = cut((f) => f.rectangle);
+export const tee = cut((f) => f.tee);
+
+/** Supporting beam's section and level, mm. */
+export const support = {
+  h: given('h_s', '1,0', (f) => f.support.h),
+  b: given('b_s', '1,0', (f) => f.support.b),
+  tw: given('t_w,s', '1,0', (f) => f.support.tw),
+  tf: given('t_f,s', '1,0', (f) => f.support.tf),
+  r: given('r_s', '1,0', (f) => f.support.r),
+  above: given('a_s', '1,0', (f) => f.support.topOfSteel),
+};

@@ -1,0 +1,171 @@
+import type { Dimension } from '../units/dimension.ts';
+import { plain, significant } from '../units/figures.ts';
+import { INCH, KIP, type UnitSystem, unitOf } from '../units/systems.ts';
+import { numberOf, testOf } from './number.ts';
+import type { Tree } from './tree.ts';
+
+/** Figures of a value that later lines use, and of a result that closes a working. */
+export const STEP_FIGURES = 6;
+export const RESULT_FIGURES = 4;
+
+/** A formula in one line of text, with how tightly it binds: sum 1, product 2, power 3, single term 4. */
+export interface Line {
+  readonly text: string;
+  readonly binds: number;
+}
+
+type Mode = 'symbols' | 'numbers';
+/** In metric lines, forces are written in kN when nothing else carries newtons; otherwise all is in N and mm. */
+type ForceUnit = 'kN' | 'N';
+
+const MPA_IN_KSI = KIP / INCH ** 2;
+const raisedDigits = '⁰¹²³⁴⁵⁶⁷⁸⁹';
+const superscript = (exponent: number): string => [...String(exponent)].map((d) => raisedDigits[Number(d)]).join('');
+
+const parenthesised = (line: Line, least: number): string => (line.binds >= least ? line.text : `(${line.text})`);
+
+/** A value as a working states it, in the system's unit. */
+export const quantity = (value: number, dimension: Dimension, system: UnitSystem, figures = STEP_FIGURES): string =>
+  significant(value / unitOf(dimension, system).size, figures);
+
+/** The leaves that stand in a line: steps count as leaves, untaken branches do not. */
+const leavesOf = (tree: Tree, facts: never): readonly Tree[] => {
+  switch (tree.op) {
+    case 'literal':
+    case 'constant':
+    case 'given':
+    case 'found':
+    case 'step':
+    case 'bare':
+      return [tree];
+    case 'pick':
+      return leavesOf(taken(tree, facts), facts);
+    default:
+      return tree.of.flatMap((one) => leavesOf(one, facts));
+  }
+};
+
+const taken = (tree: Tree & { op: 'pick' }, facts: never): Tree =>
+  tree.branches.find(({ when }) => testOf(when)(facts))?.then ?? tree.otherwise;
+
+const forceUnitOf = (tree: Tree, facts: never, result: Dimension): ForceUnit => {
+  const carriers = leavesOf(tree, facts).filter((leaf) => !leaf.dimension.endsWith(',0'));
+  const alike = carriers.every((leaf) => leaf.dimension === '0,1') && (result === '0,1' || result === '1,1');
+  const moments = carriers.every((leaf) => leaf.dimension === '1,1') && result === '1,1';
+  return carriers.length > 0 && (alike || moments) ? 'kN' : 'N';
+};
+
+class Writer {
+  constructor(
+    private readonly facts: never,
+    private readonly system: UnitSystem,
+    private readonly mode: Mode,
+    private readonly force: ForceUnit,
+  ) {}
+
+  write(tree: Tree): Line {
+    switch (tree.op) {
+      case 'literal':
+        return { text: plain(tree.value, 6), binds: 4 };
+      case 'constant':
+      case 'given':
+      case 'step':
+        return this.mode === 'symbols' ? { text: tree.symbol, binds: 4 } : this.leaf(tree);
+      case 'found':
+        return this.mode === 'symbols' ? { text: tree.method, binds: 4 } : this.leaf(tree);
+      case 'times':
+        return this.product(tree.of.map((one) => this.write(one)));
+      case 'over': {
+        const [a, b] = [this.write(tree.of[0]), this.write(tree.of[1])];
+        const top = a.text.includes(' / ') ? parenthesised(a, 3) : parenthesised(a, 2);
+        return { text: `${top} / ${parenthesised(b, 3)}`, binds: 2 };
+      }
+      case 'plus':
+        return { text: tree.of.map((one) => parenthesised(this.write(one), 1)).join(' + '), binds: 1 };
+      case 'minus': {
+        const [a, b] = [this.write(tree.of[0]), this.write(tree.of[1])];
+        return { text: `${parenthesised(a, 1)} − ${parenthesised(b, 2)}`, binds: 1 };
+      }
+      case 'least':
+      case 'most': {
+        const name = tree.op === 'least' ? 'min' : 'max';
+        return { text: `${name}(${tree.of.map((one) => this.write(one).text).join('; ')})`, binds: 4 };
+      }
+      case 'root':
+        return { text: `√(${this.write(tree.of[0]).text})`, binds: 4 };
+      case 'power':
+        return this.power(this.write(tree.of[0]), tree.exponent);
+      case 'bare':
+        return this.mode === 'symbols' ? this.write(tree.of[0]) : this.bare(tree);
+      case 'stress':
+        return this.stress(this.write(tree.of[0]));
+      case 'pick':
+        return this.write(taken(tree, this.facts));
+    }
+  }
+
+  private leaf(tree: Tree): Line {
+    const value = numberOf(tree)(this.facts) / this.sizeOf(tree.dimension);
+    const text = significant(value, STEP_FIGURES);
+    return { text, binds: value < 0 ? 1 : 4 };
+  }
+
+  /** Size of the unit in which numbers of this dimension stand within the line. */
+  private sizeOf(dimension: Dimension): number {
+    if (this.system === 'in-kip' || this.force === 'kN') return unitOf(dimension, this.system).size;
+    return 1;
+  }
+
+  private product(factors: readonly Line[]): Line {
+    const parts = factors.map((one) => {
+      const quotient = one.binds === 2 && one.text.includes(' / ');
+      return parenthesised(one, quotient ? 3 : 2);
+    });
+    const numeric = (text: string) => /^[\d(]/.test(text) && !/[A-Za-zΑ-ω]/.test(text);
+    const text = parts.reduce((left, right) =>
+      this.mode === 'numbers' || numeric(right) ? `${left} × ${right}` : `${left} ${right}`,
+    );
+    return { text, binds: 2 };
+  }
+
+  private power(base: Line, exponent: number): Line {
+    const whole = Number.isInteger(exponent) && exponent > 0;
+    const tight = parenthesised(base, 4);
+    return { text: whole ? `${tight}${superscript(exponent)}` : `${tight}^${exponent}`, binds: 3 };
+  }
+
+  private bare(tree: Tree): Line {
+    return { text: significant(numberOf(tree)(this.facts), STEP_FIGURES), binds: 4 };
+  }
+
+  private stress(line: Line): Line {
+    if (this.mode === 'symbols' || this.system === 'mm-kN') return line;
+    const top = line.text.includes(' / ') ? parenthesised(line, 3) : parenthesised(line, 2);
+    return { text: `${top} / ${significant(MPA_IN_KSI, STEP_FIGURES)}`, binds: 2 };
+  }
+}
+
+/** Power of ten that takes a metric line's N and mm to the unit its value is stated in. */
+const scaleOf = (force: ForceUnit, tree: Tree, facts: never, result: Dimension): string => {
+  if (result !== '0,1' && result !== '1,1') return '';
+  if (force === 'N') return result === '0,1' ? '10³' : '10⁶';
+  const moments = leavesOf(tree, facts).some((leaf) => leaf.dimension === '1,1');
+  return result === '1,1' && !moments ? '10³' : '';
+};
+
+/** The formula in symbols, or with numbers in place; `result` is the dimension whose unit the numbers work out to. */
+export const lineOf = (
+  tree: Tree,
+  facts: never,
+  system: UnitSystem,
+  mode: Mode,
+  result: Dimension = tree.dimension,
+): Line => {
+  const force = system === 'mm-kN' ? forceUnitOf(tree, facts, result) : 'N';
+  const line = new Writer(facts, system, mode, force).write(tree);
+  if (mode === 'symbols' || system === 'in-kip') return line;
+  const scale = scaleOf(force, tree, facts, result);
+  if (!scale) return line;
+  const top = line.text.includes(' / ') ? parenthesised(line, 3) : parenthesised(line, 2);
+  return { text: `${top} / ${scale}`, binds: 2 };
+};

@@ -1,0 +1,175 @@
+import type { Condition, Tree } from './tree.ts';
+
+/** Reads the number of a tree from facts, in N and mm. */
+export type NumberReader = (facts: never) => number;
+type Test = (facts: never) => boolean;
+
+/** Steps are computed once a run, however many checks lean on them. */
+let run = 0;
+let ranAt = new Int32Array(1024);
+let kept = new Float64Array(1024);
+let cells = 0;
+
+/** Starts a run over new facts: what the last run kept is forgotten. */
+export const newRun = (): void => {
+  run = (run + 1) | 0;
+};
+
+const newCell = (): number => {
+  if (cells === kept.length) {
+    const wider = new Float64Array(cells * 2);
+    wider.set(kept);
+    kept = wider;
+    const longer = new Int32Array(cells * 2);
+    longer.set(ranAt);
+    ranAt = longer;
+  }
+  cells += 1;
+  return cells - 1;
+};
+
+const readers = new WeakMap<Tree, NumberReader>();
+
+/** Composes a tree into closures, once; the same tree always gives the same reader. */
+export const numberOf = (tree: Tree): NumberReader => {
+  const known = readers.get(tree);
+  if (known) return known;
+  const made = compose(tree);
+  readers.set(tree, made);
+  return made;
+};
+
+const compose = (tree: Tree): NumberReader => {
+  switch (tree.op) {
+    case 'literal':
+    case 'constant': {
+      const { value } = tree;
+      return () => value;
+    }
+    case 'given':
+      return tree.read;
+    case 'times':
+      return product(tree.of.map(numberOf));
+    case 'plus':
+      return sum(tree.of.map(numberOf));
+    case 'least':
+      return extreme(tree.of.map(numberOf), Math.min);
+    case 'most':
+      return extreme(tree.of.map(numberOf), Math.max);
+    case 'over': {
+      const [a, b] = [numberOf(tree.of[0]), numberOf(tree.of[1])];
+      return (facts) => a(facts) / b(facts);
+    }
+    case 'minus': {
+      const [a, b] = [numberOf(tree.of[0]), numberOf(tree.of[1])];
+      return (facts) => a(facts) - b(facts);
+    }
+    case 'root': {
+      const a = numberOf(tree.of[0]);
+      return (facts) => Math.sqrt(a(facts));
+    }
+    case 'power':
+      return raised(numberOf(tree.of[0]), tree.exponent);
+    // N/mm2 is MPa, so both directions are the same number.
+    case 'bare':
+    case 'stress':
+      return numberOf(tree.of[0]);
+    case 'pick':
+      return chosen(tree.branches, numberOf(tree.otherwise));
+    case 'found': {
+      const [of, solve] = [tree.of.map(numberOf), tree.solve];
+      return (facts) => solve(facts, ...of.map((one) => one(facts)));
+    }
+    case 'step':
+      return remembered(numberOf(tree.of[0]));
+  }
+};
+
+const remembered = (inner: NumberReader): NumberReader => {
+  const cell = newCell();
+  return (facts) => {
+    if (ranAt[cell] === run) return kept[cell]!;
+    const value = inner(facts);
+    ranAt[cell] = run;
+    kept[cell] = value;
+    return value;
+  };
+};
+
+const product = (of: readonly NumberReader[]): NumberReader => {
+  const [a, b, c, d] = of as [NumberReader, NumberReader, NumberReader, NumberReader];
+  if (of.length === 2) return (facts) => a(facts) * b(facts);
+  if (of.length === 3) return (facts) => a(facts) * b(facts) * c(facts);
+  if (of.length === 4) return (facts) => a(facts) * b(facts) * c(facts) * d(facts);
+  return (facts) => {
+    let value = 1;
+    for (const one of of) value *= one(facts);
+    return value;
+  };
+};
+
+const sum = (of: readonly NumberReader[]): NumberReader => {
+  const [a, b] = of as [NumberReader, NumberReader];
+  if (of.length === 2) return (facts) => a(facts) + b(facts);
+  return (facts) => {
+    let value = 0;
+    for (const one of of) value += one(facts);
+    return value;
+  };
+};
+
+const extreme = (of: readonly NumberReader[], better: (a: number, b: number) => number): NumberReader => {
+  const [first, ...rest] = of as [NumberReader, ...NumberReader[]];
+  return (facts) => {
+    let value = first(facts);
+    for (const one of rest) value = better(value, one(facts));
+    return value;
+  };
+};
+
+const raised = (base: NumberReader, exponent: number): NumberReader => {
+  if (exponent === 2) {
+    return (facts) => {
+      const value = base(facts);
+      return value * value;
+    };
+  }
+  return (facts) => base(facts) ** exponent;
+};
+
+const chosen = (branches: readonly { when: Condition; then: Tree }[], otherwise: NumberReader): NumberReader => {
+  const tests = branches.map(({ when }) => testOf(when));
+  const values = branches.map(({ then }) => numberOf(then));
+  return (facts) => {
+    for (let at = 0; at < tests.length; at += 1) if (tests[at]!(facts)) return values[at]!(facts);
+    return otherwise(facts);
+  };
+};
+
+/** Composes a condition into a closure. */
+export const testOf = (condition: Condition): Test => {
+  switch (condition.op) {
+    case 'flag':
+      return condition.read;
+    case 'atMost': {
+      const [a, b] = [numberOf(condition.of[0]), numberOf(condition.of[1])];
+      return (facts) => a(facts) <= b(facts);
+    }
+    case 'below': {
+      const [a, b] = [numberOf(condition.of[0]), numberOf(condition.of[1])];
+      return (facts) => a(facts) < b(facts);
+    }
+    case 'not': {
+      const one = testOf(condition.of[0]);
+      return (facts) => !one(facts);
+    }
+    case 'all': {
+      const of = condition.of.map(testOf);
+      return (facts) => of.every((one) => one(facts));
+    }
+    case 'any': {
+      const of = condition.of.map(testOf);
+      return (facts) => of.some((one) => one(facts));
+    }
+  }
+};

@@ -1,0 +1,6 @@
+import type { Joint } from '../end/schema.ts';
+import { finPlate } from './finPlate.ts';
+import type { JointChecks } from './joint.ts';
+import { webBolts } from './webBolts.ts';
+
+export const joints: Readonly<Record<Joint['kind'], JointChecks>> = { 'fin-plate': finPlate, 'web-bolts': webBolts };

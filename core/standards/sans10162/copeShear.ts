@@ -1,0 +1,44 @@
+import { channelCope, copeLimits, type Gate, uncoped } from '../../end/gates.ts';
+import { type Cut, flag, fy, rectangle, tee, tw, V } from '../../end/given.ts';
+import { atMost, not, over, pick, step, times } from '../../formula/tree.ts';
+import type { StrengthRule, Way } from '../standard.ts';
+import { phi } from './factors.ts';
+import { firstLimit, shearStress } from './shearStress.ts';
+
+const source = { clause: '13.4', basis: 'memory' } as const;
+const mean = flag('option cope-shear: mean', (f) => f.options['cope-shear'] === 'mean');
+
+/** No such section at this end. */
+export const noRectangle: Gate = { when: flag('', (f) => !f.rectangle.here), reason: 'no-cope' };
+export const noTee: Gate = { when: flag('', (f) => !f.tee.here), reason: 'no-cope' };
+
+/**
+ * Shear of a section without two flanges, SANS 10162-1:2011 cl. 13.4 (members without two flanges): elastic distribution, its peak held
+ * to f_s; option `mean` takes the average over the depth. k_v = 5.34 needs both edges held, so beyond the first limit it refers.
+ */
+const way = (of: 'rectangle' | 'tee', cut: Cut, off: Gate): Way => {
+  const slenderness = step('h_o/t_w', over(cut.depth, tw), source);
+  const fs = shearStress(slenderness, fy);
+  return {
+    of,
+    symbol: 'V',
+    load: 'V',
+    demand: V,
+    resistance: step(
+      'V_r',
+      pick([[mean, times(phi, fs, cut.depth, tw)]], over(times(phi, fs, cut.I, cut.t), cut.Q)),
+      source,
+    ),
+    off: [uncoped, off],
+    limits: [
+      channelCope,
+      ...copeLimits,
+      { when: not(atMost(slenderness, firstLimit(fy))), reason: 'slender-cut-web', always: false },
+    ],
+  };
+};
+
+export const copeShear: StrengthRule = {
+  source,
+  ways: [way('rectangle', rectangle, noRectangle), way('tee', tee, noTee)],
+};

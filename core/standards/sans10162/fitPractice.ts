@@ -1,0 +1,162 @@
+import { type Gate, oneColumn } from '../../end/gates.ts';
+import {
+  cb,
+  ct,
+  d,
+  d0,
+  db,
+  dt,
+  eBot,
+  eEnd,
+  eTop,
+  flag,
+  g,
+  h,
+  hp,
+  leg,
+  m,
+  n,
+  p,
+  q,
+  r,
+  rb,
+  rt,
+  support,
+  tf,
+  tp,
+  tw,
+  y1,
+} from '../../end/given.ts';
+import { atMost, constant, least, minus, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
+import type { Length } from '../../units/dimension.ts';
+import type { FitRule } from '../standard.ts';
+
+/** Rules of good practice, no clauses: an end that breaks one is referred, never failed, unless it cannot be built. */
+const source = { clause: 'practice', basis: 'practice' } as const;
+const mm = (length: number) => constant(`${length} mm`, length, '1,0');
+
+const noTop: Gate = { when: flag('', (f) => f.dt === 0), reason: 'no-cope' };
+const noBottom: Gate = { when: flag('', (f) => f.db === 0), reason: 'no-cope' };
+const noSupport: Gate = { when: flag('', (f) => !f.support.here), reason: 'no-support' };
+const outsideSupport: Gate = {
+  when: flag('', (f) => f.g >= (f.support.b - f.support.tw) / 2),
+  reason: 'clear-of-support',
+};
+
+/** Flange and root fillet. */
+const root = step('t_f + r', plus(tf, r), source);
+const plateTop = step('y_p', minus(y1, eTop), source, 'top of the plate');
+const plateFoot = step('y_q', minus(h, plus(y1, times(minus(n, 1), p), eBot)), source, 'foot of the plate, from below');
+
+export const fitPlateDepth: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [
+    {
+      of: 'depth',
+      given: hp,
+      least: step('h_min', times(0.5, minus(h, times(2, plus(tf, r)))), source, 'half the clear web'),
+    },
+    { of: 'top', given: plateTop, least: pick([[flag('', (f) => f.dt > 0), dt]], root) },
+    { of: 'bottom', given: plateFoot, least: pick([[flag('', (f) => f.db > 0), db]], root) },
+  ],
+};
+
+/** A cope clears the last column's holes. */
+const pastHoles = step('c_min', plus(eEnd, times(minus(m, 1), q), over(d0, 2)), source);
+export const fitCopeLength: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [
+    { of: 'top', given: ct, least: pastHoles, off: [noTop] },
+    { of: 'bottom', given: cb, least: pastHoles, off: [noBottom] },
+  ],
+};
+
+const positive = (length: Tree<Length>): Tree<Length> => most(length, mm(0));
+const underTop = step('d_min', positive(minus(plus(support.tf, support.r), support.above)), source);
+const overBottom = step(
+  'd_min',
+  positive(minus(h, minus(support.h, plus(support.tf, support.r, support.above)))),
+  source,
+);
+const noneNeeded = (
+  needed: (f: { support: { tf: number; r: number; h: number; topOfSteel: number }; h: number }) => number,
+): Gate => ({
+  when: flag('', (f) => needed(f) <= 0),
+  reason: 'clear-of-support',
+});
+
+/** Copes reach past flange and fillet, and clear the supporting beam's flanges where the end stands within them. */
+export const fitCopeDepth: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [
+    { of: 'top', given: dt, least: root, off: [noTop] },
+    { of: 'bottom', given: db, least: root, off: [noBottom] },
+    {
+      of: 'top, at the support',
+      given: dt,
+      least: underTop,
+      off: [noSupport, outsideSupport, noneNeeded((f) => f.support.tf + f.support.r - f.support.topOfSteel)],
+    },
+    {
+      of: 'bottom, at the support',
+      given: db,
+      least: overBottom,
+      off: [
+        noSupport,
+        outsideSupport,
+        noneNeeded((f) => f.h - (f.support.h - f.support.tf - f.support.r - f.support.topOfSteel)),
+      ],
+    },
+  ],
+};
+
+export const fitCopeRadius: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [
+    { of: 'top', given: rt, least: mm(10), off: [noTop] },
+    { of: 'bottom', given: rb, least: mm(10), off: [noBottom] },
+  ],
+};
+
+const clearance = (c: Tree<Length>): Tree<Length> =>
+  step('gap', minus(plus(g, c), over(minus(support.b, support.tw), 2)), source, 'past the flange of the support');
+const clearTop = clearance(ct);
+const clearBottom = clearance(cb);
+
+/** Room between a cope's face and the supporting beam's flange. */
+export const fitCopeClearance: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [
+    { of: 'top', given: clearTop, least: mm(10), off: [noSupport, noTop], clash: atMost(clearTop, mm(0)) },
+    { of: 'bottom', given: clearBottom, least: mm(10), off: [noSupport, noBottom], clash: atMost(clearBottom, mm(0)) },
+  ],
+};
+
+export const fitSetback: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [{ of: '', given: g, least: mm(8), most: mm(20) }],
+};
+
+const thinner = pick([[oneColumn, least(tp, tw)]], most(tp, tw));
+const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate'), reason: 'no-weld' };
+
+/** The end turns by bolts ploughing the thinner ply (both plies from two columns up), and the weld outlasts the plate. */
+export const fitRotation: FitRule = {
+  source,
+  breach: 'refer',
+  parts: [
+    {
+      of: 'ply',
+      given: step('t', thinner, source),
+      most: step('t_max', plus(over(d, 2), mm(2)), source),
+      off: [notFinPlate],
+    },
+    { of: 'weld leg', given: leg, least: step('s_min', times(0.625, tp), source), off: [notFinPlate] },
+  ],
+};

@@ -1,0 +1,3 @@
+import type { Standard } from '../standard.ts';
+
+export const verified: Standard['verified'] = {};

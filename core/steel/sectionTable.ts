@@ -1,0 +1,77 @@
+import type { Section } from '../shape/section.ts';
+
+/**
+ * One family of rolled sections as its source lists it. Only what cannot be computed is kept; areas and moduli follow from the dimensions.
+ *
+ * A row reads `label mass h b tf tw r`, with a last word where another list labels the same shape otherwise.
+ */
+export interface SectionTable {
+  readonly family: string;
+  /** What stands before the label in the full designation. */
+  readonly prefix: string;
+  /** Where the family is sold first. */
+  readonly market: string;
+  readonly shape: Section['family'];
+  /** The published table the rows go back to. */
+  readonly source: string;
+  /** mm and kg/m where absent; otherwise inches and lb/ft. */
+  readonly units?: 'in-lb';
+  /** The list whose labels stand in the last word. */
+  readonly otherList?: string;
+  /** The label without its mass names one section only. */
+  readonly sizeNamesOne?: true;
+  readonly rows: string;
+}
+
+/** A section found by name. */
+export interface SectionRecord {
+  /** As this library writes it: `UB 406x178x60`, `IPE 300`, `HEA 200`, `W18x40`, `PFC 200x75x23`. */
+  readonly designation: string;
+  readonly family: string;
+  readonly market: string;
+  /** kg/m. */
+  readonly mass: number;
+  readonly section: Section;
+  /** The published table behind the dimensions. */
+  readonly source: string;
+  /** The label it was asked for by, where that belongs to another list than `source`: `UB 305x165x41` for `UB 305x165x40`. */
+  readonly readAs?: string;
+  /** Whose list that label belongs to: South Africa or Canada. */
+  readonly readFrom?: string;
+}
+
+/** A row of a table: the section, its label and its label in the table's other list. */
+export interface SectionRow {
+  readonly record: SectionRecord;
+  readonly label: string;
+  readonly otherLabel?: string;
+}
+
+const millimetresPerInch = 25.4;
+const kilogramsPerMetre = 0.45359237 / 0.3048;
+
+/** Reads the rows of a table. */
+export const readTable = (table: SectionTable): SectionRow[] =>
+  table.rows
+    .trim()
+    .split('\n')
+    .map((row) => readRow(table, row));
+
+const readRow = (table: SectionTable, row: string): SectionRow => {
+  const [label = '', ...rest] = row.split(' ');
+  const [length, weight] = table.units === 'in-lb' ? [millimetresPerInch, kilogramsPerMetre] : [1, 1];
+  const [mass = 0, h = 0, b = 0, tf = 0, tw = 0, r = 0] = rest.slice(0, 6).map(Number);
+  const [, , , , , , otherLabel] = rest;
+  return {
+    label,
+    ...(otherLabel !== undefined && { otherLabel }),
+    record: {
+      designation: table.prefix + label,
+      family: table.family,
+      market: table.market,
+      mass: mass * weight,
+      section: { family: table.shape, h: h * length, b: b * length, tf: tf * length, tw: tw * length, r: r * length },
+      source: table.source,
+    },
+  };
+};

@@ -1,0 +1,46 @@
+/** Narrow no-break space: groups the digits of long numbers, as on a drawing. */
+export const THIN = '\u202f';
+export const MINUS = '\u2212';
+
+/** Groups the whole digits in threes from five digits up. */
+const grouped = (digits: string): string => {
+  const [whole = '', fraction] = digits.split('.');
+  const spaced = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN) : whole;
+  return fraction === undefined ? spaced : `${spaced}.${fraction}`;
+};
+
+const signed = (value: number, digits: string): string =>
+  (value < 0 && Number(digits) !== 0 ? MINUS : '') + grouped(digits);
+
+/** A value to so many significant digits, without exponent; `trim` drops closing zeros. */
+export const significant = (value: number, digits: number, trim = true): string => {
+  const size = Math.abs(value);
+  if (size === 0) return '0';
+  const magnitude = Math.floor(Math.log10(Number(size.toExponential(digits - 1))));
+  const places = Math.max(0, digits - 1 - magnitude);
+  if (places > 20) return '0';
+  const text = size.toFixed(places);
+  return signed(value, trim && text.includes('.') ? text.replace(/\.?0+$/, '') : text);
+};
+
+/** A value to a fixed number of places. */
+export const fixed = (value: number, places: number): string => signed(value, Math.abs(value).toFixed(places));
+
+/** A dimension as a drawing writes it: up to `places` places, closing zeros dropped. */
+export const plain = (value: number, places = 2): string => {
+  const text = Math.abs(value).toFixed(places);
+  return signed(value, text.includes('.') ? text.replace(/\.?0+$/, '') : text);
+};
+
+/** A reaction at which something fails, to 0.1 and rounded down, so that print never promises more than was computed. */
+export const roundedDown = (value: number, places = 1): string => {
+  const step = 10 ** places;
+  // Values that sit on a step up to rounding noise stay on it.
+  return fixed(Math.floor(value * step + 1e-9) / step, places);
+};
+
+/** A ratio to the nearest 0.01; one above 1 never prints below 1.01, one that holds never above 1.00. */
+export const ratio = (value: number): string => {
+  if (value > 1) return fixed(Math.max(value, 1.01), 2);
+  return fixed(value, 2);
+};

@@ -30,7 +30,7 @@ const byName: ReadonlyMap<string, BoltSize> = new Map(sizes.map((size) => [size.
 export const boltSizeNames: readonly string[] = [...byName.keys()];
 
 /** The bolt size of that name, or the three nearest names. Read as people write it: `M20`, `m 20`, `3/4`, `3/4"`, `1 1/8 in`. */
-export const findBolt = (name: string): BoltSize | Unknown =>
+export const findBoltSize = (name: string): BoltSize | Unknown =>
   byName.get(name) ?? byName.get(plain(name)) ?? { nearest: nearest(name, boltSizeNames, 3) };
 
 const plain = (name: string): string =>

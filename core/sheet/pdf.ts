@@ -29,7 +29,10 @@ const stampOf = (date: string | undefined): string => {
 /** Control points of the cubic curve that follows an arc of at most a quarter circle within 0.03 %. */
 const quarter = (centre: Spot, radius: number, from: number, to: number): [Spot, Spot, Spot] => {
   const k = (4 / 3) * Math.tan((to - from) / 4) * radius;
-  const on = (angle: number): Spot => ({ x: centre.x + radius * Math.cos(angle), y: centre.y + radius * Math.sin(angle) });
+  const on = (angle: number): Spot => ({
+    x: centre.x + radius * Math.cos(angle),
+    y: centre.y + radius * Math.sin(angle),
+  });
   const [a, b] = [on(from), on(to)];
   return [
     { x: a.x - k * Math.sin(from), y: a.y + k * Math.cos(from) },
@@ -63,6 +66,7 @@ class Writer {
   private fill = '';
   private face = '';
   private size = 0;
+  private white = false;
 
   constructor(private readonly doc: jsPDF) {}
 
@@ -99,20 +103,20 @@ class Writer {
   }
 
   private ink(colour: 'black' | 'white'): void {
-    if (colour !== this.fill) this.doc.setFillColor(colour === 'black' ? 0 : 255);
+    if (colour !== this.fill) this.doc.setFillColor(colour === 'black' ? '#000' : '#fff');
     this.fill = colour;
   }
 
-  private finish({ width, dash, fill, closed, evenOdd }: PathMark | CircleMark): void {
+  private finish({ width, fill, closed, evenOdd }: PathMark): void {
     if (closed) this.doc.close();
-    if (fill) this.ink(fill);
-    if (width !== undefined) this.stroke(width, dash);
     if (fill && width !== undefined) this.doc.fillStroke();
     else if (fill) evenOdd ? this.doc.fillEvenOdd() : this.doc.fill();
     else this.doc.stroke();
   }
 
-  private text({ face, size, text, x, y, turned }: TextMark): void {
+  private text({ face, size, text, x, y, turned, white }: TextMark): void {
+    if (white !== this.white) this.doc.setTextColor(white ? '#fff' : '#000');
+    this.white = white;
     if (face.name !== this.face) this.doc.setFont(face.name, 'normal');
     if (size !== this.size) this.doc.setFontSize(size);
     this.face = face.name;
@@ -142,7 +146,16 @@ class Writer {
     const right = { x: centre.x + radius, y: centre.y };
     const left = { x: centre.x - radius, y: centre.y };
     const arc = { radius, clockwise: true };
-    this.path({ ...mark, kind: 'path', from: right, to: [{ ...left, ...arc }, { ...right, ...arc }], closed: true });
+    this.path({
+      ...mark,
+      kind: 'path',
+      from: right,
+      to: [
+        { ...left, ...arc },
+        { ...right, ...arc },
+      ],
+      closed: true,
+    });
   }
 
   private hatch({ outline, lines, width }: HatchMark): void {

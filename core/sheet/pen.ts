@@ -30,6 +30,8 @@ export interface TextStyle {
   readonly bold?: boolean;
   readonly anchor?: 'start' | 'middle' | 'end';
   readonly turned?: boolean;
+  /** On black. */
+  readonly white?: boolean;
 }
 
 export interface TextMark {
@@ -40,6 +42,7 @@ export interface TextMark {
   readonly face: Face;
   readonly size: number;
   readonly turned: boolean;
+  readonly white: boolean;
 }
 
 export interface PathMark extends PathStyle {
@@ -160,7 +163,7 @@ export class Pen {
   /** Sets a line on its base line at x, y; returns its width. */
   text(x: number, y: number, text: string | readonly Run[], style: TextStyle): number {
     const width = this.width(text, style);
-    const { anchor = 'start', turned = false } = style;
+    const { anchor = 'start', turned = false, white = false } = style;
     const back = anchor === 'middle' ? width / 2 : anchor === 'end' ? width : 0;
     let along = -back;
     for (const run of runsOf(text)) {
@@ -170,7 +173,7 @@ export class Pen {
       const shown = this.covered(run.text, face);
       const down = style.size * POINT * (run.sub ? LOWERED : run.sup ? -RAISED : 0);
       const at = turned ? { x: x + down, y: y - along } : { x: x + along, y: y + down };
-      this.put({ kind: 'text', ...at, text: shown, face, size, turned });
+      this.put({ kind: 'text', ...at, text: shown, face, size, turned, white });
       along += (face.width(shown) * size * POINT) / 1000;
     }
     return width;

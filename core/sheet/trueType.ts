@@ -64,6 +64,8 @@ const words = (...values: number[]): Uint8Array => {
   return out;
 };
 
+const asciiOf = (text: string): Uint8Array => Uint8Array.from(text, (one) => one.charCodeAt(0));
+
 const changed = (table: Uint8Array, at: number, value: number): Uint8Array => {
   const out = table.slice();
   viewOf(out).setUint16(at, value);
@@ -107,7 +109,7 @@ const fileOf = (tables: Tables): Uint8Array => {
   let offset = header.length;
   const bodies = entries.map(([tag, table], i) => {
     const at = 12 + 16 * i;
-    header.set([...tag].map((letter) => letter.charCodeAt(0)), at);
+    header.set(asciiOf(tag), at);
     view.setUint32(at + 8, offset);
     view.setUint32(at + 12, table.length);
     const padded = joined([table, new Uint8Array((4 - (table.length % 4)) % 4)]);
@@ -145,7 +147,7 @@ export const openFace = (name: string, file: Uint8Array): Face => {
         ['hmtx', words(...kept.flatMap((glyph) => [advance(glyph), hmtx.getInt16(4 * glyph + 2)]))],
         ['loca', words(...offsets.flatMap((offset) => [offset >>> 16, offset]))],
         ['maxp', changed(table('maxp'), 4, kept.length)],
-        ['name', words(0, 0, 6)],
+        ['name', joined([words(0, 1, 18, 1, 0, 0, 6, name.length, 0), asciiOf(name)])],
         ['post', table('post').slice(0, 32)],
       ]),
     );

@@ -140,6 +140,9 @@ const used = (needed: number, there: number): number => {
   return needed > 0 ? Number.POSITIVE_INFINITY : 0;
 };
 
+/** Sizes that meet a bound exactly keep meeting it after conversion from inches. */
+const CONVERSION_NOISE = 1e-9;
+
 /** One comparison: the nearer of its bounds stands as the requirement. */
 const evaluateFitPart = (part: FitPartPlan, breach: 'fails' | 'refer', facts: Facts, into: Result): void => {
   const given = part.given(facts as never);
@@ -150,7 +153,7 @@ const evaluateFitPart = (part: FitPartPlan, breach: 'fails' | 'refer', facts: Fa
   into.resistance = given;
   into.demand = (low ? part.least : part.most)?.(facts as never) ?? Number.NaN;
   into.utilisation = low ? toLeast : toMost;
-  if (into.utilisation <= 1) {
+  if (into.utilisation <= 1 + CONVERSION_NOISE) {
     into.state = 'holds';
     into.reason = '';
   } else {

@@ -55,7 +55,7 @@ const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Wor
     const value = `${plain(toSystem(V, '0,1', end.units), 1)} ${unitOf('0,1', end.units).name}`;
     say('reaction-from-share', { share: plain(end.reaction.ofWebShear, 4), value }, 'reaction');
   }
-  if (resolved.readAs) say('section-read-as', { value: resolved.designation }, 'beam.section');
+  if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
   for (const { code, when } of plan.standard.notes) if (testOf(when)(resolved.facts as never)) say(code);
   return notes;
 };

@@ -15,8 +15,8 @@ export interface Resolved {
   readonly section: Section;
   /** Designation of the section, empty for own sizes. */
   readonly designation: string;
-  /** Label under which the section was found, where it is not its designation. */
-  readonly readAs: string;
+  /** The label of another list under which the section was found; null where its own name was given. */
+  readonly readAs: { readonly label: string; readonly list: string } | null;
   readonly facts: Facts;
 }
 
@@ -29,7 +29,7 @@ class Resolver {
     private readonly standard: Standard,
   ) {}
 
-  section(): { section: Section; designation: string; readAs: string } | undefined {
+  section(): { section: Section; designation: string; readAs: Resolved['readAs'] } | undefined {
     const { section } = this.end.beam;
     if (typeof section === 'string') {
       const found = findSection(section);
@@ -37,7 +37,8 @@ class Resolver {
         this.faults.push(fault('unknown-section', 'beam.section', section, found.nearest));
         return undefined;
       }
-      return { section: found.section, designation: found.designation, readAs: found.readAs ?? '' };
+      const { section: dimensions, designation, readAs, readFrom } = found;
+      return { section: dimensions, designation, readAs: readAs ? { label: readAs, list: readFrom ?? '' } : null };
     }
     const k = lengthSize(this.end);
     const own: Section = {
@@ -50,7 +51,7 @@ class Resolver {
     };
     const wrong = sectionFaults(this.end, own);
     this.faults.push(...wrong);
-    return wrong.length > 0 ? undefined : { section: own, designation: '', readAs: '' };
+    return wrong.length > 0 ? undefined : { section: own, designation: '', readAs: null };
   }
 
   strength(grade: GradeGiven, thickness: number, path: string): { fy: number; fu: number } {

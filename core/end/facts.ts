@@ -85,8 +85,6 @@ export interface Facts {
   /** Hole diameter for net areas, d'. */
   readonly dn: number;
   readonly threadsIn: boolean;
-  /** Shear planes through each bolt. */
-  readonly planes: number;
   readonly z: number;
   readonly z1: number;
   readonly tp: number;

@@ -125,7 +125,6 @@ export const factsOf = (
     d0,
     dn: strengths.dn,
     threadsIn: bolts.threads !== 'out',
-    planes: 1,
     z: g + eEnd + ((m - 1) * q) / 2,
     z1: g + eEnd,
     tp: ply.thickness * k,

@@ -16,8 +16,8 @@ export interface Limit extends Gate {
 
 export const coped = flag('the end is coped', (f) => f.rectangle.here || f.tee.here);
 export const oneBolt = flag('one bolt alone', (f) => f.n === 1 && f.m === 1);
-export const oneRow = flag('one bolt row', (f) => f.n === 1);
-export const oneColumn = flag('one bolt column', (f) => f.m === 1);
+export const oneRow = flag('', (f) => f.n === 1);
+export const oneColumn = flag('', (f) => f.m === 1);
 export const noColumnInCope = flag('an intact flange lies above every column', (f) => f.mTop === 0);
 export const isChannel = flag('a channel', (f) => f.channel);
 const noTie = flag('no tie force', (f) => f.T === 0);

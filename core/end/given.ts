@@ -51,7 +51,6 @@ export const d = given('d', '1,0', (f) => f.d);
 export const d0 = given('d_0', '1,0', (f) => f.d0);
 /** Hole diameter for net areas. */
 export const dn = given('d′', '1,0', (f) => f.dn);
-export const planes = given('n_s', '0,0', (f) => f.planes);
 /** Support's face to the centroid of the bolts, and to the first column. */
 export const z = given('z', '1,0', (f) => f.z);
 export const z1 = given('z_1', '1,0', (f) => f.z1);

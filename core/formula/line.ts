@@ -92,7 +92,7 @@ class Writer {
         return { text: `${name}(${tree.of.map((one) => this.write(one).text).join('; ')})`, binds: 4 };
       }
       case 'root':
-        return { text: `√(${this.write(tree.of[0]).text})`, binds: 4 };
+        return this.root(this.write(tree.of[0]));
       case 'power':
         return this.power(this.write(tree.of[0]), tree.exponent);
       case 'bare':
@@ -126,6 +126,10 @@ class Writer {
       this.mode === 'numbers' || numeric(right) ? `${left} × ${right}` : `${left} ${right}`,
     );
     return { text, binds: 2 };
+  }
+
+  private root(inner: Line): Line {
+    return { text: inner.binds === 4 && /^[\d.]+$/.test(inner.text) ? `√${inner.text}` : `√(${inner.text})`, binds: 4 };
   }
 
   private power(base: Line, exponent: number): Line {
@@ -166,6 +170,5 @@ export const lineOf = (
   if (mode === 'symbols' || system === 'in-kip') return line;
   const scale = scaleOf(force, tree, facts, result);
   if (!scale) return line;
-  const top = line.text.includes(' / ') ? parenthesised(line, 3) : parenthesised(line, 2);
-  return { text: `${top} / ${scale}`, binds: 2 };
+  return { text: `${parenthesised(line, 2)} / ${scale}`, binds: 2 };
 };

@@ -38,7 +38,7 @@ const said = (condition: Condition, met: boolean, facts: never, system: UnitSyst
       const [left, right] = condition.of.map((one) => {
         const text = lineOf(one, facts, system, 'symbols').text;
         const value = quantity(numberOf(one)(facts), one.dimension, system);
-        return one.op === 'literal' ? value : `${text} = ${value}`;
+        return one.op === 'literal' || one.op === 'constant' ? value : `${text} = ${value}`;
       });
       const sign = met ? relation[condition.op] : condition.op === 'atMost' ? '>' : '≥';
       return `${left} ${sign} ${right}`;
@@ -69,7 +69,6 @@ class Reader {
         this.visitStep(tree);
         return;
       case 'found':
-        notes.push(tree.method);
         for (const one of tree.of) this.visit(one, notes);
         return;
       default:

@@ -118,7 +118,7 @@ export const commonwealth: Words = {
   },
   notes: {
     'reaction-from-share': 'The reaction is {share} of the shear of the full section: {value}.',
-    'section-read-as': 'The section was read as {value}.',
+    'section-read-as': '{label} ({list}) was read as {value}.',
     'two-column-block':
       "With two columns this form's nominal strength equals the present US one, but φ 0.90 stands where that takes 0.75: the design value is a fifth higher. Option web-block: cautious takes 0.3.",
     'weld-slimmer-than-plate': 'The weld is sized for V z; a leg below 0.625 t_p cannot make the plate yield first.',

@@ -19,7 +19,12 @@ export const generalBlock = ({ Agv, Anv, Ant }: Block, fy: Tree<Stress>, fu: Tre
 };
 
 const copedBlock = ({ Agv, Anv, Ant }: Block) => {
-  const pull = step('T', times(share, phi, Ant, fu), source, 'coped form: part of the tension plane');
+  const pull = step(
+    'T',
+    times(share, phi, Ant, fu),
+    source,
+    'where the flange is cut away, this share of the tension plane counts',
+  );
   return step('R_r', least(plus(pull, times(0.6, phi, Agv, fy)), plus(pull, times(0.6, phi, Anv, fu))), source);
 };
 

@@ -1,8 +1,8 @@
 import { elasticForce } from '../../end/boltGroup.ts';
 import { oneBolt } from '../../end/gates.ts';
-import { d, flag, fu, fub, fup, n, p, planes, tp, tw } from '../../end/given.ts';
+import { d, flag, fu, fub, fup, n, p, tp, tw } from '../../end/given.ts';
 import { centreForce } from '../../end/instantaneousCentre.ts';
-import { atMost, constant, minus, most, over, pick, squared, step, type Tree, times } from '../../formula/tree.ts';
+import { all, atMost, constant, minus, most, over, pick, squared, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force, Length, Stress } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiB, phiBr } from './factors.ts';
@@ -18,13 +18,22 @@ const threadsIn = flag('threads in the shear plane', (f) => f.threadsIn);
 const area = step('A_b', over(times(constant('π', Math.PI), squared(d)), 4));
 const length = step('L', times(minus(n, 1), p));
 
-/** 0.70 where threads lie in a shear plane. */
-const threads = pick([[threadsIn, constant('k_t', 0.7)]], constant('k_t', 1));
+const plainBolt = times(0.6, phiB, area, fub);
 
 /** Long joints, L > 15 d. */
-const long = step(
-  'k_L',
-  pick([[atMost(length, times(15, d)), constant('k_L', 1)]], most(minus(1.075, times(0.005, over(length, d))), 0.75)),
+const long = step('k_L', most(minus(1.075, times(0.005, over(length, d))), 0.75), shear);
+
+/** One bolt in one plane: 0.70 where threads lie in it, less in long joints. */
+export const boltResistance = step(
+  'V_r',
+  pick(
+    [
+      [all(threadsIn, atMost(length, times(15, d))), times(plainBolt, 0.7)],
+      [threadsIn, times(plainBolt, 0.7, long)],
+      [atMost(length, times(15, d)), plainBolt],
+    ],
+    times(plainBolt, long),
+  ),
   shear,
 );
 
@@ -37,13 +46,14 @@ export const boltShear: StrengthRule = {
       symbol: 'R_max',
       load: 'V',
       demand: pick([[byCentre, centreForce]], elasticForce),
-      resistance: step('V_r', times(0.6, phiB, area, fub, threads, long, planes), shear),
+      resistance: boltResistance,
       unbounded: oneBolt,
     },
   ],
 };
 
-const bearingOn = (t: Tree<Length>, fu: Tree<Stress>): Tree<Force> => step('B_r', times(3, phiBr, t, d, fu), bearing);
+export const bearingOn = (t: Tree<Length>, fu: Tree<Stress>): Tree<Force> =>
+  step('B_r', times(3, phiBr, t, d, fu), bearing);
 
 /** Bearing at one bolt, cl. 13.10; the force is the elastic one under either option. */
 const rule = (t: Tree<Length>, fu: Tree<Stress>): StrengthRule => ({
@@ -62,4 +72,3 @@ const rule = (t: Tree<Length>, fu: Tree<Stress>): StrengthRule => ({
 
 export const webBearing = rule(tw, fu);
 export const plateBearing = rule(tp, fup);
-export { area as boltArea, bearingOn, long, threads };

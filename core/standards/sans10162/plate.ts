@@ -36,7 +36,7 @@ const Q = step(
   'Q',
   pick(
     [
-      [atMost(lambda, 0.7), constant('Q', 1)],
+      [atMost(lambda, 0.7), constant('1', 1)],
       [atMost(lambda, 1.41), minus(1.34, times(0.486, lambda))],
     ],
     over(1.3, squared(lambda)),

@@ -27,7 +27,7 @@ const along = ({ t, edge, next }: AlongTear, fy: Tree<Stress>, fu: Tree<Stress>)
     least(times(0.6, phi, fy, 2, t, L), times(0.6, phi, fu, 2, t, Ln));
   const toEdge = step('R_edge', planes(edge.L, edge.Ln), practice, 'to the edge');
   const toNext = step('R_next', planes(next.L, next.Ln), practice, 'to the next column');
-  return step('R_r', pick([[oneColumn, toEdge]], least(toEdge, toNext)), practice);
+  return step('R_r', pick([[oneColumn, planes(edge.L, edge.Ln)]], least(toEdge, toNext)), practice);
 };
 
 export const webTearout: StrengthRule = {

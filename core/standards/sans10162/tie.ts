@@ -1,13 +1,13 @@
 import { N } from '../../end/boltGroup.ts';
 import { type Gate, noTieForce, singleRow } from '../../end/gates.ts';
-import { dn, flag, fu, fub, fup, fy, fyp, ho, hp, n, planes, T, tp, tw } from '../../end/given.ts';
+import { dn, flag, fu, fup, fy, fyp, ho, hp, n, T, tp, tw } from '../../end/given.ts';
 import { platePulled, webPulled } from '../../end/tearPaths.ts';
 import { minus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { generalBlock } from './block.ts';
-import { bearingOn, boltArea, long, threads } from './bolts.ts';
-import { phi, phiB } from './factors.ts';
+import { bearingOn, boltResistance } from './bolts.ts';
+import { phi } from './factors.ts';
 import { filletLine } from './weld.ts';
 
 const source = { clause: '13.11, 13.12, 13.2', basis: 'memory' } as const;
@@ -26,7 +26,7 @@ const netTension = (t: Tree<Length>, depth: Tree<Length>, fu: Tree<Stress>) =>
 
 const noWeld: Gate = { when: flag('no weld', (f) => f.kind === 'web-bolts'), reason: 'no-weld' };
 
-const bolts = step('T_r', times(N, 0.6, phiB, boltArea, fub, threads, long, planes), source);
+const bolts = step('T_r', times(N, boltResistance), source);
 
 /**
  * Tie force along the beam, acting alone: bolts in shear shared evenly, bearing, a block pulled out to the end, net tension;

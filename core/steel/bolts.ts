@@ -34,14 +34,15 @@ export const findBoltSize = (name: string): BoltSize | Unknown =>
   byName.get(name) ?? byName.get(plain(name)) ?? { nearest: nearest(name, boltSizeNames, 3) };
 
 const plain = (name: string): string =>
-  name
-    .slice(0, 20)
-    .trim()
-    .toUpperCase()
-    .replace(/\s*(?:"|″|''|IN\.?|INCH)$/, '')
-    .replace(/^M\s+/, 'M')
-    .replace(/^(\d+)(?:\s+|\s*-\s*)(?=\d)/, '$1-')
-    .replace(/\s*\/\s*/, '/');
+  name.length > 20
+    ? ''
+    : name
+        .trim()
+        .toUpperCase()
+        .replace(/\s*(?:"|″|''|IN\.?|INCH)$/, '')
+        .replace(/^M\s+/, 'M')
+        .replace(/^(\d+)(?:\s+|\s*-\s*)(?=\d)/, '$1-')
+        .replace(/\s*\/\s*/, '/');
 
 /**
  * Least tensile strength f_u of a bolt of the given property class and diameter in mm, MPa (ISO 898-1). Undefined for other classes and

@@ -67,7 +67,8 @@ const distance = (word: Parts, name: Parts): number => {
 /** Letters to add, drop or change to turn one word into the other. */
 const edits = (a: string, b: string): number => {
   if (a === b) return 0;
-  const row = Array.from(b, (_, j) => j + 1);
+  const row: number[] = [];
+  for (let j = 0; j < b.length; j++) row.push(j + 1);
   for (let i = 0; i < a.length; i++) {
     let [left, diagonal] = [i + 1, i];
     for (let j = 0; j < b.length; j++) {

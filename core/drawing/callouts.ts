@@ -43,6 +43,7 @@ const radii = (it: Facts, words: DrawingWords): Callout[] => {
         end: 'arrow',
         variants: [[[note('R'), { text: length(given, words.units), role: 'size', path }]]],
         near: { x: cut.length * 0.72, y: level(cut.depth * 0.55) },
+        onBeam: false,
         align: 'end',
       },
     ];
@@ -66,6 +67,7 @@ const bolts = (it: Facts, words: DrawingWords, right: number): Callout => {
     end: 'arrow',
     variants: [[[note(bolt)], [second(hole)]]],
     near: { x: (plateBox(it).right + right) / 2, y: rowY(it, middle) - it.d },
+    onBeam: true,
     align: 'start',
   };
 };
@@ -81,6 +83,7 @@ const plate = (it: Facts, words: DrawingWords, right: number): Callout => {
     end: 'dot',
     variants: [[[note(`${words.plate} ${length(it.tp, words.units)}`)], [second('far side')]]],
     near: { x: (edge + right) / 2, y: top + (bottom - top) * 0.62 },
+    onBeam: true,
     align: 'start',
   };
 };
@@ -100,6 +103,7 @@ const section = (it: Facts, words: DrawingWords, right: number): Callout => {
       [name, [second(sizes.slice(0, 2).join(', '))], [second(sizes[2]!)]],
     ],
     near,
+    onBeam: true,
     align: 'end',
   };
 };

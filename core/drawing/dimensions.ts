@@ -43,10 +43,7 @@ const maker =
     const line: Line =
       path === undefined
         ? [{ text: `(${text})`, role: 'derived' }]
-        : [
-            ...(spaces > 1 ? [{ text: `${spaces} ×`, role: 'note' } as const] : []),
-            { text, role: 'size', path },
-          ];
+        : [...(spaces > 1 ? [{ text: `${spaces} ×`, role: 'note' } as const] : []), { text, role: 'size', path }];
     return { ...given, value, line };
   };
 
@@ -87,9 +84,7 @@ const upright = (it: Facts, make: Make, box: Box): Dimension[] => {
   const rows = [make({ axis: 'y', from: top, to: row(it.y1), at: at(2), path: 'joint.firstRow' })];
   if (it.n > 1) {
     const spaces = it.n - 1;
-    rows.push(
-      make({ axis: 'y', from: row(it.y1), to: row(it.yn), at: at(2), path: 'joint.bolts.pitch', spaces }),
-    );
+    rows.push(make({ axis: 'y', from: row(it.y1), to: row(it.yn), at: at(2), path: 'joint.bolts.pitch', spaces }));
   }
   const left = it.ct > 0 || it.cb > 0 ? [make({ axis: 'y', from: cutTop, to: cutBottom, at: at(3) })] : [];
   return [...depths, ...rows, ...left];
@@ -120,9 +115,7 @@ const plateWidths = (it: Facts, make: Make, box: Box): Dimension[] => {
   ];
   if (it.m > 1) {
     const spaces = it.m - 1;
-    chain.push(
-      make({ axis: 'x', from: column(0), to: column(it.m - 1), at, room, path: 'joint.bolts.gauge', spaces }),
-    );
+    chain.push(make({ axis: 'x', from: column(0), to: column(it.m - 1), at, room, path: 'joint.bolts.gauge', spaces }));
   }
   const edge: Point = { x: plate.right, y: plate.bottom };
   chain.push(make({ axis: 'x', from: column(it.m - 1), to: edge, at, room, path: `${fieldOfPlate(it)}.edge` }));

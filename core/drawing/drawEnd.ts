@@ -2,7 +2,7 @@ import type { Facts } from '../end/facts.ts';
 import { centreLines, holes } from './bolts.ts';
 import { callouts, weldMark } from './callouts.ts';
 import { dimensions } from './dimensions.ts';
-import type { Box, Drawing, Line, Stroke } from './drawing.ts';
+import type { Box, Drawing, Line } from './drawing.ts';
 import { elevation } from './outline.ts';
 import { plateBox, plateEdges } from './plate.ts';
 import { sentences } from './sentences.ts';
@@ -21,16 +21,11 @@ const LEAST_BEYOND = 110;
 export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
   const right = drawnLength(facts);
   const box = pieceBox(facts, right);
-  const { h, support } = facts;
+  const { h } = facts;
   return {
     box,
-    strokes: [
-      ...supportSection(facts),
-      ...plateEdges(facts),
-      ...plateAtFace(facts),
-      ...elevation(facts, right),
-      ...centreLines(facts),
-    ],
+    beam: { left: 0, top: 0, right, bottom: h },
+    strokes: [...supportSection(facts), ...plateEdges(facts), ...elevation(facts, right), ...centreLines(facts)],
     holes: holes(facts),
     breaks: [{ x: right, top: 0, bottom: h }],
     dimensions: [
@@ -46,7 +41,11 @@ export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
     ],
     callouts: callouts(facts, words, right),
     weld: weldMark(facts, words),
-    face: { x: -facts.g, ...faceSpan(facts), line: [{ text: support.here ? 'face of web' : 'support face', role: 'second' }] },
+    face: {
+      x: -facts.g,
+      ...faceSpan(facts),
+      line: [{ text: 'support face', role: 'second' }],
+    },
     reaction: reactionLine(facts, words),
     sentences: sentences(facts, words),
   };
@@ -65,12 +64,6 @@ const pieceBox = (it: Facts, right: number): Box => {
     right: Math.max(right, support?.right ?? 0),
     bottom: Math.max(it.h, plate.bottom, support?.bottom ?? 0),
   };
-};
-
-/** The plate's edge along the support's face, where the weld runs. */
-const plateAtFace = (it: Facts): Stroke[] => {
-  const { left: x, top, bottom } = plateBox(it);
-  return [{ kind: 'outline', from: { x, y: top }, to: [{ x, y: bottom }] }];
 };
 
 const reactionLine = (it: Facts, { units }: DrawingWords): Line => [

@@ -99,6 +99,8 @@ export interface Callout {
   readonly variants: readonly (readonly Line[])[];
   /** Where the words stand best. */
   readonly near: Point;
+  /** True for words that should stand on the beam, not beside it. */
+  readonly onBeam: boolean;
   readonly align: 'start' | 'end';
 }
 
@@ -125,6 +127,8 @@ export interface Box {
 export interface Drawing {
   /** Box of the piece and of the support's section, without dimensions. */
   readonly box: Box;
+  /** Box of the beam alone. */
+  readonly beam: Box;
   readonly strokes: readonly Stroke[];
   readonly holes: readonly Circle[];
   readonly breaks: readonly Break[];

@@ -17,6 +17,8 @@ const WORDS = 1000;
 /** A leader through words, and over a line of weight 1. */
 const LEADER_WORDS = 120;
 const LEADER_LINE = 0.12;
+/** Share of a leader at its end that is not looked at. */
+const ENDS = 0.08;
 
 interface Segment {
   readonly ax: number;
@@ -48,7 +50,9 @@ export const createGround = (): Ground => {
       return sum;
     },
     crossing: (from, to) => {
-      const leader: Segment = { ax: from.x, ay: from.y, bx: to.x, by: to.y, weight: 0, owner: undefined };
+      // A leader ends on the line that it names.
+      const end = { x: to.x - (to.x - from.x) * ENDS, y: to.y - (to.y - from.y) * ENDS };
+      const leader: Segment = { ax: from.x, ay: from.y, bx: end.x, by: end.y, weight: 0, owner: undefined };
       let sum = 0;
       for (const it of boxes) if (meets(leader, it)) sum += LEADER_WORDS;
       for (const it of segments) if (cross(leader, it)) sum += LEADER_LINE * it.weight;

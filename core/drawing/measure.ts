@@ -16,7 +16,9 @@ const WIDTHS: readonly (readonly [string, number])[] = [
   ['wMmW%@', 755],
 ];
 
-const byCharacter = new Map(WIDTHS.flatMap(([signs, width]) => [...signs].map((sign) => [sign, width / 1000] as const)));
+const byCharacter = new Map(
+  WIDTHS.flatMap(([signs, width]) => [...signs].map((sign) => [sign, width / 1000] as const)),
+);
 
 /** The width that IBM Plex Sans Condensed takes, within some hundredths: for pens that have no font of their own to ask. */
 export const condensed: Measure = (text, size) => {

@@ -1,0 +1,139 @@
+import type { Box, Dimension, Drawing, Point } from './drawing.ts';
+import { layExtensions } from './extensions.ts';
+import { intoLanes, type Placed } from './lanes.ts';
+import { CAPITAL, drawLine, keepOff, type Pad, setLine, widthOf } from './pad.ts';
+
+const LINE_WEIGHT = 9;
+const TICK_WEIGHT = 12;
+/** In text heights: half-length of the oblique stroke, the free space beside a value in its line, a line drawn on beyond its end. */
+const TICK = 0.3;
+const GAP = 0.25;
+const ON = 0.85;
+
+/** All dimensions: extension lines, dimension lines with oblique strokes, values. */
+export const layDimensions = (pad: Pad, { dimensions }: Drawing): Placed[] => {
+  const placed = intoLanes(pad, dimensions);
+  layExtensions(pad, placed);
+  for (const it of placed) keepOff(pad, [pointOn(it, startOf(it)), pointOn(it, endOf(it))], LINE_WEIGHT, it);
+  layTicks(pad, placed);
+  const fits = (it: Placed): boolean => candidates(pad, it)[0]!.manner === 'in';
+  for (const it of [...placed.filter(fits), ...placed.filter((one) => !fits(one))]) {
+    layValue(pad, it);
+  }
+  return placed;
+};
+
+/** `in` its line's gap (or above it), on the line drawn `on` beyond an end, or `beside` it. */
+interface Spot {
+  readonly manner: 'in' | 'on' | 'beside';
+  /** Middle of the value along the line, and its distance across from the line. */
+  readonly along: number;
+  readonly across: number;
+  readonly cost: number;
+}
+
+const layValue = (pad: Pad, it: Placed): void => {
+  const { dimension } = it;
+  let best: Spot | undefined;
+  let least = Number.POSITIVE_INFINITY;
+  for (const spot of candidates(pad, it)) {
+    if (spot.cost >= least) continue;
+    const cost = spot.cost + pad.ground.cost(valueBox(pad, it, spot), it, least - spot.cost);
+    if (cost < least) [best, least] = [spot, cost];
+  }
+  if (best === undefined) return;
+  drawOwnLine(pad, it, best);
+  const width = widthOf(pad, dimension.line);
+  const { x, y } = spotPoint(it, best);
+  const drop = (CAPITAL / 2) * pad.em;
+  if (dimension.axis === 'y' && pad.values === 'parallel') {
+    setLine(pad, 'size', dimension.line, { x: x + drop, y: y + width / 2 }, -90);
+  } else {
+    setLine(pad, 'size', dimension.line, { x: x - width / 2, y: y + drop });
+  }
+};
+
+/** Places for a value, those it would rather have first. */
+const candidates = (pad: Pad, it: Placed): Spot[] => {
+  const { em, values } = pad;
+  const [start, end] = [startOf(it), endOf(it)];
+  const middle = (start + end) / 2;
+  const width = widthOf(pad, it.dimension.line);
+  const level = it.dimension.axis === 'x';
+  const size = level || values === 'parallel' ? width : CAPITAL * em;
+  const clear = (values === 'gap' ? 2 * (GAP + TICK) : 0.3) * em;
+  const rest = end - start - size - clear;
+  const lift = values === 'parallel' ? -0.62 * em : 0;
+  const spots: Spot[] = [];
+  if (rest >= 0) {
+    for (const share of [0, 0.15, -0.15, 0.3, -0.3, 0.45, -0.45]) {
+      spots.push({ manner: 'in', along: middle + share * rest, across: lift, cost: Math.abs(share) * 4 });
+    }
+  }
+  const beyond = size / 2 + (ON + GAP) * em;
+  const over = values === 'parallel' ? size / 2 + 0.5 * em : beyond;
+  spots.push({ manner: 'on', along: start - over, across: lift, cost: 3 });
+  spots.push({ manner: 'on', along: end + over, across: lift, cost: 3.2 });
+  const aside = level || values === 'parallel' ? 0.75 * em : width / 2 + 0.45 * em;
+  for (const far of [1, 2, 3]) {
+    const out = it.side === 'left' || it.side === 'top' ? -1 : 1;
+    spots.push({ manner: 'beside', along: middle, across: out * aside * far, cost: 1 + 3 * far });
+    spots.push({ manner: 'beside', along: middle, across: -out * aside * far, cost: 1.5 + 3 * far });
+  }
+  return spots;
+};
+
+const valueBox = (pad: Pad, it: Placed, spot: Spot): Box => {
+  const { em } = pad;
+  const { x, y } = spotPoint(it, spot);
+  const half = widthOf(pad, it.dimension.line) / 2 + 0.12 * em;
+  const high = 0.46 * em;
+  return it.dimension.axis === 'y' && pad.values === 'parallel'
+    ? { left: x - high, right: x + high, top: y - half, bottom: y + half }
+    : { left: x - half, right: x + half, top: y - high, bottom: y + high };
+};
+
+const drawOwnLine = (pad: Pad, it: Placed, spot: Spot): void => {
+  const { em } = pad;
+  const [start, end] = [startOf(it), endOf(it)];
+  const level = it.dimension.axis === 'x';
+  const width = widthOf(pad, it.dimension.line);
+  const along = level || pad.values === 'parallel' ? width : CAPITAL * em;
+  const { path } = it.dimension;
+  const piece = (a: number, b: number): void => drawLine(pad, 'size', pointOn(it, a), pointOn(it, b), { path });
+  const half = along / 2 + GAP * em;
+  if (spot.manner === 'in' && pad.values === 'gap') {
+    piece(start, spot.along - half);
+    piece(spot.along + half, end);
+  } else if (spot.manner === 'on') {
+    const far = pad.values === 'gap' ? ON * em : along + 0.7 * em;
+    const [before, after] = spot.along < start ? [far, 0.45 * em] : [0.45 * em, far];
+    piece(start - before, end + after);
+    keepOff(pad, [pointOn(it, start - before), pointOn(it, end + after)], LINE_WEIGHT, it);
+  } else piece(start, end);
+};
+
+/** One oblique stroke wherever a dimension line ends, or two of them meet. */
+const layTicks = (pad: Pad, placed: readonly Placed[]): void => {
+  const half = TICK * pad.em;
+  const ends = placed.flatMap((it) => [pointOn(it, startOf(it)), pointOn(it, endOf(it))]);
+  const places = new Map(ends.map((at) => [`${at.x.toFixed(3)} ${at.y.toFixed(3)}`, at]));
+  for (const { x, y } of places.values()) {
+    const [from, to] = [
+      { x: x - half, y: y + half },
+      { x: x + half, y: y - half },
+    ];
+    drawLine(pad, 'size', from, to, { tick: true });
+    keepOff(pad, [from, to], TICK_WEIGHT);
+  }
+};
+
+const spotPoint = (it: Placed, { along, across }: Spot): Point =>
+  it.dimension.axis === 'x' ? { x: along, y: it.level + across } : { x: it.level + across, y: along };
+
+const pointOn = ({ dimension, level }: Placed, along: number): Point =>
+  dimension.axis === 'x' ? { x: along, y: level } : { x: level, y: along };
+
+const ends = ({ axis, from, to }: Dimension): [number, number] => [from[axis], to[axis]];
+const startOf = ({ dimension }: Placed): number => Math.min(...ends(dimension));
+const endOf = ({ dimension }: Placed): number => Math.max(...ends(dimension));

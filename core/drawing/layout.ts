@@ -1,0 +1,43 @@
+import type { Drawing, FailurePath } from './drawing.ts';
+import type { Laid } from './laid.ts';
+import { layCallouts } from './layCallouts.ts';
+import { layDimensions } from './layDimensions.ts';
+import { layFace } from './layFace.ts';
+import { layPath } from './layPath.ts';
+import { layPiece } from './layPiece.ts';
+import { layWeld } from './layWeld.ts';
+import { condensed, type Measure } from './measure.ts';
+import { boxOf, createPad } from './pad.ts';
+
+export interface LayoutOptions {
+  /** Text size (em), mm of the piece: what the pen's text size is at the scale it draws to. */
+  readonly textHeight: number;
+  /** Values upright in a gap of the dimension line, as fields on the bench; or above and parallel to it, as on paper. */
+  readonly values: 'gap' | 'parallel';
+  /** Width of a text in the pen's own font. */
+  readonly measure?: Measure;
+}
+
+/** Air around the drawing, in text heights. */
+const AIR = 0.35;
+
+/**
+ * Gives every line and word of a drawing its place, the same for every pen. A failure path is laid over the drawing and moves nothing of it;
+ * the box holds the drawing, and the path's words where these had to stand outside.
+ */
+export const layoutDrawing = (drawing: Drawing, options: LayoutOptions, path: FailurePath | null = null): Laid => {
+  const pad = createPad(options.textHeight, options.measure ?? condensed, options.values);
+  layPiece(pad, drawing);
+  const placed = layDimensions(pad, drawing);
+  layFace(pad, drawing, placed);
+  if (drawing.weld !== null) layWeld(pad, drawing.weld);
+  layCallouts(pad, drawing.callouts, drawing.beam);
+  if (path !== null) layPath(pad, path, drawing.holes, boxOf(pad.marks));
+  const { left, top, right, bottom } = boxOf(pad.marks);
+  const air = AIR * pad.em;
+  return {
+    marks: pad.marks,
+    box: { left: left - air, top: top - air, right: right + air, bottom: bottom + air },
+    textHeight: pad.em,
+  };
+};

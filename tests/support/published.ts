@@ -1,0 +1,46 @@
+import { readdirSync, readFileSync } from 'node:fs';
+
+/** One number that the program did not make, with where it comes from. */
+export interface Expectation {
+  readonly check: string;
+  /** Part of the check, where it has several. */
+  readonly of?: string;
+  /** Number of the check compared: `resistance` where absent. */
+  readonly field?: 'demand' | 'resistance' | 'reactionAtFailure' | 'utilisation';
+  /** Or the value of a row of its working, by symbol. */
+  readonly row?: string;
+  readonly value: number;
+  readonly unit: string;
+  readonly within: number;
+  /** The sum by hand. */
+  readonly sum?: string;
+  /** Why the difference is allowed. */
+  readonly why: string;
+}
+
+export interface PublishedFixture {
+  readonly id: string;
+  readonly standard: string;
+  readonly standing: 'published' | 'theory' | 'hand';
+  readonly source: string;
+  readonly says: string;
+  readonly end: unknown;
+  readonly expect: readonly Expectation[];
+}
+
+const readAll = <T>(folder: string): T[] => {
+  const place = new URL(`../../fixtures/${folder}/`, import.meta.url);
+  return readdirSync(place)
+    .filter((name) => name.endsWith('.json'))
+    .sort()
+    .map((name) => JSON.parse(readFileSync(new URL(name, place), 'utf8')) as T);
+};
+
+export const publishedFixtures = (): PublishedFixture[] => readAll('published');
+
+/** Ends that are good, by name. */
+export const goodEnds = (): { name: string; end: Record<string, unknown> }[] => readAll('input/good');
+
+/** Ends that are bad, with the faults they must give. */
+export const badEnds = (): { name: string; end: unknown; faults: { code: string; path: string }[] }[] =>
+  readAll('input/bad');

@@ -1,10 +1,11 @@
 import type { Facts } from '../end/facts.ts';
 import { type Fault, fault } from '../end/fault.ts';
 import { readEnd } from '../end/readEnd.ts';
-import type { End } from '../end/schema.ts';
+import { type End, plyOf } from '../end/schema.ts';
 import { testOf } from '../formula/number.ts';
 import { standards } from '../standards/index.ts';
 import type { Standard } from '../standards/standard.ts';
+import { findGrade } from '../steel/grades.ts';
 import { nearest } from '../steel/nearest.ts';
 import { plain } from '../units/figures.ts';
 import { fromSystem, toSystem, unitOf } from '../units/systems.ts';
@@ -56,6 +57,11 @@ const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Wor
     say('reaction-from-share', { share: plain(end.reaction.ofWebShear, 4), value }, 'reaction');
   }
   if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
+  for (const grade of new Set([end.beam.grade, plyOf(end.joint).grade])) {
+    if (typeof grade !== 'string') continue;
+    const found = findGrade(grade);
+    if ('basis' in found && found.basis === 'memory') say('memory-grade', { value: found.name });
+  }
   for (const { code, when } of plan.standard.notes) if (testOf(when)(resolved.facts as never)) say(code);
   return notes;
 };

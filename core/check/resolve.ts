@@ -2,7 +2,7 @@ import type { Facts, SupportFacts } from '../end/facts.ts';
 import { factsOf, lengthSize, noSupport, type Strengths } from '../end/factsOf.ts';
 import { type Fault, fault } from '../end/fault.ts';
 import { copeFaults, holeFaults, patternFaults, sectionFaults } from '../end/geometryFaults.ts';
-import type { End, GradeGiven } from '../end/schema.ts';
+import { type End, type GradeGiven, plyOf } from '../end/schema.ts';
 import type { Section } from '../shape/section.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findBoltSize } from '../steel/bolts.ts';
@@ -151,7 +151,7 @@ export const resolve = (
   const k = lengthSize(end);
   resolver.level();
   const beam = resolver.section();
-  const ply = joint.kind === 'fin-plate' ? joint.plate : joint.ply;
+  const ply = plyOf(joint);
   const plyName = joint.kind === 'fin-plate' ? 'plate' : 'ply';
   const web = beam ? resolver.strength(end.beam.grade, beam.section.tw, 'beam.grade') : { fy: 0, fu: 0 };
   const plate = resolver.strength(ply.grade, ply.thickness * k, `joint.${plyName}.grade`);

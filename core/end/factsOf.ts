@@ -4,7 +4,7 @@ import { shearPeak } from '../shape/shearStress.ts';
 import { INCH } from '../units/systems.ts';
 import { cutsOf } from './cuts.ts';
 import type { Facts, SupportFacts } from './facts.ts';
-import type { End } from './schema.ts';
+import { type End, plyOf } from './schema.ts';
 
 /** What a standard says of the materials, bolts and holes of one end. MPa, mm. */
 export interface Strengths {
@@ -67,7 +67,7 @@ export const factsOf = (
   const k = lengthSize(end);
   const { joint } = end;
   const { bolts } = joint;
-  const ply = joint.kind === 'fin-plate' ? joint.plate : joint.ply;
+  const ply = plyOf(joint);
   const g = end.setback * k;
   const ct = (end.top?.length ?? 0) * k;
   const dt = (end.top?.depth ?? 0) * k;

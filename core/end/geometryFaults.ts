@@ -2,7 +2,7 @@ import type { Section } from '../shape/section.ts';
 import type { Facts } from './facts.ts';
 import { lengthSize } from './factsOf.ts';
 import { type Fault, fault } from './fault.ts';
-import type { End } from './schema.ts';
+import { type End, plyOf } from './schema.ts';
 
 /** Lengths back in the file's own unit, free of conversion noise. */
 const inFile = (end: End) => {
@@ -74,7 +74,7 @@ export const holeFaults = (end: End, f: Facts): Fault[] => {
     found.push(fault('hole-outside-web', 'joint.endDistance', end.joint.endDistance, { above: file(half) }));
   }
   const ply = end.joint.kind === 'fin-plate' ? 'plate' : 'ply';
-  const given = end.joint.kind === 'fin-plate' ? end.joint.plate : end.joint.ply;
+  const given = plyOf(end.joint);
   for (const name of ['topEdge', 'bottomEdge', 'edge'] as const) {
     if (given[name] * lengthSize(end) > half) continue;
     found.push(fault('hole-outside-plate', `joint.${ply}.${name}`, given[name], { above: file(half) }));

@@ -67,9 +67,7 @@ const faultsOf = (issue: Issue, input: unknown, above: readonly PropertyKey[] = 
       if (value === undefined) return [fault('missing', at, null, null)];
       const branch = likelyBranch(issue.errors);
       if (branch.length > 0) return branch.flatMap((one) => faultsOf(one, input, path));
-      const kinds = 'discriminator' in issue ? String(issue.discriminator) : '';
-      const kind = (value as Record<string, unknown> | null)?.[kinds];
-      return [fault('not-one-of', kinds ? `${at}.${kinds}` : at, shown(kind), ['fin-plate', 'web-bolts'])];
+      return [fault('not-one-of', at, shown(value), 'options' in issue ? issue.options : null)];
     }
     case 'invalid_type': {
       if (value === undefined) return [fault('missing', at, null, issue.expected)];

@@ -119,3 +119,6 @@ export type End = z.infer<typeof endSchema>;
 export type Cope = NonNullable<End['top']>;
 export type Joint = End['joint'];
 export type GradeGiven = End['beam']['grade'];
+
+/** The plate or ply through which a joint's bolts pass, whatever its name. */
+export const plyOf = (joint: Joint) => (joint.kind === 'fin-plate' ? joint.plate : joint.ply);

@@ -4,8 +4,9 @@ import { INCH, KIP, type UnitSystem, unitOf } from '../units/systems.ts';
 import { numberOf, testOf } from './number.ts';
 import type { Tree } from './tree.ts';
 
-/** Figures of a value that later lines use, and of a result that closes a working. */
-export const STEP_FIGURES = 6;
+/** Significant figures of the numbers put into a line, of the value that a line on the way gives, and of the result that closes a working. */
+export const LINE_FIGURES = 6;
+export const STEP_FIGURES = 5;
 export const RESULT_FIGURES = 4;
 
 /** A formula in one line of text, with how tightly it binds: sum 1, product 2, power 3, single term 4. */
@@ -25,7 +26,7 @@ const superscript = (exponent: number): string => [...String(exponent)].map((d) 
 const parenthesised = (line: Line, least: number): string => (line.binds >= least ? line.text : `(${line.text})`);
 
 /** A value as a working states it, in the system's unit. */
-export const quantity = (value: number, dimension: Dimension, system: UnitSystem, figures = STEP_FIGURES): string =>
+export const quantity = (value: number, dimension: Dimension, system: UnitSystem, figures = LINE_FIGURES): string =>
   significant(value / unitOf(dimension, system).size, figures);
 
 /** The leaves that stand in a line: steps count as leaves, untaken branches do not. */
@@ -106,7 +107,7 @@ class Writer {
 
   private leaf(tree: Tree): Line {
     const value = numberOf(tree)(this.facts) / this.sizeOf(tree.dimension);
-    const text = significant(value, STEP_FIGURES);
+    const text = significant(value, LINE_FIGURES);
     return { text, binds: value < 0 ? 1 : 4 };
   }
 
@@ -139,13 +140,13 @@ class Writer {
   }
 
   private bare(tree: Tree): Line {
-    return { text: significant(numberOf(tree)(this.facts), STEP_FIGURES), binds: 4 };
+    return { text: significant(numberOf(tree)(this.facts), LINE_FIGURES), binds: 4 };
   }
 
   private stress(line: Line): Line {
     if (this.mode === 'symbols' || this.system === 'mm-kN') return line;
     const top = line.text.includes(' / ') ? parenthesised(line, 3) : parenthesised(line, 2);
-    return { text: `${top} / ${significant(MPA_IN_KSI, STEP_FIGURES)}`, binds: 2 };
+    return { text: `${top} / ${significant(MPA_IN_KSI, LINE_FIGURES)}`, binds: 2 };
   }
 }
 

@@ -1,0 +1,189 @@
+import fc from 'fast-check';
+import { describe, expect, test } from 'vitest';
+import { checkEnd } from '../../core/check/checkEnd.ts';
+import type { Check, Report } from '../../core/check/report.ts';
+import type { End } from '../../core/end/schema.ts';
+import { INCH, KIP } from '../../core/units/systems.ts';
+import { endOf, type PlausibleEnd, plausibleEnd } from '../support/arbitraryEnd.ts';
+
+const runs = { numRuns: 400 };
+
+const report = (end: unknown): Report | undefined => {
+  const outcome = checkEnd(end);
+  return 'report' in outcome ? outcome.report : undefined;
+};
+
+const capacityOf = (one: Report, id: string): number | undefined => {
+  const check = one.checks.find((c) => c.id === id) as Check;
+  return check.reactionAtFailure ?? undefined;
+};
+
+/** Ids whose reaction at failure the change lowered, beyond `slack`. */
+const lowered = (before: Report, after: Report, slack = 1e-9): string[] =>
+  before.checks
+    .filter(({ id, reactionAtFailure }) => {
+      const other = capacityOf(after, id);
+      if (reactionAtFailure === undefined || reactionAtFailure === null || other === undefined) return false;
+      return other < reactionAtFailure * (1 - slack);
+    })
+    .map(({ id }) => id);
+
+const changed = (x: PlausibleEnd, change: Partial<PlausibleEnd>): [Report, Report] | undefined => {
+  const before = report(endOf(x));
+  const after = report(endOf({ ...x, ...change }));
+  return before && after ? [before, after] : undefined;
+};
+
+describe('more steel at the same fy and fu never weakens', () => {
+  test('a thicker web', () => {
+    fc.assert(
+      fc.property(plausibleEnd, fc.integer({ min: 1, max: 40 }), (x, tenths) => {
+        const pair = changed(x, { tw: x.tw + tenths / 10 });
+        // Slack: the branches of the shear stress meet with rounded constants, a step of at most 0.2 % where a web passes from elastic to
+        // inelastic buckling.
+        if (pair) expect(lowered(...pair, 0.002)).toEqual([]);
+      }),
+      runs,
+    );
+  });
+
+  test('a thicker plate', () => {
+    fc.assert(
+      fc.property(plausibleEnd, fc.integer({ min: 1, max: 10 }), (x, more) => {
+        const pair = changed(x, { tp: x.tp + more });
+        if (pair) expect(lowered(...pair)).toEqual([]);
+      }),
+      runs,
+    );
+  });
+
+  test('larger edges of the plate, a larger weld', () => {
+    fc.assert(
+      fc.property(plausibleEnd, fc.integer({ min: 1, max: 30 }), (x, more) => {
+        for (const change of [{ e: x.e + more }, { ex: x.ex + more }, { leg: x.leg + more }]) {
+          const pair = changed(x, change);
+          if (pair) expect(lowered(...pair)).toEqual([]);
+        }
+      }),
+      runs,
+    );
+  });
+
+  test('a stronger bolt and a stronger electrode', () => {
+    fc.assert(
+      fc.property(plausibleEnd, (x) => {
+        const end = endOf(x);
+        const joint = {
+          ...end.joint,
+          bolts: { ...end.joint.bolts, grade: { fu: 1000 } },
+          weld: { leg: x.leg, electrode: 550 },
+        };
+        const [before, after] = [report(end), report({ ...end, joint })];
+        if (before && after) expect(lowered(before, after)).toEqual([]);
+      }),
+      runs,
+    );
+  });
+});
+
+describe('a longer cope never strengthens', () => {
+  /** A column that comes to stand inside the cope joins the block and the tear-out: a different path, which may be the stronger one. */
+  const anotherPath = new Set(['web-block', 'web-tearout']);
+
+  test('the checks it touches; others stay as they are', () => {
+    fc.assert(
+      fc.property(plausibleEnd, fc.integer({ min: 1, max: 200 }), (x, more) => {
+        const pair = changed({ ...x, copes: 'top' }, { ct: x.ct + more, copes: 'top' });
+        if (!pair) return;
+        const [before, after] = pair;
+        const raised = lowered(after, before).filter((id) => !anotherPath.has(id));
+        expect(raised).toEqual([]);
+      }),
+      runs,
+    );
+  });
+});
+
+describe('what changes nothing', () => {
+  test('the unit system: the same end in inches and kips has the same numbers', () => {
+    fc.assert(
+      fc.property(plausibleEnd, (x) => {
+        const metric = endOf(x);
+        const inch = inInches(metric);
+        const [a, b] = [report(metric), report(inch)];
+        expect(a === undefined).toBe(b === undefined);
+        if (!a || !b) return;
+        expect(b.verdict).toBe(a.verdict);
+        for (const check of a.checks) {
+          const other = b.checks.find(({ id }) => id === check.id)!;
+          expect(other.state, check.id).toBe(check.state);
+          if (check.utilisation) expect(other.utilisation! / check.utilisation, check.id).toBeCloseTo(1, 9);
+          if (check.reactionAtFailure)
+            expect((other.reactionAtFailure! * KIP) / 1000 / check.reactionAtFailure).toBeCloseTo(1, 9);
+        }
+      }),
+      runs,
+    );
+  });
+
+  test('a cope that shrinks to nothing leaves the stress of the full section', () => {
+    fc.assert(
+      fc.property(plausibleEnd, (x) => {
+        const found = report(endOf({ ...x, copes: 'top', dt: 1e-7, V: 100 }));
+        if (!found) return;
+        const [full, cut] = [capacityOf(found, 'stress-full'), capacityOf(found, 'stress-cope')];
+        expect(cut! / full!).toBeCloseTo(1, 6);
+        const none = report(endOf({ ...x, copes: 'none', V: 100 }))!;
+        expect(capacityOf(found, 'web-net-shear')! / capacityOf(none, 'web-net-shear')!).toBeCloseTo(1, 6);
+        expect(capacityOf(found, 'web-gross-shear')).toBe(capacityOf(none, 'web-gross-shear'));
+      }),
+      runs,
+    );
+  });
+
+  test('what fails at a reaction does not depend on the reaction', () => {
+    fc.assert(
+      fc.property(plausibleEnd, fc.integer({ min: 0, max: 2000 }), (x, V) => {
+        const [a, b] = [report(endOf(x)), report(endOf({ ...x, V }))];
+        expect(b?.capacity).toBe(a?.capacity);
+      }),
+      runs,
+    );
+  });
+});
+
+/** The same end with every length in inches, every force in kips. */
+const inInches = (end: End): unknown => {
+  const lengths = new Set([
+    'depth',
+    'width',
+    'flange',
+    'web',
+    'radius',
+    'length',
+    'setback',
+    'firstRow',
+    'endDistance',
+    'pitch',
+    'gauge',
+    'thickness',
+    'topEdge',
+    'bottomEdge',
+    'edge',
+    'leg',
+  ]);
+  const stresses = new Set(['fy', 'fu', 'electrode']);
+  const turn = (value: unknown, key: string): unknown => {
+    if (typeof value === 'number') {
+      if (lengths.has(key)) return value / INCH;
+      if (stresses.has(key)) return (value * INCH ** 2) / KIP;
+      if (key === 'reaction') return (value * 1000) / KIP;
+      return value;
+    }
+    if (typeof value === 'object' && value !== null) {
+      return Object.fromEntries(Object.entries(value).map(([k, v]) => [k, turn(v, k)]));
+    }
+    return value;
+  };
+  return { ...(turn(end, '') as object), units: 'in-kip' };
+};

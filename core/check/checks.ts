@@ -1,6 +1,5 @@
-import type { Facts } from '../end/facts.ts';
 import type { Source, Tree } from '../formula/tree.ts';
-import { workingOf } from '../formula/working.ts';
+import type { WorkingRow } from '../formula/working.ts';
 import { isNoRule } from '../standards/standard.ts';
 import { toSystem, type UnitSystem, unitOf } from '../units/systems.ts';
 import type { Words } from '../words/words.ts';
@@ -10,72 +9,85 @@ import type { Check } from './report.ts';
 
 interface Context {
   readonly plan: Plan;
-  readonly facts: Facts;
   readonly units: UnitSystem;
   readonly words: Words;
-  readonly working: boolean;
+  /** Writes workings; absent where none are asked for. */
+  readonly write?: (trees: readonly Tree[]) => WorkingRow[];
 }
 
 /** Nothing that is not finite leaves the program. */
 const finite = (value: number): number | null => (Number.isFinite(value) ? value : null);
 
-const stated = (value: number, like: Tree | undefined, units: UnitSystem): number | null =>
-  like ? finite(toSystem(value, like.dimension, units)) : null;
+const stated = (value: number, like: Tree, units: UnitSystem): number | null =>
+  finite(toSystem(value, like.dimension, units));
 
-const common = (context: Context, result: Result, part: Check['part'], source: Source | undefined) => {
-  const { words, plan } = context;
-  return {
-    id: result.id,
-    part,
-    title: words.titles[result.id] ?? result.id,
-    clause: source?.clause ?? '',
-    basis: source?.basis ?? ('' as const),
-    state: result.state,
-    ...(result.reason && { reason: result.reason, reasonText: words.reasons[result.reason] ?? result.reason }),
-    verified: plan.standard.verified[result.id] ?? ('none' as const),
-  };
+/** Optional fields are set only where they say something; spreading them in costs a hundred times more. */
+type Draft = { -readonly [K in keyof Check]: Check[K] };
+
+const draft = (
+  context: Context,
+  result: Result,
+  part: Check['part'],
+  source: Source | undefined,
+  unit: string,
+): Draft => ({
+  id: result.id,
+  part,
+  title: context.words.titles[result.id] ?? result.id,
+  clause: source?.clause ?? '',
+  basis: source?.basis ?? '',
+  symbol: '',
+  demand: null,
+  resistance: null,
+  unit,
+  utilisation: finite(result.utilisation),
+  state: result.state,
+  verified: context.plan.standard.verified[result.id] ?? 'none',
+});
+
+const sayWhy = (check: Draft, { reason }: Result, of: string, words: Words): void => {
+  if (reason) {
+    check.reason = reason;
+    check.reasonText = words.reasons[reason] ?? reason;
+  }
+  if (of) {
+    check.of = of;
+    check.ofText = words.ways[of] ?? of;
+  }
 };
 
 const strengthCheck = (context: Context, plan: StrengthPlan, result: Result): Check => {
-  const { facts, units, words } = context;
+  const { units, words } = context;
   const rule = isNoRule(plan.rule) ? undefined : plan.rule;
   const way = rule?.ways[result.way];
-  const byV = way?.load === 'V';
-  return {
-    ...common(context, result, plan.part, way?.source ?? rule?.source),
-    symbol: way?.symbol ?? '',
-    demand: stated(result.demand, way?.demand, units),
-    resistance: stated(result.resistance, way?.resistance, units),
-    unit: way ? unitOf(way.resistance.dimension, units).name : '',
-    utilisation: finite(result.utilisation),
-    ...(byV && { reactionAtFailure: finite(toSystem(result.reactionAtFailure, '0,1', units)) }),
-    ...(way?.of && { of: way.of, ofText: words.ways[way.of] ?? way.of }),
-    ...(context.working &&
-      way && {
-        working: workingOf(
-          way.unbounded && result.reactionAtFailure === 0 ? [way.resistance] : [way.demand, way.resistance],
-          facts,
-          units,
-        ),
-      }),
-  };
+  const unit = way ? unitOf(way.resistance.dimension, units).name : '';
+  const check = draft(context, result, plan.part, way?.source ?? rule?.source, unit);
+  sayWhy(check, result, way?.of ?? '', words);
+  if (!way) return check;
+  check.symbol = way.symbol;
+  check.demand = stated(result.demand, way.demand, units);
+  check.resistance = stated(result.resistance, way.resistance, units);
+  if (way.load === 'V') check.reactionAtFailure = finite(toSystem(result.reactionAtFailure, '0,1', units));
+  if (context.write) {
+    const trees = Number.isNaN(result.demand) ? [way.resistance] : [way.demand, way.resistance];
+    check.working = Number.isNaN(result.resistance) ? [] : context.write(trees);
+  }
+  return check;
 };
 
 const fitCheck = (context: Context, plan: FitPlan, result: Result): Check => {
-  const { facts, units, words } = context;
+  const { units, words } = context;
   const rule = isNoRule(plan.rule) ? undefined : plan.rule;
   const part = rule?.parts[result.way];
-  const bounds = part ? [part.given, part.least, part.most].filter((one) => one !== undefined) : [];
-  return {
-    ...common(context, result, plan.part, rule?.source),
-    symbol: '',
-    demand: stated(result.demand, part?.given, units),
-    resistance: stated(result.resistance, part?.given, units),
-    unit: part ? unitOf('1,0', units).name : '',
-    utilisation: finite(result.utilisation),
-    ...(part?.of && { of: part.of, ofText: words.ways[part.of] ?? part.of }),
-    ...(context.working && part && { working: workingOf(bounds, facts, units) }),
-  };
+  const check = draft(context, result, plan.part, rule?.source, part ? unitOf('1,0', units).name : '');
+  sayWhy(check, result, part?.of ?? '', words);
+  if (!part) return check;
+  check.demand = stated(result.demand, part.given, units);
+  check.resistance = stated(result.resistance, part.given, units);
+  if (context.write) {
+    check.working = context.write([part.given, part.least, part.most].filter((one) => one !== undefined));
+  }
+  return check;
 };
 
 const rank = (one: Check): number => {

@@ -1,7 +1,7 @@
 import type { CheckName } from '../end/checkNames.ts';
 import type { Facts } from '../end/facts.ts';
 import { newRun } from '../formula/number.ts';
-import type { FitPartPlan, FitPlan, Plan, StrengthPlan, WayPlan } from './plan.ts';
+import type { FitPartPlan, FitPlan, GatePlan, Plan, StrengthPlan, WayPlan } from './plan.ts';
 import type { State, Verdict } from './report.ts';
 
 /** The numbers of one check: N and mm; demand at V, capacity as the reaction at which it is used up. */
@@ -49,18 +49,22 @@ const blank = (id: CheckName): Result => ({
   utilisation: Number.NaN,
 });
 
+const firstMet = <G extends GatePlan>(gates: readonly G[], facts: Facts): G | undefined => {
+  for (let at = 0; at < gates.length; at += 1) if (gates[at]!.test(facts as never)) return gates[at];
+  return undefined;
+};
+
 /** One way at the reaction V: its demand grows in proportion, so it is measured at 1 N (or at the tie force itself). */
 const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
   into.reason = '';
   into.demand = into.resistance = into.reactionAtFailure = into.utilisation = Number.NaN;
-  for (const { test, reason } of plan.off) {
-    if (test(facts as never)) {
-      into.state = 'notApplicable';
-      into.reason = reason;
-      return;
-    }
+  const off = firstMet(plan.off, facts);
+  if (off) {
+    into.state = 'notApplicable';
+    into.reason = off.reason;
+    return;
   }
-  const limit = plan.limits.find(({ test }) => test(facts as never));
+  const limit = firstMet(plan.limits, facts);
   if (limit?.noNumber) {
     into.state = 'refer';
     into.reason = limit.reason;
@@ -168,26 +172,34 @@ const evaluateFit = (plan: FitPlan, facts: Facts): Result => {
     result.reason = plan.noRule;
     return result;
   }
-  plan.parts.forEach((part, at) => {
-    const off = part.off.find(({ test }) => test(facts as never));
+  for (let at = 0; at < plan.parts.length; at += 1) {
+    const part = plan.parts[at]!;
+    const off = firstMet(part.off, facts);
     if (off) {
       if (result.way < 0) result.reason = off.reason;
-      return;
+      continue;
     }
     evaluateFitPart(part, plan.breach, facts, trial);
     const worse = severity[trial.state] - severity[result.state];
     if (result.way < 0 || worse > 0 || (worse === 0 && trial.utilisation > result.utilisation)) {
-      Object.assign(result, trial, { id: plan.id, way: at, reactionAtFailure: Number.NaN });
+      result.way = at;
+      result.state = trial.state;
+      result.reason = trial.reason;
+      result.demand = trial.demand;
+      result.resistance = trial.resistance;
+      result.utilisation = trial.utilisation;
     }
-  });
+  }
   return result;
 };
 
-const worst = (results: readonly Result[]): Verdict => {
+const worst = (...lists: readonly (readonly Result[])[]): Verdict => {
   let verdict: Verdict = 'holds';
-  for (const { state } of results) {
-    if (state === 'fails') return 'fails';
-    if (state === 'refer') verdict = 'refer';
+  for (const results of lists) {
+    for (const { state } of results) {
+      if (state === 'fails') return 'fails';
+      if (state === 'refer') verdict = 'refer';
+    }
   }
   return verdict;
 };
@@ -203,11 +215,13 @@ const firstUsedUp = (results: readonly Result[]): Result | undefined => {
 };
 
 /** The worst failing check that no reaction is to blame for: a tie, a size, a clash. */
-const worstWithoutV = (results: readonly Result[]): Result | undefined => {
+const worstWithoutV = (...lists: readonly (readonly Result[])[]): Result | undefined => {
   let found: Result | undefined;
-  for (const one of results) {
-    if (one.state !== 'fails' || !Number.isNaN(one.reactionAtFailure)) continue;
-    if (!found || one.utilisation > found.utilisation) found = one;
+  for (const results of lists) {
+    for (const one of results) {
+      if (one.state !== 'fails' || !Number.isNaN(one.reactionAtFailure)) continue;
+      if (!found || one.utilisation > found.utilisation) found = one;
+    }
   }
   return found;
 };
@@ -223,8 +237,8 @@ export const evaluate = (plan: Plan, facts: Facts, V: number): Evaluation => {
   return {
     strength,
     fit,
-    verdict: worst([...strength, ...fit]),
-    governing: worstWithoutV([...strength, ...fit]) ?? first ?? strength[0]!,
+    verdict: worst(strength, fit),
+    governing: worstWithoutV(strength, fit) ?? first ?? strength[0]!,
     capacity: first ? first.reactionAtFailure : Number.NaN,
     reaction: V,
   };

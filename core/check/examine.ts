@@ -3,6 +3,7 @@ import { type Fault, fault } from '../end/fault.ts';
 import { readEnd } from '../end/readEnd.ts';
 import { type End, plyOf } from '../end/schema.ts';
 import { testOf } from '../formula/number.ts';
+import { workingsOf } from '../formula/working.ts';
 import { standards } from '../standards/index.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findGrade } from '../steel/grades.ts';
@@ -40,13 +41,15 @@ export const said = (faults: readonly Fault[], words: Words = commonwealth): { f
   faults: faults.map((one) => ({ ...one, text: faultText(words, faultSentences, one) })),
 });
 
-/** Share of the full section's shear that a reaction is, or the reaction that a share comes to. N */
-const reactionOf = (end: End, plan: Plan, facts: Facts): { V: number; grossShear: number } => {
-  const gross = evaluate(plan, facts, 0).strength.find(({ id }) => id === 'web-gross-shear')!;
-  const grossShear = gross.reactionAtFailure;
-  if (typeof end.reaction !== 'number') return { V: end.reaction.ofWebShear * grossShear, grossShear };
-  return { V: fromSystem(end.reaction, '0,1', end.units), grossShear };
-};
+/** Reaction at which the full section fails in shear, N. */
+const grossShearOf = (evaluation: Evaluation): number =>
+  evaluation.strength.find(({ id }) => id === 'web-gross-shear')!.reactionAtFailure;
+
+/** The reaction as given, or what a share of the full section's shear comes to. N */
+const reactionOf = ({ reaction, units }: End, plan: Plan, facts: Facts): number =>
+  typeof reaction === 'number'
+    ? fromSystem(reaction, '0,1', units)
+    : reaction.ofWebShear * grossShearOf(evaluate(plan, facts, 0));
 
 const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Words): Note[] => {
   const notes: Note[] = [];
@@ -70,8 +73,8 @@ const reportOf = (end: End, plan: Plan, resolved: Resolved, working: boolean): R
   const { standard } = plan;
   const { facts } = resolved;
   const words = wordsOf(standard);
-  const { V, grossShear } = reactionOf(end, plan, facts);
-  const evaluation: Evaluation = evaluate(plan, facts, V);
+  const V = reactionOf(end, plan, facts);
+  const evaluation = evaluate(plan, facts, V);
   const kN = (newtons: number) => toSystem(newtons, '0,1', end.units);
   return {
     mark: end.mark ?? '',
@@ -82,8 +85,11 @@ const reportOf = (end: End, plan: Plan, resolved: Resolved, working: boolean): R
     governing: evaluation.governing.id,
     reaction: kN(V),
     capacity: Number.isFinite(evaluation.capacity) ? kN(evaluation.capacity) : null,
-    shareOfWebShear: V / grossShear,
-    checks: checksOf({ plan, facts, units: end.units, words, working }, evaluation),
+    shareOfWebShear: V / grossShearOf(evaluation),
+    checks: checksOf(
+      { plan, units: end.units, words, ...(working && { write: workingsOf(facts, end.units) }) },
+      evaluation,
+    ),
     shape: { sections: sectionStresses(facts, end.units) },
     assumptions: assumptionsOf(end, standard, facts.channel, words),
     notes: notesOf(end, plan, resolved, V, words),

@@ -15,7 +15,7 @@ import {
 
 type Test = (facts: never) => boolean;
 
-interface GatePlan {
+export interface GatePlan {
   readonly test: Test;
   readonly reason: string;
 }

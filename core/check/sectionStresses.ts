@@ -5,6 +5,9 @@ import { shearPeak, shearProfile } from '../shape/shearStress.ts';
 import { toSystem, type UnitSystem } from '../units/systems.ts';
 import type { SectionStress } from './report.ts';
 
+/** The curve is drawn, not calculated with: four places are more than any pen shows. */
+const drawn = (value: number): number => Math.round(value * 1e4) / 1e4;
+
 const stressesOf = (
   name: SectionStress['name'],
   shape: Shape,
@@ -30,7 +33,7 @@ const stressesOf = (
     firstYieldStress: toSystem(yieldStress, '-2,1', units),
     firstYieldReaction: toSystem(yieldStress / peak.perNewton, '0,1', units),
     profile: shearProfile(shape, f.V).map(
-      ([y, tau]) => [toSystem(y, '1,0', units), toSystem(tau, '-2,1', units)] as const,
+      ([y, tau]) => [drawn(toSystem(y, '1,0', units)), drawn(toSystem(tau, '-2,1', units))] as const,
     ),
   };
 };

@@ -50,6 +50,7 @@ const taken = (tree: Tree & { op: 'pick' }, facts: never): Tree =>
   tree.branches.find(({ when }) => testOf(when)(facts))?.then ?? tree.otherwise;
 
 const forceUnitOf = (tree: Tree, facts: never, result: Dimension): ForceUnit => {
+  if (result !== '0,1' && result !== '1,1') return 'N';
   const carriers = leavesOf(tree, facts).filter((leaf) => !leaf.dimension.endsWith(',0'));
   const alike = carriers.every((leaf) => leaf.dimension === '0,1') && (result === '0,1' || result === '1,1');
   const moments = carriers.every((leaf) => leaf.dimension === '1,1') && result === '1,1';
@@ -158,18 +159,34 @@ const scaleOf = (force: ForceUnit, tree: Tree, facts: never, result: Dimension):
   return result === '1,1' && !moments ? '10³' : '';
 };
 
-/** The formula in symbols, or with numbers in place; `result` is the dimension whose unit the numbers work out to. */
-export const lineOf = (
-  tree: Tree,
-  facts: never,
-  system: UnitSystem,
-  mode: Mode,
-  result: Dimension = tree.dimension,
-): Line => {
-  const force = system === 'mm-kN' ? forceUnitOf(tree, facts, result) : 'N';
-  const line = new Writer(facts, system, mode, force).write(tree);
-  if (mode === 'symbols' || system === 'in-kip') return line;
+const choiceFree = new WeakMap<Tree, boolean>();
+
+/** True where a line's symbols are the same whatever the facts. */
+const isChoiceFree = (tree: Tree): boolean => {
+  const known = choiceFree.get(tree);
+  if (known !== undefined) return known;
+  const leaf = tree.op === 'step' || !('of' in tree);
+  const free = tree.op !== 'pick' && (leaf || (tree as { of: readonly Tree[] }).of.every(isChoiceFree));
+  choiceFree.set(tree, free);
+  return free;
+};
+
+const symbolLines = new WeakMap<Tree, Line>();
+
+/** The formula in symbols, with the branches that the facts take. */
+export const symbolsOf = (tree: Tree, facts: never): Line => {
+  const known = symbolLines.get(tree);
+  if (known) return known;
+  const line = new Writer(facts, 'mm-kN', 'symbols', 'N').write(tree);
+  if (isChoiceFree(tree)) symbolLines.set(tree, line);
+  return line;
+};
+
+/** The formula with numbers in place; they work out to the system's unit of `result`. */
+export const numbersOf = (tree: Tree, facts: never, system: UnitSystem, result: Dimension = tree.dimension): Line => {
+  if (system === 'in-kip') return new Writer(facts, system, 'numbers', 'N').write(tree);
+  const force = forceUnitOf(tree, facts, result);
+  const line = new Writer(facts, system, 'numbers', force).write(tree);
   const scale = scaleOf(force, tree, facts, result);
-  if (!scale) return line;
-  return { text: `${parenthesised(line, 2)} / ${scale}`, binds: 2 };
+  return scale ? { text: `${parenthesised(line, 2)} / ${scale}`, binds: 2 } : line;
 };

@@ -49,7 +49,7 @@ const compose = (tree: Tree): NumberReader => {
     case 'given':
       return tree.read;
     case 'times':
-      return product(tree.of.map(numberOf));
+      return product(tree.of);
     case 'plus':
       return sum(tree.of.map(numberOf));
     case 'least':
@@ -78,6 +78,8 @@ const compose = (tree: Tree): NumberReader => {
       return chosen(tree.branches, numberOf(tree.otherwise));
     case 'found': {
       const [of, solve] = [tree.of.map(numberOf), tree.solve];
+      const [a] = of;
+      if (of.length === 1 && a) return (facts) => solve(facts, a(facts));
       return (facts) => solve(facts, ...of.map((one) => one(facts)));
     }
     case 'step':
@@ -96,16 +98,36 @@ const remembered = (inner: NumberReader): NumberReader => {
   };
 };
 
-const product = (of: readonly NumberReader[]): NumberReader => {
-  const [a, b, c, d] = of as [NumberReader, NumberReader, NumberReader, NumberReader];
-  if (of.length === 2) return (facts) => a(facts) * b(facts);
-  if (of.length === 3) return (facts) => a(facts) * b(facts) * c(facts);
-  if (of.length === 4) return (facts) => a(facts) * b(facts) * c(facts) * d(facts);
-  return (facts) => {
-    let value = 1;
-    for (const one of of) value *= one(facts);
-    return value;
-  };
+/** Multiplies from left to right; constants that lead are multiplied once, in the same order, so no bit changes. */
+const product = (of: readonly Tree[]): NumberReader => {
+  let leading = 1;
+  let at = 0;
+  for (; at < of.length; at += 1) {
+    const one = of[at]!;
+    if (one.op !== 'literal' && one.op !== 'constant') break;
+    leading *= one.value;
+  }
+  const rest = of.slice(at).map(numberOf);
+  const k = leading;
+  const [a, b, c, d] = rest as [NumberReader, NumberReader, NumberReader, NumberReader];
+  switch (rest.length) {
+    case 0:
+      return () => k;
+    case 1:
+      return (facts) => k * a(facts);
+    case 2:
+      return (facts) => k * a(facts) * b(facts);
+    case 3:
+      return (facts) => k * a(facts) * b(facts) * c(facts);
+    case 4:
+      return (facts) => k * a(facts) * b(facts) * c(facts) * d(facts);
+    default:
+      return (facts) => {
+        let value = k;
+        for (let i = 0; i < rest.length; i += 1) value *= rest[i]!(facts);
+        return value;
+      };
+  }
 };
 
 const sum = (of: readonly NumberReader[]): NumberReader => {
@@ -113,16 +135,17 @@ const sum = (of: readonly NumberReader[]): NumberReader => {
   if (of.length === 2) return (facts) => a(facts) + b(facts);
   return (facts) => {
     let value = 0;
-    for (const one of of) value += one(facts);
+    for (let i = 0; i < of.length; i += 1) value += of[i]!(facts);
     return value;
   };
 };
 
 const extreme = (of: readonly NumberReader[], better: (a: number, b: number) => number): NumberReader => {
-  const [first, ...rest] = of as [NumberReader, ...NumberReader[]];
+  const [a, b] = of as [NumberReader, NumberReader];
+  if (of.length === 2) return (facts) => better(a(facts), b(facts));
   return (facts) => {
-    let value = first(facts);
-    for (const one of rest) value = better(value, one(facts));
+    let value = a(facts);
+    for (let i = 1; i < of.length; i += 1) value = better(value, of[i]!(facts));
     return value;
   };
 };
@@ -140,6 +163,8 @@ const raised = (base: NumberReader, exponent: number): NumberReader => {
 const chosen = (branches: readonly { when: Condition; then: Tree }[], otherwise: NumberReader): NumberReader => {
   const tests = branches.map(({ when }) => testOf(when));
   const values = branches.map(({ then }) => numberOf(then));
+  const [firstTest, firstValue] = [tests[0]!, values[0]!];
+  if (tests.length === 1) return (facts) => (firstTest(facts) ? firstValue(facts) : otherwise(facts));
   return (facts) => {
     for (let at = 0; at < tests.length; at += 1) if (tests[at]!(facts)) return values[at]!(facts);
     return otherwise(facts);
@@ -164,12 +189,19 @@ export const testOf = (condition: Condition): Test => {
       return (facts) => !one(facts);
     }
     case 'all': {
-      const of = condition.of.map(testOf);
-      return (facts) => of.every((one) => one(facts));
+      return combined(condition.of, false);
     }
     case 'any': {
-      const of = condition.of.map(testOf);
-      return (facts) => of.some((one) => one(facts));
+      return combined(condition.of, true);
     }
   }
+};
+
+/** All or any of several conditions: the first that comes out as `decisive` settles it. */
+const combined = (conditions: readonly Condition[], decisive: boolean): Test => {
+  const tests = conditions.map(testOf);
+  return (facts) => {
+    for (let at = 0; at < tests.length; at += 1) if (tests[at]!(facts) === decisive) return decisive;
+    return !decisive;
+  };
 };

@@ -1,6 +1,6 @@
 import type { UnitSystem } from '../units/systems.ts';
 import { toSystem, unitOf } from '../units/systems.ts';
-import { type Line, lineOf, quantity } from './line.ts';
+import { numbersOf, quantity, symbolsOf } from './line.ts';
 import { newRun, numberOf, testOf } from './number.ts';
 import type { Basis, Condition, Tree } from './tree.ts';
 
@@ -36,7 +36,7 @@ const said = (condition: Condition, met: boolean, facts: never, system: UnitSyst
         .join('; ');
     default: {
       const [left, right] = condition.of.map((one) => {
-        const text = lineOf(one, facts, system, 'symbols').text;
+        const text = symbolsOf(one, facts).text;
         const value = quantity(numberOf(one)(facts), one.dimension, system);
         return one.op === 'literal' || one.op === 'constant' ? value : `${text} = ${value}`;
       });
@@ -46,67 +46,87 @@ const said = (condition: Condition, met: boolean, facts: never, system: UnitSyst
   }
 };
 
-class Reader {
-  readonly rows: WorkingRow[] = [];
-  private readonly seen = new Set<Tree>();
+/** Writes workings from one set of facts: a step that several checks lean on is written once and shared. */
+class Writer {
+  private readonly written = new Map<Tree, WorkingRow>();
 
   constructor(
     private readonly facts: never,
     private readonly system: UnitSystem,
   ) {}
 
-  /** Writes the steps that a tree leans on, each once, before the tree's own. */
-  visit(tree: Tree, notes: string[]): void {
+  /** The steps that trees lean on, each once, before the trees' own. */
+  rows(trees: readonly Tree[]): WorkingRow[] {
+    const rows = new Set<WorkingRow>();
+    for (const tree of trees) this.visit(tree, rows);
+    return [...rows];
+  }
+
+  private visit(tree: Tree, rows: Set<WorkingRow>): void {
     switch (tree.op) {
       case 'literal':
       case 'constant':
       case 'given':
         return;
       case 'pick':
-        this.visitPick(tree, notes);
+        this.visit(this.branch(tree, rows), rows);
         return;
       case 'step':
-        this.visitStep(tree);
-        return;
-      case 'found':
-        for (const one of tree.of) this.visit(one, notes);
+        this.visit(tree.of[0], rows);
+        rows.add(this.row(tree));
         return;
       default:
-        for (const one of tree.of) this.visit(one, notes);
+        for (const one of tree.of) this.visit(one, rows);
     }
   }
 
-  private visitPick(tree: Tree & { op: 'pick' }, notes: string[]): void {
+  /** The branch that the facts take; what its conditions compare is written first. */
+  private branch(tree: Tree & { op: 'pick' }, rows: Set<WorkingRow>): Tree {
     for (const { when, then } of tree.branches) {
-      const met = testOf(when)(this.facts);
-      for (const one of comparedIn(when)) this.visit(one, []);
-      const words = said(when, met, this.facts, this.system);
-      if (words) notes.push(words);
-      if (met) {
-        this.visit(then, notes);
-        return;
-      }
+      for (const one of comparedIn(when)) this.visit(one, rows);
+      if (testOf(when)(this.facts)) return then;
     }
-    this.visit(tree.otherwise, notes);
+    return tree.otherwise;
   }
 
-  private visitStep(tree: Tree & { op: 'step' }): void {
-    if (this.seen.has(tree)) return;
-    this.seen.add(tree);
-    const notes: string[] = tree.note ? [tree.note] : [];
-    this.visit(tree.of[0], notes);
-    const symbols: Line = lineOf(tree.of[0], this.facts, this.system, 'symbols');
-    const numbers: Line = lineOf(tree.of[0], this.facts, this.system, 'numbers', tree.dimension);
-    this.rows.push({
+  private row(tree: Tree & { op: 'step' }): WorkingRow {
+    const known = this.written.get(tree);
+    if (known) return known;
+    const notes = [...new Set([tree.note ?? '', ...this.choices(tree.of[0])])].filter(Boolean).join('; ');
+    const row: WorkingRow = {
       symbol: tree.symbol,
-      expression: symbols.text,
-      numbers: numbers.text,
+      expression: symbolsOf(tree.of[0], this.facts).text,
+      numbers: numbersOf(tree.of[0], this.facts, this.system, tree.dimension).text,
       value: toSystem(numberOf(tree)(this.facts), tree.dimension, this.system),
       unit: unitOf(tree.dimension, this.system).name,
       clause: tree.source?.clause ?? '',
       basis: tree.source?.basis ?? '',
-      ...(notes.length > 0 && { note: [...new Set(notes)].join('; ') }),
-    });
+      ...(notes && { note: notes }),
+    };
+    this.written.set(tree, row);
+    return row;
+  }
+
+  /** The choices made within one step, in words and numbers. */
+  private choices(tree: Tree): string[] {
+    switch (tree.op) {
+      case 'literal':
+      case 'constant':
+      case 'given':
+      case 'step':
+        return [];
+      case 'pick': {
+        const words: string[] = [];
+        for (const { when, then } of tree.branches) {
+          const met = testOf(when)(this.facts);
+          words.push(said(when, met, this.facts, this.system));
+          if (met) return [...words, ...this.choices(then)];
+        }
+        return [...words, ...this.choices(tree.otherwise)];
+      }
+      default:
+        return tree.of.flatMap((one) => this.choices(one));
+    }
   }
 }
 
@@ -122,10 +142,13 @@ const comparedIn = (condition: Condition): readonly Tree[] => {
   }
 };
 
-/** The working of one or more results from the same facts: every step once, in the order of use. */
-export const workingOf = (trees: readonly Tree[], facts: object, system: UnitSystem): WorkingRow[] => {
+/** Makes the writer of workings for one set of facts: it gives the steps of one or more results, in the order of use. */
+export const workingsOf = (facts: object, system: UnitSystem): ((trees: readonly Tree[]) => WorkingRow[]) => {
   newRun();
-  const reader = new Reader(facts as never, system);
-  for (const tree of trees) reader.visit(tree, []);
-  return reader.rows;
+  const writer = new Writer(facts as never, system);
+  return (trees) => writer.rows(trees);
 };
+
+/** The working of one or more results from the same facts. */
+export const workingOf = (trees: readonly Tree[], facts: object, system: UnitSystem): WorkingRow[] =>
+  workingsOf(facts, system)(trees);

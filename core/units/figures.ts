@@ -4,23 +4,21 @@ export const MINUS = '\u2212';
 
 /** Groups the whole digits in threes from five digits up. */
 const grouped = (digits: string): string => {
-  const [whole = '', fraction] = digits.split('.');
-  const spaced = whole.length > 4 ? whole.replace(/\B(?=(\d{3})+$)/g, THIN) : whole;
-  return fraction === undefined ? spaced : `${spaced}.${fraction}`;
+  const point = digits.indexOf('.');
+  const length = point < 0 ? digits.length : point;
+  if (length < 5) return digits;
+  return digits.slice(0, length).replace(/\B(?=(\d{3})+$)/g, THIN) + digits.slice(length);
 };
 
 const signed = (value: number, digits: string): string =>
   (value < 0 && Number(digits) !== 0 ? MINUS : '') + grouped(digits);
 
-/** A value to so many significant digits, without exponent; `trim` drops closing zeros. */
-export const significant = (value: number, digits: number, trim = true): string => {
-  const size = Math.abs(value);
+/** A value to so many significant digits, closing zeros dropped, without exponent. */
+export const significant = (value: number, digits: number): string => {
+  const size = Number(Math.abs(value).toPrecision(digits));
   if (size === 0) return '0';
-  const magnitude = Math.floor(Math.log10(Number(size.toExponential(digits - 1))));
-  const places = Math.max(0, digits - 1 - magnitude);
-  if (places > 20) return '0';
-  const text = size.toFixed(places);
-  return signed(value, trim && text.includes('.') ? text.replace(/\.?0+$/, '') : text);
+  const text = size >= 1e-6 && size < 1e21 ? String(size) : size.toFixed(20).replace(/\.?0+$/, '');
+  return signed(value, text);
 };
 
 /** A value to a fixed number of places. */

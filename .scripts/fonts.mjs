@@ -21,9 +21,10 @@ const NARROW = { name: '@fontsource/ibm-plex-sans-condensed', stem: 'ibm-plex-sa
 /** The condensed family has no Greek: the normal width's is narrowed by this much. */
 const SQUEEZE = 0.9;
 
+/** Those with a module go into the sheet too. */
 const faces = [
-  { module: 'regular', family: 'Cw', style: 'Regular', source: NORMAL, cut: '400-normal', weight: 400 },
-  { module: 'italic', family: 'Cw', style: 'Italic', source: NORMAL, cut: '400-italic', weight: 400, italic: true },
+  { family: 'Cw', style: 'Regular', source: NORMAL, cut: '400-normal', weight: 400 },
+  { family: 'Cw', style: 'Italic', source: NORMAL, cut: '400-italic', weight: 400, italic: true },
   { module: 'semibold', family: 'Cw', style: 'SemiBold', source: NORMAL, cut: '600-normal', weight: 600 },
   { module: 'condensed', family: 'CwC', style: 'Regular', source: NARROW, cut: '400-normal', weight: 400 },
   {
@@ -93,7 +94,7 @@ for (const face of faces) {
   const font = await build(face);
   const covered = readCharacterMap(readTables(font).get('cmap'));
   const missing = [...characters].filter((one) => !covered.has(one.codePointAt(0)));
-  if (missing.length > 0) throw new Error(`${face.module} lacks ${missing.join(' ')}`);
+  if (missing.length > 0) throw new Error(`${face.family} ${face.style} lacks ${missing.join(' ')}`);
   const [main, apart] = [false, true].map((is) =>
     [...characters].filter((one) => accented.includes(one) === is).join(''),
   );
@@ -111,6 +112,8 @@ for (const face of faces) {
     writeFileSync(join(web, file), woff2);
     css += rule(face, file, text);
   }
+  console.log(face.family, face.style, `${covered.size} characters`);
+  if (!face.module) continue;
   const ttf = await subsetFont(font, characters, {
     targetFormat: 'sfnt',
     noHinting: true,
@@ -124,7 +127,6 @@ for (const face of faces) {
     join(sheet, `${face.module}.ts`),
     `/** ${face.family} ${face.style} as base64 of a TrueType file; made by .scripts/fonts.mjs, licence in OFL.txt. SHA-256 ${print}. */\nexport const ${face.module} =\n  '${Buffer.from(ttf).toString('base64')}';\n`,
   );
-  console.log(face.family, face.style, `${covered.size} characters, ${ttf.length} bytes`);
 }
 writeFileSync(join(web, 'fonts.css'), css);
 const licence = readFileSync(packageFile(NORMAL.name, 'LICENSE'));

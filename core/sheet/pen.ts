@@ -1,6 +1,6 @@
 import type { Faces, Family } from './faces.ts';
 import type { Run } from './richText.ts';
-import type { Face } from './trueType.ts';
+import { type Face, UNKNOWN } from './trueType.ts';
 
 /** mm on the page from its upper left corner, x to the right, y down. */
 export interface Spot {
@@ -57,21 +57,18 @@ export interface CircleMark extends PathStyle {
   readonly radius: number;
 }
 
-/** Lines drawn within an outline only. */
-export interface HatchMark {
-  readonly kind: 'hatch';
-  readonly outline: readonly Spot[];
-  readonly lines: readonly (readonly [Spot, Spot])[];
-  readonly width: number;
-}
-
 /** Black squares of one size, such as the modules of a QR code. */
 export interface SquaresMark {
   readonly kind: 'squares';
   readonly rows: readonly { readonly x: number; readonly y: number; readonly width: number; readonly height: number }[];
 }
 
-export type Mark = TextMark | PathMark | CircleMark | HatchMark | SquaresMark;
+export type Mark = TextMark | PathMark | CircleMark | SquaresMark;
+
+/** A run that may be bolder than the line it stands in. */
+export interface SetRun extends Run {
+  readonly bold?: boolean;
+}
 
 /** mm in a point of type. */
 export const POINT = 25.4 / 72;
@@ -82,21 +79,21 @@ const RAISED = 0.34;
 /** Least size of a subscript, pt. */
 const LEAST = 6.5;
 
-/** Stands for characters that the faces do not have. */
-const UNKNOWN = '□';
-
 /** Collects marks page by page; nothing is written before all is placed. Measures in mm. */
 export class Pen {
   readonly pages: Mark[][] = [[]];
+  private page = 0;
 
   constructor(private readonly faces: Faces) {}
 
-  newPage(): void {
-    this.pages.push([]);
+  /** The marks that follow go on this page, 0 the first; pages in between are made. */
+  turnTo(page: number): void {
+    while (this.pages.length <= page) this.pages.push([]);
+    this.page = page;
   }
 
   private put(mark: Mark): void {
-    this.pages.at(-1)!.push(mark);
+    this.pages[this.page]!.push(mark);
   }
 
   line(x1: number, y1: number, x2: number, y2: number, width: number, dash?: readonly number[]): void {
@@ -124,24 +121,8 @@ export class Pen {
     this.put({ kind: 'squares', rows });
   }
 
-  /** Hatch at 45 degrees, `gap` apart. */
-  hatch(outline: readonly Spot[], gap: number, width: number): void {
-    const xs = outline.map((spot) => spot.x);
-    const ys = outline.map((spot) => spot.y);
-    const [left, right, top, bottom] = [Math.min(...xs), Math.max(...xs), Math.min(...ys), Math.max(...ys)];
-    const step = gap * Math.SQRT2;
-    const lines: [Spot, Spot][] = [];
-    for (let c = Math.ceil((left + top) / step) * step; c <= right + bottom; c += step) {
-      lines.push([
-        { x: c - bottom, y: bottom },
-        { x: c - top, y: top },
-      ]);
-    }
-    this.put({ kind: 'hatch', outline, lines, width });
-  }
-
-  private faceOf(run: Run, { family = 'narrow', bold = false }: TextStyle): Face {
-    return this.faces({ family, bold, italic: run.italic });
+  private faceOf(run: SetRun, { family = 'narrow', bold = false }: TextStyle): Face {
+    return this.faces({ family, bold: run.bold ?? bold, italic: run.italic });
   }
 
   private sizeOf(run: Run, { size }: TextStyle): number {
@@ -153,15 +134,15 @@ export class Pen {
   }
 
   /** Width of a line, mm. */
-  width(text: string | readonly Run[], style: TextStyle): number {
+  width(text: string | readonly SetRun[], style: TextStyle): number {
     return runsOf(text).reduce((sum, run) => {
       const face = this.faceOf(run, style);
-      return sum + (face.width(this.covered(run.text, face)) * this.sizeOf(run, style) * POINT) / 1000;
+      return sum + (face.width(run.text) * this.sizeOf(run, style) * POINT) / 1000;
     }, 0);
   }
 
   /** Sets a line on its base line at x, y; returns its width. */
-  text(x: number, y: number, text: string | readonly Run[], style: TextStyle): number {
+  text(x: number, y: number, text: string | readonly SetRun[], style: TextStyle): number {
     const width = this.width(text, style);
     const { anchor = 'start', turned = false, white = false } = style;
     const back = anchor === 'middle' ? width / 2 : anchor === 'end' ? width : 0;
@@ -180,5 +161,5 @@ export class Pen {
   }
 }
 
-const runsOf = (text: string | readonly Run[]): readonly Run[] =>
+const runsOf = (text: string | readonly SetRun[]): readonly SetRun[] =>
   typeof text === 'string' ? [{ text, italic: false, sub: false }] : text;

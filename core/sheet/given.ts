@@ -1,0 +1,156 @@
+import { fixed, plain } from '../units/figures.ts';
+import type { Context, Zone } from './context.ts';
+import { body, DOTTED, HAIR } from './page.ts';
+import type { TextStyle } from './pen.ts';
+import { richText } from './richText.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { plainRun, setLines, wrap } from './textBlock.ts';
+
+type Row = readonly [label: string, value: string];
+
+const { labels } = say;
+const LABEL = 14;
+const LEADING = 3.75;
+const HEADING = 4.4;
+
+/** ` (assumed)` where the report says that nothing was given at this path. */
+const assumed = ({ input }: Context, path: string): string =>
+  input.report.assumptions.some((one) => one.path === path) ? say.assumed : '';
+
+const gradeName = ({ numbers }: Context, grade: string | { fy?: number; fu: number }): string => {
+  if (typeof grade === 'string') return grade;
+  return grade.fy === undefined ? `f_u ${numbers.load(grade.fu)}` : `f_y ${numbers.load(grade.fy)}`;
+};
+
+const beamRows = (context: Context): Row[] => {
+  const { input, numbers } = context;
+  const { end, facts, designation } = input;
+  const { mm, mpa } = numbers;
+  const name = designation || `${say.ownSize} ${mm(facts.h)} × ${mm(facts.b)}`;
+  const sizes = `h ${mm(facts.h)}, b ${mm(facts.b)}, t_f ${mm(facts.tf)}, t_w ${mm(facts.tw)}, r ${mm(facts.r)}`;
+  const other = end.joint.kind === 'fin-plate' ? say.plateInSteel : say.plyInSteel;
+  const steel = `f_y ${mpa(facts.fy)}, f_u ${mpa(facts.fu)}; ${other} ${mpa(facts.fyp)}, ${mpa(facts.fup)}`;
+  return [
+    [labels.beam, `${name}, ${gradeName(context, end.beam.grade)}`],
+    ['', sizes],
+    [labels.steel, steel],
+  ];
+};
+
+const copeRow = (context: Context): Row => {
+  const { input, numbers, words } = context;
+  const { facts } = input;
+  const one = (edge: 'top' | 'bottom', suffix: string, c: number, d: number, r: number): string =>
+    c > 0
+      ? `${say[edge]} c_${suffix} ${numbers.mm(c)}, d_${suffix} ${numbers.mm(d)}, ρ_${suffix} ${numbers.mm(r)}${assumed(context, `${edge}.radius`)}`
+      : `${say[edge]} ${say.none}`;
+  const label = words.cope.charAt(0).toUpperCase() + words.cope.slice(1);
+  return [
+    label,
+    `${one('top', 't', facts.ct, facts.dt, facts.rt)}; ${one('bottom', 'b', facts.cb, facts.db, facts.rb)}`,
+  ];
+};
+
+const boltRows = (context: Context): Row[] => {
+  const { input, numbers } = context;
+  const { end, facts } = input;
+  const { mm, mpa } = numbers;
+  const { bolts } = end.joint;
+  const columns = facts.m > 1 ? `${facts.m} × ` : '';
+  const grade = typeof bolts.grade === 'string' ? ` ${bolts.grade}` : '';
+  const threads = say.threads[facts.threadsIn ? 'in' : 'out'] + assumed(context, 'joint.bolts.threads');
+  const made = (bolts.holes ?? holesAssumed(context)) + assumed(context, 'joint.bolts.holes');
+  const gauge = facts.m > 1 ? `, q ${mm(facts.q)}` : '';
+  const pitch = facts.n > 1 ? `, p ${mm(facts.p)}` : '';
+  return [
+    [labels.bolts, `${columns}${facts.n} ${bolts.size}${grade}, f_ub ${mpa(facts.fub)}, ${threads}`],
+    [labels.holes, `d_0 ${mm(facts.d0)} ${made}, d′ ${mm(facts.dn)}`],
+    [labels.rows, `y_1 ${mm(facts.y1)}${pitch}, e_end ${mm(facts.eEnd)}${gauge}; ${say.setback} g ${mm(facts.g)}`],
+  ];
+};
+
+/** How holes were taken, as the report's assumption states it. */
+export const holesAssumed = ({ input }: Context): string => {
+  const note = input.report.assumptions.find(({ code }) => code === 'holes-assumed');
+  return /punched/.test(note?.text ?? '') ? 'punched' : 'drilled';
+};
+
+const plateRows = (context: Context): Row[] => {
+  const { input, numbers } = context;
+  const { end, facts } = input;
+  const { mm, mpa } = numbers;
+  const { joint } = end;
+  const edges = `e_top ${mm(facts.eTop)}, e_bot ${mm(facts.eBot)}, e_x ${mm(facts.ex)}`;
+  if (joint.kind === 'web-bolts') {
+    const size = `${mm(facts.tp)} × ${mm(facts.hp)}, ${gradeName(context, joint.ply.grade)}`;
+    return [
+      [labels.ply, size],
+      ['', edges],
+    ];
+  }
+  const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
+  const metal = facts.Xu > 0 ? `, X_u ${mpa(facts.Xu)}${assumed(context, 'joint.weld.electrode')}` : '';
+  return [
+    [labels.finPlate, `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${gradeName(context, joint.plate.grade)}`],
+    ['', edges],
+    [labels.weld, `${say.fillets} s ${mm(facts.leg)}${metal}`],
+  ];
+};
+
+const loadRows = (context: Context): Row[] => {
+  const { input, numbers, words } = context;
+  const { end, facts, report } = input;
+  const share = typeof end.reaction === 'number' ? '' : say.ofWebShear(fixed(report.shareOfWebShear, 2));
+  const level = `${report.level}${assumed(context, 'level')}`;
+  const tie = `${say.tie} T ${numbers.load(end.tie ?? 0)}`;
+  const arm = facts.tee.here ? facts.tee : facts.rectangle;
+  const toCope = arm.here ? `, e_c ${numbers.mm(arm.ec)} ${say.toCope(words.cope)}` : '';
+  const loadCase = end.sheet?.loadCase;
+  return [
+    [labels.reaction, `V ${numbers.load(report.reaction)}${share}, ${level}; ${tie}`],
+    ...(loadCase ? [[labels.loadCase, loadCase] as Row] : []),
+    [labels.arms, `z ${numbers.mm(facts.z)} ${say.toBolts}${toCope}`],
+  ];
+};
+
+const otherRows = (context: Context): Row[] => {
+  const { input, numbers } = context;
+  const { support, piece, end, quantity } = input.end;
+  const rows: Row[] = [];
+  if (support) {
+    const name = support.section ?? (support.thickness === undefined ? '' : plain(support.thickness, 3));
+    const level = support.topOfSteel === undefined ? '' : `, ${say.topOfSteel} ${numbers.load(support.topOfSteel)}`;
+    rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${level}`]);
+  }
+  const off = quantity === undefined ? '' : `${quantity} ${say.off}`;
+  const words = [piece, end && say.ends[end], off].filter(Boolean).join(', ');
+  if (words) rows.push([labels.piece, words]);
+  return rows;
+};
+
+/** The data that the checks stand on; `width` mm wide. */
+export const givenZone = (context: Context, width: number): Zone => {
+  const { pen, numbers, input } = context;
+  const style: TextStyle = { ...body, family: 'narrow' };
+  const rows = [
+    ...beamRows(context),
+    copeRow(context),
+    ...boltRows(context),
+    ...plateRows(context),
+    ...loadRows(context),
+    ...otherRows(context),
+  ].map(([label, value]) => ({ label, lines: wrap(pen, richText(value, 'prose'), style, width - LABEL) }));
+  const count = rows.reduce((sum, { lines }) => sum + lines.length, 0);
+  const draw = (x: number, y: number): void => {
+    const note = ` ${say.unitNote(numbers.units, input.end.sheet?.decimal ?? '.')}`;
+    pen.text(x, y + 3.3, [plainRun(say.given, true), plainRun(note)], style);
+    let at = y + HEADING;
+    for (const { label, lines } of rows) {
+      if (label) pen.line(x, at, x + width, at, HAIR, DOTTED);
+      pen.text(x, at + 2.9, label, style);
+      setLines(pen, x + LABEL, at + 2.9, lines, style, LEADING);
+      at += lines.length * LEADING;
+    }
+  };
+  return { height: HEADING + count * LEADING, draw };
+};

@@ -1,0 +1,82 @@
+import type { Context } from './context.ts';
+import { FRAME, LEFT, small, TOP, WIDTH } from './page.ts';
+import type { TextStyle } from './pen.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { atMostLines, oneLine, plainRun, setLines, wrap } from './textBlock.ts';
+
+/** Sizes in which the mark is tried, the largest first; the last two in the narrow family. */
+const marks: readonly TextStyle[] = [
+  { size: 29, family: 'wide', bold: true },
+  { size: 25, family: 'wide', bold: true },
+  { size: 25, family: 'narrow', bold: true },
+  { size: 21, family: 'narrow', bold: true },
+];
+const MARK = 48;
+const WIDEST_MARK = 84;
+const STANDARD = 64;
+
+/** Standard with its edition, as one designation. */
+export const standardName = ({ input }: Context): string => {
+  const { title, edition } = input.report.standard;
+  return /^\d{4}/.test(edition) ? `${title}:${edition}` : `${title}, ${edition}`;
+};
+
+/** Every option in force, as `key value`. */
+export const optionsText = ({ input }: Context): string =>
+  Object.entries(input.report.options)
+    .map(([key, value]) => `${key} ${value}`)
+    .join(', ');
+
+const optionStyle: TextStyle = { size: 8, family: 'narrow' };
+
+/** True where the options find room in the head strip. */
+export const optionsFit = (context: Context): boolean =>
+  wrap(context.pen, [plainRun(optionsText(context))], optionStyle, STANDARD).length <= 2;
+
+/** Mark, job, drawing, standard with edition and options. */
+export const drawHead = (context: Context): void => {
+  const { pen } = context;
+  pen.line(LEFT, TOP, LEFT + WIDTH, TOP, FRAME);
+  const used = drawMark(context);
+  const jobLeft = LEFT + Math.max(MARK, used) + 2;
+  const standardLeft = LEFT + WIDTH - STANDARD;
+  drawJob(context, jobLeft, standardLeft - jobLeft - 3);
+  drawStandard(context, standardLeft);
+};
+
+const drawMark = ({ pen, input }: Context): number => {
+  const text = input.report.mark;
+  if (!text) {
+    pen.box(LEFT, TOP + 3, MARK - 4, 11, { width: 0.25 });
+    return MARK - 4;
+  }
+  for (const style of marks) {
+    const width = pen.width(text, style);
+    if (width > (style.size > 25 ? MARK : WIDEST_MARK)) continue;
+    pen.text(LEFT - 0.3, TOP + 11.6, text, style);
+    return width;
+  }
+  const style: TextStyle = { size: 16, family: 'narrow', bold: true };
+  const lines = atMostLines(pen, wrap(pen, [plainRun(text)], style, WIDEST_MARK), 2, style, WIDEST_MARK);
+  setLines(pen, LEFT, TOP + 6.6, lines, style, 6.4);
+  return WIDEST_MARK;
+};
+
+const drawJob = ({ pen, input }: Context, left: number, width: number): void => {
+  const { job = '', drawing = '', number = '' } = input.end.sheet ?? {};
+  pen.text(left, TOP + 4.1, say.job, small);
+  const style: TextStyle = { size: 10 };
+  const lines = atMostLines(pen, wrap(pen, [plainRun(job)], style, width), 2, style, width);
+  setLines(pen, left, TOP + 8.2, lines, style, 3.6);
+  const labels = `${say.drawing}: ${drawing || say.noneGiven}${number ? `; ${say.number} ${number}` : ''}`;
+  pen.text(left, TOP + (lines.length > 1 ? 15.3 : 12.7), oneLine(pen, labels, small, width), small);
+};
+
+const drawStandard = (context: Context, left: number): void => {
+  const { pen } = context;
+  pen.text(left, TOP + 4.1, say.title, small);
+  const style: TextStyle = { size: 10, bold: true };
+  pen.text(left, TOP + 8.2, oneLine(pen, standardName(context), style, STANDARD), style);
+  const text = optionsFit(context) ? optionsText(context) : say.optionsBelow;
+  setLines(pen, left, TOP + 11.6, wrap(pen, [plainRun(text)], optionStyle, STANDARD), optionStyle, 3.2);
+};

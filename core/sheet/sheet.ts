@@ -1,0 +1,92 @@
+import { wordsOf } from '../check/examine.ts';
+import { standards } from '../standards/index.ts';
+import type { Context, SheetInput } from './context.ts';
+import { endKeywords } from './endInPdf.ts';
+import { loadFaces } from './faces.ts';
+import { drawHead } from './head.ts';
+import { numbersOf } from './numbers.ts';
+import { BLOCK_HEIGHT, bottomOf, FIGURE_TOP, LEFT, type Paper, papers, WIDTH } from './page.ts';
+import { writePdf } from './pdf.ts';
+import { Pen } from './pen.ts';
+import { DATA_WIDTH, FIGURE_WIDTH, type Plan, planOf } from './plan.ts';
+import { codeOf } from './qr.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { drawTitleBlock } from './titleBlock.ts';
+import { drawVerdict, governingOf } from './verdictLine.ts';
+import { drawFurtherFrame, furtherPages, workedChecks } from './workingPages.ts';
+
+export interface SheetOptions {
+  /** `governing`: the working of the check that governs, on the first sheet; `all`: those of all checks on further sheets too. */
+  readonly workings: 'governing' | 'all';
+}
+
+/** Zones from the top down; what is left of the height stands between them. */
+const drawPlan = (plan: Plan, bottom: number): void => {
+  const { figure, given, stress, table, footing, working, limits, upper } = plan;
+  const used = upper + table.height + footing.height + (working?.height ?? 0) + limits.height;
+  const gap = Math.max(0, Math.min(4, (bottom - BLOCK_HEIGHT - FIGURE_TOP - used - 0.6) / 3));
+  figure.draw(
+    LEFT + Math.max(0, (FIGURE_WIDTH - figure.width) / 2),
+    FIGURE_TOP + Math.max(0, (upper - figure.height) / 2),
+  );
+  const data = LEFT + WIDTH - DATA_WIDTH;
+  given.draw(data, FIGURE_TOP);
+  stress.draw(data, FIGURE_TOP + Math.max(given.height + 1, upper - stress.height));
+  let y = FIGURE_TOP + upper + gap;
+  table.draw(LEFT, y);
+  y += table.height;
+  footing.draw(LEFT, y);
+  y += footing.height + gap;
+  working?.draw(LEFT, y);
+  limits.draw(LEFT, y + (working?.height ?? 0));
+};
+
+/** All pages as marks. */
+const drawSheet = (context: Context, { workings }: SheetOptions, bottom: number): void => {
+  const { pen, input } = context;
+  const code = input.link === undefined ? null : codeOf(input.link);
+  const plan = planOf(context, bottom, input.link !== undefined && code === null);
+  const governing = governingOf(context);
+  const checks = workings === 'all' ? workedChecks(context) : plan.workingLater && governing ? [governing] : [];
+  const further = furtherPages(context, plan.later, checks, bottom);
+  const of = further.length + 1;
+  drawHead(context);
+  drawVerdict(context);
+  drawPlan(plan, bottom);
+  drawTitleBlock(context, bottom, code, { sheet: 1, of });
+  further.forEach((draw, i) => {
+    pen.turnTo(i + 1);
+    drawFurtherFrame(context, bottom, i + 2, of);
+    draw();
+  });
+};
+
+/** The pages of a sheet as marks in mm, before they become a file. */
+export const sheetPages = async (input: SheetInput, options: SheetOptions): Promise<Pen> => {
+  const { end, report } = input;
+  const pen = new Pen(await loadFaces());
+  const paper: Paper = end.sheet?.paper ?? 'A4';
+  const words = wordsOf(standards[report.standard.id]!);
+  const numbers = numbersOf(report.units, end.sheet?.decimal ?? '.');
+  drawSheet({ pen, input, numbers, words }, options, bottomOf(paper));
+  return pen;
+};
+
+/**
+ * One page for the job folder, A4 or Letter as the end says, and further pages for workings where they are asked for. Every check of the
+ * report needs its working. The file carries the end as JSON; no clock is read: same input and version, same bytes.
+ */
+export const sheetPdf = async (input: SheetInput, options: SheetOptions): Promise<Uint8Array> => {
+  const { end, report } = input;
+  const pen = await sheetPages(input, options);
+  const { date } = end.sheet ?? {};
+  return writePdf(pen.pages, {
+    paper: papers[end.sheet?.paper ?? 'A4'],
+    title: `${report.mark} ${say.subject}`.trim(),
+    subject: say.subject,
+    keywords: endKeywords(end),
+    creator: `${say.programName} ${report.version}`,
+    fingerprint: report.fingerprint,
+    ...(date !== undefined && { date }),
+  });
+};

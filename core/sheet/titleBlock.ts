@@ -1,0 +1,77 @@
+import type { Context } from './context.ts';
+import { BLOCK_HEIGHT, FRAME, HAIR, LEFT, NARROW, small, WIDTH } from './page.ts';
+import type { TextStyle } from './pen.ts';
+import { type Code, drawCode } from './qr.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { oneLine } from './textBlock.ts';
+
+const BOXES_LEFT = 29.5;
+const SIGN_HEIGHT = 13.6;
+
+/** Sheet numbers: this one of how many. */
+export interface Count {
+  readonly sheet: number;
+  readonly of: number;
+}
+
+/** Sign-off boxes, revision, fingerprint, program and cautions, at the foot of the window. */
+export const drawTitleBlock = (context: Context, bottom: number, code: Code | null, count: Count): void => {
+  const { pen } = context;
+  const top = bottom - BLOCK_HEIGHT;
+  pen.line(LEFT, top, LEFT + WIDTH, top, FRAME);
+  if (code) drawCode(pen, LEFT, top + 1.6, code);
+  const left = LEFT + (code ? BOXES_LEFT : 0);
+  drawSignOff(context, left, top + 1.6);
+  drawRevision(context, left, top + SIGN_HEIGHT + 2.4, count);
+  drawCautions(context, left, bottom - 0.6);
+};
+
+/** What the program asks everyone to keep in mind. */
+export const drawCautions = ({ pen, words }: Context, left: number, base: number): void => {
+  pen.text(left, base, words.cautions.join(' '), { size: 9, family: 'narrow' });
+};
+
+const drawSignOff = ({ pen, input }: Context, left: number, top: number): void => {
+  const { prepared = '', checked = '', approved = '' } = input.end.sheet ?? {};
+  const width = (LEFT + WIDTH - left) / 3;
+  const boxes = [
+    [say.prepared, prepared],
+    [say.checked, checked],
+    [say.approved, approved],
+  ] as const;
+  const style: TextStyle = { size: 9, family: 'narrow' };
+  pen.box(left, top, LEFT + WIDTH - left, SIGN_HEIGHT, { width: NARROW });
+  boxes.forEach(([label, name], i) => {
+    const x = left + i * width;
+    if (i > 0) pen.line(x, top, x, top + SIGN_HEIGHT, NARROW);
+    pen.text(x + 1.2, top + 3.2, label, small);
+    const rule = top + SIGN_HEIGHT - 3.8;
+    pen.line(x + 1.2, rule, x + width - 1.2, rule, HAIR);
+    if (name) pen.text(x + 1.2, rule - 0.9, oneLine(pen, name, style, width - 24), style);
+    pen.text(x + 1.2, rule + 2.9, say.name, small);
+    pen.text(x + width - 1.2, rule + 2.9, say.date, { ...small, anchor: 'end' });
+  });
+};
+
+/** Fingerprint in two groups, easier to compare. */
+export const fingerprintText = (fingerprint: string): string => `${fingerprint.slice(0, 4)} ${fingerprint.slice(4)}`;
+
+const drawRevision = ({ pen, input }: Context, left: number, top: number, count: Count): void => {
+  const { revision = '', reason = '', date = '' } = input.end.sheet ?? {};
+  const { version, fingerprint } = input.report;
+  const right = LEFT + WIDTH;
+  const program = `${say.programName} ${version}`;
+  const fields: (readonly [x: number, width: number, label: string, value: string])[] = [
+    [left, revision ? 15 : 46, say.revision, revision || say.unchecked],
+    [left + (revision ? 17 : 49), revision ? 44 : 12, say.reason, reason],
+    [right - 94, 16, say.dateOfIssue, date],
+    [right - 76, 36, say.fingerprint, fingerprintText(fingerprint)],
+    [right - 36, 24, say.program, program],
+    [right - 11, 11, say.sheet, `${count.sheet} ${say.of} ${count.of}`],
+  ];
+  const bold: TextStyle = { size: 9, bold: true };
+  for (const [x, width, label, value] of fields) {
+    pen.text(x, top + 2.5, label, small);
+    pen.text(x, top + 6.2, oneLine(pen, value, bold, width), bold);
+  }
+};

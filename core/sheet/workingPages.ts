@@ -1,0 +1,160 @@
+import type { Check } from '../check/report.ts';
+import { type Row, rowsWithin, tableZone } from './checkTable.ts';
+import type { Context, Zone } from './context.ts';
+import { standardName } from './head.ts';
+import { body, FRAME, LEFT, NARROW, small, TOP, WIDTH } from './page.ts';
+import type { SetRun, TextStyle } from './pen.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { oneLine, plainRun, wrap } from './textBlock.ts';
+import { drawCautions, fingerprintText } from './titleBlock.ts';
+import { titleOf } from './verdictLine.ts';
+import { type Step, stepsOf } from './workingLines.ts';
+import { sourceText } from './workingZone.ts';
+
+const style: TextStyle = { ...body, family: 'narrow' };
+const LEADING = 3.95;
+const HEAD = 11;
+const FOOT = 9;
+const GUTTER = 6;
+const COLUMN = (WIDTH - GUTTER) / 2;
+const SYMBOL = 13;
+
+/** A line of a column: a heading, or one side of a step behind its symbol. */
+interface Line {
+  readonly symbol?: readonly SetRun[];
+  readonly runs: readonly SetRun[];
+  readonly inset: number;
+  readonly height: number;
+  /** Stays with the line before it. */
+  readonly tied: boolean;
+}
+
+const headingLines = (context: Context, check: Check): Line[] => {
+  const runs = [plainRun(titleOf(check), true), plainRun(`  ${sourceText(check)}`)];
+  return wrap(context.pen, runs, style, COLUMN).map((line, i) => ({
+    runs: line,
+    inset: 0,
+    height: i === 0 ? LEADING + 2 : LEADING,
+    tied: i > 0,
+  }));
+};
+
+/** Sides one below the other, the equals signs in one column; the value follows on the line of the numbers where it fits. */
+const stepLines = ({ pen }: Context, step: Step): Line[] => {
+  const room = COLUMN - SYMBOL;
+  const wide = Math.max(SYMBOL, pen.width(step.symbol, style) + 1.5);
+  const rows: SetRun[][] = [];
+  for (const side of step.sides) {
+    const runs = [plainRun('= '), ...side];
+    const last = rows.at(-1);
+    const closing = side === step.sides.at(-1);
+    if (last && closing && pen.width([...last, plainRun(' '), ...runs], style) <= room)
+      last.push(plainRun(' '), ...runs);
+    else rows.push(...wrap(pen, runs, style, COLUMN - wide));
+  }
+  const notes = step.note.length > 0 ? wrap(pen, step.note, style, room) : [];
+  return [...rows, ...notes].map((runs, i) => ({
+    ...(i === 0 && { symbol: step.symbol }),
+    runs,
+    inset: i === 0 ? wide : SYMBOL,
+    height: LEADING,
+    tied: true,
+  }));
+};
+
+const linesOf = (context: Context, check: Check): Line[] => [
+  ...headingLines(context, check),
+  ...stepsOf(context, check).flatMap((step) => stepLines(context, step)),
+];
+
+/** Columns of lines, each no higher than `height`; a heading never stands alone at the foot. */
+const columnsOf = (lines: readonly Line[], height: number): Line[][] => {
+  const columns: Line[][] = [];
+  let column: Line[] = [];
+  let left = height;
+  lines.forEach((line, i) => {
+    const next = lines[i + 1];
+    const needs = line.height + (line.tied ? 0 : (next?.height ?? 0));
+    if (needs > left && column.length > 0) {
+      columns.push(column);
+      column = [];
+      left = height;
+    }
+    column.push(line);
+    left -= line.height;
+  });
+  if (column.length > 0) columns.push(column);
+  return columns;
+};
+
+const columnZone = ({ pen }: Context, lines: readonly Line[]): Zone => ({
+  height: lines.reduce((sum, { height }) => sum + height, 0),
+  draw: (x, y) => {
+    let base = y;
+    for (const { symbol, runs, inset, height } of lines) {
+      base += height;
+      if (symbol) pen.text(x, base, symbol, style);
+      pen.text(x + inset, base, runs, style);
+    }
+  },
+});
+
+/** Checks whose working goes on further sheets: those that stand in the table, in its order. */
+export const workedChecks = ({ input }: Context): readonly Check[] =>
+  input.report.checks.filter(({ state, working }) => state !== 'notApplicable' && (working?.length ?? 0) > 0);
+
+/** What the further sheets hold; each function draws one page below its head. */
+export const furtherPages = (
+  context: Context,
+  rows: readonly Row[],
+  checks: readonly Check[],
+  bottom: number,
+): (() => void)[] => {
+  const pages: (() => void)[] = [];
+  const room = bottom - FOOT - TOP - HEAD - 2;
+  for (let rest = rows; rest.length > 0; ) {
+    const count = Math.max(1, rowsWithin(rest, room));
+    const part = rest.slice(0, count);
+    pages.push(() => tableZone(context, part).draw(LEFT, TOP + HEAD + 2));
+    rest = rest.slice(count);
+  }
+  const columns = columnsOf(
+    checks.flatMap((check) => linesOf(context, check)),
+    room,
+  );
+  for (let i = 0; i < columns.length; i += 2) {
+    const pair = columns.slice(i, i + 2);
+    pages.push(() => {
+      pair.forEach((lines, k) => {
+        columnZone(context, lines).draw(LEFT + k * (COLUMN + GUTTER), TOP + HEAD);
+      });
+    });
+  }
+  return pages;
+};
+
+/** Mark, standard and number of a further sheet, and what binds it to the first. */
+export const drawFurtherFrame = (context: Context, bottom: number, sheet: number, of: number): void => {
+  const { pen, input } = context;
+  const { report, end } = input;
+  pen.line(LEFT, TOP, LEFT + WIDTH, TOP, FRAME);
+  pen.text(LEFT, TOP + 7.2, oneLine(pen, report.mark, { size: 16, bold: true }, 60), {
+    size: 16,
+    family: 'narrow',
+    bold: true,
+  });
+  const job = [end.sheet?.job, standardName(context)].filter(Boolean).join('; ');
+  pen.text(LEFT + 64, TOP + 6.8, oneLine(pen, `${say.workings}: ${job}`, style, WIDTH - 64), style);
+  pen.line(LEFT, TOP + HEAD - 0.8, LEFT + WIDTH, TOP + HEAD - 0.8, NARROW);
+  const line = bottom - FOOT + 2;
+  pen.line(LEFT, line, LEFT + WIDTH, line, NARROW);
+  drawCautions(context, LEFT, line + 3.6);
+  const revision = end.sheet?.revision || say.unchecked;
+  const parts = [
+    `${say.revision} ${revision}`,
+    fingerprintText(report.fingerprint),
+    `${say.programName} ${report.version}`,
+    `${say.sheet} ${sheet} ${say.of} ${of}`,
+  ];
+  pen.text(LEFT + WIDTH, line + 7, parts.join('   '), { ...small, anchor: 'end' });
+};

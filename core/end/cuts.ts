@@ -28,19 +28,23 @@ export const noCut: CutFacts = {
   t: 0,
 };
 
-const cutAt = (shape: Shape, topCut: boolean, c: number, dc: number, g: number): CutFacts => {
+/** Elastic modulus to the cut edge; with both edges cut, to the farther. */
+const modulusOf = ({ modulusTop, modulusBottom }: Shape, cut: 'top' | 'bottom' | 'both'): number =>
+  cut === 'both' ? Math.min(modulusTop, modulusBottom) : cut === 'top' ? modulusTop : modulusBottom;
+
+const cutAt = (shape: Shape, cut: 'top' | 'bottom' | 'both', c: number, dc: number, g: number): CutFacts => {
   const { at } = shearPeak(shape);
   return {
     here: true,
     shape,
-    topCut,
+    topCut: cut !== 'bottom',
     depth: shape.depth,
     c,
     dc,
     ec: g + c,
     A: shape.area,
     I: shape.inertia,
-    W: topCut ? shape.modulusTop : shape.modulusBottom,
+    W: modulusOf(shape, cut),
     Q: firstMoment(shape, at),
     t: thickness(shape, at),
   };
@@ -52,11 +56,11 @@ const cutAt = (shape: Shape, topCut: boolean, c: number, dc: number, g: number):
  */
 export const cutsOf = (section: Section, copes: Copes): { rectangle: CutFacts; tee: CutFacts } => {
   const { g, ct, dt, cb, db } = copes;
-  const top = () => cutAt(cutShape(section, dt, 0), true, ct, dt, g);
-  const bottom = () => cutAt(cutShape(section, 0, db), false, cb, db, g);
+  const top = () => cutAt(cutShape(section, dt, 0), 'top', ct, dt, g);
+  const bottom = () => cutAt(cutShape(section, 0, db), 'bottom', cb, db, g);
   if (dt > 0 && db > 0) {
     const [c, dc] = ct <= cb ? [ct, dt] : [cb, db];
-    const rectangle = cutAt(cutShape(section, dt, db), true, c, dc, g);
+    const rectangle = cutAt(cutShape(section, dt, db), 'both', c, dc, g);
     if (ct === cb) return { rectangle, tee: noCut };
     return { rectangle, tee: ct > cb ? top() : bottom() };
   }

@@ -28,19 +28,26 @@ export interface PublishedFixture {
   readonly expect: readonly Expectation[];
 }
 
-const readAll = <T>(folder: string): T[] => {
+const readAll = <T>(folder: string): [name: string, value: T][] => {
   const place = new URL(`../../fixtures/${folder}/`, import.meta.url);
   return readdirSync(place)
-    .filter((name) => name.endsWith('.json'))
+    .filter((file) => file.endsWith('.json'))
     .sort()
-    .map((name) => JSON.parse(readFileSync(new URL(name, place), 'utf8')) as T);
+    .map((file) => [file.slice(0, -5), JSON.parse(readFileSync(new URL(file, place), 'utf8')) as T]);
 };
 
-export const publishedFixtures = (): PublishedFixture[] => readAll('published');
+export const publishedFixtures = (): PublishedFixture[] =>
+  readAll<PublishedFixture>('published').map(([, fixture]) => fixture);
 
 /** Ends that are good, by name. */
-export const goodEnds = (): { name: string; end: Record<string, unknown> }[] => readAll('input/good');
+export const goodEnds = (): { name: string; end: Record<string, unknown> }[] =>
+  readAll<Record<string, unknown>>('input/good').map(([name, end]) => ({ name, end }));
+
+interface Refused {
+  readonly name: string;
+  readonly end: unknown;
+  readonly faults: readonly { readonly code: string; readonly path: string }[];
+}
 
 /** Ends that are bad, with the faults they must give. */
-export const badEnds = (): { name: string; end: unknown; faults: { code: string; path: string }[] }[] =>
-  readAll('input/bad');
+export const badEnds = (): Refused[] => readAll<Refused>('input/bad').map(([, refused]) => refused);

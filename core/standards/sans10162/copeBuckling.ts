@@ -26,7 +26,7 @@ import { E, phi } from './factors.ts';
  * Local buckling of the web at a cope: Cheng, Yura and Johnson (University of Texas, 1984), as US handbooks took it up. Not a clause of
  * the standard. Top cope: c <= 2 h, d <= h/2. Both flanges coped: c <= 2 h, d <= 0.2 h. The moment is V e_c at the cope's face.
  */
-const source = { clause: 'Cheng, Yura, Johnson 1984', basis: 'research' } as const;
+const source = { clause: 'Cheng et al. 1984', basis: 'research' } as const;
 const nu = constant('ν', 0.3);
 const pi = constant('π', Math.PI);
 

@@ -6,7 +6,7 @@ import { noRectangle, noTee } from './copeShear.ts';
 import { phi } from './factors.ts';
 
 /** Elastic shear stress V Q/(I t) at its peak in the web, held to 0.66 φ f_y where option `elastic-shear: verdict` asks for it. */
-const source = { clause: '13.4, rational analysis', basis: 'memory' } as const;
+const source = { clause: '13.4 rational', basis: 'memory' } as const;
 const informs = not(flag('option elastic-shear: verdict', (f) => f.options['elastic-shear'] === 'verdict'));
 const resistance = step('τ_r', times(0.66, phi, fy), source);
 

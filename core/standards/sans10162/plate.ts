@@ -5,7 +5,7 @@ import { phi } from './factors.ts';
 
 const gross = { clause: '13.11', basis: 'memory' } as const;
 const elastic = { clause: 'elastic', basis: 'memory' } as const;
-const bar = { clause: 'US rectangular-bar form', basis: 'research' } as const;
+const bar = { clause: 'US bar form', basis: 'research' } as const;
 
 /** Yielding in shear of the plate's full depth, coefficient of cl. 13.11. */
 export const plateGrossShear: StrengthRule = {

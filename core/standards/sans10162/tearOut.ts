@@ -15,7 +15,7 @@ import type { StrengthRule } from '../standard.ts';
 import { phi } from './factors.ts';
 
 const source = { clause: '13.11', basis: 'memory' } as const;
-const practice = { clause: '13.11 planes, rational', basis: 'practice' } as const;
+const practice = { clause: '13.11 planes', basis: 'practice' } as const;
 
 /** Two shear planes beside each bolt column, cl. 13.11 without a tension plane. */
 const upright = ({ t, columns, Lgv, Lnv }: UprightTear, fy: Tree<Stress>, fu: Tree<Stress>) =>

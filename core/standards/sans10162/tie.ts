@@ -10,7 +10,7 @@ import { bearingOn, boltResistance } from './bolts.ts';
 import { phi } from './factors.ts';
 import { filletLine } from './weld.ts';
 
-const source = { clause: '13.11, 13.12, 13.2', basis: 'memory' } as const;
+const source = { clause: '13.11 to 13.13', basis: 'memory' } as const;
 
 const way = (of: string, resistance: Way['resistance'], off: Way['off'] = []): Way => ({
   of,

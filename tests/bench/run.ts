@@ -1,0 +1,26 @@
+import { loadavg } from 'node:os';
+import { standards } from '../../core/standards/index.ts';
+import { coreBench } from './coreBench.ts';
+import type { Figure } from './timing.ts';
+
+const kept = ({ value, ceiling, more }: Figure): boolean => (more ? value >= ceiling : value <= ceiling);
+
+const show = (figure: Figure): string => {
+  const { name, value, unit, target, ceiling, more } = figure;
+  const digits = value >= 100 ? 0 : value >= 10 ? 1 : 2;
+  const bound = more ? `at least ${target} (floor ${ceiling})` : `at most ${target} (ceiling ${ceiling})`;
+  return `${kept(figure) ? ' ' : '!'} ${name.padEnd(84)} ${value.toFixed(digits).padStart(8)} ${unit.padEnd(6)} ${bound}`;
+};
+
+const figures: Figure[] = [];
+const collect = (rows: readonly Figure[]) => {
+  figures.push(...rows);
+  for (const row of rows) process.stdout.write(`${show(row)}\n`);
+};
+
+process.stdout.write(`Node ${process.version}, load ${loadavg()[0]!.toFixed(2)}; medians of interleaved rounds\n`);
+for (const standard of Object.values(standards)) collect(coreBench(standard));
+
+process.stdout.write(`load ${loadavg()[0]!.toFixed(2)} at the end\n`);
+const broken = figures.filter((figure) => !kept(figure));
+process.exitCode = broken.length > 0 ? 1 : 0;

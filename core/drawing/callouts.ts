@@ -66,7 +66,7 @@ const bolts = (it: Facts, words: DrawingWords, right: number): Callout => {
     targets: rows.map((i) => ({ x: x + r * Math.cos(0.25), y: rowY(it, i) - r * Math.sin(0.25) })),
     end: 'arrow',
     variants: [[[note(bolt)], [second(hole)]]],
-    near: { x: (plateBox(it).right + right) / 2, y: rowY(it, middle) - it.d },
+    near: { x: (plateBox(it).right + right) / 2, y: rowY(it, middle) - (it.n > 1 ? 0.5 * it.p : it.d) },
     onBeam: true,
     align: 'start',
   };
@@ -82,7 +82,7 @@ const plate = (it: Facts, words: DrawingWords, right: number): Callout => {
     targets: spots.map((s) => ({ x, y: top + (bottom - top) * s })),
     end: 'dot',
     variants: [[[note(`${words.plate} ${length(it.tp, words.units)}`)], [second('far side')]]],
-    near: { x: (edge + right) / 2, y: top + (bottom - top) * 0.62 },
+    near: { x: (edge + right) / 2, y: top + (bottom - top) * 0.55 },
     onBeam: true,
     align: 'start',
   };

@@ -1,18 +1,16 @@
 import type { Facts } from '../end/facts.ts';
+import { shearPeak } from '../shape/shearStress.ts';
 import { centreLines, holes } from './bolts.ts';
 import { callouts, weldMark } from './callouts.ts';
 import { dimensions } from './dimensions.ts';
-import type { Box, Drawing, Line } from './drawing.ts';
+import type { Box, Drawing, Line, Point } from './drawing.ts';
+import { drawnLength } from './drawnLength.ts';
 import { elevation } from './outline.ts';
 import { plateBox, plateEdges } from './plate.ts';
 import { sentences } from './sentences.ts';
 import { forceUnit, length, reaction } from './sizes.ts';
 import { faceSpan, supportBox, supportSection } from './support.ts';
 import type { DrawingWords } from './words.ts';
-
-/** Beam drawn beyond the last cope or the plate: this share of its depth, and no less than the length in mm. */
-const BEYOND = 0.28;
-const LEAST_BEYOND = 110;
 
 /**
  * The elevation of one end with everything that is said on it. Facts in N and mm; the reaction shown is `facts.V`, so pass the end's own.
@@ -41,6 +39,7 @@ export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
     ],
     callouts: callouts(facts, words, right),
     weld: weldMark(facts, words),
+    keptClear: keptClear(facts, right),
     face: {
       x: -facts.g,
       ...faceSpan(facts),
@@ -50,10 +49,6 @@ export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
     sentences: sentences(facts, words),
   };
 };
-
-/** Length of beam that is drawn, mm from its end. */
-export const drawnLength = (it: Facts): number =>
-  Math.max(it.ct, it.cb, plateBox(it).right, 0) + Math.max(BEYOND * it.h, LEAST_BEYOND);
 
 const pieceBox = (it: Facts, right: number): Box => {
   const plate = plateBox(it);
@@ -71,3 +66,21 @@ const reactionLine = (it: Facts, { units }: DrawingWords): Line => [
   { text: reaction(it.V, units), role: 'size', path: 'reaction' },
   { text: forceUnit(units), role: 'second' },
 ];
+
+/** Faces of the copes through the web, the first column, and the level where the full section is sheared most. */
+const keptClear = (it: Facts, right: number): [Point, Point][] => {
+  const level = shearPeak(it.whole).at;
+  const uncut = Math.max(it.ct, it.cb, plateBox(it).right);
+  return [
+    ...[it.ct, it.cb, it.eEnd]
+      .filter((x) => x > 0)
+      .map((x): [Point, Point] => [
+        { x, y: it.dt },
+        { x, y: it.h - it.db },
+      ]),
+    [
+      { x: uncut, y: level },
+      { x: right, y: level },
+    ],
+  ];
+};

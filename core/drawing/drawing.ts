@@ -135,6 +135,8 @@ export interface Drawing {
   readonly dimensions: readonly Dimension[];
   readonly callouts: readonly Callout[];
   readonly weld: WeldMark | null;
+  /** Lines along which paths of failing will run: words keep off them if they can. */
+  readonly keptClear: readonly (readonly [Point, Point])[];
   /** The support's face with its name, and the reaction on it. */
   readonly face: { readonly x: number; readonly top: number; readonly bottom: number; readonly line: Line };
   readonly reaction: Line;
@@ -159,4 +161,6 @@ export interface FailurePath {
   readonly caption: string;
   /** Fields whose sizes make the path: the bench may mark them. */
   readonly fields: readonly string[];
+  /** How far the whole path may be moved along the beam, mm, so as not to run through words. */
+  readonly slide?: number;
 }

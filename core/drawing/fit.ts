@@ -19,8 +19,8 @@ export interface Fitted {
 
 type Options = Omit<LayoutOptions, 'textHeight'>;
 
-/** Standard scales of a drawing on paper, the largest first: 1:1, 1:2, 1:2.5, 1:5, 1:10, 1:20. */
-export const paperScales = [1, 1 / 2, 1 / 2.5, 1 / 5, 1 / 10, 1 / 20] as const;
+/** Standard scales of a drawing on paper (ISO 5455), the largest first. */
+export const paperScales = [1, 1 / 2, 1 / 5, 1 / 10, 1 / 20] as const;
 
 /** The drawing at the largest of the scales at which it fits. */
 export const fitToScale = (

@@ -6,14 +6,16 @@ export interface Ground {
   line(from: Point, to: Point, weight: number, owner?: object): void;
   /** A box that nothing else may stand on. */
   take(box: Box): void;
-  /** What covering this box would cost; counting stops beyond `enough`. */
-  cost(box: Box, owner?: object, enough?: number): number;
+  /** What covering this box would cost, lines taken at a share of their weight; counting stops beyond `enough`. */
+  cost(box: Box, owner?: object, enough?: number, share?: number): number;
+  /** How many words a line would run through. */
+  words(from: Point, to: Point): number;
   /** What a leader along this line would cost. */
   crossing(from: Point, to: Point): number;
 }
 
-/** Words on words. */
-const WORDS = 1000;
+/** What it costs to stand on other words. */
+export const WORDS = 1000;
 /** A leader through words, and over a line of weight 1. */
 const LEADER_WORDS = 120;
 const LEADER_LINE = 0.12;
@@ -39,15 +41,19 @@ export const createGround = (): Ground => {
     take: (box) => {
       boxes.push(box);
     },
-    cost: (box, owner, enough = Number.POSITIVE_INFINITY) => {
+    cost: (box, owner, enough = Number.POSITIVE_INFINITY, share = 1) => {
       let sum = 0;
       for (const it of boxes) if (overlaps(it, box)) sum += WORDS;
       for (let i = 0; i < segments.length && sum < enough; i++) {
         const it = segments[i]!;
         if (it.owner !== undefined && it.owner === owner) continue;
-        if (meets(it, box)) sum += it.weight;
+        if (meets(it, box)) sum += share * it.weight;
       }
       return sum;
+    },
+    words: (from, to) => {
+      const line: Segment = { ax: from.x, ay: from.y, bx: to.x, by: to.y, weight: 0, owner: undefined };
+      return boxes.filter((box) => meets(line, box)).length;
     },
     crossing: (from, to) => {
       // A leader ends on the line that it names.

@@ -1,11 +1,9 @@
 import type { Box, Callout, Line, Point } from './drawing.ts';
 import { CAPITAL, drawHead, drawLine, keepOff, type Pad } from './pad.ts';
 import { AIR, blockBox, setBlock } from './place.ts';
+import { rings } from './rings.ts';
 
-/** Step of the search, how far it is fine and how far it goes; and dislike of distance from the best place and of a long leader; in text heights. */
-const STEP = 0.7;
-const CLOSE = 5;
-const REACH = 16;
+/** Dislike of distance from the best place and of a long leader, in text heights. */
 const FAR = 0.45;
 const LEADER = 0.15;
 /** A later variant of the words, and words beside the beam that should stand on it. */
@@ -101,21 +99,3 @@ const drawLeader = (pad: Pad, [from, to]: readonly [Point, Point], end: Callout[
 
 const within = (box: Box, beam: Box): boolean =>
   box.left >= beam.left && box.right <= beam.right && box.top >= beam.top && box.bottom <= beam.bottom;
-
-/** Steps around a place, the nearest first, wider ones further off; a step upright counts more than one along, since words are wide. */
-const rings = (() => {
-  const all: { x: number; y: number; far: number }[] = [];
-  const add = (step: number, from: number, to: number): void => {
-    const count = Math.ceil(to / step);
-    for (let i = -count; i <= count; i++) {
-      for (let j = -count; j <= count; j++) {
-        const [x, y] = [i * step, j * step];
-        const far = Math.hypot(x * 0.8, y);
-        if (far >= from && far < to) all.push({ x, y, far });
-      }
-    }
-  };
-  add(STEP, 0, CLOSE);
-  add(2 * STEP, CLOSE, REACH);
-  return all.sort((a, b) => a.far - b.far || a.x - b.x || a.y - b.y);
-})();

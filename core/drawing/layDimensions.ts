@@ -1,7 +1,9 @@
 import type { Box, Dimension, Drawing, Point } from './drawing.ts';
 import { layExtensions } from './extensions.ts';
+import { WORDS } from './ground.ts';
 import { intoLanes, type Placed } from './lanes.ts';
 import { CAPITAL, drawLine, keepOff, type Pad, setLine, widthOf } from './pad.ts';
+import { rings } from './rings.ts';
 
 const LINE_WEIGHT = 9;
 const TICK_WEIGHT = 12;
@@ -23,9 +25,9 @@ export const layDimensions = (pad: Pad, { dimensions }: Drawing): Placed[] => {
   return placed;
 };
 
-/** `in` its line's gap (or above it), on the line drawn `on` beyond an end, or `beside` it. */
+/** `in` its line's gap (or above it), on the line drawn `on` beyond an end, `beside` it, or `away` from it with a leader. */
 interface Spot {
-  readonly manner: 'in' | 'on' | 'beside';
+  readonly manner: 'in' | 'on' | 'beside' | 'away';
   /** Middle of the value along the line, and its distance across from the line. */
   readonly along: number;
   readonly across: number;
@@ -34,14 +36,8 @@ interface Spot {
 
 const layValue = (pad: Pad, it: Placed): void => {
   const { dimension } = it;
-  let best: Spot | undefined;
-  let least = Number.POSITIVE_INFINITY;
-  for (const spot of candidates(pad, it)) {
-    if (spot.cost >= least) continue;
-    const cost = spot.cost + pad.ground.cost(valueBox(pad, it, spot), it, least - spot.cost);
-    if (cost < least) [best, least] = [spot, cost];
-  }
-  if (best === undefined) return;
+  const close = cheapest(pad, it, candidates(pad, it));
+  const best = close.cost < WORDS ? close.spot : cheapest(pad, it, anywhere(pad, it)).spot;
   drawOwnLine(pad, it, best);
   const width = widthOf(pad, dimension.line);
   const { x, y } = spotPoint(it, best);
@@ -51,6 +47,29 @@ const layValue = (pad: Pad, it: Placed): void => {
   } else {
     setLine(pad, 'size', dimension.line, { x: x - width / 2, y: y + drop });
   }
+};
+
+const cheapest = (pad: Pad, it: Placed, spots: readonly Spot[]): { spot: Spot; cost: number } => {
+  let best = spots[0]!;
+  let least = Number.POSITIVE_INFINITY;
+  for (const spot of spots) {
+    if (spot.cost >= least) continue;
+    const cost = spot.cost + pad.ground.cost(valueBox(pad, it, spot), it, least - spot.cost);
+    if (cost < least) [best, least] = [spot, cost];
+  }
+  return { spot: best, cost: least };
+};
+
+/** Where even the places beside the line are taken: further off, with a leader. */
+const anywhere = (pad: Pad, it: Placed): Spot[] => {
+  const middle = (startOf(it) + endOf(it)) / 2;
+  const level = it.dimension.axis === 'x';
+  return rings.map(({ x, y, far }) => ({
+    manner: 'away',
+    along: middle + (level ? x : y) * pad.em,
+    across: (level ? y : x) * pad.em,
+    cost: far,
+  }));
 };
 
 /** Places for a value, those it would rather have first. */
@@ -111,6 +130,15 @@ const drawOwnLine = (pad: Pad, it: Placed, spot: Spot): void => {
     piece(start - before, end + after);
     keepOff(pad, [pointOn(it, start - before), pointOn(it, end + after)], LINE_WEIGHT, it);
   } else piece(start, end);
+  if (spot.manner === 'away') drawLine(pad, 'size', pointOn(it, (start + end) / 2), leaderEnd(pad, it, spot), { path });
+};
+
+/** The middle of the side of the value's box that faces its line. */
+const leaderEnd = (pad: Pad, it: Placed, spot: Spot): Point => {
+  const { left, top, right, bottom } = valueBox(pad, it, spot);
+  return it.dimension.axis === 'x'
+    ? { x: (left + right) / 2, y: spot.across < 0 ? bottom : top }
+    : { x: spot.across < 0 ? right : left, y: (top + bottom) / 2 };
 };
 
 /** One oblique stroke wherever a dimension line ends, or two of them meet. */

@@ -1,14 +1,15 @@
-import type { Box, Circle, FailurePath, Point, Tag } from './drawing.ts';
+import { chords, endOf } from './arcs.ts';
+import type { Box, Circle, FailurePath, Point } from './drawing.ts';
 import { hatchLines } from './hatch.ts';
-import { drawStroke, type Pad, setLine, widthOf } from './pad.ts';
-import { blockBox } from './place.ts';
+import { layTag } from './layTag.ts';
+import { drawStroke, type Pad } from './pad.ts';
 
 /** Spacing of the hatch in text heights. */
 const HATCH = 0.5;
-const OUTSIDE = 25;
 
 /** A way of failing over the piece: areas, lines, and its words where they cover least. */
-export const layPath = (pad: Pad, path: FailurePath, holes: readonly Circle[], piece: Box): void => {
+export const layPath = (pad: Pad, given: FailurePath, holes: readonly Circle[], piece: Box): void => {
+  const path = moved(given, clearShift(pad, given));
   for (const { outline, fill } of path.areas) {
     if (fill === 'black') pad.marks.push({ shape: 'fill', layer: 'path', outline });
     else {
@@ -24,45 +25,34 @@ export const layPath = (pad: Pad, path: FailurePath, holes: readonly Circle[], p
   for (const tag of path.tags) layTag(pad, tag, piece);
 };
 
-const layTag = (pad: Pad, tag: Tag, piece: Box): void => {
-  const line = [{ text: tag.text, role: 'path' }] as const;
-  const width = widthOf(pad, line);
-  let best: Point | undefined;
+/** The shift at which the strokes run through the fewest words. */
+const clearShift = ({ ground, em }: Pad, { strokes, slide = 0 }: FailurePath): number => {
+  let best = 0;
   let least = Number.POSITIVE_INFINITY;
-  for (const { at, cost } of places(pad, tag, width)) {
-    if (cost >= least) continue;
-    const box = blockBox(pad, [line], at);
-    const whole = cost + (inBox(box, piece) ? 0 : OUTSIDE) + pad.ground.cost(box, undefined, least - cost);
-    if (whole < least) [best, least] = [at, whole];
-  }
-  if (best !== undefined) setLine(pad, 'path', line, best);
-};
-
-/** Beside the part it speaks of, on either side, along its whole length; further off at need. */
-const places = function* ({ em }: Pad, { along: [a, b] }: Tag, width: number): Generator<{ at: Point; cost: number }> {
-  const run = Math.hypot(b.x - a.x, b.y - a.y);
-  const spot = run < 1e-9;
-  const upright = Math.abs(b.y - a.y) > Math.abs(b.x - a.x);
-  for (const away of [0, 0.8, 1.6, 2.6, 4, 6]) {
-    for (const share of spot ? [0.5] : [0.5, 0.4, 0.6, 0.3, 0.7, 0.2, 0.8, 0.1, 0.9, 0, 1]) {
-      const x = a.x + (b.x - a.x) * share;
-      const y = a.y + (b.y - a.y) * share;
-      const cost = Math.abs(share - 0.5) * 4 + away * 3;
-      const right = { x: x + (0.5 + away) * em, y: y + 0.35 * em };
-      const left = { x: x - (0.5 + away) * em - width, y: y + 0.35 * em };
-      const below = { x: x - width / 2, y: y + (1.15 + away) * em };
-      const above = { x: x - width / 2, y: y - (0.45 + away) * em };
-      if (upright || spot) {
-        yield { at: right, cost };
-        yield { at: left, cost: cost + 0.5 };
-      }
-      if (!upright || spot) {
-        yield { at: below, cost: cost + (spot ? 1 : 0) };
-        yield { at: above, cost: cost + 0.5 + (spot ? 1 : 0) };
-      }
+  for (let shift = 0; shift <= slide && least > 0; shift += 0.4 * em) {
+    let cost = 0;
+    for (const { from, to } of strokes) {
+      const points = chords(from, to);
+      for (let i = 1; i < points.length; i++)
+        cost += ground.words(along(points[i - 1]!, shift), along(points[i]!, shift));
     }
+    if (cost < least) [least, best] = [cost, shift];
   }
+  return best;
 };
 
-const inBox = (box: Box, piece: Box): boolean =>
-  box.left >= piece.left && box.right <= piece.right && box.top >= piece.top && box.bottom <= piece.bottom;
+const along = ({ x, y }: Point, shift: number): Point => ({ x: x + shift, y });
+
+/** Only straight strokes are ever moved. */
+const moved = (path: FailurePath, shift: number): FailurePath =>
+  shift === 0
+    ? path
+    : {
+        ...path,
+        strokes: path.strokes.map((it) => ({
+          ...it,
+          from: along(it.from, shift),
+          to: it.to.map((step) => along(endOf(step), shift)),
+        })),
+        tags: path.tags.map(({ along: [a, b], text }) => ({ along: [along(a, shift), along(b, shift)], text })),
+      };

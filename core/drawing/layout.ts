@@ -1,5 +1,5 @@
 import type { Drawing, FailurePath } from './drawing.ts';
-import type { Laid } from './laid.ts';
+import type { Laid, Mark } from './laid.ts';
 import { layCallouts } from './layCallouts.ts';
 import { layDimensions } from './layDimensions.ts';
 import { layFace } from './layFace.ts';
@@ -7,7 +7,7 @@ import { layPath } from './layPath.ts';
 import { layPiece } from './layPiece.ts';
 import { layWeld } from './layWeld.ts';
 import { condensed, type Measure } from './measure.ts';
-import { boxOf, createPad } from './pad.ts';
+import { boxOf, createPad, keepOff } from './pad.ts';
 
 export interface LayoutOptions {
   /** Text size (em), mm of the piece: what the pen's text size is at the scale it draws to. */
@@ -18,6 +18,8 @@ export interface LayoutOptions {
   readonly measure?: Measure;
 }
 
+/** How much words keep off lines where paths will run. */
+const CLEAR = 2.5;
 /** Air around the drawing, in text heights. */
 const AIR = 0.35;
 
@@ -30,14 +32,21 @@ export const layoutDrawing = (drawing: Drawing, options: LayoutOptions, path: Fa
   layPiece(pad, drawing);
   const placed = layDimensions(pad, drawing);
   layFace(pad, drawing, placed);
+  for (const line of drawing.keptClear) keepOff(pad, line, CLEAR);
   if (drawing.weld !== null) layWeld(pad, drawing.weld);
   layCallouts(pad, drawing.callouts, drawing.beam);
   if (path !== null) layPath(pad, path, drawing.holes, boxOf(pad.marks));
   const { left, top, right, bottom } = boxOf(pad.marks);
   const air = AIR * pad.em;
   return {
-    marks: pad.marks,
+    marks: inOrder(pad.marks),
     box: { left: left - air, top: top - air, right: right + air, bottom: bottom + air },
     textHeight: pad.em,
   };
 };
+
+/** Words over lines, whatever was laid first. */
+const inOrder = (marks: readonly Mark[]): Mark[] => [
+  ...marks.filter((it) => it.shape !== 'text'),
+  ...marks.filter((it) => it.shape === 'text'),
+];

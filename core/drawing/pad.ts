@@ -113,7 +113,7 @@ export const setLine = (pad: Pad, layer: Layer, line: Line, at: Point, rotation:
 };
 
 const wordBox = (at: Point, along: number, width: number, em: number, rotation: 0 | -90): Box => {
-  const [up, down] = [(CAPITAL + 0.06) * em, 0.16 * em];
+  const [up, down] = [(CAPITAL + 0.06) * em, 0.11 * em];
   return rotation === 0
     ? { left: at.x + along, right: at.x + along + width, top: at.y - up, bottom: at.y + down }
     : { left: at.x - up, right: at.x + down, top: at.y - along - width, bottom: at.y - along };

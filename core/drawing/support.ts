@@ -4,7 +4,7 @@ import type { Box, Stroke } from './drawing.ts';
 /** Levels between which the support's face is drawn, mm below the beam's top of steel. */
 export const faceSpan = (it: Facts): { top: number; bottom: number } => {
   const { here, topOfSteel, h } = it.support;
-  return here ? { top: Math.min(0, -topOfSteel), bottom: Math.max(it.h, h - topOfSteel) } : { top: 0, bottom: it.h };
+  return here ? { top: Math.min(0, 0 - topOfSteel), bottom: Math.max(it.h, h - topOfSteel) } : { top: 0, bottom: it.h };
 };
 
 /** How far the supporting beam reaches toward the beam from its face, and away from it, mm. */
@@ -14,7 +14,7 @@ export const supportBox = (it: Facts): Box | null => {
   return {
     left: -it.g - tw,
     right: -it.g + Math.max(0, (b - tw) / 2),
-    top: -topOfSteel,
+    top: 0 - topOfSteel,
     bottom: h - topOfSteel,
   };
 };

@@ -97,6 +97,9 @@ const drawText = (
     `x="${x}" y="${y}" font-size="${number(size * style.scale)}" text-anchor="${anchor}" fill="${ink}"`,
     ...(rotation === 0 ? [] : [`transform="rotate(${rotation} ${x} ${y})"`]),
     ...(italic ? ['font-style="italic"'] : []),
+    ...(style.paper === null
+      ? []
+      : [`stroke="${style.paper}" stroke-width="${number(3 * style.narrow)}" paint-order="stroke"`]),
     ...(role === 'path' ? ['font-weight="600"'] : []),
   ];
   return `<text ${attributes.join(' ')}>${escaped(text)}</text>`;

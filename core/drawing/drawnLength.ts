@@ -1,0 +1,10 @@
+import type { Facts } from '../end/facts.ts';
+import { plateBox } from './plate.ts';
+
+/** Beam drawn beyond the last cope or the plate: this share of its depth, and no less than the length in mm. */
+const BEYOND = 0.28;
+const LEAST_BEYOND = 110;
+
+/** Length of beam that is drawn, mm from its end. */
+export const drawnLength = (it: Facts): number =>
+  Math.max(it.ct, it.cb, plateBox(it).right, 0) + Math.max(BEYOND * it.h, LEAST_BEYOND);

@@ -1,0 +1,64 @@
+import type { Area, Point, Stroke } from '../drawing.ts';
+import { plateBox } from '../plate.ts';
+import { length } from '../sizes.ts';
+import { type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+import { cutOf, faceOf } from './shear.ts';
+
+/** Width of the stress figure over its depth. */
+const WIDE = 0.14;
+
+/** V at arm e_c bends what is left at the cope's face. */
+export const copeBending: PathMaker = (it, words, of) => {
+  const cut = cutOf(it, of);
+  if (cut === null || cut.shape === null) return null;
+  const [top, foot] = faceOf(it, cut);
+  const arm = level({ x: -it.g, y: foot.y - 0.14 * cut.depth }, cut.c);
+  return path(`What is left of the beam bends at the face of the ${words.cope}; the edges yield first.`, {
+    strokes: [torn(top, foot), ...arm.strokes],
+    areas: stressFigure(top, foot, cut.shape.centroid),
+    tags: [tag(...arm.ends, `arm ${length(cut.ec, words.units)}`)],
+    fields: ['setback', cut.c === it.ct ? 'top.length' : 'bottom.length', 'top.depth', 'bottom.depth'],
+  });
+};
+
+/** V at arm z bends the plate, at the middle of the bolts. */
+export const plateBending: PathMaker = (it, words) => {
+  const { left, top, bottom } = plateBox(it);
+  const x = left + it.z;
+  const [head, foot] = [
+    { x, y: top },
+    { x, y: bottom },
+  ];
+  const arm = level({ x: left, y: bottom - 0.1 * (bottom - top) }, x);
+  return path(`The ${words.plate} bends; its edges yield first.`, {
+    strokes: [torn(head, foot), ...arm.strokes],
+    areas: stressFigure(head, foot, (top + bottom) / 2),
+    tags: [tag(...arm.ends, `arm ${length(it.z, words.units)}`)],
+    fields: ['setback', 'joint.endDistance', plateField(it, 'topEdge'), plateField(it, 'bottomEdge')],
+  });
+};
+
+/** Two triangles on the section: pushed on one side of the centroid, pulled on the other. */
+const stressFigure = (top: Point, foot: Point, centroid: number): Area[] => {
+  const { x } = top;
+  const most = Math.max(centroid - top.y, foot.y - centroid);
+  const wide = WIDE * (foot.y - top.y);
+  const at = (y: number): Point => ({ x: x + (wide * (y - centroid)) / most, y });
+  const middle = { x, y: centroid };
+  return [
+    { fill: 'hatch', outline: [top, at(top.y), middle] },
+    { fill: 'hatch', outline: [foot, at(foot.y), middle] },
+  ];
+};
+
+/** The arm of the reaction, from the support's face to the section. */
+export const level = (from: Point, x: number): { strokes: Stroke[]; ends: [Point, Point] } => {
+  const to = { x, y: from.y };
+  return {
+    strokes: [
+      { kind: 'narrow', from, to: [to], arrow: true },
+      { kind: 'narrow', from: to, to: [from], arrow: true },
+    ],
+    ends: [from, to],
+  };
+};

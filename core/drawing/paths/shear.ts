@@ -1,0 +1,112 @@
+import type { CutFacts, Facts } from '../../end/facts.ts';
+import { columnX, rowY } from '../bolts.ts';
+import type { FailurePath, Stroke } from '../drawing.ts';
+import { drawnLength } from '../drawnLength.ts';
+import { plateBox } from '../plate.ts';
+import { length } from '../sizes.ts';
+import type { DrawingWords } from '../words.ts';
+import { type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+
+/** Through the full depth, beyond copes and plate. */
+export const webGrossShear: PathMaker = (it, words) => {
+  const x = Math.max(it.ct, it.cb, plateBox(it).right);
+  const [top, foot] = [
+    { x, y: 0 },
+    { x, y: it.h },
+  ];
+  return path('The full section shears beyond the end.', {
+    strokes: [torn(top, foot)],
+    tags: [tag(top, foot, `${length(it.h, words.units)} in shear`)],
+    slide: 0.94 * (drawnLength(it) - x),
+  });
+};
+
+/** Through what is left behind a cope, at that cope's face. */
+export const copeShear: PathMaker = (it, words, of) => {
+  const cut = cutOf(it, of);
+  if (cut === null) return null;
+  const [top, foot] = faceOf(it, cut);
+  return path(`What is left of the beam shears at the face of the ${words.cope}.`, {
+    strokes: [torn(top, foot)],
+    tags: [tag(top, foot, `${length(cut.depth, words.units)} in shear`)],
+    fields: ['top.depth', 'bottom.depth'],
+  });
+};
+
+/** From cut edge to cut edge through the holes of the first column. */
+export const webNetShear: PathMaker = (it, words) => {
+  const [top, foot] = [it.dt, it.h - it.db];
+  return netLine(it, words, { top, foot, name: 'web', how: 'shears', in: 'net in shear' });
+};
+
+/** Between the support and the first column. */
+export const plateGrossShear: PathMaker = (it, words) => {
+  const { left, top, bottom } = plateBox(it);
+  const x = left + 0.45 * (columnX(it, 0) - it.d0 / 2 - left);
+  const [head, foot] = [
+    { x, y: top },
+    { x, y: bottom },
+  ];
+  return path(`The ${words.plate} shears beside the support.`, {
+    strokes: [torn(head, foot)],
+    tags: [tag(head, foot, `${length(bottom - top, words.units)} in shear`)],
+    fields: [plateField(it, 'topEdge'), plateField(it, 'bottomEdge'), 'joint.bolts.pitch'],
+  });
+};
+
+export const plateNetShear: PathMaker = (it, words) => {
+  const { top, bottom } = plateBox(it);
+  return netLine(it, words, { top, foot: bottom, name: words.plate, how: 'shears', in: 'net in shear' });
+};
+
+/** The same lines, pulled apart by the tie force. */
+export const webNetTension: PathMaker = (it, words) => {
+  const [top, foot] = [it.dt, it.h - it.db];
+  return netLine(it, words, { top, foot, name: 'web', how: 'is pulled apart', in: 'net in tension' });
+};
+
+export const plateNetTension: PathMaker = (it, words) => {
+  const { top, bottom } = plateBox(it);
+  return netLine(it, words, { top, foot: bottom, name: words.plate, how: 'is pulled apart', in: 'net in tension' });
+};
+
+interface Net {
+  readonly top: number;
+  readonly foot: number;
+  readonly name: string;
+  readonly how: string;
+  readonly in: string;
+}
+
+const netLine = (it: Facts, words: DrawingWords, { top, foot, name, how, in: said }: Net): FailurePath => {
+  const x = columnX(it, 0);
+  const r = it.d0 / 2;
+  const edges = [top, ...Array.from({ length: it.n }, (_, i) => [rowY(it, i) - r, rowY(it, i) + r]).flat(), foot];
+  const strokes: Stroke[] = [];
+  for (let i = 0; i < edges.length; i += 2) {
+    strokes.push(torn({ x, y: edges[i]! }, { x, y: edges[i + 1]! }));
+  }
+  const net = length(Math.max(0, foot - top - it.n * it.dn), words.units);
+  return path(`The ${name} ${how} through the holes of a column.`, {
+    strokes,
+    tags: [tag({ x, y: top }, { x, y: foot }, `${net} ${said}`)],
+    fields: ['top.depth', 'bottom.depth'],
+  });
+};
+
+/** The cut section a check speaks of; by itself the rectangle, else the tee. */
+export const cutOf = (it: Facts, of: string): CutFacts | null => {
+  const named = of === 'tee' ? it.tee : of === 'rectangle' ? it.rectangle : it.rectangle.here ? it.rectangle : it.tee;
+  return named.here ? named : null;
+};
+
+/** Ends of the cut at the face of a cope. */
+export const faceOf = (it: Facts, cut: CutFacts): [{ x: number; y: number }, { x: number; y: number }] => {
+  const both = cut === it.rectangle;
+  const top = both || cut.topCut ? it.dt : 0;
+  const foot = both || !cut.topCut ? it.h - it.db : it.h;
+  return [
+    { x: cut.c, y: top },
+    { x: cut.c, y: foot },
+  ];
+};

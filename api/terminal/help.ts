@@ -1,0 +1,13 @@
+/** What the command line can do. */
+export const help = `Copewright checks the coped, drilled end of a steel beam before it is cut.
+
+  copewright check FILE.json [--working] [--json]   every way of failing, weakest first
+  copewright check --ndjson < ends.ndjson           one report or faults a line, in order
+  copewright sheet FILE.json -o out.pdf [--workings all]
+                                                    the sheet for the job folder
+  copewright serve [--port N] [--host H]            bench and API, http://127.0.0.1:4280
+  copewright help, copewright --version
+
+  - in place of a file reads standard input.
+  Exit status: 0 all hold; 1 some end fails or refers; 2 input not understood.
+`;

@@ -1,0 +1,87 @@
+import type { TargetedEvent, TargetedKeyboardEvent } from 'preact';
+import { editing, faultAt, focused, isAssumed, leave, revert, shown, step, unitAt, write } from '../state/bench.ts';
+import { fieldAt } from '../state/fields.ts';
+import { FieldNotes } from './FieldNotes.tsx';
+import { Stepper } from './Stepper.tsx';
+import { walk } from './walk.ts';
+
+export interface FieldProps {
+  /** Path in the JSON of the end, such as `joint.bolts.pitch`. */
+  readonly path: string;
+  readonly label: string;
+  /** Unit shown behind the field; absent = that of the field's quantity. */
+  readonly unit?: string;
+  /** Width in digits; absent = what the variant needs. */
+  readonly width?: number;
+  /** `box`: label, box, unit and steppers in a row. `drawn`: the number alone, on the drawing. */
+  readonly variant?: 'box' | 'drawn';
+}
+
+type InputKey = TargetedKeyboardEvent<HTMLInputElement>;
+
+const onKey = (path: string, event: InputKey): void => {
+  const { key, shiftKey, ctrlKey, metaKey, altKey } = event;
+  if (ctrlKey || metaKey || altKey) return;
+  const number = fieldAt(path).kind !== 'words';
+  if (key === 'Enter') walk(event.currentTarget, shiftKey);
+  else if (number && (key === 'ArrowUp' || key === 'ArrowDown')) step(path, key === 'ArrowUp' ? 1 : -1, shiftKey);
+  else if (key === 'Escape' && editing.value === path) revert(path);
+  else return;
+  event.preventDefault();
+  event.stopPropagation();
+};
+
+/** One input bound to a path of the end. Arrows step, Enter goes to the next field, Escape takes the typing back. */
+export const Field = ({ path, label, unit = unitAt(path), width, variant = 'box' }: FieldProps) => {
+  const id = `${variant}-${path}`;
+  const { kind } = fieldAt(path);
+  const fault = faultAt(path);
+  const text = shown(path);
+  const digits = width ?? (variant === 'drawn' ? Math.max(2, text.length) : undefined);
+  const field = (
+    <input
+      id={id}
+      class={`input${isAssumed(path) ? ' assumed' : ''}`}
+      type="text"
+      inputMode={kind === 'quantity' ? 'decimal' : kind === 'count' ? 'numeric' : 'text'}
+      autoComplete="off"
+      spellcheck={false}
+      data-field={path}
+      value={text}
+      style={digits === undefined ? undefined : { width: `calc(${digits}ch + var(--field-pad, 14px))` }}
+      aria-label={variant === 'drawn' ? `${label}${unit && `, ${unit}`}` : undefined}
+      aria-invalid={fault !== ''}
+      aria-describedby={`${id}-notes`}
+      onInput={(event: TargetedEvent<HTMLInputElement>) => {
+        editing.value = path;
+        write(path, event.currentTarget.value);
+      }}
+      onFocus={(event: TargetedEvent<HTMLInputElement>) => {
+        focused.value = path;
+        event.currentTarget.select();
+      }}
+      onBlur={() => {
+        if (focused.value === path) focused.value = null;
+        leave(path);
+      }}
+      onKeyDown={(event: InputKey) => onKey(path, event)}
+    />
+  );
+  if (variant === 'drawn') {
+    return (
+      <span class={`field drawn${fault ? ' faulty' : ''}`}>
+        {field}
+        <FieldNotes path={path} id={`${id}-notes`} />
+      </span>
+    );
+  }
+  return (
+    <div class={`field ${kind}${fault ? ' faulty' : ''}`}>
+      <label for={id}>{label}</label>
+      {field}
+      {kind !== 'words' && <span class="unit">{unit}</span>}
+      {kind !== 'words' && <Stepper path={path} label={label} />}
+      <FieldNotes path={path} id={`${id}-notes`} />
+    </div>
+  );
+};

@@ -1,0 +1,18 @@
+import { faultAt, isAssumed, readAs } from '../state/bench.ts';
+
+interface FieldNotesProps {
+  readonly path: string;
+  /** Id by which the field refers to its notes. */
+  readonly id: string;
+}
+
+/** What stands under a field: its fault, else how it was read, else that it is assumed. */
+export const FieldNotes = ({ path, id }: FieldNotesProps) => {
+  const fault = faultAt(path);
+  const note = readAs(path) || (isAssumed(path) ? 'assumed' : '');
+  return (
+    <span id={id} class="field-notes">
+      {fault ? <span class="field-fault">{fault}</span> : note && <span class="field-note">{note}</span>}
+    </span>
+  );
+};

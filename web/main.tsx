@@ -1,0 +1,27 @@
+import { render } from 'preact';
+import { Bench } from './shell/Bench.tsx';
+import { listenForKeys } from './shell/keys.ts';
+import { goOffline } from './shell/offline.ts';
+import { begin } from './state/bench.ts';
+import { take } from './state/carry.ts';
+import { demoEntry } from './state/demo.ts';
+import { readKept, startKeeping } from './state/keep.ts';
+import { isLink, openedLink } from './state/opened.ts';
+import { watchTabs } from './state/tabs.ts';
+
+/** A link opens as a step on top of what was kept, and leaves the address, so that loading again does not open it twice. */
+const openLink = async (): Promise<void> => {
+  const { hash } = location;
+  if (!isLink(hash)) return;
+  history.replaceState(null, '', location.pathname + location.search);
+  take(await openedLink(hash.slice(1)), 'the link');
+};
+
+begin(readKept() ?? demoEntry());
+startKeeping();
+watchTabs();
+listenForKeys();
+render(<Bench />, document.getElementById('bench')!);
+addEventListener('hashchange', () => void openLink());
+void openLink();
+void goOffline();

@@ -1,0 +1,32 @@
+import { useSignalEffect } from '@preact/signals';
+import { useRef } from 'preact/hooks';
+import { demanded, faults } from '../state/bench.ts';
+import { FieldLink } from './FieldLink.tsx';
+import { lineOf } from './goTo.ts';
+
+/** Every fault of the end, in the words that stand beside its field too, once they were asked for; it takes focus then. */
+export const FaultList = () => {
+  const list = useRef<HTMLElement>(null);
+  useSignalEffect(() => {
+    if (demanded.value) requestAnimationFrame(() => list.current?.focus());
+  });
+  if (faults.value.length === 0 || (!demanded.value && faults.value.every(({ path }) => lineOf(path)))) return null;
+  return (
+    <section ref={list} class="fault-list" tabIndex={-1} aria-labelledby="fault-title">
+      <h3 id="fault-title">Not complete</h3>
+      <ul>
+        {faults.value.map(({ path, code, text }) => (
+          <li key={`${path}${code}`}>
+            {lineOf(path) ? (
+              <FieldLink path={path} kind="plain">
+                {text}
+              </FieldLink>
+            ) : (
+              text
+            )}
+          </li>
+        ))}
+      </ul>
+    </section>
+  );
+};

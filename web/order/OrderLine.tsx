@@ -1,0 +1,81 @@
+import { useSignalEffect } from '@preact/signals';
+import type { ComponentChildren } from 'preact';
+import { useEffect, useRef } from 'preact/hooks';
+import { enter, WALK_END, type WalkEnd } from '../field/walk.ts';
+import { faultAt, faults } from '../state/bench.ts';
+import { goOn, type LineName, lineOf, openLine, takeWanted, wants } from './goTo.ts';
+
+interface OrderLineProps {
+  readonly name: LineName;
+  readonly title: string;
+  /** The line in one sentence. */
+  readonly sentence: ComponentChildren;
+  /** Its fields, shown while it is open. */
+  readonly children: ComponentChildren;
+}
+
+const focusWanted = (line: HTMLElement): void => {
+  const wanted = takeWanted();
+  if (!wanted) return;
+  if ('back' in wanted) enter(line, wanted.back);
+  else {
+    const field = line.querySelector<HTMLElement>(`[data-field="${CSS.escape(wanted.path)}"]`);
+    if (field) field.focus();
+    else enter(line);
+  }
+};
+
+/** Faults of a closed line, so that none hides behind it. */
+const ClosedFaults = ({ name }: { readonly name: LineName }) => (
+  <>
+    {faults.value
+      .filter(({ path }) => lineOf(path) === name && faultAt(path) !== '')
+      .map(({ path, text }) => (
+        <p key={path} class="field-fault">
+          {text}
+        </p>
+      ))}
+  </>
+);
+
+/** One line of the order: a sentence that opens in place to its fields. Enter in its last field opens the next line. */
+export const OrderLine = ({ name, title, sentence, children }: OrderLineProps) => {
+  const line = useRef<HTMLFieldSetElement>(null);
+  const open = openLine.value === name;
+  useSignalEffect(() => {
+    // Read for its change alone: the open line may be wanted again.
+    void wants.value;
+    if (openLine.value === name) requestAnimationFrame(() => line.current && focusWanted(line.current));
+  });
+  useEffect(() => {
+    const fields = line.current;
+    const onEnd = (event: Event) => goOn(name, (event as CustomEvent<WalkEnd>).detail.back);
+    fields?.addEventListener(WALK_END, onEnd);
+    return () => fields?.removeEventListener(WALK_END, onEnd);
+  }, [name]);
+  const close = (event: KeyboardEvent) => {
+    if (event.key !== 'Escape' || !open) return;
+    openLine.value = null;
+    line.current?.querySelector<HTMLElement>('.line-title')?.focus();
+  };
+  return (
+    <li class={`order-line${open ? ' open' : ''}`}>
+      <fieldset ref={line} data-walk onKeyDown={close}>
+        <legend>
+          <button
+            type="button"
+            class="line-title"
+            aria-expanded={open}
+            onClick={() => {
+              openLine.value = open ? null : name;
+            }}
+          >
+            {title}
+          </button>
+        </legend>
+        <p class="sentence">{sentence}</p>
+        {open ? <div class="order-fields">{children}</div> : <ClosedFaults name={name} />}
+      </fieldset>
+    </li>
+  );
+};

@@ -1,0 +1,48 @@
+import { standards } from '../../core/standards/index.ts';
+import { Choice } from '../field/Choice.tsx';
+import { entry, standard } from '../state/bench.ts';
+import { textOf } from '../state/entry.ts';
+import { OrderLine } from './OrderLine.tsx';
+import { optionName, optionValue } from './optionWords.ts';
+import { Value } from './Value.tsx';
+
+const titled = Object.values(standards).map(({ id, title, edition }) => ({ value: id, label: `${title}:${edition}` }));
+
+const chosenOptions = (): string[] =>
+  Object.keys(standard.value?.options ?? {}).filter((key) => textOf(entry.value, `options.${key}`) !== '');
+
+const Sentence = () => {
+  const known = standard.value;
+  const keys = chosenOptions();
+  return (
+    <>
+      <Value path="standard" missing="standard?" {...(known && { text: `${known.title}:${known.edition}` })} />;{' '}
+      {keys.length === 0
+        ? 'its usual options (assumed)'
+        : keys.map((key, at) => (
+            <span key={key}>
+              {at > 0 && ', '}
+              {optionName(key).toLowerCase()}{' '}
+              <Value path={`options.${key}`} text={optionValue(textOf(entry.value, `options.${key}`))} />
+            </span>
+          ))}
+      .
+    </>
+  );
+};
+
+/** The design standard and its options. */
+export const StandardLine = () => (
+  <OrderLine name="standard" title="Standard" sentence={<Sentence />}>
+    <Choice path="standard" label="Standard" options={titled} />
+    {Object.entries(standard.value?.options ?? {}).map(([key, values]) => (
+      <Choice
+        key={key}
+        path={`options.${key}`}
+        label={optionName(key)}
+        options={values.map((value) => ({ value, label: optionValue(value) }))}
+        empty={`${optionValue(values[0])} (assumed)`}
+      />
+    ))}
+  </OrderLine>
+);

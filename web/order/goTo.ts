@@ -1,0 +1,64 @@
+import { signal } from '@preact/signals';
+
+/** The lines of the order. */
+export const lineNames = ['beam', 'cut', 'bolts', 'joint', 'load', 'standard', 'sheet'] as const;
+export type LineName = (typeof lineNames)[number];
+
+/** The line that is open. */
+export const openLine = signal<LineName | null>(null);
+
+/** What gets focus once the open line is on the page: a field by its path, or its first or last field. */
+let wanted: { readonly path: string } | { readonly back: boolean } | null = null;
+
+export const takeWanted = (): typeof wanted => {
+  const taken = wanted;
+  wanted = null;
+  return taken;
+};
+
+/** Tells an open line that a field of it is wanted. */
+export const wants = signal(0);
+
+const lines: readonly (readonly [prefix: string, line: LineName])[] = [
+  ['beam', 'beam'],
+  ['top', 'cut'],
+  ['bottom', 'cut'],
+  ['setback', 'cut'],
+  ['joint.firstRow', 'bolts'],
+  ['joint.endDistance', 'bolts'],
+  ['joint.bolts', 'bolts'],
+  ['joint', 'joint'],
+  ['support', 'joint'],
+  ['reaction', 'load'],
+  ['level', 'load'],
+  ['tie', 'load'],
+  ['standard', 'standard'],
+  ['options', 'standard'],
+  ['mark', 'sheet'],
+  ['piece', 'sheet'],
+  ['end', 'sheet'],
+  ['quantity', 'sheet'],
+  ['sheet', 'sheet'],
+];
+
+/** The line in which a field stands; undefined for what is no field of the bench. */
+export const lineOf = (path: string): LineName | undefined =>
+  lines.find(([prefix]) => path === prefix || path.startsWith(`${prefix}.`))?.[1];
+
+const open = (line: LineName, focus: NonNullable<typeof wanted>): void => {
+  wanted = focus;
+  openLine.value = line;
+  wants.value += 1;
+};
+
+/** Opens the line of a field and puts focus there. */
+export const goTo = (path: string): void => {
+  const line = lineOf(path);
+  if (line) open(line, { path });
+};
+
+/** Opens the next line, or the one before, and puts focus on its first or last field; at the end of the order nothing happens. */
+export const goOn = (from: LineName, back: boolean): void => {
+  const line = lineNames[lineNames.indexOf(from) + (back ? -1 : 1)];
+  if (line) open(line, { back });
+};

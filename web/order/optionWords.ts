@@ -1,0 +1,30 @@
+/** Plain words for the options of standards and their values. */
+export const optionWords: Readonly<Record<string, string>> = {
+  'elastic-shear': 'Elastic shear stress',
+  'bolt-group': 'Bolt group',
+  'cope-shear': 'Shear at the cut',
+  'web-block': 'Block tearing, web',
+  'plate-block': 'Block tearing, plate',
+  'web-net-shear': 'Net shear, web',
+  'plate-edges': 'Plate edges',
+  edges: 'Edges',
+  weld: 'Weld',
+  'cope-bending': 'Bending at the cut',
+  'plate-bending': 'Plate bending',
+  report: 'for information',
+  verdict: 'counts in the verdict',
+  elastic: 'elastic',
+  'instantaneous-centre': 'instantaneous centre',
+  mean: 'mean stress',
+  plastic: 'plastic',
+  standard: 'as the clause',
+  cautious: 'cautious',
+  sheared: 'sheared',
+  cut: 'flame cut or sawn',
+};
+
+const spaced = (key: string): string => key.replace(/-/g, ' ');
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
+export const optionName = (key: string): string => optionWords[key] ?? capital(spaced(key));
+export const optionValue = (value: string): string => optionWords[value] ?? spaced(value);

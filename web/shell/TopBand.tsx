@@ -1,0 +1,98 @@
+import type { TargetedEvent } from 'preact';
+import { useRef } from 'preact/hooks';
+import { redo, setUnits, timeline, undo, units } from '../state/bench.ts';
+import { copyLink, openFile, saveFile } from '../state/carry.ts';
+import { beginEmpty } from './beginEmpty.ts';
+import { keysShown } from './keys.ts';
+
+const systems = [
+  { system: 'mm-kN', label: 'mm · kN' },
+  { system: 'in-kip', label: 'in · kip' },
+] as const;
+
+const UnitsSwitch = () => (
+  <fieldset class="units-switch">
+    <legend class="unseen">Units of the whole end</legend>
+    {systems.map(({ system, label }) => (
+      <label key={system}>
+        <input type="radio" name="units" checked={units.value === system} onChange={() => setUnits(system)} />
+        <span>{label}</span>
+      </label>
+    ))}
+  </fieldset>
+);
+
+const OpenButton = () => {
+  const picker = useRef<HTMLInputElement>(null);
+  const onPick = (event: TargetedEvent<HTMLInputElement>) => {
+    const input = event.currentTarget;
+    const file = input.files?.[0];
+    if (file) void openFile(file);
+    input.value = '';
+  };
+  return (
+    <>
+      <button type="button" onClick={() => picker.current?.click()}>
+        Open
+      </button>
+      <input
+        ref={picker}
+        type="file"
+        accept=".json,application/json,.pdf,application/pdf"
+        hidden
+        aria-label="A file of an end, or its sheet"
+        onChange={onPick}
+      />
+    </>
+  );
+};
+
+const Undoing = () => {
+  const { done, undone } = timeline.value;
+  const last = done.at(-1)?.name;
+  const next = undone.at(-1)?.name;
+  return (
+    <>
+      <button type="button" disabled={last === undefined} title={last} onClick={undo}>
+        Undo{last !== undefined && <span class="unseen">: {last}</span>}
+      </button>
+      <button type="button" disabled={next === undefined} title={next} onClick={redo}>
+        Redo{next !== undefined && <span class="unseen">: {next}</span>}
+      </button>
+    </>
+  );
+};
+
+/** The band across the top: where one is, what can be done with the whole end, and its units. */
+export const TopBand = () => (
+  <header class="top-band">
+    <b class="brand">Copewright</b>
+    <nav aria-label="Pages">
+      <a href="./" aria-current="page">
+        Bench
+      </a>
+    </nav>
+    <div class="whole-end" role="toolbar" aria-label="The whole end">
+      <Undoing />
+      <button type="button" onClick={beginEmpty}>
+        New
+      </button>
+      <OpenButton />
+      <button type="button" onClick={saveFile}>
+        Save
+      </button>
+      <button type="button" onClick={() => void copyLink()}>
+        Link
+      </button>
+      <button
+        type="button"
+        onClick={() => {
+          keysShown.value = true;
+        }}
+      >
+        Keys
+      </button>
+    </div>
+    <UnitsSwitch />
+  </header>
+);

@@ -1,0 +1,44 @@
+import { signal } from '@preact/signals';
+
+/** The page has no network; every check still works. */
+export const isOffline = signal(false);
+/** The page is stored whole, so that it opens without a network. */
+export const isStored = signal(false);
+/** A newer version waits for this page to let it in. */
+export const newVersion = signal(false);
+
+let waiting: ServiceWorker | null = null;
+
+const watch = (registration: ServiceWorkerRegistration): void => {
+  const note = () => {
+    isStored.value = registration.active !== null;
+    waiting = registration.waiting;
+    newVersion.value = waiting !== null && registration.active !== null;
+  };
+  note();
+  const follow = (worker: ServiceWorker | null) => worker?.addEventListener('statechange', note);
+  follow(registration.installing);
+  registration.addEventListener('updatefound', () => follow(registration.installing));
+};
+
+/** Lets the newer version in and loads it; what stands in the fields was kept by then. */
+export const takeNewVersion = (): void => {
+  navigator.serviceWorker.addEventListener('controllerchange', () => location.reload(), { once: true });
+  waiting?.postMessage('take over');
+};
+
+/** Stores the page for use without a network, and watches the network. */
+export const goOffline = async (): Promise<void> => {
+  const note = () => {
+    isOffline.value = !navigator.onLine;
+  };
+  note();
+  addEventListener('online', note);
+  addEventListener('offline', note);
+  if (!('serviceWorker' in navigator)) return;
+  try {
+    watch(await navigator.serviceWorker.register('./sw.js'));
+  } catch {
+    isStored.value = false;
+  }
+};

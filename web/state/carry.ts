@@ -1,0 +1,91 @@
+import type { Examined } from '../../core/check/examine.ts';
+import { demanded, examination, replace } from './bench.ts';
+import { entryOf } from './entryOf.ts';
+import { fileText } from './fileText.ts';
+import { notice, refuse, tell } from './notice.ts';
+import { type Opened, openedFile } from './opened.ts';
+
+/** The end as it stands, looked at in full; where it is not complete, that is said and its faults are shown. */
+const whole = (wanted: string): Examined | undefined => {
+  const found = examination.value;
+  if ('examined' in found) return found.examined;
+  demanded.value = true;
+  refuse(
+    `${wanted} needs a complete end`,
+    found.faults.map(({ text }) => text),
+  );
+  return undefined;
+};
+
+const fileName = ({ end }: Examined, kind: string): string =>
+  `${(end.mark ?? '').replace(/[^\w.-]+/g, '-').replace(/^[-.]+|-+$/g, '') || 'end'}.${kind}`;
+
+/** Hands a file to the browser's own way of saving. */
+const hand = (data: string | Uint8Array<ArrayBuffer>, type: string, name: string): void => {
+  const url = URL.createObjectURL(new Blob([data], { type }));
+  const anchor = Object.assign(document.createElement('a'), { href: url, download: name });
+  anchor.click();
+  setTimeout(() => URL.revokeObjectURL(url), 60_000);
+};
+
+/** Saves the end as a file of its public JSON. */
+export const saveFile = (): void => {
+  const examined = whole('The file');
+  if (!examined) return;
+  const name = fileName(examined, 'json');
+  hand(fileText(examined.end), 'application/json', name);
+  tell(`Saved as ${name}`);
+};
+
+const linkText = async ({ end, report }: Examined): Promise<string> => {
+  const { encodeLink } = await import('../../core/exchange/link.ts');
+  return encodeLink(end, report.fingerprint);
+};
+
+/** Copies a link that carries the whole end; where the browser does not allow it, the link is shown to be copied by hand. */
+export const copyLink = async (): Promise<void> => {
+  const examined = whole('The link');
+  if (!examined) return;
+  const link = `${location.origin}${location.pathname}#${await linkText(examined)}`;
+  try {
+    await navigator.clipboard.writeText(link);
+    tell('Link copied: it carries the whole end');
+  } catch {
+    notice.value = { kind: 'done', title: 'The link carries the whole end', copy: link };
+  }
+};
+
+/** Writes the sheet of the end as a PDF. */
+export const issueSheet = async (): Promise<void> => {
+  const examined = whole('The sheet');
+  if (!examined) return;
+  try {
+    const { sheetPdf } = await import('../../core/sheet/sheet.ts');
+    const link = await linkText(examined);
+    const name = fileName(examined, 'pdf');
+    const bytes = await sheetPdf({ ...examined, link }, { workings: 'governing' });
+    hand(new Uint8Array(bytes), 'application/pdf', name);
+    tell(`Sheet written as ${name}`);
+  } catch (error) {
+    refuse('The sheet could not be written', [error instanceof Error ? error.message : String(error)]);
+  }
+};
+
+/** Puts what was opened on the bench, as one step that can be undone; or says why it could not be opened and leaves the bench as it is. */
+export const take = (opened: Opened, from: string): void => {
+  if ('refused' in opened) {
+    refuse(`Not opened: ${from}. The bench is as it was.`, opened.refused);
+    return;
+  }
+  replace(entryOf(opened.end), `Opened ${from}`);
+  tell(`Opened ${from}. Undo brings back what was there.`);
+};
+
+/** Opens a file, or a sheet's PDF, that was picked or dropped. */
+export const openFile = async (file: File): Promise<void> => {
+  try {
+    take(await openedFile(new Uint8Array(await file.arrayBuffer())), file.name);
+  } catch {
+    refuse(`Not opened: ${file.name} could not be read. The bench is as it was.`);
+  }
+};

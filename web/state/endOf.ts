@@ -1,0 +1,144 @@
+import type { Fault } from '../../core/end/fault.ts';
+import { type Entry, textOf } from './entry.ts';
+import { isFault, readField } from './readField.ts';
+
+/** The end that an entry describes, as the JSON of a file, and the fields whose text could not be read. */
+export interface EntryRead {
+  readonly input: Readonly<Record<string, unknown>>;
+  readonly faults: readonly Fault[];
+}
+
+type Tree = { [key: string]: unknown };
+
+/** Reads the fields of an entry, and keeps what could not be read. */
+class EntryReader {
+  readonly faults: Fault[] = [];
+
+  constructor(readonly entry: Entry) {}
+
+  words(path: string): string | undefined {
+    return textOf(this.entry, path).trim() || undefined;
+  }
+
+  number(path: string): number | undefined {
+    const reading = readField(this.entry, path);
+    if (isFault(reading)) this.faults.push(reading);
+    return reading === undefined || isFault(reading) ? undefined : reading.value;
+  }
+
+  numbers(path: string, names: readonly string[]): Tree {
+    return Object.fromEntries(names.map((name) => [name, this.number(`${path}.${name}`)]));
+  }
+
+  by(path: string): string {
+    return textOf(this.entry, `${path}.by`);
+  }
+
+  grade(path: string, strengths: readonly string[] = ['fy', 'fu']): unknown {
+    return this.by(path) === 'strength' ? this.numbers(path, strengths) : this.words(path);
+  }
+
+  under(path: string): string[] {
+    return Object.keys(this.entry.texts).filter((one) => one.startsWith(`${path}.`));
+  }
+}
+
+const cope = (reader: EntryReader, path: 'top' | 'bottom'): Tree | null | undefined => {
+  const there = reader.words(path);
+  if (there === undefined) return undefined;
+  return there === 'on' ? reader.numbers(path, ['length', 'depth', 'radius']) : null;
+};
+
+const beam = (reader: EntryReader): Tree => ({
+  section:
+    reader.by('beam.section') === 'sizes'
+      ? {
+          ...reader.numbers('beam.section', ['depth', 'width', 'flange', 'web', 'radius']),
+          family: reader.words('beam.section.family'),
+        }
+      : reader.words('beam.section'),
+  grade: reader.grade('beam.grade'),
+});
+
+const bolts = (reader: EntryReader): Tree => {
+  const at = 'joint.bolts';
+  return {
+    size: reader.words(`${at}.size`),
+    grade: reader.grade(`${at}.grade`, ['fu']),
+    threads: reader.words(`${at}.threads`),
+    ...reader.numbers(at, ['rows', 'columns', 'pitch', 'gauge']),
+    holes: reader.words(`${at}.holes`),
+    hole: reader.number(`${at}.hole`),
+  };
+};
+
+const ply = (reader: EntryReader, at: string): Tree => ({
+  thickness: reader.number(`${at}.thickness`),
+  grade: reader.grade(`${at}.grade`),
+  ...reader.numbers(at, ['topEdge', 'bottomEdge', 'edge']),
+});
+
+const joint = (reader: EntryReader): Tree => {
+  const kind = reader.words('joint.kind');
+  return {
+    kind,
+    ...reader.numbers('joint', ['firstRow', 'endDistance']),
+    bolts: bolts(reader),
+    ...(kind === 'web-bolts'
+      ? { ply: ply(reader, 'joint.ply') }
+      : { plate: ply(reader, 'joint.plate'), weld: reader.numbers('joint.weld', ['leg', 'electrode']) }),
+  };
+};
+
+const support = (reader: EntryReader): Tree | undefined =>
+  reader.words('support') === 'on'
+    ? {
+        kind: reader.words('support.kind'),
+        section: reader.words('support.section'),
+        thickness: reader.number('support.thickness'),
+        grade: reader.grade('support.grade'),
+        ...reader.numbers('support', ['topOfSteel', 'otherReaction']),
+      }
+    : undefined;
+
+const reaction = (reader: EntryReader): unknown =>
+  reader.by('reaction') === 'share' ? { ofWebShear: reader.number('reaction.ofWebShear') } : reader.number('reaction');
+
+const wordsUnder = (reader: EntryReader, path: string): Tree | undefined => {
+  const found = reader.under(path).sort();
+  if (found.length === 0) return undefined;
+  return Object.fromEntries(found.map((one) => [one.slice(path.length + 1), reader.words(one)]));
+};
+
+/** Leaves out what is not there. */
+const pruned = (tree: Tree): Tree =>
+  Object.fromEntries(
+    Object.entries(tree)
+      .filter(([, value]) => value !== undefined)
+      .map(([key, value]) => [key, typeof value === 'object' && value !== null ? pruned(value as Tree) : value]),
+  );
+
+/** The end that an entry describes. A text that cannot be read is a fault, and its field is left out; so no such end may be used. */
+export const endOf = (entry: Entry): EntryRead => {
+  const reader = new EntryReader(entry);
+  const input = pruned({
+    mark: reader.words('mark'),
+    standard: reader.words('standard'),
+    units: entry.units,
+    reaction: reaction(reader),
+    level: reader.words('level'),
+    tie: reader.number('tie'),
+    beam: beam(reader),
+    top: cope(reader, 'top'),
+    bottom: cope(reader, 'bottom'),
+    setback: reader.number('setback'),
+    joint: joint(reader),
+    support: support(reader),
+    options: wordsUnder(reader, 'options'),
+    piece: reader.words('piece'),
+    end: reader.words('end'),
+    quantity: reader.number('quantity'),
+    sheet: wordsUnder(reader, 'sheet'),
+  });
+  return { input, faults: reader.faults };
+};

@@ -1,0 +1,15 @@
+import { commonwealth } from '../../core/words/commonwealth.ts';
+import { fieldName } from '../../core/words/words.ts';
+import { type Entry, textOf } from './entry.ts';
+
+const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
+
+/** What a step did, such as `Pitch 70 → 80` or `Bottom notch added`. */
+export const stepName = (before: Entry, after: Entry, path: string): string => {
+  const name = capital(fieldName(commonwealth, path.replace(/\.by$/, '')));
+  const old = textOf(before, path);
+  const fresh = textOf(after, path);
+  if (fresh === 'on') return `${name} added`;
+  if (old === 'on') return `${name} removed`;
+  return `${name} ${old || 'empty'} → ${fresh || 'empty'}`;
+};

@@ -1,0 +1,63 @@
+import { createHash } from 'node:crypto';
+import { fileURLToPath } from 'node:url';
+import preact from '@preact/preset-vite';
+import { defineConfig, type Plugin } from 'vite';
+
+const here = (path: string): string => fileURLToPath(new URL(path, import.meta.url));
+
+/** What the page may load: its own files and nothing else; no code and no styles from text. */
+const POLICY = [
+  "default-src 'none'",
+  "script-src 'self'",
+  "style-src 'self'",
+  "font-src 'self'",
+  "img-src 'self' data:",
+  "connect-src 'self'",
+  "worker-src 'self'",
+  "manifest-src 'self'",
+  "base-uri 'none'",
+  "form-action 'none'",
+].join('; ');
+
+const policy = (): Plugin => ({
+  name: 'policy',
+  apply: 'build',
+  transformIndexHtml: () => [
+    { tag: 'meta', attrs: { 'http-equiv': 'Content-Security-Policy', content: POLICY }, injectTo: 'head-prepend' },
+  ],
+});
+
+/** Tells the service worker which files the build has, and names the version by what is in them. */
+const stored = (): Plugin => ({
+  name: 'stored',
+  apply: 'build',
+  enforce: 'post',
+  generateBundle(_, bundle) {
+    const worker = bundle['sw.js'];
+    if (worker?.type !== 'chunk') throw new Error('The build has no service worker.');
+    const hash = createHash('sha256');
+    const files = Object.values(bundle).filter((one) => one !== worker);
+    for (const one of files) hash.update(one.fileName).update(one.type === 'chunk' ? one.code : one.source);
+    const names = files.map(({ fileName }) => `./${fileName}`).filter((name) => name !== './index.html');
+    hash.update(worker.code);
+    const version = hash.digest('hex').slice(0, 12);
+    worker.code = `const FILES = ${JSON.stringify(names.sort())};\nconst VERSION = '${version}';\n${worker.code}`;
+  },
+});
+
+export default defineConfig({
+  root: here('.'),
+  base: './',
+  plugins: [preact(), policy(), stored()],
+  build: {
+    outDir: here('../dist/web'),
+    emptyOutDir: true,
+    target: 'es2022',
+    assetsInlineLimit: 0,
+    modulePreload: { polyfill: false },
+    rollupOptions: {
+      input: { index: here('index.html'), sw: here('sw.ts') },
+      output: { entryFileNames: ({ name }) => (name === 'sw' ? 'sw.js' : 'assets/[name]-[hash].js') },
+    },
+  },
+});

@@ -20,7 +20,7 @@ export type Row =
     }
   | { readonly kind: 'fit' };
 
-const HEADER = 4.2;
+const HEADER = 4;
 const ROW = 4.05;
 const MORE = 3.5;
 
@@ -31,8 +31,8 @@ const at = {
   symbol: 52.4,
   demand: 62.6,
   resistance: 74.2,
-  unit: 75.2,
-  bar: 84.4,
+  unit: 75,
+  bar: 84.6,
   ratio: 119.2,
   failsAt: 131.6,
   clause: 133.6,
@@ -119,7 +119,7 @@ const strengthHeight = (rows: readonly Row[]): number =>
   rows.filter(hasBar).reduce((sum, row) => sum + heightOf(row), 0);
 
 const drawHeader = ({ pen, input, numbers }: Context, y: number): void => {
-  const base = y + 3;
+  const base = y + 2.9;
   const right = (x: number, text: string): void => {
     pen.text(LEFT + x, base, text, { ...small, anchor: 'end' });
   };
@@ -171,7 +171,7 @@ const drawCells = (context: Context, row: Row & { kind: 'check' }, base: number,
   }
   setLines(pen, LEFT + at.clause, base, clause, { ...small, bold }, MORE);
   pen.text(LEFT + at.basis, base, basisOf(check), { ...small, bold, anchor: 'end' });
-  pen.box(LEFT + at.tick, base - 2.4, 2.7, 2.7, { width: HAIR });
+  pen.box(LEFT + at.tick, base - 2.3, 2.5, 2.5, { width: HAIR });
   const below = base + Math.max(name.length, clause.length) * MORE - 0.1;
   setLines(pen, LEFT + at.name + 2, below, reason, small, MORE);
 };

@@ -8,7 +8,7 @@ import { dashes, widths } from '../drawing/toSvg.ts';
 import type { DrawingWords } from '../drawing/words.ts';
 import { fromSystem } from '../units/systems.ts';
 import type { Context, Zone } from './context.ts';
-import { holesAssumed } from './given.ts';
+import { holesAssumed, sectionName } from './given.ts';
 import { body, HAIR, NARROW, WIDE } from './page.ts';
 import { POINT, type Spot, type TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
@@ -23,10 +23,10 @@ export type Scale = (typeof scales)[number];
 /** Capitals 2.5 mm high: size in pt of a face whose capitals stand 0.698 em high. */
 const SIZE = 2.5 / 0.698 / POINT;
 const LEADING = 3.75;
-const SCALE_HEIGHT = 5;
+const SCALE_HEIGHT = 5.9;
 /** Width of the caption below the piece, and least width of one beside it. */
 const CAPTION = 62;
-const BESIDE = 29;
+const BESIDE = 28;
 
 /** Length of the scale bar in the file's units, by scale; its parts are a half each. */
 const bars: Readonly<Record<'mm-kN' | 'in-kip', Readonly<Record<Scale, number>>>> = {
@@ -47,7 +47,7 @@ const drawingWords = (context: Context): DrawingWords => {
   const { bolts } = end.joint;
   return {
     units: numbers.units,
-    section: designation || say.ownSize,
+    section: sectionName(designation).replaceAll(' × ', '×') || say.ownSize,
     boltSize: bolts.size,
     boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
     holes: bolts.holes ?? holesAssumed(context),
@@ -76,7 +76,7 @@ const style: TextStyle = { ...body, family: 'narrow' };
 
 /** The figures of one end at the standard scales, each laid out at first use. */
 export interface Figures {
-  /** Scales at which the piece alone would fit, the largest first. */
+  /** The two largest scales at which the piece alone would fit: a still smaller figure could not be read. */
   readonly scales: readonly Scale[];
   readonly at: (scale: Scale) => Figure;
 }
@@ -95,7 +95,7 @@ export const figuresOf = (context: Context, width: number, height: number): Figu
     made.set(scale, known);
     return known;
   };
-  return { scales: fitting.length > 0 ? fitting : [20], at };
+  return { scales: fitting.length > 0 ? fitting.slice(0, 2) : [20], at };
 };
 
 const figureAt = (context: Context, drawing: Drawing, path: FailurePath | null, scale: Scale, room: number): Figure => {
@@ -117,11 +117,11 @@ const figureAt = (context: Context, drawing: Drawing, path: FailurePath | null, 
 const placeCaption = (context: Context, laid: Laid, path: FailurePath | null, scale: Scale, room: number): Placed => {
   const { box, marks } = laid;
   const [wide, high] = [(box.right - box.left) / scale, (box.bottom - box.top) / scale];
-  const left = room - BESIDE;
+  const left = room - BESIDE - 1;
   const beside = captionLines(context, path, BESIDE);
   const needed = beside.length * LEADING + SCALE_HEIGHT;
   const y = freeFrom(marks, box, left - 2, needed, scale);
-  if (y !== null && y + needed <= high) return { lines: beside, x: left, y, width: Math.max(wide, room), height: high };
+  if (y !== null) return { lines: beside, x: left, y, width: Math.max(wide, room), height: high };
   const x = Math.max(36, Math.min(wide, room) - CAPTION);
   const lines = captionLines(context, path, CAPTION);
   const clear = (lowestOf(marks, box.left + (x - 2) * scale) - box.top) / scale + 1.5;
@@ -221,8 +221,7 @@ const drawWord = ({ pen, numbers }: Context, mark: LaidText, place: (p: Point) =
 const drawScale = ({ pen, numbers }: Context, x: number, y: number, scale: Scale): void => {
   const length = bars[numbers.units][scale];
   const onPaper = fromSystem(length, '1,0', numbers.units) / scale;
-  const name = pen.text(x, y, `${say.scale} 1:${scale}`, style);
-  pen.text(x + Math.max(name + 2, onPaper), y, `${length} ${numbers.length}`, { ...style, anchor: 'start' });
+  pen.text(x, y, say.scaleText(scale, `${length} ${numbers.length}`), style);
   const line = y + 1.5;
   pen.line(x, line, x + onPaper, line, WIDE);
   for (const share of [0, 0.5, 1]) pen.line(x + share * onPaper, line - 0.7, x + share * onPaper, line + 0.7, NARROW);

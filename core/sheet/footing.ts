@@ -7,7 +7,7 @@ import { sheetWords as say } from './sheetWords.ts';
 import { plainRun, setLines, wrap } from './textBlock.ts';
 import { titleOf } from './verdictLine.ts';
 
-const LEADING = 3.6;
+const LEADING = 3.45;
 
 const lower = (text: string): string => text.charAt(0).toLowerCase() + text.slice(1);
 

@@ -1,6 +1,6 @@
 import { fixed, plain } from '../units/figures.ts';
 import type { Context, Zone } from './context.ts';
-import { body, DOTTED, HAIR } from './page.ts';
+import { body } from './page.ts';
 import type { TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
@@ -10,7 +10,7 @@ type Row = readonly [label: string, value: string];
 
 const { labels } = say;
 const LABEL = 14;
-const LEADING = 3.75;
+const LEADING = 3.68;
 const HEADING = 4.4;
 
 /** ` (assumed)` where the report says that nothing was given at this path. */
@@ -22,11 +22,14 @@ const gradeName = ({ numbers }: Context, grade: string | { fy?: number; fu: numb
   return grade.fy === undefined ? `f_u ${numbers.load(grade.fu)}` : `f_y ${numbers.load(grade.fy)}`;
 };
 
+/** A designation with the sign of multiplication, as a drawing writes it. */
+export const sectionName = (designation: string): string => designation.replace(/(?<=\d)x(?=\d)/g, ' × ');
+
 const beamRows = (context: Context): Row[] => {
   const { input, numbers } = context;
   const { end, facts, designation } = input;
   const { mm, mpa } = numbers;
-  const name = designation || `${say.ownSize} ${mm(facts.h)} × ${mm(facts.b)}`;
+  const name = sectionName(designation) || `${say.ownSize} ${mm(facts.h)} × ${mm(facts.b)}`;
   const sizes = `h ${mm(facts.h)}, b ${mm(facts.b)}, t_f ${mm(facts.tf)}, t_w ${mm(facts.tw)}, r ${mm(facts.r)}`;
   const other = end.joint.kind === 'fin-plate' ? say.plateInSteel : say.plyInSteel;
   const steel = `f_y ${mpa(facts.fy)}, f_u ${mpa(facts.fu)}; ${other} ${mpa(facts.fyp)}, ${mpa(facts.fup)}`;
@@ -146,7 +149,6 @@ export const givenZone = (context: Context, width: number): Zone => {
     pen.text(x, y + 3.3, [plainRun(say.given, true), plainRun(note)], style);
     let at = y + HEADING;
     for (const { label, lines } of rows) {
-      if (label) pen.line(x, at, x + width, at, HAIR, DOTTED);
       pen.text(x, at + 2.9, label, style);
       setLines(pen, x + LABEL, at + 2.9, lines, style, LEADING);
       at += lines.length * LEADING;

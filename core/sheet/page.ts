@@ -16,7 +16,7 @@ export const bottomOf = (paper: Paper): number => papers[paper][1] - TOP;
 /** Zones that stand fast on every paper. */
 export const VERDICT_TOP = 25.8;
 export const FIGURE_TOP = 36.8;
-export const BLOCK_HEIGHT = 26.2;
+export const BLOCK_HEIGHT = 25.8;
 
 /** Line widths: frames, outlines, thin lines, the thinnest. */
 export const FRAME = 0.7;
@@ -30,4 +30,4 @@ export const body = { size: 9 } as const;
 export const table = { size: 9 } as const;
 export const small = { size: 8 } as const;
 export const foot = { size: 8.5 } as const;
-export const LEADING = 3.75;
+export const LEADING = 3.65;

@@ -5,18 +5,17 @@ import { footingZone } from './footing.ts';
 import { givenZone } from './given.ts';
 import { limitsZone } from './limitsZone.ts';
 import { BLOCK_HEIGHT, FIGURE_TOP } from './page.ts';
-import { stressZone } from './stressZone.ts';
+import { stressNumbers, stressProfiles } from './stressZone.ts';
 import { workingElsewhere, workingZone } from './workingZone.ts';
 
 /** Widths of figure and data, mm. */
 export const FIGURE_WIDTH = 113;
 export const DATA_WIDTH = 65;
-const STRESS_SCALES = [2, 5, 10, 20, 50] as const;
-/** Most that the stress profiles may stand high, and the air between data and profiles. */
-const STRESS_DEPTH = 48;
+const STRESS_SCALES = [2, 5, 10, 20] as const;
+/** Most that the stress profiles may take, the air above them, and what the figure may get beyond its need, mm. */
+const STRESS_HEIGHT = 72;
 const AIR = 1.2;
-/** Rows that the first sheet holds at least where the table goes on. */
-const LEAST_ROWS = 8;
+const SPARE = 6;
 
 /** What stands on the first sheet, and what goes on further ones. */
 export interface Plan {
@@ -46,38 +45,59 @@ interface Parts {
   readonly room: number;
 }
 
-/** The largest profiles that fit a height, at a standard scale. */
-const stressWithin = (context: Context, height: number): Zone => {
-  const zones = STRESS_SCALES.map((scale) => stressZone(context, DATA_WIDTH, scale));
-  return zones.find((zone) => zone.height <= Math.min(height, STRESS_DEPTH + 22)) ?? zones.at(-1)!;
+/** The largest profiles that fit a height, at a standard scale; null where even the smallest are too high. */
+const profilesWithin = (context: Context, height: number): Zone | null => {
+  for (const scale of STRESS_SCALES) {
+    const zone = stressProfiles(context, DATA_WIDTH, scale);
+    if (zone.height <= Math.min(height, STRESS_HEIGHT)) return zone;
+  }
+  return null;
 };
 
-/** Height that figure and data need at least. */
-const upperOf = ({ context, given }: Parts, figure: Figure): number => {
-  const least = stressWithin(context, 0).height;
-  return Math.max(figure.height, given.height + AIR + stressZone(context, DATA_WIDTH, 20).height, least);
-};
+/** How the shear stress is shown: profiles, or numbers where these leave no room. */
+type Showing = 'profiles' | 'numbers';
 
-const planned = (parts: Parts, figure: Figure, rows: readonly Row[], working: Zone | null): Plan | null => {
+const stressOf = ({ context, given }: Parts, showing: Showing, height: number): Zone | null =>
+  showing === 'numbers' ? stressNumbers(context, DATA_WIDTH) : profilesWithin(context, height - given.height - AIR);
+
+interface Choice {
+  readonly figure: Figure;
+  readonly showing: Showing;
+  readonly rows: readonly Row[];
+  readonly working: Zone | null;
+}
+
+/** The first sheet under these choices; null where it does not fit. */
+const planned = (parts: Parts, { figure, showing, rows, working }: Choice): Plan | null => {
   const { context, given, footing, limits, room } = parts;
   const table = tableZone(context, rows);
   const below = table.height + footing.height + (working?.height ?? 0) + limits.height;
-  const least = upperOf(parts, figure);
+  const least = Math.max(figure.height, given.height + AIR + leastStress(context, showing));
   if (least + below > room || figure.width > FIGURE_WIDTH) return null;
-  const spare = room - below - least;
-  const upper = least + Math.min(spare, 6);
-  const stress = stressWithin(context, Math.max(upper, figure.height) - given.height - AIR);
+  const upper = least + Math.min(room - below - least, SPARE);
+  const stress = stressOf(parts, showing, upper);
+  if (!stress) return null;
   const later = parts.rows.slice(rows.length);
   return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false };
 };
 
+const leastStress = (context: Context, showing: Showing): number =>
+  showing === 'numbers'
+    ? stressNumbers(context, DATA_WIDTH).height
+    : stressProfiles(context, DATA_WIDTH, STRESS_SCALES.at(-1)!).height;
+
+/** Every pair of showing and figure, the fullest first. */
+const pairs = ({ figures }: Parts): { showing: Showing; figure: () => Figure }[] =>
+  (['profiles', 'numbers'] as const).flatMap((showing) =>
+    figures.scales.map((scale) => ({ showing, figure: () => figures.at(scale) })),
+  );
+
 /** All on one sheet: the largest figure first, then the fullest working. */
 const onOneSheet = (parts: Parts): Plan | null => {
-  const { context, rows, figures } = parts;
-  for (const scale of figures.scales) {
-    const figure = figures.at(scale);
-    for (const fullness of ['full', 'short'] as const) {
-      const plan = planned(parts, figure, rows, workingZone(context, fullness));
+  const workings = (['full', 'short'] as const).map((fullness) => workingZone(parts.context, fullness));
+  for (const { showing, figure } of pairs(parts)) {
+    for (const working of workings) {
+      const plan = planned(parts, { showing, figure: figure(), rows: parts.rows, working });
       if (plan) return plan;
     }
   }
@@ -86,28 +106,19 @@ const onOneSheet = (parts: Parts): Plan | null => {
 
 /** The working on the next sheet; where that is not enough, the table goes on there too. */
 const onMore = (parts: Parts): Plan => {
-  const { context, rows, figures, room, footing, limits } = parts;
-  const elsewhere = workingElsewhere(context, 2);
-  for (const scale of figures.scales) {
-    const plan = planned(parts, figures.at(scale), rows, elsewhere);
-    if (plan) return { ...plan, workingLater: true };
-  }
-  const others = footing.height + limits.height + elsewhere.height;
-  for (const scale of figures.scales) {
-    const figure = figures.at(scale);
-    const count = rowsWithin(rows, room - upperOf(parts, figure) - others);
-    if (count < LEAST_ROWS) continue;
-    const plan = planned(parts, figure, rows.slice(0, count), elsewhere);
+  const { context, rows, figures, room, footing, limits, given } = parts;
+  const working = workingElsewhere(context, 2);
+  for (const { showing, figure } of pairs(parts)) {
+    const plan = planned(parts, { showing, figure: figure(), rows, working });
     if (plan) return { ...plan, workingLater: true };
   }
   const figure = figures.at(figures.scales.at(-1)!);
-  const count = Math.max(1, rowsWithin(rows, room - upperOf(parts, figure) - others));
-  const plan = planned(
-    { ...parts, room: Number.POSITIVE_INFINITY },
-    { ...figure, width: 0 },
-    rows.slice(0, count),
-    elsewhere,
-  );
+  const showing = 'numbers';
+  const upper = Math.max(figure.height, given.height + AIR + leastStress(context, showing));
+  const others = upper + footing.height + limits.height + working.height;
+  const first = rows.slice(0, Math.max(1, rowsWithin(rows, room - others)));
+  const boundless = { ...parts, room: Number.POSITIVE_INFINITY };
+  const plan = planned(boundless, { showing, figure: { ...figure, width: 0 }, rows: first, working });
   return { ...plan!, workingLater: true };
 };
 

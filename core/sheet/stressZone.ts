@@ -1,4 +1,5 @@
 import type { Check, SectionStress } from '../check/report.ts';
+import { fromSystem } from '../units/systems.ts';
 import type { Context, Zone } from './context.ts';
 import { body, DOTTED, HAIR, NARROW, WIDE } from './page.ts';
 import type { Pen, TextStyle } from './pen.ts';
@@ -8,7 +9,7 @@ import { plainRun, setLines, wrap } from './textBlock.ts';
 
 const HEADING = 4.4;
 const LEADING = 3.6;
-const LABELS = 4;
+const LABELS = 3.7;
 /** Between ordinates, mm of paper. */
 const ORDINATES = 2.4;
 const style: TextStyle = { ...body, family: 'narrow' };
@@ -18,8 +19,8 @@ const limitOf = ({ input, numbers }: Context, section: SectionStress): string[] 
   const wanted = section.name === 'full' ? 'stress-full' : 'stress-cope';
   const check = input.report.checks.find(({ id }) => id === wanted);
   if (!check || !speaksOf(check, section) || check.resistance === null) return [];
-  const at = numbers.failsAt(check.reactionAtFailure);
-  return [`${say.limit} ${numbers.amount(check.resistance, 'MPa')} ${say.at} ${at}`];
+  const limit = say.limitAt(numbers.amount(check.resistance, 'MPa'));
+  return [`${limit} ${numbers.failsAt(check.reactionAtFailure)}`];
 };
 
 const speaksOf = ({ of = '' }: Check, { name }: SectionStress): boolean => !of || name.startsWith(of);
@@ -28,37 +29,57 @@ const captionOf = (context: Context, section: SectionStress): string[] => {
   const { numbers } = context;
   return [
     `${say.mean} ${numbers.amount(section.meanStress, 'MPa')}`,
-    `${say.yieldAt} ${numbers.failsAt(section.firstYieldReaction)} ${numbers.force}`,
+    `${say.yieldAt} ${numbers.failsAt(section.firstYieldReaction)}`,
     ...limitOf(context, section),
   ];
 };
 
+const drawHeading = ({ pen, numbers }: Context, x: number, y: number): void => {
+  const note = ` ${say.stressNote(numbers.stress, numbers.force)}`;
+  pen.text(x, y + 3.2, [plainRun(`${say.stress} `, true), ...richText('V Q/(I t)'), plainRun(note)], style);
+};
+
 /** Shear stress over the depth of each section, levels to scale 1:`scale`; `width` mm wide. */
-export const stressZone = (context: Context, width: number, scale: number): Zone => {
+export const stressProfiles = (context: Context, width: number, scale: number): Zone => {
   const { pen, input, numbers } = context;
   const { sections } = input.report.shape;
   const column = width / sections.length;
   const captions = sections.map((one) =>
-    captionOf(context, one).flatMap((line) => wrap(pen, richText(line, 'prose'), style, column - 1.5)),
+    captionOf(context, one).flatMap((line) => wrap(pen, richText(line, 'prose'), style, column - 1)),
   );
-  const toPaper = (level: number): number => level * (numbers.units === 'mm-kN' ? 1 : 25.4) * (1 / scale);
+  const toPaper = (level: number): number => fromSystem(level, '1,0', numbers.units) / scale;
   const depth = toPaper(Math.max(...sections.map(({ profile }) => profile.at(-1)![0])));
   const captionLines = Math.max(...captions.map((lines) => lines.length));
   const most = Math.max(...sections.map(({ peakStress }) => peakStress), 1e-9);
   const label = pen.width(numbers.amount(most, 'MPa'), style) + 1.5;
   const perStress = (Math.min(column, 31) - label - 2) / most;
   const draw = (x: number, y: number): void => {
-    const note = ` ${say.stressNote(numbers.stress)}`;
-    const heading = [plainRun(`${say.stress} `, true), ...richText('V Q/(I t)'), plainRun(note)];
-    pen.text(x, y + 3.2, heading, style);
+    drawHeading(context, x, y);
     sections.forEach((section, i) => {
       const left = x + i * column;
       pen.text(left, y + HEADING + 3, say.sections[section.name], style);
       drawProfile(context, section, left, y + HEADING + LABELS, toPaper, perStress);
-      setLines(pen, left, y + HEADING + LABELS + depth + 4.2, captions[i]!, style, LEADING);
+      setLines(pen, left, y + HEADING + LABELS + depth + 4, captions[i]!, style, LEADING);
     });
   };
-  return { height: HEADING + LABELS + depth + 2 + captionLines * LEADING, draw };
+  return { height: HEADING + LABELS + depth + 1.5 + captionLines * LEADING, draw };
+};
+
+/** The same in numbers alone, one line a section, where the page has no room for profiles. */
+export const stressNumbers = (context: Context, width: number): Zone => {
+  const { pen, input, numbers } = context;
+  const lines = input.report.shape.sections.flatMap((section) => {
+    const peak = `${say.peak} ${numbers.amount(section.peakStress, 'MPa')}`;
+    const text = `${say.sections[section.name]}: ${[peak, ...captionOf(context, section)].join(', ')}`;
+    return wrap(pen, richText(text, 'prose'), style, width);
+  });
+  return {
+    height: HEADING + lines.length * LEADING,
+    draw: (x, y) => {
+      drawHeading(context, x, y);
+      setLines(pen, x, y + HEADING + 2.9, lines, style, LEADING);
+    },
+  };
 };
 
 const drawProfile = (

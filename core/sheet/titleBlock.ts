@@ -6,7 +6,7 @@ import { sheetWords as say } from './sheetWords.ts';
 import { oneLine } from './textBlock.ts';
 
 const BOXES_LEFT = 29.5;
-const SIGN_HEIGHT = 13.6;
+const SIGN_HEIGHT = 13.2;
 
 /** Sheet numbers: this one of how many. */
 export interface Count {
@@ -22,8 +22,8 @@ export const drawTitleBlock = (context: Context, bottom: number, code: Code | nu
   if (code) drawCode(pen, LEFT, top + 1.6, code);
   const left = LEFT + (code ? BOXES_LEFT : 0);
   drawSignOff(context, left, top + 1.6);
-  drawRevision(context, left, top + SIGN_HEIGHT + 2.4, count);
-  drawCautions(context, left, bottom - 0.6);
+  drawRevision(context, left, top + SIGN_HEIGHT + 1.9, count);
+  drawCautions(context, left, bottom - 0.2);
 };
 
 /** What the program asks everyone to keep in mind. */
@@ -64,7 +64,7 @@ const drawRevision = ({ pen, input }: Context, left: number, top: number, count:
   const fields: (readonly [x: number, width: number, label: string, value: string])[] = [
     [left, revision ? 15 : 46, say.revision, revision || say.unchecked],
     [left + (revision ? 17 : 49), revision ? 44 : 12, say.reason, reason],
-    [right - 94, 16, say.dateOfIssue, date],
+    [right - 96, 19, say.dateOfIssue, date],
     [right - 76, 36, say.fingerprint, fingerprintText(fingerprint)],
     [right - 36, 24, say.program, program],
     [right - 11, 11, say.sheet, `${count.sheet} ${say.of} ${count.of}`],

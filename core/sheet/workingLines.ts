@@ -9,6 +9,8 @@ import { plainRun } from './textBlock.ts';
 
 /** One step of a working as pieces between equals signs, and its note. */
 export interface Step {
+  /** The same for steps that say the same. */
+  readonly key: string;
   readonly symbol: readonly SetRun[];
   /** Formula, numbers, value with unit; those that would repeat each other are left out. */
   readonly sides: readonly (readonly SetRun[])[];
@@ -42,6 +44,7 @@ export const stepsOf = (context: Context, check: Check): Step[] => {
   return rows.map((row, i) => {
     const closes = closesOf(check, row, i === rows.length - 1);
     return {
+      key: [row.symbol, row.expression, row.numbers, row.value, row.note].join('|'),
       symbol: richText(row.symbol),
       sides: sidesOf(context, row, closes),
       note: row.note ? richText(context.numbers.marked(row.note), 'prose') : [],

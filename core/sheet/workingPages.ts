@@ -1,6 +1,6 @@
 import type { Check } from '../check/report.ts';
 import { type Row, rowsWithin, tableZone } from './checkTable.ts';
-import type { Context, Zone } from './context.ts';
+import type { Context } from './context.ts';
 import { standardName } from './head.ts';
 import { body, FRAME, LEFT, NARROW, small, TOP, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
@@ -25,9 +25,10 @@ interface Line {
   readonly runs: readonly SetRun[];
   readonly inset: number;
   readonly height: number;
-  /** Stays with the line before it. */
-  readonly tied: boolean;
 }
+
+/** Lines that stay together in one column. */
+type Block = readonly Line[];
 
 const headingLines = (context: Context, check: Check): Line[] => {
   const runs = [plainRun(titleOf(check), true), plainRun(`  ${sourceText(check)}`)];
@@ -35,12 +36,11 @@ const headingLines = (context: Context, check: Check): Line[] => {
     runs: line,
     inset: 0,
     height: i === 0 ? LEADING + 2 : LEADING,
-    tied: i > 0,
   }));
 };
 
 /** Sides one below the other, the equals signs in one column; the value follows on the line of the numbers where it fits. */
-const stepLines = ({ pen }: Context, step: Step): Line[] => {
+const stepBlock = ({ pen }: Context, step: Step): Block => {
   const room = COLUMN - SYMBOL;
   const wide = Math.max(SYMBOL, pen.width(step.symbol, style) + 1.5);
   const rows: SetRun[][] = [];
@@ -58,46 +58,60 @@ const stepLines = ({ pen }: Context, step: Step): Line[] => {
     runs,
     inset: i === 0 ? wide : SYMBOL,
     height: LEADING,
-    tied: true,
   }));
 };
 
-const linesOf = (context: Context, check: Check): Line[] => [
-  ...headingLines(context, check),
-  ...stepsOf(context, check).flatMap((step) => stepLines(context, step)),
-];
+/** Steps that stand already, by symbol and value alone. */
+const aboveBlock = ({ pen }: Context, steps: readonly Step[]): Block => {
+  const runs = steps.flatMap(({ symbol, sides }, i) => [
+    plainRun(i > 0 ? ', ' : `${say.asAbove} `),
+    ...symbol,
+    plainRun(' '),
+    ...(sides.at(-1) ?? []),
+  ]);
+  return wrap(pen, runs, style, COLUMN).map((line) => ({ runs: line, inset: 0, height: LEADING }));
+};
 
-/** Columns of lines, each no higher than `height`; a heading never stands alone at the foot. */
-const columnsOf = (lines: readonly Line[], height: number): Line[][] => {
+/** The working of one check; steps that an earlier one has shown are named with their value. */
+const blocksOf = (context: Context, check: Check, shown: Set<string>): Block[] => {
+  const steps = stepsOf(context, check);
+  const fresh = steps.filter(({ key }) => !shown.has(key));
+  const known = steps.filter(({ key }) => shown.has(key));
+  for (const { key } of fresh) shown.add(key);
+  const above = known.length > 0 ? aboveBlock(context, known) : [];
+  const [first = [], ...rest] = fresh.map((step) => stepBlock(context, step));
+  return [[...headingLines(context, check), ...above, ...first], ...rest];
+};
+
+const heightOf = (block: Block): number => block.reduce((sum, { height }) => sum + height, 0);
+
+/** Columns of blocks, each no higher than `height`. */
+const columnsOf = (blocks: readonly Block[], height: number): Line[][] => {
   const columns: Line[][] = [];
   let column: Line[] = [];
   let left = height;
-  lines.forEach((line, i) => {
-    const next = lines[i + 1];
-    const needs = line.height + (line.tied ? 0 : (next?.height ?? 0));
+  for (const block of blocks) {
+    const needs = heightOf(block);
     if (needs > left && column.length > 0) {
       columns.push(column);
       column = [];
       left = height;
     }
-    column.push(line);
-    left -= line.height;
-  });
+    column.push(...block);
+    left -= needs;
+  }
   if (column.length > 0) columns.push(column);
   return columns;
 };
 
-const columnZone = ({ pen }: Context, lines: readonly Line[]): Zone => ({
-  height: lines.reduce((sum, { height }) => sum + height, 0),
-  draw: (x, y) => {
-    let base = y;
-    for (const { symbol, runs, inset, height } of lines) {
-      base += height;
-      if (symbol) pen.text(x, base, symbol, style);
-      pen.text(x + inset, base, runs, style);
-    }
-  },
-});
+const drawColumn = ({ pen }: Context, lines: readonly Line[], x: number, y: number): void => {
+  let base = y;
+  for (const { symbol, runs, inset, height } of lines) {
+    base += height;
+    if (symbol) pen.text(x, base, symbol, style);
+    pen.text(x + inset, base, runs, style);
+  }
+};
 
 /** Checks whose working goes on further sheets: those that stand in the table, in its order. */
 export const workedChecks = ({ input }: Context): readonly Check[] =>
@@ -118,15 +132,16 @@ export const furtherPages = (
     pages.push(() => tableZone(context, part).draw(LEFT, TOP + HEAD + 2));
     rest = rest.slice(count);
   }
+  const shown = new Set<string>();
   const columns = columnsOf(
-    checks.flatMap((check) => linesOf(context, check)),
+    checks.flatMap((check) => blocksOf(context, check, shown)),
     room,
   );
   for (let i = 0; i < columns.length; i += 2) {
     const pair = columns.slice(i, i + 2);
     pages.push(() => {
       pair.forEach((lines, k) => {
-        columnZone(context, lines).draw(LEFT + k * (COLUMN + GUTTER), TOP + HEAD);
+        drawColumn(context, lines, LEFT + k * (COLUMN + GUTTER), TOP + HEAD);
       });
     });
   }

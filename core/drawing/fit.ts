@@ -17,6 +17,9 @@ export interface Fitted {
   readonly fits: boolean;
 }
 
+/** Layouts tried before the best one is taken. */
+const TURNS = 6;
+
 type Options = Omit<LayoutOptions, 'textHeight'>;
 
 /** Standard scales of a drawing on paper (ISO 5455), the largest first. */
@@ -39,31 +42,28 @@ export const fitToScale = (
   return last ?? at(drawing, window, options, scales.at(-1) ?? 1, path);
 };
 
+/** Below this share of the scale at which the bare piece fills the window nothing is left to read, and the drawing is said not to fit. */
+const LEAST = 0.3;
+
 /** The drawing as large as the window allows, its text at the text size; `largest` bounds the scale for small pieces. */
 export const fitToWindow = (drawing: Drawing, window: Window, options: Options, largest: number): Fitted => {
   const { box } = drawing;
   const [wide, high] = [box.right - box.left, box.bottom - box.top];
-  const least = 0.02 * Math.min(window.width / wide, window.height / high);
-  // What stands around the piece is a number of text heights and keeps its size while the piece is scaled.
-  let scale = Math.min(
-    largest,
-    Math.max(
-      least,
-      Math.min((window.width - 10 * window.textSize) / wide, (window.height - 9 * window.textSize) / high),
-    ),
-  );
-  let fitted = at(drawing, window, options, scale, null);
-  for (let turn = 0; turn < 4; turn++) {
+  const bare = Math.min(window.width / wide, window.height / high);
+  const least = Math.min(largest, LEAST * bare);
+  let best: Fitted | undefined;
+  let fitted = at(drawing, window, options, Math.min(largest, 0.75 * bare), null);
+  for (let turn = 0; turn < TURNS; turn++) {
+    if (fitted.fits && fitted.scale > (best?.scale ?? 0)) best = fitted;
+    // What stands around the piece is a number of text heights and keeps its size while the piece is scaled.
     const around = rest(fitted, wide, high);
     const exact = Math.min((window.width - around.width) / wide, (window.height - around.height) / high);
-    const next = Math.min(largest, Math.max(least, exact));
-    if (fitted.fits && next < scale * 1.01) break;
-    scale = fitted.fits ? next : Math.min(next, scale * 0.99);
-    const tried = at(drawing, window, options, scale, null);
-    if (fitted.fits && !tried.fits) break;
-    fitted = tried;
+    const next = Math.min(largest, Math.max(least, fitted.fits ? exact : Math.min(exact, fitted.scale * 0.97)));
+    if (Math.abs(next - fitted.scale) < 0.004 * fitted.scale) break;
+    fitted = at(drawing, window, options, next, null);
   }
-  return fitted;
+  if (fitted.fits && fitted.scale > (best?.scale ?? 0)) best = fitted;
+  return best ?? fitted;
 };
 
 /** Window taken up by all but the piece, in pen units. */

@@ -1,5 +1,5 @@
 import type { Box, Callout, Line, Point } from './drawing.ts';
-import { CAPITAL, drawHead, drawLine, keepOff, type Pad } from './pad.ts';
+import { boxOf, CAPITAL, drawHead, drawLine, keepOff, type Pad } from './pad.ts';
 import { AIR, blockBox, setBlock } from './place.ts';
 import { rings } from './rings.ts';
 
@@ -9,6 +9,12 @@ const LEADER = 0.15;
 /** A later variant of the words, and words beside the beam that should stand on it. */
 const VARIANT = 1.5;
 const OUTSIDE = 12;
+/** A leader steeper than about 50 degrees. */
+const STEEP = 3;
+/** Words that would make the drawing wider. */
+const WIDER = 40;
+/** Words that would make it higher, by the text height. */
+const HIGHER = 3;
 
 interface Found {
   readonly lines: readonly Line[];
@@ -18,10 +24,12 @@ interface Found {
 
 /** Words with their leaders, each at the free place nearest to where it stands best; blocks set to the left stand under each other if they can. */
 export const layCallouts = (pad: Pad, callouts: readonly Callout[], beam: Box): void => {
+  const drawn = boxOf(pad.marks);
+  const places = { beam, drawn };
   let column: number | undefined;
   for (const it of callouts) {
     const near = column === undefined || it.align === 'end' ? it.near : { ...it.near, x: column };
-    const found = search(pad, { ...it, near }, beam);
+    const found = search(pad, { ...it, near }, places);
     if (found === undefined) continue;
     if (found.leader !== null) drawLeader(pad, found.leader, it.end);
     setBlock(pad, found.lines, found.at, it.align);
@@ -29,7 +37,13 @@ export const layCallouts = (pad: Pad, callouts: readonly Callout[], beam: Box): 
   }
 };
 
-const search = (pad: Pad, it: Callout, beam: Box): Found | undefined => {
+interface Places {
+  readonly beam: Box;
+  /** How far the drawing reaches already. */
+  readonly drawn: Box;
+}
+
+const search = (pad: Pad, it: Callout, places: Places): Found | undefined => {
   const { em, ground } = pad;
   let best: Found | undefined;
   let least = Number.POSITIVE_INFINITY;
@@ -47,7 +61,7 @@ const search = (pad: Pad, it: Callout, beam: Box): Found | undefined => {
         top: at.y + own.top,
         bottom: at.y + own.bottom,
       };
-      const there = base + (!it.onBeam || within(box, beam) ? 0 : OUTSIDE);
+      const there = base + dislike(it, box, places, em);
       if (there >= least) continue;
       const words = there + ground.cost(box, undefined, least - there);
       if (words >= least) continue;
@@ -68,18 +82,28 @@ const leaderOf = (
   if (end === 'none') return { leader: null, cost: words };
   let leader: readonly [Point, Point] | null = null;
   let least = enough;
-  const y = box.top + (AIR + CAPITAL / 2) * pad.em;
   for (const [i, target] of targets.entries()) {
-    const x = target.x <= (box.left + box.right) / 2 ? box.left : box.right;
-    const run = Math.hypot(target.x - x, target.y - y) / pad.em;
-    const inBox = target.x > box.left - pad.em && target.x < box.right + pad.em;
-    const steep = Math.abs(target.y - y) > 1.2 * Math.abs(target.x - x) ? 3 : 0;
-    const cost = words + i * 0.3 + run * LEADER + steep + (inBox ? 4 : 0);
+    const start = leaderStart(pad, box, target);
+    if (start === null) continue;
+    const run = Math.hypot(target.x - start.x, target.y - start.y) / pad.em;
+    const steep = Math.abs(target.y - start.y) > 1.2 * Math.abs(target.x - start.x) ? STEEP : 0;
+    const cost = words + i * 0.3 + run * LEADER + steep;
     if (cost >= least) continue;
-    const whole = cost + pad.ground.crossing({ x, y }, target);
-    if (whole < least) [leader, least] = [[{ x, y }, target], whole];
+    const whole = cost + pad.ground.crossing(start, target);
+    if (whole < least) [leader, least] = [[start, target], whole];
   }
   return { leader, cost: leader === null ? Number.POSITIVE_INFINITY : least };
+};
+
+/** Beside the first line; above or below the block for a target that stands over or under it; none for one within. */
+const leaderStart = ({ em }: Pad, { left, top, right, bottom }: Box, target: Point): Point | null => {
+  const y = top + (AIR + CAPITAL / 2) * em;
+  if (target.x <= left - 0.5 * em) return { x: left, y };
+  if (target.x >= right + 0.5 * em) return { x: right, y };
+  const x = Math.min(Math.max(target.x, left + 0.5 * em), right - 0.5 * em);
+  if (target.y >= bottom) return { x, y: bottom };
+  if (target.y <= top) return { x, y: top };
+  return null;
 };
 
 const drawLeader = (pad: Pad, [from, to]: readonly [Point, Point], end: Callout['end']): void => {
@@ -96,6 +120,11 @@ const drawLeader = (pad: Pad, [from, to]: readonly [Point, Point], end: Callout[
       filled: true,
     });
 };
+
+const dislike = ({ onBeam }: Callout, box: Box, { beam, drawn }: Places, em: number): number =>
+  (!onBeam || within(box, beam) ? 0 : OUTSIDE) +
+  (box.left >= drawn.left && box.right <= drawn.right ? 0 : WIDER) +
+  (HIGHER * Math.max(0, drawn.top - box.top, box.bottom - drawn.bottom)) / em;
 
 const within = (box: Box, beam: Box): boolean =>
   box.left >= beam.left && box.right <= beam.right && box.top >= beam.top && box.bottom <= beam.bottom;

@@ -3,7 +3,7 @@ export type Measure = (text: string, size: number) => number;
 
 /** Signs of one width in IBM Plex Sans Condensed, regular, and that width in thousandths of the size. */
 const WIDTHS: readonly (readonly [string, number])[] = [
-  [' \u202f', 212],
+  [' \u00a0\u202f', 212],
   ["ijl,.!:;'|", 245],
   ['[](){}ft-I"', 310],
   ['r/\\*', 355],

@@ -1,7 +1,8 @@
-import { fixed, plain, THIN } from '../units/figures.ts';
+import { fixed, MINUS, plain } from '../units/figures.ts';
 import { toSystem, type UnitSystem } from '../units/systems.ts';
 
 const SIXTEENTHS = 16;
+const NO_BREAK = '\u00a0';
 
 /** A length held in mm as a drawing writes it: mm plain; inches in sixteenths where the value is one, else with decimals. */
 export const length = (mm: number, units: UnitSystem): string =>
@@ -31,5 +32,5 @@ const inches = (value: number): string => {
     under /= 2;
   }
   const fraction = `${over}/${under}`;
-  return `${value < 0 ? '\u2212' : ''}${whole === 0 ? fraction : `${whole}${THIN}${fraction}`}`;
+  return `${value < 0 ? MINUS : ''}${whole === 0 ? fraction : `${whole}${NO_BREAK}${fraction}`}`;
 };

@@ -131,7 +131,7 @@ describe('the drawing of one end', () => {
     const inch = 25.4;
     const facts = sampleFacts({ g: inch / 2, top: [4.5 * inch, 2 * inch, 0.5 * inch], y1: 3 * inch, p: 3 * inch });
     const texts = drawEnd(facts, { ...sampleWords, units: 'in-kip' }).dimensions.map((one) => one.line.at(-1)!.text);
-    expect(texts).toEqual(expect.arrayContaining(['1/2', '4\u202f1/2', '2', '3']));
+    expect(texts).toEqual(expect.arrayContaining(['1/2', '4\u00a01/2', '2', '3']));
   });
 
   it('says the drawing in sentences for those who cannot see it', () => {

@@ -23,6 +23,14 @@ describe('fitting a drawing', () => {
     }
   });
 
+  it('fits the window of a telephone', () => {
+    for (const width of [290, 360]) {
+      const fitted = fitToWindow(draw('K-207/L'), { width, height: 620, textSize: 14 }, { values: 'gap' }, 1.6);
+      expect(fitted.fits).toBe(true);
+      expect(size(fitted).width / width).toBeGreaterThan(0.9);
+    }
+  });
+
   it('never draws a small piece larger than it is told', () => {
     const window = { width: 2000, height: 2000, textSize: 14 };
     expect(fitToWindow(draw('one bolt'), window, { values: 'gap' }, 1.6).scale).toBe(1.6);

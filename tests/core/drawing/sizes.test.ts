@@ -8,7 +8,7 @@ describe('sizes on the drawing', () => {
 
   it('are inches in sixteenths, lowest terms, where the value is one; else with decimals', () => {
     const inches = [1, 1.5, 0.25, 3.0625, 2.75, 0.3, 10.1].map((value) => length(value * 25.4, 'in-kip'));
-    expect(inches).toEqual(['1', '1\u202f1/2', '1/4', '3\u202f1/16', '2\u202f3/4', '0.3', '10.1']);
+    expect(inches).toEqual(['1', '1\u00a01/2', '1/4', '3\u00a01/16', '2\u00a03/4', '0.3', '10.1']);
     expect(length(-0.5 * 25.4, 'in-kip')).toBe('\u22121/2');
   });
 

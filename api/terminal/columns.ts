@@ -30,7 +30,7 @@ const widthsOf = (columns: readonly Column[], rows: readonly Row[]): number[] =>
   for (let at = columns.length - 1; at >= 0; at -= 1) {
     const share = shared[at];
     if (!share) continue;
-    natural[at] = Math.max(8, Math.min(natural[at]!, Math.floor((room * share) / shares)));
+    natural[at] = Math.min(natural[at]!, Math.max(8, Math.floor((room * share) / shares)));
     room -= natural[at]!;
     shares -= share;
   }

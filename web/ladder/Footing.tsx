@@ -1,0 +1,94 @@
+import type { Check } from '../../core/check/report.ts';
+import { unitOf } from '../../core/units/systems.ts';
+import { chosen } from '../state/bench.ts';
+import { Heading } from './Heading.tsx';
+import { NotApplicable } from './NotApplicable.tsx';
+import { RichText } from './RichText.tsx';
+import { rungsOf } from './rungs.ts';
+import { Sign } from './Sign.tsx';
+import { shown, stale, words } from './shown.ts';
+import { markOf, stateWord } from './standing.ts';
+import { onRungKey, reached, touch } from './touch.ts';
+import { isMost, size } from './usedUp.ts';
+import { Working } from './Working.tsx';
+import { cited } from './workingLines.ts';
+
+/** Rules that carry no kN, given against required; one that is not held opens by itself. */
+export const Footing = () => {
+  const report = shown.value?.report;
+  if (!report) return null;
+  const { footing, notApplicable } = rungsOf(report);
+  const length = unitOf('1,0', report.units).name;
+  const first = footing.find(({ id }) => id === reached.value) ?? footing[0];
+  return (
+    <section class={`footing${stale.value ? ' stale' : ''}`} aria-labelledby="footing-heading">
+      <Heading id="footing-heading" level={3} title="Footing">
+        given / required, {length}; no force
+      </Heading>
+      <ul onKeyDown={onRungKey}>
+        {footing.map((check) => (
+          <Rule key={check.id} check={check} first={check === first} />
+        ))}
+      </ul>
+      <NotApplicable checks={notApplicable} />
+    </section>
+  );
+};
+
+const Rule = ({ check, first }: { check: Check; first: boolean }) => {
+  const { id, title, ofText, state, reasonText } = check;
+  const open = chosen.value === id;
+  const breach = state !== 'holds';
+  const mark = markOf(check);
+  return (
+    <li class={`rule rule-${mark}${open || breach ? ' rule-wide' : ''}${open ? ' rule-open' : ''}`}>
+      <button
+        type="button"
+        id={`rung-${id}`}
+        data-rung
+        aria-expanded={open}
+        aria-controls={`working-${id}`}
+        tabIndex={first ? 0 : -1}
+        onFocus={() => {
+          reached.value = id;
+        }}
+        onClick={() => touch(id)}
+      >
+        <Sign mark={mark} />
+        <span>
+          {title}
+          {ofText && <span class="rule-of">, {ofText}</span>}
+        </span>
+        <span class="unseen">{`, ${stateWord(state)}${mark === 'close' ? ', close' : ''}: `}</span>
+        <Sizes check={check} />
+      </button>
+      {breach && reasonText && !open && (
+        <p class="rule-reason">
+          <b>{state === 'fails' ? 'FAILS' : 'REFER'}</b> <RichText text={reasonText} />
+          <span>; {sourceOf(check)}</span>
+        </p>
+      )}
+      {open && <Working check={check} labelledBy={`rung-${id}`} />}
+    </li>
+  );
+};
+
+/** Clause and its standing; for practice, that it is no clause. */
+const sourceOf = ({ clause, basis }: Check): string =>
+  basis === 'practice' ? (words.value.bases.practice ?? basis) : `${cited(clause)}, ${basis}`;
+
+/** Given over required; a bound from above carries its sign. */
+const Sizes = ({ check }: { check: Check }) => {
+  const { units } = shown.value!.report;
+  const given = check.resistance === null ? '–' : size(check.resistance, units);
+  const required = check.demand === null ? '–' : size(check.demand, units);
+  const most = isMost(check);
+  return (
+    <span class="rule-sizes">
+      {given}
+      <span aria-hidden="true">{most ? ' / ≤ ' : ' / '}</span>
+      <span class="unseen">{most ? ' given, at most ' : ' given, at least '}</span>
+      {required}
+    </span>
+  );
+};

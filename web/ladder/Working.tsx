@@ -1,0 +1,137 @@
+import type { Check } from '../../core/check/report.ts';
+import { roundedDown } from '../../core/units/figures.ts';
+import { unitOf } from '../../core/units/systems.ts';
+import { inUse } from './inUse.ts';
+import { RichText } from './RichText.tsx';
+import { fullName, isFooting } from './rungs.ts';
+import { Sign } from './Sign.tsx';
+import { shown, words } from './shown.ts';
+import { markOf, stateWord } from './standing.ts';
+import { usedUp } from './usedUp.ts';
+import { verifiedText } from './verifiedText.ts';
+import { cited, type WorkingLine, workingLines } from './workingLines.ts';
+
+interface Props {
+  readonly check: Check;
+  /** Id of what it belongs to. */
+  readonly labelledBy: string;
+}
+
+/** How a check comes to its number, line by line, with what it leans on and how far it is verified. */
+export const Working = ({ check, labelledBy }: Props) => (
+  // biome-ignore lint/a11y/useSemanticElements: a fieldset groups controls; this groups text under the name of its rung.
+  <div class="working" id={`working-${check.id}`} role="group" aria-labelledby={labelledBy}>
+    <p class="working-head">
+      <b>{fullName(check)}</b>
+      <span>{sourceOf(check)}</span>
+    </p>
+    {check.reasonText && (
+      <p class="working-reason">
+        {stateWord(check.state)}: <RichText text={check.reasonText} />
+      </p>
+    )}
+    <ol class="working-lines">{workingLines(check).map(lineRow)}</ol>
+    <Close check={check} />
+    <Leaning check={check} />
+    {!isFooting(check) && (
+      <button type="button" class="working-see" onClick={toPiece}>
+        see it on the piece
+      </button>
+    )}
+  </div>
+);
+
+/** On a small screen the piece stands out of sight. */
+const toPiece = (): void => {
+  document.getElementById('piece-heading')?.scrollIntoView();
+};
+
+/** Clause or method, and its standing. */
+const sourceOf = ({ clause, basis }: Check): string =>
+  [...new Set([clause && cited(clause), basis])].filter(Boolean).join(', ');
+
+const lineRow = ({ symbol, expression, numbers, value, unit, clause, note, result }: WorkingLine) => {
+  const Value = result ? 'b' : 'span';
+  return (
+    <li>
+      <span class="working-symbol">
+        <RichText text={symbol} manner="formula" />
+      </span>
+      <span class="working-terms">
+        {expression && (
+          <span class="term">
+            {'= '}
+            <RichText text={expression} manner="formula" />{' '}
+          </span>
+        )}
+        <span class="term">
+          {numbers && `= ${numbers} `}
+          {'= '}
+          <Value class="working-value">{unit ? `${value} ${unit}` : value}</Value>
+          {clause && <span class="working-clause"> {clause}</span>}
+        </span>
+        {note && (
+          <span class="working-note">
+            <RichText text={note} />
+          </span>
+        )}
+      </span>
+    </li>
+  );
+};
+
+/** Demand over resistance, and the reaction at which it is used up. */
+const Close = ({ check }: { check: Check }) => {
+  const { report } = shown.value!;
+  const used = usedUp(check, report);
+  const at = check.reactionAtFailure;
+  const force = unitOf('0,1', report.units).name;
+  if (used === null && typeof at !== 'number') return null;
+  return (
+    <p class="working-close">
+      <Sign mark={markOf(check)} />
+      <span>
+        {used && (
+          <>
+            <RichText text={used.symbols} manner={check.id.startsWith('fit-') ? 'prose' : 'formula'} /> = {used.numbers}{' '}
+            = {used.value}
+          </>
+        )}
+        {typeof at === 'number' && (
+          <>
+            {used && '; '}
+            {check.state === 'information' ? 'reached at' : 'fails at'} <i class="symbol">V</i> ={' '}
+            <b class="working-value">
+              {roundedDown(at)} {force}
+            </b>
+          </>
+        )}
+      </span>
+    </p>
+  );
+};
+
+/** Factors and strengths in use, the standing of the formula, and what checks it from outside. */
+const Leaning = ({ check }: { check: Check }) => {
+  const leans = inUse(shown.value!, check);
+  const basis = check.basis && words.value.bases[check.basis];
+  return (
+    <div class="working-foot">
+      {leans.length > 0 && (
+        <p>
+          with{' '}
+          {leans.map(({ symbol, value }, at) => (
+            <>
+              {at > 0 && ', '}
+              <RichText text={symbol} manner="formula" /> {value}
+            </>
+          ))}
+        </p>
+      )}
+      <p>
+        {basis && `${check.basis}: ${basis}; `}
+        {verifiedText[check.verified]}
+      </p>
+    </div>
+  );
+};

@@ -1,0 +1,28 @@
+import { computed } from '@preact/signals';
+import { type Examined, wordsOf } from '../../core/check/examine.ts';
+import type { Check, SaidFault } from '../../core/check/report.ts';
+import { standards } from '../../core/standards/index.ts';
+import { commonwealth } from '../../core/words/commonwealth.ts';
+import type { Words } from '../../core/words/words.ts';
+import { chosen, faults, lastGood } from '../state/bench.ts';
+
+/** What the bench shows: the end examined last without a fault; null before there is one. */
+export const shown = computed<Examined | null>(() => lastGood.value);
+
+/** Why the end as it stands in the fields cannot be examined; empty where what is shown is what stands there. */
+export const missing = computed<readonly SaidFault[]>(() => faults.value);
+
+/** True while what is shown is the result of before. */
+export const stale = computed(() => missing.value.length > 0);
+
+/** Words of the standard's market. */
+export const words = computed<Words>(() => {
+  const standard = standards[shown.value?.report.standard.id ?? ''];
+  return standard ? wordsOf(standard) : commonwealth;
+});
+
+/** The check whose rung is touched, where the report has it and it says something. */
+export const chosenCheck = computed<Check | null>(() => {
+  const found = shown.value?.report.checks.find(({ id }) => id === chosen.value);
+  return found && found.state !== 'notApplicable' ? found : null;
+});

@@ -1,0 +1,25 @@
+import { computed, effect } from '@preact/signals';
+import { announce } from '../state/announce.ts';
+import { missing, shown } from './shown.ts';
+import { incompleteLine, type VerdictLine, verdictLine } from './verdict.ts';
+
+/** The verdict on what stands in the fields; null before anything does. */
+export const verdictShown = computed<VerdictLine | null>(() => {
+  if (missing.value.length > 0) return incompleteLine(missing.value);
+  return shown.value ? verdictLine(shown.value.report) : null;
+});
+
+/** The verdict in sentences. */
+export const verdictSaid = computed<string>(() => {
+  const verdict = verdictShown.value;
+  if (!verdict) return '';
+  return [`${verdict.word} ${verdict.ratio}`.trim(), verdict.first, verdict.spare, verdict.others]
+    .filter(Boolean)
+    .join('. ');
+});
+
+/** Says each new verdict to those who listen; gives back what ends it. */
+export const sayVerdict = (): (() => void) =>
+  effect(() => {
+    if (verdictSaid.value) announce(verdictSaid.value);
+  });

@@ -1,0 +1,103 @@
+import { useEffect, useRef } from 'preact/hooks';
+import type { Point } from '../../core/drawing/drawing.ts';
+import type { LaidText } from '../../core/drawing/laid.ts';
+import { Heading } from '../ladder/Heading.tsx';
+import { RichText } from '../ladder/RichText.tsx';
+import { shown, stale } from '../ladder/shown.ts';
+import { focused } from '../state/bench.ts';
+import { DrawnLines, DrawnWords } from './Drawn.tsx';
+import { DrawnFields } from './DrawnFields.tsx';
+import { type Figure, figure, path, pathLaid } from './figure.ts';
+import { measureRoom } from './measureRoom.ts';
+import { penned, toScreen } from './pen.ts';
+
+/** The end to scale; where there is room every size on it is the field that holds it. */
+export const Piece = () => {
+  const frame = useRef<HTMLDivElement>(null);
+  useEffect(() => (frame.current ? measureRoom(frame.current) : undefined), []);
+  const it = figure.value;
+  return (
+    <section class={`piece${stale.value ? ' stale' : ''}`} aria-labelledby="piece-heading">
+      <Heading id="piece-heading" level={2} title="Piece">
+        {it?.fields && 'every underlined size is a field'}
+      </Heading>
+      <div class="piece-frame" ref={frame}>
+        {it && <Drawn it={it} />}
+      </div>
+      {it && <InWords it={it} />}
+    </section>
+  );
+};
+
+const isField = (word: LaidText): word is LaidText & { readonly path: string } =>
+  word.role === 'size' && word.path !== undefined && !isShare(word.path);
+
+/** A reaction given as a share of the web's shear is no field of kN. */
+const isShare = (name: string): boolean => name === 'reaction' && typeof shown.value?.end.reaction !== 'number';
+
+const Drawn = ({ it }: { it: Figure }) => {
+  const { laid, scale, shrink, fields } = it;
+  const place = toScreen(laid, scale);
+  const { lines, words } = penned(laid, scale, focused.value);
+  const [width, height] = [(laid.box.right - laid.box.left) * scale, (laid.box.bottom - laid.box.top) * scale];
+  const sizes = fields ? words.filter(isField) : [];
+  return (
+    <div class="piece-sheet" style={{ width: `${px(width * shrink)}px`, height: `${px(height * shrink)}px` }}>
+      <svg
+        class="drawing"
+        viewBox={`0 0 ${px(width)} ${px(height)}`}
+        width={px(width * shrink)}
+        height={px(height * shrink)}
+        role="img"
+        aria-label="The beam end, drawn to scale"
+        aria-describedby="piece-sentences"
+      >
+        <DrawnLines lines={lines} />
+        <DrawnWords
+          words={fields ? words.filter((word) => !isField(word)) : words}
+          place={place}
+          scale={scale}
+          focus={focused.value}
+        />
+        <PathDrawn scale={scale} place={place} />
+      </svg>
+      {fields && <DrawnFields sizes={sizes} place={(point) => scaled(place(point), shrink)} />}
+    </div>
+  );
+};
+
+const px = (value: number): string => value.toFixed(1);
+
+const scaled = ({ x, y }: Point, by: number): Point => ({ x: x * by, y: y * by });
+
+const PathDrawn = ({ scale, place }: { scale: number; place: ReturnType<typeof toScreen> }) => {
+  const laid = pathLaid.value;
+  if (!laid) return null;
+  // The box of the drawing without its path governs, so that nothing moves when a rung is touched.
+  const { lines, words } = penned({ ...laid, box: figure.value!.laid.box }, scale, null, 'path');
+  return (
+    <g class="path">
+      <DrawnLines lines={lines} />
+      <DrawnWords words={words} place={place} scale={scale} />
+    </g>
+  );
+};
+
+/** What the drawing shows, said in sentences. */
+const InWords = ({ it }: { it: Figure }) => (
+  <>
+    {path.value && (
+      <p class="piece-caption">
+        <RichText text={path.value.caption} />
+      </p>
+    )}
+    <details class="piece-words">
+      <summary>The piece in words</summary>
+      <ul id="piece-sentences">
+        {it.drawing.sentences.map((text) => (
+          <li>{text}</li>
+        ))}
+      </ul>
+    </details>
+  </>
+);

@@ -1,0 +1,18 @@
+import type { Examined } from '../../core/check/examine.ts';
+import type { DrawingWords } from '../../core/drawing/words.ts';
+import { standards } from '../../core/standards/index.ts';
+import type { Words } from '../../core/words/words.ts';
+
+/** What the drawing of an end writes beside its sizes. */
+export const drawingWords = ({ end, designation, report }: Examined, words: Words): DrawingWords => {
+  const { bolts, kind } = end.joint;
+  return {
+    units: report.units,
+    section: designation.replace(/(?<=\d)\s*x\s*(?=\d)/gi, ' × ') || 'own section',
+    boltSize: bolts.size,
+    boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
+    holes: bolts.holes ?? standards[report.standard.id]?.materials.holesAssumed ?? '',
+    cope: words.cope,
+    plate: kind === 'fin-plate' ? 'fin plate' : 'ply',
+  };
+};

@@ -1,0 +1,1 @@
+export { Piece } from './Piece.tsx';

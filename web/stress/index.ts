@@ -1,0 +1,1 @@
+export { Stress } from './Stress.tsx';

@@ -8,13 +8,6 @@ export interface Swept {
   readonly sweep: number;
 }
 
-/** Control points of a cubic curve. */
-export interface Cubic {
-  readonly c1: Point;
-  readonly c2: Point;
-  readonly to: Point;
-}
-
 export const isArc = (step: Point | Arc): step is Arc => 'to' in step;
 export const endOf = (step: Point | Arc): Point => (isArc(step) ? step.to : step);
 
@@ -34,25 +27,6 @@ export const swept = (from: Point, { to, radius, clockwise }: Arc): Swept | null
   const turn = clockwise ? end - start : start - end;
   const positive = ((turn % (2 * Math.PI)) + 2 * Math.PI) % (2 * Math.PI);
   return { centre, radius, start, sweep: clockwise ? positive : -positive };
-};
-
-/** The arc as cubic curves of at most a quarter circle each, for pens that know no arcs. */
-export const cubics = (from: Point, arc: Arc): Cubic[] => {
-  const it = swept(from, arc);
-  if (it === null) return [{ c1: from, c2: arc.to, to: arc.to }];
-  const count = Math.ceil(Math.abs(it.sweep) / (Math.PI / 2) - 1e-9);
-  const step = it.sweep / count;
-  const pull = (4 / 3) * Math.tan(step / 4);
-  return Array.from({ length: count }, (_, i) => {
-    const [a, b] = [it.start + i * step, it.start + (i + 1) * step];
-    const p = onArc(it, a);
-    const q = i === count - 1 ? arc.to : onArc(it, b);
-    return {
-      c1: { x: p.x - pull * it.radius * Math.sin(a), y: p.y + pull * it.radius * Math.cos(a) },
-      c2: { x: q.x + pull * it.radius * Math.sin(b), y: q.y - pull * it.radius * Math.cos(b) },
-      to: q,
-    };
-  });
 };
 
 /** A run as a polyline: arcs become chords of about a tenth of a turn. */

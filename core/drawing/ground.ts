@@ -67,7 +67,7 @@ export const createGround = (): Ground => {
   };
 };
 
-export const overlaps = (a: Box, b: Box): boolean =>
+const overlaps = (a: Box, b: Box): boolean =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
 
 /** True where a segment touches the inside of a box: the part of it within the box's four sides is not empty. */

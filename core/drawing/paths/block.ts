@@ -53,7 +53,7 @@ export const webPulled: PathMaker = (it, words) => {
     { x, y: it.yn },
     { x: 0, y: it.yn },
   ] as const;
-  return path('The tie force pulls the hatched block out of the web to the beam’s end.', {
+  return path("The tie force pulls the hatched block out of the web to the beam's end.", {
     strokes: [torn(...corners)],
     areas: [block(0, it.y1, x, it.yn)],
     tags: [

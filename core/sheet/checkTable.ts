@@ -57,14 +57,20 @@ const nameOf = (context: Context, check: Check, governs: boolean): Lines => {
 const rowOf = (context: Context, check: Check): Row => {
   const { pen, input } = context;
   const governs = check.id === input.report.governing;
-  const told = (check.state === 'refer' || check.state === 'fails') && check.reasonText ? check.reasonText : '';
   return {
     kind: 'check',
     check,
     name: nameOf(context, check, governs),
     clause: wrap(pen, [plainRun(check.clause)], small, clauseWidth(context, check)),
-    reason: told ? wrap(pen, richText(told, 'prose'), small, WIDTH - at.name - 8) : [],
+    reason: reasonLines(context, check),
   };
+};
+
+/** Why a check refers or fails, below its row; a rule of fit says so by its two sizes, unless it clashes. */
+const reasonLines = ({ pen }: Context, { id, state, reason, reasonText = '' }: Check): Lines => {
+  const told = state === 'refer' || state === 'fails';
+  const bySizes = id.startsWith('fit-') && (reason === 'too-little' || reason === 'too-much');
+  return told && reasonText && !bySizes ? wrap(pen, richText(reasonText, 'prose'), small, WIDTH - at.name - 8) : [];
 };
 
 const clauseWidth = ({ pen }: Context, check: Check): number =>
@@ -108,7 +114,8 @@ export const tableZone = (context: Context, rows: readonly Row[]): Zone => {
       top += heightOf(row);
     }
     const line = LEFT + at.bar + PER_V;
-    if (rows.some(hasBar)) pen.line(line, y + HEADER - 0.6, line, y + HEADER + strengthHeight(rows), WIDE);
+    if (context.input.report.reaction > 0 && rows.some(hasBar))
+      pen.line(line, y + HEADER - 0.6, line, y + HEADER + strengthHeight(rows), WIDE);
     pen.line(LEFT, top, LEFT + WIDTH, top, NARROW);
   };
   return { height: HEADER + body, draw };

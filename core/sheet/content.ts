@@ -1,4 +1,5 @@
-import type { ArcTo, CircleMark, Mark, PathMark, PathStyle, Spot, SquaresMark, TextMark } from './pen.ts';
+import { curvesOf } from './curves.ts';
+import type { CircleMark, GridMark, Mark, PathMark, PathStyle, Spot, TextMark } from './pen.ts';
 import { POINT } from './pen.ts';
 import type { Face } from './trueType.ts';
 
@@ -10,39 +11,6 @@ type Corner = readonly [x: number, y: number];
 
 /** A number as PDF writes it: no exponent, no closing zeros. */
 const number = (value: number): string => String(Math.round(value * 1000) / 1000);
-
-/** Control points of the cubic curve that follows an arc of at most a quarter circle within 0.03 %. */
-const quarter = (centre: Spot, radius: number, from: number, to: number): [Spot, Spot, Spot] => {
-  const k = (4 / 3) * Math.tan((to - from) / 4) * radius;
-  const on = (angle: number): Spot => ({
-    x: centre.x + radius * Math.cos(angle),
-    y: centre.y + radius * Math.sin(angle),
-  });
-  const [a, b] = [on(from), on(to)];
-  return [
-    { x: a.x - k * Math.sin(from), y: a.y + k * Math.cos(from) },
-    { x: b.x + k * Math.sin(to), y: b.y - k * Math.cos(to) },
-    b,
-  ];
-};
-
-/** An arc as cubic curves. With y down, clockwise as seen means growing angles. */
-const curvesOf = (from: Spot, arc: ArcTo): [Spot, Spot, Spot][] => {
-  const [dx, dy] = [arc.x - from.x, arc.y - from.y];
-  const chord = Math.hypot(dx, dy);
-  if (chord === 0) return [];
-  const radius = Math.max(arc.radius, chord / 2);
-  const side = (arc.clockwise ? 1 : -1) * Math.sqrt(Math.max(0, radius ** 2 - chord ** 2 / 4));
-  const centre = { x: from.x + dx / 2 - (side * dy) / chord, y: from.y + dy / 2 + (side * dx) / chord };
-  const start = Math.atan2(from.y - centre.y, from.x - centre.x);
-  let turn = Math.atan2(arc.y - centre.y, arc.x - centre.x) - start;
-  if (arc.clockwise && turn < 0) turn += 2 * Math.PI;
-  if (!arc.clockwise && turn > 0) turn -= 2 * Math.PI;
-  const parts = Math.max(1, Math.ceil(Math.abs(turn) / (Math.PI / 2) - 1e-9));
-  return Array.from({ length: parts }, (_, i) =>
-    quarter(centre, radius, start + (turn * i) / parts, start + (turn * (i + 1)) / parts),
-  );
-};
 
 /** Writes the marks of one page as the drawing operators of PDF, telling the state only where it changes. */
 class Content {
@@ -70,7 +38,7 @@ class Content {
       if (mark.kind === 'text') this.text(mark);
       else if (mark.kind === 'path') this.path(mark);
       else if (mark.kind === 'circle') this.circle(mark);
-      else this.squares(mark);
+      else this.grid(mark);
     }
     this.endText();
     this.endLines();
@@ -184,16 +152,29 @@ class Content {
     });
   }
 
-  private squares({ rows }: SquaresMark): void {
-    this.begin({ fill: 'black' });
-    for (const { x, y, width, height } of rows) {
-      const [left, top] = this.corner({ x, y });
-      const [right, bottom] = this.corner({ x: x + width, y: y + height });
-      this.out.push(`${left} ${bottom} ${right - left} ${top - bottom} re`);
-    }
-    this.end({ fill: 'black' });
+  /** A stencil of one bit a square, painted in black: rows of hexadecimal digits, each filled up to whole bytes. */
+  private grid({ x, y, module, rows }: GridMark): void {
+    this.endText();
+    this.endLines();
+    this.colour('0 g');
+    const [wide, high] = [rows[0]?.length ?? 0, rows.length];
+    const [left, bottom] = this.corner({ x, y: y + high * module });
+    const size = (count: number): string => number(count * module * UNITS);
+    this.out.push(`q ${size(wide)} 0 0 ${size(high)} ${left} ${bottom} cm`);
+    this.out.push(`BI /W ${wide} /H ${high} /BPC 1 /IM true /D [1 0] /F /AHx ID`);
+    this.out.push(`${rows.map(hexOf).join('\n')}>`, 'EI Q');
   }
 }
+
+const hexOf = (row: readonly boolean[]): string => {
+  let hex = '';
+  for (let i = 0; i < row.length; i += 8) {
+    let byte = 0;
+    for (let k = 0; k < 8; k += 1) byte = 2 * byte + (row[i + k] ? 1 : 0);
+    hex += byte.toString(16).padStart(2, '0');
+  }
+  return hex;
+};
 
 /** The content of one page: `font` is the name of the font there, `glyphs` the number of each character of each face in it. */
 export const contentOf = (

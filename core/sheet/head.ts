@@ -67,9 +67,9 @@ const drawJob = ({ pen, input }: Context, left: number, width: number): void => 
   pen.text(left, TOP + 4.1, say.job, small);
   const style: TextStyle = { size: 10 };
   const lines = atMostLines(pen, wrap(pen, [plainRun(job)], style, width), 2, style, width);
-  setLines(pen, left, TOP + 8.2, lines, style, 3.6);
+  setLines(pen, left, TOP + 8, lines, style, 3.7);
   const labels = `${say.drawing}: ${drawing || say.noneGiven}${number ? `; ${say.number} ${number}` : ''}`;
-  pen.text(left, TOP + (lines.length > 1 ? 15.3 : 12.7), oneLine(pen, labels, small, width), small);
+  pen.text(left, TOP + (lines.length > 1 ? 14.9 : 12.4), oneLine(pen, labels, small, width), small);
 };
 
 const drawStandard = (context: Context, left: number): void => {

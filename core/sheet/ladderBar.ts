@@ -16,8 +16,9 @@ export const drawBar = (
   { reactionAtFailure, state, utilisation }: Check,
   governs: boolean,
 ): void => {
-  if (reactionAtFailure === null || reactionAtFailure === undefined) return;
-  const times = reaction > 0 ? reactionAtFailure / reaction : Number.POSITIVE_INFINITY;
+  // The axis counts in V: without a reaction it has no length.
+  if (reactionAtFailure === null || reactionAtFailure === undefined || reaction <= 0) return;
+  const times = reactionAtFailure / reaction;
   const beyond = times > 3;
   const length = beyond ? BROKEN : times * PER_V;
   const height = governs ? 2.5 : 2;

@@ -21,7 +21,7 @@ const unverified = ({ input }: Context): boolean =>
   input.report.checks.some(({ state, verified }) => state !== 'notApplicable' && verified === 'none');
 
 /** What was taken as true, notes, options where the head has no room, and what the marks of the table mean. */
-export const limitsZone = (context: Context, qrLeftOut: boolean): Zone => {
+export const limitsZone = (context: Context): Zone => {
   const { pen, input } = context;
   const { assumptions, notes } = input.report;
   const options = optionsFit(context) ? '' : `${say.options}${optionsText(context)}.`;
@@ -31,7 +31,6 @@ export const limitsZone = (context: Context, qrLeftOut: boolean): Zone => {
     options,
     basesText(context),
     unverified(context) ? say.unverified : '',
-    qrLeftOut ? say.qrLeftOut : '',
   ].filter(Boolean);
   const runs: SetRun[] = [plainRun(say.limits, true), ...richText(sentences.join(' '), 'prose')];
   const lines = wrap(pen, runs, style, WIDTH);

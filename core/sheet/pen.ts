@@ -57,13 +57,18 @@ export interface CircleMark extends PathStyle {
   readonly radius: number;
 }
 
-/** Black squares of one size, such as the modules of a QR code. */
-export interface SquaresMark {
-  readonly kind: 'squares';
-  readonly rows: readonly { readonly x: number; readonly y: number; readonly width: number; readonly height: number }[];
+/** Black and white squares of one size in rows, such as a square code; what is not dark stays as it was. */
+export interface GridMark {
+  readonly kind: 'grid';
+  readonly x: number;
+  readonly y: number;
+  /** Side of a square, mm. */
+  readonly module: number;
+  /** True for dark. */
+  readonly rows: readonly (readonly boolean[])[];
 }
 
-export type Mark = TextMark | PathMark | CircleMark | SquaresMark;
+export type Mark = TextMark | PathMark | CircleMark | GridMark;
 
 /** A run that may be bolder than the line it stands in. */
 export interface SetRun extends Run {
@@ -117,8 +122,8 @@ export class Pen {
     this.put({ kind: 'circle', centre: { x, y }, radius, ...style });
   }
 
-  squares(rows: SquaresMark['rows']): void {
-    this.put({ kind: 'squares', rows });
+  grid(x: number, y: number, module: number, rows: GridMark['rows']): void {
+    this.put({ kind: 'grid', x, y, module, rows });
   }
 
   private faceOf(run: SetRun, { family = 'narrow', bold = false }: TextStyle): Face {

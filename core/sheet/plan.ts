@@ -5,6 +5,7 @@ import { footingZone } from './footing.ts';
 import { givenZone } from './given.ts';
 import { limitsZone } from './limitsZone.ts';
 import { BLOCK_HEIGHT, FIGURE_TOP } from './page.ts';
+import type { Code } from './qr.ts';
 import { stressNumbers, stressProfiles } from './stressZone.ts';
 import { workingElsewhere, workingZone } from './workingZone.ts';
 
@@ -122,16 +123,16 @@ const onMore = (parts: Parts): Plan => {
   return { ...plan!, workingLater: true };
 };
 
-/** Shares the first sheet out; text never gets smaller, what does not fit goes on further sheets. */
-export const planOf = (context: Context, bottom: number, qrLeftOut: boolean): Plan => {
+/** Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on further sheets. */
+export const planOf = (context: Context, bottom: number, code: Code | null): Plan => {
   const room = bottom - BLOCK_HEIGHT - FIGURE_TOP - 0.6;
   const parts: Parts = {
     context,
     rows: rowsOf(context),
     given: givenZone(context, DATA_WIDTH),
     footing: footingZone(context),
-    limits: limitsZone(context, qrLeftOut),
-    figures: figuresOf(context, FIGURE_WIDTH, room),
+    limits: limitsZone(context),
+    figures: figuresOf(context, FIGURE_WIDTH, room, code),
     room,
   };
   return onOneSheet(parts) ?? onMore(parts);

@@ -1,11 +1,7 @@
 import { encode } from 'uqr';
-import type { Pen, SquaresMark } from './pen.ts';
+import type { Pen } from './pen.ts';
 
-/**
- * Side of the square code at most, and the least module that an ordinary printer and camera manage, mm. Around the box more than the
- * four modules stay white that a reader needs: the page's edge, the frame of the block and the gap before the sign-off boxes see to that.
- */
-const BOX = 24.4;
+/** Module of the code: the least that an ordinary printer and camera manage, and the most that is of use, mm. */
 const LEAST_MODULE = 0.33;
 const MOST_MODULE = 0.5;
 
@@ -15,30 +11,20 @@ export interface Code {
   readonly module: number;
 }
 
-/** The code of a text, error level M; null where its modules would be too small for the box. */
-export const codeOf = (text: string): Code | null => {
+/** The code of a text, error level M, no larger than `most` mm unless its modules then were too small; null where no code holds the text. */
+export const codeOf = (text: string, most: number): Code | null => {
   try {
     const { data, size } = encode(text, { ecc: 'M', border: 0, boostEcc: false });
-    const module = Math.min(MOST_MODULE, BOX / size);
-    return module < LEAST_MODULE ? null : { rows: data, module };
+    return { rows: data, module: Math.min(MOST_MODULE, Math.max(LEAST_MODULE, most / size)) };
   } catch {
     return null;
   }
 };
 
-/** Draws the code with its upper left corner here; runs of dark modules are one rectangle. */
+/** Side of a code, mm. */
+export const sideOf = ({ rows, module }: Code): number => rows.length * module;
+
+/** Draws the code with its upper left corner here. */
 export const drawCode = (pen: Pen, x: number, y: number, { rows, module }: Code): void => {
-  const dark: SquaresMark['rows'][number][] = [];
-  rows.forEach((row, j) => {
-    let from = -1;
-    for (let i = 0; i <= row.length; i += 1) {
-      if (row[i] && from < 0) from = i;
-      if (!row[i] && from >= 0) {
-        const width = (i - from) * module;
-        dark.push({ x: x + from * module, y: y + j * module, width, height: module });
-        from = -1;
-      }
-    }
-  });
-  pen.squares(dark);
+  pen.grid(x, y, module, rows);
 };

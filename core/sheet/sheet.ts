@@ -9,9 +9,9 @@ import { BLOCK_HEIGHT, bottomOf, FIGURE_TOP, LEFT, type Paper, papers, WIDTH } f
 import { writePdf } from './pdf.ts';
 import { Pen } from './pen.ts';
 import { DATA_WIDTH, FIGURE_WIDTH, type Plan, planOf } from './plan.ts';
-import { codeOf } from './qr.ts';
+import { codeOf, sideOf } from './qr.ts';
 import { sheetWords as say } from './sheetWords.ts';
-import { drawTitleBlock } from './titleBlock.ts';
+import { CODE_ROOM, drawTitleBlock } from './titleBlock.ts';
 import { drawVerdict, governingOf } from './verdictLine.ts';
 import { drawFurtherFrame, furtherPages, workedChecks } from './workingPages.ts';
 
@@ -44,8 +44,9 @@ const drawPlan = (plan: Plan, bottom: number): void => {
 /** All pages as marks. */
 const drawSheet = (context: Context, { workings }: SheetOptions, bottom: number): void => {
   const { pen, input } = context;
-  const code = input.link === undefined ? null : codeOf(input.link);
-  const plan = planOf(context, bottom, input.link !== undefined && code === null);
+  const code = input.link === undefined ? null : codeOf(input.link, CODE_ROOM);
+  const inBlock = code !== null && sideOf(code) <= CODE_ROOM;
+  const plan = planOf(context, bottom, inBlock ? null : code);
   const governing = governingOf(context);
   const checks = workings === 'all' ? workedChecks(context) : plan.workingLater && governing ? [governing] : [];
   const further = furtherPages(context, plan.later, checks, bottom);
@@ -53,7 +54,8 @@ const drawSheet = (context: Context, { workings }: SheetOptions, bottom: number)
   drawHead(context);
   drawVerdict(context);
   drawPlan(plan, bottom);
-  drawTitleBlock(context, bottom, code, { sheet: 1, of });
+  const lost = input.link !== undefined && !inBlock && !plan.figure.coded;
+  drawTitleBlock(context, bottom, { code: inBlock ? code : null, lost, sheet: 1, of });
   further.forEach((draw, i) => {
     pen.turnTo(i + 1);
     drawFurtherFrame(context, bottom, i + 2, of);

@@ -84,7 +84,7 @@ export const sheetWords = {
   optionsBelow: 'options in force: see below',
   basis: 'Basis: ',
   unverified: '* not yet compared with numbers from outside the program.',
-  qrLeftOut: 'The code of this end is too long for a square to scan; the file carries the data.',
+  qrLeftOut: 'Data too long for a square code: the file itself carries them.',
   prepared: 'Prepared',
   checked: 'Checked',
   approved: 'Approved',

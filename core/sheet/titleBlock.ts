@@ -8,22 +8,31 @@ import { oneLine } from './textBlock.ts';
 const BOXES_LEFT = 29.5;
 const SIGN_HEIGHT = 13.2;
 
-/** Sheet numbers: this one of how many. */
-export interface Count {
+/** Side of a square code that stands here, mm; its white edges are the page's margin, the gap below the frame and that before the boxes. */
+export const CODE_ROOM = 24;
+
+/** What the block of this sheet says beyond the end's own data. */
+export interface Block {
+  readonly code: Code | null;
+  /** True where a code was asked for but found no room. */
+  readonly lost: boolean;
+  /** Number of this sheet, and of how many. */
   readonly sheet: number;
   readonly of: number;
 }
 
 /** Sign-off boxes, revision, fingerprint, program and cautions, at the foot of the window. */
-export const drawTitleBlock = (context: Context, bottom: number, code: Code | null, count: Count): void => {
+export const drawTitleBlock = (context: Context, bottom: number, block: Block): void => {
   const { pen } = context;
+  const { code, lost } = block;
   const top = bottom - BLOCK_HEIGHT;
   pen.line(LEFT, top, LEFT + WIDTH, top, FRAME);
   if (code) drawCode(pen, LEFT, top + 1.6, code);
   const left = LEFT + (code ? BOXES_LEFT : 0);
   drawSignOff(context, left, top + 1.6);
-  drawRevision(context, left, top + SIGN_HEIGHT + 1.9, count);
+  drawRevision(context, left, top + SIGN_HEIGHT + 1.9, block);
   drawCautions(context, left, bottom - 0.2);
+  if (lost) pen.text(LEFT + WIDTH, bottom - 0.2, say.qrLeftOut, { ...small, anchor: 'end' });
 };
 
 /** What the program asks everyone to keep in mind. */
@@ -56,7 +65,7 @@ const drawSignOff = ({ pen, input }: Context, left: number, top: number): void =
 /** Fingerprint in two groups, easier to compare. */
 export const fingerprintText = (fingerprint: string): string => `${fingerprint.slice(0, 4)} ${fingerprint.slice(4)}`;
 
-const drawRevision = ({ pen, input }: Context, left: number, top: number, count: Count): void => {
+const drawRevision = ({ pen, input }: Context, left: number, top: number, { sheet, of }: Block): void => {
   const { revision = '', reason = '', date = '' } = input.end.sheet ?? {};
   const { version, fingerprint } = input.report;
   const right = LEFT + WIDTH;
@@ -67,7 +76,7 @@ const drawRevision = ({ pen, input }: Context, left: number, top: number, count:
     [right - 96, 19, say.dateOfIssue, date],
     [right - 76, 36, say.fingerprint, fingerprintText(fingerprint)],
     [right - 36, 24, say.program, program],
-    [right - 11, 11, say.sheet, `${count.sheet} ${say.of} ${count.of}`],
+    [right - 11, 11, say.sheet, `${sheet} ${say.of} ${of}`],
   ];
   const bold: TextStyle = { size: 9, bold: true };
   for (const [x, width, label, value] of fields) {

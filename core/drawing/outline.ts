@@ -21,8 +21,7 @@ export const elevation = (it: Facts, right: number): Stroke[] => [
 ];
 
 /** Where the web or flange begins at a level: the beam's end, the cope's face, or a point of its corner. */
-const edgeAt = (it: Facts, y: number): number =>
-  Math.max(faceAt(topCut(it), y), faceAt(bottomCut(it), it.h - y));
+const edgeAt = (it: Facts, y: number): number => Math.max(faceAt(topCut(it), y), faceAt(bottomCut(it), it.h - y));
 
 /** True where steel of the beam stands, seen in elevation. */
 export const behindWeb = (it: Facts, { x, y }: Point): boolean => y >= 0 && y <= it.h && x >= edgeAt(it, y);

@@ -27,7 +27,10 @@ export interface Figure extends Fit {
   readonly fields: boolean;
 }
 
-const spoken = computed<DrawingWords | null>(() => (shown.value ? drawingWords(shown.value, words.value) : null));
+/** What the drawing writes beside its sizes. */
+export const spoken = computed<DrawingWords | null>(() =>
+  shown.value ? drawingWords(shown.value, words.value) : null,
+);
 
 const drawing = computed<Drawing | null>(() =>
   shown.value && spoken.value ? drawEnd(shown.value.facts, spoken.value) : null,

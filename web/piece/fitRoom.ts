@@ -20,11 +20,12 @@ export interface Fit {
 
 /** px for one mm of the piece at most: a small section is not blown up beyond this. */
 export const LARGEST = 2;
-/** Words may be this much smaller than asked for before a smaller scale is tried. */
-const NEARLY = 0.96;
-/** From one scale to the next that is tried, at least and at most; and how many are tried. */
-const STEP = { least: 0.97, most: 0.8 } as const;
-const TRIES = 18;
+/** Layouts tried before the best is taken. */
+const TURNS = 7;
+/** Scales differ by this share at least, from one that does not fit to the next. */
+const STEP = 0.03;
+/** Below this share of the scale at which the bare piece fills the room nothing is left to read. */
+const LEAST = 0.3;
 
 /** How much of the room a laid drawing takes, 1 = all of it. */
 export const taken = ({ box }: Laid, scale: number, room: Room): number =>
@@ -33,8 +34,8 @@ export const taken = ({ box }: Laid, scale: number, room: Room): number =>
 export const layAt = (drawing: Drawing, scale: number, { textSize }: Room): Laid =>
   layoutDrawing(drawing, { values: 'gap', textHeight: textSize / scale });
 
-/** The scale at which this drawing would just go in, if its words stayed where they are. */
-const wouldFit = ({ box }: Drawing, laid: Laid, scale: number, room: Room): number => {
+/** The scale at which this drawing would just go in, if its words stood around the piece as they do. */
+const wouldFit = ({ box }: Drawing, { laid, scale }: Fit, room: Room): number => {
   const along = (side: number, piece: number, whole: number): number => (side - (whole - piece) * scale) / piece;
   return Math.min(
     along(room.width, box.right - box.left, laid.box.right - laid.box.left),
@@ -51,18 +52,20 @@ const worth = ({ scale, shrink }: Fit): number => scale * shrink ** 3;
  */
 export const fitRoom = (drawing: Drawing, room: Room): Fit => {
   const { left, top, right, bottom } = drawing.box;
-  const air = 4 * room.textSize;
-  let scale = Math.min(
-    LARGEST,
-    Math.max(0.02, Math.min((room.width - air) / (right - left), (room.height - air) / (bottom - top))),
-  );
-  let best: Fit | undefined;
-  for (let at = 0; at < TRIES; at += 1) {
+  const bare = Math.min(room.width / (right - left), room.height / (bottom - top));
+  const within = (scale: number): number => Math.min(LARGEST, Math.max(LEAST * bare, scale));
+  const at = (scale: number): Fit => {
     const laid = layAt(drawing, scale, room);
-    const fit = { laid, scale, shrink: Math.min(1, 1 / taken(laid, scale, room)) };
-    if (!best || worth(fit) > worth(best)) best = fit;
-    if (fit.shrink >= NEARLY) break;
-    scale = Math.min(scale * STEP.least, Math.max(scale * STEP.most, wouldFit(drawing, laid, scale, room)));
+    return { laid, scale, shrink: Math.min(1, 1 / taken(laid, scale, room)) };
+  };
+  let fit = at(within(0.75 * bare));
+  let best = fit;
+  for (let turn = 1; turn < TURNS; turn += 1) {
+    const exact = wouldFit(drawing, fit, room);
+    const next = within(fit.shrink === 1 ? exact : Math.min(exact, fit.scale * (1 - STEP)));
+    if (Math.abs(next - fit.scale) < 0.004 * fit.scale) break;
+    fit = at(next);
+    if (worth(fit) > worth(best)) best = fit;
   }
-  return best!;
+  return best;
 };

@@ -1,7 +1,6 @@
-import type { Report } from '../../core/check/report.ts';
 import { touch } from '../ladder/touch.ts';
 import { chosen } from '../state/bench.ts';
-import { type Profile, stressText } from './profile.ts';
+import type { Profile } from './profile.ts';
 
 /** Name of the section; where there is a working to it, a button that opens it. */
 export const ProfileName = ({
@@ -15,12 +14,12 @@ export const ProfileName = ({
   top: number;
   width: number;
 }) => {
-  const { name, check } = profile;
+  const { title, check } = profile;
   const style = { left: `${left}px`, top: `${top}px`, width: `${width}px` };
   if (!check) {
     return (
       <span class="profile-name" style={style}>
-        {name}
+        {title}
       </span>
     );
   }
@@ -38,32 +37,36 @@ export const ProfileName = ({
       }}
     >
       <span class="unseen">Elastic shear stress, </span>
-      {name}
+      {title}
     </button>
   );
 };
 
 /** What the lines of a profile stand for, with their numbers. */
-export const ProfileCaption = ({ profile, report, width }: { profile: Profile; report: Report; width: number }) => {
-  const { name, peak, mean, limit, firstYield } = profile;
+export const ProfileCaption = ({ profile, width }: { profile: Profile; width: number }) => {
+  const { title, peak, mean, limitText, firstYield } = profile;
   return (
     <p style={{ width: `${width}px` }}>
-      <span class="unseen">{`${name}: peak ${stressText(peak.stress, report)}, `}</span>
+      <span class="unseen">{`${title}: peak ${peak.text}, `}</span>
       <span class="key-mean" />
-      mean {stressText(mean, report)}
+      {mean.text}
       <span class="unseen">, </span>
       <br />
-      {limit !== null && (
+      {limitText && (
         <>
           <span class="key-limit" />
-          limit {stressText(limit, report)}
+          limit {limitText}
           <span class="unseen">, </span>
           <br />
         </>
       )}
-      first yield at
-      <br />
-      {firstYield}
+      {firstYield && (
+        <>
+          first yield at
+          <br />
+          {firstYield}
+        </>
+      )}
     </p>
   );
 };

@@ -1,10 +1,11 @@
+import { computed } from '@preact/signals';
 import { useEffect, useRef } from 'preact/hooks';
 import type { Report } from '../../core/check/report.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { Heading } from '../ladder/Heading.tsx';
 import { shown, stale } from '../ladder/shown.ts';
 import { Working } from '../ladder/Working.tsx';
-import { type Figure, figure } from '../piece/figure.ts';
+import { type Figure, figure, spoken } from '../piece/figure.ts';
 import { chosen } from '../state/bench.ts';
 import { ProfileDrawn } from './ProfileDrawn.tsx';
 import { ProfileCaption, ProfileName } from './ProfileWords.tsx';
@@ -14,12 +15,15 @@ import { GAP, isBeside, LEFT, measureShared, profileWidth, shared } from './shar
 /** Room for a name over a profile, px. */
 const NAME = 24;
 
+const profiles = computed(() => (shown.value && spoken.value ? profilesOf(shown.value, spoken.value) : []));
+
 /** Elastic shear stress over the depth of the full and the cut section, on the levels of the piece; for information. */
 export const Stress = () => {
   const section = useRef<HTMLElement>(null);
   useEffect(() => (section.current ? measureShared(section.current) : undefined), []);
-  const [it, report] = [figure.value, shown.value?.report];
-  const open = report && profilesOf(report).find(({ check }) => check && check.id === chosen.value)?.check;
+  const it = figure.value;
+  const report = shown.value?.report;
+  const open = profiles.value.find(({ check }) => check && check.id === chosen.value)?.check;
   return (
     <>
       <section
@@ -50,15 +54,15 @@ const isJudged = ({ checks }: Report): boolean =>
   checks.some(({ id, state }) => id === 'stress-full' && state !== 'information');
 
 const Profiles = ({ it, report }: { it: Figure; report: Report }) => {
-  const profiles = profilesOf(report);
-  const count = profiles.length;
+  const all = profiles.value;
+  const count = all.length;
   const beside = isBeside.value;
   const column = profileWidth(count);
   const scale = it.scale * it.shrink;
-  const reach = reachOf(profiles);
+  const reach = reachOf(all);
   // Beside the piece the levels stand where they stand on the piece; below it the air over top of steel is left out.
   const above = beside ? -it.laid.box.top * scale : NAME;
-  const deepest = Math.max(...profiles.map(({ points }) => points.at(-1)!.level));
+  const deepest = Math.max(...all.map(({ bottom }) => bottom));
   const y = (level: number): number => above + level * scale;
   const leftOf = (at: number): number => LEFT + at * (column + GAP);
   const width = leftOf(count) - GAP;
@@ -71,16 +75,16 @@ const Profiles = ({ it, report }: { it: Figure; report: Report }) => {
         aria-label="Shear stress over the depth"
         aria-describedby="stress-sentences"
       >
-        {profiles.map((profile, at) => (
-          <ProfileDrawn profile={profile} report={report} left={leftOf(at)} width={column} reach={reach} y={y} />
+        {all.map((profile, at) => (
+          <ProfileDrawn profile={profile} left={leftOf(at)} width={column} reach={reach} y={y} />
         ))}
       </svg>
-      {profiles.map((profile, at) => (
+      {all.map((profile, at) => (
         <ProfileName profile={profile} left={leftOf(at)} top={above - NAME} width={column} />
       ))}
       <div class="profile-captions" id="stress-sentences" style={{ paddingLeft: `${LEFT}px`, gap: `${GAP}px` }}>
-        {profiles.map((profile) => (
-          <ProfileCaption profile={profile} report={report} width={column} />
+        {all.map((profile) => (
+          <ProfileCaption profile={profile} width={column} />
         ))}
       </div>
       <p class="profile-note">{isJudged(report) ? 'judged on the ladder' : 'information, no verdict'}</p>

@@ -1,58 +1,48 @@
-import type { Check, Report, SectionStress } from '../../core/check/report.ts';
+import type { Examined } from '../../core/check/examine.ts';
+import type { Check, SectionStress } from '../../core/check/report.ts';
+import { type StressProfile, stressFigure } from '../../core/drawing/stressFigure.ts';
+import type { DrawingWords } from '../../core/drawing/words.ts';
 import { fixed, roundedDown } from '../../core/units/figures.ts';
 import { fromSystem, unitOf } from '../../core/units/systems.ts';
 
-/** One section's shear stress as it is drawn: levels in mm below top of steel, stresses in the report's unit. */
-export interface Profile {
-  readonly name: string;
+/** One section's shear stress as it stands beside the piece: the drawing's profile, with what is said of it. */
+export interface Profile extends StressProfile {
   /** The check of this section, where it is for information and its working is opened here. */
   readonly check: Check | null;
-  readonly points: readonly { readonly level: number; readonly stress: number }[];
-  readonly peak: { readonly level: number; readonly stress: number };
-  readonly mean: number;
-  /** The standard's own limit; null where it has none. */
-  readonly limit: number | null;
+  /** The standard's own limit as it is printed; empty where it has none. */
+  readonly limitText: string;
   /** Reaction of first yield, without a factor, as it is printed with its unit. */
   readonly firstYield: string;
 }
 
-const names: Readonly<Record<SectionStress['name'], string>> = {
-  full: 'full section',
-  'tee-top': 'cut tee',
-  'tee-bottom': 'cut tee',
-  rectangle: 'rectangle',
-};
-
 /** A check that has several sections names the one its numbers speak of. */
-const speaksOf = ({ of = '' }: Check, { name }: SectionStress): boolean => of === '' || name.startsWith(of);
+const speaksOf = ({ of = '' }: Check, { name }: StressProfile): boolean => of === '' || of === name;
+
+/** The report's section that a profile is of. */
+const sectionOf = (sections: readonly SectionStress[], { name }: StressProfile): SectionStress | undefined =>
+  sections.find((one) => one.name === name || one.name.startsWith(`${name}-`));
 
 /** The full section first, then what is left behind the copes. */
-export const profilesOf = ({ checks, shape, units }: Pick<Report, 'checks' | 'shape' | 'units'>): Profile[] =>
-  shape.sections.map((section) => {
-    const id = section.name === 'full' ? 'stress-full' : 'stress-cope';
-    const check = checks.find((one) => one.id === id);
-    const own = check && speaksOf(check, section) ? check : undefined;
-    const level = (value: number): number => fromSystem(value, '1,0', units);
+export const profilesOf = ({ facts, report }: Examined, words: DrawingWords): Profile[] => {
+  const { checks, shape, units } = report;
+  const judged = checks.filter(({ id, state }) => id.startsWith('stress-') && state !== 'notApplicable');
+  const limit = judged.find(({ resistance }) => resistance !== null)?.resistance ?? null;
+  const figure = stressFigure(facts, words, limit === null ? null : fromSystem(limit, '-2,1', units));
+  return figure.profiles.map((one) => {
+    const check = judged.find(({ id }) => id === (one.name === 'full' ? 'stress-full' : 'stress-cope'));
+    const section = sectionOf(shape.sections, one);
     return {
-      name: names[section.name],
-      check: own?.state === 'information' ? own : null,
-      points: section.profile.map(([at, stress]) => ({ level: level(at), stress })),
-      peak: { level: level(section.peakAt), stress: section.peakStress },
-      mean: section.meanStress,
-      limit: check && check.state !== 'notApplicable' ? check.resistance : null,
-      firstYield: `${roundedDown(section.firstYieldReaction)} ${unitOf('0,1', units).name}`,
+      ...one,
+      check: check && check.state === 'information' && speaksOf(check, one) ? check : null,
+      limitText: limit === null ? '' : fixed(limit, units === 'mm-kN' ? 1 : 2),
+      firstYield: section ? `${roundedDown(section.firstYieldReaction)} ${unitOf('0,1', units).name}` : '',
     };
   });
+};
 
-/** A stress to 0.1 MPa or 0.01 ksi. */
-export const stressText = (value: number, { units }: Pick<Report, 'units'>): string =>
-  fixed(value, units === 'mm-kN' ? 1 : 2);
-
-/** How far to the right the stresses of all profiles reach; a limit far beyond them stands at the edge, off the scale. */
+/** A limit further out than this share of the largest peak stands at the edge, off the scale. */
 const NEAR = 1.6;
 
-export const reachOf = (profiles: readonly Profile[]): number => {
-  const peak = Math.max(...profiles.map((one) => one.peak.stress));
-  const limits = profiles.flatMap(({ limit }) => (limit !== null && limit <= NEAR * peak ? [limit] : []));
-  return Math.max(peak, ...limits, 1e-9);
-};
+/** How far to the right the profiles reach, as a share of the largest peak. */
+export const reachOf = (profiles: readonly Profile[]): number =>
+  Math.max(1, ...profiles.flatMap(({ limit }) => (limit && limit.share <= NEAR ? [limit.share] : [])));

@@ -1,5 +1,6 @@
 import type { Check } from '../check/report.ts';
 import type { Context, Zone } from './context.ts';
+import { limitText } from './fitLimit.ts';
 import { drawBar, PER_V } from './ladderBar.ts';
 import { DOTTED, HAIR, LEFT, NARROW, small, table, WIDE, WIDTH } from './page.ts';
 import type { TextStyle } from './pen.ts';
@@ -147,7 +148,7 @@ const drawRow = (context: Context, row: Row, top: number): void => {
   if (row.kind === 'fit') {
     pen.line(LEFT, top, LEFT + WIDTH, top, NARROW);
     pen.text(LEFT + at.name, top + 3, say.table.fit, small);
-    pen.text(LEFT + at.demand, top + 3, say.table.required, { ...small, anchor: 'end' });
+    pen.text(LEFT + at.demand, top + 3, say.table.limit, { ...small, anchor: 'end' });
     pen.text(LEFT + at.resistance, top + 3, say.table.given, { ...small, anchor: 'end' });
     return;
   }
@@ -168,7 +169,7 @@ const drawCells = (context: Context, row: Row & { kind: 'check' }, base: number,
   drawSign(pen, LEFT + at.sign, base - 1.05, 1, check);
   setLines(pen, LEFT + at.name, base, name, style, MORE);
   pen.text(LEFT + at.symbol, base, richText(check.symbol), { ...table, anchor: 'end' });
-  right(at.demand, numbers.amount(check.demand, check.unit));
+  right(at.demand, hasBar(row) ? numbers.amount(check.demand, check.unit) : limitText(numbers, check));
   right(at.resistance, numbers.amount(check.resistance, check.unit));
   pen.text(LEFT + at.unit, base, check.unit, style);
   right(at.ratio, numbers.ratio(check.utilisation));

@@ -46,7 +46,14 @@ const emptyMap = words(0, 1, 3, 1, 0, 12, 4, 32, 0, 4, 4, 1, 0, 32, 0xffff, 0, 3
 /** Name 6 alone, which the PDF library asks for. */
 const namesOf = (name: string): Uint8Array => joined([words(0, 1, 18, 1, 0, 0, 6, name.length, 0), asciiOf(name)]);
 
-/** Readers of PDF check no sums, so those of the tables stay zero. */
+const sumOf = (table: Uint8Array): number => {
+  const view = viewOf(table);
+  let sum = 0;
+  for (let i = 0; i < table.length; i += 4) sum = (sum + view.getUint32(i)) >>> 0;
+  return sum;
+};
+
+/** The sum over the whole file in `head` stays as it was: readers of PDF do not look at it. */
 const fileOf = (tables: readonly (readonly [tag: string, table: Uint8Array])[]): Uint8Array => {
   const header = new Uint8Array(12 + 16 * tables.length);
   const view = viewOf(header);
@@ -56,9 +63,10 @@ const fileOf = (tables: readonly (readonly [tag: string, table: Uint8Array])[]):
   const bodies = tables.map(([tag, table], i) => {
     const at = 12 + 16 * i;
     header.set(asciiOf(tag), at);
+    const padded = joined([table, new Uint8Array((4 - (table.length % 4)) % 4)]);
+    view.setUint32(at + 4, sumOf(padded));
     view.setUint32(at + 8, offset);
     view.setUint32(at + 12, table.length);
-    const padded = joined([table, new Uint8Array((4 - (table.length % 4)) % 4)]);
     offset += padded.length;
     return padded;
   });

@@ -1,5 +1,6 @@
 import type { Check } from '../check/report.ts';
 import type { Context, Zone } from './context.ts';
+import { limitText } from './fitLimit.ts';
 import { foot, LEFT, WIDTH } from './page.ts';
 import type { SetRun } from './pen.ts';
 import { richText } from './richText.ts';
@@ -14,7 +15,7 @@ const lower = (text: string): string => text.charAt(0).toLowerCase() + text.slic
 /** Clause, or the basis where the rule is no clause. */
 const sourceOf = ({ clause, basis }: Check): string => (basis === 'practice' ? basis : `${say.clause} ${clause}`);
 
-/** Rules of fit that hold, given over required, those of one source together. */
+/** Rules of fit that hold, given and limit, those of one source together. */
 const fitRuns = ({ input, numbers }: Context): SetRun[] => {
   const held = input.report.checks.filter(({ id, state }) => id.startsWith('fit-') && state === 'holds');
   if (held.length === 0) return [];
@@ -23,13 +24,12 @@ const fitRuns = ({ input, numbers }: Context): SetRun[] => {
     const items = held
       .filter((one) => sourceOf(one) === source)
       .map((one) => {
-        const sizes = `${numbers.amount(one.resistance, one.unit)}/${numbers.amount(one.demand, one.unit)}`;
-        return `${lower(titleOf(one))} ${sizes}`;
+        return `${lower(titleOf(one))} ${numbers.amount(one.resistance, one.unit)} ${limitText(numbers, one)}`;
       });
     return `${items.join('; ')} (${source})`;
   });
   const mark = held.some(({ verified }) => verified === 'none') ? ' *' : '';
-  return [plainRun(say.fitHolds + mark, true), plainRun(`${say.givenRequired}${groups.join('; ')}.`)];
+  return [plainRun(say.fitHolds + mark, true), plainRun(`: ${groups.join('; ')}.`)];
 };
 
 /** What does not apply, each with its reason. */

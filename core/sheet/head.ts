@@ -3,6 +3,7 @@ import { FRAME, LEFT, small, TOP, WIDTH } from './page.ts';
 import type { TextStyle } from './pen.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { atMostLines, oneLine, plainRun, setLines, wrap } from './textBlock.ts';
+import { drawEmpty } from './titleBlock.ts';
 
 /** Sizes in which the mark is tried, the largest first; the last two in the narrow family. */
 const marks: readonly TextStyle[] = [
@@ -67,9 +68,15 @@ const drawJob = ({ pen, input }: Context, left: number, width: number): void => 
   pen.text(left, TOP + 4.1, say.job, small);
   const style: TextStyle = { size: 10 };
   const lines = atMostLines(pen, wrap(pen, [plainRun(job)], style, width), 2, style, width);
-  setLines(pen, left, TOP + 8, lines, style, 3.7);
-  const labels = `${say.drawing}: ${drawing || say.noneGiven}${number ? `; ${say.number} ${number}` : ''}`;
-  pen.text(left, TOP + (lines.length > 1 ? 14.9 : 12.4), oneLine(pen, labels, small, width), small);
+  if (job) setLines(pen, left, TOP + 8, lines, style, 3.7);
+  else drawEmpty(pen, left, TOP + 5, width);
+  const base = TOP + (lines.length > 1 ? 14.9 : 12.9);
+  const label = pen.text(left, base, `${say.drawing}: `, small);
+  const half = (width - label) / (number ? 2 : 1);
+  if (drawing) pen.text(left + label, base, oneLine(pen, drawing, small, half - 1), small);
+  else drawEmpty(pen, left + label, base - 3, half - 2);
+  if (number)
+    pen.text(left + width, base, oneLine(pen, `${say.number} ${number}`, small, half - 1), { ...small, anchor: 'end' });
 };
 
 const drawStandard = (context: Context, left: number): void => {

@@ -1,3 +1,4 @@
+import { length } from '../drawing/sizes.ts';
 import { fixed, plain, ratio, roundedDown } from '../units/figures.ts';
 import { toSystem, type UnitSystem, unitOf } from '../units/systems.ts';
 
@@ -11,7 +12,7 @@ export interface Numbers {
   marked(text: string): string;
   /** A demand or resistance in the named unit; a dash where there is none. */
   amount(value: number | null, unit: string): string;
-  /** mm, as the file states lengths. */
+  /** mm, as the drawing states lengths: inches in sixteenths where they are. */
   mm(value: number): string;
   /** MPa, as the file states stresses. */
   mpa(value: number): string;
@@ -37,7 +38,7 @@ const placesOf = (value: number, unit: string): number => {
 export const numbersOf = (units: UnitSystem, mark: '.' | ','): Numbers => {
   const marked = (text: string): string => (mark === '.' ? text : text.replace(decimal, '$1,$2'));
   const point = (text: string): string => (mark === '.' ? text : text.replace('.', ','));
-  const places = units === 'mm-kN' ? 2 : 4;
+  const places = units === 'mm-kN' ? 2 : 3;
   return {
     units,
     force: unitOf('0,1', units).name,
@@ -46,10 +47,10 @@ export const numbersOf = (units: UnitSystem, mark: '.' | ','): Numbers => {
     marked,
     amount: (value, unit) => {
       if (value === null) return NONE;
-      const length = unit === 'mm' || unit === 'in';
-      return point(length ? plain(value, places) : fixed(value, placesOf(value, unit)));
+      const isLength = unit === 'mm' || unit === 'in';
+      return point(isLength ? plain(value, places) : fixed(value, placesOf(value, unit)));
     },
-    mm: (value) => point(plain(toSystem(value, '1,0', units), places)),
+    mm: (value) => point(length(value, units)),
     mpa: (value) => point(plain(toSystem(value, '-2,1', units), 1)),
     load: (value) => point(plain(value, 2)),
     failsAt: (value) => (value === null || value === undefined ? NONE : point(roundedDown(value))),

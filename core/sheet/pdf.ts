@@ -49,13 +49,13 @@ const charactersOf = (pages: readonly (readonly Mark[])[]): Map<Face, Set<string
 
 /** What the library knows of a font, as far as this file tells it. */
 interface FontData {
-  glyIdsUsed: number[];
   toUnicode: Record<number, number>;
+  readonly subset: { encode: () => Uint8Array };
   readonly Unicode: { widths: [first: number, widths: readonly number[]] };
 }
 
 /**
- * Puts the faces into the document as one font. The pages name its glyphs themselves, so the library is told which there are, how wide, and what
+ * Puts the faces into the document as one font. The pages name its glyphs themselves, so the library is told how wide they are and what
  * they mean; the blank that it sets on the first page makes it keep the font. Returns the font's name on the pages.
  */
 const embed = (doc: jsPDF, cut: CutFaces): string => {
@@ -64,7 +64,8 @@ const embed = (doc: jsPDF, cut: CutFaces): string => {
   doc.setFont(FONT, 'normal').text(' ', 25, 25);
   const font = doc.getFont();
   const data = font.metadata as FontData;
-  data.glyIdsUsed = [0, ...cut.characters.map((_, i) => i + 1)];
+  // The file is cut already: as it is, it goes into the document.
+  data.subset.encode = () => cut.file;
   data.Unicode.widths = [1, cut.widths];
   data.toUnicode = Object.fromEntries(cut.characters.map((one, i) => [i + 1, one.charCodeAt(0)]));
   return String(font.id);

@@ -42,24 +42,21 @@ interface Parts {
   readonly footing: Zone;
   readonly limits: Zone;
   readonly figures: Figures;
+  /** Profiles of the shear stress at standard scales, the largest first, and the same in numbers alone. */
+  readonly profiles: readonly Zone[];
+  readonly stressInNumbers: Zone;
   /** mm between verdict and title block. */
   readonly room: number;
 }
 
-/** The largest profiles that fit a height, at a standard scale; null where even the smallest are too high. */
-const profilesWithin = (context: Context, height: number): Zone | null => {
-  for (const scale of STRESS_SCALES) {
-    const zone = stressProfiles(context, DATA_WIDTH, scale);
-    if (zone.height <= Math.min(height, STRESS_HEIGHT)) return zone;
-  }
-  return null;
-};
-
 /** How the shear stress is shown: profiles, or numbers where these leave no room. */
 type Showing = 'profiles' | 'numbers';
 
-const stressOf = ({ context, given }: Parts, showing: Showing, height: number): Zone | null =>
-  showing === 'numbers' ? stressNumbers(context, DATA_WIDTH) : profilesWithin(context, height - given.height - AIR);
+/** The largest that fits a height; the smallest where none does. */
+const stressWithin = ({ profiles, stressInNumbers }: Parts, showing: Showing, height: number): Zone => {
+  if (showing === 'numbers') return stressInNumbers;
+  return profiles.find((zone) => zone.height <= Math.min(height, STRESS_HEIGHT)) ?? profiles.at(-1)!;
+};
 
 interface Choice {
   readonly figure: Figure;
@@ -73,19 +70,17 @@ const planned = (parts: Parts, { figure, showing, rows, working }: Choice): Plan
   const { context, given, footing, limits, room } = parts;
   const table = tableZone(context, rows);
   const below = table.height + footing.height + (working?.height ?? 0) + limits.height;
-  const least = Math.max(figure.height, given.height + AIR + leastStress(context, showing));
+  const least = leastUpper(parts, figure, showing);
   if (least + below > room || figure.width > FIGURE_WIDTH) return null;
   const upper = least + Math.min(room - below - least, SPARE);
-  const stress = stressOf(parts, showing, upper);
-  if (!stress) return null;
+  const stress = stressWithin(parts, showing, upper - given.height - AIR);
   const later = parts.rows.slice(rows.length);
   return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false };
 };
 
-const leastStress = (context: Context, showing: Showing): number =>
-  showing === 'numbers'
-    ? stressNumbers(context, DATA_WIDTH).height
-    : stressProfiles(context, DATA_WIDTH, STRESS_SCALES.at(-1)!).height;
+/** Height that figure and data need at least. */
+const leastUpper = (parts: Parts, figure: Figure, showing: Showing): number =>
+  Math.max(figure.height, parts.given.height + AIR + stressWithin(parts, showing, 0).height);
 
 /** Every pair of showing and figure, the fullest first. */
 const pairs = ({ figures }: Parts): { showing: Showing; figure: () => Figure }[] =>
@@ -107,7 +102,7 @@ const onOneSheet = (parts: Parts): Plan | null => {
 
 /** The working on the next sheet; where that is not enough, the table goes on there too. */
 const onMore = (parts: Parts): Plan => {
-  const { context, rows, figures, room, footing, limits, given } = parts;
+  const { context, rows, figures, room, footing, limits } = parts;
   const working = workingElsewhere(context, 2);
   for (const { showing, figure } of pairs(parts)) {
     const plan = planned(parts, { showing, figure: figure(), rows, working });
@@ -115,8 +110,7 @@ const onMore = (parts: Parts): Plan => {
   }
   const figure = figures.at(figures.scales.at(-1)!);
   const showing = 'numbers';
-  const upper = Math.max(figure.height, given.height + AIR + leastStress(context, showing));
-  const others = upper + footing.height + limits.height + working.height;
+  const others = leastUpper(parts, figure, showing) + footing.height + limits.height + working.height;
   const first = rows.slice(0, Math.max(1, rowsWithin(rows, room - others)));
   const boundless = { ...parts, room: Number.POSITIVE_INFINITY };
   const plan = planned(boundless, { showing, figure: { ...figure, width: 0 }, rows: first, working });
@@ -132,6 +126,8 @@ export const planOf = (context: Context, bottom: number, code: Code | null): Pla
     given: givenZone(context, DATA_WIDTH),
     footing: footingZone(context),
     limits: limitsZone(context),
+    profiles: STRESS_SCALES.map((scale) => stressProfiles(context, DATA_WIDTH, scale)),
+    stressInNumbers: stressNumbers(context, DATA_WIDTH),
     figures: figuresOf(context, FIGURE_WIDTH, room, code),
     room,
   };

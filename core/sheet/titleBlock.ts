@@ -1,6 +1,6 @@
 import type { Context } from './context.ts';
 import { BLOCK_HEIGHT, FRAME, HAIR, LEFT, NARROW, small, WIDTH } from './page.ts';
-import type { TextStyle } from './pen.ts';
+import type { Pen, TextStyle } from './pen.ts';
 import { type Code, drawCode } from './qr.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { oneLine } from './textBlock.ts';
@@ -69,18 +69,28 @@ const drawRevision = ({ pen, input }: Context, left: number, top: number, { shee
   const { revision = '', reason = '', date = '' } = input.end.sheet ?? {};
   const { version, fingerprint } = input.report;
   const right = LEFT + WIDTH;
-  const program = `${say.programName} ${version}`;
+  const room = right - 98 - left;
   const fields: (readonly [x: number, width: number, label: string, value: string])[] = [
-    [left, revision ? 15 : 46, say.revision, revision || say.unchecked],
-    [left + (revision ? 17 : 49), revision ? 44 : 12, say.reason, reason],
-    [right - 96, 19, say.dateOfIssue, date],
+    ...(revision
+      ? ([
+          [left, 16, say.revision, revision],
+          [left + 18, room - 18, say.reason, reason],
+        ] as const)
+      : ([[left, room, say.revision, say.unchecked]] as const)),
+    [right - 96, 18, say.dateOfIssue, date],
     [right - 76, 36, say.fingerprint, fingerprintText(fingerprint)],
-    [right - 36, 24, say.program, program],
+    [right - 36, 24, say.program, `${say.programName} ${version}`],
     [right - 11, 11, say.sheet, `${sheet} ${say.of} ${of}`],
   ];
   const bold: TextStyle = { size: 9, bold: true };
   for (const [x, width, label, value] of fields) {
     pen.text(x, top + 2.5, label, small);
-    pen.text(x, top + 6.2, oneLine(pen, value, bold, width), bold);
+    if (value) pen.text(x, top + 6.2, oneLine(pen, value, bold, width), bold);
+    else drawEmpty(pen, x, top + 3.1, width);
   }
+};
+
+/** A box to write in. */
+export const drawEmpty = (pen: Pen, x: number, y: number, width: number): void => {
+  pen.box(x, y, width, 4, { width: HAIR });
 };

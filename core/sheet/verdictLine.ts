@@ -1,5 +1,6 @@
 import type { Check } from '../check/report.ts';
 import type { Context } from './context.ts';
+import { limitText } from './fitLimit.ts';
 import { FIGURE_TOP, LEFT, NARROW, VERDICT_TOP, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
@@ -36,8 +37,9 @@ const sentence = (context: Context): string => {
   if (!governing) return '';
   const title = titleOf(governing);
   if (governing.state === 'fails' && governing.id.startsWith('fit-')) {
-    const size = (value: number | null): string => `${numbers.amount(value, governing.unit)} ${governing.unit}`;
-    return say.failsByRule(title, size(governing.resistance), size(governing.demand));
+    const { unit } = governing;
+    const given = `${numbers.amount(governing.resistance, unit)} ${unit}`;
+    return say.failsByRule(title, given, `${limitText(numbers, governing)} ${unit}`);
   }
   const at = governing.reactionAtFailure;
   if (at === undefined || at === null) return say.governsWithoutReaction(title);

@@ -17,11 +17,17 @@ const namesWritten = (text: string): number => {
   return count;
 };
 
-/** No length, force or strength of a beam end comes near this in any unit; past it, products overflow. */
+/** No length, force or strength of a beam end comes near these in any unit; past them, products overflow or vanish. Zero is a number. */
 const LARGEST = 1e12;
+const LEAST = 1e-9;
 
 const isRefused = (name: string): boolean => name === '__proto__';
-const isTooLarge = (value: number): boolean => Math.abs(value) > LARGEST;
+
+const sizeFault = (value: number, path: string, given: unknown): Fault | undefined => {
+  const size = Math.abs(value);
+  if (size > LARGEST) return fault('too-big', path, given, { most: LARGEST });
+  return size > 0 && size < LEAST ? fault('too-small', path, given, { least: LEAST }) : undefined;
+};
 
 /**
  * Names that the parsed value holds; a name given twice is held once. Undefined where it holds something that no end may. Not recursive:
@@ -32,7 +38,7 @@ const namesHeld = (value: unknown): number | undefined => {
   const open: unknown[] = [value];
   while (open.length > 0) {
     const one = open.pop();
-    if (typeof one === 'number' && isTooLarge(one)) return undefined;
+    if (typeof one === 'number' && sizeFault(one, '', null)) return undefined;
     if (typeof one !== 'object' || one === null) continue;
     if (Object.hasOwn(one, '__proto__')) return undefined;
     const held = Object.values(one);
@@ -82,7 +88,7 @@ class Refusal {
       if (level?.names) level.naming = true;
     } else if (token.startsWith('"')) {
       return level?.names && level.naming ? this.name(level.names, level, JSON.parse(token)) : undefined;
-    } else if (isTooLarge(Number(token))) return fault('too-big', this.path, token.slice(0, 20), { most: LARGEST });
+    } else return sizeFault(Number(token), this.path, token.slice(0, 20));
     return undefined;
   }
 

@@ -26,7 +26,8 @@ export const serveCommand = async ({ values }: Asked): Promise<number> => {
     const { server, url } = await serve({ host, port, ...(built && { web }) });
     await print(`Copewright: ${url}\n`);
     if (!built) await print('The API alone: the bench is not built; npm start builds it.\n');
-    if (host !== LOOPBACK && host !== 'localhost') await print('Open to every machine that reaches this address.\n');
+    if (![LOOPBACK, 'localhost', '::1'].includes(host))
+      await print('Open to every machine that reaches this address.\n');
     const stop = (): void => {
       server.close();
       if ('closeAllConnections' in server) server.closeAllConnections();

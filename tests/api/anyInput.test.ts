@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { problemSchema, reportSchema } from '../../api/http/schemas.ts';
 import { anyEnd, anyNumbers, fullEnd } from './anyEnd.ts';
-import { post } from './ask.ts';
+import { post, postJson } from './ask.ts';
 
 /** An answer is a report whose every number is one, or a problem that says why there is none. */
 const answers = async (body: BodyInit): Promise<number> => {
@@ -86,4 +86,20 @@ describe('whatever is sent to be checked', () => {
       }
     }
   });
+});
+
+test('whatever end is sent for a sheet is answered by one exactly when its check is answered by a report', async () => {
+  const seen = new Set<number>();
+  await fc.assert(
+    fc.asyncProperty(fc.oneof(anyEnd, anyNumbers), fc.constantFrom('', '?workings=all'), async (end, query) => {
+      const [sheet, check] = [await postJson(`/v1/sheet${query}`, end), await postJson('/v1/check', end)];
+      expect(sheet.status).toBe(check.status);
+      expect(sheet.headers.get('content-type')).toBe(
+        sheet.status === 200 ? 'application/pdf' : 'application/problem+json',
+      );
+      seen.add(sheet.status);
+    }),
+    { numRuns: 150 },
+  );
+  expect([...seen].sort()).toEqual([200, 422]);
 });

@@ -14,7 +14,8 @@ describe('JSON text', () => {
       fc.property(fc.json(), (text) => {
         const wanted: unknown = JSON.parse(text);
         const found = read(text);
-        if (!text.includes('__proto__') && !/(?<![.\d])\d{13}|e\+/.test(text)) expect(found).toEqual({ value: wanted });
+        if (!text.includes('__proto__') && !/(?<![.\d])\d{13}|e[+-]|0\.0{8}/.test(text))
+          expect(found).toEqual({ value: wanted });
       }),
       { numRuns: 1000 },
     );
@@ -46,7 +47,8 @@ describe('JSON text', () => {
   test('with a number past all bounds is refused at that number', () => {
     expect(faultOf('{"joint":{"bolts":{"pitch":1e13}}}')).toEqual({ code: 'too-big', path: 'joint.bolts.pitch' });
     expect(faultOf('{"reaction":-1e999}')).toEqual({ code: 'too-big', path: 'reaction' });
-    expect(faultOf('{"mark":"1e999","reaction":1e12}')).toBe('read');
+    expect(faultOf('{"setback":1e-320}')).toEqual({ code: 'too-small', path: 'setback' });
+    expect(faultOf('{"mark":"1e999","reaction":1e12,"setback":0,"tie":-0.0,"quantity":1e-9}')).toBe('read');
     expect(faultOf('1e13')).toEqual({ code: 'too-big', path: '' });
   });
 

@@ -1,0 +1,81 @@
+import { spawn } from 'node:child_process';
+import { once } from 'node:events';
+import { fileURLToPath } from 'node:url';
+import { exampleEnd } from '../../api/exampleEnd.ts';
+import { type Load, load, type Request } from './load.ts';
+import type { Figure } from './timing.ts';
+
+const CONNECTIONS = 32;
+const ROUNDS = 7;
+const WARM_UP = 3;
+/** Of one contestant in one round, ms. */
+const TURN = 220;
+
+const middle = (values: readonly number[]): number => [...values].sort((a, b) => a - b)[values.length >> 1]!;
+
+/** The servers in a process of their own, so that only the connections are shared. */
+const servers = async () => {
+  const args = ['--import', 'tsx', fileURLToPath(new URL('apiServers.ts', import.meta.url))];
+  const child = spawn(process.execPath, args, { stdio: ['ignore', 'pipe', 'inherit'] });
+  const [line] = await once(child.stdout, 'data');
+  const [api = 0, echo = 0] = String(line).trim().split(' ').map(Number);
+  return { api, echo, stop: () => child.kill() };
+};
+
+/** Contestants one after the other, round by round. */
+const interleaved = async (requests: readonly Request[]): Promise<Load[][]> => {
+  const loads = requests.map(() => [] as Load[]);
+  for (let round = -WARM_UP; round < ROUNDS; round += 1) {
+    for (const [at, request] of requests.entries()) {
+      const one = await load(request, CONNECTIONS, TURN);
+      if (round >= 0) loads[at]!.push(one);
+    }
+  }
+  return loads;
+};
+
+/**
+ * Requests a second that the API answers over 32 connections, as a share of what a bare Hono echo of the same JSON answers in the same
+ * run.
+ */
+export const apiBench = async (): Promise<Figure[]> => {
+  const { api, echo, stop } = await servers();
+  try {
+    const body = JSON.stringify(exampleEnd);
+    const [bare = [], plain = [], worked = []] = await interleaved([
+      { port: echo, path: '/', body },
+      { port: api, path: '/v1/check', body },
+      { port: api, path: '/v1/check?working=1', body },
+    ]);
+    const rate = (loads: readonly Load[]): number => middle(loads.map(({ perSecond }) => perSecond));
+    const share = (loads: readonly Load[]): number =>
+      middle(loads.map(({ perSecond }, at) => perSecond / bare[at]!.perSecond));
+    const shape = { unit: '', more: true } as const;
+    const told = (loads: readonly Load[]): string => `${rate(loads).toFixed(0)}/s, ${loads[0]?.bytes} bytes`;
+    return [
+      {
+        name: `API: a check (${told(plain)}) / bare echo (${told(bare)})`,
+        value: share(plain),
+        target: 0.8,
+        ceiling: 0.27,
+        ...shape,
+      },
+      {
+        name: `API: a check with working (${told(worked)}) / bare echo`,
+        value: share(worked),
+        target: 0.2,
+        ceiling: 0.07,
+        ...shape,
+      },
+      {
+        name: 'API: the slowest of a hundred checks',
+        value: middle(plain.map(({ p99 }) => p99)),
+        unit: 'ms',
+        target: 10,
+        ceiling: 30,
+      },
+    ];
+  } finally {
+    stop();
+  }
+};

@@ -1,10 +1,14 @@
+import { effect } from '@preact/signals';
 import { render } from 'preact';
+import { watchPointer } from './field/afterPointer.ts';
 import { Bench } from './shell/Bench.tsx';
 import { listenForKeys } from './shell/keys.ts';
 import { goOffline } from './shell/offline.ts';
-import { begin } from './state/bench.ts';
+import { entry } from './state/bench.ts';
 import { take } from './state/carry.ts';
 import { demoEntry } from './state/demo.ts';
+import { begin } from './state/edits.ts';
+import { textOf } from './state/entry.ts';
 import { readKept, startKeeping } from './state/keep.ts';
 import { isLink, openedLink } from './state/opened.ts';
 import { watchTabs } from './state/tabs.ts';
@@ -19,8 +23,12 @@ const openLink = async (): Promise<void> => {
 
 begin(readKept() ?? demoEntry());
 startKeeping();
+effect(() => {
+  document.title = `${textOf(entry.value, 'mark') || 'Bench'} – Copewright`;
+});
 watchTabs();
 listenForKeys();
+watchPointer();
 render(<Bench />, document.getElementById('bench')!);
 addEventListener('hashchange', () => void openLink());
 void openLink();

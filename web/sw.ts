@@ -21,8 +21,9 @@ const forgetOthers = async (): Promise<void> => {
   await Promise.all(names.filter((name) => name.startsWith(NAME) && name !== STORE).map((name) => caches.delete(name)));
 };
 
+/** The page that brought this version in is served by it at once, so that what it loads later is there without a network too. */
 self.addEventListener('activate', (event) => {
-  event.waitUntil(forgetOthers());
+  event.waitUntil(forgetOthers().then(() => self.clients.claim()));
 });
 
 /** A page as this version has it: it and the files it names belong together. */

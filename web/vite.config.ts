@@ -1,4 +1,5 @@
 import { createHash } from 'node:crypto';
+import { readFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import preact from '@preact/preset-vite';
 import { defineConfig, type Plugin } from 'vite';
@@ -27,6 +28,24 @@ const policy = (): Plugin => ({
   ],
 });
 
+/** Parts of packages that the bench never calls: schemas as JSON, messages of faults, pictures of web pages in a PDF. */
+const UNUSED = /zod\/v4\/core\/(json-schema-processors|to-json-schema)\.js$|zod\/v4\/locales\/en\.js$/;
+const UNUSED_PACKAGES = ['html2canvas', 'canvg', 'dompurify'];
+
+/** Leaves those parts out of the build: their names stay, with nothing behind them. */
+const lean = (): Plugin => ({
+  name: 'lean',
+  apply: 'build',
+  enforce: 'pre',
+  resolveId: (id) => (UNUSED_PACKAGES.includes(id) ? `\0unused:${id}` : null),
+  load(id) {
+    if (id.startsWith('\0unused:')) return 'export default undefined;';
+    if (!UNUSED.test(id)) return null;
+    const names = [...readFileSync(id, 'utf8').matchAll(/^export (?:const|function) (\w+)/gm)].map(([, name]) => name);
+    return `${names.map((name) => `export const ${name} = undefined;`).join('\n')}\nexport default () => ({});\n`;
+  },
+});
+
 /** Tells the service worker which files the build has, and names the version by what is in them. */
 const stored = (): Plugin => ({
   name: 'stored',
@@ -48,7 +67,7 @@ const stored = (): Plugin => ({
 export default defineConfig({
   root: here('.'),
   base: './',
-  plugins: [preact(), policy(), stored()],
+  plugins: [lean(), preact(), policy(), stored()],
   build: {
     outDir: here('../dist/web'),
     emptyOutDir: true,

@@ -1,6 +1,10 @@
 import type { TargetedEvent, TargetedKeyboardEvent } from 'preact';
-import { editing, faultAt, focused, isAssumed, leave, revert, shown, step, unitAt, write } from '../state/bench.ts';
+import { useLayoutEffect, useRef } from 'preact/hooks';
+import { editing, focused } from '../state/bench.ts';
+import { leave, revert, step, write } from '../state/edits.ts';
 import { fieldAt } from '../state/fields.ts';
+import { faultAt, isAssumed, shown, unitAt } from '../state/fieldText.ts';
+import { afterPointer } from './afterPointer.ts';
 import { FieldNotes } from './FieldNotes.tsx';
 import { Stepper } from './Stepper.tsx';
 import { walk } from './walk.ts';
@@ -15,6 +19,8 @@ export interface FieldProps {
   readonly width?: number;
   /** `box`: label, box, unit and steppers in a row. `drawn`: the number alone, on the drawing. */
   readonly variant?: 'box' | 'drawn';
+  /** What an empty field means, said under it. */
+  readonly empty?: string;
 }
 
 type InputKey = TargetedKeyboardEvent<HTMLInputElement>;
@@ -32,14 +38,20 @@ const onKey = (path: string, event: InputKey): void => {
 };
 
 /** One input bound to a path of the end. Arrows step, Enter goes to the next field, Escape takes the typing back. */
-export const Field = ({ path, label, unit = unitAt(path), width, variant = 'box' }: FieldProps) => {
+export const Field = ({ path, label, unit = unitAt(path), width, variant = 'box', empty = '' }: FieldProps) => {
   const id = `${variant}-${path}`;
   const { kind } = fieldAt(path);
   const fault = faultAt(path);
   const text = shown(path);
+  const input = useRef<HTMLInputElement>(null);
+  // A value that changes under the cursor, by a step or a proposal, is typed over as a whole.
+  useLayoutEffect(() => {
+    if (editing.value !== path && document.activeElement === input.current) input.current?.select();
+  }, [text]);
   const digits = width ?? (variant === 'drawn' ? Math.max(2, text.length) : undefined);
   const field = (
     <input
+      ref={input}
       id={id}
       class={`input${isAssumed(path) ? ' assumed' : ''}`}
       type="text"
@@ -62,7 +74,7 @@ export const Field = ({ path, label, unit = unitAt(path), width, variant = 'box'
       }}
       onBlur={() => {
         if (focused.value === path) focused.value = null;
-        leave(path);
+        afterPointer(() => leave(path));
       }}
       onKeyDown={(event: InputKey) => onKey(path, event)}
     />
@@ -81,7 +93,7 @@ export const Field = ({ path, label, unit = unitAt(path), width, variant = 'box'
       {field}
       {kind !== 'words' && <span class="unit">{unit}</span>}
       {kind !== 'words' && <Stepper path={path} label={label} />}
-      <FieldNotes path={path} id={`${id}-notes`} />
+      <FieldNotes path={path} id={`${id}-notes`} empty={empty} />
     </div>
   );
 };

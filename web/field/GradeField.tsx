@@ -1,6 +1,8 @@
 import type { TargetedEvent, TargetedKeyboardEvent } from 'preact';
-import { choose, entry, faultAt, isAssumed } from '../state/bench.ts';
+import { entry } from '../state/bench.ts';
+import { choose } from '../state/edits.ts';
 import { textOf } from '../state/entry.ts';
+import { faultAt, isAssumed } from '../state/fieldText.ts';
 import { Field } from './Field.tsx';
 import { FieldNotes } from './FieldNotes.tsx';
 import { walk } from './walk.ts';

@@ -1,6 +1,9 @@
 import { useSignal } from '@preact/signals';
 import type { TargetedEvent, TargetedKeyboardEvent } from 'preact';
-import { editing, faultAt, focused, isAssumed, leave, revert, shown, write } from '../state/bench.ts';
+import { editing, focused } from '../state/bench.ts';
+import { leave, revert, write } from '../state/edits.ts';
+import { faultAt, isAssumed, shown } from '../state/fieldText.ts';
+import { afterPointer } from './afterPointer.ts';
 import { FieldNotes } from './FieldNotes.tsx';
 import { suggestSections } from './suggest.ts';
 import { walk } from './walk.ts';
@@ -72,7 +75,7 @@ export const SectionField = ({ path, label }: SectionFieldProps) => {
         onBlur={() => {
           if (focused.value === path) focused.value = null;
           open.value = false;
-          leave(path);
+          afterPointer(() => leave(path));
         }}
         onKeyDown={onKey}
       />

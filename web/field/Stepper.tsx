@@ -1,4 +1,4 @@
-import { step } from '../state/bench.ts';
+import { step } from '../state/edits.ts';
 
 interface StepperProps {
   readonly path: string;

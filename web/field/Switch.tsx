@@ -1,5 +1,6 @@
 import type { TargetedEvent, TargetedKeyboardEvent } from 'preact';
-import { choose, entry, focused } from '../state/bench.ts';
+import { entry, focused } from '../state/bench.ts';
+import { choose } from '../state/edits.ts';
 import { textOf } from '../state/entry.ts';
 import { walk } from './walk.ts';
 

@@ -1,8 +1,9 @@
 import { fieldName, filled } from '../../core/words/words.ts';
-import { entry, lastGood, shown, standard, words } from '../state/bench.ts';
+import { entry, lastGood, standard, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { shown } from '../state/fieldText.ts';
+import { lineOf } from '../state/tradeOrder.ts';
 import { FieldLink } from './FieldLink.tsx';
-import { lineOf } from './goTo.ts';
 import { optionName, optionValue } from './optionWords.ts';
 
 interface Said {

@@ -64,7 +64,7 @@ export const BeamLine = () => (
       path="beam.section.by"
       label="Sizes"
       options={[{ value: 'sizes', label: 'own sizes' }]}
-      empty="of a listed section"
+      empty="listed section"
     />
     {textOf(entry.value, 'beam.section.by') === 'sizes' ? (
       <OwnSizes />

@@ -11,8 +11,8 @@ import { OrderLine } from './OrderLine.tsx';
 import { Value } from './Value.tsx';
 
 const threads = [
-  { value: 'in', label: 'in the plane' },
-  { value: 'out', label: 'out of the plane' },
+  { value: 'in', label: 'in plane' },
+  { value: 'out', label: 'out of plane' },
 ];
 
 const made = [
@@ -84,7 +84,7 @@ export const BoltsLine = () => {
       />
       <Field path="joint.bolts.rows" label="Rows" />
       {several('joint.bolts.rows') && <Field path="joint.bolts.pitch" label="Pitch" />}
-      <Field path="joint.bolts.columns" label="Columns" />
+      <Field path="joint.bolts.columns" label="Columns" empty="one, assumed" />
       {several('joint.bolts.columns') && <Field path="joint.bolts.gauge" label="Gauge" />}
       <Field path="joint.firstRow" label="First row" />
       <Field path="joint.endDistance" label="End distance" />
@@ -94,8 +94,8 @@ export const BoltsLine = () => {
         options={made}
         empty={standard.value ? `${standard.value.materials.holesAssumed} (assumed)` : 'assumed'}
       />
-      <Field path="joint.bolts.hole" label={hole === '' ? 'Own hole' : `Own hole, not ${hole}`} />
-      <Choice path="joint.bolts.threads" label="Threads" options={threads} empty="in the plane (assumed)" />
+      <Field path="joint.bolts.hole" label="Hole size" empty={hole && `${hole} by the standard`} />
+      <Choice path="joint.bolts.threads" label="Threads" options={threads} empty="in plane (assumed)" />
     </OrderLine>
   );
 };

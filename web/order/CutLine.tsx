@@ -39,7 +39,7 @@ const Fields = ({ edge }: { readonly edge: Edge }) => {
           <legend class="unseen">{title}</legend>
           <Field path={`${edge}.length`} label="Length" />
           <Field path={`${edge}.depth`} label="Depth" />
-          <Field path={`${edge}.radius`} label="Corner R" />
+          <Field path={`${edge}.radius`} label="Corner R" empty="sharp, assumed" />
         </fieldset>
       )}
     </>

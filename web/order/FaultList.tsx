@@ -1,15 +1,15 @@
-import { useSignalEffect } from '@preact/signals';
-import { useRef } from 'preact/hooks';
+import { useLayoutEffect, useRef } from 'preact/hooks';
 import { demanded, faults } from '../state/bench.ts';
+import { lineOf } from '../state/tradeOrder.ts';
 import { FieldLink } from './FieldLink.tsx';
-import { lineOf } from './goTo.ts';
 
 /** Every fault of the end, in the words that stand beside its field too, once they were asked for; it takes focus then. */
 export const FaultList = () => {
   const list = useRef<HTMLElement>(null);
-  useSignalEffect(() => {
-    if (demanded.value) requestAnimationFrame(() => list.current?.focus());
-  });
+  const asked = demanded.value;
+  useLayoutEffect(() => {
+    if (asked) list.current?.focus();
+  }, [asked]);
   if (faults.value.length === 0 || (!demanded.value && faults.value.every(({ path }) => lineOf(path)))) return null;
   return (
     <section ref={list} class="fault-list" tabIndex={-1} aria-labelledby="fault-title">

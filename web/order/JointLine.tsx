@@ -1,10 +1,13 @@
+import { showQuantity } from '../../core/units/printQuantity.ts';
+import { toSystem } from '../../core/units/systems.ts';
 import { Choice } from '../field/Choice.tsx';
 import { Field } from '../field/Field.tsx';
 import { GradeField } from '../field/GradeField.tsx';
 import { SectionField } from '../field/SectionField.tsx';
 import { Switch } from '../field/Switch.tsx';
-import { entry, shown, standard, unitAt } from '../state/bench.ts';
+import { entry, standard, units } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { shown, unitAt } from '../state/fieldText.ts';
 import { isFault, readField } from '../state/readField.ts';
 import { GradeValue, steelStrengths } from './BeamLine.tsx';
 import { OrderLine } from './OrderLine.tsx';
@@ -81,12 +84,19 @@ const Sentence = () => {
   );
 };
 
+/** The weld metal that is taken where none is given. */
+const weldMetal = (): string => {
+  const strength = standard.value?.materials.electrode;
+  if (!strength) return '';
+  return `${showQuantity(toSystem(strength, '-2,1', units.value), '-2,1', units.value)} assumed`;
+};
+
 const SupportFields = () => (
   <fieldset class="part">
     <legend class="unseen">Support</legend>
     <Choice path="support.kind" label="Face" options={supports} />
     <SectionField path="support.section" label="Section" />
-    <Field path="support.topOfSteel" label="Top above" />
+    <Field path="support.topOfSteel" label="Top above" empty="level, assumed" />
   </fieldset>
 );
 
@@ -107,7 +117,7 @@ export const JointLine = () => {
       <Field path={`${ply}.bottomEdge`} label="Bottom edge" />
       <Field path={`${ply}.edge`} label="Free edge" />
       {!isPly() && <Field path="joint.weld.leg" label="Weld leg" />}
-      {!isPly() && <Field path="joint.weld.electrode" label="Weld metal" />}
+      {!isPly() && <Field path="joint.weld.electrode" label="Weld metal" empty={weldMetal()} />}
       <Switch path="support" label="Carried by a beam" off="" />
       {textOf(entry.value, 'support') === 'on' && <SupportFields />}
     </OrderLine>

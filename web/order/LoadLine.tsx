@@ -1,7 +1,8 @@
 import { Choice } from '../field/Choice.tsx';
 import { Field } from '../field/Field.tsx';
-import { entry, standard, unitAt } from '../state/bench.ts';
+import { entry, standard } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { unitAt } from '../state/fieldText.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { Value } from './Value.tsx';
 
@@ -50,6 +51,6 @@ export const LoadLine = () => (
       options={levels}
       empty={standard.value ? `${standard.value.level} (assumed)` : 'assumed'}
     />
-    <Field path="tie" label="Tie force" />
+    <Field path="tie" label="Tie force" empty="none, assumed" />
   </OrderLine>
 );

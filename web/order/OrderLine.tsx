@@ -1,9 +1,10 @@
-import { useSignalEffect } from '@preact/signals';
 import type { ComponentChildren } from 'preact';
-import { useEffect, useRef } from 'preact/hooks';
+import { useEffect, useLayoutEffect, useRef } from 'preact/hooks';
 import { enter, WALK_END, type WalkEnd } from '../field/walk.ts';
-import { faultAt, faults } from '../state/bench.ts';
-import { goOn, type LineName, lineOf, openLine, takeWanted, wants } from './goTo.ts';
+import { faults } from '../state/bench.ts';
+import { faultAt } from '../state/fieldText.ts';
+import { type LineName, lineOf } from '../state/tradeOrder.ts';
+import { goOn, openLine, takeWanted, wants } from './goTo.ts';
 
 interface OrderLineProps {
   readonly name: LineName;
@@ -12,6 +13,8 @@ interface OrderLineProps {
   readonly sentence: ComponentChildren;
   /** Its fields, shown while it is open. */
   readonly children: ComponentChildren;
+  /** Names of fields stand over them, where they are long. */
+  readonly stacked?: boolean;
 }
 
 const focusWanted = (line: HTMLElement): void => {
@@ -39,14 +42,13 @@ const ClosedFaults = ({ name }: { readonly name: LineName }) => (
 );
 
 /** One line of the order: a sentence that opens in place to its fields. Enter in its last field opens the next line. */
-export const OrderLine = ({ name, title, sentence, children }: OrderLineProps) => {
+export const OrderLine = ({ name, title, sentence, children, stacked = false }: OrderLineProps) => {
   const line = useRef<HTMLFieldSetElement>(null);
   const open = openLine.value === name;
-  useSignalEffect(() => {
-    // Read for its change alone: the open line may be wanted again.
-    void wants.value;
-    if (openLine.value === name) requestAnimationFrame(() => line.current && focusWanted(line.current));
-  });
+  const wanted = wants.value;
+  useLayoutEffect(() => {
+    if (open && line.current) focusWanted(line.current);
+  }, [open, wanted]);
   useEffect(() => {
     const fields = line.current;
     const onEnd = (event: Event) => goOn(name, (event as CustomEvent<WalkEnd>).detail.back);
@@ -74,7 +76,7 @@ export const OrderLine = ({ name, title, sentence, children }: OrderLineProps) =
           </button>
         </legend>
         <p class="sentence">{sentence}</p>
-        {open ? <div class="order-fields">{children}</div> : <ClosedFaults name={name} />}
+        {open ? <div class={`order-fields${stacked ? ' stacked' : ''}`}>{children}</div> : <ClosedFaults name={name} />}
       </fieldset>
     </li>
   );

@@ -39,7 +39,7 @@ const Sentence = () => {
 
 /** What the sheet says beside the numbers; an empty field is an empty box to write in. */
 export const SheetLine = () => (
-  <OrderLine name="sheet" title="Sheet" sentence={<Sentence />}>
+  <OrderLine name="sheet" title="Sheet" stacked sentence={<Sentence />}>
     <Field path="mark" label="End mark" />
     <Field path="sheet.job" label="Job" />
     <Field path="sheet.drawing" label="Drawing" />

@@ -33,7 +33,7 @@ const Sentence = () => {
 
 /** The design standard and its options. */
 export const StandardLine = () => (
-  <OrderLine name="standard" title="Standard" sentence={<Sentence />}>
+  <OrderLine name="standard" title="Standard" stacked sentence={<Sentence />}>
     <Choice path="standard" label="Standard" options={titled} />
     {Object.entries(standard.value?.options ?? {}).map(([key, values]) => (
       <Choice

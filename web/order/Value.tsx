@@ -1,7 +1,9 @@
-import { entry, isAssumed, shown } from '../state/bench.ts';
+import { entry } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { isAssumed, shown } from '../state/fieldText.ts';
+import { lineOf } from '../state/tradeOrder.ts';
 import { FieldLink } from './FieldLink.tsx';
-import { lineOf, openLine } from './goTo.ts';
+import { openLine } from './goTo.ts';
 
 interface ValueProps {
   readonly path: string;

@@ -1,8 +1,5 @@
 import { signal } from '@preact/signals';
-
-/** The lines of the order. */
-export const lineNames = ['beam', 'cut', 'bolts', 'joint', 'load', 'standard', 'sheet'] as const;
-export type LineName = (typeof lineNames)[number];
+import { type LineName, lineNames, lineOf } from '../state/tradeOrder.ts';
 
 /** The line that is open. */
 export const openLine = signal<LineName | null>(null);
@@ -18,32 +15,6 @@ export const takeWanted = (): typeof wanted => {
 
 /** Tells an open line that a field of it is wanted. */
 export const wants = signal(0);
-
-const lines: readonly (readonly [prefix: string, line: LineName])[] = [
-  ['beam', 'beam'],
-  ['top', 'cut'],
-  ['bottom', 'cut'],
-  ['setback', 'cut'],
-  ['joint.firstRow', 'bolts'],
-  ['joint.endDistance', 'bolts'],
-  ['joint.bolts', 'bolts'],
-  ['joint', 'joint'],
-  ['support', 'joint'],
-  ['reaction', 'load'],
-  ['level', 'load'],
-  ['tie', 'load'],
-  ['standard', 'standard'],
-  ['options', 'standard'],
-  ['mark', 'sheet'],
-  ['piece', 'sheet'],
-  ['end', 'sheet'],
-  ['quantity', 'sheet'],
-  ['sheet', 'sheet'],
-];
-
-/** The line in which a field stands; undefined for what is no field of the bench. */
-export const lineOf = (path: string): LineName | undefined =>
-  lines.find(([prefix]) => path === prefix || path.startsWith(`${prefix}.`))?.[1];
 
 const open = (line: LineName, focus: NonNullable<typeof wanted>): void => {
   wanted = focus;

@@ -1,14 +1,15 @@
 import { Footing, Ladder, VerdictStrip } from '../ladder/index.ts';
 import { Order } from '../order/Order.tsx';
-import { Piece } from '../piece/index.ts';
 import { Announcer } from './Announcer.tsx';
 import { DropPlace } from './DropPlace.tsx';
-import { FieldFinder } from './FieldFinder.tsx';
 import { Foot } from './Foot.tsx';
 import { Head } from './Head.tsx';
-import { Keys } from './Keys.tsx';
+import { Later } from './Later.tsx';
 import { Notices } from './Notices.tsx';
 import { TopBand } from './TopBand.tsx';
+
+const middle = async () => (await import('./Middle.tsx')).Middle;
+const dialogs = async () => (await import('./Dialogs.tsx')).Dialogs;
 
 /** The bench: order, piece and ladder under one head. */
 export const Bench = () => (
@@ -17,23 +18,24 @@ export const Bench = () => (
       To the order
     </a>
     <TopBand />
-    <Head />
-    <Notices />
-    <main class="bench">
-      <Order />
-      <div class="bench-middle">
-        <Piece />
-      </div>
-      <div class="bench-right">
-        <Ladder />
-        <Footing />
+    <main>
+      <Head />
+      <Notices />
+      <div class="bench">
+        <Order />
+        <div class="bench-middle">
+          <Later load={middle} />
+        </div>
+        <div class="bench-right">
+          <Ladder />
+          <Footing />
+        </div>
       </div>
     </main>
     <Foot />
     <VerdictStrip />
     <Announcer />
-    <FieldFinder />
-    <Keys />
+    <Later load={dialogs} />
     <DropPlace />
   </>
 );

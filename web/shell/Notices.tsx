@@ -1,3 +1,4 @@
+import type { TargetedEvent } from 'preact';
 import { notice } from '../state/notice.ts';
 import { otherTab } from '../state/tabs.ts';
 import { newVersion, takeNewVersion } from './offline.ts';
@@ -6,11 +7,11 @@ const dismiss = (): void => {
   notice.value = null;
 };
 
-const Told = () => {
+const Refused = () => {
   const it = notice.value;
-  if (!it) return null;
+  if (it?.kind !== 'refused') return null;
   return (
-    <div class={`notice ${it.kind}`} role={it.kind === 'refused' ? 'alert' : 'status'}>
+    <div class="notice refused" role="alert">
       <div>
         <p>{it.title}</p>
         {it.lines && it.lines.length > 0 && (
@@ -20,15 +21,6 @@ const Told = () => {
             ))}
           </ul>
         )}
-        {it.copy !== undefined && (
-          <input
-            class="input"
-            readOnly
-            aria-label="Link"
-            value={it.copy}
-            onFocus={(event) => event.currentTarget.select()}
-          />
-        )}
       </div>
       <button type="button" class="button" onClick={dismiss}>
         Close
@@ -37,10 +29,31 @@ const Told = () => {
   );
 };
 
-/** What the bench has to tell beside the end: what was done or refused, another tab, a new version. */
+/** A text that the browser did not copy, to be copied by hand. */
+const ToCopy = () => {
+  const it = notice.value;
+  if (it?.copy === undefined) return null;
+  return (
+    <div class="notice">
+      <input
+        class="input"
+        readOnly
+        aria-label={it.title}
+        value={it.copy}
+        onFocus={(event: TargetedEvent<HTMLInputElement>) => event.currentTarget.select()}
+      />
+      <button type="button" class="button" onClick={dismiss}>
+        Close
+      </button>
+    </div>
+  );
+};
+
+/** What the bench has to tell beside the end: what was refused, another tab, a new version. */
 export const Notices = () => (
   <div class="notices">
-    <Told />
+    <Refused />
+    <ToCopy />
     {otherTab.value && (
       <p class="notice">
         The bench is open in another tab too. Each tab has its own end; what is kept on this device is the one changed

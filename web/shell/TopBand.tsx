@@ -1,7 +1,9 @@
 import type { TargetedEvent } from 'preact';
 import { useRef } from 'preact/hooks';
-import { redo, setUnits, timeline, undo, units } from '../state/bench.ts';
+import { timeline, units } from '../state/bench.ts';
 import { copyLink, openFile, saveFile } from '../state/carry.ts';
+import { redo, setUnits, undo } from '../state/edits.ts';
+import { notice } from '../state/notice.ts';
 import { beginEmpty } from './beginEmpty.ts';
 import { keysShown } from './keys.ts';
 
@@ -93,6 +95,9 @@ export const TopBand = () => (
         Keys
       </button>
     </div>
+    <p class="told" role="status">
+      {notice.value?.kind === 'done' && notice.value.title}
+    </p>
     <UnitsSwitch />
   </header>
 );

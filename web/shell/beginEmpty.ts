@@ -1,5 +1,6 @@
 import { goTo } from '../order/goTo.ts';
-import { entry, replace } from '../state/bench.ts';
+import { entry } from '../state/bench.ts';
+import { replace } from '../state/edits.ts';
 import { emptyEntry, textOf } from '../state/entry.ts';
 import { tell } from '../state/notice.ts';
 

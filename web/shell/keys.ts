@@ -1,7 +1,8 @@
 import { signal } from '@preact/signals';
-import { lineNames, openLine } from '../order/goTo.ts';
-import { redo, undo } from '../state/bench.ts';
+import { openLine } from '../order/goTo.ts';
 import { saveFile } from '../state/carry.ts';
+import { redo, undo } from '../state/edits.ts';
+import { lineNames } from '../state/tradeOrder.ts';
 
 /** The list of keys is open. */
 export const keysShown = signal(false);

@@ -21,9 +21,11 @@ const watch = (registration: ServiceWorkerRegistration): void => {
   registration.addEventListener('updatefound', () => follow(registration.installing));
 };
 
-/** Lets the newer version in and loads it; what stands in the fields was kept by then. */
+/** Lets the newer version in, or loads the page again where another tab let it in; what stands in the fields was kept by then. */
 export const takeNewVersion = (): void => {
-  navigator.serviceWorker.addEventListener('controllerchange', () => location.reload(), { once: true });
+  const { serviceWorker } = navigator;
+  if (!waiting) location.reload();
+  serviceWorker.addEventListener('controllerchange', () => location.reload(), { once: true });
   waiting?.postMessage('take over');
 };
 
@@ -36,6 +38,12 @@ export const goOffline = async (): Promise<void> => {
   addEventListener('online', note);
   addEventListener('offline', note);
   if (!('serviceWorker' in navigator)) return;
+  if (navigator.serviceWorker.controller) {
+    navigator.serviceWorker.addEventListener('controllerchange', () => {
+      waiting = null;
+      newVersion.value = true;
+    });
+  }
   try {
     watch(await navigator.serviceWorker.register('./sw.js'));
   } catch {

@@ -1,5 +1,6 @@
 import type { Examined } from '../../core/check/examine.ts';
-import { demanded, examination, replace } from './bench.ts';
+import { demanded, examination } from './bench.ts';
+import { replace } from './edits.ts';
 import { entryOf } from './entryOf.ts';
 import { fileText } from './fileText.ts';
 import { notice, refuse, tell } from './notice.ts';
@@ -10,10 +11,7 @@ const whole = (wanted: string): Examined | undefined => {
   const found = examination.value;
   if ('examined' in found) return found.examined;
   demanded.value = true;
-  refuse(
-    `${wanted} needs a complete end`,
-    found.faults.map(({ text }) => text),
-  );
+  refuse(`${wanted} needs a complete end: what is missing stands at the top of the order`);
   return undefined;
 };
 

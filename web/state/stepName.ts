@@ -11,5 +11,6 @@ export const stepName = (before: Entry, after: Entry, path: string): string => {
   const fresh = textOf(after, path);
   if (fresh === 'on') return `${name} added`;
   if (old === 'on') return `${name} removed`;
+  if (old === fresh) return `${name}: sizes proposed`;
   return `${name} ${old || 'empty'} → ${fresh || 'empty'}`;
 };

@@ -1,11 +1,15 @@
 import { beforeEach, describe, expect, test } from 'vitest';
 import { INCH } from '../../../core/units/systems.ts';
-import * as bench from '../../../web/state/bench.ts';
+import * as state from '../../../web/state/bench.ts';
 import { demoEntry } from '../../../web/state/demo.ts';
+import * as edits from '../../../web/state/edits.ts';
 import { emptyEntry } from '../../../web/state/entry.ts';
+import * as fieldText from '../../../web/state/fieldText.ts';
 import { entryFrom } from '../../../web/state/keep.ts';
 import { notice } from '../../../web/state/notice.ts';
 import { openedFile, openedLink, openedText } from '../../../web/state/opened.ts';
+
+const bench = { ...state, ...edits, ...fieldText };
 
 beforeEach(() => {
   bench.begin(demoEntry());
@@ -37,6 +41,17 @@ describe('the bench', () => {
     expect(bench.shown('joint.firstRow')).toBe('9O');
     bench.write('joint.firstRow', '90');
     expect(bench.isCurrent.value).toBe(true);
+  });
+
+  test('a name that is not known is said even while another field cannot be read', () => {
+    bench.write('beam.section', 'UB 40');
+    bench.write('setback', 'ten');
+    bench.write('joint.firstRow', '');
+    expect(bench.faults.value.map(({ path, code }) => `${path} ${code}`)).toEqual([
+      'beam.section unknown-section',
+      'setback not-a-quantity',
+      'joint.firstRow missing',
+    ]);
   });
 
   test('an empty field is not complained of until a sheet is asked for', () => {

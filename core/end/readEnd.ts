@@ -1,4 +1,4 @@
-import type * as z from 'zod';
+import type * as z from 'zod/mini';
 import { nearest } from '../steel/nearest.ts';
 import { type Fault, fault } from './fault.ts';
 import { knownKeys } from './knownKeys.ts';

@@ -1,56 +1,61 @@
-import * as z from 'zod';
+import * as z from 'zod/mini';
 
 // Code generation would need eval, which a strict content policy forbids.
 z.config({ jitless: true });
 
-const positive = z.number().positive();
-const atLeastZero = z.number().nonnegative();
-const name = z.string().min(1).max(80);
-const words = z.string().max(200);
+/** A field with what it means, for the API's description. */
+const about = <S extends z.ZodMiniType>(schema: S, description: string): S => {
+  z.globalRegistry.add(schema, { description });
+  return schema;
+};
 
-const grade = z.union([name, z.strictObject({ fy: positive, fu: positive })]).meta({
-  description: 'Name of a steel grade, or its yield and ultimate strength',
-});
+const positive = () => z.number().check(z.positive());
+const atLeastZero = () => z.number().check(z.nonnegative());
+const text = (most: number) => z.string().check(z.maxLength(most));
+const name = () => z.string().check(z.minLength(1), z.maxLength(80));
+const count = (most: number) => z.int().check(z.gte(1), z.lte(most));
 
-const cope = z
-  .strictObject({
-    length: positive.meta({ description: 'Along the beam, from its end' }),
-    depth: positive.meta({ description: 'From the outer face of the flange' }),
-    radius: atLeastZero.optional().meta({ description: 'Of the re-entrant corner; absent = 0' }),
-  })
-  .nullable();
+const grade = about(
+  z.union([name(), z.strictObject({ fy: positive(), fu: positive() })]),
+  'Name of a steel grade, or its yield and ultimate strength',
+);
+
+const cope = z.nullable(
+  z.strictObject({
+    length: about(positive(), 'Along the beam, from its end'),
+    depth: about(positive(), 'From the outer face of the flange'),
+    radius: z.optional(about(atLeastZero(), 'Of the re-entrant corner; absent = 0')),
+  }),
+);
 
 const bolts = z.strictObject({
-  size: name.meta({ description: 'M12 to M36, or inch sizes 1/2 to 1-1/4' }),
-  grade: z.union([name, z.strictObject({ fu: positive })]),
-  threads: z
-    .enum(['in', 'out'])
-    .optional()
-    .meta({ description: 'Threads in or out of the shear plane; absent = in, assumed' }),
-  rows: z.int().min(1).max(30),
-  columns: z.int().min(1).max(6).optional(),
-  pitch: atLeastZero.optional().meta({ description: 'Between rows; needed from two rows up' }),
-  gauge: atLeastZero.optional().meta({ description: 'Between columns; needed from two columns up' }),
-  holes: z.enum(['drilled', 'punched']).optional(),
-  hole: positive.optional().meta({ description: 'Hole diameter, in place of the standard one' }),
+  size: about(name(), 'M12 to M36, or inch sizes 1/2 to 1-1/4'),
+  grade: z.union([name(), z.strictObject({ fu: positive() })]),
+  threads: z.optional(about(z.enum(['in', 'out']), 'Threads in or out of the shear plane; absent = in, assumed')),
+  rows: count(30),
+  columns: z.optional(count(6)),
+  pitch: z.optional(about(atLeastZero(), 'Between rows; needed from two rows up')),
+  gauge: z.optional(about(atLeastZero(), 'Between columns; needed from two columns up')),
+  holes: z.optional(z.enum(['drilled', 'punched'])),
+  hole: z.optional(about(positive(), 'Hole diameter, in place of the standard one')),
 });
 
 const ply = z.strictObject({
-  thickness: positive,
+  thickness: positive(),
   grade,
-  topEdge: positive,
-  bottomEdge: positive,
-  edge: positive.meta({ description: 'From the last bolt column to the free edge' }),
+  topEdge: positive(),
+  bottomEdge: positive(),
+  edge: about(positive(), 'From the last bolt column to the free edge'),
 });
 
 const weld = z.strictObject({
-  leg: positive,
-  electrode: positive.optional().meta({ description: 'Strength of the weld metal' }),
+  leg: positive(),
+  electrode: z.optional(about(positive(), 'Strength of the weld metal')),
 });
 
 const place = {
-  firstRow: positive.meta({ description: 'First bolt row, down from top of steel' }),
-  endDistance: positive.meta({ description: 'First bolt column, from the end of the beam' }),
+  firstRow: about(positive(), 'First bolt row, down from top of steel'),
+  endDistance: about(positive(), 'First bolt column, from the end of the beam'),
   bolts,
 };
 
@@ -60,60 +65,60 @@ const joint = z.discriminatedUnion('kind', [
 ]);
 
 const ownSection = z.strictObject({
-  depth: positive,
-  width: positive,
-  flange: positive,
-  web: positive,
-  radius: atLeastZero,
-  family: z.enum(['I', 'channel']).optional(),
+  depth: positive(),
+  width: positive(),
+  flange: positive(),
+  web: positive(),
+  radius: atLeastZero(),
+  family: z.optional(z.enum(['I', 'channel'])),
 });
 
 const support = z.strictObject({
   kind: z.enum(['beam-web', 'column-flange', 'column-web']),
-  section: name.optional(),
-  thickness: positive.optional(),
-  grade: grade.optional(),
-  topOfSteel: z.number().optional().meta({ description: "Support's top flange above the beam's, positive up" }),
-  otherReaction: atLeastZero.optional(),
+  section: z.optional(name()),
+  thickness: z.optional(positive()),
+  grade: z.optional(grade),
+  topOfSteel: z.optional(about(z.number(), "Support's top flange above the beam's, positive up")),
+  otherReaction: z.optional(atLeastZero()),
 });
 
 const sheet = z.strictObject({
-  job: words.optional(),
-  drawing: words.optional(),
-  number: words.optional(),
-  revision: z.string().max(8).optional(),
-  reason: words.optional(),
-  loadCase: words.optional(),
-  date: z.iso.date().optional(),
-  prepared: words.optional(),
-  checked: words.optional(),
-  approved: words.optional(),
-  paper: z.enum(['A4', 'Letter']).optional(),
-  decimal: z.enum(['.', ',']).optional(),
+  job: z.optional(text(200)),
+  drawing: z.optional(text(200)),
+  number: z.optional(text(200)),
+  revision: z.optional(text(8)),
+  reason: z.optional(text(200)),
+  loadCase: z.optional(text(200)),
+  date: z.optional(z.iso.date()),
+  prepared: z.optional(text(200)),
+  checked: z.optional(text(200)),
+  approved: z.optional(text(200)),
+  paper: z.optional(z.enum(['A4', 'Letter'])),
+  decimal: z.optional(z.enum(['.', ','])),
 });
 
 /** One beam end as written in files, links and requests. Values in the file's own `units`. */
 export const endSchema = z
   .strictObject({
-    mark: z.string().max(40).optional(),
-    standard: name,
+    mark: z.optional(text(40)),
+    standard: name(),
     units: z.enum(['mm-kN', 'in-kip']),
-    reaction: z.union([z.number(), z.strictObject({ ofWebShear: z.number().min(0).max(2) })]),
-    level: z.enum(['factored', 'service']).optional(),
-    tie: atLeastZero.optional(),
-    beam: z.strictObject({ section: z.union([name, ownSection]), grade }),
-    top: cope.optional(),
-    bottom: cope.optional(),
-    setback: atLeastZero,
+    reaction: z.union([z.number(), z.strictObject({ ofWebShear: z.number().check(z.gte(0), z.lte(2)) })]),
+    level: z.optional(z.enum(['factored', 'service'])),
+    tie: z.optional(atLeastZero()),
+    beam: z.strictObject({ section: z.union([name(), ownSection]), grade }),
+    top: z.optional(cope),
+    bottom: z.optional(cope),
+    setback: atLeastZero(),
     joint,
-    support: support.optional(),
-    options: z.record(z.string(), z.string()).optional(),
-    piece: z.string().max(40).optional(),
-    end: z.enum(['start', 'far']).optional(),
-    quantity: z.int().min(1).max(100000).optional(),
-    sheet: sheet.optional(),
+    support: z.optional(support),
+    options: z.optional(z.record(z.string(), z.string())),
+    piece: z.optional(text(40)),
+    end: z.optional(z.enum(['start', 'far'])),
+    quantity: z.optional(count(100_000)),
+    sheet: z.optional(sheet),
   })
-  .meta({ id: 'End', title: 'One beam end' });
+  .register(z.globalRegistry, { id: 'End', title: 'One beam end' });
 
 export type End = z.infer<typeof endSchema>;
 export type Cope = NonNullable<End['top']>;

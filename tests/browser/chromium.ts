@@ -29,7 +29,7 @@ export const launch = async (): Promise<Browser> => {
     const { default: shipped } = await import('@sparticuz/chromium');
     return await chromium.launch({
       executablePath: await shipped.executablePath(),
-      args: shipped.args,
+      args,
       headless: true,
     });
   } catch (cause) {

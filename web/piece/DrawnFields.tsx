@@ -3,7 +3,7 @@ import { fieldName } from '../../core/words/words.ts';
 import { Field } from '../field/Field.tsx';
 import { words } from '../ladder/shown.ts';
 import { focused } from '../state/bench.ts';
-import { inTradeOrder } from './order.ts';
+import { inTradeOrder } from '../state/tradeOrder.ts';
 import type { ToScreen } from './pen.ts';
 
 interface Props {

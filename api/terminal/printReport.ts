@@ -1,5 +1,6 @@
 import { wordsOf } from '../../core/check/examine.ts';
 import type { Check, Report, State } from '../../core/check/report.ts';
+import { limitText } from '../../core/sheet/fitLimit.ts';
 import { type Numbers, numbersOf } from '../../core/sheet/numbers.ts';
 import { sheetWords as say } from '../../core/sheet/sheetWords.ts';
 import { standards } from '../../core/standards/index.ts';
@@ -31,6 +32,14 @@ interface Context {
   readonly words: Words;
 }
 
+/** Demand / resistance, or for a rule of fit what is given / what it must be. */
+const sizesOf = (check: Check, numbers: Numbers): string => {
+  const resistance = numbers.amount(check.resistance, check.unit);
+  return isFit(check)
+    ? `${resistance} / ${limitText(numbers, check)}`
+    : `${numbers.amount(check.demand, check.unit)} / ${resistance}`;
+};
+
 const rowOf = ({ report, numbers, words }: Context, check: Check): Row => {
   const { id, state, unit, clause, basis, utilisation, reactionAtFailure, verified, reasonText } = check;
   const lead = id === report.governing ? say.table.governs : '';
@@ -40,7 +49,7 @@ const rowOf = ({ report, numbers, words }: Context, check: Check): Row => {
     cells: [
       stateWords[state],
       `${lead}${title}${verified === 'none' ? ' *' : ''}`,
-      `${numbers.amount(check.demand, unit)} / ${numbers.amount(check.resistance, unit)}`,
+      sizesOf(check, numbers),
       unit,
       numbers.ratio(utilisation),
       reactionAtFailure === undefined ? '' : numbers.failsAt(reactionAtFailure),
@@ -59,13 +68,13 @@ const head = (title: string, sizes: string, failsAt: string): Row => ({
 const tables = (context: Context): string[][] => {
   const told = context.report.checks.filter(({ state }) => state !== 'notApplicable');
   const rows = (of: (check: Check) => boolean): Row[] => told.filter(of).map((one) => rowOf(context, one));
-  const failsAt = say.table.failsAt(context.numbers.force).replace(' at', '\nat');
+  const failsAt = `fails at\n${context.numbers.force}`;
   const demand = `${say.table.demand} /\n${say.table.resistance}`;
-  const required = `${say.table.required} /\n${say.table.given}`;
+  const given = `${say.table.given} /\n${say.table.limit}`;
   const informs = rows(({ state }) => state === 'information');
   return setColumns(columns, [
     [head(say.table.check, demand, failsAt), ...rows((one) => !isFit(one) && one.state !== 'information')],
-    [head('Footing', required, ''), ...rows(isFit)],
+    [head('Footing', given, ''), ...rows(isFit)],
     informs.length > 0 ? [head('For information', demand, failsAt), ...informs] : [],
   ]);
 };

@@ -1,4 +1,5 @@
 import type { Check, Report } from '../../core/check/report.ts';
+import { limitText } from '../../core/sheet/fitLimit.ts';
 import type { Numbers } from '../../core/sheet/numbers.ts';
 import { sheetWords as say } from '../../core/sheet/sheetWords.ts';
 
@@ -20,8 +21,8 @@ const sentence = (report: Report, governing: Check | undefined, numbers: Numbers
   const { reactionAtFailure: at, unit } = governing;
   const title = titleOf(governing);
   if (governing.id.startsWith('fit-')) {
-    const size = (value: number | null): string => `${numbers.amount(value, unit)} ${unit}`;
-    return say.failsByRule(title, size(governing.resistance), size(governing.demand));
+    const given = `${numbers.amount(governing.resistance, unit)} ${unit}`;
+    return say.failsByRule(title, given, `${limitText(numbers, governing)} ${unit}`);
   }
   if (at === undefined || at === null) return say.governsWithoutReaction(title);
   const says = report.verdict === 'fails' ? say.governsFailing : say.governs;

@@ -1,5 +1,7 @@
 /** The part of JSON Schema 2020-12 in which the API is described. */
 export interface JsonSchema {
+  readonly title?: string;
+  readonly description?: string;
   readonly $ref?: string;
   readonly type?: string | readonly string[];
   readonly enum?: readonly unknown[];

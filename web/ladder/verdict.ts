@@ -37,14 +37,15 @@ export const incompleteLine = (faults: readonly SaidFault[]): VerdictLine => ({
 const weakestOf = ({ checks }: Report): Check | undefined =>
   checks.find((one) => !isFooting(one) && typeof one.reactionAtFailure === 'number' && one.state !== 'information');
 
-/** Names of checks; why a way of failing refers is said with it, while a rule of fit says so in the footing. */
-const named = (checks: readonly Check[]): string =>
-  checks
-    .map((one) => {
-      const name = inSentence(one.title);
-      return one.state === 'refer' && !isFooting(one) && one.reasonText ? `${name} (${one.reasonText})` : name;
-    })
-    .join('; ');
+/** Names of checks; why a way of failing refers is said once for all it holds of, while a rule of fit says so in the footing. */
+const named = (checks: readonly Check[]): string => {
+  const byReason = new Map<string, string[]>();
+  for (const one of checks) {
+    const reason = one.state === 'refer' && !isFooting(one) ? (one.reasonText ?? '') : '';
+    byReason.set(reason, [...(byReason.get(reason) ?? []), inSentence(one.title)]);
+  }
+  return [...byReason].map(([reason, names]) => `${names.join(', ')}${reason && ` (${reason})`}`).join('; ');
+};
 
 /** What fails beside the weakest, and all that refers. */
 const othersOf = (report: Report, weakest: Check | undefined): string => {

@@ -38,6 +38,10 @@ const shown = (value: unknown): unknown => {
   return Array.isArray(value) ? 'a list' : 'an object';
 };
 
+/** What a size must pass: more than nothing, or the least that is read. */
+const lowerBound = (minimum: number, value: unknown): unknown =>
+  minimum < 1 && typeof value === 'number' && value <= 0 && minimum > 0 ? { above: 0 } : { least: minimum };
+
 /** The branch of a union that the writer most likely meant. */
 const likelyBranch = (branches: readonly (readonly Issue[])[]): readonly Issue[] => {
   const depth = (issues: readonly Issue[]) => Math.max(0, ...issues.map(({ path }) => path.length));
@@ -77,7 +81,7 @@ const faultsOf = (issue: Issue, input: unknown, above: readonly PropertyKey[] = 
     case 'invalid_value':
       return [fault(value === undefined ? 'missing' : 'not-one-of', at, shown(value), issue.values)];
     case 'too_small':
-      return [fault('too-small', at, shown(value), { [issue.inclusive ? 'least' : 'above']: Number(issue.minimum) })];
+      return [fault('too-small', at, shown(value), lowerBound(Number(issue.minimum), value))];
     case 'too_big':
       return [fault('too-big', at, shown(value), { most: Number(issue.maximum) })];
     default:
@@ -93,6 +97,10 @@ export const readEnd = (input: unknown): { readonly end: End } | { readonly faul
   const parsed = endSchema.safeParse(input);
   if (!parsed.success) {
     return { faults: parsed.error.issues.flatMap((issue) => faultsOf(issue, input)).slice(0, MOST_FAULTS) };
+  }
+  // The schema library passes over this one key; an option of that name is as unknown as any other.
+  if (parsed.data.options && Object.hasOwn((input as End).options ?? {}, '__proto__')) {
+    return { faults: [fault('unknown-option', 'options.__proto__', '__proto__', null)] };
   }
   const { reaction } = parsed.data;
   if (typeof reaction === 'number' && reaction < 0) {

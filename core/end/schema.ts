@@ -9,8 +9,13 @@ const about = <S extends z.ZodMiniType>(schema: S, description: string): S => {
   return schema;
 };
 
-const positive = () => z.number().check(z.positive());
-const atLeastZero = () => z.number().check(z.nonnegative());
+/** No size or strength of a beam end is larger, in any unit; beyond it products would lose their meaning. */
+const LARGEST = 1e6;
+/** Nor is one smaller, unless it is nothing. */
+const SMALLEST = 1e-6;
+
+const positive = () => z.number().check(z.gte(SMALLEST), z.lte(LARGEST));
+const atLeastZero = () => z.number().check(z.nonnegative(), z.lte(LARGEST));
 const text = (most: number) => z.string().check(z.maxLength(most));
 const name = () => z.string().check(z.minLength(1), z.maxLength(80));
 const count = (most: number) => z.int().check(z.gte(1), z.lte(most));
@@ -78,7 +83,9 @@ const support = z.strictObject({
   section: z.optional(name()),
   thickness: z.optional(positive()),
   grade: z.optional(grade),
-  topOfSteel: z.optional(about(z.number(), "Support's top flange above the beam's, positive up")),
+  topOfSteel: z.optional(
+    about(z.number().check(z.gte(-LARGEST), z.lte(LARGEST)), "Support's top flange above the beam's, positive up"),
+  ),
   otherReaction: z.optional(atLeastZero()),
 });
 
@@ -103,7 +110,10 @@ export const endSchema = z
     mark: z.optional(text(40)),
     standard: name(),
     units: z.enum(['mm-kN', 'in-kip']),
-    reaction: z.union([z.number(), z.strictObject({ ofWebShear: z.number().check(z.gte(0), z.lte(2)) })]),
+    reaction: z.union([
+      z.number().check(z.lte(LARGEST)),
+      z.strictObject({ ofWebShear: z.number().check(z.gte(0), z.lte(2)) }),
+    ]),
     level: z.optional(z.enum(['factored', 'service'])),
     tie: z.optional(atLeastZero()),
     beam: z.strictObject({ section: z.union([name(), ownSection]), grade }),

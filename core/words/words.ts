@@ -60,6 +60,6 @@ const capital = (text: string): string => text.charAt(0).toUpperCase() + text.sl
 /** The sentence of a fault: what is wrong, and how to mend it. */
 export const faultText = (words: Words, faults: Readonly<Record<string, string>>, one: FaultLike): string => {
   const field = one.path ? fieldName(words, one.path) : 'the file';
-  const sentence = faults[one.code] ?? 'The {field} was not understood: {given}.';
+  const sentence = faults[one.code] ?? '{field} was not understood: {given}.';
   return capital(filled(sentence, { field, given: one.given, limit: one.limit, path: one.path, cope: words.cope }));
 };

@@ -42,7 +42,8 @@ self.addEventListener('fetch', (event) => {
   if (request.method !== 'GET' || !request.url.startsWith(self.registration.scope)) return;
   if (request.mode === 'navigate') {
     // Other pages of the same place, such as an API's description, are not the bench.
-    const here = new URL(request.url).pathname === new URL(self.registration.scope).pathname;
+    const here =
+      new URL(request.url).pathname.replace(/index\.html$/, '') === new URL(self.registration.scope).pathname;
     if (here) event.respondWith(page(request));
     return;
   }

@@ -1,5 +1,4 @@
 import { createHash } from 'node:crypto';
-import { readFileSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import preact from '@preact/preset-vite';
 import { defineConfig, type Plugin } from 'vite';
@@ -28,22 +27,16 @@ const policy = (): Plugin => ({
   ],
 });
 
-/** Parts of packages that the bench never calls: schemas as JSON, messages of faults, pictures of web pages in a PDF. */
-const UNUSED = /zod\/v4\/core\/(json-schema-processors|to-json-schema)\.js$|zod\/v4\/locales\/en\.js$/;
-const UNUSED_PACKAGES = ['html2canvas', 'canvg', 'dompurify'];
+/** Parts of the PDF writer that no sheet uses: they turn web pages into pictures. */
+const UNUSED = ['html2canvas', 'canvg', 'dompurify'];
 
-/** Leaves those parts out of the build: their names stay, with nothing behind them. */
+/** Leaves them out of the build; the writer asks for them only when such a page is given to it. */
 const lean = (): Plugin => ({
   name: 'lean',
   apply: 'build',
   enforce: 'pre',
-  resolveId: (id) => (UNUSED_PACKAGES.includes(id) ? `\0unused:${id}` : null),
-  load(id) {
-    if (id.startsWith('\0unused:')) return 'export default undefined;';
-    if (!UNUSED.test(id)) return null;
-    const names = [...readFileSync(id, 'utf8').matchAll(/^export (?:const|function) (\w+)/gm)].map(([, name]) => name);
-    return `${names.map((name) => `export const ${name} = undefined;`).join('\n')}\nexport default () => ({});\n`;
-  },
+  resolveId: (id) => (UNUSED.includes(id) ? `\0unused:${id}` : null),
+  load: (id) => (id.startsWith('\0unused:') ? 'export default undefined;' : null),
 });
 
 /** Tells the service worker which files the build has, and names the version by what is in them. */

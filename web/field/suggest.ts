@@ -31,6 +31,6 @@ export const suggestSections = (text: string): string[] => {
   };
   const found = holding.sort((a, b) => begins(a) - begins(b)).map(({ name }) => name);
   const near = findSection(text);
-  const others = 'nearest' in near ? near.nearest : [near.readAs === undefined ? near.designation : near.designation];
+  const others = 'nearest' in near ? near.nearest : [near.designation];
   return [...new Set([...found.slice(0, MOST), ...(found.length < 3 ? others : [])])].slice(0, MOST);
 };

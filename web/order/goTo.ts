@@ -28,6 +28,12 @@ export const goTo = (path: string): void => {
   if (line) open(line, { path });
 };
 
+/** Opens a line at its first field, or closes it where it is open. */
+export const turnTo = (line: LineName): void => {
+  if (openLine.value === line) openLine.value = null;
+  else open(line, { back: false });
+};
+
 /** Opens the next line, or the one before, and puts focus on its first or last field; at the end of the order nothing happens. */
 export const goOn = (from: LineName, back: boolean): void => {
   const line = lineNames[lineNames.indexOf(from) + (back ? -1 : 1)];

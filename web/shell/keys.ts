@@ -1,5 +1,5 @@
 import { signal } from '@preact/signals';
-import { openLine } from '../order/goTo.ts';
+import { turnTo } from '../order/goTo.ts';
 import { saveFile } from '../state/carry.ts';
 import { redo, undo } from '../state/edits.ts';
 import { lineNames } from '../state/tradeOrder.ts';
@@ -46,9 +46,7 @@ const single = (key: string): (() => void) | undefined => {
   }
   const line = /^[1-9]$/.test(key) ? lineNames[Number(key) - 1] : undefined;
   if (!line) return undefined;
-  return () => {
-    openLine.value = openLine.value === line ? null : line;
-  };
+  return () => turnTo(line);
 };
 
 const inField = (target: EventTarget | null): boolean =>

@@ -77,8 +77,13 @@ export const faults = computed<readonly SaidFault[]>(() =>
   'faults' in examination.value ? examination.value.faults : [],
 );
 
+/** True once faults were asked for (issuing a sheet): then empty fields are complained of too, until the end is complete. */
+export const demanded = signal(false);
+
 effect(() => {
-  if ('examined' in examination.value) lastGood.value = examination.value.examined;
+  if (!('examined' in examination.value)) return;
+  lastGood.value = examination.value.examined;
+  demanded.value = false;
 });
 
 /** Drawing and ladder show the end as it stands; false while they show the last one that could be examined. */
@@ -90,5 +95,3 @@ export const chosen = signal<CheckName | null>(null);
 export const focused = signal<string | null>(null);
 /** Path of the field that is being typed in: its text is shown as it is, and it is not complained of. */
 export const editing = signal<string | null>(null);
-/** True once faults were asked for (issuing a sheet): then empty fields are complained of too. */
-export const demanded = signal(false);

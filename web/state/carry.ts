@@ -1,4 +1,5 @@
 import type { Examined } from '../../core/check/examine.ts';
+import { assumedValues } from './assumedValues.ts';
 import { demanded, examination } from './bench.ts';
 import { replace } from './edits.ts';
 import { entryOf } from './entryOf.ts';
@@ -63,7 +64,8 @@ export const issueSheet = async (): Promise<void> => {
     const name = fileName(examined, 'pdf');
     const bytes = await sheetPdf({ ...examined, link }, { workings: 'governing' });
     hand(new Uint8Array(bytes), 'application/pdf', name);
-    tell(`Sheet written as ${name}`);
+    const assumed = assumedValues().map(({ text }) => text);
+    tell(`Sheet written as ${name}${assumed.length > 0 ? `. Still assumed: ${assumed.join(', ')}` : ''}`);
   } catch (error) {
     refuse('The sheet could not be written', [error instanceof Error ? error.message : String(error)]);
   }

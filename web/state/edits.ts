@@ -10,7 +10,7 @@ import { switchUnits } from './switchUnits.ts';
 import { advance, newTimeline, seal, stepBack, stepForward } from './timeline.ts';
 
 const make = (after: Entry, path: string, typing: boolean): void => {
-  if (notice.value?.kind === 'done') notice.value = null;
+  notice.value = null;
   timeline.value = advance(timeline.value, after, (before) => stepName(before, after, path), typing ? path : undefined);
 };
 

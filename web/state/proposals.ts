@@ -1,6 +1,6 @@
 import type { Examined } from '../../core/check/examine.ts';
 import { writeQuantity } from '../../core/units/printQuantity.ts';
-import { toSystem } from '../../core/units/systems.ts';
+import { INCH, toSystem } from '../../core/units/systems.ts';
 import { type Entry, textOf } from './entry.ts';
 
 /** Values put where nothing stands yet when a part is switched on, by path. */
@@ -21,7 +21,7 @@ const size =
 /** A length in mm as a round size at or above it. */
 const roundUp = ({ entry }: Known, mm: number): string => {
   if (entry.units === 'mm-kN') return String(Math.ceil(mm / 5 - 1e-9) * 5);
-  return writeQuantity(Math.ceil((mm / 25.4) * 4 - 1e-9) / 4, '1,0', 'in-kip');
+  return writeQuantity(Math.ceil((mm / INCH) * 4 - 1e-9) / 4, '1,0', 'in-kip');
 };
 
 /** Past the root of the beam's own flange, and past the half flange of the support where that is known. */

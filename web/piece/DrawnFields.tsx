@@ -17,7 +17,7 @@ const capital = (text: string): string => text.charAt(0).toUpperCase() + text.sl
 /** The sizes of the piece as the fields they are, each on its place in its dimension. */
 export const DrawnFields = ({ sizes, place }: Props) => (
   <div class="piece-fields" data-walk>
-    {inTradeOrder(sizes).map(({ path, box, text }) => {
+    {inTradeOrder(sizes).map(({ path, box }) => {
       const { x, y } = place({ x: (box.left + box.right) / 2, y: (box.top + box.bottom) / 2 });
       return (
         <span
@@ -25,7 +25,7 @@ export const DrawnFields = ({ sizes, place }: Props) => (
           class={`piece-field${focused.value === path ? ' in-focus' : ''}`}
           style={{ left: `${x.toFixed(1)}px`, top: `${y.toFixed(1)}px` }}
         >
-          <Field path={path} label={capital(fieldName(words.value, path))} variant="drawn" width={text.length} />
+          <Field path={path} label={capital(fieldName(words.value, path))} variant="drawn" />
         </span>
       );
     })}

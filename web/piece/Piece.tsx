@@ -9,7 +9,7 @@ import { DrawnLines, DrawnWords } from './Drawn.tsx';
 import { DrawnFields } from './DrawnFields.tsx';
 import { type Figure, figure, path, pathLaid } from './figure.ts';
 import { measureRoom } from './measureRoom.ts';
-import { penned, toScreen } from './pen.ts';
+import { type Penned, penned, type ToScreen, toScreen } from './pen.ts';
 
 /** The end to scale; where there is room every size on it is the field that holds it. */
 export const Piece = () => {
@@ -40,6 +40,7 @@ const Drawn = ({ it }: { it: Figure }) => {
   const place = toScreen(laid, scale);
   const { lines, words } = penned(laid, scale, focused.value);
   const [width, height] = [(laid.box.right - laid.box.left) * scale, (laid.box.bottom - laid.box.top) * scale];
+  const over = pathOver(it);
   const sizes = fields ? words.filter(isField) : [];
   return (
     <div class="piece-sheet" style={{ width: `${px(width * shrink)}px`, height: `${px(height * shrink)}px` }}>
@@ -53,13 +54,15 @@ const Drawn = ({ it }: { it: Figure }) => {
         aria-describedby="piece-sentences"
       >
         <DrawnLines lines={lines} />
+        {over && <DrawnLines lines={over.lines} />}
+        {over && <path class="ground" d={groundOf(sizes, place)} />}
         <DrawnWords
           words={fields ? words.filter((word) => !isField(word)) : words}
           place={place}
           scale={scale}
           focus={focused.value}
         />
-        <PathDrawn scale={scale} place={place} />
+        {over && <DrawnWords words={over.words} place={place} scale={scale} />}
       </svg>
       {fields && <DrawnFields sizes={sizes} place={(point) => scaled(place(point), shrink)} />}
     </div>
@@ -70,18 +73,18 @@ const px = (value: number): string => value.toFixed(1);
 
 const scaled = ({ x, y }: Point, by: number): Point => ({ x: x * by, y: y * by });
 
-const PathDrawn = ({ scale, place }: { scale: number; place: ReturnType<typeof toScreen> }) => {
-  const laid = pathLaid.value;
-  if (!laid) return null;
-  // The box of the drawing without its path governs, so that nothing moves when a rung is touched.
-  const { lines, words } = penned({ ...laid, box: figure.value!.laid.box }, scale, null, 'path');
-  return (
-    <g class="path">
-      <DrawnLines lines={lines} />
-      <DrawnWords words={words} place={place} scale={scale} />
-    </g>
-  );
-};
+/** Paper under the fields, so that the hatch of a path does not strike through them. */
+const groundOf = (sizes: readonly LaidText[], place: ToScreen): string =>
+  sizes
+    .map(({ box }) => {
+      const [from, to] = [place({ x: box.left, y: box.top }), place({ x: box.right, y: box.bottom })];
+      return `M${px(from.x)} ${px(from.y)}H${px(to.x)}V${px(to.y)}H${px(from.x)}Z`;
+    })
+    .join('');
+
+/** The path of the chosen rung; the box of the drawing without it governs, so that nothing moves when a rung is touched. */
+const pathOver = ({ laid, scale }: Figure): Penned | null =>
+  pathLaid.value && penned({ ...pathLaid.value, box: laid.box }, scale, null, 'path');
 
 /** What the drawing shows, said in sentences. */
 const InWords = ({ it }: { it: Figure }) => (

@@ -1,18 +1,29 @@
 import { room } from './figure.ts';
 
-/** A drawing is at most this high, px: in wide columns, and as a share of the width in narrow ones. */
-const HEIGHT = 600;
+/** In wide columns a drawing is so much lower than the window that it stands whole under the head, within these bounds, px. */
+const HEAD = 300;
+const LEAST = 480;
+const MOST = 760;
+/** In narrow ones, where the page is one column and a window's height comes and goes, its height follows its width. */
+const NARROW = 700;
 const TALL = 1.55;
 
-/** Keeps the room of the drawing at the width of its frame; gives back what ends it. */
+const heightFor = (width: number): number =>
+  window.innerWidth < NARROW ? Math.round(width * TALL) : Math.max(LEAST, Math.min(MOST, window.innerHeight - HEAD));
+
+/** Keeps the room of the drawing at what its frame and the window give; gives back what ends it. */
 export const measureRoom = (frame: HTMLElement): (() => void) => {
   const measure = (): void => {
     const width = Math.floor(frame.clientWidth);
-    if (width === room.value.width) return;
-    room.value = { width, height: Math.min(HEIGHT, Math.round(width * TALL)) };
+    const height = heightFor(width);
+    if (width !== room.value.width || height !== room.value.height) room.value = { width, height };
   };
   measure();
   const observer = new ResizeObserver(measure);
   observer.observe(frame);
-  return () => observer.disconnect();
+  window.addEventListener('resize', measure);
+  return () => {
+    observer.disconnect();
+    window.removeEventListener('resize', measure);
+  };
 };

@@ -28,7 +28,7 @@ export const Stress = () => {
     <>
       <section
         ref={section}
-        class={`stress${isBeside.value ? ' stress-beside' : ''}${stale.value ? ' stale' : ''}`}
+        class={`stress${isBeside(profiles.value.length) ? ' stress-beside' : ''}${stale.value ? ' stale' : ''}`}
         aria-labelledby="stress-heading"
       >
         <Heading id="stress-heading" level={2} title="Stress">
@@ -56,7 +56,7 @@ const isJudged = ({ checks }: Report): boolean =>
 const Profiles = ({ it, report }: { it: Figure; report: Report }) => {
   const all = profiles.value;
   const count = all.length;
-  const beside = isBeside.value;
+  const beside = isBeside(count);
   const column = profileWidth(count);
   const scale = it.scale * it.shrink;
   const reach = reachOf(all);

@@ -5,7 +5,8 @@ import type { Face } from './trueType.ts';
 
 /** Units of the content in a mm: whole numbers then place every mark within 0.013 mm. */
 const UNITS = 40;
-const POINTS = 72 / 25.4;
+/** Points in a unit: to so many places that the far edge of the paper is right within 0.001 mm. */
+const SCALE = (72 / 25.4 / UNITS).toFixed(8);
 
 type Corner = readonly [x: number, y: number];
 
@@ -30,7 +31,7 @@ class Content {
     private readonly font: string,
     private readonly glyphs: ReadonlyMap<Face, ReadonlyMap<string, number>>,
   ) {
-    this.out.push(`${number(POINTS / UNITS)} 0 0 ${number(POINTS / UNITS)} 0 0 cm`);
+    this.out.push(`${SCALE} 0 0 ${SCALE} 0 0 cm`);
   }
 
   write(marks: readonly Mark[]): string {

@@ -4,7 +4,7 @@ import { failurePath } from '../drawing/failurePath.ts';
 import type { Laid } from '../drawing/laid.ts';
 import { layoutDrawing } from '../drawing/layout.ts';
 import type { DrawingWords } from '../drawing/words.ts';
-import { fromSystem } from '../units/systems.ts';
+import { fromSystem, type UnitSystem } from '../units/systems.ts';
 import type { Context, Zone } from './context.ts';
 import { drawMark } from './figureMarks.ts';
 import { freeAbove, lowestRightOf, type PaperBox, paperBoxes } from './figureSpace.ts';
@@ -13,13 +13,10 @@ import { body, NARROW, WIDE } from './page.ts';
 import { POINT, type Spot, type TextStyle } from './pen.ts';
 import { type Code, drawCode, sideOf } from './qr.ts';
 import { richText } from './richText.ts';
+import { standardScales } from './scales.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { type Lines, setLines, wrap } from './textBlock.ts';
 import { governingOf } from './verdictLine.ts';
-
-/** Standard scales, the largest first. */
-export const scales = [1, 2, 5, 10, 20] as const;
-export type Scale = (typeof scales)[number];
 
 /** Capitals 2.5 mm high: size in pt of a face whose capitals stand 0.698 em high. */
 const SIZE = 2.5 / 0.698 / POINT;
@@ -28,17 +25,13 @@ const SCALE_HEIGHT = 5.9;
 /** Width of the caption below the piece, and least width of one beside it. */
 const CAPTION = 62;
 const BESIDE = 28;
-
-/** Length of the scale bar in the file's units, by scale; its parts are a half each. */
-const bars: Readonly<Record<'mm-kN' | 'in-kip', Readonly<Record<Scale, number>>>> = {
-  'mm-kN': { 1: 20, 2: 50, 5: 100, 10: 200, 20: 400 },
-  'in-kip': { 1: 1, 2: 2, 5: 4, 10: 8, 20: 20 },
-};
+/** A piece drawn less deep than this cannot be read, mm. */
+const LEAST_DEPTH = 28;
 
 /** The end to scale with its dimensions and the governing path, its caption and the scale bar. */
 export interface Figure extends Zone {
   readonly width: number;
-  readonly scale: Scale;
+  readonly scale: number;
   /** True where the square code stands in it. */
   readonly coded: boolean;
 }
@@ -80,26 +73,39 @@ const style: TextStyle = { ...body, family: 'narrow' };
 
 /** The figures of one end at the standard scales, each laid out at first use. */
 export interface Figures {
-  /** The two largest scales at which the piece alone would fit: a still smaller figure could not be read. */
-  readonly scales: readonly Scale[];
-  readonly at: (scale: Scale) => Figure;
+  /** Scales at which the piece alone would fit and can still be read, the largest first. */
+  readonly scales: readonly number[];
+  /** `labelled`: with the words that the data beside the figure repeat. */
+  readonly at: (scale: number, labelled: boolean) => Figure;
+  /** The figure that takes the least room, however small its piece is then. */
+  readonly smallest: () => Figure;
 }
+
+/** Words on the piece that stand among the given data too. */
+const repeated = new Set(['section', 'bolts', 'plate']);
 
 /** `width` and `height`: room on the paper, mm; `code`: a square code that looks for room beside the piece. */
 export const figuresOf = (context: Context, width: number, height: number, code: Code | null): Figures => {
   const path = governingPath(context);
   const drawing = drawEnd(context.input.facts, drawingWords(context));
   const { box } = drawing;
-  const fitting = scales.filter(
-    (scale) => (box.right - box.left) / scale <= width && (box.bottom - box.top) / scale <= height,
-  );
-  const made = new Map<Scale, Figure>();
-  const at = (scale: Scale): Figure => {
-    const known = made.get(scale) ?? figureAt(context, { drawing, path, code, room: width }, scale);
-    made.set(scale, known);
+  const [wide, high] = [box.right - box.left, box.bottom - box.top];
+  const first = standardScales.find((scale) => wide / scale <= width && high / scale <= height);
+  const bare = { ...drawing, callouts: drawing.callouts.filter(({ name }) => !repeated.has(name)) };
+  const made = new Map<string, Figure>();
+  const at = (scale: number, labelled: boolean): Figure => {
+    const key = `${scale} ${labelled}`;
+    const content = { drawing: labelled ? drawing : bare, path, code, room: width };
+    const known = made.get(key) ?? figureAt(context, content, scale);
+    made.set(key, known);
     return known;
   };
-  return { scales: fitting.length > 0 ? fitting.slice(0, 2) : [20], at };
+  const scales = standardScales.filter((scale) => scale === first || (scale > first! && high / scale >= LEAST_DEPTH));
+  const smallest = (): Figure => {
+    const least = standardScales.find((scale) => scale >= scales.at(-1)! && at(scale, false).width <= width);
+    return at(least ?? standardScales.at(-1)!, false);
+  };
+  return { scales, at, smallest };
 };
 
 interface Content {
@@ -110,7 +116,7 @@ interface Content {
   readonly room: number;
 }
 
-const figureAt = (context: Context, content: Content, scale: Scale): Figure => {
+const figureAt = (context: Context, content: Content, scale: number): Figure => {
   const { pen } = context;
   const { drawing, path, code } = content;
   const measure = (text: string, size: number): number => (pen.width(text, { size: SIZE }) * size) / (SIZE * POINT);
@@ -128,7 +134,7 @@ const figureAt = (context: Context, content: Content, scale: Scale): Figure => {
 };
 
 /** The caption beside the piece where there is room for it; else below, to the right of the reaction's arrow. */
-const placeWords = (context: Context, laid: Laid, { path, code, room }: Content, scale: Scale): Placed => {
+const placeWords = (context: Context, laid: Laid, { path, code, room }: Content, scale: number): Placed => {
   const boxes = paperBoxes(laid, scale);
   const [wide, high] = [(laid.box.right - laid.box.left) / scale, (laid.box.bottom - laid.box.top) / scale];
   const left = room - BESIDE - 1;
@@ -158,9 +164,13 @@ const placeCode = (boxes: readonly PaperBox[], code: Code | null, room: number, 
 const captionLines = ({ pen, numbers }: Context, path: FailurePath | null, width: number): Lines =>
   path ? wrap(pen, richText(numbers.marked(path.caption), 'prose'), style, width) : [];
 
+/** Length of the scale bar in the file's units: 20 mm on paper, or the nearest whole inches. */
+const barOf = (units: UnitSystem, scale: number): number =>
+  units === 'mm-kN' ? 20 * scale : Math.max(1, Math.round(0.8 * scale));
+
 /** Scale in figures and as a bar, since printers shrink. */
-const drawScale = ({ pen, numbers }: Context, x: number, y: number, scale: Scale): void => {
-  const length = bars[numbers.units][scale];
+const drawScale = ({ pen, numbers }: Context, x: number, y: number, scale: number): void => {
+  const length = barOf(numbers.units, scale);
   const onPaper = fromSystem(length, '1,0', numbers.units) / scale;
   pen.text(x, y, say.scaleText(scale, `${length} ${numbers.length}`), style);
   const line = y + 1.5;

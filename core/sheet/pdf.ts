@@ -84,11 +84,12 @@ export const writePdf = async (pages: readonly (readonly Mark[])[], about: About
   doc.setProperties({ title, subject, keywords, creator });
   doc.setCreationDate(stampOf(about.date) as unknown as Date);
   doc.setFileId(about.fingerprint.padEnd(32, '0').slice(0, 32).toUpperCase());
-  const cut = cutFaces(FONT, charactersOf(pages));
-  const font = embed(doc, cut);
+  const used = charactersOf(pages);
+  const cut = used.size > 0 ? cutFaces(FONT, used) : null;
+  const font = cut ? embed(doc, cut) : '';
   pages.forEach((marks, i) => {
     if (i > 0) doc.addPage([...about.paper]);
-    (doc.internal as unknown as Raw).write(contentOf(marks, about.paper[1], font, cut.glyphs));
+    (doc.internal as unknown as Raw).write(contentOf(marks, about.paper[1], font, cut?.glyphs ?? new Map()));
   });
   return new Uint8Array(doc.output('arraybuffer'));
 };

@@ -1,4 +1,5 @@
-import { type Row, rowsOf, rowsWithin, tableZone } from './checkTable.ts';
+import { type Row, rowsOf, rowsWithin } from './checkRows.ts';
+import { tableZone } from './checkTable.ts';
 import type { Context, Zone } from './context.ts';
 import { type Figure, type Figures, figuresOf } from './figure.ts';
 import { footingZone } from './footing.ts';
@@ -65,28 +66,40 @@ interface Choice {
   readonly working: Zone | null;
 }
 
-/** The first sheet under these choices; null where it does not fit. */
-const planned = (parts: Parts, { figure, showing, rows, working }: Choice): Plan | null => {
+/** The first sheet under these choices, fit or not. */
+const laidOut = (parts: Parts, { figure, showing, rows, working }: Choice): Plan & { readonly fits: boolean } => {
   const { context, given, footing, limits, room } = parts;
   const table = tableZone(context, rows);
   const below = table.height + footing.height + (working?.height ?? 0) + limits.height;
   const least = leastUpper(parts, figure, showing);
-  if (least + below > room || figure.width > FIGURE_WIDTH) return null;
-  const upper = least + Math.min(room - below - least, SPARE);
+  const spare = room - below - least;
+  const upper = least + Math.max(0, Math.min(spare, SPARE));
   const stress = stressWithin(parts, showing, upper - given.height - AIR);
   const later = parts.rows.slice(rows.length);
-  return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false };
+  const fits = spare >= 0 && figure.width <= FIGURE_WIDTH;
+  return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false, fits };
+};
+
+const planned = (parts: Parts, choice: Choice): Plan | null => {
+  const plan = laidOut(parts, choice);
+  return plan.fits ? plan : null;
 };
 
 /** Height that figure and data need at least. */
 const leastUpper = (parts: Parts, figure: Figure, showing: Showing): number =>
   Math.max(figure.height, parts.given.height + AIR + stressWithin(parts, showing, 0).height);
 
-/** Every pair of showing and figure, the fullest first. */
-const pairs = ({ figures }: Parts): { showing: Showing; figure: () => Figure }[] =>
-  (['profiles', 'numbers'] as const).flatMap((showing) =>
-    figures.scales.map((scale) => ({ showing, figure: () => figures.at(scale) })),
+/** Every pair of showing and figure: a large figure matters more than profiles, these more than words that the data repeat. */
+const pairs = ({ figures }: Parts): { showing: Showing; figure: () => Figure }[] => {
+  const [large, small] = [figures.scales.slice(0, 2), figures.scales.slice(2)];
+  return [large, small].flatMap((scales) =>
+    (['profiles', 'numbers'] as const).flatMap((showing) =>
+      scales.flatMap((scale) =>
+        [true, false].map((labelled) => ({ showing, figure: () => figures.at(scale, labelled) })),
+      ),
+    ),
   );
+};
 
 /** All on one sheet: the largest figure first, then the fullest working. */
 const onOneSheet = (parts: Parts): Plan | null => {
@@ -108,13 +121,11 @@ const onMore = (parts: Parts): Plan => {
     const plan = planned(parts, { showing, figure: figure(), rows, working });
     if (plan) return { ...plan, workingLater: true };
   }
-  const figure = figures.at(figures.scales.at(-1)!);
+  const figure = figures.smallest();
   const showing = 'numbers';
   const others = leastUpper(parts, figure, showing) + footing.height + limits.height + working.height;
   const first = rows.slice(0, Math.max(1, rowsWithin(rows, room - others)));
-  const boundless = { ...parts, room: Number.POSITIVE_INFINITY };
-  const plan = planned(boundless, { showing, figure: { ...figure, width: 0 }, rows: first, working });
-  return { ...plan!, workingLater: true };
+  return { ...laidOut(parts, { showing, figure, rows: first, working }), workingLater: true };
 };
 
 /** Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on further sheets. */

@@ -1,5 +1,6 @@
 import type { Check } from '../check/report.ts';
-import { type Row, rowsWithin, tableZone } from './checkTable.ts';
+import { type Row, rowsWithin } from './checkRows.ts';
+import { tableZone } from './checkTable.ts';
 import type { Context } from './context.ts';
 import { standardName } from './head.ts';
 import { body, FRAME, LEFT, NARROW, small, TOP, WIDTH } from './page.ts';
@@ -18,6 +19,8 @@ const FOOT = 9;
 const GUTTER = 6;
 const COLUMN = (WIDTH - GUTTER) / 2;
 const SYMBOL = 13;
+/** Air above and below rows of the table, mm. */
+const GAP = 2;
 
 /** A line of a column: a heading, or one side of a step behind its symbol. */
 interface Line {
@@ -85,23 +88,21 @@ const blocksOf = (context: Context, check: Check, shown: Set<string>): Block[] =
 
 const heightOf = (block: Block): number => block.reduce((sum, { height }) => sum + height, 0);
 
-/** Columns of blocks, each no higher than `height`. */
-const columnsOf = (blocks: readonly Block[], height: number): Line[][] => {
-  const columns: Line[][] = [];
-  let column: Line[] = [];
-  let left = height;
+/** Columns of blocks; `room` gives the height of each column by its number. */
+const columnsOf = (blocks: readonly Block[], room: (column: number) => number): Line[][] => {
+  const columns: Line[][] = [[]];
+  let left = room(0);
   for (const block of blocks) {
     const needs = heightOf(block);
-    if (needs > left && column.length > 0) {
-      columns.push(column);
-      column = [];
-      left = height;
+    // A block higher than the room of a shortened page goes on; one higher than a whole page stays where it is.
+    while (needs > left && (columns.at(-1)!.length > 0 || left < room(columns.length))) {
+      columns.push([]);
+      left = room(columns.length - 1);
     }
-    column.push(...block);
+    columns.at(-1)!.push(...block);
     left -= needs;
   }
-  if (column.length > 0) columns.push(column);
-  return columns;
+  return blocks.length > 0 ? columns : [];
 };
 
 const drawColumn = ({ pen }: Context, lines: readonly Line[], x: number, y: number): void => {
@@ -117,35 +118,52 @@ const drawColumn = ({ pen }: Context, lines: readonly Line[], x: number, y: numb
 export const workedChecks = ({ input }: Context): readonly Check[] =>
   input.report.checks.filter(({ state, working }) => state !== 'notApplicable' && (working?.length ?? 0) > 0);
 
-/** What the further sheets hold; each function draws one page below its head. */
+/** One further sheet: rows of the table, and columns of workings below them. */
+interface Page {
+  rows: readonly Row[];
+  columns: Line[][];
+}
+
+/** Rows that go on further sheets, as many on each as fit. */
+const pagesOfRows = (rows: readonly Row[], room: number): Page[] => {
+  const pages: Page[] = [];
+  for (let rest = rows; rest.length > 0; ) {
+    const count = Math.max(1, rowsWithin(rest, room - GAP));
+    pages.push({ rows: rest.slice(0, count), columns: [] });
+    rest = rest.slice(count);
+  }
+  return pages;
+};
+
+/** What the further sheets hold; each function draws one page below its head. The workings begin below the last rows. */
 export const furtherPages = (
   context: Context,
   rows: readonly Row[],
   checks: readonly Check[],
   bottom: number,
 ): (() => void)[] => {
-  const pages: (() => void)[] = [];
-  const room = bottom - FOOT - TOP - HEAD - 2;
-  for (let rest = rows; rest.length > 0; ) {
-    const count = Math.max(1, rowsWithin(rest, room));
-    const part = rest.slice(0, count);
-    pages.push(() => tableZone(context, part).draw(LEFT, TOP + HEAD + 2));
-    rest = rest.slice(count);
-  }
+  const room = bottom - FOOT - TOP - HEAD;
+  const pages = pagesOfRows(rows, room);
+  const last = Math.max(0, pages.length - 1);
+  const tableHeight = (page: Page | undefined): number =>
+    page && page.rows.length > 0 ? tableZone(context, page.rows).height + 2 * GAP : 0;
   const shown = new Set<string>();
   const columns = columnsOf(
     checks.flatMap((check) => blocksOf(context, check, shown)),
-    room,
+    (column) => room - (column < 2 ? tableHeight(pages[last]) : 0),
   );
-  for (let i = 0; i < columns.length; i += 2) {
-    const pair = columns.slice(i, i + 2);
-    pages.push(() => {
-      pair.forEach((lines, k) => {
-        drawColumn(context, lines, LEFT + k * (COLUMN + GUTTER), TOP + HEAD);
-      });
+  columns.forEach((lines, i) => {
+    const page = last + Math.floor(i / 2);
+    pages[page] ??= { rows: [], columns: [] };
+    pages[page].columns.push(lines);
+  });
+  return pages.map((page) => () => {
+    const top = TOP + HEAD + tableHeight(page);
+    if (page.rows.length > 0) tableZone(context, page.rows).draw(LEFT, TOP + HEAD + GAP);
+    page.columns.forEach((lines, k) => {
+      drawColumn(context, lines, LEFT + k * (COLUMN + GUTTER), top);
     });
-  }
-  return pages;
+  });
 };
 
 /** Mark, standard and number of a further sheet, and what binds it to the first. */

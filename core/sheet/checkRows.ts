@@ -1,0 +1,115 @@
+import type { Check } from '../check/report.ts';
+import type { Context } from './context.ts';
+import { PER_V } from './ladderBar.ts';
+import { small, table, WIDTH } from './page.ts';
+import type { SetRun, TextStyle } from './pen.ts';
+import { richText } from './richText.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { type Lines, plainRun, wrap } from './textBlock.ts';
+import { titleOf } from './verdictLine.ts';
+
+/** A row of the table, or the heading of the rules of fit that are not held. */
+export type Row = CheckRow | { readonly kind: 'fit' };
+
+export interface CheckRow {
+  readonly kind: 'check';
+  readonly check: Check;
+  readonly name: Lines;
+  readonly clause: Lines;
+  /** Why it refers or fails: in the place of the bar where there is no number and it is short, else below. */
+  readonly beside: readonly SetRun[] | null;
+  readonly below: Lines;
+}
+
+/** Heights of the table's head, of a row, and of each further line in it, mm. */
+export const HEADER = 4;
+export const ROW = 4.05;
+export const MORE = 3.5;
+
+/** Right edges of right-aligned columns, left edges of the others, mm from the left of the window. */
+export const at = {
+  sign: 1.2,
+  name: 4.2,
+  symbol: 52.4,
+  demand: 62.6,
+  resistance: 74.2,
+  unit: 75,
+  bar: 84.6,
+  ratio: 119.2,
+  failsAt: 131.6,
+  clause: 133.6,
+  basis: WIDTH - 3.8,
+  tick: WIDTH - 2.9,
+} as const;
+/** Where a reason starts that stands in the place of the bar: right of the line at V. */
+export const BESIDE = at.bar + PER_V + 1.2;
+const NAME_WIDTH = 41;
+/** Between clause and basis, mm. */
+const CLAUSE_GAP = 0.9;
+
+const nameOf = (context: Context, check: Check, governs: boolean): Lines => {
+  const { pen, words } = context;
+  const mark = check.verified === 'none' ? ' *' : '';
+  const lead = governs ? say.table.governs : '';
+  const full = `${lead}${titleOf(check)}${mark}`;
+  const style: TextStyle = { ...table, bold: governs };
+  if (pen.width(full, style) <= NAME_WIDTH) return [[plainRun(full)]];
+  const short = words.short[check.id] ?? check.title;
+  return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${mark}`)], style, NAME_WIDTH);
+};
+
+const rowOf = (context: Context, check: Check): Row => {
+  const { pen, input } = context;
+  const governs = check.id === input.report.governing;
+  return {
+    kind: 'check',
+    check,
+    name: nameOf(context, check, governs),
+    clause: wrap(pen, [plainRun(check.clause)], small, clauseWidth(context, check)),
+    ...reasonOf(context, check),
+  };
+};
+
+/** A rule of fit says why by its two sizes, unless it clashes. */
+const reasonOf = ({ pen }: Context, check: Check): Pick<CheckRow, 'beside' | 'below'> => {
+  const { id, state, reason, reasonText = '', reactionAtFailure, utilisation } = check;
+  const bySizes = id.startsWith('fit-') && (reason === 'too-little' || reason === 'too-much');
+  if ((state !== 'refer' && state !== 'fails') || !reasonText || bySizes) return { beside: null, below: [] };
+  const runs = richText(reasonText, 'prose');
+  const empty = (reactionAtFailure ?? null) === null && utilisation === null;
+  const fits = pen.width(runs, small) <= at.clause - BESIDE - 1;
+  if (empty && fits) return { beside: runs, below: [] };
+  return { beside: null, below: wrap(pen, runs, small, WIDTH - at.name - 8) };
+};
+
+const clauseWidth = ({ pen }: Context, check: Check): number =>
+  at.basis - at.clause - CLAUSE_GAP - pen.width(basisOf(check), small);
+
+/** Left out where it would repeat the clause. */
+export const basisOf = ({ basis, clause }: Check): string => (basis === clause ? '' : basis);
+
+/** Checks that stand as rows: strength that holds, fails or refers, weakest first; then rules of fit that do not hold. */
+export const rowsOf = (context: Context): Row[] => {
+  const { checks } = context.input.report;
+  const told = checks.filter(({ state }) => state === 'holds' || state === 'fails' || state === 'refer');
+  const strength = told.filter(({ id }) => !id.startsWith('fit-'));
+  const fit = told.filter(({ id, state }) => id.startsWith('fit-') && state !== 'holds');
+  const heading: Row[] = fit.length > 0 ? [{ kind: 'fit' }] : [];
+  return [...strength.map((one) => rowOf(context, one)), ...heading, ...fit.map((one) => rowOf(context, one))];
+};
+
+export const heightOf = (row: Row): number =>
+  row.kind === 'fit' ? ROW : ROW + (Math.max(row.name.length, row.clause.length) - 1 + row.below.length) * MORE;
+
+/** How many rows fit a height. */
+export const rowsWithin = (rows: readonly Row[], height: number): number => {
+  let left = height - HEADER;
+  const count = rows.findIndex((row) => {
+    left -= heightOf(row);
+    return left < 0;
+  });
+  return count < 0 ? rows.length : count;
+};
+
+/** Rules of fit have no bar. */
+export const hasBar = (row: Row): boolean => row.kind === 'check' && !row.check.id.startsWith('fit-');

@@ -1,0 +1,254 @@
+import fc from 'fast-check';
+import { beforeAll, describe, expect, it } from 'vitest';
+import { type Examined, examine } from '../../../core/check/examine.ts';
+import type { Check } from '../../../core/check/report.ts';
+import { sheetPages, sheetPdf } from '../../../core/sheet/sheet.ts';
+import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
+import { end, examined, fullest, withSheet } from './ends.ts';
+import { boxOf, type FoundBox, type FoundText, pathsOf, textsOf, wholeText } from './readPdf.ts';
+
+const A4 = { width: 210, height: 297 };
+const LETTER = { width: 215.9, height: 279.4 };
+/** Filing edge 20 mm; 180 mm wide; 10 mm above and below. */
+const windowOf = ({ height }: { height: number }): FoundBox => ({ left: 20, right: 200, top: 10, bottom: height - 10 });
+
+/** Text and marks may touch the edge of the window, not cross it; coordinates are whole fortieths of a mm. */
+const EDGE = 0.4;
+const outside = (texts: readonly FoundText[], window: FoundBox): string[] =>
+  texts
+    .filter((one) => {
+      const { left, right, top, bottom } = boxOf(one);
+      return (
+        left < window.left - EDGE ||
+        right > window.right + EDGE ||
+        top < window.top - EDGE ||
+        bottom > window.bottom + EDGE
+      );
+    })
+    .map(({ text }) => text);
+
+/** Pairs of texts that cover each other by more than a hair; subscripts may lean on their symbols. */
+const covering = (texts: readonly FoundText[]): string[] => {
+  const boxes = texts.map((one) => ({ ...boxOf(one), text: one.text }));
+  const found: string[] = [];
+  boxes.forEach((a, i) => {
+    for (const b of boxes.slice(i + 1)) {
+      const wide = Math.min(a.right, b.right) - Math.max(a.left, b.left);
+      const high = Math.min(a.bottom, b.bottom) - Math.max(a.top, b.top);
+      if (wide > 0.35 && high > 0.6) found.push(`${a.text} | ${b.text}`);
+    }
+  });
+  return found;
+};
+
+/** The figure lays out its own words; here the zones are looked at. */
+const besidesFigure = (texts: readonly FoundText[]): FoundText[] => {
+  const table = texts.find(({ text }) => text.startsWith('Check, weakest first'))!;
+  return texts.filter(({ x, y }) => !(y > 36.8 && y < table.y - 3 && x < 132));
+};
+
+const pagesOf = async (input: Examined, workings: 'governing' | 'all' = 'governing') =>
+  textsOf(await sheetPdf(input, { workings }));
+
+const ends: readonly (readonly [name: string, input: object])[] = [
+  ['holds', end],
+  ['fails', { ...end, reaction: 300 }],
+  ['refers', { ...end, reaction: 60, top: { length: 900, depth: 45, radius: 10 } }],
+  ['without a reaction', { ...end, reaction: 0 }],
+  ['with notches above and below, two columns and a tie', fullest],
+  ['on Letter', withSheet({ ...end.sheet, paper: 'Letter' })],
+  ['with a decimal comma', withSheet({ ...end.sheet, decimal: ',' })],
+  ['with a notch of three metres', { ...end, top: { length: 3000, depth: 45, radius: 10 } }],
+];
+
+describe.each(ends)('the sheet of an end that %s', (_, input) => {
+  const paper = JSON.stringify(input).includes('Letter') ? LETTER : A4;
+  let page: FoundText[];
+  let further: FoundText[][];
+  beforeAll(async () => {
+    [page = [], ...further] = await pagesOf(examined(input), 'all');
+  });
+
+  it('keeps all text within the window that A4 and Letter share in width', () => {
+    for (const one of [page, ...further]) expect(outside(one, windowOf(paper))).toEqual([]);
+  });
+
+  it('lets no text cover another', () => {
+    expect(covering(besidesFigure(page))).toEqual([]);
+    for (const one of further) expect(covering(one)).toEqual([]);
+  });
+
+  it('is set no smaller than 8 pt, subscripts no smaller than 6.5 pt', () => {
+    for (const { text, size } of [page, ...further].flat()) {
+      expect(size, text).toBeGreaterThan(/^[A-Za-z0-9,.]{1,8}$/.test(text) ? 6.45 : 7.95);
+    }
+  });
+
+  it('draws no line thinner than 0.18 mm', async () => {
+    const pdf = await sheetPdf(examined(input), { workings: 'governing' });
+    const lines = pathsOf(pdf, 0, paper.height).filter(({ filled }) => !filled);
+    expect(lines.length).toBeGreaterThan(100);
+    expect(Math.min(...lines.map(({ width }) => width))).toBeGreaterThan(0.175);
+  });
+
+  it('keeps all lines within the window', async () => {
+    const pdf = await sheetPdf(examined(input), { workings: 'governing' });
+    const points = pathsOf(pdf, 0, paper.height).flatMap((path) => path.points);
+    const { left, right, top, bottom } = windowOf(paper);
+    expect(
+      points.filter(({ x, y }) => x < left - EDGE || x > right + EDGE || y < top - EDGE || y > bottom + EDGE),
+    ).toEqual([]);
+  });
+});
+
+describe('the figure', () => {
+  const bodyOf = (pdf: Uint8Array) =>
+    pathsOf(pdf, 0, A4.height).filter(({ points }) => points.every(({ x }) => x < 133));
+
+  it('measures what its scale says, within 0.2 mm: depth, notch, bolt pitch', async () => {
+    const pdf = await sheetPdf(examined(end), { workings: 'governing' });
+    const text = wholeText((await textsOf(pdf))[0]!);
+    const scale = Number(/scale 1:(\d+)/.exec(text)![1]);
+    expect([1, 2, 5, 10, 20]).toContain(scale);
+    // The outline: the longest wide run of lines with the notch's arc in it.
+    const outline = bodyOf(pdf)
+      .filter(({ curved, filled, width }) => curved && !filled && Math.abs(width - 0.5) < 0.02)
+      .toSorted((a, b) => b.points.length - a.points.length)[0]!;
+    const xs = outline.points.map(({ x }) => x);
+    const ys = outline.points.map(({ y }) => y);
+    const [top, bottom, left] = [Math.min(...ys), Math.max(...ys), Math.min(...xs)];
+    expect(Math.abs((bottom - top) * scale - 406.4)).toBeLessThan(0.2 * scale);
+    const cutEdge = Math.min(...outline.points.filter(({ x }) => x < left + 0.5).map(({ y }) => y));
+    expect(Math.abs((cutEdge - top) * scale - 45)).toBeLessThan(0.2 * scale);
+    const upper = outline.points.filter(({ y }) => y < top + 0.1).map(({ x }) => x);
+    expect(Math.abs((Math.min(...upper) - left) * scale - 110)).toBeLessThan(0.2 * scale);
+    // Bolts sheared: black circles of the bolt's or the hole's size.
+    const bolts = bodyOf(pdf)
+      .filter(({ curved, filled, points }) => curved && filled && points.length === 5)
+      .map(({ points }) => (Math.max(...points.map(({ y }) => y)) + Math.min(...points.map(({ y }) => y))) / 2)
+      .filter((y, i, all) => all.findIndex((one) => Math.abs(one - y) < 0.3) === i)
+      .filter((y) => y > cutEdge && y < bottom)
+      .toSorted((a, b) => a - b);
+    const apart = bolts.flatMap((a) => bolts.map((b) => (b - a) * scale));
+    expect(apart.filter((one) => Math.abs(one - 70) < 0.2 * scale).length).toBeGreaterThanOrEqual(2);
+  });
+
+  it('carries a bar as long as it says, since printers shrink', async () => {
+    const pdf = await sheetPdf(examined(end), { workings: 'governing' });
+    const text = wholeText((await textsOf(pdf))[0]!);
+    const [, scale, length] = /scale 1:(\d+); (\d+) mm/.exec(text)!;
+    const level = bodyOf(pdf).filter(({ points }) => points.length === 2 && points[0]!.y === points[1]!.y);
+    const wanted = Number(length) / Number(scale);
+    expect(level.some(({ points }) => Math.abs(points[1]!.x - points[0]!.x - wanted) < 0.03)).toBe(true);
+  });
+
+  it('of a 406 deep beam is 1:5 on A4 and a standard scale on Letter', async () => {
+    expect(wholeText((await pagesOf(examined(end)))[0]!)).toContain('scale 1:5');
+    const letter = await pagesOf(examined(withSheet({ ...end.sheet, paper: 'Letter' })));
+    expect(letter.length).toBe(1);
+    expect(wholeText(letter[0]!)).toMatch(/scale 1:(5|10);/);
+  });
+});
+
+describe('what is too much for one page', () => {
+  const longest = {
+    ...end,
+    mark: 'WWWWWWWWWW-MMMMMMMMMM-XXXXXXXXXX-YYYYYYY',
+    piece: 'P'.repeat(40),
+    end: 'far',
+    quantity: 99999,
+    support: { kind: 'beam-web', section: 'UB 610x229x125', topOfSteel: 0 },
+    sheet: {
+      job: 'W'.repeat(200),
+      drawing: 'D'.repeat(200),
+      number: 'N'.repeat(200),
+      revision: 'R2345678',
+      reason: `because ${'reason '.repeat(27)}`.slice(0, 200),
+      loadCase: 'L'.repeat(200),
+      date: '2031-12-31',
+      prepared: 'P'.repeat(200),
+      checked: 'C'.repeat(200),
+      approved: `${'Name '.repeat(40)}`.trim(),
+    },
+  };
+
+  it('the longest names do not leave their places', async () => {
+    for (const paper of ['A4', 'Letter'] as const) {
+      const pages = await pagesOf(examined({ ...longest, sheet: { ...longest.sheet, paper } }));
+      pages.forEach((page, i) => {
+        expect(outside(page, windowOf(paper === 'A4' ? A4 : LETTER))).toEqual([]);
+        expect(covering(i === 0 ? besidesFigure(page) : page)).toEqual([]);
+      });
+      expect(wholeText(pages[0]!)).toContain('…');
+    }
+  });
+
+  /** A report with so many rows as no joint of ours has yet: the checks of the fullest end with longer names and reasons. */
+  const withRows = (count: number): Examined => {
+    const whole = examined(fullest);
+    const { checks } = whole.report;
+    const model = checks.filter(({ id, state }) => state === 'holds' && !id.startsWith('fit-'));
+    const rows = Array.from({ length: count }, (_, i): Check => {
+      const one = model[i % model.length]!;
+      return {
+        ...one,
+        title: `${one.title} of a part with a name that is long`,
+        state: i % 5 === 4 ? 'refer' : 'holds',
+        reasonText: 'a reason that fills its line',
+        verified: 'none',
+      };
+    });
+    const others = checks.filter(({ id, state }) => id.startsWith('fit-') || state !== 'holds');
+    return { ...whole, report: { ...whole.report, checks: [...rows, ...others] } };
+  };
+
+  it.each([24, 40, 90])('%i rows go on further sheets in the same type, and none is lost', async (count) => {
+    const pages = await pagesOf(withRows(count));
+    pages.forEach((page, i) => {
+      expect(outside(page, windowOf(A4))).toEqual([]);
+      expect(covering(i === 0 ? besidesFigure(page) : page)).toEqual([]);
+      expect(wholeText(page)).toContain(`${i + 1} of ${pages.length}`);
+    });
+    const bases = pages.flat().filter(({ text }) => ['memory', 'practice', 'research', 'seen'].includes(text));
+    expect(bases.filter(({ size }) => Math.abs(size - 8) < 0.05).length).toBe(count);
+    expect(wholeText(pages[0]!)).toContain('on sheet 2');
+  });
+
+  it('a formula that no number from outside has confirmed is marked, and the mark explained', async () => {
+    const text = wholeText((await pagesOf(withRows(6)))[0]!);
+    expect(text).toContain('*');
+    expect(text).toContain('* not yet compared with numbers from outside the program.');
+    const checked = examined(end);
+    const all = {
+      ...checked.report,
+      checks: checked.report.checks.map((one) => ({ ...one, verified: 'hand' as const })),
+    };
+    expect(wholeText((await pagesOf({ ...checked, report: all }))[0]!)).not.toContain('*');
+  });
+});
+
+describe('any plausible end', () => {
+  it('gets a sheet whose text stays in the window and whose numbers are all finite', async () => {
+    await fc.assert(
+      fc.asyncProperty(plausibleEnd, fc.constantFrom('A4', 'Letter'), async (drawn, paper) => {
+        const found = examine({ ...endOf(drawn), mark: 'X-1', sheet: { paper } });
+        fc.pre('examined' in found);
+        if (!('examined' in found)) return;
+        const { pages } = await sheetPages(found.examined, { workings: 'all' });
+        const bottom = (paper === 'A4' ? A4 : LETTER).height - 10 + EDGE;
+        const table = pages[0]!.find((one) => one.kind === 'text' && one.text.startsWith('Check, weakest first'))!;
+        expect(table.kind === 'text' && table.y).toBeGreaterThan(60);
+        for (const mark of pages.flat()) {
+          if (mark.kind !== 'text') continue;
+          expect(Number.isFinite(mark.x) && Number.isFinite(mark.y)).toBe(true);
+          expect(mark.text).not.toMatch(/NaN|Infinity|undefined|null/);
+          const wide = mark.turned ? 0 : (mark.face.width(mark.text) * mark.size * 0.3528) / 1000;
+          expect(mark.x, mark.text).toBeGreaterThan(20 - EDGE - 1);
+          expect(mark.x + wide, mark.text).toBeLessThan(200 + EDGE);
+          expect(mark.y, mark.text).toBeLessThan(bottom);
+        }
+      }),
+      { numRuns: 40 },
+    );
+  }, 60_000);
+});

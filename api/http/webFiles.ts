@@ -1,7 +1,7 @@
 import { createHash } from 'node:crypto';
 import { readdirSync, readFileSync } from 'node:fs';
 import { extname, join, sep } from 'node:path';
-import { gzipSync } from 'node:zlib';
+import { brotliCompressSync, gzipSync } from 'node:zlib';
 import { reply } from './reply.ts';
 
 const types: Readonly<Record<string, string>> = {
@@ -26,7 +26,8 @@ interface WebFile {
   readonly bytes: Uint8Array<ArrayBuffer>;
   readonly headers: Readonly<Record<string, string>>;
   readonly type: string;
-  gzip?: Uint8Array<ArrayBuffer>;
+  /** Packed copies, each made at its first request. */
+  readonly packings: Map<string, Uint8Array<ArrayBuffer>>;
 }
 
 const load = (path: string, at: string): WebFile => {
@@ -35,6 +36,7 @@ const load = (path: string, at: string): WebFile => {
   return {
     bytes,
     type,
+    packings: new Map(),
     headers: {
       ETag: `W/"${createHash('sha256').update(bytes).digest('hex').slice(0, 16)}"`,
       'Cache-Control': hashed.test(at) ? 'public, max-age=31536000, immutable' : 'no-cache',
@@ -43,14 +45,25 @@ const load = (path: string, at: string): WebFile => {
   };
 };
 
+/** Ways of packing, the tightest first. */
+const packers = [
+  ['br', brotliCompressSync],
+  ['gzip', gzipSync],
+] as const;
+
 const answer = (file: WebFile, request: Request): Response => {
-  const { headers, type } = file;
+  const { headers, type, bytes, packings } = file;
   if (request.headers.get('if-none-match') === headers.ETag) return reply(304, null, undefined, headers);
-  if (packed.test(type) || !/\bgzip\b/.test(request.headers.get('accept-encoding') ?? '')) {
-    return reply(200, file.bytes, type, headers);
+  const taken = request.headers.get('accept-encoding') ?? '';
+  const packer = packed.test(type) ? undefined : packers.find(([name]) => new RegExp(`\\b${name}\\b`).test(taken));
+  if (!packer) return reply(200, bytes, type, headers);
+  const [name, pack] = packer;
+  let body = packings.get(name);
+  if (!body) {
+    body = new Uint8Array(pack(bytes));
+    packings.set(name, body);
   }
-  file.gzip ??= new Uint8Array(gzipSync(file.bytes));
-  return reply(200, file.gzip, type, { ...headers, 'Content-Encoding': 'gzip' });
+  return reply(200, body, type, { ...headers, 'Content-Encoding': name });
 };
 
 /**

@@ -1,7 +1,7 @@
 import { mkdirSync, mkdtempSync, rmSync, symlinkSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { gunzipSync } from 'node:zlib';
+import { brotliDecompressSync, gunzipSync } from 'node:zlib';
 import { afterAll, describe, expect, test } from 'vitest';
 import { createApp } from '../../api/app.ts';
 
@@ -42,13 +42,15 @@ describe('the built bench', () => {
     expect([response.status, await response.text()]).toEqual([304, '']);
   });
 
-  test('text is packed for those who take it so, a font is not', async () => {
-    const headers = { 'accept-encoding': 'gzip, br' };
+  test.each([
+    ['gzip, br', 'br', brotliDecompressSync],
+    ['gzip, deflate', 'gzip', gunzipSync],
+  ])('text is packed for those who take %s, a font is not', async (accepted, name, unpack) => {
+    const headers = { 'accept-encoding': accepted };
     const response = await app.request('/', { headers });
-    expect(response.headers.get('content-encoding')).toBe('gzip');
+    expect(response.headers.get('content-encoding')).toBe(name);
     expect(response.headers.get('vary')).toBe('Accept-Encoding');
-    const packed = Buffer.from(await response.arrayBuffer());
-    expect(gunzipSync(packed).toString()).toBe(page);
+    expect(unpack(Buffer.from(await response.arrayBuffer())).toString()).toBe(page);
     const font = await app.request('/assets/face-0123abcd.woff2', { headers });
     expect([font.headers.get('content-encoding'), await font.text()]).toEqual([null, 'face']);
   });

@@ -174,6 +174,5 @@ export const resolve = (
   const facts = factsOf(end, beam.section, strengths, support, options);
   const holes = holeFaults(end, facts);
   if (holes.length > 0) return { faults: holes };
-  const T = fromSystem(end.tie ?? 0, '0,1', units);
-  return { resolved: { ...beam, facts: { ...facts, T } } };
+  return { resolved: { section: beam.section, designation: beam.designation, readAs: beam.readAs, facts } };
 };

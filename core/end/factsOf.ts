@@ -1,7 +1,7 @@
 import type { Section } from '../shape/section.ts';
 import { firstMoment, type Shape, thickness, wholeShape } from '../shape/shape.ts';
 import { shearPeak } from '../shape/shearStress.ts';
-import { INCH } from '../units/systems.ts';
+import { fromSystem, INCH } from '../units/systems.ts';
 import { cutsOf } from './cuts.ts';
 import type { Facts, SupportFacts } from './facts.ts';
 import { type End, plyOf } from './schema.ts';
@@ -88,7 +88,7 @@ export const factsOf = (
   const eBot = ply.bottomEdge * k;
   return {
     V: 1,
-    T: 0,
+    T: fromSystem(end.tie ?? 0, '0,1', end.units),
     section,
     h,
     b,

@@ -1,4 +1,4 @@
-import { type Band, widthAt, widthSlope } from './band.ts';
+import { type Band, moments, widthAt, widthSlope } from './band.ts';
 import { bandsOf, firstMoment, type Shape } from './shape.ts';
 
 /** The largest elastic shear stress in the web. */
@@ -25,15 +25,24 @@ export const shearPeak = (shape: Shape): ShearPeak => {
 export const shearProfile = (shape: Shape, V: number): [y: number, tau: number][] => {
   const peak = shearPeak(shape).at;
   const points: [number, number][] = [];
+  const force = V / shape.inertia;
+  // First moment above the band: carried down from band to band, so that no level sums the bands above it again.
+  let above = 0;
   for (const it of bandsOf(shape)) {
+    const [top, bottom] = [Math.max(it.top, shape.top), Math.min(it.bottom, shape.bottom)];
     const inWeb = it.bottom > shape.webTop && it.top < shape.webBottom;
     const count = it.factor !== 0 ? 10 : inWeb ? 24 : 6;
-    for (const y of levels(it, Math.max(it.top, shape.top), Math.min(it.bottom, shape.bottom), peak, count)) {
-      const tau = (V * firstMoment(shape, y)) / (shape.inertia * widthAt(it, y));
+    let Q = above;
+    for (const y of levels(it, top, bottom, peak, count)) {
+      const part = moments(it, top, y);
+      Q = above + shape.centroid * part.area - part.first;
+      // Both edges are free: what rounding leaves there is nothing.
+      const tau = y === shape.top || y === shape.bottom ? 0 : (force * Q) / widthAt(it, y);
       const last = points.at(-1);
       const same = last !== undefined && last[0] === y && Math.abs(last[1] - tau) <= 1e-9 * Math.abs(tau);
       if (!same) points.push([y, tau]);
     }
+    above = Q;
   }
   return points;
 };

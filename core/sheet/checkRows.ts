@@ -47,15 +47,34 @@ const NAME_WIDTH = 41;
 /** Between clause and basis, mm. */
 const CLAUSE_GAP = 0.9;
 
+/** Letters of the reasons that several checks share, in the order of the rows. */
+export const sharedReasons = ({ input }: Context): ReadonlyMap<string, string> => {
+  const told = input.report.checks.filter(tellsWhy).map(({ reasonText = '' }) => reasonText);
+  const shared = [...new Set(told)].filter((one) => told.indexOf(one) !== told.lastIndexOf(one));
+  return new Map(shared.map((reason, i) => [reason, String.fromCharCode(97 + i)]));
+};
+
+/** Refers or fails for a reason in words; a rule of fit says why by its two sizes, unless it clashes. */
+const tellsWhy = ({ id, state, reason, reasonText }: Check): boolean => {
+  const bySizes = id.startsWith('fit-') && (reason === 'too-little' || reason === 'too-much');
+  return (state === 'refer' || state === 'fails') && !!reasonText && !bySizes;
+};
+
+/** Marks after a title: not compared with numbers from outside; letter of a reason that several share. */
+const marksOf = (context: Context, check: Check): string => {
+  const letter = tellsWhy(check) ? sharedReasons(context).get(check.reasonText ?? '') : undefined;
+  return `${check.verified === 'none' ? ' *' : ''}${letter ? ` (${letter})` : ''}`;
+};
+
 const nameOf = (context: Context, check: Check, governs: boolean): Lines => {
   const { pen, words } = context;
-  const mark = check.verified === 'none' ? ' *' : '';
+  const marks = marksOf(context, check);
   const lead = governs ? say.table.governs : '';
-  const full = `${lead}${titleOf(check)}${mark}`;
+  const full = `${lead}${titleOf(check)}${marks}`;
   const style: TextStyle = { ...table, bold: governs };
   if (pen.width(full, style) <= NAME_WIDTH) return [[plainRun(full)]];
   const short = words.short[check.id] ?? check.title;
-  return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${mark}`)], style, NAME_WIDTH);
+  return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${marks}`)], style, NAME_WIDTH);
 };
 
 const rowOf = (context: Context, check: Check): Row => {
@@ -70,11 +89,11 @@ const rowOf = (context: Context, check: Check): Row => {
   };
 };
 
-/** A rule of fit says why by its two sizes, unless it clashes. */
-const reasonOf = ({ pen }: Context, check: Check): Pick<CheckRow, 'beside' | 'below'> => {
-  const { id, state, reason, reasonText = '', reactionAtFailure, utilisation } = check;
-  const bySizes = id.startsWith('fit-') && (reason === 'too-little' || reason === 'too-much');
-  if ((state !== 'refer' && state !== 'fails') || !reasonText || bySizes) return { beside: null, below: [] };
+/** A reason that several share stands below the table under its letter. */
+const reasonOf = (context: Context, check: Check): Pick<CheckRow, 'beside' | 'below'> => {
+  const { reasonText = '', reactionAtFailure, utilisation } = check;
+  if (!tellsWhy(check) || sharedReasons(context).has(reasonText)) return { beside: null, below: [] };
+  const { pen } = context;
   const runs = richText(reasonText, 'prose');
   const empty = (reactionAtFailure ?? null) === null && utilisation === null;
   const fits = pen.width(runs, small) <= at.clause - BESIDE - 1;

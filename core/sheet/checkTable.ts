@@ -16,10 +16,11 @@ export const tableZone = (context: Context, rows: readonly Row[]): Zone => {
     const { pen } = context;
     drawHeader(context, y);
     let top = y + HEADER;
-    for (const row of rows) {
+    rows.forEach((row, i) => {
+      if (i > 0) pen.line(LEFT, top, LEFT + WIDTH, top, HAIR, DOTTED);
       drawRow(context, row, top);
       top += heightOf(row);
-    }
+    });
     const line = LEFT + at.bar + PER_V;
     if (context.input.report.reaction > 0 && rows.some(hasBar))
       pen.line(line, y + HEADER - 0.6, line, y + HEADER + strengthHeight(rows), WIDE);
@@ -58,10 +59,8 @@ const drawRow = (context: Context, row: Row, top: number): void => {
     return;
   }
   const bold = row.check.id === input.report.governing;
-  if (bold) pen.line(LEFT, top, LEFT + WIDTH, top, 0.35);
-  else pen.line(LEFT, top, LEFT + WIDTH, top, HAIR, DOTTED);
   drawCells(context, row, top + 3.05, bold);
-  if (bold) pen.line(LEFT, top + heightOf(row), LEFT + WIDTH, top + heightOf(row), 0.35);
+  if (bold) for (const y of [top, top + heightOf(row)]) pen.line(LEFT, y, LEFT + WIDTH, y, 0.35);
 };
 
 const drawCells = (context: Context, row: CheckRow, base: number, bold: boolean): void => {

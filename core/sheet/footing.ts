@@ -1,4 +1,5 @@
 import type { Check } from '../check/report.ts';
+import { sharedReasons } from './checkRows.ts';
 import type { Context, Zone } from './context.ts';
 import { limitText } from './fitLimit.ts';
 import { foot, LEFT, WIDTH } from './page.ts';
@@ -29,7 +30,11 @@ const fitRuns = ({ input, numbers }: Context): SetRun[] => {
     return `${items.join('; ')} (${source})`;
   });
   const mark = held.some(({ verified }) => verified === 'none') ? ' *' : '';
-  return [plainRun(say.fitHolds + mark, true), plainRun(`: ${groups.join('; ')}.`)];
+  const broken = input.report.checks.some(
+    ({ id, state }) => id.startsWith('fit-') && (state === 'fails' || state === 'refer'),
+  );
+  const lead = broken ? say.otherFitHolds : say.fitHolds;
+  return [plainRun(lead + mark, true), plainRun(`: ${groups.join('; ')}.`)];
 };
 
 /** What does not apply, each with its reason. */
@@ -44,11 +49,17 @@ const absentRuns = ({ input }: Context): SetRun[] => {
   return [plainRun(say.notApplicable, true), ...richText(`${groups.join('; ')}.`, 'prose')];
 };
 
-/** Under the table: the rules of fit that hold, and what does not apply. */
+/** Reasons that several rows share, by their letters. */
+const reasonRuns = (context: Context): SetRun[] => {
+  const reasons = [...sharedReasons(context)].map(([reason, letter]) => `(${letter}) ${reason}`);
+  return reasons.length > 0 ? [...richText(`${reasons.join('; ')}.`, 'prose')] : [];
+};
+
+/** Under the table: shared reasons, the rules of fit that hold, and what does not apply. */
 export const footingZone = (context: Context): Zone => {
   const { pen } = context;
-  const [fit, absent] = [fitRuns(context), absentRuns(context)];
-  const runs = [...fit, ...(fit.length > 0 ? [plainRun(' ')] : []), ...absent];
+  const parts = [reasonRuns(context), fitRuns(context), absentRuns(context)].filter((part) => part.length > 0);
+  const runs = parts.flatMap((part, i) => (i > 0 ? [plainRun(' '), ...part] : part));
   const lines = wrap(pen, runs, foot, WIDTH);
   return {
     height: lines.length === 0 ? 0 : 0.9 + lines.length * LEADING,

@@ -66,6 +66,7 @@ export const sheetWords = {
     governs: '→ ',
   },
   fitHolds: 'Fit holds',
+  otherFitHolds: 'Other rules of fit hold',
   clause: 'cl.',
   notApplicable: 'Not applicable: ',
   working: 'Governing working: ',
@@ -101,9 +102,11 @@ export const sheetWords = {
     `${title} governs: reaction ${reaction}, fails at ${failsAt}.`,
   governsFailing: (title: string, reaction: string, failsAt: string): string =>
     `${title} fails at ${failsAt}; the reaction is ${reaction}.`,
-  governsWithoutReaction: (title: string): string => `${title} governs.`,
+  governsWithoutReaction: (title: string, demand: string, resistance: string): string =>
+    `${title}: ${demand} against ${resistance}.`,
   failsByRule: (title: string, given: string, limit: string): string => `${title}: ${given} given, must be ${limit}.`,
-  refers: (titles: string, reason: string): string => `${titles}: ${reason}.`,
-  leastOthers: (title: string, failsAt: string): string => ` Least number: ${title}, ${failsAt}.`,
+  refers: (titles: string, reason: string): string => `${titles}: ${reason}`,
+  checks: (count: number): string => `${count} checks`,
+  leastOthers: (title: string, failsAt: string): string => ` First of the others: ${title}, at ${failsAt}.`,
   subject: 'Check of one beam end',
 } as const;

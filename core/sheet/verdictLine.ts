@@ -20,6 +20,18 @@ export const governingOf = ({ input }: Context): Check | undefined =>
 
 export const titleOf = ({ title, ofText }: Check): string => (ofText ? `${title}, ${ofText}` : title);
 
+/** What refers and why: by name where one or two do for the same reason, else by their number. */
+const refersText = (checks: readonly Check[]): string => {
+  const refers = checks.filter(({ state }) => state === 'refer');
+  const reasons = [...new Set(refers.map(({ reasonText = '' }) => reasonText))];
+  return reasons
+    .map((reason) => {
+      const titles = refers.filter(({ reasonText = '' }) => reasonText === reason).map(titleOf);
+      return say.refers(titles.length > 2 ? say.checks(titles.length) : titles.join(', '), reason);
+    })
+    .join('; ');
+};
+
 /** What decides, in one sentence. */
 const sentence = (context: Context): string => {
   const { input, numbers } = context;
@@ -28,11 +40,9 @@ const sentence = (context: Context): string => {
   const load = (text: string): string => `${text} ${numbers.force}`;
   const reaction = load(numbers.load(report.reaction));
   if (report.verdict === 'refer') {
-    const refers = report.checks.filter(({ state }) => state === 'refer');
-    const reasons = [...new Set(refers.map(({ reasonText }) => reasonText ?? ''))].join('; ');
     const least = governing && governing.state !== 'refer' && governing.reactionAtFailure;
     const others = least ? say.leastOthers(titleOf(governing), load(numbers.failsAt(least))) : '';
-    return say.refers(refers.map(titleOf).join(', '), reasons) + others;
+    return `${refersText(report.checks)}.${others}`;
   }
   if (!governing) return '';
   const title = titleOf(governing);
@@ -42,7 +52,10 @@ const sentence = (context: Context): string => {
     return say.failsByRule(title, given, `${limitText(numbers, governing)} ${unit}`);
   }
   const at = governing.reactionAtFailure;
-  if (at === undefined || at === null) return say.governsWithoutReaction(title);
+  if (at === undefined || at === null) {
+    const amount = (value: number | null): string => `${numbers.amount(value, governing.unit)} ${governing.unit}`;
+    return say.governsWithoutReaction(title, amount(governing.demand), amount(governing.resistance));
+  }
   const failsAt = load(numbers.failsAt(at));
   return report.verdict === 'fails'
     ? say.governsFailing(title, reaction, failsAt)

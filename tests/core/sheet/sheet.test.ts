@@ -125,6 +125,20 @@ describe('the verdict on paper', () => {
     expect(text).toMatch(/Fit, not held limit given .*Plate edge, free edge ≥ 34 25 mm 1\.36/);
   });
 
+  it('of an end with several checks that refer for one reason tells it once, by a letter at each row', async () => {
+    const text = await firstPage({ ...end, reaction: 90, top: { length: 50, depth: 45, radius: 10 } });
+    expect(text).toContain('5 checks: a hole cuts the face of the notch');
+    expect(text).toContain('First of the others: Bolt shear, at 170.0 kN.');
+    expect(text.match(/ \(a\)/g)?.length).toBe(6);
+    expect(text).toContain('(a) a hole cuts the face of the notch.');
+    expect(text).toContain('Other rules of fit hold');
+  });
+
+  it('of an end that fails by its tie force gives force and resistance', async () => {
+    const text = await firstPage({ ...end, reaction: 20, tie: 500 });
+    expect(text).toMatch(/FAILS \d\.\d\d Tie force, acting alone, bolts: 500\.0 kN against \d+\.\d kN\./);
+  });
+
   it('stands without a reaction too', async () => {
     const text = await firstPage({ ...end, reaction: 0 });
     expect(text).toContain('HOLDS 0.00 Bolt shear governs: reaction 0 kN, fails at 170.0 kN.');

@@ -135,6 +135,7 @@ export class Pen {
   }
 
   private covered(text: string, face: Face): string {
+    if (face.covers(text)) return text;
     return [...text].map((one) => (face.has(one) ? one : UNKNOWN)).join('');
   }
 

@@ -2,6 +2,8 @@
 export interface Face {
   readonly name: string;
   has(character: string): boolean;
+  /** True where the face has every character of the text. */
+  covers(text: string): boolean;
   /** Width of a line, in thousandths of the type size; characters that the face lacks count as the empty square that stands for them. */
   width(text: string): number;
   glyph(character: string): Glyph;
@@ -73,6 +75,10 @@ export const openFace = (name: string, file: Uint8Array): Face => {
     name,
     table,
     has: (character) => glyphs.has(character.codePointAt(0)!),
+    covers: (text) => {
+      for (let i = 0; i < text.length; i += 1) if (!advances.has(text.charCodeAt(i))) return false;
+      return true;
+    },
     width: (text) => {
       let sum = 0;
       for (let i = 0; i < text.length; i += 1) sum += advances.get(text.charCodeAt(i)) ?? unknown;

@@ -71,10 +71,12 @@ const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void
     return;
   }
   into.resistance = plan.resistance(facts as never);
-  if (plan.unbounded?.(facts as never)) {
-    into.reactionAtFailure = 0;
+  const noMoment = plan.unbounded?.(facts as never) ?? false;
+  if (noMoment || !(into.resistance > 0)) {
     into.state = 'fails';
-    into.reason = 'one-bolt';
+    into.reason = noMoment ? 'one-bolt' : 'nothing-left';
+    into.utilisation = Number.POSITIVE_INFINITY;
+    if (plan.load === 'V') into.reactionAtFailure = 0;
     return;
   }
   const demand = plan.demand(facts as never);
@@ -103,8 +105,14 @@ const evaluateStrength = (plan: StrengthPlan, facts: Facts, V: number): Result =
     result.reason = plan.noRule;
     return result;
   }
-  for (let at = 0; at < plan.ways.length; at += 1) {
-    evaluateWay(plan.ways[at]!, facts, V, trial);
+  const { ways } = plan;
+  if (ways.length === 1) {
+    evaluateWay(ways[0]!, facts, V, result);
+    if (result.state !== 'notApplicable') result.way = 0;
+    return result;
+  }
+  for (let at = 0; at < ways.length; at += 1) {
+    evaluateWay(ways[at]!, facts, V, trial);
     take(result, trial, at);
   }
   return result;
@@ -230,8 +238,10 @@ const worstWithoutV = (...lists: readonly (readonly Result[])[]): Result | undef
 export const evaluate = (plan: Plan, facts: Facts, V: number): Evaluation => {
   facts.V = 1;
   newRun();
-  const strength = plan.strength.map((one) => evaluateStrength(one, facts, V));
-  const fit = plan.fit.map((one) => evaluateFit(one, facts));
+  const strength: Result[] = [];
+  for (let at = 0; at < plan.strength.length; at += 1) strength.push(evaluateStrength(plan.strength[at]!, facts, V));
+  const fit: Result[] = [];
+  for (let at = 0; at < plan.fit.length; at += 1) fit.push(evaluateFit(plan.fit[at]!, facts));
   facts.V = V;
   const first = firstUsedUp(strength);
   return {

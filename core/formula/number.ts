@@ -4,11 +4,14 @@ import type { Condition, Tree } from './tree.ts';
 export type NumberReader = (facts: never) => number;
 type Test = (facts: never) => boolean;
 
-/** Steps are computed once a run, however many checks lean on them. */
-let run = 0;
-let ranAt = new Int32Array(1024);
-let kept = new Float64Array(1024);
+/** Most steps that all standards and joints together may have. */
+const CELLS = 1 << 14;
+
+/** Steps are computed once a run, however many checks lean on them: the run in which each was computed, and its value. */
+const ranAt = new Int32Array(CELLS);
+const kept = new Float64Array(CELLS);
 let cells = 0;
+let run = 0;
 
 /** Starts a run over new facts: what the last run kept is forgotten. */
 export const newRun = (): void => {
@@ -16,14 +19,7 @@ export const newRun = (): void => {
 };
 
 const newCell = (): number => {
-  if (cells === kept.length) {
-    const wider = new Float64Array(cells * 2);
-    wider.set(kept);
-    kept = wider;
-    const longer = new Int32Array(cells * 2);
-    longer.set(ranAt);
-    ranAt = longer;
-  }
+  if (cells === CELLS) throw new RangeError('more steps than there are cells');
   cells += 1;
   return cells - 1;
 };

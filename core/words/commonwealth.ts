@@ -86,6 +86,7 @@ export const commonwealth: Words = {
     'cope-deeper-than-method': 'the notch is deeper than the method covers',
     'weld-leg-below-least': 'the weld leg is below the least for this thickness',
     'one-bolt': 'one bolt alone holds no moment',
+    'nothing-left': 'the holes leave nothing to resist it',
     'too-little': 'less than required',
     'too-much': 'more than allowed',
     clash: 'cannot be built: it clashes with the supporting flange',

@@ -62,6 +62,20 @@ describe('states of the rules file', () => {
     expect(report.capacity).toBe(0);
   });
 
+  test('holes that leave nothing fail at any reaction, even at none', () => {
+    const end = good('example') as { reaction: number; joint: { firstRow: number; bolts: Record<string, unknown> } };
+    end.reaction = 0;
+    end.joint.firstRow = 57;
+    Object.assign(end.joint.bolts, { holes: 'punched', columns: 2, gauge: 23, pitch: 23 });
+    const report = reportOf(end);
+    expect(check(report, 'web-tearout')).toMatchObject({
+      state: 'fails',
+      reason: 'nothing-left',
+      reactionAtFailure: 0,
+    });
+    expect(report).toMatchObject({ verdict: 'fails', capacity: 0 });
+  });
+
   test('a bottom cope alone has its cut edge in tension: no buckling', () => {
     expect(check(reportOf(good('bottom-cope')), 'cope-buckling')).toMatchObject({
       state: 'notApplicable',

@@ -3,9 +3,10 @@ import type { WorkingRow } from '../formula/working.ts';
 import { isNoRule } from '../standards/standard.ts';
 import { toSystem, type UnitSystem, unitOf } from '../units/systems.ts';
 import type { Words } from '../words/words.ts';
-import type { Evaluation, Result } from './evaluate.ts';
+import type { Evaluation } from './evaluate.ts';
 import type { FitPlan, Plan, StrengthPlan } from './plan.ts';
 import type { Check } from './report.ts';
+import type { Result } from './result.ts';
 
 interface Context {
   readonly plan: Plan;

@@ -1,0 +1,61 @@
+import type { Facts } from '../end/facts.ts';
+import type { FitPartPlan, FitPlan } from './plan.ts';
+import { blank, firstMet, type Result, severity } from './result.ts';
+
+const trial = blank('fit-pitch');
+
+/** What is needed over what is there; no room at all where something is needed uses it up without bound. */
+const used = (needed: number, there: number): number => {
+  if (there > 0) return needed / there;
+  return needed > 0 ? Number.POSITIVE_INFINITY : 0;
+};
+
+/** Sizes that meet a bound exactly keep meeting it after conversion from inches. */
+const CONVERSION_NOISE = 1e-9;
+
+/** One comparison: the nearer of its bounds stands as the requirement. */
+const evaluateFitPart = (part: FitPartPlan, breach: 'fails' | 'refer', facts: Facts, into: Result): void => {
+  const given = part.given(facts as never);
+  const toLeast = part.least ? used(part.least(facts as never), given) : Number.NEGATIVE_INFINITY;
+  const toMost = part.most ? used(given, part.most(facts as never)) : Number.NEGATIVE_INFINITY;
+  const low = toLeast >= toMost;
+  const clash = part.clash?.(facts as never) ?? false;
+  into.resistance = given;
+  into.demand = (low ? part.least : part.most)?.(facts as never) ?? Number.NaN;
+  into.utilisation = low ? toLeast : toMost;
+  if (into.utilisation <= 1 + CONVERSION_NOISE) {
+    into.state = 'holds';
+    into.reason = '';
+  } else {
+    into.state = clash ? 'fails' : breach;
+    into.reason = clash ? 'clash' : low ? 'too-little' : 'too-much';
+  }
+};
+
+/** The worst state of the parts of one rule of geometry, with the part that is nearest to its bound. */
+export const evaluateFit = (plan: FitPlan, facts: Facts): Result => {
+  const result = blank(plan.id);
+  if (plan.noRule) {
+    result.reason = plan.noRule;
+    return result;
+  }
+  for (let at = 0; at < plan.parts.length; at += 1) {
+    const part = plan.parts[at]!;
+    const off = firstMet(part.off, facts);
+    if (off) {
+      if (result.way < 0) result.reason = off.reason;
+      continue;
+    }
+    evaluateFitPart(part, plan.breach, facts, trial);
+    const worse = severity[trial.state] - severity[result.state];
+    if (result.way < 0 || worse > 0 || (worse === 0 && trial.utilisation > result.utilisation)) {
+      result.way = at;
+      result.state = trial.state;
+      result.reason = trial.reason;
+      result.demand = trial.demand;
+      result.resistance = trial.resistance;
+      result.utilisation = trial.utilisation;
+    }
+  }
+  return result;
+};

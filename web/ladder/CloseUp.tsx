@@ -1,4 +1,5 @@
 import type { Check } from '../../core/check/report.ts';
+import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import { type Axis, closeUpOf } from './axis.ts';
 import { Bar } from './Bar.tsx';
 import { Scale } from './Scale.tsx';
@@ -27,7 +28,7 @@ export const CloseUp = ({ weakest, reaction, force }: Props) => {
         <b>
           {spare.amount} {force}
         </b>{' '}
-        {spare.short ? 'short' : 'to spare'}
+        {spare.short ? say.short : say.toSpare}
       </span>
       <span class="close-up-scale" aria-hidden="true">
         <Scale axis={axis} />

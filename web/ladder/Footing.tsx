@@ -1,5 +1,7 @@
 import type { Check } from '../../core/check/report.ts';
 import { unitOf } from '../../core/units/systems.ts';
+import { stateWords } from '../../core/words/stateWords.ts';
+import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import { chosen } from '../state/bench.ts';
 import { Heading } from './Heading.tsx';
 import { NotApplicable } from './NotApplicable.tsx';
@@ -7,7 +9,7 @@ import { RichText } from './RichText.tsx';
 import { rungsOf } from './rungs.ts';
 import { Sign } from './Sign.tsx';
 import { shown, stale, words } from './shown.ts';
-import { markOf, stateWord } from './standing.ts';
+import { markOf } from './standing.ts';
 import { onRungKey, reached, touch } from './touch.ts';
 import { isMost, size } from './usedUp.ts';
 import { Working } from './Working.tsx';
@@ -59,12 +61,12 @@ const Rule = ({ check, first }: { check: Check; first: boolean }) => {
           {title}
           {ofText && <span class="rule-of">, {ofText}</span>}
         </span>
-        <span class="unseen">{`, ${stateWord(state)}${mark === 'close' ? ', close' : ''}: `}</span>
+        <span class="unseen">{`, ${stateWords[state]}${mark === 'close' ? ', close' : ''}: `}</span>
         <Sizes check={check} />
       </button>
       {breach && reasonText && !open && (
         <p class="rule-reason">
-          <b>{state === 'fails' ? 'FAILS' : 'REFER'}</b> <RichText text={reasonText} />
+          <b>{say.verdict[state === 'fails' ? 'fails' : 'refer']}</b> <RichText text={reasonText} />
           <span>; {sourceOf(check)}</span>
         </p>
       )}

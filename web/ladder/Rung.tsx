@@ -1,5 +1,7 @@
 import type { Check } from '../../core/check/report.ts';
 import { plain, roundedDown } from '../../core/units/figures.ts';
+import { stateWords } from '../../core/words/stateWords.ts';
+import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import { chosen } from '../state/bench.ts';
 import type { Axis } from './axis.ts';
 import { Bar } from './Bar.tsx';
@@ -7,7 +9,7 @@ import { RichText } from './RichText.tsx';
 import { shortName } from './rungs.ts';
 import { Sign } from './Sign.tsx';
 import { words } from './shown.ts';
-import { markOf, ratioText, stateWord } from './standing.ts';
+import { markOf, ratioText } from './standing.ts';
 import { reached, touch } from './touch.ts';
 import { Working } from './Working.tsx';
 
@@ -43,7 +45,7 @@ export const Rung = ({ check, axis, force, weakest = false, first }: Props) => {
         <Sign mark={mark} />
         <span class="rung-name">{shortName(check, words.value)}</span>
         <span class="unseen">
-          {`, ${stateWord(check.state)}${mark === 'close' ? ', close' : ''}${weakest ? ', the weakest' : ''}; `}
+          {`, ${stateWords[check.state]}${mark === 'close' ? ', close' : ''}${weakest ? ', the weakest' : ''}; `}
         </span>
         <Measure check={check} axis={axis} force={force} />
       </button>
@@ -59,7 +61,7 @@ const Measure = ({ check, axis, force }: Pick<Props, 'check' | 'axis' | 'force'>
   if (at === null && check.utilisation === null) {
     return (
       <span class="rung-reason">
-        <RichText text={check.reasonText ?? 'no number by this method'} />
+        <RichText text={check.reasonText ?? say.noNumber} />
       </span>
     );
   }

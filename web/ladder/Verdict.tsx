@@ -17,7 +17,7 @@ export const Verdict = () => {
           </p>
           <p class="verdict-first">
             <span>
-              <RichText text={verdict.first} />
+              <RichText text={verdict.lead + verdict.first} />
             </span>
             {verdict.close && <span class="verdict-close">close</span>}
           </p>

@@ -17,7 +17,7 @@ export const VerdictStrip = () => {
         {verdict.word} {verdict.ratio}
       </b>
       <span>
-        <RichText text={verdict.first.replace(/^Weakest: /, '')} />
+        <RichText text={verdict.first} />
       </span>
       {verdict.others && (
         <small>

@@ -1,14 +1,15 @@
 import type { Check } from '../../core/check/report.ts';
 import { roundedDown } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
+import { stateWords } from '../../core/words/stateWords.ts';
+import { verifiedWords } from '../../core/words/verifiedWords.ts';
 import { inUse } from './inUse.ts';
 import { RichText } from './RichText.tsx';
 import { fullName, isFooting } from './rungs.ts';
 import { Sign } from './Sign.tsx';
 import { shown, words } from './shown.ts';
-import { markOf, stateWord } from './standing.ts';
+import { markOf } from './standing.ts';
 import { usedUp } from './usedUp.ts';
-import { verifiedText } from './verifiedText.ts';
 import { cited, type WorkingLine, workingLines } from './workingLines.ts';
 
 interface Props {
@@ -27,7 +28,7 @@ export const Working = ({ check, labelledBy }: Props) => (
     </p>
     {check.reasonText && (
       <p class="working-reason">
-        {stateWord(check.state)}: <RichText text={check.reasonText} />
+        {stateWords[check.state]}: <RichText text={check.reasonText} />
       </p>
     )}
     <ol class="working-lines">{workingLines(check).map(lineRow)}</ol>
@@ -130,7 +131,7 @@ const Leaning = ({ check }: { check: Check }) => {
       )}
       <p>
         {basis && `${check.basis}: ${basis}; `}
-        {verifiedText[check.verified]}
+        {verifiedWords[check.verified]}
       </p>
     </div>
   );

@@ -1,4 +1,5 @@
 import { fixed } from '../../core/units/figures.ts';
+import { verdictWords as say } from '../../core/words/verdictWords.ts';
 
 /** What the reaction may still grow by, rounded down, or by how much it is too large, rounded up. */
 export interface Spare {
@@ -17,5 +18,5 @@ export const spareOf = (reaction: number, failsAt: number): Spare => {
 /** The same in words. */
 export const spareText = (reaction: number, failsAt: number, force: string): string => {
   const { short, amount } = spareOf(reaction, failsAt);
-  return `${amount} ${force} ${short ? 'short' : 'to spare'}`;
+  return `${amount} ${force} ${short ? say.short : say.toSpare}`;
 };

@@ -1,4 +1,4 @@
-import type { Check, State } from '../../core/check/report.ts';
+import type { Check } from '../../core/check/report.ts';
 import { isClose } from '../../core/sheet/sign.ts';
 import { ratio } from '../../core/units/figures.ts';
 
@@ -17,22 +17,6 @@ export const markOf = ({ state, utilisation }: Judged): Mark | null => {
       return state;
     default:
       return null;
-  }
-};
-
-/** The word of a state, as it is read out. */
-export const stateWord = (state: State): string => {
-  switch (state) {
-    case 'holds':
-      return 'holds';
-    case 'fails':
-      return 'fails';
-    case 'refer':
-      return 'refers';
-    case 'information':
-      return 'for information';
-    case 'notApplicable':
-      return 'not applicable';
   }
 };
 

@@ -13,7 +13,7 @@ export const verdictShown = computed<VerdictLine | null>(() => {
 export const verdictSaid = computed<string>(() => {
   const verdict = verdictShown.value;
   if (!verdict) return '';
-  return [`${verdict.word} ${verdict.ratio}`.trim(), verdict.first, verdict.spare, verdict.others]
+  return [`${verdict.word} ${verdict.ratio}`.trim(), verdict.lead + verdict.first, verdict.spare, verdict.others]
     .filter(Boolean)
     .join('. ');
 });

@@ -1,8 +1,8 @@
+import { optionName, optionValue } from '../../core/words/optionWords.ts';
 import { type AssumedValue, assumedValues } from '../state/assumedValues.ts';
 import { entry, lastGood, standard } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { FieldLink } from './FieldLink.tsx';
-import { optionName, optionValue } from './optionWords.ts';
 
 const bare = (text: string): string => text.replace(/ \(assumed\)\.?$/, '').replace(/\.$/, '');
 

@@ -1,9 +1,9 @@
 import { standards } from '../../core/standards/index.ts';
+import { optionName, optionValue } from '../../core/words/optionWords.ts';
 import { Choice } from '../field/Choice.tsx';
 import { entry, standard } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { OrderLine } from './OrderLine.tsx';
-import { optionName, optionValue } from './optionWords.ts';
 import { Value } from './Value.tsx';
 
 const titled = Object.values(standards).map(({ id, title, edition }) => ({ value: id, label: `${title}:${edition}` }));

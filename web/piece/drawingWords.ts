@@ -1,7 +1,7 @@
 import type { Examined } from '../../core/check/examine.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
 import { standards } from '../../core/standards/index.ts';
-import type { Words } from '../../core/words/words.ts';
+import { fieldName, type Words } from '../../core/words/words.ts';
 
 /** What the drawing of an end writes beside its sizes. */
 export const drawingWords = ({ end, designation, report }: Examined, words: Words): DrawingWords => {
@@ -13,6 +13,6 @@ export const drawingWords = ({ end, designation, report }: Examined, words: Word
     boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
     holes: bolts.holes ?? standards[report.standard.id]?.materials.holesAssumed ?? '',
     cope: words.cope,
-    plate: kind === 'fin-plate' ? 'fin plate' : 'ply',
+    plate: fieldName(words, kind === 'fin-plate' ? 'joint.plate' : 'joint.ply'),
   };
 };

@@ -6,11 +6,11 @@ import { standards } from '../../core/standards/index.ts';
 import type { Standard } from '../../core/standards/standard.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
 import { commonwealth } from '../../core/words/commonwealth.ts';
+import { faultSentences } from '../../core/words/faults.ts';
 import { faultText, type Words } from '../../core/words/words.ts';
 import { endOf } from './endOf.ts';
 import { type Entry, emptyEntry, textOf } from './entry.ts';
 import { filledFrom } from './filledFrom.ts';
-import { sentences } from './misreadSentences.ts';
 import { newTimeline, type Timeline } from './timeline.ts';
 import { inTradeOrder } from './tradeOrder.ts';
 
@@ -58,7 +58,7 @@ export const examination = computed<Examination>(() => {
   const { input: end, faults: misread } = input.value;
   const found = examine(end);
   if (misread.length === 0 && 'examined' in found) return found;
-  const unread = misread.map((one) => ({ ...one, text: faultText(words.value, sentences, one) }));
+  const unread = misread.map((one) => ({ ...one, text: faultText(words.value, faultSentences, one) }));
   const known = new Set(unread.map(({ path }) => path));
   const others = 'faults' in found ? found.faults.filter(({ path }) => !known.has(path)) : [];
   const gaps = [...unread, ...others.filter(({ code }) => code === 'missing')].map(({ path }) => path);

@@ -3,8 +3,8 @@ import { fault } from '../../core/end/fault.ts';
 import { readEnd } from '../../core/end/readEnd.ts';
 import type { End } from '../../core/end/schema.ts';
 import { commonwealth } from '../../core/words/commonwealth.ts';
+import { faultSentences } from '../../core/words/faults.ts';
 import { faultText } from '../../core/words/words.ts';
-import { sentences } from './misreadSentences.ts';
 
 /** No end is longer than this, bytes; a PDF is larger, for its faces. */
 export const MOST_JSON = 64 * 1024;
@@ -14,7 +14,7 @@ export const MOST_PDF = 4 * 1024 * 1024;
 export type Opened = { readonly end: End } | { readonly refused: readonly string[] };
 
 const refusal = (code: string, given: unknown, limit: unknown): Opened => ({
-  refused: [faultText(commonwealth, sentences, fault(code, '', given, limit))],
+  refused: [faultText(commonwealth, faultSentences, fault(code, '', given, limit))],
 });
 
 /** Reads an end from parsed JSON. */
@@ -50,7 +50,9 @@ export const openedFile = async (bytes: Uint8Array): Promise<Opened> => {
 export const openedLink = async (text: string): Promise<Opened> => {
   const { decodeLink } = await import('../../core/exchange/link.ts');
   const found = decodeLink(text);
-  return 'fault' in found ? { refused: [faultText(commonwealth, sentences, found.fault)] } : openedFrom(found.input);
+  return 'fault' in found
+    ? { refused: [faultText(commonwealth, faultSentences, found.fault)] }
+    : openedFrom(found.input);
 };
 
 /** Whether the part of an address behind its `#` is meant as the link of an end. */

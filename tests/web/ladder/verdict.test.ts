@@ -11,7 +11,8 @@ describe('verdict line', () => {
       word: 'HOLDS',
       ratio: '0.97',
       close: true,
-      first: 'Weakest: bolt shear, fails at 170.0 kN',
+      lead: 'Weakest: ',
+      first: 'bolt shear, fails at 170.0 kN',
       spare: '5.0 kN to spare',
       others: '',
     });
@@ -23,15 +24,21 @@ describe('verdict line', () => {
     expect(line.others).toBe('Also fails: bearing on the web, weld.');
   });
 
-  test('a footing rule that refers is named, though its reason stands in the footing', () => {
+  test('one or two that refer for a reason are named with it, and the number stays: what is weakest and by how much', () => {
     const line = verdictLine(demo({ setback: 25, reaction: 100 }).report);
     expect(line).toMatchObject({ mark: 'refer', word: 'REFER' });
-    expect(line.others).toBe('Refers: setback.');
+    expect(Number(line.ratio)).toBeGreaterThan(0);
+    expect(line.first).toMatch(/^bolt shear, fails at [\d.]+ kN$/);
+    expect(line.others).toBe('Refers: setback (more than allowed).');
   });
 
-  test('ways of failing that refer are named with their reason, said once', () => {
-    const line = verdictLine(demo({ top: { length: 110, depth: 10, radius: 5 } }).report);
-    expect(line.others.match(/the notch is shallower than the flange/g)).toHaveLength(1);
+  test('more than two that refer for a reason are counted, and the reason is said once, as on the sheet', () => {
+    const { report } = demo({ top: { length: 110, depth: 10, radius: 5 } });
+    const reason = 'the notch is shallower than the flange';
+    const count = report.checks.filter((one) => one.state === 'refer' && one.reasonText === reason).length;
+    expect(count).toBeGreaterThan(2);
+    expect(verdictLine(report).others).toContain(`${count} checks (${reason})`);
+    expect(verdictLine(report).others.match(new RegExp(reason, 'g'))).toHaveLength(1);
   });
 
   test('a rule that cannot be built fails the end even where every bar passes the line', () => {

@@ -4,9 +4,10 @@ import { examine } from '../../../core/check/examine.ts';
 import type { Check } from '../../../core/check/report.ts';
 import { RESULT_FIGURES, STEP_FIGURES } from '../../../core/formula/line.ts';
 import { significant } from '../../../core/units/figures.ts';
+import { verifiedWords } from '../../../core/words/verifiedWords.ts';
 import { inUse } from '../../../web/ladder/inUse.ts';
 import { isMost, usedUp } from '../../../web/ladder/usedUp.ts';
-import { verifiedText } from '../../../web/ladder/verifiedText.ts';
+
 import { cited, workingLines } from '../../../web/ladder/workingLines.ts';
 import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
 import { calculate } from '../../support/calculator.ts';
@@ -77,7 +78,7 @@ describe('lines of a working', () => {
   });
 
   test('a formula that no outside number checks says so', () => {
-    expect(verifiedText.none).toBe('no outside number checks this formula');
-    expect(new Set(Object.values(verifiedText)).size).toBe(4);
+    expect(verifiedWords.none).toBe('no outside number checks this formula');
+    expect(new Set(Object.values(verifiedWords)).size).toBe(4);
   });
 });

@@ -1,5 +1,5 @@
-/** Plain words for the options of standards and their values. */
-export const optionWords: Readonly<Record<string, string>> = {
+/** Plain words for the options of standards and their values. The same in every region. */
+const optionWords: Readonly<Record<string, string>> = {
   'elastic-shear': 'Elastic shear stress',
   'bolt-group': 'Bolt group',
   'cope-shear': 'Shear at the cut',
@@ -26,5 +26,7 @@ export const optionWords: Readonly<Record<string, string>> = {
 const spaced = (key: string): string => key.replace(/-/g, ' ');
 const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
+/** Name of an option, as it begins a line. */
 export const optionName = (key: string): string => optionWords[key] ?? capital(spaced(key));
+/** A value of an option, within a line. */
 export const optionValue = (value: string): string => optionWords[value] ?? spaced(value);

@@ -1,5 +1,4 @@
 import type { Source, Tree } from '../formula/tree.ts';
-import type { WorkingRow } from '../formula/working.ts';
 import { isNoRule } from '../standards/standard.ts';
 import { toSystem, type UnitSystem, unitOf } from '../units/systems.ts';
 import type { Words } from '../words/words.ts';
@@ -12,8 +11,6 @@ interface Context {
   readonly plan: Plan;
   readonly units: UnitSystem;
   readonly words: Words;
-  /** Writes workings; absent where none are asked for. */
-  readonly write?: (trees: readonly Tree[]) => WorkingRow[];
 }
 
 /** Nothing that is not finite leaves the program. */
@@ -69,10 +66,6 @@ const strengthCheck = (context: Context, plan: StrengthPlan, result: Result): Ch
   check.demand = stated(result.demand, way.demand, units);
   check.resistance = stated(result.resistance, way.resistance, units);
   if (way.load === 'V') check.reactionAtFailure = finite(toSystem(result.reactionAtFailure, '0,1', units));
-  if (context.write) {
-    const trees = Number.isNaN(result.demand) ? [way.resistance] : [way.demand, way.resistance];
-    check.working = Number.isNaN(result.resistance) ? [] : context.write(trees);
-  }
   return check;
 };
 
@@ -85,9 +78,6 @@ const fitCheck = (context: Context, plan: FitPlan, result: Result): Check => {
   if (!part) return check;
   check.demand = stated(result.demand, part.given, units);
   check.resistance = stated(result.resistance, part.given, units);
-  if (context.write) {
-    check.working = context.write([part.given, part.least, part.most].filter((one) => one !== undefined));
-  }
   return check;
 };
 

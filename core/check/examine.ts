@@ -1,121 +1,15 @@
-import type { Facts } from '../end/facts.ts';
-import { type Fault, fault } from '../end/fault.ts';
-import { readEnd } from '../end/readEnd.ts';
-import { type End, plyOf } from '../end/schema.ts';
-import { testOf } from '../formula/number.ts';
-import { workingsOf } from '../formula/working.ts';
-import { standards } from '../standards/index.ts';
-import type { Standard } from '../standards/standard.ts';
-import { findGrade } from '../steel/grades.ts';
-import { nearest } from '../steel/nearest.ts';
-import { plain } from '../units/figures.ts';
-import { fromSystem, toSystem, unitOf } from '../units/systems.ts';
-import { commonwealth } from '../words/commonwealth.ts';
-import { faultSentences } from '../words/faults.ts';
-import { faultText, filled, type Words } from '../words/words.ts';
-import { assumptionsOf } from './assumptions.ts';
-import { checksOf } from './checks.ts';
-import { type Evaluation, evaluate } from './evaluate.ts';
-import { fingerprintOf } from './fingerprint.ts';
-import { type Plan, planOf } from './plan.ts';
-import type { Note, Report, SaidFault } from './report.ts';
-import { type Resolved, resolve } from './resolve.ts';
-import { sectionStresses } from './sectionStresses.ts';
-import { VERSION } from './version.ts';
+import { complete } from './complete.ts';
+import type { Examination } from './examined.ts';
+import { examineNumbers } from './examineNumbers.ts';
 
-/** An end looked at in full: what was written, what is known of it, and what the standard says. */
-export interface Examined {
-  readonly end: End;
-  readonly facts: Facts;
-  /** Designation of the section; empty for own sizes. */
-  readonly designation: string;
-  readonly report: Report;
-}
+export type { Examination, Examined } from './examined.ts';
+export { said, wordsOf } from './examineNumbers.ts';
 
-export type Examination = { readonly examined: Examined } | { readonly faults: readonly SaidFault[] };
-
-/** Words in which a standard's market speaks. */
-export const wordsOf = (_standard: Standard): Words => commonwealth;
-
-export const said = (faults: readonly Fault[], words: Words = commonwealth): { faults: SaidFault[] } => ({
-  faults: faults.map((one) => ({ ...one, text: faultText(words, faultSentences, one) })),
-});
-
-/** Reaction at which the full section fails in shear, N. */
-const grossShearOf = (evaluation: Evaluation): number =>
-  evaluation.strength.find(({ id }) => id === 'web-gross-shear')!.reactionAtFailure;
-
-/** The reaction as given, or what a share of the full section's shear comes to. N */
-const reactionOf = ({ reaction, units }: End, plan: Plan, facts: Facts): number =>
-  typeof reaction === 'number'
-    ? fromSystem(reaction, '0,1', units)
-    : reaction.ofWebShear * grossShearOf(evaluate(plan, facts, 0));
-
-const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Words): Note[] => {
-  const notes: Note[] = [];
-  const say = (code: string, values: Record<string, unknown> = {}, path?: string) =>
-    notes.push({ code, text: filled(words.notes[code] ?? code, values), ...(path && { path }) });
-  if (typeof end.reaction !== 'number') {
-    const value = `${plain(toSystem(V, '0,1', end.units), 1)} ${unitOf('0,1', end.units).name}`;
-    say('reaction-from-share', { share: plain(end.reaction.ofWebShear, 4), value }, 'reaction');
-  }
-  if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
-  for (const grade of new Set([end.beam.grade, plyOf(end.joint).grade])) {
-    if (typeof grade !== 'string') continue;
-    const found = findGrade(grade);
-    if ('basis' in found && found.basis === 'memory') say('memory-grade', { value: found.name });
-  }
-  for (const { code, when } of plan.standard.notes) if (testOf(when)(resolved.facts as never)) say(code);
-  return notes;
-};
-
-const reportOf = (end: End, plan: Plan, resolved: Resolved, working: boolean): Report => {
-  const { standard } = plan;
-  const { facts } = resolved;
-  const words = wordsOf(standard);
-  const V = reactionOf(end, plan, facts);
-  const evaluation = evaluate(plan, facts, V);
-  const kN = (newtons: number) => toSystem(newtons, '0,1', end.units);
-  return {
-    mark: end.mark ?? '',
-    standard: { id: standard.id, title: standard.title, edition: standard.edition },
-    level: standard.level,
-    units: end.units,
-    verdict: evaluation.verdict,
-    governing: evaluation.governing.id,
-    reaction: kN(V),
-    capacity: Number.isFinite(evaluation.capacity) ? kN(evaluation.capacity) : null,
-    shareOfWebShear: V / grossShearOf(evaluation),
-    checks: checksOf(
-      { plan, units: end.units, words, ...(working && { write: workingsOf(facts, end.units) }) },
-      evaluation,
-    ),
-    shape: { sections: sectionStresses(facts, end.units) },
-    assumptions: assumptionsOf(end, standard, facts.channel, words),
-    notes: notesOf(end, plan, resolved, V, words),
-    options: facts.options,
-    version: VERSION,
-    fingerprint: fingerprintOf(end, standard),
-  };
-};
-
-/** Checks an end in full. Never throws for what a user wrote: what cannot be computed comes back as faults. */
+/**
+ * Checks an end in full; `working` adds the working of every check. Never throws for what a user wrote: what cannot be computed comes back
+ * as faults.
+ */
 export const examine = (input: unknown, { working = true } = {}): Examination => {
-  const read = readEnd(input);
-  if ('faults' in read) return said(read.faults);
-  const { end } = read;
-  const standard = Object.hasOwn(standards, end.standard) ? standards[end.standard] : undefined;
-  if (!standard) {
-    return said([
-      fault('unknown-standard', 'standard', end.standard, nearest(end.standard, Object.keys(standards), 3)),
-    ]);
-  }
-  const found = resolve(end, standard);
-  if ('faults' in found) return said(found.faults, wordsOf(standard));
-  const { resolved } = found;
-  const report = reportOf(end, planOf(standard, end.joint.kind), resolved, working);
-  if (!Number.isFinite(report.reaction) || !Number.isFinite(report.shareOfWebShear)) {
-    return said([fault('not-finite', 'reaction', null, null)]);
-  }
-  return { examined: { end, facts: resolved.facts, designation: resolved.designation, report } };
+  const found = examineNumbers(input);
+  return 'faults' in found ? found : { examined: complete(found.examined, { working }) };
 };

@@ -93,6 +93,9 @@ export interface Report {
   readonly fingerprint: string;
 }
 
+/** A report without the fingerprint, which belongs to what is issued. */
+export type Numbers = Omit<Report, 'fingerprint'>;
+
 /** A fault with its sentence. */
 export interface SaidFault extends Fault {
   readonly text: string;

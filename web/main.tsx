@@ -5,20 +5,24 @@ import { Bench } from './shell/Bench.tsx';
 import { listenForKeys } from './shell/keys.ts';
 import { goOffline } from './shell/offline.ts';
 import { entry } from './state/bench.ts';
-import { take } from './state/carry.ts';
+import { carried } from './state/carried.ts';
 import { demoEntry } from './state/demo.ts';
 import { begin } from './state/edits.ts';
 import { textOf } from './state/entry.ts';
+import { isLink } from './state/isLink.ts';
 import { readKept, startKeeping } from './state/keep.ts';
-import { isLink, openedLink } from './state/opened.ts';
+import { loadTheRest } from './state/later.ts';
 import { watchTabs } from './state/tabs.ts';
+
+/** The first view is drawn by then, ms; what it does without is fetched after. */
+const ONCE_IT_STANDS = 500;
 
 /** A link opens as a step on top of what was kept, and leaves the address, so that loading again does not open it twice. */
 const openLink = async (): Promise<void> => {
   const { hash } = location;
   if (!isLink(hash)) return;
   history.replaceState(null, '', location.pathname + location.search);
-  take(await openedLink(hash.slice(1)), 'the link');
+  await carried((carry) => carry.openLink(hash.slice(1)));
 };
 
 begin(readKept() ?? demoEntry());
@@ -33,3 +37,4 @@ render(<Bench />, document.getElementById('bench')!);
 addEventListener('hashchange', () => void openLink());
 void openLink();
 void goOffline();
+setTimeout(loadTheRest, ONCE_IT_STANDS);

@@ -3,17 +3,17 @@ import { unitOf } from '../../core/units/systems.ts';
 import { stateWords } from '../../core/words/stateWords.ts';
 import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import { chosen } from '../state/bench.ts';
+import { cited } from './cited.ts';
+import { isMost, size } from './fitSizes.ts';
 import { Heading } from './Heading.tsx';
 import { NotApplicable } from './NotApplicable.tsx';
+import { OpenWorking } from './OpenWorking.tsx';
 import { RichText } from './RichText.tsx';
 import { rungsOf } from './rungs.ts';
 import { Sign } from './Sign.tsx';
 import { shown, stale, words } from './shown.ts';
 import { markOf } from './standing.ts';
 import { onRungKey, reached, touch } from './touch.ts';
-import { isMost, size } from './usedUp.ts';
-import { Working } from './Working.tsx';
-import { cited } from './workingLines.ts';
 
 /** Rules that carry no kN, given against required; one that is not held opens by itself. */
 export const Footing = () => {
@@ -70,7 +70,7 @@ const Rule = ({ check, first }: { check: Check; first: boolean }) => {
           <span>; {sourceOf(check)}</span>
         </p>
       )}
-      {open && <Working check={check} labelledBy={`rung-${id}`} />}
+      {open && <OpenWorking check={check} labelledBy={`rung-${id}`} />}
     </li>
   );
 };

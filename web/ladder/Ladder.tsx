@@ -1,4 +1,4 @@
-import type { Report } from '../../core/check/report.ts';
+import type { Numbers } from '../../core/check/report.ts';
 import { plain } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { chosen } from '../state/bench.ts';
@@ -24,7 +24,7 @@ export const Ladder = () => {
   );
 };
 
-const Rungs = ({ report }: { report: Report }) => {
+const Rungs = ({ report }: { report: Numbers }) => {
   const { rungs, unmeasured, alone } = rungsOf(report);
   const { reaction, units } = report;
   const force = unitOf('0,1', units).name;

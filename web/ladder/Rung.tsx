@@ -5,13 +5,13 @@ import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import { chosen } from '../state/bench.ts';
 import type { Axis } from './axis.ts';
 import { Bar } from './Bar.tsx';
+import { OpenWorking } from './OpenWorking.tsx';
 import { RichText } from './RichText.tsx';
 import { shortName } from './rungs.ts';
 import { Sign } from './Sign.tsx';
 import { words } from './shown.ts';
 import { markOf, ratioText } from './standing.ts';
 import { reached, touch } from './touch.ts';
-import { Working } from './Working.tsx';
 
 interface Props {
   readonly check: Check;
@@ -49,7 +49,7 @@ export const Rung = ({ check, axis, force, weakest = false, first }: Props) => {
         </span>
         <Measure check={check} axis={axis} force={force} />
       </button>
-      {open && <Working check={check} labelledBy={`rung-${id}`} />}
+      {open && <OpenWorking check={check} labelledBy={`rung-${id}`} />}
     </li>
   );
 };

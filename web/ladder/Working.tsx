@@ -1,8 +1,10 @@
 import type { Check } from '../../core/check/report.ts';
+import { workingOfCheck } from '../../core/check/workings.ts';
 import { roundedDown } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { stateWords } from '../../core/words/stateWords.ts';
 import { verifiedWords } from '../../core/words/verifiedWords.ts';
+import { cited } from './cited.ts';
 import { inUse } from './inUse.ts';
 import { RichText } from './RichText.tsx';
 import { fullName, isFooting } from './rungs.ts';
@@ -10,37 +12,40 @@ import { Sign } from './Sign.tsx';
 import { shown, words } from './shown.ts';
 import { markOf } from './standing.ts';
 import { usedUp } from './usedUp.ts';
-import { cited, type WorkingLine, workingLines } from './workingLines.ts';
+import { type WorkingLine, workingLines } from './workingLines.ts';
 
-interface Props {
+export interface WorkingProps {
   readonly check: Check;
   /** Id of what it belongs to. */
   readonly labelledBy: string;
 }
 
 /** How a check comes to its number, line by line, with what it leans on and how far it is verified. */
-export const Working = ({ check, labelledBy }: Props) => (
-  // biome-ignore lint/a11y/useSemanticElements: a fieldset groups controls; this groups text under the name of its rung.
-  <div class="working" id={`working-${check.id}`} role="group" aria-labelledby={labelledBy}>
-    <p class="working-head">
-      <b>{fullName(check)}</b>
-      <span>{sourceOf(check)}</span>
-    </p>
-    {check.reasonText && (
-      <p class="working-reason">
-        {stateWords[check.state]}: <RichText text={check.reasonText} />
+export const Working = ({ check: bare, labelledBy }: WorkingProps) => {
+  const check: Check = { ...bare, working: workingOfCheck(shown.value!, bare.id) };
+  return (
+    // biome-ignore lint/a11y/useSemanticElements: a fieldset groups controls; this groups text under the name of its rung.
+    <div class="working" id={`working-${check.id}`} role="group" aria-labelledby={labelledBy}>
+      <p class="working-head">
+        <b>{fullName(check)}</b>
+        <span>{sourceOf(check)}</span>
       </p>
-    )}
-    <ol class="working-lines">{workingLines(check).map(lineRow)}</ol>
-    <Close check={check} />
-    <Leaning check={check} />
-    {!isFooting(check) && (
-      <button type="button" class="working-see" onClick={toPiece}>
-        see it on the piece
-      </button>
-    )}
-  </div>
-);
+      {check.reasonText && (
+        <p class="working-reason">
+          {stateWords[check.state]}: <RichText text={check.reasonText} />
+        </p>
+      )}
+      <ol class="working-lines">{workingLines(check).map(lineRow)}</ol>
+      <Close check={check} />
+      <Leaning check={check} />
+      {!isFooting(check) && (
+        <button type="button" class="working-see" onClick={toPiece}>
+          see it on the piece
+        </button>
+      )}
+    </div>
+  );
+};
 
 /** On a small screen the piece stands out of sight. */
 const toPiece = (): void => {

@@ -1,4 +1,4 @@
-import type { Examined } from '../../core/check/examine.ts';
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import type { Check } from '../../core/check/report.ts';
 import { dn, fu, fub, fup, fy, fyp, Xu } from '../../core/end/given.ts';
 import { quantity } from '../../core/formula/line.ts';
@@ -21,7 +21,7 @@ const symbolOf = (tree: Tree): string => (tree.op === 'constant' || tree.op === 
 const symbols = /[A-Za-zΑ-ω]+′*(?:_[A-Za-z0-9]+(?:,[A-Za-z0-9]+)*)?/g;
 
 /** Factors and strengths that a check's working leans on, with their values. */
-export const inUse = ({ facts, report }: Examined, { working = [] }: Check): InUse[] => {
+export const inUse = ({ facts, report }: ExaminedNumbers, { working = [] }: Check): InUse[] => {
   const named = new Set(working.flatMap(({ expression }) => expression.match(symbols) ?? []));
   const factors = standards[report.standard.id]?.factors ?? [];
   return [...factors, ...strengths]

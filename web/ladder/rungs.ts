@@ -1,4 +1,4 @@
-import type { Check, Report } from '../../core/check/report.ts';
+import type { Check, Numbers } from '../../core/check/report.ts';
 import type { Words } from '../../core/words/words.ts';
 
 /** The checks of a report as the ladder groups them. */
@@ -28,7 +28,7 @@ const strength = ({ reactionAtFailure }: Check): number => reactionAtFailure ?? 
 
 const severity = ({ state }: Check): number => ['fails', 'refer', 'holds'].indexOf(state);
 
-export const rungsOf = ({ checks }: Pick<Report, 'checks'>): Rungs => {
+export const rungsOf = ({ checks }: Pick<Numbers, 'checks'>): Rungs => {
   const judged = checks.filter(({ state }) => state === 'holds' || state === 'fails' || state === 'refer');
   const ways = judged.filter((one) => !isFooting(one));
   const measured = ways.filter((one) => !isUnmeasured(one));

@@ -1,5 +1,6 @@
 import { computed } from '@preact/signals';
-import { type Examined, wordsOf } from '../../core/check/examine.ts';
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
+import { wordsOf } from '../../core/check/examineNumbers.ts';
 import type { Check, SaidFault } from '../../core/check/report.ts';
 import { standards } from '../../core/standards/index.ts';
 import { commonwealth } from '../../core/words/commonwealth.ts';
@@ -7,7 +8,7 @@ import type { Words } from '../../core/words/words.ts';
 import { chosen, faults, lastGood } from '../state/bench.ts';
 
 /** What the bench shows: the end examined last without a fault; null before there is one. */
-export const shown = computed<Examined | null>(() => lastGood.value);
+export const shown = computed<ExaminedNumbers | null>(() => lastGood.value);
 
 /** Why the end as it stands in the fields cannot be examined; empty where what is shown is what stands there. */
 export const missing = computed<readonly SaidFault[]>(() => faults.value);

@@ -1,7 +1,8 @@
-import type { Check, Report } from '../../core/check/report.ts';
+import type { Check, Numbers } from '../../core/check/report.ts';
 import { RESULT_FIGURES, STEP_FIGURES } from '../../core/formula/line.ts';
-import { plain, significant } from '../../core/units/figures.ts';
+import { significant } from '../../core/units/figures.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
+import { isMost, size } from './fitSizes.ts';
 
 /** How far a check is used up, as a fraction in symbols and in numbers, and its value. */
 export interface UsedUp {
@@ -9,9 +10,6 @@ export interface UsedUp {
   readonly numbers: string;
   readonly value: string;
 }
-
-/** A size in decimals, which may stand beside another across a slash. */
-export const size = (value: number, units: UnitSystem): string => plain(value, units === 'mm-kN' ? 2 : 3);
 
 /** Required over given, or given over allowed where there is too much of it. */
 const ofFooting = (check: Check, required: number, given: number, units: UnitSystem): UsedUp => {
@@ -23,14 +21,8 @@ const ofFooting = (check: Check, required: number, given: number, units: UnitSys
   };
 };
 
-/** True where the nearer bound of a rule of fit is the most that is allowed. */
-export const isMost = ({ demand, resistance, utilisation }: Check): boolean => {
-  if (demand === null || resistance === null || utilisation === null) return false;
-  return Math.abs(resistance - utilisation * demand) < Math.abs(demand - utilisation * resistance);
-};
-
 /** Demand over resistance, as the working closes; where shear and bending interact, the reaction over the one at failure. */
-export const usedUp = (check: Check, { units, reaction }: Pick<Report, 'units' | 'reaction'>): UsedUp | null => {
+export const usedUp = (check: Check, { units, reaction }: Pick<Numbers, 'units' | 'reaction'>): UsedUp | null => {
   const { demand, resistance, utilisation, symbol, reactionAtFailure, working = [] } = check;
   if (demand === null || resistance === null || utilisation === null) return null;
   if (check.id.startsWith('fit-')) return ofFooting(check, demand, resistance, units);

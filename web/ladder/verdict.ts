@@ -1,4 +1,4 @@
-import type { Check, Report, SaidFault } from '../../core/check/report.ts';
+import type { Check, Numbers, SaidFault } from '../../core/check/report.ts';
 import { roundedDown } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { verdictWords as say } from '../../core/words/verdictWords.ts';
@@ -36,7 +36,7 @@ export const incompleteLine = (faults: readonly SaidFault[]): VerdictLine => ({
 });
 
 /** The strength check with the least reaction at failure, as the report lists it. */
-const weakestOf = ({ checks }: Report): Check | undefined =>
+const weakestOf = ({ checks }: Numbers): Check | undefined =>
   checks.find((one) => !isFooting(one) && typeof one.reactionAtFailure === 'number' && one.state !== 'information');
 
 const named = (checks: readonly Check[]): string => checks.map(({ title }) => inSentence(title)).join(', ');
@@ -53,7 +53,7 @@ const referring = (checks: readonly Check[]): string => {
 };
 
 /** What fails beside the weakest, and all that refers. */
-const othersOf = (report: Report, weakest: Check | undefined): string => {
+const othersOf = (report: Numbers, weakest: Check | undefined): string => {
   const fails = report.checks.filter((one) => one.state === 'fails' && one !== weakest);
   const refers = report.checks.filter(({ state }) => state === 'refer');
   const failing = weakest?.state === 'fails' ? say.alsoFails : say.fails;
@@ -63,7 +63,7 @@ const othersOf = (report: Report, weakest: Check | undefined): string => {
 };
 
 /** The verdict of a report. */
-export const verdictLine = (report: Report): VerdictLine => {
+export const verdictLine = (report: Numbers): VerdictLine => {
   const governing = report.checks.find(({ id }) => id === report.governing);
   const weakest = weakestOf(report);
   const utilisation = governing?.utilisation ?? null;

@@ -2,6 +2,7 @@ import type { Check } from '../../core/check/report.ts';
 import { RESULT_FIGURES, STEP_FIGURES } from '../../core/formula/line.ts';
 import type { WorkingRow } from '../../core/formula/working.ts';
 import { significant } from '../../core/units/figures.ts';
+import { cited } from './cited.ts';
 
 /** One line of a working as it is set: symbol, what it equals in symbols, in numbers, and its value. */
 export interface WorkingLine {
@@ -18,9 +19,6 @@ export interface WorkingLine {
   /** Closes the demand or the resistance. */
   readonly result: boolean;
 }
-
-/** A clause as it is cited: numbered clauses with `cl.`, methods by their name. */
-export const cited = (clause: string): string => (/^[A-Z]{0,2}\d/.test(clause) ? `cl. ${clause}` : clause);
 
 const lineOf = (row: WorkingRow, check: Check, last: boolean): WorkingLine => {
   const result = last || row.symbol === check.symbol;

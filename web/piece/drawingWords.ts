@@ -1,10 +1,10 @@
-import type { Examined } from '../../core/check/examine.ts';
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
 import { standards } from '../../core/standards/index.ts';
 import { fieldName, type Words } from '../../core/words/words.ts';
 
 /** What the drawing of an end writes beside its sizes. */
-export const drawingWords = ({ end, designation, report }: Examined, words: Words): DrawingWords => {
+export const drawingWords = ({ end, designation, report }: ExaminedNumbers, words: Words): DrawingWords => {
   const { bolts, kind } = end.joint;
   return {
     units: report.units,

@@ -1,12 +1,12 @@
 import { computed, signal } from '@preact/signals';
 import { drawEnd } from '../../core/drawing/drawEnd.ts';
 import type { Drawing, FailurePath } from '../../core/drawing/drawing.ts';
-import { failurePath } from '../../core/drawing/failurePath.ts';
 import type { Laid } from '../../core/drawing/laid.ts';
 import { layoutDrawing } from '../../core/drawing/layout.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
 import { chosenCheck, shown, words } from '../ladder/shown.ts';
 import { focused } from '../state/bench.ts';
+import { later } from '../state/later.ts';
 import { drawingWords } from './drawingWords.ts';
 import { type Fit, fitRoom, LARGEST, layAt, type Room, taken } from './fitRoom.ts';
 
@@ -61,11 +61,13 @@ export const figure = computed<Figure | null>(() => {
   return { drawing: piece, fields, ...fit };
 });
 
-/** The path along which the chosen check fails. */
+const drawPath = later(async () => (await import('../../core/drawing/failurePath.ts')).failurePath);
+
+/** The path along which the chosen check fails; no part of the first view. */
 export const path = computed<FailurePath | null>(() => {
   const check = chosenCheck.value;
   if (!check || !shown.value || !spoken.value) return null;
-  return failurePath(check.id, check.of ?? '', shown.value.facts, spoken.value);
+  return drawPath.value?.(check.id, check.of ?? '', shown.value.facts, spoken.value) ?? null;
 });
 
 /** The path laid over the figure. */

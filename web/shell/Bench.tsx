@@ -1,15 +1,22 @@
 import { Footing, Ladder, VerdictStrip } from '../ladder/index.ts';
 import { Order } from '../order/Order.tsx';
+import { Piece } from '../piece/index.ts';
+import { later } from '../state/later.ts';
+import { Stress } from '../stress/index.ts';
 import { Announcer } from './Announcer.tsx';
 import { DropPlace } from './DropPlace.tsx';
 import { Foot } from './Foot.tsx';
 import { Head } from './Head.tsx';
-import { Later } from './Later.tsx';
+import { finderShown, keysShown } from './keys.ts';
 import { Notices } from './Notices.tsx';
 import { TopBand } from './TopBand.tsx';
 
-const middle = async () => (await import('./Middle.tsx')).Middle;
-const dialogs = async () => (await import('./Dialogs.tsx')).Dialogs;
+const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
+
+const OpenDialogs = () => {
+  const Dialogs = (keysShown.value || finderShown.value) && dialogs.value;
+  return Dialogs && <Dialogs />;
+};
 
 /** The bench: order, piece and ladder under one head. */
 export const Bench = () => (
@@ -24,7 +31,8 @@ export const Bench = () => (
       <div class="bench">
         <Order />
         <div class="bench-middle">
-          <Later load={middle} />
+          <Piece />
+          <Stress />
         </div>
         <div class="bench-right">
           <Ladder />
@@ -35,7 +43,7 @@ export const Bench = () => (
     <Foot />
     <VerdictStrip />
     <Announcer />
-    <Later load={dialogs} />
+    <OpenDialogs />
     <DropPlace />
   </>
 );

@@ -1,6 +1,6 @@
 import { useSignal } from '@preact/signals';
 import { useEffect } from 'preact/hooks';
-import { openFile } from '../state/carry.ts';
+import { carried } from '../state/carried.ts';
 
 const hasFile = (event: DragEvent): boolean => event.dataTransfer?.types.includes('Files') ?? false;
 
@@ -21,7 +21,7 @@ export const DropPlace = () => {
       event.preventDefault();
       over.value = false;
       const file = event.dataTransfer?.files[0];
-      if (file) void openFile(file);
+      if (file) void carried(({ openFile }) => openFile(file));
     };
     document.addEventListener('dragover', onOver);
     document.addEventListener('dragleave', onLeave);

@@ -1,7 +1,7 @@
 import { Verdict } from '../ladder/index.ts';
 import { FieldLink } from '../order/FieldLink.tsx';
 import { entry, standard } from '../state/bench.ts';
-import { issueSheet } from '../state/carry.ts';
+import { carried } from '../state/carried.ts';
 import { textOf } from '../state/entry.ts';
 import { beginEmpty } from './beginEmpty.ts';
 
@@ -33,7 +33,7 @@ const Job = () => {
         <FieldLink path="standard" kind="value">
           {known ? `${known.title}:${known.edition}` : textOf(entry.value, 'standard') || 'standard?'}
         </FieldLink>
-        <button type="button" class="button" onClick={() => void issueSheet()}>
+        <button type="button" class="button" onClick={() => void carried(({ issueSheet }) => issueSheet())}>
           Issue sheet
         </button>
         {job.endsWith('(demo)') && (

@@ -1,7 +1,7 @@
 import type { TargetedEvent } from 'preact';
 import { useRef } from 'preact/hooks';
 import { timeline, units } from '../state/bench.ts';
-import { copyLink, openFile, saveFile } from '../state/carry.ts';
+import { carried } from '../state/carried.ts';
 import { redo, setUnits, undo } from '../state/edits.ts';
 import { notice } from '../state/notice.ts';
 import { beginEmpty } from './beginEmpty.ts';
@@ -29,7 +29,7 @@ const OpenButton = () => {
   const onPick = (event: TargetedEvent<HTMLInputElement>) => {
     const input = event.currentTarget;
     const file = input.files?.[0];
-    if (file) void openFile(file);
+    if (file) void carried(({ openFile }) => openFile(file));
     input.value = '';
   };
   return (
@@ -80,10 +80,10 @@ export const TopBand = () => (
         New
       </button>
       <OpenButton />
-      <button type="button" onClick={saveFile}>
+      <button type="button" onClick={() => void carried(({ saveFile }) => saveFile())}>
         Save
       </button>
-      <button type="button" onClick={() => void copyLink()}>
+      <button type="button" onClick={() => void carried(({ copyLink }) => copyLink())}>
         Link
       </button>
       <button

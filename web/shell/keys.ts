@@ -1,6 +1,6 @@
 import { signal } from '@preact/signals';
 import { turnTo } from '../order/goTo.ts';
-import { saveFile } from '../state/carry.ts';
+import { carried } from '../state/carried.ts';
 import { redo, undo } from '../state/edits.ts';
 import { lineNames } from '../state/tradeOrder.ts';
 
@@ -31,7 +31,11 @@ export const setSingleKeys = (on: boolean): void => {
   }
 };
 
-const withControl: Readonly<Record<string, () => void>> = { z: undo, y: redo, s: saveFile };
+const withControl: Readonly<Record<string, () => void>> = {
+  z: undo,
+  y: redo,
+  s: () => void carried(({ saveFile }) => saveFile()),
+};
 
 const single = (key: string): (() => void) | undefined => {
   if (key === '/') {

@@ -1,5 +1,6 @@
 import { computed, effect, signal } from '@preact/signals';
-import { type Examination, type Examined, examine, wordsOf } from '../../core/check/examine.ts';
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
+import { examineNumbers, wordsOf } from '../../core/check/examineNumbers.ts';
 import type { SaidFault } from '../../core/check/report.ts';
 import type { CheckName } from '../../core/end/checkNames.ts';
 import { standards } from '../../core/standards/index.ts';
@@ -36,7 +37,7 @@ export const words = computed<Words>(() => (standard.value ? wordsOf(standard.va
 export const input = computed(() => endOf(entry.value));
 
 /** The last end that could be examined, so that drawing and ladder stay while a field is half typed; null before the first. */
-export const lastGood = signal<Examined | null>(null);
+export const lastGood = signal<ExaminedNumbers | null>(null);
 
 /**
  * Names that are not known, in an end that has gaps: the core looks names up only once an end is whole, so the gaps are filled from the last
@@ -45,7 +46,7 @@ export const lastGood = signal<Examined | null>(null);
 const unknownNames = (end: Readonly<Record<string, unknown>>, gaps: readonly string[]): readonly SaidFault[] => {
   const last = lastGood.peek();
   if (!last) return [];
-  const found = examine(filledFrom(end, last.end, gaps), { working: false });
+  const found = examineNumbers(filledFrom(end, last.end, gaps));
   if (!('faults' in found)) return [];
   return found.faults.filter(({ code, path }) => code.startsWith('unknown-') && !gaps.includes(path));
 };
@@ -54,9 +55,9 @@ const unknownNames = (end: Readonly<Record<string, unknown>>, gaps: readonly str
  * The end looked at in full, or the faults that stand in the way, in the order of the trade: texts that cannot be read and what the core
  * finds, each with its path and its sentence.
  */
-export const examination = computed<Examination>(() => {
+export const examination = computed<ReturnType<typeof examineNumbers>>(() => {
   const { input: end, faults: misread } = input.value;
-  const found = examine(end);
+  const found = examineNumbers(end);
   if (misread.length === 0 && 'examined' in found) return found;
   const unread = misread.map((one) => ({ ...one, text: faultText(words.value, faultSentences, one) }));
   const known = new Set(unread.map(({ path }) => path));

@@ -1,16 +1,18 @@
-import type { Examined } from '../../core/check/examine.ts';
+import { complete } from '../../core/check/complete.ts';
+import type { Examined } from '../../core/check/examined.ts';
+
 import { assumedValues } from './assumedValues.ts';
 import { demanded, examination } from './bench.ts';
 import { replace } from './edits.ts';
 import { entryOf } from './entryOf.ts';
 import { fileText } from './fileText.ts';
 import { notice, refuse, tell } from './notice.ts';
-import { type Opened, openedFile } from './opened.ts';
+import { type Opened, openedFile, openedLink } from './opened.ts';
 
 /** The end as it stands, looked at in full; where it is not complete, that is said and its faults are shown. */
-const whole = (wanted: string): Examined | undefined => {
+const whole = (wanted: string, { working = false } = {}): Examined | undefined => {
   const found = examination.value;
-  if ('examined' in found) return found.examined;
+  if ('examined' in found) return complete(found.examined, { working });
   demanded.value = true;
   refuse(`${wanted} needs a complete end: what is missing stands at the top of the order`);
   return undefined;
@@ -56,7 +58,7 @@ export const copyLink = async (): Promise<void> => {
 
 /** Writes the sheet of the end as a PDF. */
 export const issueSheet = async (): Promise<void> => {
-  const examined = whole('The sheet');
+  const examined = whole('The sheet', { working: true });
   if (!examined) return;
   try {
     const { sheetPdf } = await import('../../core/sheet/sheet.ts');
@@ -72,7 +74,7 @@ export const issueSheet = async (): Promise<void> => {
 };
 
 /** Puts what was opened on the bench, as one step that can be undone; or says why it could not be opened and leaves the bench as it is. */
-export const take = (opened: Opened, from: string): void => {
+const take = (opened: Opened, from: string): void => {
   if ('refused' in opened) {
     refuse(`Not opened: ${from}. The bench is as it was.`, opened.refused);
     return;
@@ -80,6 +82,9 @@ export const take = (opened: Opened, from: string): void => {
   replace(entryOf(opened.end), `Opened ${from}`);
   tell(`Opened ${from}. Undo brings back what was there.`);
 };
+
+/** Opens the end that the part of an address behind its `#` carries. */
+export const openLink = async (text: string): Promise<void> => take(await openedLink(text), 'the link');
 
 /** Opens a file, or a sheet's PDF, that was picked or dropped. */
 export const openFile = async (file: File): Promise<void> => {

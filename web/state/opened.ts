@@ -1,4 +1,4 @@
-import { said } from '../../core/check/examine.ts';
+import { said } from '../../core/check/examineNumbers.ts';
 import { fault } from '../../core/end/fault.ts';
 import { readEnd } from '../../core/end/readEnd.ts';
 import type { End } from '../../core/end/schema.ts';
@@ -54,6 +54,3 @@ export const openedLink = async (text: string): Promise<Opened> => {
     ? { refused: [faultText(commonwealth, faultSentences, found.fault)] }
     : openedFrom(found.input);
 };
-
-/** Whether the part of an address behind its `#` is meant as the link of an end. */
-export const isLink = (hash: string): boolean => /^#\d+\.[^.]*\./.test(hash);

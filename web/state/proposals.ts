@@ -1,4 +1,4 @@
-import type { Examined } from '../../core/check/examine.ts';
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import { writeQuantity } from '../../core/units/printQuantity.ts';
 import { INCH, toSystem } from '../../core/units/systems.ts';
 import { type Entry, textOf } from './entry.ts';
@@ -9,7 +9,7 @@ export type Proposals = Readonly<Record<string, string>>;
 interface Known {
   readonly entry: Entry;
   /** The last end that could be examined. */
-  readonly last: Examined | null;
+  readonly last: ExaminedNumbers | null;
 }
 
 /** A length given for both systems, as text. */

@@ -1,10 +1,10 @@
 import { computed } from '@preact/signals';
 import { useEffect, useRef } from 'preact/hooks';
-import type { Report } from '../../core/check/report.ts';
+import type { Numbers } from '../../core/check/report.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { Heading } from '../ladder/Heading.tsx';
+import { OpenWorking } from '../ladder/OpenWorking.tsx';
 import { shown, stale } from '../ladder/shown.ts';
-import { Working } from '../ladder/Working.tsx';
 import { type Figure, figure, spoken } from '../piece/figure.ts';
 import { chosen } from '../state/bench.ts';
 import { ProfileDrawn } from './ProfileDrawn.tsx';
@@ -42,7 +42,7 @@ export const Stress = () => {
       </section>
       {open && (
         <div class="stress-working">
-          <Working check={open} labelledBy={`rung-${open.id}`} />
+          <OpenWorking check={open} labelledBy={`rung-${open.id}`} />
         </div>
       )}
     </>
@@ -50,10 +50,10 @@ export const Stress = () => {
 };
 
 /** An option makes the elastic stress a way of failing: then it has its rungs. */
-const isJudged = ({ checks }: Report): boolean =>
+const isJudged = ({ checks }: Numbers): boolean =>
   checks.some(({ id, state }) => id === 'stress-full' && state !== 'information');
 
-const Profiles = ({ it, report }: { it: Figure; report: Report }) => {
+const Profiles = ({ it, report }: { it: Figure; report: Numbers }) => {
   const all = profiles.value;
   const count = all.length;
   const beside = isBeside(count);

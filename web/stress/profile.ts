@@ -1,4 +1,4 @@
-import type { Examined } from '../../core/check/examine.ts';
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import type { Check, SectionStress } from '../../core/check/report.ts';
 import { type StressProfile, stressFigure } from '../../core/drawing/stressFigure.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
@@ -23,7 +23,7 @@ const sectionOf = (sections: readonly SectionStress[], { name }: StressProfile):
   sections.find((one) => one.name === name || one.name.startsWith(`${name}-`));
 
 /** The full section first, then what is left behind the copes. */
-export const profilesOf = ({ facts, report }: Examined, words: DrawingWords): Profile[] => {
+export const profilesOf = ({ facts, report }: ExaminedNumbers, words: DrawingWords): Profile[] => {
   const { checks, shape, units } = report;
   const judged = checks.filter(({ id, state }) => id.startsWith('stress-') && state !== 'notApplicable');
   const limit = judged.find(({ resistance }) => resistance !== null)?.resistance ?? null;

@@ -5,10 +5,11 @@ import type { Check } from '../../../core/check/report.ts';
 import { RESULT_FIGURES, STEP_FIGURES } from '../../../core/formula/line.ts';
 import { significant } from '../../../core/units/figures.ts';
 import { verifiedWords } from '../../../core/words/verifiedWords.ts';
+import { cited } from '../../../web/ladder/cited.ts';
+import { isMost } from '../../../web/ladder/fitSizes.ts';
 import { inUse } from '../../../web/ladder/inUse.ts';
-import { isMost, usedUp } from '../../../web/ladder/usedUp.ts';
-
-import { cited, workingLines } from '../../../web/ladder/workingLines.ts';
+import { usedUp } from '../../../web/ladder/usedUp.ts';
+import { workingLines } from '../../../web/ladder/workingLines.ts';
 import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
 import { calculate } from '../../support/calculator.ts';
 import { demo } from './demoEnds.ts';

@@ -1,0 +1,10 @@
+import { later } from '../state/later.ts';
+import type { WorkingProps } from './Working.tsx';
+
+const part = later(async () => (await import('./Working.tsx')).Working);
+
+/** The working of a rung that is open; its writer is no part of the first view. */
+export const OpenWorking = (props: WorkingProps) => {
+  const Working = part.value;
+  return Working && <Working {...props} />;
+};

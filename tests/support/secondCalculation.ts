@@ -1,0 +1,375 @@
+/**
+ * A second calculation of a fin-plate or web-bolts end to SANS 10162-1, written from the rules and not from the program: plain arithmetic on
+ * given sizes and strengths, sections as thin strips, nothing of `core`. Reactions in kN; everything else, and every answer, in N, mm, MPa.
+ * Where the rules leave room: what a shallow cope leaves of flange and fillet counts in the section; net shear takes h_o for every column;
+ * `cautious` takes 0.3 for one column too; the shear of a cut section peaks where its web's V Q/(I t) does.
+ */
+export interface SecondEnd {
+  readonly reaction: number;
+  readonly tie: number;
+  readonly section: OwnSection;
+  readonly web: Strengths;
+  readonly top: Cope | null;
+  readonly bottom: Cope | null;
+  readonly setback: number;
+  readonly firstRow: number;
+  readonly endDistance: number;
+  readonly bolts: Sizes<'d' | 'fu' | 'rows' | 'columns' | 'pitch' | 'gauge'> & {
+    readonly threads: 'in' | 'out';
+    readonly holes: 'drilled' | 'punched';
+    readonly hole?: number;
+  };
+  /** The fin plate, or the ply of a web bolted straight to it. */
+  readonly ply: Strengths & Sizes<'thickness' | 'topEdge' | 'bottomEdge' | 'edge'>;
+  /** Of a fin plate. */
+  readonly weld?: Sizes<'leg' | 'electrode'>;
+  /** A supporting beam. */
+  readonly support?: OwnSection & Sizes<'topOfSteel'>;
+  readonly options: Readonly<Record<string, string>>;
+}
+type Sizes<Name extends string> = Readonly<Record<Name, number>>;
+type OwnSection = Sizes<'depth' | 'width' | 'flange' | 'web' | 'radius'> & { readonly family: 'I' | 'channel' };
+type Strengths = Sizes<'fy' | 'fu'>;
+type Cope = Sizes<'length' | 'depth'> & { readonly radius?: number };
+
+/** For sizes `demand` is what is required and `resistance` what is given. Absent where there is no number. */
+export interface Answer {
+  readonly state: 'holds' | 'fails' | 'refer' | 'notApplicable' | 'information';
+  readonly reason?: string | undefined;
+  readonly demand?: number | undefined;
+  readonly resistance?: number | undefined;
+  readonly reactionAtFailure?: number | undefined;
+  readonly utilisation?: number | undefined;
+  /** Parts that are used up at the same reaction, or share the nearest bound: the numbers may be those of any. */
+  readonly level?: readonly Answer[];
+}
+
+const no = (reason: string): Answer => ({ state: 'notApplicable', reason });
+const rank = ({ state }: Answer): number => ['holds', 'refer', 'fails'].indexOf(state);
+const worst = (parts: readonly Answer[]): Answer => parts.reduce((a, b) => (rank(b) > rank(a) ? b : a));
+const sum = (list: readonly number[]): number => list.reduce((a, b) => a + b, 0);
+
+/** One section, leg or direction: demand for each newton of reaction, resistance, and the limits it may lie outside of. */
+interface Part {
+  readonly per: number;
+  readonly resistance: number;
+  /** Refers where the number holds. */
+  readonly limit?: string | false | undefined;
+  /** Refers whatever the number. */
+  readonly always?: string | false | undefined;
+}
+
+const partAt = (V: number, { per, resistance, limit, always }: Part): Answer => {
+  if (Number.isNaN(resistance)) return { state: 'refer', reason: always || '' };
+  if (resistance <= 0) return { state: 'fails', reason: 'nothing-left', resistance, reactionAtFailure: 0 };
+  const reactionAtFailure = resistance / per;
+  const numbers = { demand: per * V, resistance, reactionAtFailure, utilisation: V / reactionAtFailure };
+  if (always) return { state: 'refer', reason: always, ...numbers };
+  if (V > reactionAtFailure) return { state: 'fails', ...numbers };
+  return limit ? { state: 'refer', reason: limit, ...numbers } : { state: 'holds', ...numbers };
+};
+
+/** The worst state of the parts with the numbers of the part used up first. */
+const strength = (V: number, ...parts: readonly Part[]): Answer => {
+  const all = parts.map((one) => partAt(V, one));
+  const numbered = all.filter((one) => one.reactionAtFailure !== undefined);
+  const least = Math.min(...numbered.map((one) => one.reactionAtFailure!));
+  const level = numbered.filter((one) => one.reactionAtFailure! <= least * (1 + 1e-9));
+  const { state, reason } = worst(all);
+  return { ...level[0], state, reason, level };
+};
+
+/** A size against its bounds; `breach` is what breaking one means. */
+const size = (breach: 'fails' | 'refer', given: number, least: number, most = Number.POSITIVE_INFINITY): Answer => {
+  const used = given > 0 ? least / given : least > 0 ? Number.POSITIVE_INFINITY : 0;
+  const low = used >= given / most;
+  const utilisation = low ? used : given / most;
+  const broken = utilisation > 1 + 1e-9;
+  const reason = broken ? (low ? 'too-little' : 'too-much') : undefined;
+  return { state: broken ? breach : 'holds', reason, demand: low ? least : most, resistance: given, utilisation };
+};
+const sizes = (...parts: readonly Answer[]): Answer => {
+  const same = parts.filter((one) => rank(one) === rank(worst(parts)));
+  const most = Math.max(...same.map((one) => one.utilisation!));
+  const level = same.filter((one) => one.utilisation! >= most * (1 - 1e-9));
+  return { ...level[0]!, level };
+};
+
+const SLICES = 200;
+
+/** What a section is between two levels, mm down from top of steel, summed over strips. */
+const cutOf = (s: OwnSection, top: number, bottom: number) => {
+  const { depth: h, flange: tf, radius: r, web: tw } = s;
+  const list = [
+    { from: 0, to: tf, width: s.width },
+    { from: tf, to: h - tf, width: tw },
+    { from: h - tf, to: h, width: s.width },
+  ];
+  const sides = s.family === 'channel' ? 1 : 2;
+  for (let i = 0; r > 0 && i < SLICES; i += 1) {
+    const angle = (at: number) => (at / SLICES) * (Math.PI / 2);
+    const [from, to] = [tf + r * (1 - Math.cos(angle(i))), tf + r * (1 - Math.cos(angle(i + 1)))];
+    const width = sides * r * (1 - Math.sin(angle(i + 0.5)));
+    list.push({ from, to, width }, { from: h - to, to: h - from, width });
+  }
+  const strips = list
+    .map(({ from, to, width }) => ({ from: Math.max(from, top), to: Math.min(to, bottom), width }))
+    .filter(({ from, to }) => to > from);
+  const A = sum(strips.map(({ from, to, width }) => width * (to - from)));
+  const y = sum(strips.map(({ from, to, width }) => (width * (to ** 2 - from ** 2)) / 2)) / A;
+  const I = sum(strips.map(({ from, to, width }) => (width * ((to - y) ** 3 - (from - y) ** 3)) / 3));
+  const stressAt = (level: number) => {
+    const above = strips.filter(({ from }) => from < level).map((one) => ({ ...one, to: Math.min(one.to, level) }));
+    const Q = sum(above.map(({ from, to, width }) => width * (to - from) * (y - (from + to) / 2)));
+    return Q / (I * sum(strips.map(({ from, to, width }) => (from <= level && level < to ? width : 0))));
+  };
+  // Largest at the neutral axis; where that lies in a flange or among fillets, somewhere in the fillets or at the flange.
+  const [webTop, webBottom] = [Math.max(top, tf), Math.min(bottom, h - tf)];
+  const levels =
+    y >= tf + r && y <= h - tf - r
+      ? [y]
+      : [webTop, y, webBottom - 1e-9, ...strips.map((one) => (one.from + one.to) / 2)];
+  const inWeb = levels.filter((level) => level >= webTop && level < webBottom);
+  const peak = Math.max(...(inWeb.length > 0 ? inWeb : [y]).map(stressAt));
+  return { depth: bottom - top, Wtop: I / (y - top), Wbottom: I / (bottom - y), peak };
+};
+
+/** Limiting shear stress of an unstiffened web, MPa, and whether the first limit is passed. */
+const limitingStress = (slenderness: number, fy: number) => {
+  const x = slenderness / Math.sqrt(5.34 / fy);
+  const beyond = x <= 620 ? (290 * Math.sqrt(5.34 * fy)) / slenderness : (180_000 * 5.34) / slenderness ** 2;
+  return { fs: x <= 440 ? 0.66 * fy : beyond, slender: x > 440 };
+};
+
+/** Load at arm z over the force on the farthest bolt: instantaneous centre, halved to the end of the digits. */
+const centreCoefficient = (bolts: readonly (readonly [number, number])[], z: number): number => {
+  const at = (r0: number) => {
+    const arms = bolts.map(([x, y]) => Math.hypot(x + r0, y));
+    const R = arms.map((arm) => (1 - Math.exp((-0.394 * 8.64 * arm) / Math.max(...arms))) ** 0.55);
+    const up = sum(bolts.map(([x], i) => (arms[i]! > 0 ? (R[i]! * (x + r0)) / arms[i]! : 0)));
+    return { up, spare: (z + r0) * up - sum(R.map((one, i) => one * arms[i]!)) };
+  };
+  let [near, far] = [1e-6, 1e7];
+  for (let turn = 0; turn < 60; turn += 1) {
+    const middle = Math.sqrt(near * far);
+    if (at(middle).spare < 0) near = middle;
+    else far = middle;
+  }
+  return at(far).up;
+};
+
+/** Least edge distances, mm: bolts up to this diameter, sheared edge, cut edge. */
+const edges: readonly (readonly [d: number, sheared: number, cut: number])[] = [
+  [16, 28, 22],
+  [20, 34, 26],
+  [22, 38, 28],
+  [24, 42, 30],
+  [27, 48, 34],
+  [30, 52, 38],
+  [36, 64, 46],
+];
+
+/** Every check of the end, by name. */
+export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answer>> => {
+  const { section, top, bottom, setback: g, firstRow: y1, endDistance: eEnd, bolts, ply, weld, support, options } = end;
+  const { depth: h, flange: tf, web: tw, radius: r } = section;
+  const { fy, fu } = end.web;
+  const { rows: n, columns: m, d } = bolts;
+  const { thickness: tp, topEdge: eTop, bottomEdge: eBot, edge: ex } = ply;
+  const [V, T] = [end.reaction * 1000, end.tie * 1000];
+  const [p, q] = [n > 1 ? bolts.pitch : 0, m > 1 ? bolts.gauge : 0];
+  const d0 = bolts.hole ?? (d <= 24 ? d + 2 : d + 3);
+  const dn = bolts.holes === 'drilled' ? d0 : d0 + 2;
+  const [dt, db, ct, cb] = [top?.depth ?? 0, bottom?.depth ?? 0, top?.length ?? 0, bottom?.length ?? 0];
+  const copes = [top, bottom].filter((one) => one !== null);
+  const coped = copes.length > 0;
+  const channel = coped && section.family === 'channel';
+  const ho = h - dt - db;
+  const rows = (n - 1) * p;
+  const wide = (m - 1) * q;
+  const yn = y1 + rows;
+  const columns = Array.from({ length: m }, (_, j) => eEnd + j * q);
+  const inside = (cope: Cope | null) => columns.filter((x) => cope && cope.length >= x - d0 / 2).length;
+  const [mTop, mBottom] = [inside(top), inside(bottom)];
+  const [z, z1] = [g + eEnd + wide / 2, g + eEnd];
+  const hp = eTop + rows + eBot;
+
+  const atFace = copes.some(({ length }) => columns.some((x) => Math.abs(x - length) < d0 / 2));
+  const always = (atFace && 'hole-at-cope-face') || (copes.some(({ depth }) => depth < tf) && 'flange-left');
+
+  // Sections behind the copes: the rectangle at the shorter cope's face, a tee at the longer one's or behind a single cope.
+  const between = top && bottom ? { c: Math.min(ct, cb), ...cutOf(section, dt, h - db) } : undefined;
+  const teeTop = top && (!bottom || ct > cb) ? { c: ct, ...cutOf(section, dt, h) } : undefined;
+  const teeBottom = bottom && (!top || cb > ct) ? { c: cb, ...cutOf(section, 0, h - db) } : undefined;
+  const cuts = [
+    between && { ...between, W: Math.min(between.Wtop, between.Wbottom) },
+    teeTop && { ...teeTop, W: teeTop.Wtop },
+    teeBottom && { ...teeBottom, W: teeBottom.Wbottom },
+  ].filter((one) => one !== undefined);
+
+  const onCope = (...parts: readonly Part[]): Answer =>
+    channel ? { state: 'refer', reason: 'channel-cope' } : coped ? strength(V, ...parts) : no('no-cope');
+  const buckling = (): Part[] => {
+    const parts: Part[] = [];
+    const long = Math.max(ct, cb) > 2 * h && 'cope-longer-than-method';
+    if (between) {
+      const [c, deep] = [Math.max(ct, cb), Math.max(dt, db)];
+      const fd = 3.5 - (7.5 * deep) / h;
+      const Fcr = ((0.62 * Math.PI * 200_000 * tw ** 2) / (c * ho)) * fd;
+      const resistance = fd > 0 ? 0.9 * Math.min(Fcr, fy) * Math.min(between.Wtop, between.Wbottom) : Number.NaN;
+      const beyond = (fd > 0 && long) || (deep > 0.2 * h && 'cope-deeper-than-method');
+      parts.push({ per: g + between.c, resistance, always: always || beyond });
+    }
+    if (teeTop) {
+      const left = h - dt;
+      const f = ct <= h ? (2 * ct) / h : 1 + ct / h;
+      const k = ct <= left ? 2.2 * (left / ct) ** 1.65 : (2.2 * left) / ct;
+      const Fcr = ((Math.PI ** 2 * 200_000) / (12 * (1 - 0.3 ** 2))) * (tw / left) ** 2 * f * k;
+      const beyond = long || (dt > h / 2 && 'cope-deeper-than-method');
+      parts.push({ per: g + ct, resistance: 0.9 * Math.min(Fcr, fy) * teeTop.Wtop, always: always || beyond });
+    }
+    return parts;
+  };
+
+  const pattern = columns.flatMap((x) =>
+    Array.from({ length: n }, (_, i) => [x - eEnd - wide / 2, i * p - rows / 2] as const),
+  );
+  const J = sum(pattern.map(([x, y]) => x ** 2 + y ** 2));
+  const N = n * m;
+  const elastic = Math.hypot((z * rows) / 2 / J, 1 / N + (z * wide) / 2 / J);
+  const byCentre = options['bolt-group'] === 'instantaneous-centre' && N > 1;
+  const long = rows > 15 * d ? Math.max(0.75, 1.075 - (0.005 * rows) / d) : 1;
+  const oneBolt = 0.6 * 0.8 * ((Math.PI * d ** 2) / 4) * bolts.fu * (bolts.threads === 'in' ? 0.7 : 1) * long;
+  const bearing = (t: number, u: number) => 3 * 0.67 * t * d * u;
+  const onBolt = (resistance: number, per: number): Answer =>
+    N > 1 ? strength(V, { per, resistance }) : { state: 'fails', reason: 'one-bolt', resistance, reactionAtFailure: 0 };
+
+  const planes = (t: number, y: number, u: number, L: number, Ln: number) =>
+    2 * t * Math.min(0.6 * 0.9 * y * L, 0.6 * 0.9 * u * Ln);
+  const upright = (t: number, y: number, u: number, edge: number, count: number): Part[] =>
+    count > 0 ? [{ per: 1, resistance: count * planes(t, y, u, edge + rows, edge + rows - (n - 0.5) * dn) }] : [];
+  const along = (t: number, y: number, u: number, edge: number): Part[] => {
+    const toEdge = planes(t, y, u, edge, edge - dn / 2);
+    const resistance = m > 1 ? Math.min(toEdge, planes(t, y, u, q, q - dn)) : toEdge;
+    return n > 1 ? [{ per: (z * rows) / 2 / J, resistance }] : [];
+  };
+  const block = (k: number, t: number, y: number, u: number, Lgv: number, Lgt: number, count: number) => {
+    const pull = k * 0.9 * t * (Lgt - (count - 0.5) * dn) * u;
+    return pull + 0.6 * 0.9 * t * Math.min(y * Lgv, u * (Lgv - (n - 0.5) * dn));
+  };
+  const webTears = [...upright(tw, fy, fu, y1 - dt, mTop), ...along(tw, fy, fu, eEnd)];
+  const k = options['web-block'] === 'cautious' ? 0.3 : 0.5;
+  const webBlock = block(k, tw, fy, fu, y1 - dt + rows, eEnd + (mTop - 1) * q, mTop);
+  const { fy: yp, fu: up } = ply;
+
+  const slices = (t: number, y: number, u: number, depth: number, edge: number) => [
+    N * bearing(t, u),
+    0.85 * 0.9 * t * (depth - n * dn) * u,
+    0.9 * t * (n - 1) * (p - dn) * u + planes(t, y, u, edge + wide, edge + wide - (m - 0.5) * dn),
+  ];
+  const line = weld ? (0.67 * 0.67 * weld.electrode * weld.leg) / Math.SQRT2 : 0;
+  const tied = Math.min(
+    N * oneBolt,
+    ...slices(tw, fy, fu, ho, eEnd),
+    ...slices(tp, yp, up, hp, ex),
+    weld ? 2 * hp * line : Number.POSITIVE_INFINITY,
+  );
+  const tie = (): Answer => {
+    if (tied <= 0) return { state: 'fails', reason: 'nothing-left', resistance: tied };
+    return { state: T <= tied ? 'holds' : 'fails', demand: T, resistance: tied, utilisation: T / tied };
+  };
+
+  const stress = (...peaks: readonly number[]): Answer => {
+    const found = strength(V, ...peaks.map((per) => ({ per, resistance: 0.66 * 0.9 * fy })));
+    return options['elastic-shear'] === 'verdict' ? found : { ...found, state: 'information' };
+  };
+  const shear = (slenderness: number) => limitingStress(slenderness, fy);
+  const mean = options['cope-shear'] === 'mean';
+
+  const lambda = (hp * Math.sqrt(yp / 6.895)) / (10 * tp * Math.sqrt(475 + 280 * (hp / z1) ** 2));
+  const Q = lambda <= 0.7 ? 1 : lambda <= 1.41 ? 1.34 - 0.486 * lambda : 1.3 / lambda ** 2;
+  const plateMoment = (0.9 * yp * tp * hp ** 2) / 6;
+  const leastLeg = tp <= 12 ? 5 : tp <= 20 ? 6 : 8;
+
+  const [, sheared, cut] = edges.find(([upTo]) => d <= upTo)!;
+  const plateEdge = options['plate-edges'] === 'cut' ? cut : sheared;
+  const edge = (given: number, least: number, t: number) => size('fails', given, least, Math.min(12 * t, 150));
+  const each = (rule: (cope: Cope) => Answer): Answer => (coped ? sizes(...copes.map(rule)) : no('no-cope'));
+  const overhang = support ? (support.width - support.web) / 2 : 0;
+  const deepEnough = copes.map(({ depth }) => size('refer', depth, tf + r));
+  if (support && g < overhang) {
+    const root = support.flange + support.radius;
+    const [above, below] = [root - support.topOfSteel, h - (support.depth - root - support.topOfSteel)];
+    if (above > 0) deepEnough.push(size('refer', dt, above));
+    if (below > 0) deepEnough.push(size('refer', db, below));
+  }
+  const clear = ({ length }: Cope): Answer => {
+    const gap = g + length - overhang;
+    return gap > 0 ? size('refer', gap, 10) : { ...size('fails', gap, 10), reason: 'clash' };
+  };
+
+  return {
+    'web-gross-shear': strength(V, { per: 1, resistance: 0.9 * h * tw * shear((h - 2 * tf) / tw).fs }),
+    'stress-full': stress(cutOf(section, 0, h).peak),
+    'stress-cope': !coped ? no('no-cope') : channel ? no('channel-cope') : stress(...cuts.map(({ peak }) => peak)),
+    'cope-shear': onCope(
+      ...cuts.map(({ depth, peak }): Part => {
+        const { fs, slender } = shear(depth / tw);
+        return {
+          per: 1,
+          resistance: 0.9 * fs * (mean ? depth * tw : 1 / peak),
+          limit: slender && 'slender-cut-web',
+          always,
+        };
+      }),
+    ),
+    'web-net-shear': strength(V, { per: 1, resistance: 0.6 * 0.9 * fu * tw * (ho - n * dn), always }),
+    'web-block': mTop > 0 ? strength(V, { per: 1, resistance: webBlock, always }) : no('intact-flange'),
+    'web-tearout': webTears.length > 0 ? strength(V, ...webTears) : no('single-row'),
+    'cope-bending': onCope(...cuts.map(({ c, W }) => ({ per: g + c, resistance: 0.9 * fy * W, always }))),
+    'cope-buckling': coped && !top ? no('cut-edge-in-tension') : onCope(...buckling()),
+    'bolt-shear': onBolt(oneBolt, byCentre ? 1 / centreCoefficient(pattern, z) : elastic),
+    'web-bearing': onBolt(bearing(tw, fu), elastic),
+    'web-tie': T > 0 ? tie() : no('no-tie'),
+    'plate-bearing': onBolt(bearing(tp, up), elastic),
+    'plate-tearout': strength(V, ...upright(tp, yp, up, eBot, m), ...along(tp, yp, up, ex)),
+    'plate-gross-shear': strength(V, { per: 1, resistance: 0.6 * 0.9 * yp * tp * hp }),
+    'plate-net-shear': strength(V, { per: 1, resistance: 0.6 * 0.9 * up * tp * (hp - n * dn) }),
+    'plate-block': strength(V, { per: 1, resistance: block(1, tp, yp, up, eBot + rows, ex + wide, m) }),
+    'plate-bending': strength(V, { per: z, resistance: plateMoment }),
+    'plate-buckling': z1 <= tp / 0.15 ? no('short-plate') : strength(V, { per: z1, resistance: Q * plateMoment }),
+    weld: strength(V, {
+      per: Math.hypot(1, (6 * z) / hp) / (2 * hp),
+      resistance: line,
+      limit: (weld?.leg ?? 0) < leastLeg && 'weld-leg-below-least',
+    }),
+    'fit-pitch': n > 1 ? size('fails', p, 2.7 * d) : no('single-row'),
+    'fit-gauge': m > 1 ? size('fails', q, 2.7 * d) : no('single-column'),
+    'fit-edge-web':
+      mTop + mBottom > 0
+        ? sizes(
+            ...(mTop > 0 ? [edge(y1 - dt, cut, tw)] : []),
+            ...(mBottom > 0 ? [size('fails', h - db - yn, cut)] : []),
+          )
+        : no('no-bottom-cope'),
+    'fit-edge-plate': sizes(...[eTop, eBot, ex].map((given) => edge(given, plateEdge, tp))),
+    'fit-end': edge(eEnd, cut, tw),
+    'fit-plate-depth': sizes(
+      size('refer', hp, 0.5 * (h - 2 * (tf + r))),
+      size('refer', y1 - eTop, top ? dt : tf + r),
+      size('refer', h - yn - eBot, bottom ? db : tf + r),
+    ),
+    'fit-cope-length': each(({ length }) => size('refer', length, eEnd + wide + d0 / 2)),
+    'fit-cope-depth': deepEnough.length > 0 ? sizes(...deepEnough) : no(support ? 'clear-of-support' : 'no-support'),
+    'fit-cope-radius': each(({ radius }) => size('refer', radius ?? 0, 10)),
+    'fit-cope-clearance': support ? each(clear) : no('no-support'),
+    'fit-setback': size('refer', g, 8, 20),
+    'fit-rotation': weld
+      ? sizes(
+          size('refer', m > 1 ? Math.max(tp, tw) : Math.min(tp, tw), 0, d / 2 + 2),
+          size('refer', weld.leg, 0.625 * tp),
+        )
+      : no('no-weld'),
+    'fit-wrench': no('no-rule'),
+  };
+};

@@ -3,7 +3,8 @@ import type { Section } from '../shape/section.ts';
 /**
  * One family of rolled sections as its source lists it. Only what cannot be computed is kept; areas and moduli follow from the dimensions.
  *
- * A row reads `label mass h b tf tw r`, with a last word where another list labels the same shape otherwise.
+ * A row reads `label mass h b tf tw r`, without the mass where the label ends in it, and with a last word where another list labels the same
+ * shape otherwise.
  */
 export interface SectionTable {
   readonly family: string;
@@ -60,8 +61,10 @@ export const readTable = (table: SectionTable): SectionRow[] =>
 const readRow = (table: SectionTable, row: string): SectionRow => {
   const [label = '', ...rest] = row.split(' ');
   const [length, weight] = table.units === 'in-lb' ? [millimetresPerInch, kilogramsPerMetre] : [1, 1];
-  const [mass = 0, h = 0, b = 0, tf = 0, tw = 0, r = 0] = rest.slice(0, 6).map(Number);
-  const [, , , , , , otherLabel] = rest;
+  const sizes = rest.filter((one) => !one.includes('x')).map(Number);
+  const mass = sizes.length === 6 ? sizes.shift()! : Number(label.slice(label.lastIndexOf('x') + 1));
+  const [h = 0, b = 0, tf = 0, tw = 0, r = 0] = sizes;
+  const otherLabel = rest.find((one) => one.includes('x'));
   return {
     label,
     ...(otherLabel !== undefined && { otherLabel }),

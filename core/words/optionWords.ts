@@ -1,3 +1,5 @@
+import { capital } from './capital.ts';
+
 /** Plain words for the options of standards and their values. The same in every region. */
 const optionWords: Readonly<Record<string, string>> = {
   'elastic-shear': 'Elastic shear stress',
@@ -24,7 +26,6 @@ const optionWords: Readonly<Record<string, string>> = {
 };
 
 const spaced = (key: string): string => key.replace(/-/g, ' ');
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** Name of an option, as it begins a line. */
 export const optionName = (key: string): string => optionWords[key] ?? capital(spaced(key));

@@ -1,3 +1,5 @@
+import { capital } from './capital.ts';
+
 /** Everything the program says to people in one region's words. Codes and paths are those of the JSON. */
 export interface Words {
   /** cope (North America) or notch (elsewhere). */
@@ -54,8 +56,6 @@ const bounds = (limit: Readonly<Record<string, unknown>>): string =>
   Object.entries(limit)
     .map(([name, value]) => `${boundWords[name] ?? name} ${spoken(value)}`)
     .join(', ');
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** The sentence of a fault: what is wrong, and how to mend it. */
 export const faultText = (words: Words, faults: Readonly<Record<string, string>>, one: FaultLike): string => {

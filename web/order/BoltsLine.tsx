@@ -1,40 +1,8 @@
-import { boltSizeNames, findBoltSize } from '../../core/steel/bolts.ts';
-import { showQuantity } from '../../core/units/printQuantity.ts';
-import { toSystem } from '../../core/units/systems.ts';
-import { Choice } from '../field/Choice.tsx';
-import { Field } from '../field/Field.tsx';
-import { GradeField } from '../field/GradeField.tsx';
-import { entry, standard, units } from '../state/bench.ts';
+import { entry } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
-import { isFault, readField } from '../state/readField.ts';
 import { OrderLine } from './OrderLine.tsx';
+import { several } from './several.ts';
 import { Value } from './Value.tsx';
-
-const threads = [
-  { value: 'in', label: 'in plane' },
-  { value: 'out', label: 'out of plane' },
-];
-
-const made = [
-  { value: 'drilled', label: 'drilled' },
-  { value: 'punched', label: 'punched' },
-];
-
-/** More than one of them stands there, so that their distance matters. */
-const several = (path: string): boolean => {
-  const reading = readField(entry.value, path);
-  return reading !== undefined && !isFault(reading) && reading.value > 1;
-};
-
-/** The hole that the standard has for the bolt; empty where the bolt is not known. */
-const standardHole = (): string => {
-  const size = findBoltSize(textOf(entry.value, 'joint.bolts.size'));
-  if ('nearest' in size || !standard.value) return '';
-  const hole = toSystem(standard.value.materials.holeFor(size.diameter), '1,0', units.value);
-  return showQuantity(hole, '1,0', units.value);
-};
-
-const sizes = boltSizeNames.map((name) => ({ value: name, label: name.startsWith('M') ? name : `${name} in` }));
 
 const rows = (count: string): string => (count === '1' ? 'row' : 'rows');
 const columns = (count: string): string => (count === '1' || count === '' ? 'column' : 'columns');
@@ -71,31 +39,4 @@ const Sentence = () => {
 };
 
 /** The bolts through the web: size, class, pattern, place and holes. */
-export const BoltsLine = () => {
-  const hole = standardHole();
-  return (
-    <OrderLine name="bolts" title="Bolts" sentence={<Sentence />}>
-      <Choice path="joint.bolts.size" label="Size" options={sizes} />
-      <GradeField
-        path="joint.bolts.grade"
-        label="Class"
-        names={standard.value?.materials.boltGrades ?? []}
-        strengths={[{ name: 'fu', label: 'Tensile f_u' }]}
-      />
-      <Field path="joint.bolts.rows" label="Rows" />
-      {several('joint.bolts.rows') && <Field path="joint.bolts.pitch" label="Pitch" />}
-      <Field path="joint.bolts.columns" label="Columns" empty="one, assumed" />
-      {several('joint.bolts.columns') && <Field path="joint.bolts.gauge" label="Gauge" />}
-      <Field path="joint.firstRow" label="First row" />
-      <Field path="joint.endDistance" label="End distance" />
-      <Choice
-        path="joint.bolts.holes"
-        label="Holes"
-        options={made}
-        empty={standard.value ? `${standard.value.materials.holesAssumed} (assumed)` : 'assumed'}
-      />
-      <Field path="joint.bolts.hole" label="Hole size" empty={hole && `${hole} by the standard`} />
-      <Choice path="joint.bolts.threads" label="Threads" options={threads} empty="in plane (assumed)" />
-    </OrderLine>
-  );
-};
+export const BoltsLine = () => <OrderLine name="bolts" title="Bolts" sentence={<Sentence />} />;

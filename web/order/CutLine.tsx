@@ -1,5 +1,3 @@
-import { Field } from '../field/Field.tsx';
-import { Switch } from '../field/Switch.tsx';
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { OrderLine } from './OrderLine.tsx';
@@ -29,23 +27,6 @@ const Said = ({ edge }: { readonly edge: Edge }) => {
   );
 };
 
-const Fields = ({ edge }: { readonly edge: Edge }) => {
-  const title = `${edge === 'top' ? 'Top' : 'Bottom'} ${words.value.cope}`;
-  return (
-    <>
-      <Switch path={edge} label={title} off="none" />
-      {isOn(edge) && (
-        <fieldset class="part">
-          <legend class="unseen">{title}</legend>
-          <Field path={`${edge}.length`} label="Length" />
-          <Field path={`${edge}.depth`} label="Depth" />
-          <Field path={`${edge}.radius`} label="Corner R" empty="sharp, assumed" />
-        </fieldset>
-      )}
-    </>
-  );
-};
-
 /** What is cut off the end: the copes, and how far it is set back. */
 export const CutLine = () => (
   <OrderLine
@@ -56,9 +37,5 @@ export const CutLine = () => (
         <Said edge="top" />; <Said edge="bottom" />; set back <Value path="setback" missing="setback?" />.
       </>
     }
-  >
-    <Fields edge="top" />
-    <Fields edge="bottom" />
-    <Field path="setback" label="Setback" />
-  </OrderLine>
+  />
 );

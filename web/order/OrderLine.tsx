@@ -3,6 +3,7 @@ import { useEffect, useLayoutEffect, useRef } from 'preact/hooks';
 import { enter, WALK_END, type WalkEnd } from '../field/walk.ts';
 import { faults } from '../state/bench.ts';
 import { faultAt } from '../state/fieldText.ts';
+import { later } from '../state/later.ts';
 import { type LineName, lineOf } from '../state/tradeOrder.ts';
 import { goOn, openLine, takeWanted, wants } from './goTo.ts';
 
@@ -11,11 +12,11 @@ interface OrderLineProps {
   readonly title: string;
   /** The line in one sentence. */
   readonly sentence: ComponentChildren;
-  /** Its fields, shown while it is open. */
-  readonly children: ComponentChildren;
   /** Names of fields stand over them, where they are long. */
   readonly stacked?: boolean;
 }
+
+const fields = later(async () => (await import('./lineFields.ts')).lineFields);
 
 const focusWanted = (line: HTMLElement): void => {
   const wanted = takeWanted();
@@ -41,14 +42,15 @@ const ClosedFaults = ({ name }: { readonly name: LineName }) => (
   </>
 );
 
-/** One line of the order: a sentence that opens in place to its fields. Enter in its last field opens the next line. */
-export const OrderLine = ({ name, title, sentence, children, stacked = false }: OrderLineProps) => {
+/** One line of the order: a sentence that opens in place to its fields, which are no part of the first view. Enter in its last field opens the next line. */
+export const OrderLine = ({ name, title, sentence, stacked = false }: OrderLineProps) => {
   const line = useRef<HTMLFieldSetElement>(null);
   const open = openLine.value === name;
+  const Fields = open ? fields.value?.[name] : undefined;
   const wanted = wants.value;
   useLayoutEffect(() => {
-    if (open && line.current) focusWanted(line.current);
-  }, [open, wanted]);
+    if (Fields && line.current) focusWanted(line.current);
+  }, [Fields, wanted]);
   useEffect(() => {
     const fields = line.current;
     const onEnd = (event: Event) => goOn(name, (event as CustomEvent<WalkEnd>).detail.back);
@@ -76,7 +78,12 @@ export const OrderLine = ({ name, title, sentence, children, stacked = false }: 
           </button>
         </legend>
         <p class="sentence">{sentence}</p>
-        {open ? <div class={`order-fields${stacked ? ' stacked' : ''}`}>{children}</div> : <ClosedFaults name={name} />}
+        {Fields && (
+          <div class={`order-fields${stacked ? ' stacked' : ''}`}>
+            <Fields />
+          </div>
+        )}
+        {!open && <ClosedFaults name={name} />}
       </fieldset>
     </li>
   );

@@ -1,12 +1,8 @@
-import { standards } from '../../core/standards/index.ts';
 import { optionName, optionValue } from '../../core/words/optionWords.ts';
-import { Choice } from '../field/Choice.tsx';
 import { entry, standard } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { Value } from './Value.tsx';
-
-const titled = Object.values(standards).map(({ id, title, edition }) => ({ value: id, label: `${title}:${edition}` }));
 
 const chosenOptions = (): string[] =>
   Object.keys(standard.value?.options ?? {}).filter((key) => textOf(entry.value, `options.${key}`) !== '');
@@ -32,17 +28,4 @@ const Sentence = () => {
 };
 
 /** The design standard and its options. */
-export const StandardLine = () => (
-  <OrderLine name="standard" title="Standard" stacked sentence={<Sentence />}>
-    <Choice path="standard" label="Standard" options={titled} />
-    {Object.entries(standard.value?.options ?? {}).map(([key, values]) => (
-      <Choice
-        key={key}
-        path={`options.${key}`}
-        label={optionName(key)}
-        options={values.map((value) => ({ value, label: optionValue(value) }))}
-        empty={`${optionValue(values[0])} (assumed)`}
-      />
-    ))}
-  </OrderLine>
-);
+export const StandardLine = () => <OrderLine name="standard" title="Standard" stacked sentence={<Sentence />} />;

@@ -1,4 +1,5 @@
 import type { LaidText } from '../../core/drawing/laid.ts';
+import { capital } from '../../core/words/capital.ts';
 import { fieldName } from '../../core/words/words.ts';
 import { Field } from '../field/Field.tsx';
 import { words } from '../ladder/shown.ts';
@@ -11,8 +12,6 @@ interface Props {
   readonly sizes: readonly (LaidText & { readonly path: string })[];
   readonly place: ToScreen;
 }
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** The sizes of the piece as the fields they are, each on its place in its dimension. */
 export const DrawnFields = ({ sizes, place }: Props) => (

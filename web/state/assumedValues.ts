@@ -1,3 +1,4 @@
+import { capital } from '../../core/words/capital.ts';
 import { fieldName } from '../../core/words/words.ts';
 import { entry, words } from './bench.ts';
 import { shown } from './fieldText.ts';
@@ -8,8 +9,6 @@ export interface AssumedValue {
   readonly path: string;
   readonly text: string;
 }
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** Whether a part is there, and the way in which a value is given, say themselves in the order's sentences. */
 const speaksForItself = (path: string): boolean => /\.by$|^(top|bottom|support|joint\.kind)$/.test(path);

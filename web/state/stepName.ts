@@ -1,8 +1,7 @@
+import { capital } from '../../core/words/capital.ts';
 import { commonwealth } from '../../core/words/commonwealth.ts';
 import { fieldName } from '../../core/words/words.ts';
 import { type Entry, textOf } from './entry.ts';
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);
 
 /** What a step did, such as `Pitch 70 → 80` or `Bottom notch added`. */
 export const stepName = (before: Entry, after: Entry, path: string): string => {

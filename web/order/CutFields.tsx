@@ -1,0 +1,29 @@
+import { Field } from '../field/Field.tsx';
+import { Switch } from '../field/Switch.tsx';
+import { entry, words } from '../state/bench.ts';
+import { textOf } from '../state/entry.ts';
+
+const Cope = ({ edge }: { readonly edge: 'top' | 'bottom' }) => {
+  const title = `${edge === 'top' ? 'Top' : 'Bottom'} ${words.value.cope}`;
+  return (
+    <>
+      <Switch path={edge} label={title} off="none" />
+      {textOf(entry.value, edge) === 'on' && (
+        <fieldset class="part">
+          <legend class="unseen">{title}</legend>
+          <Field path={`${edge}.length`} label="Length" />
+          <Field path={`${edge}.depth`} label="Depth" />
+          <Field path={`${edge}.radius`} label="Corner R" empty="sharp, assumed" />
+        </fieldset>
+      )}
+    </>
+  );
+};
+
+export const CutFields = () => (
+  <>
+    <Cope edge="top" />
+    <Cope edge="bottom" />
+    <Field path="setback" label="Setback" />
+  </>
+);

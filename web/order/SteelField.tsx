@@ -1,0 +1,12 @@
+import { GradeField } from '../field/GradeField.tsx';
+import { standard } from '../state/bench.ts';
+
+const strengths = [
+  { name: 'fy', label: 'Yield f_y' },
+  { name: 'fu', label: 'Tensile f_u' },
+] as const;
+
+/** A steel by its grade in the standard, or by its strengths. */
+export const SteelField = ({ path }: { readonly path: string }) => (
+  <GradeField path={path} label="Grade" names={standard.value?.materials.grades ?? []} strengths={strengths} />
+);

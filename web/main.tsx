@@ -1,6 +1,7 @@
 import { effect } from '@preact/signals';
 import { render } from 'preact';
 import { watchPointer } from './field/afterPointer.ts';
+import { figure } from './piece/figure.ts';
 import { Bench } from './shell/Bench.tsx';
 import { listenForKeys } from './shell/keys.ts';
 import { goOffline } from './shell/offline.ts';
@@ -14,7 +15,7 @@ import { readKept, startKeeping } from './state/keep.ts';
 import { loadTheRest } from './state/later.ts';
 import { watchTabs } from './state/tabs.ts';
 
-/** The first view is drawn by then, ms; what it does without is fetched after. */
+/** After the piece stands, what the first view does without is fetched, ms. */
 const ONCE_IT_STANDS = 500;
 
 /** A link opens as a step on top of what was kept, and leaves the address, so that loading again does not open it twice. */
@@ -37,4 +38,8 @@ render(<Bench />, document.getElementById('bench')!);
 addEventListener('hashchange', () => void openLink());
 void openLink();
 void goOffline();
-setTimeout(loadTheRest, ONCE_IT_STANDS);
+const waiting = effect(() => {
+  if (figure.value === null) return;
+  setTimeout(loadTheRest, ONCE_IT_STANDS);
+  queueMicrotask(() => waiting());
+});

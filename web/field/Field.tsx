@@ -46,7 +46,9 @@ export const Field = ({ path, label, unit = unitAt(path), width, variant = 'box'
   const input = useRef<HTMLInputElement>(null);
   // A value that changes under the cursor, by a step or a proposal, is typed over as a whole.
   useLayoutEffect(() => {
-    if (editing.value !== path && document.activeElement === input.current) input.current?.select();
+    if (editing.value === path || document.activeElement !== input.current) return;
+    // Selecting makes the browser lay out the page: not before all of it is written.
+    queueMicrotask(() => input.current?.select());
   }, [text]);
   const digits = width ?? (variant === 'drawn' ? Math.max(2, text.length) : undefined);
   const field = (

@@ -7,7 +7,7 @@ import { shown, stale } from '../ladder/shown.ts';
 import { focused } from '../state/bench.ts';
 import { DrawnLines, DrawnWords } from './Drawn.tsx';
 import { DrawnFields } from './DrawnFields.tsx';
-import { type Figure, figure, path, pathLaid } from './figure.ts';
+import { type Figure, figure, path } from './figure.ts';
 import { measureRoom } from './measureRoom.ts';
 import { type Penned, penned, type ToScreen, toScreen } from './pen.ts';
 
@@ -83,8 +83,8 @@ const groundOf = (sizes: readonly LaidText[], place: ToScreen): string =>
     .join('');
 
 /** The path of the chosen rung; the box of the drawing without it governs, so that nothing moves when a rung is touched. */
-const pathOver = ({ laid, scale }: Figure): Penned | null =>
-  pathLaid.value && penned({ ...pathLaid.value, box: laid.box }, scale, null, 'path');
+const pathOver = ({ laid, over, scale }: Figure): Penned | null =>
+  over && penned({ ...over, box: laid.box }, scale, null, 'path');
 
 /** What the drawing shows, said in sentences. */
 const InWords = ({ it }: { it: Figure }) => (

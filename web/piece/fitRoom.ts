@@ -1,4 +1,4 @@
-import type { Drawing } from '../../core/drawing/drawing.ts';
+import type { Drawing, FailurePath } from '../../core/drawing/drawing.ts';
 import type { Laid } from '../../core/drawing/laid.ts';
 import { layoutDrawing } from '../../core/drawing/layout.ts';
 
@@ -31,8 +31,9 @@ const LEAST = 0.3;
 export const taken = ({ box }: Laid, scale: number, room: Room): number =>
   Math.max(((box.right - box.left) * scale) / room.width, ((box.bottom - box.top) * scale) / room.height);
 
-export const layAt = (drawing: Drawing, scale: number, { textSize }: Room): Laid =>
-  layoutDrawing(drawing, { values: 'gap', textHeight: textSize / scale });
+/** A drawing laid out at a scale, with a path over it if one is given. */
+export const layAt = (drawing: Drawing, scale: number, { textSize }: Room, over: FailurePath | null = null): Laid =>
+  layoutDrawing(drawing, { values: 'gap', textHeight: textSize / scale }, over);
 
 /** The scale at which this drawing would just go in, if its words stood around the piece as they do. */
 const wouldFit = ({ box }: Drawing, { laid, scale }: Fit, room: Room): number => {

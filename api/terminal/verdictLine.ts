@@ -24,7 +24,12 @@ const sentence = (report: Report, governing: Check | undefined, numbers: Numbers
     const given = `${numbers.amount(governing.resistance, unit)} ${unit}`;
     return say.failsByRule(title, given, `${limitText(numbers, governing)} ${unit}`);
   }
-  if (at === undefined || at === null) return say.governsWithoutReaction(title);
+  if (at === undefined || at === null)
+    return say.governsWithoutReaction(
+      title,
+      `${numbers.amount(governing.demand, unit)} ${unit}`,
+      `${numbers.amount(governing.resistance, unit)} ${unit}`,
+    );
   const says = report.verdict === 'fails' ? say.governsFailing : say.governs;
   return says(title, `${numbers.load(report.reaction)} ${numbers.force}`, `${numbers.failsAt(at)} ${numbers.force}`);
 };

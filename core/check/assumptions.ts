@@ -1,5 +1,6 @@
 import type { End } from '../end/schema.ts';
 import type { Standard } from '../standards/standard.ts';
+import { capital } from '../words/capital.ts';
 import { fieldName, filled, type Words } from '../words/words.ts';
 import type { Note } from './report.ts';
 
@@ -27,10 +28,8 @@ export const assumptionsOf = (end: End, standard: Standard, channel: boolean, wo
   if (joint.kind === 'fin-plate' && joint.weld.electrode === undefined) {
     say('electrode-assumed', { value: `${standard.materials.electrode} MPa` }, 'joint.weld.electrode');
   }
-  if (end.support?.section !== undefined && end.support.topOfSteel === undefined) {
+  if (end.support?.kind === 'beam-web' && end.support.section !== undefined && end.support.topOfSteel === undefined) {
     say('top-of-steel-assumed', {}, 'support.topOfSteel');
   }
   return notes;
 };
-
-const capital = (text: string): string => text.charAt(0).toUpperCase() + text.slice(1);

@@ -9,9 +9,10 @@ import { findGrade } from '../steel/grades.ts';
 import { nearest } from '../steel/nearest.ts';
 import { plain } from '../units/figures.ts';
 import { fromSystem, toSystem, unitOf } from '../units/systems.ts';
+import { capital } from '../words/capital.ts';
 import { commonwealth } from '../words/commonwealth.ts';
 import { faultSentences } from '../words/faults.ts';
-import { faultText, filled, type Words } from '../words/words.ts';
+import { faultText, fieldName, filled, type Words } from '../words/words.ts';
 import { assumptionsOf } from './assumptions.ts';
 import { checksOf } from './checks.ts';
 import { type Evaluation, evaluate } from './evaluate.ts';
@@ -48,6 +49,15 @@ const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Wor
     say('reaction-from-share', { share: plain(end.reaction.ofWebShear, 4), value }, 'reaction');
   }
   if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
+  if (end.support) say('support-outline', {}, 'support');
+  const plyPath = end.joint.kind === 'fin-plate' ? 'joint.plate.grade' : 'joint.ply.grade';
+  for (const [path, grade] of [
+    ['beam.grade', end.beam.grade],
+    [plyPath, plyOf(end.joint).grade],
+    ['joint.bolts.grade', end.joint.bolts.grade],
+  ] as const) {
+    if (typeof grade !== 'string') say('strength-given', { field: capital(fieldName(words, path)) }, path);
+  }
   for (const grade of new Set([end.beam.grade, plyOf(end.joint).grade])) {
     if (typeof grade !== 'string') continue;
     const found = findGrade(grade);

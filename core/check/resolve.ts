@@ -57,6 +57,8 @@ class Resolver {
   strength(grade: GradeGiven, thickness: number, path: string): { fy: number; fu: number } {
     if (typeof grade !== 'string') {
       const { units } = this.end;
+      if (grade.fy > grade.fu)
+        this.faults.push(fault('strength-impossible', `${path}.fy`, grade.fy, { most: grade.fu }));
       return { fy: fromSystem(grade.fy, '-2,1', units), fu: fromSystem(grade.fu, '-2,1', units) };
     }
     const { grades, strengthAt } = this.standard.materials;
@@ -73,22 +75,23 @@ class Resolver {
     return found ?? { fy: 0, fu: 0 };
   }
 
-  bolt(): { d: number; d0: number; dn: number; fub: number } {
+  bolt(): { d: number; d0: number; dStandard: number; dn: number; fub: number } {
     const { bolts } = this.end.joint;
     const { materials } = this.standard;
     const found = findBoltSize(bolts.size);
     if ('nearest' in found) {
       this.faults.push(fault('unknown-bolt-size', 'joint.bolts.size', bolts.size, found.nearest));
-      return { d: 0, d0: 0, dn: 0, fub: 0 };
+      return { d: 0, d0: 0, dStandard: 0, dn: 0, fub: 0 };
     }
     const d = found.diameter;
-    const d0 = bolts.hole === undefined ? materials.holeFor(d) : bolts.hole * lengthSize(this.end);
+    const dStandard = materials.holeFor(d);
+    const d0 = bolts.hole === undefined ? dStandard : bolts.hole * lengthSize(this.end);
     if (d0 < d) {
       const limit = { least: Number((d / lengthSize(this.end)).toPrecision(8)) };
       this.faults.push(fault('hole-smaller-than-bolt', 'joint.bolts.hole', bolts.hole, limit));
     }
     const dn = materials.netHole(d0, bolts.holes ?? materials.holesAssumed);
-    return { d, d0, dn, fub: this.boltStrength(d) };
+    return { d, d0, dStandard, dn, fub: this.boltStrength(d) };
   }
 
   private boltStrength(d: number): number {
@@ -120,17 +123,23 @@ class Resolver {
     return inForce;
   }
 
-  support(): SupportFacts {
+  /** Outline of a supporting beam, and the thickness of what the joint is fixed to. */
+  support(): { outline: SupportFacts; thickness: number } {
     const { support } = this.end;
-    if (support?.section === undefined) return noSupport;
+    const k = lengthSize(this.end);
+    const thickness = (support?.thickness ?? 0) * k;
+    if (typeof support?.grade === 'string') this.strength(support.grade, thickness || 1, 'support.grade');
+    if (support?.section === undefined) return { outline: noSupport, thickness };
     const found = findSection(support.section);
     if ('nearest' in found) {
       this.faults.push(fault('unknown-section', 'support.section', support.section, found.nearest));
-      return noSupport;
+      return { outline: noSupport, thickness };
     }
-    if (support.kind !== 'beam-web') return noSupport;
     const { h, b, tw, tf, r } = found.section;
-    return { here: true, h, b, tw, tf, r, topOfSteel: (support.topOfSteel ?? 0) * lengthSize(this.end) };
+    const fixedTo = thickness || (support.kind === 'column-flange' ? tf : tw);
+    if (support.kind !== 'beam-web') return { outline: noSupport, thickness: fixedTo };
+    const topOfSteel = (support.topOfSteel ?? 0) * k;
+    return { outline: { here: true, h, b, tw, tf, r, topOfSteel }, thickness: fixedTo };
   }
 
   level(): void {

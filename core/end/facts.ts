@@ -82,6 +82,8 @@ export interface Facts {
   readonly mBottom: number;
   readonly d: number;
   readonly d0: number;
+  /** Nominal hole that the standard gives this bolt. */
+  readonly dStandard: number;
   /** Hole diameter for net areas, d'. */
   readonly dn: number;
   readonly threadsIn: boolean;
@@ -104,6 +106,8 @@ export interface Facts {
   readonly holeAtCopeFace: boolean;
   readonly flangeLeft: boolean;
   readonly support: SupportFacts;
+  /** Thickness of the part of the support that the joint is fixed to; 0 where it is not told. */
+  readonly ts: number;
   /** Options in force, every key of the standard present. */
   readonly options: Readonly<Record<string, string>>;
 }

@@ -16,6 +16,7 @@ export interface Strengths {
   readonly Xu: number;
   readonly d: number;
   readonly d0: number;
+  readonly dStandard: number;
   readonly dn: number;
 }
 
@@ -44,15 +45,18 @@ const wholeShear = (section: Section): WholeShear => {
   return made;
 };
 
+/** mm: sizes that meet exactly in inches still meet once converted. */
+const NOISE = 1e-9;
+
 /** Columns that stand inside a cope of this length: those before the first whose hole lies wholly beyond its face. */
 const columnsInside = (c: number, eEnd: number, q: number, m: number, d0: number): number => {
   let inside = 0;
-  while (inside < m && c >= eEnd + inside * q - d0 / 2) inside += 1;
+  while (inside < m && c >= eEnd + inside * q - d0 / 2 - NOISE) inside += 1;
   return inside;
 };
 
 const holeAtFace = (c: number, eEnd: number, q: number, m: number, d0: number): boolean => {
-  for (let j = 0; j < m; j += 1) if (Math.abs(eEnd + j * q - c) < d0 / 2) return true;
+  for (let j = 0; j < m; j += 1) if (Math.abs(eEnd + j * q - c) < d0 / 2 - NOISE) return true;
   return false;
 };
 
@@ -61,7 +65,7 @@ export const factsOf = (
   end: End,
   section: Section,
   strengths: Strengths,
-  support: SupportFacts,
+  support: { readonly outline: SupportFacts; readonly thickness: number },
   options: Readonly<Record<string, string>>,
 ): Facts => {
   const k = lengthSize(end);
@@ -123,6 +127,7 @@ export const factsOf = (
     mBottom: db > 0 ? columnsInside(cb, eEnd, q, m, d0) : 0,
     d: strengths.d,
     d0,
+    dStandard: strengths.dStandard,
     dn: strengths.dn,
     threadsIn: bolts.threads !== 'out',
     z: g + eEnd + ((m - 1) * q) / 2,
@@ -142,7 +147,8 @@ export const factsOf = (
     tee: cuts.tee,
     holeAtCopeFace: (dt > 0 && holeAtFace(ct, eEnd, q, m, d0)) || (db > 0 && holeAtFace(cb, eEnd, q, m, d0)),
     flangeLeft: (dt > 0 && dt < tf) || (db > 0 && db < tf),
-    support,
+    support: support.outline,
+    ts: support.thickness,
     options,
   };
 };

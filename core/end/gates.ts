@@ -33,4 +33,10 @@ export const copeLimits: readonly Limit[] = [
   { when: flag('a hole at the face of a cope', (f) => f.holeAtCopeFace), reason: 'hole-at-cope-face', always: true },
   { when: flag('a cope shallower than the flange', (f) => f.flangeLeft), reason: 'flange-left', always: true },
 ];
+/** A hole wider than the standard one: slip and bearing then follow other rules. */
+export const wideHole: Limit = {
+  when: flag('a hole wider than the standard one', (f) => f.d0 > f.dStandard + 1e-9),
+  reason: 'hole-above-standard',
+  always: false,
+};
 export const channelCope: Limit = { when: isChannel, reason: 'channel-cope', always: true, noNumber: true };

@@ -40,7 +40,7 @@ export const ho = given('h_o', '1,0', (f) => f.ho);
 export const n = given('n', '0,0', (f) => f.n);
 export const m = given('m', '0,0', (f) => f.m);
 /** Columns inside the top cope. */
-export const mTop = given('m', '0,0', (f) => f.mTop);
+export const mTop = given('m_i', '0,0', (f) => f.mTop);
 export const p = given('p', '1,0', (f) => f.p);
 export const q = given('q', '1,0', (f) => f.q);
 export const y1 = given('y_1', '1,0', (f) => f.y1);
@@ -62,6 +62,8 @@ export const eTop = given('e_top', '1,0', (f) => f.eTop);
 export const eBot = given('e_bot', '1,0', (f) => f.eBot);
 export const ex = given('e_x', '1,0', (f) => f.ex);
 export const leg = given('s', '1,0', (f) => f.leg);
+/** Part of the support that the joint is fixed to; 0 where it is not told. */
+export const ts = given('t_s', '1,0', (f) => f.ts);
 
 /** Full section: second moment; first moment and thickness at the peak of V Q/(I t). */
 export const whole = {

@@ -107,6 +107,11 @@ class Writer {
     return row;
   }
 
+  /** In inches and kips, a formula fitted in MPa takes its stress in MPa all the same: said where it does. */
+  private inMPa(stress: Tree): string[] {
+    return this.system === 'in-kip' ? [`${symbolsOf(stress, this.facts).text} in MPa`] : [];
+  }
+
   /** The choices made within one step, in words and numbers. */
   private choices(tree: Tree): string[] {
     switch (tree.op) {
@@ -115,9 +120,12 @@ class Writer {
       case 'given':
       case 'step':
         return [];
+      case 'bare':
+        return this.inMPa(tree.of[0]);
       case 'pick': {
         const words: string[] = [];
         for (const { when, then } of tree.branches) {
+          words.push(...comparedIn(when).flatMap((one) => this.choices(one)));
           const met = testOf(when)(this.facts);
           words.push(said(when, met, this.facts, this.system));
           if (met) return [...words, ...this.choices(then)];

@@ -76,6 +76,8 @@ export const commonwealth: Words = {
     'no-support': "the supporting beam's section is not given",
     'clear-of-support': 'clear of the supporting flange',
     'no-weld': 'no weld in this joint',
+    'fin-plates-only': 'a rule for fin plates',
+    'hole-above-standard': 'the holes are wider than the standard ones',
     'short-plate': 'short plate, z_1 ≤ t_p/0.15',
     'cut-edge-in-tension': 'the cut edge is in tension',
     'hole-at-cope-face': 'a hole cuts the face of the notch',
@@ -123,6 +125,8 @@ export const commonwealth: Words = {
     'two-column-block':
       "With two columns this form's nominal strength equals the present US one, but φ 0.90 stands where that takes 0.75: the design value is a fifth higher. Option web-block: cautious takes 0.3.",
     'weld-slimmer-than-plate': 'The weld is sized for V z; a leg below 0.625 t_p cannot make the plate yield first.',
+    'support-outline':
+      "Of the support, the section's outline serves for clearances and its thickness for the weld's least leg; its own strength and a beam opposite are not checked.",
     'strength-given': '{field}: strength as given, not from a table.',
     'memory-grade': 'The strengths of {value} are from memory of an older standard: confirm them.',
   },

@@ -34,6 +34,7 @@ export const faultSentences: Readonly<Record<string, string>> = {
   'bolt-grade-not-for-size': 'Bolt grade {given} has no strength listed for {limit}; give its tensile strength.',
   'unknown-option': 'The option {given} is not one of this standard; known: {limit}.',
   'unknown-option-value': 'The option {field} cannot be {given}; it may be {limit}.',
+  'strength-impossible': 'A yield strength of {given} above the tensile strength cannot be; it must be {limit}.',
   'section-impossible': '{field} of {given} cannot be with the other sizes; it must be {limit}.',
   'cope-too-deep': '{field} of {given} leaves nothing of the beam; it must be {limit}.',
   'hole-smaller-than-bolt': 'The hole of {given} is smaller than the bolt; it must be {limit}.',

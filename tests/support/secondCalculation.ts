@@ -241,8 +241,11 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
   const long = rows > 15 * d ? Math.max(0.75, 1.075 - (0.005 * rows) / d) : 1;
   const oneBolt = 0.6 * 0.8 * ((Math.PI * d ** 2) / 4) * bolts.fu * (bolts.threads === 'in' ? 0.7 : 1) * long;
   const bearing = (t: number, u: number) => 3 * 0.67 * t * d * u;
-  const onBolt = (resistance: number, per: number): Answer =>
-    N > 1 ? strength(V, { per, resistance }) : { state: 'fails', reason: 'one-bolt', resistance, reactionAtFailure: 0 };
+  const wideHole = d0 > (d <= 24 ? d + 2 : d + 3) && 'hole-above-standard';
+  const onBolt = (resistance: number, per: number, limit: string | false = false): Answer =>
+    N > 1
+      ? strength(V, { per, resistance, limit })
+      : { state: 'fails', reason: 'one-bolt', resistance, reactionAtFailure: 0 };
 
   const planes = (t: number, y: number, u: number, L: number, Ln: number) =>
     2 * t * Math.min(0.6 * 0.9 * y * L, 0.6 * 0.9 * u * Ln);
@@ -268,10 +271,14 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
     0.9 * t * (n - 1) * (p - dn) * u + planes(t, y, u, edge + wide, edge + wide - (m - 0.5) * dn),
   ];
   const line = weld ? (0.67 * 0.67 * weld.electrode * weld.leg) / Math.SQRT2 : 0;
+  const rowByRow = (t: number, y: number, u: number, edge: number) =>
+    n * planes(t, y, u, edge + wide, edge + wide - (m - 0.5) * dn);
   const tied = Math.min(
     N * oneBolt,
     ...slices(tw, fy, fu, ho, eEnd),
+    rowByRow(tw, fy, fu, eEnd),
     ...slices(tp, yp, up, hp, ex),
+    rowByRow(tp, yp, up, ex),
     weld ? 2 * hp * line : Number.POSITIVE_INFINITY,
   );
   const tie = (): Answer => {
@@ -289,7 +296,8 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
   const lambda = (hp * Math.sqrt(yp / 6.895)) / (10 * tp * Math.sqrt(475 + 280 * (hp / z1) ** 2));
   const Q = lambda <= 0.7 ? 1 : lambda <= 1.41 ? 1.34 - 0.486 * lambda : 1.3 / lambda ** 2;
   const plateMoment = (0.9 * yp * tp * hp ** 2) / 6;
-  const leastLeg = tp <= 12 ? 5 : tp <= 20 ? 6 : 8;
+  const thicker = Math.max(tp, support?.web ?? 0);
+  const leastLeg = thicker <= 12 ? 5 : thicker <= 20 ? 6 : 8;
 
   const [, sheared, cut] = edges.find(([upTo]) => d <= upTo)!;
   const plateEdge = options['plate-edges'] === 'cut' ? cut : sheared;
@@ -329,9 +337,9 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
     'cope-bending': onCope(...cuts.map(({ c, W }) => ({ per: g + c, resistance: 0.9 * fy * W, always }))),
     'cope-buckling': coped && !top ? no('cut-edge-in-tension') : onCope(...buckling()),
     'bolt-shear': onBolt(oneBolt, byCentre ? 1 / centreCoefficient(pattern, z) : elastic),
-    'web-bearing': onBolt(bearing(tw, fu), elastic),
+    'web-bearing': onBolt(bearing(tw, fu), elastic, wideHole),
     'web-tie': T > 0 ? tie() : no('no-tie'),
-    'plate-bearing': onBolt(bearing(tp, up), elastic),
+    'plate-bearing': onBolt(bearing(tp, up), elastic, wideHole),
     'plate-tearout': strength(V, ...upright(tp, yp, up, eBot, m), ...along(tp, yp, up, ex)),
     'plate-gross-shear': strength(V, { per: 1, resistance: 0.6 * 0.9 * yp * tp * hp }),
     'plate-net-shear': strength(V, { per: 1, resistance: 0.6 * 0.9 * up * tp * (hp - n * dn) }),
@@ -369,7 +377,7 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
           size('refer', m > 1 ? Math.max(tp, tw) : Math.min(tp, tw), 0, d / 2 + 2),
           size('refer', weld.leg, 0.625 * tp),
         )
-      : no('no-weld'),
+      : no('fin-plates-only'),
     'fit-wrench': no('no-rule'),
   };
 };

@@ -14,13 +14,13 @@ const share = pick([[cautious, constant('k', 0.3)]], constant('k', 0.5));
 
 /** General form: full tension plane, with gross shear yielding or net shear rupture, the lesser. */
 export const generalBlock = ({ Agv, Anv, Ant }: Block, fy: Tree<Stress>, fu: Tree<Stress>) => {
-  const pull = step('T', times(phi, Ant, fu), source);
+  const pull = step('P_t', times(phi, Ant, fu), source);
   return step('R_r', least(plus(pull, times(0.6, phi, Agv, fy)), plus(pull, times(0.6, phi, Anv, fu))), source);
 };
 
 const copedBlock = ({ Agv, Anv, Ant }: Block) => {
   const pull = step(
-    'T',
+    'P_t',
     times(share, phi, Ant, fu),
     source,
     'where the flange is cut away, this share of the tension plane counts',

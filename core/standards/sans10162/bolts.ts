@@ -1,5 +1,5 @@
 import { elasticForce } from '../../end/boltGroup.ts';
-import { oneBolt } from '../../end/gates.ts';
+import { oneBolt, wideHole } from '../../end/gates.ts';
 import { d, flag, fu, fub, fup, n, p, tp, tw } from '../../end/given.ts';
 import { centreForce } from '../../end/instantaneousCentre.ts';
 import { all, atMost, constant, minus, most, over, pick, squared, step, type Tree, times } from '../../formula/tree.ts';
@@ -66,6 +66,7 @@ const rule = (t: Tree<Length>, fu: Tree<Stress>): StrengthRule => ({
       demand: elasticForce,
       resistance: bearingOn(t, fu),
       unbounded: oneBolt,
+      limits: [wideHole],
     },
   ],
 });

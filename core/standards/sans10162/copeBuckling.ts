@@ -75,8 +75,8 @@ const doubleCope = (): Way => {
     resistance: step('M_r', times(phi, least(Fcr, fy), W), source),
     off: [uncoped, noRectangle],
     limits: [
-      ...common,
       { when: not(below(0, fd)), reason: 'cope-deeper-than-method', always: true, noNumber: true },
+      ...common,
       limit(atMost(c, times(2, h)), 'cope-longer-than-method'),
       limit(atMost(dc, times(0.2, h)), 'cope-deeper-than-method'),
     ],

@@ -17,7 +17,7 @@ export const noTee: Gate = { when: flag('', (f) => !f.tee.here), reason: 'no-cop
  * to f_s; option `mean` takes the average over the depth. k_v = 5.34 needs both edges held, so beyond the first limit it refers.
  */
 const way = (of: 'rectangle' | 'tee', cut: Cut, off: Gate): Way => {
-  const slenderness = step('h_o/t_w', over(cut.depth, tw), source);
+  const slenderness = step('λ_o', over(cut.depth, tw), source);
   const fs = shearStress(slenderness, fy);
   return {
     of,

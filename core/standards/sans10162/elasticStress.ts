@@ -1,6 +1,6 @@
-import { type Gate, isChannel, uncoped } from '../../end/gates.ts';
+import { coped as endCoped, type Gate, isChannel, uncoped } from '../../end/gates.ts';
 import { type Cut, flag, fy, rectangle, tee, V, whole } from '../../end/given.ts';
-import { not, over, step, times } from '../../formula/tree.ts';
+import { all, not, over, step, times } from '../../formula/tree.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { noRectangle, noTee } from './copeShear.ts';
 import { phi } from './factors.ts';
@@ -20,10 +20,10 @@ const way = (of: string, section: Pick<Cut, 'I' | 'Q' | 't'>, off: readonly Gate
   informs,
 });
 
-const coped: Gate = { when: isChannel, reason: 'channel-cope' };
+const coped: Gate = { when: all(isChannel, endCoped), reason: 'channel-cope' };
 
 export const stressFull: StrengthRule = { source, ways: [way('', whole, [])] };
 export const stressCope: StrengthRule = {
   source,
-  ways: [way('rectangle', rectangle, [uncoped, noRectangle, coped]), way('tee', tee, [uncoped, noTee, coped])],
+  ways: [way('rectangle', rectangle, [coped, uncoped, noRectangle]), way('tee', tee, [coped, uncoped, noTee])],
 };

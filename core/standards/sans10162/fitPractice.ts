@@ -144,7 +144,7 @@ export const fitSetback: FitRule = {
 };
 
 const thinner = pick([[oneColumn, least(tp, tw)]], most(tp, tw));
-const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate'), reason: 'no-weld' };
+const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate'), reason: 'fin-plates-only' };
 
 /** The end turns by bolts ploughing the thinner ply (both plies from two columns up), and the weld outlasts the plate. */
 export const fitRotation: FitRule = {

@@ -6,7 +6,7 @@ import { shearStress } from './shearStress.ts';
 
 /** Shear of the full I or channel, SANS 10162-1:2011 cl. 13.4.1.1: full depth times web, slenderness of the clear web. */
 const source = { clause: '13.4.1.1', basis: 'memory' } as const;
-const slenderness = step('h_w/t_w', over(minus(h, times(2, tf)), tw), source, 'h_w = h − 2 t_f');
+const slenderness = step('λ_w', over(minus(h, times(2, tf)), tw), source, 'h_w = h − 2 t_f');
 
 export const webGrossShear: StrengthRule = {
   source,

@@ -96,6 +96,8 @@ export const sampleFacts = (given: Sample = {}): Facts => {
     mBottom: inside(cb, db),
     d,
     d0,
+    dStandard: 22,
+    ts: 0,
     dn: d0,
     threadsIn: true,
     z: g + eEnd + ((m - 1) * q) / 2,

@@ -3,11 +3,12 @@ import type { Check, Report, State } from '../../core/check/report.ts';
 import { limitText } from '../../core/sheet/fitLimit.ts';
 import { type Numbers, numbersOf } from '../../core/sheet/numbers.ts';
 import { sheetWords as say } from '../../core/sheet/sheetWords.ts';
+import { titleOf } from '../../core/sheet/verdictSentence.ts';
 import { standards } from '../../core/standards/index.ts';
 import type { Words } from '../../core/words/words.ts';
 import { type Column, type Row, setColumns } from './columns.ts';
 import { printWorking } from './printWorking.ts';
-import { titleOf, verdictLine } from './verdictLine.ts';
+import { verdictLine } from './verdictLine.ts';
 import { hanging, harmless } from './wrap.ts';
 
 /** State, title, demand / resistance, unit, ratio, fails at, clause, basis. */

@@ -6,7 +6,7 @@ import type { SetRun, TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { type Lines, plainRun, wrap } from './textBlock.ts';
-import { titleOf } from './verdictLine.ts';
+import { titleOf } from './verdictSentence.ts';
 
 /** A row of the table, or the heading of the rules of fit that are not held. */
 export type Row = CheckRow | { readonly kind: 'fit' };

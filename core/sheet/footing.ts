@@ -7,7 +7,7 @@ import type { SetRun } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { plainRun, setLines, wrap } from './textBlock.ts';
-import { titleOf } from './verdictLine.ts';
+import { titleOf } from './verdictSentence.ts';
 
 const LEADING = 3.45;
 

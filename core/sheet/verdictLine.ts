@@ -1,12 +1,12 @@
 import type { Check } from '../check/report.ts';
 import type { Context } from './context.ts';
-import { limitText } from './fitLimit.ts';
 import { FIGURE_TOP, LEFT, NARROW, VERDICT_TOP, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { drawSign, isClose } from './sign.ts';
 import { atMostLines, setLines, wrap } from './textBlock.ts';
+import { verdictSentence } from './verdictSentence.ts';
 
 const word: TextStyle = { size: 18, family: 'wide', bold: true };
 const tries: readonly { style: TextStyle; lines: number; leading: number; first: number }[] = [
@@ -17,50 +17,6 @@ const tries: readonly { style: TextStyle; lines: number; leading: number; first:
 
 export const governingOf = ({ input }: Context): Check | undefined =>
   input.report.checks.find(({ id }) => id === input.report.governing);
-
-export const titleOf = ({ title, ofText }: Check): string => (ofText ? `${title}, ${ofText}` : title);
-
-/** What refers and why: by name where one or two do for the same reason, else by their number. */
-const refersText = (checks: readonly Check[]): string => {
-  const refers = checks.filter(({ state }) => state === 'refer');
-  const reasons = [...new Set(refers.map(({ reasonText = '' }) => reasonText))];
-  return reasons
-    .map((reason) => {
-      const titles = refers.filter(({ reasonText = '' }) => reasonText === reason).map(titleOf);
-      return say.refers(titles.length > 2 ? say.checks(titles.length) : titles.join(', '), reason);
-    })
-    .join('; ');
-};
-
-/** What decides, in one sentence. */
-const sentence = (context: Context): string => {
-  const { input, numbers } = context;
-  const { report } = input;
-  const governing = governingOf(context);
-  const load = (text: string): string => `${text} ${numbers.force}`;
-  const reaction = load(numbers.load(report.reaction));
-  if (report.verdict === 'refer') {
-    const least = governing && governing.state !== 'refer' && governing.reactionAtFailure;
-    const others = least ? say.leastOthers(titleOf(governing), load(numbers.failsAt(least))) : '';
-    return `${refersText(report.checks)}.${others}`;
-  }
-  if (!governing) return '';
-  const title = titleOf(governing);
-  if (governing.state === 'fails' && governing.id.startsWith('fit-')) {
-    const { unit } = governing;
-    const given = `${numbers.amount(governing.resistance, unit)} ${unit}`;
-    return say.failsByRule(title, given, `${limitText(numbers, governing)} ${unit}`);
-  }
-  const at = governing.reactionAtFailure;
-  if (at === undefined || at === null) {
-    const amount = (value: number | null): string => `${numbers.amount(value, governing.unit)} ${governing.unit}`;
-    return say.governsWithoutReaction(title, amount(governing.demand), amount(governing.resistance));
-  }
-  const failsAt = load(numbers.failsAt(at));
-  return report.verdict === 'fails'
-    ? say.governsFailing(title, reaction, failsAt)
-    : say.governs(title, reaction, failsAt);
-};
 
 /** The verdict's sign, word and ratio, and the sentence. */
 export const drawVerdict = (context: Context): void => {
@@ -91,8 +47,8 @@ const drawClose = ({ pen, numbers }: Context, middle: number): number => {
 };
 
 const drawSentence = (context: Context, left: number, right: number): void => {
-  const { pen } = context;
-  const runs: SetRun[] = richText(sentence(context), 'prose');
+  const { pen, input, numbers } = context;
+  const runs: SetRun[] = richText(verdictSentence(input.report, numbers), 'prose');
   for (const { style, lines, leading, first } of tries) {
     const broken = wrap(pen, runs, style, right - left);
     if (broken.length > lines && style !== tries.at(-1)!.style) continue;

@@ -8,7 +8,7 @@ import type { SetRun, TextStyle } from './pen.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { oneLine, plainRun, wrap } from './textBlock.ts';
 import { drawCautions, fingerprintText } from './titleBlock.ts';
-import { titleOf } from './verdictLine.ts';
+import { titleOf } from './verdictSentence.ts';
 import { type Step, stepsOf } from './workingLines.ts';
 import { sourceText } from './workingZone.ts';
 

@@ -5,7 +5,8 @@ import type { SetRun, TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { plainRun, setLines, wrap } from './textBlock.ts';
-import { governingOf, titleOf } from './verdictLine.ts';
+import { governingOf } from './verdictLine.ts';
+import { titleOf } from './verdictSentence.ts';
 import { ratioText, type Step, shortLine, stepsOf, wholeLine } from './workingLines.ts';
 
 const HEADING = 4.6;

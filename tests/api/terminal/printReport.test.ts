@@ -94,7 +94,7 @@ describe('the working for a person', () => {
 
   test('stands on a line for each side where it does not fit', () => {
     const text = printReport(reportOf(exampleEnd, true));
-    expect(text).toMatch(/\n {2}R_r = min\(T .*\n {6}= min\(.*\n {6}= [\d.]+ kN\n/);
+    expect(text).toMatch(/\n {2}R_r = min\(P_t .*\n {6}= min\(.*\n {6}= [\d.]+ kN\n/);
   });
 
   test('does not say a value twice', () => {

@@ -4,8 +4,7 @@ import { watchPointer } from './field/afterPointer.ts';
 import { figure } from './piece/figure.ts';
 import { Bench } from './shell/Bench.tsx';
 import { listenForKeys } from './shell/keys.ts';
-import { goOffline } from './shell/offline.ts';
-import { entry } from './state/bench.ts';
+import { entry, lastGood } from './state/bench.ts';
 import { carried } from './state/carried.ts';
 import { demoEntry } from './state/demo.ts';
 import { begin } from './state/edits.ts';
@@ -13,7 +12,6 @@ import { textOf } from './state/entry.ts';
 import { isLink } from './state/isLink.ts';
 import { readKept, startKeeping } from './state/keep.ts';
 import { loadTheRest } from './state/later.ts';
-import { watchTabs } from './state/tabs.ts';
 
 /** After the piece stands, what the first view does without is fetched, ms. */
 const ONCE_IT_STANDS = 500;
@@ -26,20 +24,29 @@ const openLink = async (): Promise<void> => {
   await carried((carry) => carry.openLink(hash.slice(1)));
 };
 
+const bringTheRest = async (): Promise<void> => {
+  loadTheRest();
+  try {
+    const { attend } = await import('./shell/attend.ts');
+    attend();
+  } catch {
+    addEventListener('online', () => void bringTheRest(), { once: true });
+  }
+};
+
 begin(readKept() ?? demoEntry());
 startKeeping();
 effect(() => {
   document.title = `${textOf(entry.value, 'mark') || 'Bench'} – Copewright`;
 });
-watchTabs();
 listenForKeys();
 watchPointer();
 render(<Bench />, document.getElementById('bench')!);
 addEventListener('hashchange', () => void openLink());
 void openLink();
-void goOffline();
 const waiting = effect(() => {
-  if (figure.value === null) return;
-  setTimeout(loadTheRest, ONCE_IT_STANDS);
+  // Of an end that is not complete yet there is no piece to wait for.
+  if (figure.value === null && lastGood.value !== null) return;
+  setTimeout(() => void bringTheRest(), ONCE_IT_STANDS);
   queueMicrotask(() => waiting());
 });

@@ -30,13 +30,19 @@ const policy = (): Plugin => ({
 /** Parts of the PDF writer that no sheet uses: they turn web pages into pictures. */
 const UNUSED = ['html2canvas', 'canvg', 'dompurify'];
 
-/** Leaves them out of the build; the writer asks for them only when such a page is given to it. */
+/** Fetches styles and further chunks ahead of a part that is loaded later; no part here has any. */
+const PRELOAD = '\0vite/preload-helper.js';
+
+/** Leaves both out of the build; the writer asks for the former only when such a page is given to it. */
 const lean = (): Plugin => ({
   name: 'lean',
   apply: 'build',
   enforce: 'pre',
   resolveId: (id) => (UNUSED.includes(id) ? `\0unused:${id}` : null),
-  load: (id) => (id.startsWith('\0unused:') ? 'export default undefined;' : null),
+  load: (id) => {
+    if (id === PRELOAD) return 'export const __vitePreload = (load) => load();';
+    return id.startsWith('\0unused:') ? 'export default undefined;' : null;
+  },
 });
 
 /** Tells the service worker which files the build has, and names the version by what is in them. */
@@ -67,6 +73,8 @@ export default defineConfig({
     target: 'es2022',
     assetsInlineLimit: 0,
     modulePreload: false,
+    // All styles in the page's one file: no part that is loaded later waits for its own.
+    cssCodeSplit: false,
     rollupOptions: {
       input: { index: here('index.html'), sw: here('sw.ts') },
       output: {

@@ -1,6 +1,8 @@
 import { loadavg } from 'node:os';
 import { standards } from '../../core/standards/index.ts';
+import { apiBench } from './apiBench.ts';
 import { coreBench } from './coreBench.ts';
+import { sheetBench } from './sheetBench.ts';
 import type { Figure } from './timing.ts';
 
 const kept = ({ value, ceiling, more }: Figure): boolean => (more ? value >= ceiling : value <= ceiling);
@@ -20,6 +22,8 @@ const collect = (rows: readonly Figure[]) => {
 
 process.stdout.write(`Node ${process.version}, load ${loadavg()[0]!.toFixed(2)}; medians of interleaved rounds\n`);
 for (const standard of Object.values(standards)) collect(coreBench(standard));
+collect(await sheetBench());
+collect(await apiBench());
 
 process.stdout.write(`load ${loadavg()[0]!.toFixed(2)} at the end\n`);
 const broken = figures.filter((figure) => !kept(figure));

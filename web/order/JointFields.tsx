@@ -1,5 +1,6 @@
 import { showQuantity } from '../../core/units/printQuantity.ts';
 import { toSystem } from '../../core/units/systems.ts';
+import { choicesOf } from '../../core/words/choiceWords.ts';
 import { Choice } from '../field/Choice.tsx';
 import { Field } from '../field/Field.tsx';
 import { SectionField } from '../field/SectionField.tsx';
@@ -8,13 +9,6 @@ import { entry, standard, units } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { isPly, plyPath } from './isPly.ts';
 import { SteelField } from './SteelField.tsx';
-
-const kinds = [
-  { value: 'fin-plate', label: 'fin plate' },
-  { value: 'web-bolts', label: 'web bolted to a ply' },
-];
-
-const supports = [{ value: 'beam-web', label: "beam's web" }];
 
 /** The weld metal that is taken where none is given. */
 const weldMetal = (): string => {
@@ -26,7 +20,7 @@ const weldMetal = (): string => {
 const SupportFields = () => (
   <fieldset class="part">
     <legend class="unseen">Support</legend>
-    <Choice path="support.kind" label="Face" options={supports} />
+    <Choice path="support.kind" label="Face" options={choicesOf('support.kind')} />
     <SectionField path="support.section" label="Section" />
     <Field path="support.topOfSteel" label="Top above" empty="level, assumed" />
   </fieldset>
@@ -36,7 +30,7 @@ export const JointFields = () => {
   const ply = plyPath();
   return (
     <>
-      <Choice path="joint.kind" label="Kind" options={kinds} />
+      <Choice path="joint.kind" label="Kind" options={choicesOf('joint.kind')} />
       <Field path={`${ply}.thickness`} label="Thickness" />
       <SteelField path={`${ply}.grade`} />
       <Field path={`${ply}.topEdge`} label="Top edge" />

@@ -1,21 +1,22 @@
 import { Footing, Ladder, VerdictStrip } from '../ladder/index.ts';
 import { Order } from '../order/Order.tsx';
 import { Piece } from '../piece/index.ts';
+import { confirmShown } from '../state/confirming.ts';
 import { later } from '../state/later.ts';
 import { Stress } from '../stress/index.ts';
 import { Announcer } from './Announcer.tsx';
-import { DropPlace } from './DropPlace.tsx';
 import { Foot } from './Foot.tsx';
 import { Head } from './Head.tsx';
 import { finderShown, keysShown } from './keys.ts';
 import { Notices } from './Notices.tsx';
 import { TopBand } from './TopBand.tsx';
 
-const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
+const overlays = later(async () => (await import('./Overlays.tsx')).Overlays);
 
-const OpenDialogs = () => {
-  const Dialogs = (keysShown.value || finderShown.value) && dialogs.value;
-  return Dialogs && <Dialogs />;
+const Over = () => {
+  const asked = keysShown.value || finderShown.value || confirmShown.value;
+  const Overlays = asked ? overlays.value : overlays.ready;
+  return Overlays && <Overlays />;
 };
 
 /** The bench: order, piece and ladder under one head. */
@@ -43,7 +44,6 @@ export const Bench = () => (
     <Foot />
     <VerdictStrip />
     <Announcer />
-    <OpenDialogs />
-    <DropPlace />
+    <Over />
   </>
 );

@@ -4,8 +4,9 @@ import { useEffect, useRef } from 'preact/hooks';
 import { fieldName, type Words } from '../../core/words/words.ts';
 import { goTo } from '../order/goTo.ts';
 import { entry, words } from '../state/bench.ts';
-import { type Entry, textOf } from '../state/entry.ts';
+import type { Entry } from '../state/entry.ts';
 import { numberFields } from '../state/fields.ts';
+import { isThere } from '../state/isThere.ts';
 import { Dialog } from './Dialog.tsx';
 import { finderShown } from './keys.ts';
 
@@ -32,19 +33,9 @@ const others = [
   'sheet.paper',
 ];
 
-/** Parts of the end to which a path belongs, and whether the entry has them. */
-const isThere = (it: Entry, path: string): boolean => {
-  const [first = '', second = ''] = path.split('.');
-  if (/^(top|bottom|support)\./.test(path)) {
-    return textOf(it, first) === 'on' && !/^support\.(thickness|grade|otherReaction)/.test(path);
-  }
-  if (path === 'joint.ply.grade' || second === 'ply') return textOf(it, 'joint.kind') === 'web-bolts';
-  if (second === 'plate' || second === 'weld') return textOf(it, 'joint.kind') !== 'web-bolts';
-  return true;
-};
-
-/** Fields of own sizes and strengths are reached through the list that turns to them. */
-const isOwn = (path: string): boolean => /^beam\.section\.|\.grade\.f[yu]$|ofWebShear$/.test(path);
+/** Fields of own sizes and strengths are reached through the list that turns to them; others are no fields of the bench yet. */
+const isOwn = (path: string): boolean =>
+  /^beam\.section\.|\.grade\.f[yu]$|ofWebShear$|^support\.(thickness|otherReaction)/.test(path);
 
 const found = (it: Entry, of: Words, text: string): { readonly path: string; readonly name: string }[] => {
   const wanted = text.trim().toLowerCase();

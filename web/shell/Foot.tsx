@@ -1,7 +1,7 @@
 import { Sign } from '../ladder/Sign.tsx';
 import { words } from '../state/bench.ts';
 import { canKeep, keptAt } from '../state/keep.ts';
-import { isOffline, isStored } from './offline.ts';
+import { isOffline, isStored } from '../state/network.ts';
 
 const legend = [
   ['holds', 'holds'],

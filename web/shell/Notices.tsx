@@ -1,7 +1,6 @@
 import type { TargetedEvent } from 'preact';
+import { newVersion, otherTab } from '../state/network.ts';
 import { notice } from '../state/notice.ts';
-import { otherTab } from '../state/tabs.ts';
-import { newVersion, takeNewVersion } from './offline.ts';
 
 const dismiss = (): void => {
   notice.value = null;
@@ -63,7 +62,7 @@ export const Notices = () => (
     {newVersion.value && (
       <p class="notice">
         A new version is ready.
-        <button type="button" class="button" onClick={takeNewVersion}>
+        <button type="button" class="button" onClick={newVersion.value}>
           Load it
         </button>
       </p>

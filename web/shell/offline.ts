@@ -1,32 +1,25 @@
-import { signal } from '@preact/signals';
-
-/** The page has no network; every check still works. */
-export const isOffline = signal(false);
-/** The page is stored whole, so that it opens without a network. */
-export const isStored = signal(false);
-/** A newer version waits for this page to let it in. */
-export const newVersion = signal(false);
+import { isOffline, isStored, newVersion } from '../state/network.ts';
 
 let waiting: ServiceWorker | null = null;
+
+/** Lets the newer version in, or loads the page again where another tab let it in; what stands in the fields was kept by then. */
+const takeNewVersion = (): void => {
+  const { serviceWorker } = navigator;
+  if (!waiting) location.reload();
+  serviceWorker.addEventListener('controllerchange', () => location.reload(), { once: true });
+  waiting?.postMessage('take over');
+};
 
 const watch = (registration: ServiceWorkerRegistration): void => {
   const note = () => {
     isStored.value = registration.active !== null;
     waiting = registration.waiting;
-    newVersion.value = waiting !== null && registration.active !== null;
+    newVersion.value = waiting !== null && registration.active !== null ? takeNewVersion : null;
   };
   note();
   const follow = (worker: ServiceWorker | null) => worker?.addEventListener('statechange', note);
   follow(registration.installing);
   registration.addEventListener('updatefound', () => follow(registration.installing));
-};
-
-/** Lets the newer version in, or loads the page again where another tab let it in; what stands in the fields was kept by then. */
-export const takeNewVersion = (): void => {
-  const { serviceWorker } = navigator;
-  if (!waiting) location.reload();
-  serviceWorker.addEventListener('controllerchange', () => location.reload(), { once: true });
-  waiting?.postMessage('take over');
 };
 
 /** Stores the page for use without a network, and watches the network. */
@@ -41,7 +34,7 @@ export const goOffline = async (): Promise<void> => {
   if (navigator.serviceWorker.controller) {
     navigator.serviceWorker.addEventListener('controllerchange', () => {
       waiting = null;
-      newVersion.value = true;
+      newVersion.value = takeNewVersion;
     });
   }
   try {

@@ -1,7 +1,10 @@
 import { capital } from '../../core/words/capital.ts';
+import { choiceWords } from '../../core/words/choiceWords.ts';
 import { fieldName } from '../../core/words/words.ts';
 import { entry, words } from './bench.ts';
-import { shown } from './fieldText.ts';
+import { textOf } from './entry.ts';
+import { shown, unitAt } from './fieldText.ts';
+import { isThere } from './isThere.ts';
 import { lineOf } from './tradeOrder.ts';
 
 /** A value that the bench put in and nobody has touched. */
@@ -10,11 +13,18 @@ export interface AssumedValue {
   readonly text: string;
 }
 
-/** Whether a part is there, and the way in which a value is given, say themselves in the order's sentences. */
-const speaksForItself = (path: string): boolean => /\.by$|^(top|bottom|support|joint\.kind)$/.test(path);
+/** That a part is there, and the way in which a value is given, show themselves in the values. */
+const showsItself = (path: string): boolean => path.endsWith('.by') || textOf(entry.value, path) === 'on';
 
-/** Values that the bench put in and nobody has touched, in words. */
+const said = (path: string): string => {
+  const value = shown(path);
+  return [capital(fieldName(words.value, path)), choiceWords[path]?.[value] ?? value, unitAt(path)]
+    .filter(Boolean)
+    .join(' ');
+};
+
+/** Values of the end that the bench put in and nobody has touched, in words. */
 export const assumedValues = (): AssumedValue[] =>
   entry.value.assumed
-    .filter((path) => lineOf(path) !== undefined && !speaksForItself(path))
-    .map((path) => ({ path, text: `${capital(fieldName(words.value, path))} ${shown(path)}` }));
+    .filter((path) => lineOf(path) !== undefined && !showsItself(path) && isThere(entry.value, path))
+    .map((path) => ({ path, text: said(path) }));

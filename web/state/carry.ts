@@ -1,8 +1,8 @@
 import { complete } from '../../core/check/complete.ts';
 import type { Examined } from '../../core/check/examined.ts';
-
 import { assumedValues } from './assumedValues.ts';
 import { demanded, examination } from './bench.ts';
+import { onceConfirmed } from './confirming.ts';
 import { replace } from './edits.ts';
 import { entryOf } from './entryOf.ts';
 import { fileText } from './fileText.ts';
@@ -35,7 +35,8 @@ export const saveFile = (): void => {
   if (!examined) return;
   const name = fileName(examined, 'json');
   hand(fileText(examined.end), 'application/json', name);
-  tell(`Saved as ${name}`);
+  const proposed = assumedValues().map(({ text }) => text);
+  tell(`Saved as ${name}${proposed.length > 0 ? `. Confirmed by nobody: ${proposed.join(', ')}` : ''}`);
 };
 
 const linkText = async ({ end, report }: Examined): Promise<string> => {
@@ -43,10 +44,7 @@ const linkText = async ({ end, report }: Examined): Promise<string> => {
   return encodeLink(end, report.fingerprint);
 };
 
-/** Copies a link that carries the whole end; where the browser does not allow it, the link is shown to be copied by hand. */
-export const copyLink = async (): Promise<void> => {
-  const examined = whole('The link');
-  if (!examined) return;
+const handLink = async (examined: Examined): Promise<void> => {
   const link = `${location.origin}${location.pathname}#${await linkText(examined)}`;
   try {
     await navigator.clipboard.writeText(link);
@@ -56,21 +54,29 @@ export const copyLink = async (): Promise<void> => {
   }
 };
 
-/** Writes the sheet of the end as a PDF. */
-export const issueSheet = async (): Promise<void> => {
-  const examined = whole('The sheet', { working: true });
-  if (!examined) return;
+const writeSheet = async (examined: Examined): Promise<void> => {
   try {
     const { sheetPdf } = await import('../../core/sheet/sheet.ts');
     const link = await linkText(examined);
     const name = fileName(examined, 'pdf');
     const bytes = await sheetPdf({ ...examined, link }, { workings: 'governing' });
     hand(new Uint8Array(bytes), 'application/pdf', name);
-    const assumed = assumedValues().map(({ text }) => text);
-    tell(`Sheet written as ${name}${assumed.length > 0 ? `. Still assumed: ${assumed.join(', ')}` : ''}`);
+    tell(`Sheet written as ${name}`);
   } catch (error) {
     refuse('The sheet could not be written', [error instanceof Error ? error.message : String(error)]);
   }
+};
+
+/** Copies a link that carries the whole end, once what the bench put in is confirmed; where the browser does not allow it, the link is shown to be copied by hand. */
+export const copyLink = (): void => {
+  const examined = whole('The link');
+  if (examined) onceConfirmed(() => void handLink(examined));
+};
+
+/** Writes the sheet of the end as a PDF, once what the bench put in is confirmed. */
+export const issueSheet = (): void => {
+  const examined = whole('The sheet', { working: true });
+  if (examined) onceConfirmed(() => void writeSheet(examined));
 };
 
 /** Puts what was opened on the bench, as one step that can be undone; or says why it could not be opened and leaves the bench as it is. */

@@ -43,6 +43,14 @@ export const leave = (path: string): void => {
   timeline.value = seal(completed.assumed.length === entry.value.assumed.length ? timeline.value : joined);
 };
 
+/** Takes over values that the bench put in: they count as given. No step of the timeline, since no value changes. */
+export const confirm = (paths: readonly string[]): void => {
+  const { assumed } = entry.value;
+  if (!assumed.some((one) => paths.includes(one))) return;
+  const kept = assumed.filter((one) => !paths.includes(one));
+  timeline.value = { ...timeline.value, entry: { ...entry.value, assumed: kept } };
+};
+
 /** Takes back what was typed in a field since it was entered. */
 export const revert = (path: string): void => {
   editing.value = null;

@@ -1,7 +1,4 @@
-import { signal } from '@preact/signals';
-
-/** Another tab of this browser has the bench open: what is kept is that of the tab changed last. */
-export const otherTab = signal(false);
+import { otherTab } from './network.ts';
 
 /** Tabs greet each other, answer, and say when they go. */
 export const watchTabs = (): void => {
@@ -11,6 +8,8 @@ export const watchTabs = (): void => {
     otherTab.value = data !== 'goes';
     if (data === 'comes' || data === 'goes') channel.postMessage('stays');
   };
-  addEventListener('pageshow', () => channel.postMessage('comes'));
+  const greet = () => channel.postMessage('comes');
+  greet();
+  addEventListener('pageshow', greet);
   addEventListener('pagehide', () => channel.postMessage('goes'));
 };

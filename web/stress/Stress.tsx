@@ -10,7 +10,7 @@ import { chosen } from '../state/bench.ts';
 import { ProfileDrawn } from './ProfileDrawn.tsx';
 import { ProfileCaption, ProfileName } from './ProfileWords.tsx';
 import { profilesOf, reachOf } from './profile.ts';
-import { GAP, isBeside, LEFT, measureShared, profileWidth, shared } from './shared.ts';
+import { GAP, isBeside, LEAST, LEFT, measureShared, profileWidth, shared } from './shared.ts';
 
 /** Room for a name over a profile, px. */
 const NAME = 24;
@@ -38,7 +38,7 @@ export const Stress = () => {
             </>
           )}
         </Heading>
-        {it && report && shared.value > 0 && <Profiles it={it} report={report} />}
+        {it && report && shared.value >= LEAST && <Profiles it={it} report={report} />}
       </section>
       {open && (
         <div class="stress-working">

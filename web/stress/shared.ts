@@ -4,7 +4,7 @@ import { signal } from '@preact/signals';
 export const shared = signal(0);
 
 /** Width of a profile, px: beside the piece at least and at most, and under it at most. */
-const LEAST = 62;
+export const LEAST = 62;
 const MOST = 92;
 const UNDER = 150;
 /** Width that the piece keeps, with the space between piece and profiles, px. */

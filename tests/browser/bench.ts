@@ -167,7 +167,7 @@ export class Bench {
     await chooser.setFiles({ name, mimeType: '', buffer: bytes });
   }
 
-  /** Drops a file on the page. */
+  /** Drops a file on the page, once the page takes what is held over it. */
   async drop(name: string, bytes: Buffer): Promise<void> {
     const dataTransfer = await this.page.evaluateHandle(
       ([text, called]) => {
@@ -177,7 +177,10 @@ export class Bench {
       },
       [bytes.toString('base64'), name] as const,
     );
-    await this.page.getByRole('main').dispatchEvent('dragover', { dataTransfer });
+    await this.page.waitForFunction((held) => {
+      const over = new DragEvent('dragover', { bubbles: true, cancelable: true, dataTransfer: held });
+      return !document.body.dispatchEvent(over);
+    }, dataTransfer);
     await this.page.getByRole('main').dispatchEvent('drop', { dataTransfer });
   }
 }

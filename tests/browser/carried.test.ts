@@ -108,6 +108,25 @@ describe('the sheet', () => {
     expect(await second.saved()).toBe(saved);
   });
 
+  test('is issued only once what the bench put in is confirmed', async () => {
+    const bench = await (await visit()).tab();
+    await bench.turn('Cut');
+    await bench.field('Cut', 'Bottom notch').check();
+    await bench.page.getByRole('button', { name: 'Issue sheet' }).click();
+    const dialog = bench.page.getByRole('dialog', { name: 'Confirm what the bench put in' });
+    await dialog.waitFor();
+    const assumed = bench.page.getByRole('region', { name: 'Assumed until you say otherwise' });
+    expect(await assumed.textContent()).toContain('bottom notch');
+    expect(await dialog.getByRole('listitem').allTextContents()).toEqual([
+      expect.stringContaining('ength of the bottom notch'),
+      expect.stringContaining('epth of the bottom notch'),
+      expect.stringContaining('orner radius of the bottom notch'),
+    ]);
+    const { bytes } = await bench.handed(() => dialog.getByRole('button', { name: 'Confirm all' }).press('Enter'));
+    expect(bytes.subarray(0, 5).toString()).toBe('%PDF-');
+    expect(await assumed.textContent()).not.toContain('bottom notch');
+  });
+
   test('a page printed from the browser shows the verdict and no controls', async () => {
     const bench = await (await visit()).tab();
     await bench.turn('Bolts');

@@ -7,12 +7,14 @@ const GAP = 0.22;
 const PAST = 0.5;
 const WEIGHT = 6;
 
-interface Extension {
+/** A line from a point of the piece past a dimension line: where it lies, and from where to where it runs, mm. */
+export interface Extension {
+  /** Of the dimension; the line runs across it. */
   readonly axis: 'x' | 'y';
   /** The coordinate that the line marks. */
   readonly level: number;
-  start: number;
-  end: number;
+  readonly start: number;
+  readonly end: number;
 }
 
 /** Extension lines of all dimensions; lines that would lie on each other are drawn as one. */
@@ -28,7 +30,7 @@ export const layExtensions = (pad: Pad, placed: readonly Placed[]): void => {
   for (const group of lines.values()) for (const line of merged(group)) draw(pad, line);
 };
 
-const extension = ({ em }: Pad, { dimension, level }: Placed, point: Point): Extension => {
+export const extension = ({ em }: Pad, { dimension, level }: Placed, point: Point): Extension => {
   const { axis } = dimension;
   const foot = axis === 'x' ? point.y : point.x;
   const out = Math.sign(level - foot);
@@ -41,8 +43,9 @@ const merged = (group: readonly Extension[]): Extension[] => {
   const kept: Extension[] = [];
   for (const it of sorted) {
     const last = kept.at(-1);
-    if (last !== undefined && it.start <= last.end) last.end = Math.max(last.end, it.end);
-    else kept.push({ ...it });
+    if (last !== undefined && it.start <= last.end)
+      kept[kept.length - 1] = { ...last, end: Math.max(last.end, it.end) };
+    else kept.push(it);
   }
   return kept;
 };

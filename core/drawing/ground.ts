@@ -22,7 +22,8 @@ const LEADER_LINE = 0.12;
 /** Share of a leader at its end that is not looked at. */
 const ENDS = 0.08;
 
-interface Segment {
+/** A line from a to b, and the box around it. */
+interface Segment extends Box {
   readonly ax: number;
   readonly ay: number;
   readonly bx: number;
@@ -31,37 +32,56 @@ interface Segment {
   readonly owner: object | undefined;
 }
 
+const segmentOf = (from: Point, to: Point, weight = 0, owner?: object): Segment => ({
+  ax: from.x,
+  ay: from.y,
+  bx: to.x,
+  by: to.y,
+  left: Math.min(from.x, to.x),
+  top: Math.min(from.y, to.y),
+  right: Math.max(from.x, to.x),
+  bottom: Math.max(from.y, to.y),
+  weight,
+  owner,
+});
+
 export const createGround = (): Ground => {
   const segments: Segment[] = [];
   const boxes: Box[] = [];
   return {
     line: (from, to, weight, owner) => {
-      segments.push({ ax: from.x, ay: from.y, bx: to.x, by: to.y, weight, owner });
+      segments.push(segmentOf(from, to, weight, owner));
     },
     take: (box) => {
       boxes.push(box);
     },
     cost: (box, owner, enough = Number.POSITIVE_INFINITY, share = 1) => {
+      const { left, top, right, bottom } = box;
       let sum = 0;
       for (const it of boxes) if (overlaps(it, box)) sum += WORDS;
       for (let i = 0; i < segments.length && sum < enough; i++) {
         const it = segments[i]!;
+        // Most lines are far away: told here, since this is the innermost loop of all.
+        if (it.left > right || it.right < left || it.top > bottom || it.bottom < top) continue;
         if (it.owner !== undefined && it.owner === owner) continue;
         if (meets(it, box)) sum += share * it.weight;
       }
       return sum;
     },
     words: (from, to) => {
-      const line: Segment = { ax: from.x, ay: from.y, bx: to.x, by: to.y, weight: 0, owner: undefined };
+      const line = segmentOf(from, to);
       return boxes.filter((box) => meets(line, box)).length;
     },
     crossing: (from, to) => {
       // A leader ends on the line that it names.
-      const end = { x: to.x - (to.x - from.x) * ENDS, y: to.y - (to.y - from.y) * ENDS };
-      const leader: Segment = { ax: from.x, ay: from.y, bx: end.x, by: end.y, weight: 0, owner: undefined };
+      const leader = segmentOf(from, { x: to.x - (to.x - from.x) * ENDS, y: to.y - (to.y - from.y) * ENDS });
+      const { left, top, right, bottom } = leader;
       let sum = 0;
       for (const it of boxes) if (meets(leader, it)) sum += LEADER_WORDS;
-      for (const it of segments) if (cross(leader, it)) sum += LEADER_LINE * it.weight;
+      for (const it of segments) {
+        if (it.left > right || it.right < left || it.top > bottom || it.bottom < top) continue;
+        if (cross(leader, it)) sum += LEADER_LINE * it.weight;
+      }
       return sum;
     },
   };
@@ -70,24 +90,16 @@ export const createGround = (): Ground => {
 const overlaps = (a: Box, b: Box): boolean =>
   a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
 
-/** True where a segment touches the inside of a box: the part of it within the box's four sides is not empty. */
-const meets = ({ ax, ay, bx, by }: Segment, { left, top, right, bottom }: Box): boolean => {
-  if ((ax < left && bx < left) || (ax > right && bx > right)) return false;
-  if ((ay < top && by < top) || (ay > bottom && by > bottom)) return false;
-  const dx = bx - ax;
-  const dy = by - ay;
-  let start = 0;
-  let end = 1;
-  if (dx !== 0) {
-    const [p, q] = [(left - ax) / dx, (right - ax) / dx];
-    start = Math.max(start, Math.min(p, q));
-    end = Math.min(end, Math.max(p, q));
-  }
-  if (dy !== 0) {
-    const [p, q] = [(top - ay) / dy, (bottom - ay) / dy];
-    start = Math.max(start, Math.min(p, q));
-    end = Math.min(end, Math.max(p, q));
-  }
+/** True where a segment touches a box: the part of it within the box's four sides is not empty. */
+const meets = (it: Segment, { left, top, right, bottom }: Box): boolean => {
+  if (it.right < left || it.left > right || it.bottom < top || it.top > bottom) return false;
+  const dx = it.bx - it.ax;
+  const dy = it.by - it.ay;
+  if (dx === 0 || dy === 0) return true;
+  const [p, q] = [(left - it.ax) / dx, (right - it.ax) / dx];
+  const [r, s] = [(top - it.ay) / dy, (bottom - it.ay) / dy];
+  const start = Math.max(0, Math.min(p, q), Math.min(r, s));
+  const end = Math.min(1, Math.max(p, q), Math.max(r, s));
   return start <= end;
 };
 

@@ -1,6 +1,6 @@
 import type { Box, Callout, Line, Point } from './drawing.ts';
 import { boxOf, CAPITAL, drawHead, drawLine, keepOff, type Pad } from './pad.ts';
-import { AIR, blockBox, setBlock } from './place.ts';
+import { AIR, blockBox, move, setBlock } from './place.ts';
 import { rings } from './rings.ts';
 
 /** Dislike of distance from the best place and of a long leader, in text heights. */
@@ -47,6 +47,8 @@ const search = (pad: Pad, it: Callout, places: Places): Found | undefined => {
   const { em, ground } = pad;
   let best: Found | undefined;
   let least = Number.POSITIVE_INFINITY;
+  // One box for all places tried: they are many.
+  const box = { left: 0, top: 0, right: 0, bottom: 0 };
   for (const [v, lines] of it.variants.entries()) {
     // The block with its middle left (or right) end at the origin.
     const own = blockBox(pad, lines, { x: 0, y: 0 });
@@ -54,19 +56,14 @@ const search = (pad: Pad, it: Callout, places: Places): Found | undefined => {
     for (const { x, y, far } of rings) {
       const base = far * FAR + v * VARIANT;
       if (base >= least) break;
-      const at = { x: it.near.x + x * em + shift.x, y: it.near.y + y * em + shift.y };
-      const box = {
-        left: at.x + own.left,
-        right: at.x + own.right,
-        top: at.y + own.top,
-        bottom: at.y + own.bottom,
-      };
+      const [left, top] = [it.near.x + x * em + shift.x, it.near.y + y * em + shift.y];
+      move(box, own, left, top);
       const there = base + dislike(it, box, places, em);
       if (there >= least) continue;
       const words = there + ground.cost(box, undefined, least - there);
       if (words >= least) continue;
       const { leader, cost } = leaderOf(pad, it, box, words, least);
-      if (cost < least) [best, least] = [{ lines, at, leader }, cost];
+      if (cost < least) [best, least] = [{ lines, at: { x: left, y: top }, leader }, cost];
     }
   }
   return best;

@@ -3,18 +3,28 @@ import type { Placed } from './lanes.ts';
 import { drawStroke, type Pad, setLine, widthOf } from './pad.ts';
 import { blockBox, cheapest } from './place.ts';
 
-/** The support's face with its name, and the reaction below it: beyond whatever dimensions stand under the beam. */
-export const layFace = (pad: Pad, { face, reaction }: Drawing, placed: readonly Placed[]): void => {
-  const { em } = pad;
-  const { x, top, bottom } = face;
+/** Levels of the upper end of the face's line, of its foot, and of the tail of the reaction's arrow below it. */
+export const arrowOf = (
+  { em }: Pad,
+  { face }: Drawing,
+  placed: readonly Placed[],
+): { head: number; foot: number; tail: number } => {
   const under = placed.filter((it) => it.side === 'bottom' && !it.inRoom).map((it) => it.level + 0.5 * em);
-  const foot = Math.max(bottom + 0.9 * em, ...under);
-  drawStroke(pad, 'piece', { kind: 'neighbour', from: { x, y: top - 0.9 * em }, to: [{ x, y: foot }] });
-  const tail = { x, y: foot + 2.7 * em };
-  drawStroke(pad, 'words', { kind: 'force', from: tail, to: [{ x, y: foot + 0.25 * em }], arrow: true });
+  const foot = Math.max(face.bottom + 0.9 * em, ...under);
+  return { head: face.top - 0.9 * em, foot, tail: foot + 2.7 * em };
+};
+
+/** The support's face with its name, and the reaction below it: beyond whatever dimensions stand under the beam. */
+export const layFace = (pad: Pad, drawing: Drawing, placed: readonly Placed[]): void => {
+  const { em } = pad;
+  const { face, reaction } = drawing;
+  const { x, bottom } = face;
+  const { head, foot, tail } = arrowOf(pad, drawing, placed);
+  drawStroke(pad, 'piece', { kind: 'neighbour', from: { x, y: head }, to: [{ x, y: foot }] });
+  drawStroke(pad, 'words', { kind: 'force', from: { x, y: tail }, to: [{ x, y: foot + 0.25 * em }], arrow: true });
   write(pad, reaction, [
-    { x: x + 0.7 * em, y: tail.y - 0.2 * em },
-    { x: x - 0.7 * em - widthOf(pad, reaction), y: tail.y - 0.2 * em },
+    { x: x + 0.7 * em, y: tail - 0.2 * em },
+    { x: x - 0.7 * em - widthOf(pad, reaction), y: tail - 0.2 * em },
   ]);
   const left = x - 0.5 * em - widthOf(pad, face.line);
   write(pad, face.line, [

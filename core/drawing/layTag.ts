@@ -1,6 +1,6 @@
 import type { Box, Point, Tag } from './drawing.ts';
 import { CAPITAL, drawLine, type Pad, setLine } from './pad.ts';
-import { AIR, blockBox } from './place.ts';
+import { AIR, blockBox, move } from './place.ts';
 import { rings } from './rings.ts';
 
 /** Dislike of words away from the part they speak of, and from its middle, per text height; of a leader; and of words outside the drawing. */
@@ -23,36 +23,32 @@ export const layTag = (pad: Pad, { along, text }: Tag, drawing: Box): void => {
   const [a, b] = along;
   const middle = { x: (a.x + b.x) / 2 - (own.left + own.right) / 2, y: (a.y + b.y) / 2 - (own.top + own.bottom) / 2 };
   const part = pointsOf(along);
-  let best: { at: Point; box: Box; near: Nearest } | undefined;
+  let best: { at: Point; box: Box; apart: number; point: Point } | undefined;
   let least = Number.POSITIVE_INFINITY;
   const reach = Math.hypot(b.x - a.x, b.y - a.y) / 2 / em;
+  // One box for all places tried: they are many.
+  const box = { left: 0, top: 0, right: 0, bottom: 0 };
   for (const spread of [1, Math.max(1, reach / 5)]) {
     for (const { x, y, far } of rings) {
-      if (far * spread * MIDDLE >= least) break;
-      const at = { x: middle.x + x * spread * em, y: middle.y + y * spread * em };
-      const box = { left: at.x + own.left, right: at.x + own.right, top: at.y + own.top, bottom: at.y + own.bottom };
-      const near = nearest(part, box, em);
-      const before =
-        far * spread * MIDDLE +
-        near.apart * APART +
-        (near.apart > NEAR ? LEADER : 0) +
-        (inside(box, drawing) ? 0 : OUTSIDE);
+      const walk = far * spread * MIDDLE;
+      if (walk >= least) break;
+      const [left, top] = [middle.x + x * spread * em, middle.y + y * spread * em];
+      move(box, own, left, top);
+      const outside = inside(box, drawing) ? 0 : OUTSIDE;
+      if (walk + outside >= least) continue;
+      const point = nearest(part, box);
+      const apart = apartOf(point, box) / em;
+      const before = walk + apart * APART + (apart > NEAR ? LEADER : 0) + outside;
       if (before >= least) continue;
       let cost = before + ground.cost(box, undefined, least - before, OVER_LINES);
-      if (near.apart > NEAR && cost < least) cost += ground.crossing(leaderStart(pad, box, near.point), near.point);
-      if (cost < least) [best, least] = [{ at, box, near }, cost];
+      if (apart > NEAR && cost < least) cost += ground.crossing(leaderStart(pad, box, point), point);
+      if (cost < least) [best, least] = [{ at: { x: left, y: top }, box: { ...box }, apart, point }, cost];
     }
   }
   if (best === undefined) return;
-  if (best.near.apart > NEAR) drawLine(pad, 'path', leaderStart(pad, best.box, best.near.point), best.near.point);
+  if (best.apart > NEAR) drawLine(pad, 'path', leaderStart(pad, best.box, best.point), best.point);
   setLine(pad, 'path', line, best.at);
 };
-
-interface Nearest {
-  /** Distance in text heights. */
-  readonly apart: number;
-  readonly point: Point;
-}
 
 const pointsOf = ([a, b]: Tag['along']): Point[] =>
   Array.from({ length: POINTS }, (_, i) => ({
@@ -60,16 +56,23 @@ const pointsOf = ([a, b]: Tag['along']): Point[] =>
     y: a.y + ((b.y - a.y) * i) / (POINTS - 1),
   }));
 
-const nearest = (part: readonly Point[], box: Box, em: number): Nearest => {
-  let apart = Number.POSITIVE_INFINITY;
-  let point = part[0]!;
-  for (const it of part) {
-    const dx = Math.max(box.left - it.x, 0, it.x - box.right);
-    const dy = Math.max(box.top - it.y, 0, it.y - box.bottom);
-    const far = Math.hypot(dx, dy) / em;
-    if (far < apart) [apart, point] = [far, it];
+/** Square of the distance between a point and a box. */
+const squareOf = ({ x, y }: Point, { left, top, right, bottom }: Box): number => {
+  const dx = x < left ? left - x : x > right ? x - right : 0;
+  const dy = y < top ? top - y : y > bottom ? y - bottom : 0;
+  return dx * dx + dy * dy;
+};
+
+const apartOf = (point: Point, box: Box): number => Math.sqrt(squareOf(point, box));
+
+const nearest = (part: readonly Point[], box: Box): Point => {
+  let best = part[0]!;
+  let least = Number.POSITIVE_INFINITY;
+  for (let i = 0; i < part.length; i++) {
+    const square = squareOf(part[i]!, box);
+    if (square < least) [best, least] = [part[i]!, square];
   }
-  return { apart, point };
+  return best;
 };
 
 const leaderStart = ({ em }: Pad, box: Box, to: Point): Point => {

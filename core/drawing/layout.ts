@@ -21,7 +21,7 @@ export interface LayoutOptions {
 /** How much words keep off lines where paths will run. */
 const CLEAR = 2.5;
 /** Air around the drawing, in text heights. */
-const AIR = 0.35;
+export const AIR = 0.35;
 
 /**
  * Gives every line and word of a drawing its place, the same for every pen. A failure path is laid over the drawing and moves nothing of it;

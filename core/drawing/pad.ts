@@ -12,6 +12,8 @@ export interface Pad {
   readonly values: 'gap' | 'parallel';
   readonly ground: Ground;
   readonly marks: Mark[];
+  /** Widths of the lines measured so far: a line is measured again for every place that is tried for it. */
+  readonly widths: Map<Line, number>;
 }
 
 /** Height of capitals and figures over the text size. */
@@ -38,6 +40,7 @@ export const createPad = (em: number, measure: Measure, values: 'gap' | 'paralle
   values,
   ground: createGround(),
   marks: [],
+  widths: new Map(),
 });
 
 /** Draws a stroke and keeps words off it. */
@@ -83,8 +86,14 @@ export const drawHead = ({ em, marks }: Pad, layer: Layer, points: readonly Poin
   });
 };
 
-export const widthOf = ({ measure, em }: Pad, line: Line): number =>
-  line.reduce((sum, { text }) => sum + measure(text, em), 0) + Math.max(0, line.length - 1) * SPACE * em;
+export const widthOf = ({ measure, em, widths }: Pad, line: Line): number => {
+  const known = widths.get(line);
+  if (known !== undefined) return known;
+  const words = line.reduce((sum, { text }) => sum + measure(text, em), 0);
+  const width = words + Math.max(0, line.length - 1) * SPACE * em;
+  widths.set(line, width);
+  return width;
+};
 
 /** A line of words whose left end (upright: lower end) stands on the base line at `at`. */
 export const setLine = (pad: Pad, layer: Layer, line: Line, at: Point, rotation: 0 | -90 = 0): void => {

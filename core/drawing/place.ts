@@ -23,6 +23,14 @@ export const blockBox = (pad: Pad, lines: readonly Line[], at: Point): Box => {
   };
 };
 
+/** Puts `box` where `own`, a box around the origin, stands once moved to x, y. */
+export const move = (box: { -readonly [side in keyof Box]: number }, own: Box, x: number, y: number): void => {
+  box.left = x + own.left;
+  box.right = x + own.right;
+  box.top = y + own.top;
+  box.bottom = y + own.bottom;
+};
+
 /** Writes a block, its first line on the base line at `at`, set to the left or to the right. */
 export const setBlock = (pad: Pad, lines: readonly Line[], at: Point, align: 'start' | 'end'): void => {
   const wide = Math.max(...lines.map((line) => widthOf(pad, line)));

@@ -47,8 +47,10 @@ const NAME_WIDTH = 41;
 /** Between clause and basis, mm. */
 const CLAUSE_GAP = 0.9;
 
+type Shared = ReadonlyMap<string, string>;
+
 /** Letters of the reasons that several checks share, in the order of the rows. */
-export const sharedReasons = ({ input }: Context): ReadonlyMap<string, string> => {
+export const sharedReasons = ({ input }: Context): Shared => {
   const told = input.report.checks.filter(tellsWhy).map(({ reasonText = '' }) => reasonText);
   const shared = [...new Set(told)].filter((one) => told.indexOf(one) !== told.lastIndexOf(one));
   return new Map(shared.map((reason, i) => [reason, String.fromCharCode(97 + i)]));
@@ -61,14 +63,13 @@ const tellsWhy = ({ id, state, reason, reasonText }: Check): boolean => {
 };
 
 /** Marks after a title: not compared with numbers from outside; letter of a reason that several share. */
-const marksOf = (context: Context, check: Check): string => {
-  const letter = tellsWhy(check) ? sharedReasons(context).get(check.reasonText ?? '') : undefined;
+const marksOf = (shared: Shared, check: Check): string => {
+  const letter = tellsWhy(check) ? shared.get(check.reasonText ?? '') : undefined;
   return `${check.verified === 'none' ? ' *' : ''}${letter ? ` (${letter})` : ''}`;
 };
 
-const nameOf = (context: Context, check: Check, governs: boolean): Lines => {
-  const { pen, words } = context;
-  const marks = marksOf(context, check);
+const nameOf = ({ pen, words }: Context, shared: Shared, check: Check, governs: boolean): Lines => {
+  const marks = marksOf(shared, check);
   const lead = governs ? say.table.governs : '';
   const full = `${lead}${titleOf(check)}${marks}`;
   const style: TextStyle = { ...table, bold: governs };
@@ -77,23 +78,22 @@ const nameOf = (context: Context, check: Check, governs: boolean): Lines => {
   return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${marks}`)], style, NAME_WIDTH);
 };
 
-const rowOf = (context: Context, check: Check): Row => {
+const rowOf = (context: Context, shared: Shared, check: Check): Row => {
   const { pen, input } = context;
   const governs = check.id === input.report.governing;
   return {
     kind: 'check',
     check,
-    name: nameOf(context, check, governs),
+    name: nameOf(context, shared, check, governs),
     clause: wrap(pen, [plainRun(check.clause)], small, clauseWidth(context, check)),
-    ...reasonOf(context, check),
+    ...reasonOf(context, shared, check),
   };
 };
 
 /** A reason that several share stands below the table under its letter. */
-const reasonOf = (context: Context, check: Check): Pick<CheckRow, 'beside' | 'below'> => {
+const reasonOf = ({ pen }: Context, shared: Shared, check: Check): Pick<CheckRow, 'beside' | 'below'> => {
   const { reasonText = '', reactionAtFailure, utilisation } = check;
-  if (!tellsWhy(check) || sharedReasons(context).has(reasonText)) return { beside: null, below: [] };
-  const { pen } = context;
+  if (!tellsWhy(check) || shared.has(reasonText)) return { beside: null, below: [] };
   const runs = richText(reasonText, 'prose');
   const empty = (reactionAtFailure ?? null) === null && utilisation === null;
   const fits = pen.width(runs, small) <= at.clause - BESIDE - 1;
@@ -114,7 +114,9 @@ export const rowsOf = (context: Context): Row[] => {
   const strength = told.filter(({ id }) => !id.startsWith('fit-'));
   const fit = told.filter(({ id, state }) => id.startsWith('fit-') && state !== 'holds');
   const heading: Row[] = fit.length > 0 ? [{ kind: 'fit' }] : [];
-  return [...strength.map((one) => rowOf(context, one)), ...heading, ...fit.map((one) => rowOf(context, one))];
+  const shared = sharedReasons(context);
+  const rows = (of: readonly Check[]): Row[] => of.map((one) => rowOf(context, shared, one));
+  return [...rows(strength), ...heading, ...rows(fit)];
 };
 
 export const heightOf = (row: Row): number =>

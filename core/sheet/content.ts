@@ -8,16 +8,32 @@ const UNITS = 40;
 /** Points in a unit: to so many places that the far edge of the paper is right within 0.001 mm. */
 const SCALE = (72 / 25.4 / UNITS).toFixed(8);
 
+const SOLID = '[] 0 d';
+/** Where the control points of a quarter of a circle of radius 1 stand along its tangents. */
+const QUARTER = (4 / 3) * Math.tan(Math.PI / 8);
+
 type Corner = readonly [x: number, y: number];
 
 /** A number as PDF writes it: no exponent, no closing zeros. */
 const number = (value: number): string => String(Math.round(value * 1000) / 1000);
 
+/** A byte of a text; brackets, backslash and the end of a line are written with a backslash. */
+const bytes = Array.from({ length: 256 }, (_, i) => {
+  const one = String.fromCharCode(i);
+  return i === 13 ? '\\r' : '()\\'.includes(one) ? `\\${one}` : one;
+});
+/** The two bytes of each glyph's number. */
+const pairs: string[] = [];
+const pairOf = (glyph: number): string => {
+  pairs[glyph] ??= bytes[glyph >>> 8]! + bytes[glyph & 255]!;
+  return pairs[glyph];
+};
+
 /** Writes the marks of one page as the drawing operators of PDF, telling the state only where it changes. */
 class Content {
   private readonly out: string[] = [];
   private width = '';
-  private dash = '';
+  private dash = SOLID;
   private ink = '0 g';
   private face = '';
   private inText = false;
@@ -29,7 +45,7 @@ class Content {
   constructor(
     private readonly height: number,
     private readonly font: string,
-    private readonly glyphs: ReadonlyMap<Face, ReadonlyMap<string, number>>,
+    private readonly numbers: ReadonlyMap<Face, Uint16Array>,
   ) {
     this.out.push(`${SCALE} 0 0 ${SCALE} 0 0 cm`);
   }
@@ -78,12 +94,13 @@ class Content {
       this.at = [0, 0];
     }
     this.inText = true;
-    const glyphs = this.glyphs.get(face)!;
+    const numbers = this.numbers.get(face)!;
     const set = `/${this.font} ${number(size * POINT * UNITS)} Tf`;
     if (set !== this.face) this.out.push(set);
     this.face = set;
-    const hex = [...text].map((one) => glyphs.get(one)!.toString(16).padStart(4, '0')).join('');
-    this.out.push(`${this.move(this.corner({ x, y }), turned)} <${hex}>Tj`);
+    let shown = '';
+    for (let i = 0; i < text.length; i += 1) shown += pairOf(numbers[text.charCodeAt(i)]!);
+    this.out.push(`${this.move(this.corner({ x, y }), turned)} (${shown})Tj`);
   }
 
   /** Turned text, and what follows it, is placed anew; all else from the text before. */
@@ -94,28 +111,24 @@ class Content {
     return last ? `${x - last[0]} ${y - last[1]} Td` : `1 0 0 1 ${x} ${y} Tm`;
   }
 
-  private style({ width = 0, dash = [] }: PathStyle): string {
-    return `${number(width * UNITS)} w [${dash.map((one) => number(one * UNITS)).join(' ')}]`;
-  }
-
   /** State stands before a path begins: PDF allows no change within it. */
-  private begin(style: PathStyle): void {
-    const key = this.style(style);
-    const lines = style.fill === undefined;
+  private begin({ width, dash = [], fill }: PathStyle): void {
+    const w = `${number((width ?? 0) * UNITS)} w`;
+    const d = dash.length === 0 ? SOLID : `[${dash.map((one) => number(one * UNITS)).join(' ')}] 0 d`;
+    const key = w + d;
+    const lines = fill === undefined;
     if (!lines || this.open !== key) this.endLines();
     this.endText();
-    if (style.fill) this.colour(style.fill === 'black' ? '0 g' : '1 g');
-    if (style.width !== undefined) this.stroke(style.width, style.dash ?? []);
+    if (fill) this.colour(fill === 'black' ? '0 g' : '1 g');
+    if (width !== undefined) this.stroke(w, d);
     if (lines) this.open = key;
   }
 
-  private stroke(width: number, dash: readonly number[]): void {
-    const w = `${number(width * UNITS)} w`;
-    const d = `[${dash.map((one) => number(one * UNITS)).join(' ')}] 0 d`;
-    if (w !== this.width) this.out.push(w);
-    if (d !== this.dash && !(this.dash === '' && dash.length === 0)) this.out.push(d);
-    this.width = w;
-    this.dash = d;
+  private stroke(width: string, dash: string): void {
+    if (width !== this.width) this.out.push(width);
+    if (dash !== this.dash) this.out.push(dash);
+    this.width = width;
+    this.dash = dash;
   }
 
   private end({ fill, width }: PathStyle): void {
@@ -137,20 +150,20 @@ class Content {
     this.end(mark);
   }
 
-  private circle({ centre, radius, ...style }: CircleMark): void {
-    const right = { x: centre.x + radius, y: centre.y };
-    const left = { x: centre.x - radius, y: centre.y };
-    const arc = { radius, clockwise: true };
-    this.path({
-      ...style,
-      kind: 'path',
-      from: right,
-      to: [
-        { ...left, ...arc },
-        { ...right, ...arc },
-      ],
-      closed: true,
-    });
+  /** Four quarters, clockwise from the right. */
+  private circle({ centre: { x, y }, radius: r, ...style }: CircleMark): void {
+    this.begin(style);
+    const k = QUARTER * r;
+    const at = (dx: number, dy: number): string => this.place({ x: x + dx, y: y + dy });
+    this.out.push(
+      `${at(r, 0)} m`,
+      `${at(r, k)} ${at(k, r)} ${at(0, r)} c`,
+      `${at(-k, r)} ${at(-r, k)} ${at(-r, 0)} c`,
+      `${at(-r, -k)} ${at(-k, -r)} ${at(0, -r)} c`,
+      `${at(k, -r)} ${at(r, -k)} ${at(r, 0)} c`,
+      'h',
+    );
+    this.end(style);
   }
 
   /** A stencil of one bit a square, painted in black: rows of hexadecimal digits, each filled up to whole bytes. */
@@ -177,10 +190,10 @@ const hexOf = (row: readonly boolean[]): string => {
   return hex;
 };
 
-/** The content of one page: `font` is the name of the font there, `glyphs` the number of each character of each face in it. */
+/** The content of one page: `font` is the name of the font there, `numbers` the glyph of each character of each face in it. */
 export const contentOf = (
   marks: readonly Mark[],
   height: number,
   font: string,
-  glyphs: ReadonlyMap<Face, ReadonlyMap<string, number>>,
-): string => new Content(height, font, glyphs).write(marks);
+  numbers: ReadonlyMap<Face, Uint16Array>,
+): string => new Content(height, font, numbers).write(marks);

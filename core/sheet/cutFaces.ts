@@ -4,12 +4,12 @@ import { type Face, type Glyph, viewOf } from './trueType.ts';
 export interface CutFaces {
   /** A TrueType file. */
   readonly file: Uint8Array;
-  /** Number of each character of each face, from 1. */
-  readonly glyphs: ReadonlyMap<Face, ReadonlyMap<string, number>>;
+  /** Number, from 1, of the character with each code in each face. */
+  readonly numbers: ReadonlyMap<Face, Uint16Array>;
   /** Width of glyph 1, 2, 3 …, thousandths of the type size. */
   readonly widths: readonly number[];
-  /** Character of glyph 1, 2, 3 … */
-  readonly characters: readonly string[];
+  /** Code of the character of glyph 1, 2, 3 … */
+  readonly codes: readonly number[];
 }
 
 const joined = (parts: readonly Uint8Array[]): Uint8Array => {
@@ -90,17 +90,20 @@ const assembled = (name: string, model: Face, glyphs: readonly Glyph[]): Uint8Ar
   ]);
 };
 
+/** By the code of a character: 1 where it is used. */
+export type Used = Uint8Array;
+
 /** `used`: the characters of each face, all of which the face has; the first face must use the blank, which becomes glyph 1. */
-export const cutFaces = (name: string, used: ReadonlyMap<Face, ReadonlySet<string>>): CutFaces => {
-  const characters: string[] = [];
+export const cutFaces = (name: string, used: ReadonlyMap<Face, Used>): CutFaces => {
+  const codes: number[] = [];
   const glyphs: Glyph[] = [];
-  const numbers = new Map<Face, Map<string, number>>();
+  const numbers = new Map<Face, Uint16Array>();
   for (const [face, wanted] of used) {
-    const own = new Map<string, number>();
-    for (const one of [...wanted].sort()) {
-      characters.push(one);
-      glyphs.push(face.glyph(one));
-      own.set(one, glyphs.length);
+    const own = new Uint16Array(face.codes);
+    for (let code = wanted.indexOf(1); code >= 0; code = wanted.indexOf(1, code + 1)) {
+      codes.push(code);
+      glyphs.push(face.glyph(code));
+      own[code] = glyphs.length;
     }
     numbers.set(face, own);
   }
@@ -108,8 +111,8 @@ export const cutFaces = (name: string, used: ReadonlyMap<Face, ReadonlySet<strin
   const none: Glyph = { advance: 0, leftBearing: 0, body: new Uint8Array(0) };
   return {
     file: assembled(name, model!, [none, ...glyphs]),
-    glyphs: numbers,
+    numbers,
     widths: glyphs.map(({ advance }) => advance),
-    characters,
+    codes,
   };
 };

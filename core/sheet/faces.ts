@@ -12,7 +12,12 @@ export interface Cut {
 
 export type Faces = (cut: Cut) => Face;
 
-const bytesOf = (base64: string): Uint8Array => Uint8Array.from(atob(base64), (one) => one.charCodeAt(0));
+const bytesOf = (base64: string): Uint8Array => {
+  const text = atob(base64);
+  const bytes = new Uint8Array(text.length);
+  for (let i = 0; i < bytes.length; i += 1) bytes[i] = text.charCodeAt(i);
+  return bytes;
+};
 
 const load = async (): Promise<Faces> => {
   const [wide, narrow, narrowItalic, narrowBold] = await Promise.all([

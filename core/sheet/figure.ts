@@ -1,30 +1,24 @@
 import { drawEnd } from '../drawing/drawEnd.ts';
 import type { Drawing, FailurePath, Point } from '../drawing/drawing.ts';
 import { failurePath } from '../drawing/failurePath.ts';
-import type { Laid } from '../drawing/laid.ts';
-import { layoutDrawing } from '../drawing/layout.ts';
+import { type LayoutOptions, layoutDrawing } from '../drawing/layout.ts';
+import { leastBox } from '../drawing/leastBox.ts';
 import type { DrawingWords } from '../drawing/words.ts';
 import { fromSystem, type UnitSystem } from '../units/systems.ts';
 import type { Context, Zone } from './context.ts';
 import { drawMark } from './figureMarks.ts';
-import { freeAbove, lowestRightOf, type PaperBox, paperBoxes } from './figureSpace.ts';
+import { captionsOf, type FigureWords, LEADING, placeWords, style } from './figureWords.ts';
 import { holesAssumed, sectionName } from './given.ts';
-import { body, NARROW, WIDE } from './page.ts';
-import { POINT, type Spot, type TextStyle } from './pen.ts';
-import { type Code, drawCode, sideOf } from './qr.ts';
-import { richText } from './richText.ts';
+import { NARROW, WIDE } from './page.ts';
+import { POINT, type Spot } from './pen.ts';
+import { type Code, drawCode } from './qr.ts';
 import { standardScales } from './scales.ts';
 import { sheetWords as say } from './sheetWords.ts';
-import { type Lines, setLines, wrap } from './textBlock.ts';
+import { setLines } from './textBlock.ts';
 import { governingOf } from './verdictLine.ts';
 
 /** Capitals 2.5 mm high: size in pt of a face whose capitals stand 0.698 em high. */
 const SIZE = 2.5 / 0.698 / POINT;
-const LEADING = 3.75;
-const SCALE_HEIGHT = 5.9;
-/** Width of the caption below the piece, and least width of one beside it. */
-const CAPTION = 62;
-const BESIDE = 28;
 /** A piece drawn less deep than this cannot be read, mm. */
 const LEAST_DEPTH = 28;
 
@@ -59,22 +53,18 @@ export const governingPath = (context: Context): FailurePath | null => {
   return failurePath(governing.id, governing.of ?? '', context.input.facts, drawingWords(context));
 };
 
-/** Where the caption with the scale stands, and the square code if it found room; mm on the paper from the figure's upper left corner. */
-interface Placed {
-  readonly lines: Lines;
-  readonly x: number;
-  readonly y: number;
-  readonly code: Spot | null;
+/** mm on the paper. */
+interface Least {
   readonly width: number;
   readonly height: number;
 }
-
-const style: TextStyle = { ...body, family: 'narrow' };
 
 /** The figures of one end at the standard scales, each laid out at first use. */
 export interface Figures {
   /** Scales at which the piece alone would fit and can still be read, the largest first. */
   readonly scales: readonly number[];
+  /** What no figure at this scale goes below: known without laying one out. */
+  readonly least: (scale: number) => Least;
   /** `labelled`: with the words that the data beside the figure repeat. */
   readonly at: (scale: number, labelled: boolean) => Figure;
   /** The figure that takes the least room, however small its piece is then. */
@@ -92,37 +82,52 @@ export const figuresOf = (context: Context, width: number, height: number, code:
   const [wide, high] = [box.right - box.left, box.bottom - box.top];
   const first = standardScales.find((scale) => wide / scale <= width && high / scale <= height);
   const bare = { ...drawing, callouts: drawing.callouts.filter(({ name }) => !repeated.has(name)) };
+  const captions = captionsOf(context, path);
   const made = new Map<string, Figure>();
   const at = (scale: number, labelled: boolean): Figure => {
     const key = `${scale} ${labelled}`;
-    const content = { drawing: labelled ? drawing : bare, path, code, room: width };
+    const content = { drawing: labelled ? drawing : bare, path, captions, code, room: width };
     const known = made.get(key) ?? figureAt(context, content, scale);
     made.set(key, known);
     return known;
   };
   const scales = standardScales.filter((scale) => scale === first || (scale > first! && high / scale >= LEAST_DEPTH));
-  const smallest = (): Figure => {
-    const least = standardScales.find((scale) => scale >= scales.at(-1)! && at(scale, false).width <= width);
-    return at(least ?? standardScales.at(-1)!, false);
+  const leasts = new Map<number, Least>();
+  const least = (scale: number): Least => {
+    const known = leasts.get(scale) ?? leastAt(context, drawing, scale);
+    leasts.set(scale, known);
+    return known;
   };
-  return { scales, at, smallest };
+  const smallest = (): Figure => {
+    const fits = standardScales.find((scale) => scale >= scales.at(-1)! && at(scale, false).width <= width);
+    return at(fits ?? standardScales.at(-1)!, false);
+  };
+  return { scales, least, at, smallest };
 };
 
-interface Content {
+/** How the paper's text stands on a drawing at 1:`scale`. */
+const penAt = ({ pen }: Context, scale: number): LayoutOptions => ({
+  textHeight: SIZE * POINT * scale,
+  values: 'parallel',
+  measure: (text, size) => (pen.width(text, { size: SIZE }) * size) / (SIZE * POINT),
+});
+
+const leastAt = (context: Context, drawing: Drawing, scale: number): Least => {
+  const { left, right, top, bottom } = leastBox(drawing, penAt(context, scale));
+  return { width: (right - left) / scale, height: (bottom - top) / scale };
+};
+
+interface Content extends FigureWords {
   readonly drawing: Drawing;
   readonly path: FailurePath | null;
-  readonly code: Code | null;
-  /** Width on the paper, mm. */
-  readonly room: number;
 }
 
 const figureAt = (context: Context, content: Content, scale: number): Figure => {
   const { pen } = context;
   const { drawing, path, code } = content;
-  const measure = (text: string, size: number): number => (pen.width(text, { size: SIZE }) * size) / (SIZE * POINT);
-  const laid = layoutDrawing(drawing, { textHeight: SIZE * POINT * scale, values: 'parallel', measure }, path);
+  const laid = layoutDrawing(drawing, penAt(context, scale), path);
   const { box, marks } = laid;
-  const placed = placeWords(context, laid, content, scale);
+  const placed = placeWords(laid, content, scale);
   const draw = (x: number, y: number): void => {
     const place = (p: Point): Spot => ({ x: x + (p.x - box.left) / scale, y: y + (p.y - box.top) / scale });
     for (const mark of marks) drawMark(context, mark, place, scale);
@@ -132,37 +137,6 @@ const figureAt = (context: Context, content: Content, scale: number): Figure => 
   };
   return { width: placed.width, height: placed.height, scale, coded: placed.code !== null, draw };
 };
-
-/** The caption beside the piece where there is room for it; else below, to the right of the reaction's arrow. */
-const placeWords = (context: Context, laid: Laid, { path, code, room }: Content, scale: number): Placed => {
-  const boxes = paperBoxes(laid, scale);
-  const [wide, high] = [(laid.box.right - laid.box.left) / scale, (laid.box.bottom - laid.box.top) / scale];
-  const left = room - BESIDE - 1;
-  const beside = captionLines(context, path, BESIDE);
-  const needed = beside.length * LEADING + SCALE_HEIGHT;
-  const y = freeAbove(boxes, left, needed, high);
-  if (y !== null) {
-    const words = { left, right: room, top: y, bottom: y + needed };
-    const spot = placeCode([...boxes, words], code, room, high);
-    return { lines: beside, x: left, y, code: spot, width: Math.max(wide, room), height: high };
-  }
-  const x = Math.max(36, Math.min(wide, room) - CAPTION);
-  const lines = captionLines(context, path, CAPTION);
-  const top = lowestRightOf(boxes, x) + 1.5;
-  const height = Math.max(high, top + lines.length * LEADING + SCALE_HEIGHT);
-  return { lines, x, y: top, code: placeCode(boxes, code, room, high), width: Math.max(wide, x + CAPTION), height };
-};
-
-const placeCode = (boxes: readonly PaperBox[], code: Code | null, room: number, high: number): Spot | null => {
-  if (!code) return null;
-  const side = sideOf(code);
-  const x = room - side - 1;
-  const y = freeAbove(boxes, x - 0.5, side + 1, high - 1);
-  return y === null ? null : { x, y };
-};
-
-const captionLines = ({ pen, numbers }: Context, path: FailurePath | null, width: number): Lines =>
-  path ? wrap(pen, richText(numbers.marked(path.caption), 'prose'), style, width) : [];
 
 /** Length of the scale bar in the file's units: 20 mm on paper, or the nearest whole inches. */
 const barOf = (units: UnitSystem, scale: number): number =>

@@ -1,6 +1,6 @@
 import type { jsPDF } from 'jspdf';
 import { contentOf } from './content.ts';
-import { type CutFaces, cutFaces } from './cutFaces.ts';
+import { type CutFaces, cutFaces, type Used } from './cutFaces.ts';
 import type { Mark } from './pen.ts';
 import type { Face } from './trueType.ts';
 
@@ -29,22 +29,42 @@ const stampOf = (date: string | undefined): string => {
   return `D:${digits}000000+00'00'`;
 };
 
-const base64Of = (bytes: Uint8Array): string => {
+const binaryOf = (bytes: Uint8Array): string => {
   let text = '';
-  for (const byte of bytes) text += String.fromCharCode(byte);
-  return btoa(text);
+  for (let from = 0; from < bytes.length; from += 4096)
+    text += String.fromCharCode(...bytes.subarray(from, from + 4096));
+  return text;
 };
 
+const BLANK = 32;
+
 /** The characters that the pages write in each face; the first face has a blank too. */
-const charactersOf = (pages: readonly (readonly Mark[])[]): Map<Face, Set<string>> => {
-  const used = new Map<Face, Set<string>>();
-  for (const mark of pages.flat()) {
-    if (mark.kind !== 'text') continue;
-    const characters = used.get(mark.face) ?? new Set(used.size === 0 ? ' ' : '');
-    for (const one of mark.text) characters.add(one);
-    used.set(mark.face, characters);
+const charactersOf = (pages: readonly (readonly Mark[])[]): Map<Face, Used> => {
+  const used = new Map<Face, Used>();
+  for (const page of pages) {
+    for (const mark of page) {
+      if (mark.kind !== 'text') continue;
+      const { face, text } = mark;
+      const characters = used.get(face) ?? new Uint8Array(face.codes);
+      if (used.size === 0) characters[BLANK] = 1;
+      used.set(face, characters);
+      for (let i = 0; i < text.length; i += 1) characters[text.charCodeAt(i)] = 1;
+    }
   }
   return used;
+};
+
+/** Fonts of the blank alone, as the library takes them: it reads each in full, and needs no more to tell what a font is. */
+const blanks = new Map<Face, string>();
+
+const blankOf = (face: Face): string => {
+  const known = blanks.get(face);
+  if (known !== undefined) return known;
+  const used = new Uint8Array(face.codes);
+  used[BLANK] = 1;
+  const text = binaryOf(cutFaces(FONT, new Map([[face, used]])).file);
+  blanks.set(face, text);
+  return text;
 };
 
 /** What the library knows of a font, as far as this file tells it. */
@@ -58,8 +78,8 @@ interface FontData {
  * Puts the faces into the document as one font. The pages name its glyphs themselves, so the library is told how wide they are and what
  * they mean; the blank that it sets on the first page makes it keep the font. Returns the font's name on the pages.
  */
-const embed = (doc: jsPDF, cut: CutFaces): string => {
-  doc.addFileToVFS(`${FONT}.ttf`, base64Of(cut.file));
+const embed = (doc: jsPDF, first: Face, cut: CutFaces): string => {
+  doc.addFileToVFS(`${FONT}.ttf`, blankOf(first));
   doc.addFont(`${FONT}.ttf`, FONT, 'normal');
   doc.setFont(FONT, 'normal').text(' ', 25, 25);
   const font = doc.getFont();
@@ -67,7 +87,7 @@ const embed = (doc: jsPDF, cut: CutFaces): string => {
   // The file is cut already: as it is, it goes into the document.
   data.subset.encode = () => cut.file;
   data.Unicode.widths = [1, cut.widths];
-  data.toUnicode = Object.fromEntries(cut.characters.map((one, i) => [i + 1, one.charCodeAt(0)]));
+  data.toUnicode = Object.fromEntries(cut.codes.map((code, i) => [i + 1, code]));
   return String(font.id);
 };
 
@@ -85,11 +105,12 @@ export const writePdf = async (pages: readonly (readonly Mark[])[], about: About
   doc.setCreationDate(stampOf(about.date) as unknown as Date);
   doc.setFileId(about.fingerprint.padEnd(32, '0').slice(0, 32).toUpperCase());
   const used = charactersOf(pages);
-  const cut = used.size > 0 ? cutFaces(FONT, used) : null;
-  const font = cut ? embed(doc, cut) : '';
+  const [first] = used.keys();
+  const cut = first ? cutFaces(FONT, used) : null;
+  const font = first && cut ? embed(doc, first, cut) : '';
   pages.forEach((marks, i) => {
     if (i > 0) doc.addPage([...about.paper]);
-    (doc.internal as unknown as Raw).write(contentOf(marks, about.paper[1], font, cut?.glyphs ?? new Map()));
+    (doc.internal as unknown as Raw).write(contentOf(marks, about.paper[1], font, cut?.numbers ?? new Map()));
   });
   return new Uint8Array(doc.output('arraybuffer'));
 };

@@ -8,7 +8,7 @@ import { limitsZone } from './limitsZone.ts';
 import { BLOCK_HEIGHT, FIGURE_TOP } from './page.ts';
 import type { Code } from './qr.ts';
 import { stressNumbers, stressProfiles } from './stressZone.ts';
-import { workingElsewhere, workingZone } from './workingZone.ts';
+import { workingElsewhere, workingZones } from './workingZone.ts';
 
 /** Widths of figure and data, mm. */
 export const FIGURE_WIDTH = 113;
@@ -60,53 +60,64 @@ const stressWithin = ({ profiles, stressInNumbers }: Parts, showing: Showing, he
 };
 
 interface Choice {
-  readonly figure: Figure;
   readonly showing: Showing;
+  readonly scale: number;
+  readonly labelled: boolean;
+}
+
+/** What stands below figure and data. */
+interface Below {
   readonly rows: readonly Row[];
   readonly working: Zone | null;
 }
 
-/** The first sheet under these choices, fit or not. */
-const laidOut = (parts: Parts, { figure, showing, rows, working }: Choice): Plan & { readonly fits: boolean } => {
-  const { context, given, footing, limits, room } = parts;
-  const table = tableZone(context, rows);
-  const below = table.height + footing.height + (working?.height ?? 0) + limits.height;
-  const least = leastUpper(parts, figure, showing);
-  const spare = room - below - least;
-  const upper = least + Math.max(0, Math.min(spare, SPARE));
+/** Height left for figure and data, mm. */
+const roomAbove = ({ context, room, footing, limits }: Parts, { rows, working }: Below): number =>
+  room - (tableZone(context, rows).height + footing.height + (working?.height ?? 0) + limits.height);
+
+/** Height that the data need at least. */
+const dataHeight = (parts: Parts, showing: Showing): number =>
+  parts.given.height + AIR + stressWithin(parts, showing, 0).height;
+
+/** The first sheet with this figure, fit or not. */
+const laidOut = (parts: Parts, figure: Figure, showing: Showing, below: Below): Plan => {
+  const { context, given, footing, limits } = parts;
+  const { rows, working } = below;
+  const least = Math.max(figure.height, dataHeight(parts, showing));
+  const upper = least + Math.max(0, Math.min(roomAbove(parts, below) - least, SPARE));
   const stress = stressWithin(parts, showing, upper - given.height - AIR);
   const later = parts.rows.slice(rows.length);
-  const fits = spare >= 0 && figure.width <= FIGURE_WIDTH;
-  return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false, fits };
+  const table = tableZone(context, rows);
+  return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false };
 };
 
-const planned = (parts: Parts, choice: Choice): Plan | null => {
-  const plan = laidOut(parts, choice);
-  return plan.fits ? plan : null;
+/** The first sheet under these choices; null where it does not fit. Only figures that may fit are laid out. */
+const planned = (parts: Parts, { showing, scale, labelled }: Choice, below: Below): Plan | null => {
+  const { figures } = parts;
+  const height = roomAbove(parts, below);
+  const fits = (one: { width: number; height: number }): boolean => one.height <= height && one.width <= FIGURE_WIDTH;
+  if (dataHeight(parts, showing) > height || !fits(figures.least(scale))) return null;
+  const figure = figures.at(scale, labelled);
+  return fits(figure) ? laidOut(parts, figure, showing, below) : null;
 };
 
-/** Height that figure and data need at least. */
-const leastUpper = (parts: Parts, figure: Figure, showing: Showing): number =>
-  Math.max(figure.height, parts.given.height + AIR + stressWithin(parts, showing, 0).height);
-
-/** Every pair of showing and figure: a large figure matters more than profiles, these more than words that the data repeat. */
-const pairs = ({ figures }: Parts): { showing: Showing; figure: () => Figure }[] => {
+/** Every choice: a large figure matters more than profiles, these more than words that the data repeat. */
+const choices = ({ figures }: Parts): Choice[] => {
   const [large, small] = [figures.scales.slice(0, 2), figures.scales.slice(2)];
   return [large, small].flatMap((scales) =>
     (['profiles', 'numbers'] as const).flatMap((showing) =>
-      scales.flatMap((scale) =>
-        [true, false].map((labelled) => ({ showing, figure: () => figures.at(scale, labelled) })),
-      ),
+      scales.flatMap((scale) => [true, false].map((labelled) => ({ showing, scale, labelled }))),
     ),
   );
 };
 
 /** All on one sheet: the largest figure first, then the fullest working. */
 const onOneSheet = (parts: Parts): Plan | null => {
-  const workings = (['full', 'short'] as const).map((fullness) => workingZone(parts.context, fullness));
-  for (const { showing, figure } of pairs(parts)) {
+  const { rows } = parts;
+  const workings = workingZones(parts.context);
+  for (const choice of choices(parts)) {
     for (const working of workings) {
-      const plan = planned(parts, { showing, figure: figure(), rows: parts.rows, working });
+      const plan = planned(parts, choice, { rows, working });
       if (plan) return plan;
     }
   }
@@ -117,15 +128,15 @@ const onOneSheet = (parts: Parts): Plan | null => {
 const onMore = (parts: Parts): Plan => {
   const { context, rows, figures, room, footing, limits } = parts;
   const working = workingElsewhere(context, 2);
-  for (const { showing, figure } of pairs(parts)) {
-    const plan = planned(parts, { showing, figure: figure(), rows, working });
+  for (const choice of choices(parts)) {
+    const plan = planned(parts, choice, { rows, working });
     if (plan) return { ...plan, workingLater: true };
   }
   const figure = figures.smallest();
-  const showing = 'numbers';
-  const others = leastUpper(parts, figure, showing) + footing.height + limits.height + working.height;
+  const upper = Math.max(figure.height, dataHeight(parts, 'numbers'));
+  const others = upper + footing.height + limits.height + working.height;
   const first = rows.slice(0, Math.max(1, rowsWithin(rows, room - others)));
-  return { ...laidOut(parts, { showing, figure, rows: first, working }), workingLater: true };
+  return { ...laidOut(parts, figure, 'numbers', { rows: first, working }), workingLater: true };
 };
 
 /** Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on further sheets. */
@@ -137,7 +148,7 @@ export const planOf = (context: Context, bottom: number, code: Code | null): Pla
     given: givenZone(context, DATA_WIDTH),
     footing: footingZone(context),
     limits: limitsZone(context),
-    profiles: STRESS_SCALES.map((scale) => stressProfiles(context, DATA_WIDTH, scale)),
+    profiles: stressProfiles(context, DATA_WIDTH, STRESS_SCALES),
     stressInNumbers: stressNumbers(context, DATA_WIDTH),
     figures: figuresOf(context, FIGURE_WIDTH, room, code),
     room,

@@ -39,30 +39,32 @@ const drawHeading = ({ pen, numbers }: Context, x: number, y: number): void => {
   pen.text(x, y + 3.2, [plainRun(`${say.stress} `, true), ...richText('V Q/(I t)'), plainRun(note)], style);
 };
 
-/** Shear stress over the depth of each section, levels to scale 1:`scale`; `width` mm wide. */
-export const stressProfiles = (context: Context, width: number, scale: number): Zone => {
+/** Shear stress over the depth of each section, levels to each of the scales 1:`scale`; `width` mm wide. */
+export const stressProfiles = (context: Context, width: number, scales: readonly number[]): Zone[] => {
   const { pen, input, numbers } = context;
   const { sections } = input.report.shape;
   const column = width / sections.length;
   const captions = sections.map((one) =>
     captionOf(context, one).flatMap((line) => wrap(pen, richText(line, 'prose'), style, column - 1)),
   );
-  const toPaper = (level: number): number => fromSystem(level, '1,0', numbers.units) / scale;
-  const depth = toPaper(Math.max(...sections.map(({ profile }) => profile.at(-1)![0])));
   const captionLines = Math.max(...captions.map((lines) => lines.length));
+  const depth = Math.max(...sections.map(({ profile }) => profile.at(-1)![0]));
   const most = Math.max(...sections.map(({ peakStress }) => peakStress), 1e-9);
   const label = pen.width(numbers.amount(most, 'MPa'), style) + 1.5;
   const perStress = (Math.min(column, 31) - label - 2) / most;
-  const draw = (x: number, y: number): void => {
-    drawHeading(context, x, y);
-    sections.forEach((section, i) => {
-      const left = x + i * column;
-      pen.text(left, y + HEADING + 3, say.sections[section.name], style);
-      drawProfile(context, section, left, y + HEADING + LABELS, toPaper, perStress);
-      setLines(pen, left, y + HEADING + LABELS + depth + 4, captions[i]!, style, LEADING);
-    });
-  };
-  return { height: HEADING + LABELS + depth + 1.5 + captionLines * LEADING, draw };
+  return scales.map((scale): Zone => {
+    const toPaper = (level: number): number => fromSystem(level, '1,0', numbers.units) / scale;
+    const draw = (x: number, y: number): void => {
+      drawHeading(context, x, y);
+      sections.forEach((section, i) => {
+        const left = x + i * column;
+        pen.text(left, y + HEADING + 3, say.sections[section.name], style);
+        drawProfile(context, section, left, y + HEADING + LABELS, toPaper, perStress);
+        setLines(pen, left, y + HEADING + LABELS + toPaper(depth) + 4, captions[i]!, style, LEADING);
+      });
+    };
+    return { height: HEADING + LABELS + toPaper(depth) + 1.5 + captionLines * LEADING, draw };
+  });
 };
 
 /** The same in numbers alone, one line a section, where the page has no room for profiles. */

@@ -3,79 +3,85 @@ import type { Pen, SetRun, TextStyle } from './pen.ts';
 /** Text broken into lines of a given width. */
 export type Lines = readonly (readonly SetRun[])[];
 
-type Fragment = SetRun;
-
-/** Words with what joins them: a space belongs to the run that it stood in. */
-const wordsOf = (runs: readonly SetRun[]): Fragment[][] => {
-  const words: Fragment[][] = [[]];
-  for (const run of runs) {
-    run.text.split(' ').forEach((text, i) => {
-      if (i > 0) words.push([]);
-      if (text) words.at(-1)!.push({ ...run, text });
-    });
-  }
-  return words.filter((word) => word.length > 0);
-};
-
 const space: SetRun = { text: ' ', italic: false, sub: false };
 
+/** A run of a line that still grows. */
+type Open = { -readonly [key in keyof SetRun]: SetRun[key] };
+
+/** Pieces that no blank parts, and their width, mm. */
+interface Word {
+  readonly pieces: readonly SetRun[];
+  readonly width: number;
+}
+
 /** A word wider than the line, cut where the line ends. */
-const cutWord = (pen: Pen, word: readonly Fragment[], style: TextStyle, width: number): Fragment[][] => {
-  const parts: Fragment[][] = [[]];
-  let taken = 0;
-  for (const fragment of word) {
-    for (const text of fragment.text) {
-      const one = { ...fragment, text };
-      const w = pen.width([one], style);
-      if (taken + w > width && taken > 0) {
-        parts.push([]);
-        taken = 0;
-      }
-      parts.at(-1)!.push(one);
-      taken += w;
+const cutWord = (pen: Pen, word: Word, style: TextStyle, most: number): Word[] => {
+  const parts: { pieces: SetRun[]; width: number }[] = [{ pieces: [], width: 0 }];
+  for (const piece of word.pieces) {
+    for (const text of piece.text) {
+      const one = { ...piece, text };
+      const width = pen.width([one], style);
+      if (parts.at(-1)!.width + width > most && parts.at(-1)!.width > 0) parts.push({ pieces: [], width: 0 });
+      const part = parts.at(-1)!;
+      part.pieces.push(one);
+      part.width += width;
     }
   }
   return parts;
 };
 
-/** Breaks runs into lines at spaces. */
-export const wrap = (pen: Pen, runs: readonly SetRun[], style: TextStyle, width: number): SetRun[][] => {
-  const lines: SetRun[][] = [];
-  let line: SetRun[] = [];
-  let taken = 0;
-  const gap = pen.width([space], style);
-  for (const whole of wordsOf(runs)) {
-    const fits = pen.width(whole, style) <= width;
-    for (const word of fits ? [whole] : cutWord(pen, whole, style, width)) {
-      const w = pen.width(word, style);
-      if (line.length > 0 && taken + gap + w > width) {
-        lines.push(line);
-        line = [];
-        taken = 0;
-      }
-      if (line.length > 0) {
-        line.push(spaceLike(word[0]!));
-        taken += gap;
-      }
-      line.push(...word);
-      taken += w;
+/** Words between the blanks. */
+const wordsOf = (pen: Pen, runs: readonly SetRun[], style: TextStyle): Word[] => {
+  const words: Word[] = [];
+  let pieces: SetRun[] = [];
+  const close = (): void => {
+    if (pieces.length > 0) words.push({ pieces, width: pen.width(pieces, style) });
+    pieces = [];
+  };
+  for (const run of runs) {
+    const { text } = run;
+    let from = 0;
+    for (let to = text.indexOf(' '); to >= 0; to = text.indexOf(' ', from)) {
+      if (to > from) pieces.push({ ...run, text: text.slice(from, to) });
+      close();
+      from = to + 1;
     }
+    if (from < text.length) pieces.push(from === 0 ? run : { ...run, text: text.slice(from) });
   }
-  if (line.length > 0) lines.push(line);
-  return lines.map(joined);
+  close();
+  return words;
+};
+
+/** Puts a run at the end of a line; upright runs set alike become one. */
+const append = (line: Open[], run: SetRun): void => {
+  const last = line.at(-1);
+  const alike = last && !last.italic && !run.italic && last.sub === run.sub && last.sup === run.sup;
+  if (alike && last.bold === run.bold) last.text += run.text;
+  else line.push({ ...run });
 };
 
 const spaceLike = ({ bold }: SetRun): SetRun => (bold === undefined ? space : { ...space, bold });
 
-const joined = (line: readonly SetRun[]): SetRun[] => {
-  const out: SetRun[] = [];
-  for (const run of line) {
-    const last = out.at(-1);
-    const alike = last && !last.italic && !run.italic && last.sub === run.sub && last.sup === run.sup;
-    if (alike && last.bold === run.bold) out[out.length - 1] = { ...last, text: last.text + run.text };
-    else out.push(run);
+/** Breaks runs into lines at spaces. */
+export const wrap = (pen: Pen, runs: readonly SetRun[], style: TextStyle, width: number): SetRun[][] => {
+  const lines: Open[][] = [];
+  const gap = pen.width([space], style);
+  let taken = Number.POSITIVE_INFINITY;
+  for (const whole of wordsOf(pen, runs, style)) {
+    for (const word of whole.width <= width ? [whole] : cutWord(pen, whole, style, width)) {
+      if (taken + gap + word.width > width) {
+        lines.push([]);
+        taken = 0;
+      } else {
+        append(lines.at(-1)!, spaceLike(word.pieces[0]!));
+        taken += gap;
+      }
+      const line = lines.at(-1)!;
+      for (const piece of word.pieces) append(line, piece);
+      taken += word.width;
+    }
   }
-  return out;
+  return lines;
 };
 
 /** Keeps the first lines; where more are left out, the last one ends in an ellipsis. */

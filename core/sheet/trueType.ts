@@ -1,12 +1,15 @@
 /** A TrueType face with simple glyphs only, opened for measuring and for taking glyphs out. */
 export interface Face {
   readonly name: string;
+  /** All characters have codes below this. */
+  readonly codes: number;
   has(character: string): boolean;
   /** True where the face has every character of the text. */
   covers(text: string): boolean;
   /** Width of a line, in thousandths of the type size; characters that the face lacks count as the empty square that stands for them. */
   width(text: string): number;
-  glyph(character: string): Glyph;
+  /** Glyph of the character with this code. */
+  glyph(code: number): Glyph;
   /** Table of the file, such as `head`. */
   table(tag: string): Uint8Array;
 }
@@ -21,6 +24,9 @@ export interface Glyph {
 
 /** Stands for characters that a face does not have. */
 export const UNKNOWN = '□';
+
+/** In place of the advance of a character that a face does not have. */
+const NONE = 0xffff;
 
 export const viewOf = (bytes: Uint8Array): DataView => new DataView(bytes.buffer, bytes.byteOffset, bytes.byteLength);
 
@@ -69,23 +75,29 @@ export const openFace = (name: string, file: Uint8Array): Face => {
   const advance = (glyph: number): number => hmtx.getUint16(4 * Math.min(glyph, metrics - 1));
   const bearing = (glyph: number): number =>
     glyph < metrics ? hmtx.getInt16(4 * glyph + 2) : hmtx.getInt16(4 * metrics + 2 * (glyph - metrics));
-  const advances = new Map([...glyphs].map(([code, glyph]) => [code, advance(glyph)]));
-  const unknown = advances.get(UNKNOWN.charCodeAt(0)) ?? 0;
+  const advances = new Uint16Array(Math.max(...glyphs.keys()) + 1).fill(NONE);
+  for (const [code, glyph] of glyphs) advances[code] = advance(glyph);
+  const unknown = glyphs.has(UNKNOWN.charCodeAt(0)) ? advances[UNKNOWN.charCodeAt(0)]! : 0;
+  const widthOf = (code: number): number => {
+    const found = code < advances.length ? advances[code]! : NONE;
+    return found === NONE ? unknown : found;
+  };
   return {
     name,
+    codes: advances.length,
     table,
     has: (character) => glyphs.has(character.codePointAt(0)!),
     covers: (text) => {
-      for (let i = 0; i < text.length; i += 1) if (!advances.has(text.charCodeAt(i))) return false;
+      for (let i = 0; i < text.length; i += 1) if (!(advances[text.charCodeAt(i)]! < NONE)) return false;
       return true;
     },
     width: (text) => {
       let sum = 0;
-      for (let i = 0; i < text.length; i += 1) sum += advances.get(text.charCodeAt(i)) ?? unknown;
+      for (let i = 0; i < text.length; i += 1) sum += widthOf(text.charCodeAt(i));
       return sum;
     },
-    glyph: (character) => {
-      const glyph = glyphs.get(character.codePointAt(0)!) ?? 0;
+    glyph: (code) => {
+      const glyph = glyphs.get(code) ?? 0;
       return {
         advance: advance(glyph),
         leftBearing: bearing(glyph),

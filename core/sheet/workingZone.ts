@@ -4,7 +4,7 @@ import { body, LEFT, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
-import { plainRun, setLines, wrap } from './textBlock.ts';
+import { type Lines, plainRun, setLines, wrap } from './textBlock.ts';
 import { governingOf } from './verdictLine.ts';
 import { titleOf } from './verdictSentence.ts';
 import { ratioText, type Step, shortLine, stepsOf, wholeLine } from './workingLines.ts';
@@ -13,9 +13,6 @@ const HEADING = 4.6;
 const LEADING = 4;
 const INDENT = 4;
 const style: TextStyle = { ...body, family: 'narrow' };
-
-/** `full`: every step with its numbers; `short`: demand and resistance with theirs, the steps before them by formula and value. */
-export type Fullness = 'full' | 'short';
 
 /** Clause and basis, as they follow a title. */
 export const sourceText = ({ clause, basis }: Check): string => {
@@ -42,6 +39,7 @@ interface Line {
   right?: readonly SetRun[];
 }
 
+/** Demand and resistance with their numbers, the steps before them by formula and value. */
 const shortLines = (context: Context, steps: readonly Step[]): SetRun[][] => {
   const closing = steps.filter(({ closes }) => closes).flatMap((step) => broken(context, wholeLine(step, true)));
   const others = steps.filter(({ closes }) => !closes);
@@ -50,7 +48,7 @@ const shortLines = (context: Context, steps: readonly Step[]): SetRun[][] => {
   return [...closing, ...broken(context, [plainRun(say.with), ...list])];
 };
 
-/** Steps one below the other; two short ones share a line. */
+/** Every step with its numbers, one below the other; two short ones share a line. */
 const fullLines = (context: Context, steps: readonly Step[]): Line[] => {
   const { pen } = context;
   const half = (WIDTH - INDENT) / 2;
@@ -71,16 +69,20 @@ const fullLines = (context: Context, steps: readonly Step[]): Line[] => {
   return lines;
 };
 
-/** The working of the check that governs; null where it has none. */
-export const workingZone = (context: Context, fullness: Fullness): Zone | null => {
-  const { pen } = context;
+/** The working of the check that governs, in full and in short; null where it has none. */
+export const workingZones = (context: Context): readonly (Zone | null)[] => {
   const check = governingOf(context);
   const steps = check ? stepsOf(context, check) : [];
-  if (!check || steps.length === 0) return null;
-  const heading = wrap(pen, headingOf(context, check), style, WIDTH);
-  const lines: readonly Line[] =
-    fullness === 'full' ? fullLines(context, steps) : shortLines(context, steps).map((left) => ({ left }));
-  const draw = (_x: number, y: number): void => {
+  if (!check || steps.length === 0) return [null];
+  const heading = wrap(context.pen, headingOf(context, check), style, WIDTH);
+  return [fullLines(context, steps), shortLines(context, steps).map((left) => ({ left }))].map((lines) =>
+    zoneOf(context, heading, lines),
+  );
+};
+
+const zoneOf = ({ pen }: Context, heading: Lines, lines: readonly Line[]): Zone => ({
+  height: HEADING + (heading.length - 1 + lines.length) * LEADING,
+  draw: (_x, y) => {
     setLines(pen, LEFT, y + 3.3, heading, style, LEADING);
     const top = y + 3.3 + (heading.length - 1) * LEADING;
     lines.forEach((line, i) => {
@@ -88,9 +90,8 @@ export const workingZone = (context: Context, fullness: Fullness): Zone | null =
       pen.text(LEFT + INDENT, base, line.left, style);
       if (line.right) pen.text(LEFT + INDENT + (WIDTH - INDENT) / 2, base, line.right, style);
     });
-  };
-  return { height: HEADING + (heading.length - 1 + lines.length) * LEADING, draw };
-};
+  },
+});
 
 /** Says on which sheet the working stands. */
 export const workingElsewhere = ({ pen }: Context, sheet: number): Zone => ({

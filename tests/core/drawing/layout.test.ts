@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest';
 import { drawEnd } from '../../../core/drawing/drawEnd.ts';
 import { failurePath } from '../../../core/drawing/failurePath.ts';
 import { layoutDrawing } from '../../../core/drawing/layout.ts';
+import { leastBox } from '../../../core/drawing/leastBox.ts';
 import { collide, contains, pointsOf, textsOf } from './marks.ts';
 import { plausibleEnds } from './plausibleEnds.ts';
 import { sampleFacts, sampleWords, variedEnds } from './sampleFacts.ts';
@@ -81,6 +82,33 @@ describe('the layout of a drawing', () => {
     const over = layoutDrawing(drawing, pens[0], path);
     expect(over.marks.filter((one) => one.layer !== 'path')).toEqual(bare.marks);
     expect(over.marks.some((one) => one.layer === 'path')).toBe(true);
+  });
+
+  it('fills at least the box that is foretold without a layout, with and without a path', () => {
+    fc.assert(
+      fc.property(plausibleEnds, fc.constantFrom(...pens), fc.boolean(), (sample, pen, shown) => {
+        const facts = sampleFacts(sample);
+        const drawing = drawEnd(facts, sampleWords);
+        const path = shown ? failurePath('web-block', '', facts, sampleWords) : null;
+        const { left, top, right, bottom } = leastBox(drawing, pen);
+        const { box } = layoutDrawing(drawing, pen, path);
+        const hair = 1e-9 * Math.max(right - left, bottom - top);
+        expect(box.left).toBeLessThanOrEqual(left + hair);
+        expect(box.top).toBeLessThanOrEqual(top + hair);
+        expect(box.right).toBeGreaterThanOrEqual(right - hair);
+        expect(box.bottom).toBeGreaterThanOrEqual(bottom - hair);
+      }),
+      { numRuns: 100 },
+    );
+  });
+
+  it('is foretold so closely that words with leaders alone add to its height on paper', () => {
+    for (const name of Object.keys(variedEnds)) {
+      const drawing = { ...draw(name), callouts: [], weld: null };
+      const least = leastBox(drawing, pens[1]);
+      const { box } = layoutDrawing(drawing, pens[1]);
+      expect(box.bottom - box.top - (least.bottom - least.top), name).toBeLessThan(3 * pens[1].textHeight);
+    }
   });
 
   it('is the same every time', () => {

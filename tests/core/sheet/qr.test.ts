@@ -1,3 +1,4 @@
+import fc from 'fast-check';
 import { encode } from 'uqr';
 import { describe, expect, it } from 'vitest';
 import { codeOf, sideOf } from '../../../core/sheet/qr.ts';
@@ -17,6 +18,19 @@ describe('the square code of the sheet', () => {
     const text = linkOf(300);
     const { data } = encode(text, { ecc: 'M', border: 0, boostEcc: false });
     expect(codeOf(text, 24)!.rows).toEqual(data);
+  });
+
+  it('has the mask that the library itself would choose, for whatever text', () => {
+    const masks = new Set<number>();
+    fc.assert(
+      fc.property(fc.string({ minLength: 1, maxLength: 300 }), (text) => {
+        const { data, maskPattern } = encode(text, { ecc: 'M', border: 0, boostEcc: false });
+        masks.add(maskPattern);
+        expect(codeOf(text, 24)!.rows).toEqual(data);
+      }),
+      { numRuns: 150 },
+    );
+    expect(masks.size).toBe(8);
   });
 
   it('has modules of 0.33 mm at least, and no code where the text is too long for any', () => {

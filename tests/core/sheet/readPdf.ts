@@ -98,7 +98,7 @@ export const pathsOf = (pdf: Uint8Array, page: number, height: number): FoundPat
   };
   const at = (x: number, y: number) => ({ x: x * scale * MM, y: height - y * scale * MM });
   for (const token of contents(pdf)
-    [page]!.replace(/<[0-9a-f\s]*>|\[[^\]]*\]/g, ' ')
+    [page]!.replace(/\((?:\\.|[^\\)])*\)|<[0-9a-f\s]*>|\[[^\]]*\]/gs, ' ')
     .split(/\s+/)) {
     const value = Number(token);
     if (token !== '' && Number.isFinite(value)) {

@@ -5,18 +5,18 @@ import { confirmShown } from '../state/confirming.ts';
 import { later } from '../state/later.ts';
 import { Stress } from '../stress/index.ts';
 import { Announcer } from './Announcer.tsx';
+import { DropPlace } from './DropPlace.tsx';
 import { Foot } from './Foot.tsx';
 import { Head } from './Head.tsx';
 import { finderShown, keysShown } from './keys.ts';
 import { Notices } from './Notices.tsx';
 import { TopBand } from './TopBand.tsx';
 
-const overlays = later(async () => (await import('./Overlays.tsx')).Overlays);
+const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
 
-const Over = () => {
-  const asked = keysShown.value || finderShown.value || confirmShown.value;
-  const Overlays = asked ? overlays.value : overlays.ready;
-  return Overlays && <Overlays />;
+const OpenDialogs = () => {
+  const Dialogs = (keysShown.value || finderShown.value || confirmShown.value) && dialogs.value;
+  return Dialogs && <Dialogs />;
 };
 
 /** The bench: order, piece and ladder under one head. */
@@ -44,6 +44,7 @@ export const Bench = () => (
     <Foot />
     <VerdictStrip />
     <Announcer />
-    <Over />
+    <OpenDialogs />
+    <DropPlace />
   </>
 );

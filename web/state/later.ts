@@ -1,11 +1,8 @@
 import { signal } from '@preact/signals';
 
-/** A part of the program that the first view does without; null until it is there. */
+/** A part of the program that the first view does without; null until it is there. Reading it asks for it. */
 export interface Later<T> {
-  /** Reading it asks for it. */
   readonly value: T | null;
-  /** Only what is there. */
-  readonly ready: T | null;
 }
 
 const asks: (() => void)[] = [];
@@ -30,9 +27,6 @@ export const later = <T>(load: () => Promise<T>): Later<T> => {
   return {
     get value() {
       ask();
-      return part.value?.it ?? null;
-    },
-    get ready() {
       return part.value?.it ?? null;
     },
   };

@@ -17,7 +17,7 @@ import type { DrawingWords } from './words.ts';
  * Any facts with finite numbers give a drawing; ends that cannot be made are drawn as they are described.
  */
 export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
-  const right = drawnLength(facts);
+  const right = drawnLength(facts, words);
   const box = pieceBox(facts, right);
   const { h } = facts;
   return {

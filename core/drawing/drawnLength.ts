@@ -1,10 +1,14 @@
 import type { Facts } from '../end/facts.ts';
 import { plateBox } from './plate.ts';
+import type { DrawingWords } from './words.ts';
 
 /** Beam drawn beyond the last cope or the plate: this share of its depth, and no less than the length in mm. */
 const BEYOND = 0.28;
 const LEAST_BEYOND = 110;
 
+/** Length of beam that is drawn beyond the last cope or the plate where no more is asked for, mm. */
+export const usualBeyond = ({ h }: Facts): number => Math.max(BEYOND * h, LEAST_BEYOND);
+
 /** Length of beam that is drawn, mm from its end. */
-export const drawnLength = (it: Facts): number =>
-  Math.max(it.ct, it.cb, plateBox(it).right, 0) + Math.max(BEYOND * it.h, LEAST_BEYOND);
+export const drawnLength = (it: Facts, { beyond = 0 }: DrawingWords): number =>
+  Math.max(it.ct, it.cb, plateBox(it).right, 0) + Math.max(usualBeyond(it), beyond);

@@ -6,7 +6,7 @@ import { CAPITAL, drawLine, keepOff, type Pad, setLine, widthOf } from './pad.ts
 import { rings } from './rings.ts';
 
 const LINE_WEIGHT = 9;
-const TICK_WEIGHT = 12;
+const TICK_WEIGHT = 20;
 /** In text heights: half-length of the oblique stroke, the free space beside a value in its line, a line drawn on beyond its end. */
 const TICK = 0.3;
 const GAP = 0.25;

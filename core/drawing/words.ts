@@ -1,6 +1,6 @@
 import type { UnitSystem } from '../units/systems.ts';
 
-/** What the drawing writes but the facts do not carry: names as they stand in the end, and the trade's words of the region. */
+/** What the drawing needs but the facts do not carry: names as they stand in the end, the trade's words of the region, room for words. */
 export interface DrawingWords {
   readonly units: UnitSystem;
   /** Designation of the section, such as `UB 406 × 178 × 60`. */
@@ -14,4 +14,6 @@ export interface DrawingWords {
   readonly cope: string;
   /** Of the part that the web is bolted to, such as `fin plate`, `single plate` or `ply`. */
   readonly plate: string;
+  /** Beam drawn at least beyond the last cope or the plate, mm: words with leaders stand on it. */
+  readonly beyond?: number;
 }

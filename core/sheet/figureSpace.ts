@@ -11,7 +11,7 @@ export interface PaperBox {
 }
 
 /** Air around what stands beside a drawing, mm. */
-const AIR = 1.5;
+export const AIR = 1.5;
 
 /** The boxes of all marks on the paper, at 1:`scale`. */
 export const paperBoxes = ({ marks, box }: Laid, scale: number): PaperBox[] =>

@@ -1,7 +1,7 @@
 import type { FailurePath } from '../drawing/drawing.ts';
 import type { Laid } from '../drawing/laid.ts';
 import type { Context } from './context.ts';
-import { freeAbove, lowestRightOf, type PaperBox, paperBoxes } from './figureSpace.ts';
+import { AIR, freeAbove, lowestRightOf, type PaperBox, paperBoxes } from './figureSpace.ts';
 import { body } from './page.ts';
 import type { Spot, TextStyle } from './pen.ts';
 import { type Code, sideOf } from './qr.ts';
@@ -37,6 +37,9 @@ export interface FigureWords {
   /** Width on the paper, mm. */
   readonly room: number;
 }
+
+/** Width that caption and code take beside the piece, with air, mm. */
+export const besideWidth = (code: Code | null): number => Math.max(BESIDE, code ? sideOf(code) : 0) + 1 + AIR;
 
 /** Where the caption with the scale stands, and the square code if it found room; mm on the paper from the figure's upper left corner. */
 interface Placed {

@@ -17,7 +17,7 @@ export const webGrossShear: PathMaker = (it, words) => {
   return path('The full section shears beyond the end.', {
     strokes: [torn(top, foot)],
     tags: [tag(top, foot, `${length(it.h, words.units)} in shear`)],
-    slide: 0.94 * (drawnLength(it) - x),
+    slide: 0.94 * (drawnLength(it, words) - x),
   });
 };
 

@@ -11,7 +11,7 @@ export const stressFull: PathMaker = (it, words) => {
   const left = Math.max(it.ct, it.cb, plateBox(it).right);
   const ends = [
     { x: left, y: at },
-    { x: drawnLength(it), y: at },
+    { x: drawnLength(it, words), y: at },
   ] as const;
   return path('The elastic shear stress V Q/(I t) of the full section peaks at this level.', {
     strokes: [{ kind: 'centre', from: ends[0], to: [ends[1]] }],

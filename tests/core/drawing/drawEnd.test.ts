@@ -14,6 +14,18 @@ const arcsOf = ({ from, to }: Stroke): [Point, Arc][] =>
   to.flatMap((step, i): [Point, Arc][] => (isArc(step) ? [[i === 0 ? from : endOf(to[i - 1]!), step]] : []));
 
 describe('the drawing of one end', () => {
+  it('is drawn as far beyond cope and plate as words need, and never less than without them', () => {
+    const facts = sampleFacts();
+    const right = (beyond?: number) =>
+      drawEnd(facts, { ...sampleWords, ...(beyond !== undefined && { beyond }) }).beam.right;
+    const usual = right();
+    expect(right(0)).toBe(usual);
+    expect(right(50)).toBe(usual);
+    expect(right(400) - right(300)).toBeCloseTo(100, 9);
+    const [at] = drawEnd(facts, { ...sampleWords, beyond: 400 }).breaks;
+    expect(at!.x).toBe(right(400));
+  });
+
   it('has an outline that runs from the break round the end and back to the break, for every end', () => {
     for (const name of Object.keys(variedEnds)) {
       const { strokes, breaks } = draw(name);

@@ -142,6 +142,17 @@ describe('the figure', () => {
     expect(level.some(({ points }) => Math.abs(points[1]!.x - points[0]!.x - wanted) < 0.03)).toBe(true);
   });
 
+  it('at 1:10 names bolts and plate on the beam or right above it, not across the piece', async () => {
+    const deep = { ...end, top: { length: 110, depth: 8, radius: 10 } };
+    const [page = []] = await pagesOf(examined(deep));
+    expect(wholeText(page)).toContain('scale 1:10');
+    const x = (text: string) => page.find((one) => one.text.startsWith(text) && one.x < 132)!.x;
+    const face = page.find(({ text }) => text === 'support face')!;
+    for (const text of ['3 × M20', 'holes 22', 'fin plate 10', 'far side']) {
+      expect(x(text), text).toBeGreaterThan(face.x + face.width);
+    }
+  });
+
   it('of a 406 deep beam is 1:5 on A4 and a standard scale on Letter', async () => {
     expect(wholeText((await pagesOf(examined(end)))[0]!)).toContain('scale 1:5');
     const letter = await pagesOf(examined(withSheet({ ...end.sheet, paper: 'Letter' })));

@@ -1,0 +1,84 @@
+import { drawEnd } from '../drawing/drawEnd.ts';
+import type { Drawing, FailurePath } from '../drawing/drawing.ts';
+import { usualBeyond } from '../drawing/drawnLength.ts';
+import { failurePath } from '../drawing/failurePath.ts';
+import type { LayoutOptions } from '../drawing/layout.ts';
+import { leastBox } from '../drawing/leastBox.ts';
+import type { DrawingWords } from '../drawing/words.ts';
+import type { Context } from './context.ts';
+import { holesAssumed, sectionName } from './given.ts';
+import { POINT } from './pen.ts';
+import { sheetWords as say } from './sheetWords.ts';
+import { governingOf } from './verdictLine.ts';
+
+/** Capitals 2.5 mm high: size in pt of a face whose capitals stand 0.698 em high. */
+const SIZE = 2.5 / 0.698 / POINT;
+/** Beam beyond cope and plate that words with leaders need, mm on the paper. */
+const REACH = 30;
+
+/** What the drawing writes, as it stands in the end. */
+const drawingWords = (context: Context): DrawingWords => {
+  const { input, numbers, words } = context;
+  const { end, designation } = input;
+  const { bolts } = end.joint;
+  return {
+    units: numbers.units,
+    section: sectionName(designation).replaceAll(' × ', '×') || say.ownSize,
+    boltSize: bolts.size,
+    boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
+    holes: bolts.holes ?? holesAssumed(context),
+    cope: words.cope,
+    plate: (end.joint.kind === 'fin-plate' ? say.labels.finPlate : say.labels.ply).toLowerCase(),
+  };
+};
+
+/** The end as drawn, with the path of the check that governs; none for rules of fit. */
+export interface Piece {
+  readonly drawing: Drawing;
+  readonly path: FailurePath | null;
+}
+
+/** `beyond`: length of beam at least beyond cope and plate, mm. */
+export const pieceOf = (context: Context, beyond = 0): Piece => {
+  const { facts } = context.input;
+  const words = { ...drawingWords(context), beyond };
+  const governing = governingOf(context);
+  return {
+    drawing: drawEnd(facts, words),
+    path: governing ? failurePath(governing.id, governing.of ?? '', facts, words) : null,
+  };
+};
+
+/** mm on the paper. */
+export interface PaperSize {
+  readonly width: number;
+  readonly height: number;
+}
+
+/** How the paper's text stands on a drawing at 1:`scale`. */
+export const penAt = ({ pen }: Context, scale: number): LayoutOptions => ({
+  textHeight: SIZE * POINT * scale,
+  values: 'parallel',
+  measure: (text, size) => (pen.width(text, { size: SIZE }) * size) / (SIZE * POINT),
+});
+
+/** What no layout of a piece at 1:`scale` goes below: known without laying one out. */
+export const leastAt = (context: Context, { drawing }: Piece, scale: number): PaperSize => {
+  const { left, right, top, bottom } = leastBox(drawing, penAt(context, scale));
+  return { width: (right - left) / scale, height: (bottom - top) / scale };
+};
+
+/** Below 1:5, the piece with so much more of the beam that words stand on it, up to `free`, mm on the paper; null where that is no more than usual. */
+export const longerPiece = (context: Context, scale: number, free: number): Piece | null => {
+  const usual = usualBeyond(context.input.facts);
+  const beyond = Math.min(REACH * scale, usual + free * scale);
+  return scale > 5 && beyond > usual ? pieceOf(context, beyond) : null;
+};
+
+/** Words on the piece that stand among the given data too. */
+const repeated = new Set(['section', 'bolts', 'plate']);
+
+export const unlabelled = ({ drawing, path }: Piece): Piece => ({
+  drawing: { ...drawing, callouts: drawing.callouts.filter(({ name }) => !repeated.has(name)) },
+  path,
+});

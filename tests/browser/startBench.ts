@@ -1,3 +1,4 @@
+import { existsSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
 import type { ServerType } from '@hono/node-server';
 import type { Browser, BrowserContext, BrowserContextOptions } from 'playwright-core';
@@ -72,6 +73,7 @@ const closed = async (server: ServerType): Promise<void> => {
 
 /** The built bench behind the real server on a free port of this machine, and a browser to see it with. */
 export const startBench = async (): Promise<RunningBench> => {
+  if (!existsSync(`${web}/index.html`)) throw new Error('The bench is not built: npm run build.');
   const { server, url } = await serve({ host: '127.0.0.1', port: 0, web });
   const stopServing = () => closed(server);
   try {

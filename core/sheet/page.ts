@@ -16,7 +16,6 @@ export const bottomOf = (paper: Paper): number => papers[paper][1] - TOP;
 /** Zones that stand fast on every paper. */
 export const VERDICT_TOP = 25.8;
 export const FIGURE_TOP = 36.8;
-export const BLOCK_HEIGHT = 25.8;
 
 /** Line widths: frames, outlines, thin lines, the thinnest. */
 export const FRAME = 0.7;

@@ -5,7 +5,7 @@ import { type Figure, type Figures, figuresOf } from './figure.ts';
 import { footingZone } from './footing.ts';
 import { givenZone } from './given.ts';
 import { limitsZone } from './limitsZone.ts';
-import { BLOCK_HEIGHT, FIGURE_TOP } from './page.ts';
+import { FIGURE_TOP } from './page.ts';
 import type { Code } from './qr.ts';
 import { stressNumbers, stressProfiles } from './stressZone.ts';
 import { workingElsewhere, workingZones } from './workingZone.ts';
@@ -140,8 +140,8 @@ const onMore = (parts: Parts): Plan => {
 };
 
 /** Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on further sheets. */
-export const planOf = (context: Context, bottom: number, code: Code | null): Plan => {
-  const room = bottom - BLOCK_HEIGHT - FIGURE_TOP - 0.6;
+export const planOf = (context: Context, blockTop: number, code: Code | null): Plan => {
+  const room = blockTop - FIGURE_TOP - 0.6;
   const parts: Parts = {
     context,
     rows: rowsOf(context),

@@ -5,13 +5,13 @@ import { endKeywords } from './endInPdf.ts';
 import { loadFaces } from './faces.ts';
 import { drawHead } from './head.ts';
 import { numbersOf } from './numbers.ts';
-import { BLOCK_HEIGHT, bottomOf, FIGURE_TOP, LEFT, type Paper, papers, WIDTH } from './page.ts';
+import { bottomOf, FIGURE_TOP, LEFT, type Paper, papers, WIDTH } from './page.ts';
 import { writePdf } from './pdf.ts';
 import { Pen } from './pen.ts';
 import { DATA_WIDTH, FIGURE_WIDTH, type Plan, planOf } from './plan.ts';
-import { codeOf, sideOf } from './qr.ts';
+import { type Code, codeOf, sideOf } from './qr.ts';
 import { sheetWords as say } from './sheetWords.ts';
-import { CODE_ROOM, drawTitleBlock } from './titleBlock.ts';
+import { blockHeight, CODE_ROOM, drawTitleBlock } from './titleBlock.ts';
 import { drawVerdict, governingOf } from './verdictLine.ts';
 import { drawFurtherFrame, furtherPages, workedChecks } from './workingPages.ts';
 
@@ -21,10 +21,10 @@ export interface SheetOptions {
 }
 
 /** Zones from the top down; what is left of the height stands between them. */
-const drawPlan = (plan: Plan, bottom: number): void => {
+const drawPlan = (plan: Plan, blockTop: number): void => {
   const { figure, given, stress, table, footing, working, limits, upper } = plan;
   const used = upper + table.height + footing.height + (working?.height ?? 0) + limits.height;
-  const gap = Math.max(0, Math.min(4, (bottom - BLOCK_HEIGHT - FIGURE_TOP - used - 0.6) / 3));
+  const gap = Math.max(0, Math.min(4, (blockTop - FIGURE_TOP - used - 0.6) / 3));
   figure.draw(
     LEFT + Math.max(0, (FIGURE_WIDTH - figure.width) / 2),
     FIGURE_TOP + Math.max(0, (upper - figure.height) / 2),
@@ -41,21 +41,31 @@ const drawPlan = (plan: Plan, bottom: number): void => {
   limits.draw(LEFT, y + (working?.height ?? 0));
 };
 
+/** The first sheet above its block, which is higher where it must say that no square code stands here. */
+const planned = (context: Context, bottom: number, inBlock: Code | null, found: Code | null) => {
+  const at = (lost: boolean, beside: Code | null) => {
+    const blockTop = bottom - blockHeight(context, { code: inBlock, lost });
+    return { plan: planOf(context, blockTop, beside), blockTop, lost };
+  };
+  const first = at(false, inBlock ? null : found);
+  const lost = context.input.link !== undefined && !inBlock && !first.plan.figure.coded;
+  return lost ? at(true, null) : first;
+};
+
 /** All pages as marks. */
 const drawSheet = (context: Context, { workings }: SheetOptions, bottom: number): void => {
   const { pen, input } = context;
-  const code = input.link === undefined ? null : codeOf(input.link, CODE_ROOM);
-  const inBlock = code !== null && sideOf(code) <= CODE_ROOM;
-  const plan = planOf(context, bottom, inBlock ? null : code);
+  const found = input.link === undefined ? null : codeOf(input.link, CODE_ROOM);
+  const code = found !== null && sideOf(found) <= CODE_ROOM ? found : null;
+  const { plan, blockTop, lost } = planned(context, bottom, code, found);
   const governing = governingOf(context);
   const checks = workings === 'all' ? workedChecks(context) : plan.workingLater && governing ? [governing] : [];
   const further = furtherPages(context, plan.later, checks, bottom);
   const of = further.length + 1;
   drawHead(context);
   drawVerdict(context);
-  drawPlan(plan, bottom);
-  const lost = input.link !== undefined && !inBlock && !plan.figure.coded;
-  drawTitleBlock(context, bottom, { code: inBlock ? code : null, lost, sheet: 1, of });
+  drawPlan(plan, blockTop);
+  drawTitleBlock(context, blockTop, { code, lost, sheet: 1, of });
   further.forEach((draw, i) => {
     pen.turnTo(i + 1);
     drawFurtherFrame(context, bottom, i + 2, of);

@@ -83,7 +83,7 @@ export const sheetWords = {
   optionsBelow: 'options in force: see below',
   basis: 'Basis: ',
   unverified: '* not yet compared with numbers from outside the program.',
-  qrLeftOut: 'Data too long for a square code: the file itself carries them.',
+  qrLeftOut: 'No square code: the file carries the data.',
   prepared: 'Prepared',
   checked: 'Checked',
   approved: 'Approved',

@@ -1,5 +1,6 @@
+import { closingDepth, closingLines, drawClosing } from './closing.ts';
 import type { Context } from './context.ts';
-import { BLOCK_HEIGHT, FRAME, HAIR, LEFT, NARROW, small, WIDTH } from './page.ts';
+import { FRAME, HAIR, LEFT, NARROW, small, WIDTH } from './page.ts';
 import type { Pen, TextStyle } from './pen.ts';
 import { type Code, drawCode } from './qr.ts';
 import { sheetWords as say } from './sheetWords.ts';
@@ -7,6 +8,9 @@ import { oneLine } from './textBlock.ts';
 
 const BOXES_LEFT = 29.5;
 const SIGN_HEIGHT = 13.2;
+/** Base of the first closing line below the block's frame, and what is left below the last one, mm. */
+const CLOSING = 25.6;
+const BELOW = 0.2;
 
 /** Side of a square code that stands here, mm; its white edges are the page's margin, the gap below the frame and that before the boxes. */
 export const CODE_ROOM = 24;
@@ -21,23 +25,26 @@ export interface Block {
   readonly of: number;
 }
 
-/** Sign-off boxes, revision, fingerprint, program and cautions, at the foot of the window. */
-export const drawTitleBlock = (context: Context, bottom: number, block: Block): void => {
+/** Left edge of what stands beside the code. */
+const leftOf = ({ code }: Pick<Block, 'code'>): number => LEFT + (code ? BOXES_LEFT : 0);
+
+const closingOf = (context: Context, block: Pick<Block, 'code' | 'lost'>) =>
+  closingLines(context, LEFT + WIDTH - leftOf(block), block.lost);
+
+/** Height that the block takes with its closing lines, mm. */
+export const blockHeight = (context: Context, block: Pick<Block, 'code' | 'lost'>): number =>
+  CLOSING + closingDepth(closingOf(context, block)) + BELOW;
+
+/** Sign-off boxes, revision, fingerprint, program and cautions, from `top` to the foot of the window. */
+export const drawTitleBlock = (context: Context, top: number, block: Block): void => {
   const { pen } = context;
-  const { code, lost } = block;
-  const top = bottom - BLOCK_HEIGHT;
+  const { code } = block;
   pen.line(LEFT, top, LEFT + WIDTH, top, FRAME);
   if (code) drawCode(pen, LEFT, top + 1.6, code);
-  const left = LEFT + (code ? BOXES_LEFT : 0);
+  const left = leftOf(block);
   drawSignOff(context, left, top + 1.6);
   drawRevision(context, left, top + SIGN_HEIGHT + 1.9, block);
-  drawCautions(context, left, bottom - 0.2);
-  if (lost) pen.text(LEFT + WIDTH, bottom - 0.2, say.qrLeftOut, { ...small, anchor: 'end' });
-};
-
-/** What the program asks everyone to keep in mind. */
-export const drawCautions = ({ pen, words }: Context, left: number, base: number): void => {
-  pen.text(left, base, words.cautions.join(' '), { size: 9, family: 'narrow' });
+  drawClosing(context, left, top + CLOSING, closingOf(context, block));
 };
 
 const drawSignOff = ({ pen, input }: Context, left: number, top: number): void => {

@@ -1,13 +1,14 @@
 import type { Check } from '../check/report.ts';
 import { type Row, rowsWithin } from './checkRows.ts';
 import { tableZone } from './checkTable.ts';
+import { closingDepth, closingLines, drawClosing } from './closing.ts';
 import type { Context } from './context.ts';
 import { standardName } from './head.ts';
 import { body, FRAME, LEFT, NARROW, small, TOP, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
 import { sheetWords as say } from './sheetWords.ts';
-import { oneLine, plainRun, wrap } from './textBlock.ts';
-import { drawCautions, fingerprintText } from './titleBlock.ts';
+import { type Lines, oneLine, plainRun, wrap } from './textBlock.ts';
+import { fingerprintText } from './titleBlock.ts';
 import { titleOf } from './verdictSentence.ts';
 import { type Step, stepsOf } from './workingLines.ts';
 import { sourceText } from './workingZone.ts';
@@ -15,7 +16,10 @@ import { sourceText } from './workingZone.ts';
 const style: TextStyle = { ...body, family: 'narrow' };
 const LEADING = 3.95;
 const HEAD = 11;
-const FOOT = 9;
+/** From the rule of the foot to its first base line, and from its last one to the line below, mm; air above the rule. */
+const CLOSING = 3.6;
+const BELOW = 3.4;
+const OVER = 2;
 const GUTTER = 6;
 const COLUMN = (WIDTH - GUTTER) / 2;
 const SYMBOL = 13;
@@ -135,6 +139,11 @@ const pagesOfRows = (rows: readonly Row[], room: number): Page[] => {
   return pages;
 };
 
+const footOf = (context: Context): { lines: Lines; height: number } => {
+  const lines = closingLines(context, WIDTH);
+  return { lines, height: CLOSING + closingDepth(lines) + BELOW };
+};
+
 /** What the further sheets hold; each function draws one page below its head. The workings begin below the last rows. */
 export const furtherPages = (
   context: Context,
@@ -142,7 +151,7 @@ export const furtherPages = (
   checks: readonly Check[],
   bottom: number,
 ): (() => void)[] => {
-  const room = bottom - FOOT - TOP - HEAD;
+  const room = bottom - footOf(context).height - OVER - TOP - HEAD;
   const pages = pagesOfRows(rows, room);
   const last = Math.max(0, pages.length - 1);
   const tableHeight = (page: Page | undefined): number =>
@@ -179,9 +188,10 @@ export const drawFurtherFrame = (context: Context, bottom: number, sheet: number
   const job = [end.sheet?.job, standardName(context)].filter(Boolean).join('; ');
   pen.text(LEFT + 64, TOP + 6.8, oneLine(pen, `${say.workings}: ${job}`, style, WIDTH - 64), style);
   pen.line(LEFT, TOP + HEAD - 0.8, LEFT + WIDTH, TOP + HEAD - 0.8, NARROW);
-  const line = bottom - FOOT + 2;
+  const foot = footOf(context);
+  const line = bottom - foot.height;
   pen.line(LEFT, line, LEFT + WIDTH, line, NARROW);
-  drawCautions(context, LEFT, line + 3.6);
+  drawClosing(context, LEFT, line + CLOSING, foot.lines);
   const revision = end.sheet?.revision || say.unchecked;
   const parts = [
     `${say.revision} ${revision}`,
@@ -189,5 +199,5 @@ export const drawFurtherFrame = (context: Context, bottom: number, sheet: number
     `${say.programName} ${report.version}`,
     `${say.sheet} ${sheet} ${say.of} ${of}`,
   ];
-  pen.text(LEFT + WIDTH, line + 7, parts.join('   '), { ...small, anchor: 'end' });
+  pen.text(LEFT + WIDTH, bottom, parts.join('   '), { ...small, anchor: 'end' });
 };

@@ -76,7 +76,7 @@ describe('the square code of the sheet', () => {
   it('is left out, and this is said, where it has no room', async () => {
     const { grid, texts } = await pageWith(fullest, 2000);
     expect(grid).toBeUndefined();
-    expect(texts).toContain('Data too long for a square code');
+    expect(texts).toContain('No square code: the file carries the data.');
   });
 
   it('is drawn as it is: dark where the code is dark', async () => {

@@ -3,8 +3,8 @@ import type { Shape } from '../shape/shape.ts';
 import { shearPeak, shearProfile } from '../shape/shearStress.ts';
 import { roundedDown } from '../units/figures.ts';
 import { toSystem } from '../units/systems.ts';
-import type { Line, Point } from './drawing.ts';
-import { forceUnit, stress, stressUnit } from './sizes.ts';
+import type { Point } from './drawing.ts';
+import { forceUnit, stress } from './sizes.ts';
 import type { DrawingWords } from './words.ts';
 
 /** The elastic shear stress V Q/(I t) down one section; heights in mm below top of steel, the stress as a share of the largest of all peaks. */
@@ -24,8 +24,6 @@ export interface StressProfile {
 
 export interface StressFigure {
   readonly profiles: readonly StressProfile[];
-  /** Unit and formula, once for all. */
-  readonly foot: Line;
 }
 
 /** Profiles of the full section and of what is left behind the copes (none of a cut channel). `limit`: the standard's limiting stress, MPa. */
@@ -37,7 +35,6 @@ export const stressFigure = (it: Facts, words: DrawingWords, limit: number | nul
   ];
   const shapes = named.flatMap(([name, title, shape]) => (shape === null ? [] : [{ name, title, shape }]));
   const most = Math.max(...shapes.map(({ shape }) => shearPeak(shape).perNewton));
-  const bound = limit === null ? [] : [`limit ${stress(limit, words.units)}`];
   return {
     profiles: shapes.map(({ name, title, shape }) => ({
       name,
@@ -45,10 +42,6 @@ export const stressFigure = (it: Facts, words: DrawingWords, limit: number | nul
       ...profile(it, words, shape, most),
       ...(limit === null ? {} : { limit: limitOf(it, words, shape, limit, most) }),
     })),
-    foot: [
-      { text: `${[stressUnit(words.units), ...bound].join('; ')};`, role: 'second' },
-      { text: 'V Q/(I t)', role: 'second', italic: true },
-    ],
   };
 };
 

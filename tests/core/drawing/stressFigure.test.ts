@@ -1,7 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { layoutStress } from '../../../core/drawing/layStress.ts';
 import { stressFigure } from '../../../core/drawing/stressFigure.ts';
-import { contains, pointsOf, textsOf } from './marks.ts';
 import { sampleFacts, sampleWords, variedEnds } from './sampleFacts.ts';
 
 describe('the figure of shear stress', () => {
@@ -37,37 +35,8 @@ describe('the figure of shear stress', () => {
   });
 
   it('has no limit where the standard states none, and a figure where there is no reaction', () => {
-    const { profiles, foot } = stressFigure(sampleFacts({ V: 0 }), sampleWords, null);
+    const { profiles } = stressFigure(sampleFacts({ V: 0 }), sampleWords, null);
     expect(profiles.every((one) => one.limit === undefined)).toBe(true);
     expect(profiles[0]!.peak.text).toBe('0.0');
-    expect(foot[0]!.text).not.toContain('limit');
-    expect(layoutStress({ profiles, foot }, { textHeight: 12, width: 60 }).marks.length).toBeGreaterThan(50);
-  });
-
-  it('is drawn on the levels of the piece, inside its box, no word on another', () => {
-    for (const [name, sample] of Object.entries(variedEnds)) {
-      const figure = stressFigure(sampleFacts(sample), sampleWords, 210.87);
-      const laid = layoutStress(figure, { textHeight: 12.6, width: 50 });
-      for (const point of laid.marks.flatMap(pointsOf)) expect(contains(laid.box, point), name).toBe(true);
-      const base = laid.marks.find((one) => one.shape === 'run' && one.kind === 'outline' && one.to.length === 1)!;
-      expect(pointsOf(base).map((one) => one.y)).toEqual([figure.profiles[0]!.top, figure.profiles[0]!.bottom]);
-      const texts = textsOf(laid);
-      texts.forEach((a, i) => {
-        for (const b of texts.slice(i + 1)) {
-          const apart = a.box.right <= b.box.left + 1e-6 || b.box.right <= a.box.left + 1e-6;
-          const over = a.box.bottom <= b.box.top + 1e-6 || b.box.bottom <= a.box.top + 1e-6;
-          expect(apart || over, `${name}: ${a.text} on ${b.text}`).toBe(true);
-        }
-      });
-    }
-  });
-
-  it('draws the limit as a line only where it stands near the peak', () => {
-    const dashed = (V: number): number => {
-      const laid = layoutStress(stressFigure(sampleFacts({ V }), sampleWords, 210.87), { textHeight: 12, width: 60 });
-      return laid.marks.filter((one) => one.shape === 'run' && one.kind === 'hidden').length;
-    };
-    expect(dashed(165_000)).toBe(2);
-    expect(dashed(430_000)).toBe(4);
   });
 });

@@ -9,7 +9,8 @@ const listed = Object.values(standards).map(({ id, title, edition, level, option
   edition,
   level,
   options,
-  grades: materials.grades,
+  grades: materials.sections.grades,
+  plateGrades: materials.plates.grades,
   boltGrades: materials.boltGrades,
 }));
 

@@ -1,7 +1,8 @@
 import * as z from 'zod';
 import type { Report, SaidFault } from '../../core/check/report.ts';
-import { fitNames, strengthNames } from '../../core/end/checkNames.ts';
+import { fitNames, partNames, strengthNames } from '../../core/end/checkNames.ts';
 import { endSchema } from '../../core/end/schema.ts';
+import { regions } from '../../core/words/regions.ts';
 
 const said = (description: string) => ({ description });
 const number = z.number();
@@ -24,7 +25,7 @@ const workingRow = z.strictObject({
 
 const check = z.strictObject({
   id: checkName,
-  part: z.enum(['web', 'bolts', 'plate', 'weld', 'end']),
+  part: z.enum(partNames),
   title: z.string(),
   clause: z.string(),
   basis,
@@ -75,6 +76,7 @@ export const reportSchema = z
   .strictObject({
     mark: z.string(),
     standard: z.strictObject({ id: z.string(), title: z.string(), edition: z.string() }),
+    words: z.enum(regions).meta(said('Whose trade words titles, reasons and notes are in')),
     level: z.enum(['factored', 'service']),
     units: z.enum(['mm-kN', 'in-kip']),
     verdict: z.enum(['holds', 'fails', 'refer']),
@@ -153,6 +155,7 @@ export const standardsSchema = z
         level: z.enum(['factored', 'service']).meta(said('Of the reaction')),
         options: z.record(z.string(), z.array(z.string())).meta(said('Values of each option, the default first')),
         grades: z.array(z.string()),
+        plateGrades: z.array(z.string()),
         boltGrades: z.array(z.string()),
       }),
     ),

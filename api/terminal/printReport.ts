@@ -1,11 +1,10 @@
-import { wordsOf } from '../../core/check/examine.ts';
 import type { Check, Report, State } from '../../core/check/report.ts';
 import { limitText } from '../../core/sheet/fitLimit.ts';
 import { type Numbers, numbersOf } from '../../core/sheet/numbers.ts';
 import { sheetWords as say } from '../../core/sheet/sheetWords.ts';
 import { titleOf } from '../../core/sheet/verdictSentence.ts';
-import { standards } from '../../core/standards/index.ts';
 import type { Words } from '../../core/words/words.ts';
+import { wordsFor } from '../../core/words/wordsFor.ts';
 import { type Column, type Row, setColumns } from './columns.ts';
 import { printWorking } from './printWorking.ts';
 import { verdictLine } from './verdictLine.ts';
@@ -113,7 +112,7 @@ const heading = ({ report, numbers }: Context): string[] => {
 
 /** The report for a person: 100 columns, weakest first; the working of every check after it where the report carries it. */
 export const printReport = (report: Report): string => {
-  const words = wordsOf(standards[report.standard.id]!);
+  const words = wordsFor(report.words);
   const context: Context = { report, numbers: numbersOf(report.units, '.'), words };
   const blocks = [
     heading(context),

@@ -58,14 +58,15 @@ const strengthCheck = (context: Context, plan: StrengthPlan, result: Result): Ch
   const { units, words } = context;
   const rule = isNoRule(plan.rule) ? undefined : plan.rule;
   const way = rule?.ways[result.way];
-  const unit = way ? unitOf(way.resistance.dimension, units).name : '';
+  const unit = way ? unitOf(way.demand.dimension, units).name : '';
   const check = draft(context, result, plan.part, way?.source ?? rule?.source, unit);
   sayWhy(check, result, way?.of ?? '', words);
   if (!way) return check;
   check.symbol = way.symbol;
   check.demand = stated(result.demand, way.demand, units);
-  check.resistance = stated(result.resistance, way.resistance, units);
-  if (way.load === 'V') check.reactionAtFailure = finite(toSystem(result.reactionAtFailure, '0,1', units));
+  check.resistance = stated(result.resistance, way.demand, units);
+  if (way.load === 'V' && way.resistance)
+    check.reactionAtFailure = finite(toSystem(result.reactionAtFailure, '0,1', units));
   return check;
 };
 
@@ -73,7 +74,7 @@ const fitCheck = (context: Context, plan: FitPlan, result: Result): Check => {
   const { units, words } = context;
   const rule = isNoRule(plan.rule) ? undefined : plan.rule;
   const part = rule?.parts[result.way];
-  const check = draft(context, result, plan.part, rule?.source, part ? unitOf('1,0', units).name : '');
+  const check = draft(context, result, plan.part, part?.source ?? rule?.source, part ? unitOf('1,0', units).name : '');
   sayWhy(check, result, part?.of ?? '', words);
   if (!part) return check;
   check.demand = stated(result.demand, part.given, units);

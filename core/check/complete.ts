@@ -1,4 +1,4 @@
-import { standards } from '../standards/index.ts';
+import { standards } from '../standards/known.ts';
 import type { Examined, ExaminedNumbers } from './examined.ts';
 import { fingerprintOf } from './fingerprint.ts';
 import { withWorkings } from './workings.ts';

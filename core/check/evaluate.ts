@@ -1,7 +1,7 @@
 import type { Facts } from '../end/facts.ts';
 import { newRun } from '../formula/number.ts';
 import { evaluateFit } from './evaluateFit.ts';
-import { evaluateStrength } from './evaluateStrength.ts';
+import { evaluateStrength, stateAtReaction } from './evaluateStrength.ts';
 import type { Plan } from './plan.ts';
 import type { Verdict } from './report.ts';
 import type { Result } from './result.ts';
@@ -14,6 +14,7 @@ export interface Evaluation {
   readonly governing: Result;
   /** Least reaction at failure of checks that hold, fail or refer; NaN where there is none. */
   readonly capacity: number;
+  /** The reaction that the numbers are for. */
   readonly reaction: number;
 }
 
@@ -50,15 +51,20 @@ const worstWithoutV = (...lists: readonly (readonly Result[])[]): Result | undef
   return found;
 };
 
-/** Evaluates every check of a plan on one end; V and T in N. */
-export const evaluate = (plan: Plan, facts: Facts, V: number): Evaluation => {
+/** Evaluates every check of a plan on one end at the reaction given, or at the least that the standard asks for. N */
+export const evaluate = (plan: Plan, facts: Facts, given: number): Evaluation => {
   facts.V = 1;
   newRun();
+  const V = Math.max(given, plan.leastReaction(facts as never));
   const strength: Result[] = [];
   for (let at = 0; at < plan.strength.length; at += 1) strength.push(evaluateStrength(plan.strength[at]!, facts, V));
   const fit: Result[] = [];
   for (let at = 0; at < plan.fit.length; at += 1) fit.push(evaluateFit(plan.fit[at]!, facts));
   facts.V = V;
+  if (plan.atReaction) {
+    newRun();
+    for (let at = 0; at < plan.strength.length; at += 1) stateAtReaction(plan.strength[at]!, facts, strength[at]!);
+  }
   const first = firstUsedUp(strength);
   return {
     strength,

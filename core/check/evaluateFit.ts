@@ -14,7 +14,7 @@ const used = (needed: number, there: number): number => {
 const CONVERSION_NOISE = 1e-9;
 
 /** One comparison: the nearer of its bounds stands as the requirement. */
-const evaluateFitPart = (part: FitPartPlan, breach: 'fails' | 'refer', facts: Facts, into: Result): void => {
+const evaluateFitPart = (part: FitPartPlan, facts: Facts, into: Result): void => {
   const given = part.given(facts as never);
   const toLeast = part.least ? used(part.least(facts as never), given) : Number.NEGATIVE_INFINITY;
   const toMost = part.most ? used(given, part.most(facts as never)) : Number.NEGATIVE_INFINITY;
@@ -27,7 +27,7 @@ const evaluateFitPart = (part: FitPartPlan, breach: 'fails' | 'refer', facts: Fa
     into.state = 'holds';
     into.reason = '';
   } else {
-    into.state = clash ? 'fails' : breach;
+    into.state = clash ? 'fails' : part.breach;
     into.reason = clash ? 'clash' : low ? 'too-little' : 'too-much';
   }
 };
@@ -43,10 +43,10 @@ export const evaluateFit = (plan: FitPlan, facts: Facts): Result => {
     const part = plan.parts[at]!;
     const off = firstMet(part.off, facts);
     if (off) {
-      if (result.way < 0) result.reason = off.reason;
+      if (result.way < 0 && result.reason === '') result.reason = off.reason;
       continue;
     }
-    evaluateFitPart(part, plan.breach, facts, trial);
+    evaluateFitPart(part, facts, trial);
     const worse = severity[trial.state] - severity[result.state];
     if (result.way < 0 || worse > 0 || (worse === 0 && trial.utilisation > result.utilisation)) {
       result.way = at;

@@ -2,6 +2,38 @@ import type { Facts } from '../end/facts.ts';
 import type { StrengthPlan, WayPlan } from './plan.ts';
 import { blank, firstMet, type Result, severity } from './result.ts';
 
+/** A way for which the standard sets no limit: its demand at V, for information; no rule where a verdict is asked for. */
+const inform = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
+  into.demand = plan.demand(facts as never) * V;
+  const told = plan.informs?.(facts as never) ?? true;
+  into.state = told ? 'information' : 'notApplicable';
+  if (!told) into.reason = 'no-rule';
+};
+
+/** Used up by any load at all. */
+const useUp = (plan: WayPlan, reason: string, into: Result): void => {
+  into.state = 'fails';
+  into.reason = reason;
+  into.utilisation = Number.POSITIVE_INFINITY;
+  if (plan.load === 'V') into.reactionAtFailure = 0;
+};
+
+const measure = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
+  if (plan.failsAt) {
+    into.utilisation = V / into.reactionAtFailure;
+    return;
+  }
+  const demand = plan.demand(facts as never);
+  if (plan.load !== 'V') {
+    into.demand = demand;
+    into.utilisation = demand / into.resistance;
+    return;
+  }
+  into.demand = demand * V;
+  into.reactionAtFailure = into.resistance / demand;
+  into.utilisation = V / into.reactionAtFailure;
+};
+
 /** One way at the reaction V: its demand grows in proportion, so it is measured at 1 N (or at the tie force itself). */
 const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
   into.reason = '';
@@ -18,24 +50,22 @@ const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void
     into.reason = limit.reason;
     return;
   }
-  into.resistance = plan.resistance(facts as never);
-  const noMoment = plan.unbounded?.(facts as never) ?? false;
-  if (noMoment || !(into.resistance > 0)) {
-    into.state = 'fails';
-    into.reason = noMoment ? 'one-bolt' : 'nothing-left';
-    into.utilisation = Number.POSITIVE_INFINITY;
-    if (plan.load === 'V') into.reactionAtFailure = 0;
+  if (!plan.resistance) {
+    inform(plan, facts, V, into);
     return;
   }
-  const demand = plan.demand(facts as never);
-  if (plan.load === 'T') {
-    into.demand = demand;
-    into.utilisation = demand / into.resistance;
-  } else {
-    into.demand = demand * V;
-    into.reactionAtFailure = into.resistance / demand;
-    into.utilisation = V / into.reactionAtFailure;
+  if (plan.unbounded?.(facts as never)) {
+    into.resistance = plan.resistance(facts as never);
+    useUp(plan, 'one-bolt', into);
+    return;
   }
+  if (plan.failsAt) into.reactionAtFailure = plan.failsAt(facts as never);
+  else into.resistance = plan.resistance(facts as never);
+  if (!(into.resistance > 0 || into.reactionAtFailure > 0)) {
+    useUp(plan, 'nothing-left', into);
+    return;
+  }
+  measure(plan, facts, V, into);
   const holds = into.utilisation <= 1;
   if (plan.informs?.(facts as never)) into.state = 'information';
   else if (limit && (limit.always || holds)) {
@@ -56,7 +86,7 @@ export const evaluateStrength = (plan: StrengthPlan, facts: Facts, V: number): R
   const { ways } = plan;
   if (ways.length === 1) {
     evaluateWay(ways[0]!, facts, V, result);
-    if (result.state !== 'notApplicable') result.way = 0;
+    if (hasNumbers(result)) result.way = 0;
     return result;
   }
   for (let at = 0; at < ways.length; at += 1) {
@@ -66,30 +96,41 @@ export const evaluateStrength = (plan: StrengthPlan, facts: Facts, V: number): R
   return result;
 };
 
-/** True where `found` is used up before what `result` holds. */
+/** States demand and resistance at V (now in the facts) where they do not change in proportion. */
+export const stateAtReaction = (plan: StrengthPlan, facts: Facts, result: Result): void => {
+  const way = plan.ways[result.way];
+  if (!way?.failsAt || Number.isNaN(result.utilisation)) return;
+  result.demand = way.demand(facts as never);
+  result.resistance = way.resistance!(facts as never);
+};
+
+/** False for a way that does not apply to the end and says nothing of it. */
+const hasNumbers = ({ state, demand }: Result): boolean => state !== 'notApplicable' || !Number.isNaN(demand);
+
+/** True where `found` is used up before what `result` holds; of two for information, the one with the larger demand. */
 const sooner = (found: Result, result: Result): boolean => {
-  if (Number.isNaN(found.resistance)) return false;
-  if (Number.isNaN(result.resistance)) return true;
-  return Number.isNaN(found.reactionAtFailure)
-    ? found.utilisation > result.utilisation
-    : found.reactionAtFailure < result.reactionAtFailure;
+  if (Number.isNaN(found.utilisation)) return Number.isNaN(result.utilisation) && found.demand > result.demand;
+  if (Number.isNaN(result.utilisation)) return true;
+  const mixed = Number.isNaN(found.reactionAtFailure) || Number.isNaN(result.reactionAtFailure);
+  return mixed ? found.utilisation > result.utilisation : found.reactionAtFailure < result.reactionAtFailure;
 };
 
 const take = (result: Result, found: Result, at: number): void => {
   const none = result.way < 0;
-  if (found.state === 'notApplicable') {
+  if (!hasNumbers(found)) {
     if (none) result.reason = found.reason;
     return;
   }
-  if (none || severity[found.state] > severity[result.state]) {
+  const first = none || sooner(found, result);
+  const worse = severity[found.state] - severity[result.state];
+  if (none || worse > 0 || (worse === 0 && first)) {
     result.state = found.state;
     result.reason = found.reason;
   }
-  if (none || sooner(found, result)) {
-    result.way = at;
-    result.demand = found.demand;
-    result.resistance = found.resistance;
-    result.reactionAtFailure = found.reactionAtFailure;
-    result.utilisation = found.utilisation;
-  }
+  if (!first) return;
+  result.way = at;
+  result.demand = found.demand;
+  result.resistance = found.resistance;
+  result.reactionAtFailure = found.reactionAtFailure;
+  result.utilisation = found.utilisation;
 };

@@ -3,7 +3,7 @@ import { type Fault, fault } from '../end/fault.ts';
 import { readEnd } from '../end/readEnd.ts';
 import { type End, plyOf } from '../end/schema.ts';
 import { testOf } from '../formula/number.ts';
-import { standards } from '../standards/index.ts';
+import { standards } from '../standards/known.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findGrade } from '../steel/grades.ts';
 import { nearest } from '../steel/nearest.ts';
@@ -12,7 +12,9 @@ import { fromSystem, toSystem, unitOf } from '../units/systems.ts';
 import { capital } from '../words/capital.ts';
 import { commonwealth } from '../words/commonwealth.ts';
 import { faultSentences } from '../words/faults.ts';
+import type { Region } from '../words/regions.ts';
 import { faultText, fieldName, filled, type Words } from '../words/words.ts';
+import { wordsFor } from '../words/wordsFor.ts';
 import { assumptionsOf } from './assumptions.ts';
 import { checksOf } from './checks.ts';
 import { type Evaluation, evaluate } from './evaluate.ts';
@@ -23,8 +25,9 @@ import { type Resolved, resolve } from './resolve.ts';
 import { sectionStresses } from './sectionStresses.ts';
 import { VERSION } from './version.ts';
 
-/** Words in which a standard's market speaks. */
-export const wordsOf = (_standard: Standard): Words => commonwealth;
+/** Whose words an end is spoken of in: those it asks for, else those of the standard's market. */
+export const regionOf = ({ sheet }: Pick<End, 'sheet'>, { region }: Pick<Standard, 'region'>): Region =>
+  sheet?.words ?? region;
 
 export const said = (faults: readonly Fault[], words: Words = commonwealth): { faults: SaidFault[] } => ({
   faults: faults.map((one) => ({ ...one, text: faultText(words, faultSentences, one) })),
@@ -40,14 +43,22 @@ const reactionOf = ({ reaction, units }: End, plan: Plan, facts: Facts): number 
     ? fromSystem(reaction, '0,1', units)
     : reaction.ofWebShear * grossShearOf(evaluate(plan, facts, 0));
 
-const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Words): Note[] => {
+const notesOf = (
+  end: End,
+  plan: Plan,
+  resolved: Resolved,
+  V: { readonly given: number; readonly used: number },
+  words: Words,
+): Note[] => {
   const notes: Note[] = [];
   const say = (code: string, values: Record<string, unknown> = {}, path?: string) =>
     notes.push({ code, text: filled(words.notes[code] ?? code, values), ...(path && { path }) });
+  const force = (newtons: number) =>
+    `${plain(toSystem(newtons, '0,1', end.units), 1)} ${unitOf('0,1', end.units).name}`;
   if (typeof end.reaction !== 'number') {
-    const value = `${plain(toSystem(V, '0,1', end.units), 1)} ${unitOf('0,1', end.units).name}`;
-    say('reaction-from-share', { share: plain(end.reaction.ofWebShear, 4), value }, 'reaction');
+    say('reaction-from-share', { share: plain(end.reaction.ofWebShear, 4), value: force(V.given) }, 'reaction');
   }
+  if (V.used > V.given) say('least-reaction', { given: force(V.given), value: force(V.used) }, 'reaction');
   if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
   if (end.support) say('support-outline', {}, 'support');
   const plyPath = end.joint.kind === 'fin-plate' ? 'joint.plate.grade' : 'joint.ply.grade';
@@ -67,27 +78,31 @@ const notesOf = (end: End, plan: Plan, resolved: Resolved, V: number, words: Wor
   return notes;
 };
 
-const reportOf = (end: End, plan: Plan, resolved: Resolved): Numbers => {
+/** What a standard's rules say of an end whose names are looked up. `given`: the reaction, N; absent, the end's own. */
+export const numbersOf = (end: End, plan: Plan, resolved: Resolved, given?: number): Numbers => {
   const { standard } = plan;
   const { facts } = resolved;
-  const words = wordsOf(standard);
-  const V = reactionOf(end, plan, facts);
+  const region = regionOf(end, standard);
+  const words = wordsFor(region);
+  const V = given ?? reactionOf(end, plan, facts);
   const evaluation = evaluate(plan, facts, V);
+  const { reaction } = evaluation;
   const kN = (newtons: number) => toSystem(newtons, '0,1', end.units);
   return {
     mark: end.mark ?? '',
     standard: { id: standard.id, title: standard.title, edition: standard.edition },
     level: standard.level,
     units: end.units,
+    words: region,
     verdict: evaluation.verdict,
     governing: evaluation.governing.id,
-    reaction: kN(V),
+    reaction: kN(reaction),
     capacity: Number.isFinite(evaluation.capacity) ? kN(evaluation.capacity) : null,
-    shareOfWebShear: V / grossShearOf(evaluation),
+    shareOfWebShear: reaction / grossShearOf(evaluation),
     checks: checksOf({ plan, units: end.units, words }, evaluation),
     shape: { sections: sectionStresses(facts, end.units) },
     assumptions: assumptionsOf(end, standard, facts.channel, words),
-    notes: notesOf(end, plan, resolved, V, words),
+    notes: notesOf(end, plan, resolved, { given: V, used: reaction }, words),
     options: facts.options,
     version: VERSION,
   };
@@ -110,9 +125,9 @@ export const examineNumbers = (
     ]);
   }
   const found = resolve(end, standard);
-  if ('faults' in found) return said(found.faults, wordsOf(standard));
+  if ('faults' in found) return said(found.faults, wordsFor(regionOf(end, standard)));
   const { resolved } = found;
-  const report = reportOf(end, planOf(standard, end.joint.kind), resolved);
+  const report = numbersOf(end, planOf(standard, end.joint.kind), resolved);
   if (!Number.isFinite(report.reaction) || !Number.isFinite(report.shareOfWebShear)) {
     return said([fault('not-finite', 'reaction', null, null)]);
   }

@@ -27,8 +27,9 @@ interface LimitPlan extends GatePlan {
 
 export interface WayPlan {
   readonly demand: NumberReader;
-  readonly resistance: NumberReader;
-  readonly load: 'V' | 'T';
+  readonly resistance?: NumberReader;
+  readonly load: 'V' | 'T' | 'none';
+  readonly failsAt?: NumberReader;
   readonly off: readonly GatePlan[];
   readonly limits: readonly LimitPlan[];
   readonly unbounded?: Test;
@@ -49,6 +50,7 @@ export interface FitPartPlan {
   readonly least?: NumberReader;
   readonly most?: NumberReader;
   readonly off: readonly GatePlan[];
+  readonly breach: 'fails' | 'refer';
   readonly clash?: Test;
 }
 
@@ -57,7 +59,6 @@ export interface FitPlan {
   readonly part: PartName;
   readonly rule: FitRule | NoRule;
   readonly noRule: string;
-  readonly breach: 'fails' | 'refer';
   readonly parts: readonly FitPartPlan[];
 }
 
@@ -66,6 +67,10 @@ export interface Plan {
   readonly standard: Standard;
   readonly strength: readonly StrengthPlan[];
   readonly fit: readonly FitPlan[];
+  /** Least reaction to check for, N; 0 where the standard asks for none. */
+  readonly leastReaction: NumberReader;
+  /** True where some way's demand or resistance has to be stated at V itself. */
+  readonly atReaction: boolean;
 }
 
 const gatePlan = ({ when, reason }: Gate): GatePlan => ({ test: testOf(when), reason });
@@ -77,19 +82,21 @@ const limitPlan = (limit: Limit): LimitPlan => ({
 
 const wayPlan = (way: Way): WayPlan => ({
   demand: numberOf(way.demand),
-  resistance: numberOf(way.resistance),
   load: way.load,
   off: (way.off ?? []).map(gatePlan),
   limits: (way.limits ?? []).map(limitPlan),
+  ...(way.resistance && { resistance: numberOf(way.resistance) }),
+  ...(way.failsAt && { failsAt: numberOf(way.failsAt) }),
   ...(way.unbounded && { unbounded: testOf(way.unbounded) }),
   ...(way.informs && { informs: testOf(way.informs) }),
 });
 
-const fitPartPlan = (part: FitPart): FitPartPlan => ({
+const fitPartPlan = (part: FitPart, breach: 'fails' | 'refer'): FitPartPlan => ({
   given: numberOf(part.given),
   ...(part.least && { least: numberOf(part.least) }),
   ...(part.most && { most: numberOf(part.most) }),
   off: (part.off ?? []).map(gatePlan),
+  breach: part.breach ?? breach,
   ...(part.clash && { clash: testOf(part.clash) }),
 });
 
@@ -104,12 +111,13 @@ export const planOf = (standard: Standard, kind: Joint['kind']): Plan => {
   const known = made.get(key);
   if (known) return known;
   const list = joints[kind];
+  const strength = list.strength.map(([id, part]) => {
+    const rule = standard.strength[id];
+    return { id, part, rule, noRule: reasonOf(rule), ways: isNoRule(rule) ? [] : rule.ways.map(wayPlan) };
+  });
   const plan: Plan = {
     standard,
-    strength: list.strength.map(([id, part]) => {
-      const rule = standard.strength[id];
-      return { id, part, rule, noRule: reasonOf(rule), ways: isNoRule(rule) ? [] : rule.ways.map(wayPlan) };
-    }),
+    strength,
     fit: list.fit.map(([id, part]) => {
       const rule = standard.fit[id];
       return {
@@ -117,10 +125,11 @@ export const planOf = (standard: Standard, kind: Joint['kind']): Plan => {
         part,
         rule,
         noRule: reasonOf(rule),
-        breach: isNoRule(rule) ? 'refer' : rule.breach,
-        parts: isNoRule(rule) ? [] : rule.parts.map(fitPartPlan),
+        parts: isNoRule(rule) ? [] : rule.parts.map((part) => fitPartPlan(part, rule.breach)),
       };
     }),
+    atReaction: strength.some(({ ways }) => ways.some(({ failsAt }) => failsAt)),
+    leastReaction: standard.leastReaction ? numberOf(standard.leastReaction) : () => 0,
   };
   made.set(key, plan);
   return plan;

@@ -3,6 +3,7 @@ import type { Fault } from '../end/fault.ts';
 import type { Basis } from '../formula/tree.ts';
 import type { WorkingRow } from '../formula/working.ts';
 import type { UnitSystem } from '../units/systems.ts';
+import type { Region } from '../words/regions.ts';
 
 /** `refer`: outside the limits of the method or of practice; never a pass. `information`: numbers without a verdict. */
 export type State = 'holds' | 'fails' | 'refer' | 'notApplicable' | 'information';
@@ -75,6 +76,8 @@ export interface Report {
   readonly standard: { readonly id: string; readonly title: string; readonly edition: string };
   readonly level: 'factored' | 'service';
   readonly units: UnitSystem;
+  /** Whose trade words titles, reasons and notes are in. */
+  readonly words: Region;
   readonly verdict: Verdict;
   /** The check that comes first; see methods of the standard. */
   readonly governing: CheckName;

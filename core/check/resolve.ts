@@ -1,9 +1,18 @@
-import type { Facts, SupportFacts } from '../end/facts.ts';
-import { factsOf, lengthSize, noSupport, type Strengths } from '../end/factsOf.ts';
+import type { Facts } from '../end/facts.ts';
+import {
+  type BoltFacts,
+  factsOf,
+  lengthSize,
+  noSupport,
+  noSupportGiven,
+  type Strengths,
+  type SupportGiven,
+} from '../end/factsOf.ts';
 import { type Fault, fault } from '../end/fault.ts';
 import { copeFaults, holeFaults, patternFaults, sectionFaults } from '../end/geometryFaults.ts';
 import { type End, type GradeGiven, plyOf } from '../end/schema.ts';
 import type { Section } from '../shape/section.ts';
+import { type BoltSteel, namedIn, type Steel, type Steels } from '../standards/materials.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findBoltSize } from '../steel/bolts.ts';
 import { findSection } from '../steel/findSection.ts';
@@ -19,6 +28,29 @@ export interface Resolved {
   readonly readAs: { readonly label: string; readonly list: string } | null;
   readonly facts: Facts;
 }
+
+/** Strengths that another standard found for the same end, MPa. */
+export interface Carried {
+  readonly web: Steel;
+  readonly fyf: number;
+  readonly plate: Steel;
+  readonly support: Steel;
+  readonly fub: number;
+}
+
+const noSteel: Steel = { fy: 0, fu: 0 };
+const noBoltSteel: BoltSteel = { fub: 0, listed: false };
+const noBolt: BoltFacts = {
+  d: 0,
+  d0: 0,
+  dStandard: 0,
+  dn: 0,
+  fub: 0,
+  fnv: 0,
+  boltListed: false,
+  inch: false,
+  As: 0,
+};
 
 /** Looks up names and collects what is wrong with them. */
 class Resolver {
@@ -54,34 +86,42 @@ class Resolver {
     return wrong.length > 0 ? undefined : { section: own, designation: '', readAs: null };
   }
 
-  strength(grade: GradeGiven, thickness: number, path: string): { fy: number; fu: number } {
+  /** Strength of a part, MPa: as given, or of a grade at a thickness in mm. */
+  strength(grade: GradeGiven, steels: Steels, thickness: number, path: string): Steel {
     if (typeof grade !== 'string') {
       const { units } = this.end;
       if (grade.fy > grade.fu)
         this.faults.push(fault('strength-impossible', `${path}.fy`, grade.fy, { most: grade.fu }));
       return { fy: fromSystem(grade.fy, '-2,1', units), fu: fromSystem(grade.fu, '-2,1', units) };
     }
-    const { grades, strengthAt } = this.standard.materials;
-    const name = grades.find((one) => one.toUpperCase() === grade.trim().toUpperCase().replace(/\s+/g, ''));
+    const name = steels.named(grade);
     if (!name) {
-      this.faults.push(fault('unknown-grade', path, grade, nearest(grade, grades, 3)));
-      return { fy: 0, fu: 0 };
+      this.faults.push(fault('unknown-grade', path, grade, nearest(grade, steels.grades, 3)));
+      return noSteel;
     }
-    const found = strengthAt(name, thickness);
+    const found = steels.strengthAt(name, thickness);
     if (!found) {
       const given = Number((thickness / lengthSize(this.end)).toPrecision(8));
       this.faults.push(fault('grade-outside-range', path, given, name));
     }
-    return found ?? { fy: 0, fu: 0 };
+    return found ?? noSteel;
   }
 
-  bolt(): { d: number; d0: number; dStandard: number; dn: number; fub: number } {
+  /** Yield strength of the flange; the web's where the grade's range ends before the flange. */
+  flangeYield({ tf }: Section, web: Steel): number {
+    const { grade } = this.end.beam;
+    const { sections } = this.standard.materials;
+    const name = typeof grade === 'string' ? sections.named(grade) : undefined;
+    return name === undefined ? web.fy : (sections.strengthAt(name, tf)?.fy ?? web.fy);
+  }
+
+  bolt(own?: number): BoltFacts {
     const { bolts } = this.end.joint;
     const { materials } = this.standard;
     const found = findBoltSize(bolts.size);
     if ('nearest' in found) {
       this.faults.push(fault('unknown-bolt-size', 'joint.bolts.size', bolts.size, found.nearest));
-      return { d: 0, d0: 0, dStandard: 0, dn: 0, fub: 0 };
+      return noBolt;
     }
     const d = found.diameter;
     const dStandard = materials.holeFor(d);
@@ -90,30 +130,33 @@ class Resolver {
       const limit = { least: Number((d / lengthSize(this.end)).toPrecision(8)) };
       this.faults.push(fault('hole-smaller-than-bolt', 'joint.bolts.hole', bolts.hole, limit));
     }
-    const dn = materials.netHole(d0, bolts.holes ?? materials.holesAssumed);
-    return { d, d0, dStandard, dn, fub: this.boltStrength(d) };
+    const dn = materials.netHole(d0, bolts.holes ?? materials.holesAssumed, d);
+    const { fub, shear, listed } = this.boltSteel(own, d);
+    const fnv = shear ? (bolts.threads === 'out' ? shear.out : shear.in) : 0;
+    return { d, d0, dStandard, dn, fub, fnv, boltListed: listed, inch: found.thread === 'inch', As: found.tensileArea };
   }
 
-  private boltStrength(d: number): number {
+  private boltSteel(own: number | undefined, d: number): BoltSteel {
     const { grade } = this.end.joint.bolts;
-    if (typeof grade !== 'string') return fromSystem(grade.fu, '-2,1', this.end.units);
-    const { boltGrades, boltStrength } = this.standard.materials;
+    const { boltGrades, bolt } = this.standard.materials;
+    const strength = own ?? (typeof grade === 'string' ? undefined : fromSystem(grade.fu, '-2,1', this.end.units));
+    if (strength !== undefined) return bolt(strength, d) ?? noBoltSteel;
     const path = 'joint.bolts.grade';
-    const name = boltGrades.find((one) => one === grade.trim());
+    const name = namedIn(boltGrades)(grade as string);
     if (name === undefined) {
       this.faults.push(fault('unknown-bolt-grade', path, grade, boltGrades));
-      return 0;
+      return noBoltSteel;
     }
-    const found = boltStrength(name, d);
+    const found = bolt(name, d);
     if (found === undefined) this.faults.push(fault('bolt-grade-not-for-size', path, grade, this.end.joint.bolts.size));
-    return found ?? 0;
+    return found ?? noBoltSteel;
   }
 
-  options(): Record<string, string> {
+  options(given: End['options']): Record<string, string> {
     const known = this.standard.options;
     const inForce: Record<string, string> = {};
     for (const key of Object.keys(known)) inForce[key] = known[key]![0];
-    for (const [key, value] of Object.entries(this.end.options ?? {})) {
+    for (const [key, value] of Object.entries(given ?? {})) {
       const values = Object.hasOwn(known, key) ? known[key] : undefined;
       if (!values) this.faults.push(fault('unknown-option', `options.${key}`, key, Object.keys(known)));
       else if (!values.includes(value)) {
@@ -123,23 +166,31 @@ class Resolver {
     return inForce;
   }
 
-  /** Outline of a supporting beam, and the thickness of what the joint is fixed to. */
-  support(): { outline: SupportFacts; thickness: number } {
+  /** Outline of a supporting beam; thickness and strength of what the joint is fixed to. */
+  support(carried?: Carried): SupportGiven {
     const { support } = this.end;
+    if (!support) return noSupportGiven;
     const k = lengthSize(this.end);
-    const thickness = (support?.thickness ?? 0) * k;
-    if (typeof support?.grade === 'string') this.strength(support.grade, thickness || 1, 'support.grade');
-    if (support?.section === undefined) return { outline: noSupport, thickness };
-    const found = findSection(support.section);
-    if ('nearest' in found) {
+    const thickness = (support.thickness ?? 0) * k;
+    const found = support.section === undefined ? undefined : findSection(support.section);
+    if (found && 'nearest' in found) {
       this.faults.push(fault('unknown-section', 'support.section', support.section, found.nearest));
-      return { outline: noSupport, thickness };
+      return noSupportGiven;
     }
-    const { h, b, tw, tf, r } = found.section;
-    const fixedTo = thickness || (support.kind === 'column-flange' ? tf : tw);
-    if (support.kind !== 'beam-web') return { outline: noSupport, thickness: fixedTo };
+    const section = found?.section;
+    const fixedTo = thickness || (section ? (support.kind === 'column-flange' ? section.tf : section.tw) : 0);
+    const steel = carried?.support ?? this.supportSteel(fixedTo);
+    const given = { kind: support.kind, thickness: fixedTo, steel };
+    if (!section || support.kind !== 'beam-web') return { ...given, outline: noSupport };
+    const { h, b, tw, tf, r } = section;
     const topOfSteel = (support.topOfSteel ?? 0) * k;
-    return { outline: { here: true, h, b, tw, tf, r, topOfSteel }, thickness: fixedTo };
+    return { ...given, outline: { here: true, h, b, tw, tf, r, topOfSteel } };
+  }
+
+  private supportSteel(thickness: number): Steel {
+    const grade = this.end.support?.grade;
+    if (grade === undefined) return noSteel;
+    return this.strength(grade, this.standard.materials.sections, thickness || 1, 'support.grade');
   }
 
   level(): void {
@@ -150,35 +201,42 @@ class Resolver {
   }
 }
 
-/** Looks up everything that an end names, and turns it into facts; or says what stands in the way. */
+/**
+ * Looks up everything that an end names, and turns it into facts; or says what stands in the way. With strengths carried over from another
+ * standard these are taken in place of the grades, and the end's options and level, which are the other's, are left aside.
+ */
 export const resolve = (
   end: End,
   standard: Standard,
+  carried?: Carried,
 ): { readonly resolved: Resolved } | { readonly faults: Fault[] } => {
   const resolver = new Resolver(end, standard);
   const { joint, units } = end;
-  const k = lengthSize(end);
-  resolver.level();
-  const beam = resolver.section();
+  const { sections, plates, webStrengthAt, electrode } = standard.materials;
   const ply = plyOf(joint);
-  const plyName = joint.kind === 'fin-plate' ? 'plate' : 'ply';
-  const web = beam ? resolver.strength(end.beam.grade, beam.section.tw, 'beam.grade') : { fy: 0, fu: 0 };
-  const plate = resolver.strength(ply.grade, ply.thickness * k, `joint.${plyName}.grade`);
-  const bolt = resolver.bolt();
-  const options = resolver.options();
-  const support = resolver.support();
+  const plyPath = `joint.${joint.kind === 'fin-plate' ? 'plate' : 'ply'}.grade`;
+  if (!carried) resolver.level();
+  const beam = resolver.section();
+  const web =
+    carried?.web ??
+    (beam ? resolver.strength(end.beam.grade, sections, webStrengthAt(beam.section), 'beam.grade') : noSteel);
+  const plate = carried?.plate ?? resolver.strength(ply.grade, plates, ply.thickness * lengthSize(end), plyPath);
+  const bolt = resolver.bolt(carried?.fub);
+  const options = resolver.options(carried ? {} : end.options);
+  const support = resolver.support(carried);
   const { faults } = resolver;
   if (bolt.d0 > 0) faults.push(...patternFaults(end, bolt.d0));
   if (beam) faults.push(...copeFaults(end, beam.section));
   if (!beam || faults.length > 0) return { faults };
-  const electrode = joint.kind === 'fin-plate' ? joint.weld.electrode : undefined;
+  const metal = joint.kind === 'fin-plate' ? joint.weld.electrode : undefined;
   const strengths: Strengths = {
     fy: web.fy,
     fu: web.fu,
+    fyf: carried?.fyf ?? resolver.flangeYield(beam.section, web),
     fyp: plate.fy,
     fup: plate.fu,
     ...bolt,
-    Xu: electrode === undefined ? standard.materials.electrode : fromSystem(electrode, '-2,1', units),
+    Xu: metal === undefined ? electrode : fromSystem(metal, '-2,1', units),
   };
   const facts = factsOf(end, beam.section, strengths, support, options);
   const holes = holeFaults(end, facts);

@@ -1,8 +1,8 @@
 import type { CheckName } from '../end/checkNames.ts';
 import type { Tree } from '../formula/tree.ts';
 import { type WorkingRow, workingsOf } from '../formula/working.ts';
-import { standards } from '../standards/index.ts';
-import { isNoRule } from '../standards/standard.ts';
+import { standards } from '../standards/known.ts';
+import { isNoRule, treesOf as treesOfWay } from '../standards/standard.ts';
 import { evaluate } from './evaluate.ts';
 import type { ExaminedNumbers } from './examined.ts';
 import { type FitPlan, type Plan, planOf, type StrengthPlan } from './plan.ts';
@@ -12,8 +12,8 @@ import type { Result } from './result.ts';
 const ofStrength = ({ rule }: StrengthPlan, { way, demand, resistance }: Result): readonly Tree[] | undefined => {
   const found = isNoRule(rule) ? undefined : rule.ways[way];
   if (!found) return undefined;
-  if (Number.isNaN(resistance)) return [];
-  return Number.isNaN(demand) ? [found.resistance] : [found.demand, found.resistance];
+  if (Number.isNaN(resistance) && found.resistance) return [];
+  return treesOfWay(found).filter((one) => one !== found.demand || !Number.isNaN(demand));
 };
 
 /** The same for a rule of fit: what is given and its bounds. */

@@ -8,6 +8,7 @@ import { copeBuckling, plateBuckling } from './paths/buckling.ts';
 import type { PathMaker } from './paths/pathMaker.ts';
 import { copeShear, plateGrossShear, plateNetShear, webGrossShear, webNetShear } from './paths/shear.ts';
 import { stressCope, stressFull } from './paths/stress.ts';
+import { supportShear } from './paths/support.ts';
 import { plateTearout, webTearout } from './paths/tearOut.ts';
 import { webTie } from './paths/tie.ts';
 import { weld } from './paths/weld.ts';
@@ -34,6 +35,7 @@ const makers: Readonly<Record<StrengthName, PathMaker>> = {
   'plate-bending': plateBending,
   'plate-buckling': plateBuckling,
   weld,
+  'support-shear': supportShear,
 };
 
 const known = (id: CheckName): id is StrengthName => Object.hasOwn(makers, id);

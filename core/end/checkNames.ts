@@ -20,6 +20,7 @@ export const strengthNames = [
   'plate-bending',
   'plate-buckling',
   'weld',
+  'support-shear',
 ] as const;
 
 /** Rules of geometry that carry no force. */
@@ -43,4 +44,5 @@ export type StrengthName = (typeof strengthNames)[number];
 export type FitName = (typeof fitNames)[number];
 export type CheckName = StrengthName | FitName;
 /** What a check speaks of. */
-export type PartName = 'web' | 'bolts' | 'plate' | 'weld' | 'end';
+export const partNames = ['web', 'bolts', 'plate', 'weld', 'support', 'end'] as const;
+export type PartName = (typeof partNames)[number];

@@ -51,12 +51,17 @@ export interface Facts {
   readonly tw: number;
   readonly r: number;
   readonly channel: boolean;
-  /** Strengths of the web and of the plate (or ply), of bolt and electrode. */
+  /** Strengths of the web, of the flange (yield), of the plate (or ply), of bolt and electrode (0 where it plays no part). */
   readonly fy: number;
   readonly fu: number;
+  readonly fyf: number;
   readonly fyp: number;
   readonly fup: number;
   readonly fub: number;
+  /** Nominal shear strength that the standard lists for the bolt, threads as they lie; 0 where it lists none. */
+  readonly fnv: number;
+  /** False for a bolt that the standard does not list. */
+  readonly boltListed: boolean;
   readonly Xu: number;
   /** Setback. */
   readonly g: number;
@@ -75,12 +80,18 @@ export interface Facts {
   readonly y1: number;
   readonly yn: number;
   readonly eEnd: number;
+  /** Web between an outer row's first hole and the beam's end or, where a short cope cuts into that row, the cope's face. */
+  readonly eRow: number;
   readonly at: number;
   readonly ab: number;
   /** Columns inside the top cope, and inside the bottom cope. */
   readonly mTop: number;
   readonly mBottom: number;
   readonly d: number;
+  /** True for a bolt of an inch series. */
+  readonly inch: boolean;
+  /** Tensile stress area; 0 where it is not listed. */
+  readonly As: number;
   readonly d0: number;
   /** Nominal hole that the standard gives this bolt. */
   readonly dStandard: number;
@@ -106,8 +117,12 @@ export interface Facts {
   readonly holeAtCopeFace: boolean;
   readonly flangeLeft: boolean;
   readonly support: SupportFacts;
+  readonly supportKind: 'none' | 'beam-web' | 'column-flange' | 'column-web';
   /** Thickness of the part of the support that the joint is fixed to; 0 where it is not told. */
   readonly ts: number;
+  /** Strengths of the support; 0 where its grade is not told. */
+  readonly fys: number;
+  readonly fus: number;
   /** Options in force, every key of the standard present. */
   readonly options: Readonly<Record<string, string>>;
 }

@@ -6,22 +6,36 @@ import { cutsOf } from './cuts.ts';
 import type { Facts, SupportFacts } from './facts.ts';
 import { type End, plyOf } from './schema.ts';
 
+/** What is known of a bolt and its hole, as in the facts. */
+export type BoltFacts = Pick<Facts, 'd' | 'd0' | 'dStandard' | 'dn' | 'fub' | 'fnv' | 'boltListed' | 'inch' | 'As'>;
+
+/** What is known of the support: its outline, and what the joint is fixed to. MPa, mm; 0 where it is not told. */
+export interface SupportGiven {
+  readonly kind: Facts['supportKind'];
+  readonly outline: SupportFacts;
+  readonly thickness: number;
+  readonly steel: { readonly fy: number; readonly fu: number };
+}
+
 /** What a standard says of the materials, bolts and holes of one end. MPa, mm. */
-export interface Strengths {
+export interface Strengths extends BoltFacts {
   readonly fy: number;
   readonly fu: number;
+  readonly fyf: number;
   readonly fyp: number;
   readonly fup: number;
-  readonly fub: number;
   readonly Xu: number;
-  readonly d: number;
-  readonly d0: number;
-  readonly dStandard: number;
-  readonly dn: number;
 }
 
 /** No supporting beam's section is known. */
 export const noSupport: SupportFacts = { here: false, b: 0, tw: 0, tf: 0, r: 0, h: 0, topOfSteel: 0 };
+
+export const noSupportGiven: SupportGiven = {
+  kind: 'none',
+  outline: noSupport,
+  thickness: 0,
+  steel: { fy: 0, fu: 0 },
+};
 
 /** mm in one length unit of a file. */
 export const lengthSize = (end: Pick<End, 'units'>): number => (end.units === 'mm-kN' ? 1 : INCH);
@@ -65,7 +79,7 @@ export const factsOf = (
   end: End,
   section: Section,
   strengths: Strengths,
-  support: { readonly outline: SupportFacts; readonly thickness: number },
+  support: SupportGiven,
   options: Readonly<Record<string, string>>,
 ): Facts => {
   const k = lengthSize(end);
@@ -102,9 +116,12 @@ export const factsOf = (
     channel: section.family === 'channel',
     fy: strengths.fy,
     fu: strengths.fu,
+    fyf: strengths.fyf,
     fyp: strengths.fyp,
     fup: strengths.fup,
     fub: strengths.fub,
+    fnv: strengths.fnv,
+    boltListed: strengths.boltListed,
     Xu: strengths.Xu,
     g,
     ct,
@@ -121,11 +138,14 @@ export const factsOf = (
     y1,
     yn,
     eEnd,
+    eRow: eEnd - Math.max(y1 - d0 / 2 < dt ? ct : 0, yn + d0 / 2 > h - db ? cb : 0),
     at: y1 - dt,
     ab: h - db - yn,
     mTop: dt > 0 ? columnsInside(ct, eEnd, q, m, d0) : 0,
     mBottom: db > 0 ? columnsInside(cb, eEnd, q, m, d0) : 0,
     d: strengths.d,
+    inch: strengths.inch,
+    As: strengths.As,
     d0,
     dStandard: strengths.dStandard,
     dn: strengths.dn,
@@ -148,7 +168,10 @@ export const factsOf = (
     holeAtCopeFace: (dt > 0 && holeAtFace(ct, eEnd, q, m, d0)) || (db > 0 && holeAtFace(cb, eEnd, q, m, d0)),
     flangeLeft: (dt > 0 && dt < tf) || (db > 0 && db < tf),
     support: support.outline,
+    supportKind: support.kind,
     ts: support.thickness,
+    fys: support.steel.fy,
+    fus: support.steel.fu,
     options,
   };
 };

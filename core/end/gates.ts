@@ -22,6 +22,15 @@ export const noColumnInCope = flag('an intact flange lies above every column', (
 export const isChannel = flag('a channel', (f) => f.channel);
 const noTie = flag('no tie force', (f) => f.T === 0);
 
+/** No such section at this end. */
+export const noRectangle: Gate = { when: flag('', (f) => !f.rectangle.here), reason: 'no-cope' };
+export const noTee: Gate = { when: flag('', (f) => !f.tee.here), reason: 'no-cope' };
+/** A tee with its bottom cut: the cut edge is in tension. */
+export const cutEdgeInTension: Gate = {
+  when: flag('', (f) => f.tee.here && !f.tee.topCut),
+  reason: 'cut-edge-in-tension',
+};
+
 /** Off where the end is not coped. */
 export const uncoped: Gate = { when: not(coped), reason: 'no-cope' };
 export const intactFlange: Gate = { when: noColumnInCope, reason: 'intact-flange' };
@@ -38,5 +47,11 @@ export const wideHole: Limit = {
   when: flag('a hole wider than the standard one', (f) => f.d0 > f.dStandard + 1e-9),
   reason: 'hole-above-standard',
   always: false,
+};
+/** A bolt, or a bolt size, that the standard does not list. */
+export const boltNotListed: Limit = {
+  when: flag('a bolt that the standard does not list', (f) => !f.boltListed),
+  reason: 'bolt-not-listed',
+  always: true,
 };
 export const channelCope: Limit = { when: isChannel, reason: 'channel-cope', always: true, noNumber: true };

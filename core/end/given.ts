@@ -1,7 +1,8 @@
 import { flagOf, foundOf, givenOf } from '../formula/tree.ts';
 import type { CutFacts, Facts } from './facts.ts';
 
-const given = givenOf<Facts>();
+/** A quantity read from the facts of the end. */
+export const given = givenOf<Facts>();
 /** A yes-or-no fact of the end. */
 export const flag = flagOf<Facts>();
 /** A quantity that a solver finds from facts of the end. */
@@ -18,12 +19,15 @@ export const tf = given('t_f', '1,0', (f) => f.tf);
 export const tw = given('t_w', '1,0', (f) => f.tw);
 export const r = given('r', '1,0', (f) => f.r);
 
-/** Strengths of web, plate or ply, bolts and weld metal, MPa. */
+/** Strengths of web, flange, plate or ply, support, bolts and weld metal, MPa. */
 export const fy = given('f_y', '-2,1', (f) => f.fy);
 export const fu = given('f_u', '-2,1', (f) => f.fu);
+export const fyf = given('f_yf', '-2,1', (f) => f.fyf);
 export const fyp = given('f_yp', '-2,1', (f) => f.fyp);
 export const fup = given('f_up', '-2,1', (f) => f.fup);
 export const fub = given('f_ub', '-2,1', (f) => f.fub);
+export const fys = given('f_ys', '-2,1', (f) => f.fys);
+export const fus = given('f_us', '-2,1', (f) => f.fus);
 export const Xu = given('X_u', '-2,1', (f) => f.Xu);
 
 /** Setback, copes, what remains at the end, mm. */
@@ -45,9 +49,13 @@ export const p = given('p', '1,0', (f) => f.p);
 export const q = given('q', '1,0', (f) => f.q);
 export const y1 = given('y_1', '1,0', (f) => f.y1);
 export const eEnd = given('e_end', '1,0', (f) => f.eEnd);
+/** From an outer row's first hole to the beam's end or to the face of a short cope that cuts into the row. */
+export const eRow = given('e_row', '1,0', (f) => f.eRow);
 export const at = given('a_t', '1,0', (f) => f.at);
 export const ab = given('a_b', '1,0', (f) => f.ab);
 export const d = given('d', '1,0', (f) => f.d);
+/** Tensile stress area of a bolt, mm2. */
+export const As = given('A_s', '2,0', (f) => f.As);
 export const d0 = given('d_0', '1,0', (f) => f.d0);
 /** Hole diameter for net areas. */
 export const dn = given('d′', '1,0', (f) => f.dn);

@@ -1,4 +1,5 @@
 import * as z from 'zod/mini';
+import { regions } from '../words/regions.ts';
 
 // Code generation would need eval, which a strict content policy forbids.
 z.config({ jitless: true });
@@ -89,6 +90,13 @@ const support = z.strictObject({
   otherReaction: z.optional(atLeastZero()),
 });
 
+const beside = z.strictObject({
+  standard: about(name(), 'Second design standard, whose ladder stands beside the first'),
+  reaction: z.optional(
+    about(atLeastZero(), 'End reaction at the level of that standard, where it is not the same level'),
+  ),
+});
+
 const sheet = z.strictObject({
   job: z.optional(text(200)),
   drawing: z.optional(text(200)),
@@ -102,6 +110,8 @@ const sheet = z.strictObject({
   approved: z.optional(text(200)),
   paper: z.optional(z.enum(['A4', 'Letter'])),
   decimal: z.optional(z.enum(['.', ','])),
+  words: z.optional(about(z.enum(regions), "Whose trade words are used; absent = those of the standard's market")),
+  beside: z.optional(beside),
 });
 
 /** One beam end as written in files, links and requests. Values in the file's own `units`. */

@@ -1,13 +1,13 @@
 import { minus, over, pick, plus, step, type Tree, times } from '../formula/tree.ts';
 import type { Length, Pure } from '../units/dimension.ts';
 import { oneColumn } from './gates.ts';
-import { at, dn, eBot, eEnd, ex, m, mTop, n, p, q, tp, tw } from './given.ts';
+import { at, dn, eBot, eEnd, eRow, ex, flag, m, mTop, n, p, q, tp, tw } from './given.ts';
 
 const rows = times(minus(n, 1), p);
 const half = (columns: Tree<Pure>): Tree<Length> => times(minus(columns, 0.5), dn);
 
 /** A block torn out along the bolts: shear plane along the inner column, tension plane along the last row. mm2 */
-const block = (t: Tree<Length>, vertical: Tree<Length>, horizontal: Tree<Length>, columns: Tree<Pure>) => {
+export const block = (t: Tree<Length>, vertical: Tree<Length>, horizontal: Tree<Length>, columns: Tree<Pure>) => {
   const Lgv = step('L_gv', plus(vertical, rows));
   const Lgt = step('L_gt', pick([[oneColumn, horizontal]], plus(horizontal, times(minus(columns, 1), q))));
   return {
@@ -26,7 +26,7 @@ export const webBlock: Block = block(tw, at, eEnd, mTop);
 export const plateBlock: Block = block(tp, eBot, ex, m);
 
 /** Two planes beside each bolt column, torn upright out of one ply. mm */
-const upright = (t: Tree<Length>, vertical: Tree<Length>, columns: Tree<Pure>) => {
+export const upright = (t: Tree<Length>, vertical: Tree<Length>, columns: Tree<Pure>) => {
   const Lgv = step('L_gv', plus(vertical, rows));
   return { t, columns, Lgv, Lnv: step('L_nv', minus(Lgv, times(minus(n, 0.5), dn))) };
 };
@@ -34,18 +34,20 @@ export type UprightTear = ReturnType<typeof upright>;
 export const webTearUp: UprightTear = upright(tw, at, mTop);
 export const plateTearDown: UprightTear = upright(tp, eBot, m);
 
+const besideShortCope = flag('a short cope cuts into the row', (f) => f.eRow < f.eEnd);
+
 /** Two planes beside one bolt of an outer row, torn along the row to an edge, or to the next column. mm */
-const along = (t: Tree<Length>, edge: Tree<Length>) => ({
+export const along = (t: Tree<Length>, edge: Tree<Length>) => ({
   t,
   edge: { L: edge, Ln: step('L_n', minus(edge, over(dn, 2))) },
   next: { L: q, Ln: step('L_n', minus(q, dn)) },
 });
 export type AlongTear = ReturnType<typeof along>;
-export const webTearAlong: AlongTear = along(tw, eEnd);
+export const webTearAlong: AlongTear = along(tw, pick([[besideShortCope, eRow]], eEnd));
 export const plateTearAlong: AlongTear = along(tp, ex);
 
 /** A block pulled along the beam by a tie force: two planes along the outer rows, tension between them. mm2 */
-const pulled = (t: Tree<Length>, edge: Tree<Length>) => {
+export const pulled = (t: Tree<Length>, edge: Tree<Length>) => {
   const L = step('L', pick([[oneColumn, edge]], plus(edge, times(minus(m, 1), q))));
   return {
     Agv: step('A_gv', times(2, t, L)),

@@ -1,5 +1,4 @@
-import { wordsOf } from '../check/examine.ts';
-import { standards } from '../standards/index.ts';
+import { wordsFor } from '../words/wordsFor.ts';
 import type { Context, SheetInput } from './context.ts';
 import { endKeywords } from './endInPdf.ts';
 import { loadFaces } from './faces.ts';
@@ -78,7 +77,7 @@ export const sheetPages = async (input: SheetInput, options: SheetOptions): Prom
   const { end, report } = input;
   const pen = new Pen(await loadFaces());
   const paper: Paper = end.sheet?.paper ?? 'A4';
-  const words = wordsOf(standards[report.standard.id]!);
+  const words = wordsFor(report.words);
   const numbers = numbersOf(report.units, end.sheet?.decimal ?? '.');
   drawSheet({ pen, input, numbers, words }, options, bottomOf(paper));
   return pen;

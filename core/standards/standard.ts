@@ -1,7 +1,9 @@
 import type { FitName, StrengthName } from '../end/checkNames.ts';
 import type { Gate, Limit } from '../end/gates.ts';
 import type { Condition, Constant, Source, Tree } from '../formula/tree.ts';
-import type { Length } from '../units/dimension.ts';
+import type { Force, Length } from '../units/dimension.ts';
+import type { Listed } from './listed.ts';
+import type { Materials } from './materials.ts';
 
 /** One section, leg or direction in which a check is made. */
 export interface Way {
@@ -9,10 +11,16 @@ export interface Way {
   readonly of: string;
   /** Symbol under which the demand stands in tables, such as `R_max` or `V e_c`. */
   readonly symbol: string;
-  /** Grows in proportion to its load (V, or T for tie forces). */
+  /** In proportion to its load: V, the tie force T, or none where a size is compared. */
   readonly demand: Tree;
-  readonly resistance: Tree;
-  readonly load: 'V' | 'T';
+  /** Absent where the standard sets no limit: the demand then stands for information. */
+  readonly resistance?: Tree;
+  readonly load: 'V' | 'T' | 'none';
+  /**
+   * The reaction at which the way is used up, where resistance or demand change with V otherwise than in proportion. Not dependent on V;
+   * demand and resistance are then stated at V.
+   */
+  readonly failsAt?: Tree<Force>;
   /** Not applicable under any of these. */
   readonly off?: readonly Gate[];
   readonly limits?: readonly Limit[];
@@ -23,6 +31,10 @@ export interface Way {
   /** Where the way's source differs from the check's. */
   readonly source?: Source;
 }
+
+/** Every tree of a way, in the order of its working: what it fails at, demand, resistance. */
+export const treesOf = ({ failsAt, demand, resistance }: Way): Tree[] =>
+  [failsAt, demand, resistance].filter((one) => one !== undefined);
 
 /** How a standard answers one way of failing. */
 export interface StrengthRule {
@@ -37,8 +49,12 @@ export interface FitPart {
   readonly least?: Tree<Length>;
   readonly most?: Tree<Length>;
   readonly off?: readonly Gate[];
-  /** Cannot be built while this is met: fails, whatever `else` says. */
+  /** State of an end that breaks this part, where it is not the rule's. */
+  readonly breach?: 'fails' | 'refer';
+  /** Cannot be built while this is met: fails, whatever `breach` says. */
   readonly clash?: Condition;
+  /** Where the part's source differs from the rule's. */
+  readonly source?: Source;
 }
 
 /** How a standard answers one rule of geometry; `breach` is the state of an end that breaks it. */
@@ -57,34 +73,15 @@ export interface NoRule {
 export const noRule = (covered?: StrengthName): NoRule => ({ noRule: true, ...(covered && { covered }) });
 export const isNoRule = (rule: StrengthRule | FitRule | NoRule): rule is NoRule => 'noRule' in rule;
 
-/** Materials, bolts and holes as a standard admits them. MPa, mm. */
-export interface Materials {
-  readonly grades: readonly string[];
-  /** fy and fu of a grade at a thickness; undefined outside the grade's range. */
-  readonly strengthAt: (grade: string, thickness: number) => { readonly fy: number; readonly fu: number } | undefined;
-  readonly boltGrades: readonly string[];
-  readonly boltStrength: (grade: string, diameter: number) => number | undefined;
-  /** Nominal hole of a bolt. */
-  readonly holeFor: (diameter: number) => number;
-  /** Hole diameter in net areas. */
-  readonly netHole: (hole: number, made: 'drilled' | 'punched') => number;
-  /** How holes are taken when the file does not say. */
-  readonly holesAssumed: 'drilled' | 'punched';
-  /** Weld metal taken when the file does not say. */
-  readonly electrode: number;
-}
-
 /** One design standard: every check name answered, the compiler sees to it. */
-export interface Standard {
-  readonly id: string;
-  readonly title: string;
-  readonly edition: string;
-  readonly level: 'factored' | 'service';
+export interface Standard extends Listed {
   /** Values of each option, the default first. */
   readonly options: Readonly<Record<string, readonly [string, ...string[]]>>;
   /** Resistance factors, for print. */
   readonly factors: readonly Constant[];
   readonly materials: Materials;
+  /** The least reaction that an end is checked for, whatever is given; absent where the standard asks for none. */
+  readonly leastReaction?: Tree<Force>;
   readonly strength: Readonly<Record<StrengthName, StrengthRule | NoRule>>;
   readonly fit: Readonly<Record<FitName, FitRule | NoRule>>;
   /** How far each check is verified against numbers that the program did not make. */

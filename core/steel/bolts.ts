@@ -6,9 +6,12 @@ export interface BoltSize {
   readonly name: string;
   readonly diameter: number;
   readonly thread: 'metric' | 'inch';
+  /** Tensile stress area, mm2 (ISO 898-1); 0 for inch threads, which have areas by their own standards. */
+  readonly tensileArea: number;
 }
 
 const metric = [12, 16, 20, 22, 24, 27, 30, 36];
+const tensileAreas = [84.3, 157, 245, 303, 353, 459, 561, 817];
 const inch: readonly (readonly [name: string, diameter: number])[] = [
   ['1/2', 12.7],
   ['5/8', 15.875],
@@ -20,8 +23,15 @@ const inch: readonly (readonly [name: string, diameter: number])[] = [
 ];
 
 const sizes: readonly BoltSize[] = [
-  ...metric.map((diameter): BoltSize => ({ name: `M${diameter}`, diameter, thread: 'metric' })),
-  ...inch.map(([name, diameter]): BoltSize => ({ name, diameter, thread: 'inch' })),
+  ...metric.map(
+    (diameter, at): BoltSize => ({
+      name: `M${diameter}`,
+      diameter,
+      thread: 'metric',
+      tensileArea: tensileAreas[at]!,
+    }),
+  ),
+  ...inch.map(([name, diameter]): BoltSize => ({ name, diameter, thread: 'inch', tensileArea: 0 })),
 ];
 
 const byName: ReadonlyMap<string, BoltSize> = new Map(sizes.map((size) => [size.name, size]));

@@ -3,6 +3,8 @@ import type { Words } from './words.ts';
 /** Words of South Africa, Britain and Australia: notch, fin plate, gauge. */
 export const commonwealth: Words = {
   cope: 'notch',
+  finPlate: 'fin plate',
+  gauge: 'gauge',
   titles: {
     'web-gross-shear': 'Shear of the full section',
     'cope-shear': 'Shear at the notch',
@@ -24,6 +26,7 @@ export const commonwealth: Words = {
     'plate-bending': 'Bending of the plate',
     'plate-buckling': 'Buckling of the plate',
     weld: 'Weld',
+    'support-shear': 'Shear of the support',
     'fit-pitch': 'Pitch',
     'fit-gauge': 'Gauge',
     'fit-edge-web': 'Web edge',
@@ -66,11 +69,14 @@ export const commonwealth: Words = {
   },
   reasons: {
     'no-rule': 'no rule in this standard',
+    'tie-other-level': 'the tie force is given at the other level',
+    'bolt-not-listed': 'a bolt that this standard does not list',
     covered: 'contained in another check',
     'no-cope': 'not notched',
     'intact-flange': 'an intact flange closes the path',
     'single-row': 'one bolt row',
     'single-column': 'one bolt column',
+    'no-top-cope': 'no notch above',
     'no-bottom-cope': 'no notch below',
     'no-tie': 'no tie force',
     'no-support': "the supporting beam's section is not given",
@@ -120,6 +126,9 @@ export const commonwealth: Words = {
     'top-of-steel-assumed': 'Tops of steel level (assumed).',
   },
   notes: {
+    'strengths-carried': 'Strengths carried over from {from}: web {web}, plate {plate}, bolts {bolts}.',
+    'least-reaction':
+      'The reaction given, {given}, is below the least action that the standard has joints designed for: {value} was used.',
     'reaction-from-share': 'The reaction is {share} of the shear of the full section: {value}.',
     'section-read-as': '{label} ({list}) was read as {value}.',
     'two-column-block':

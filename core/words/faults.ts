@@ -26,6 +26,7 @@ export const faultSentences: Readonly<Record<string, string>> = {
   'reaction-level':
     'The reaction is given at {given} level; this standard works at {limit} level. Give the reaction at that level.',
   'unknown-standard': 'The standard {given} is not known; known: {limit}.',
+  'same-standard': 'The second standard must be another than the first; {given} is the first.',
   'unknown-section': 'The section {given} is not in the library; nearest: {limit}.',
   'unknown-grade': 'The steel grade {given} is not known here; known: {limit}.',
   'grade-outside-range': 'The grade has no strength listed at {given} thick; it is listed for {limit}.',

@@ -4,6 +4,10 @@ import { capital } from './capital.ts';
 export interface Words {
   /** cope (North America) or notch (elsewhere). */
   readonly cope: string;
+  /** fin plate or single plate. */
+  readonly finPlate: string;
+  /** gauge or gage. */
+  readonly gauge: string;
   /** Title of a check in full, by id. */
   readonly titles: Readonly<Record<string, string>>;
   /** The same for a narrow column. */

@@ -199,8 +199,11 @@ describe('GET /v1/sections', () => {
 test('GET /v1/standards lists every standard with its options and grades', async () => {
   const listed = standardsSchema.parse(await (await ask('/v1/standards')).json()).standards;
   expect(listed).toEqual(
-    Object.values(standards).map(({ id, title, edition, level, options, materials: { grades, boltGrades } }) => ({
-      ...{ id, title, edition, level, options, grades, boltGrades },
+    Object.values(standards).map(({ id, title, edition, level, options, materials }) => ({
+      ...{ id, title, edition, level, options },
+      grades: materials.sections.grades,
+      plateGrades: materials.plates.grades,
+      boltGrades: materials.boltGrades,
     })),
   );
 });

@@ -9,7 +9,7 @@ import { readEnd } from '../../core/end/readEnd.ts';
 import type { End } from '../../core/end/schema.ts';
 import type { Tree } from '../../core/formula/tree.ts';
 import type { Standard } from '../../core/standards/standard.ts';
-import { isNoRule } from '../../core/standards/standard.ts';
+import { isNoRule, treesOf } from '../../core/standards/standard.ts';
 import { goodEnds } from '../support/published.ts';
 import { sheetRow } from '../support/spreadsheet.ts';
 import { type Contestant, type Figure, interleaved } from './timing.ts';
@@ -48,7 +48,7 @@ const turning = <T>(list: readonly T[]): (() => T) => {
 /** The same formulas in a general spreadsheet engine: all inputs of all rows replaced in one call. Microseconds a row. */
 const spreadsheet = (standard: Standard, ends: readonly End[]): number => {
   const trees: Tree[] = Object.values(standard.strength).flatMap((rule) =>
-    isNoRule(rule) ? [] : rule.ways.flatMap(({ demand, resistance }) => [demand, resistance]),
+    isNoRule(rule) ? [] : rule.ways.flatMap(treesOf),
   );
   const row = sheetRow(trees);
   const facts = ends.slice(0, 200).map((end) => {

@@ -5,12 +5,13 @@ import { fileURLToPath } from 'node:url';
 import { build } from 'vite';
 import type { Figure } from './timing.ts';
 
-/** Sheets of a short-lived process; of a long-running one; and how many of those are printed before it is taken to be warm. */
+/** Sheets of a short-lived process; of a long-running one, and how many of those are printed before it is taken to be warm. */
 const SHORT = 12;
-const LONG = 300;
+const LONG = 440;
 const WARMED = 200;
-/** Short-lived processes looked at. */
-const PROCESSES = 7;
+/** Short-lived processes looked at, and sheets of the long-running one that are looked at together. */
+const PROCESSES = 9;
+const BLOCK = 40;
 
 const here = (path: string): string => fileURLToPath(new URL(path, import.meta.url));
 
@@ -49,12 +50,19 @@ const runs = async (): Promise<{ short: Run[]; long: Run }> => {
   }
 };
 
-/** The sheet from JSON to PDF: in a short-lived process and in a long-running one, from the start of a process to its first, and its size. */
+/** Values in their order, so many at a time. */
+const blocks = (values: readonly number[], size: number): number[][] =>
+  Array.from({ length: Math.floor(values.length / size) }, (_, i) => [...values.slice(i * size, (i + 1) * size)]);
+
+/**
+ * The sheet from JSON to PDF: in a short-lived process and in a long-running one, from the start of a process to its first, and its size.
+ * Other work on the machine only ever adds to the time, so the best of several processes stands, and of the medians of several blocks.
+ */
 export const sheetBench = async (): Promise<Figure[]> => {
   const { short, long } = await runs();
-  const cold = middle(short.map(({ later }) => middle(later)));
-  const warm = middle(long.later.slice(WARMED - 1));
-  const start = middle(short.map(({ first }) => first));
+  const cold = Math.min(...short.map(({ later }) => middle(later)));
+  const warm = Math.min(...blocks(long.later.slice(WARMED - 1), BLOCK).map(middle));
+  const start = Math.min(...short.map(({ first }) => first));
   const figure = (name: string, value: number, unit: string, target: number, ceiling: number): Figure => ({
     name: `sheet: ${name}`,
     value,
@@ -63,9 +71,9 @@ export const sheetBench = async (): Promise<Figure[]> => {
     ceiling,
   });
   return [
-    figure('cold median, the later ones of twelve in a fresh process', cold, 'ms', 40, 120),
-    figure('warm median, in a long-running process', warm, 'ms', 10, 30),
-    figure('process start to first PDF', start, 'ms', 600, 1800),
+    figure('cold median of the later of twelve in a fresh process, best of nine processes', cold, 'ms', 40, 120),
+    figure('warm median of forty in a long-running process, best of six', warm, 'ms', 10, 30),
+    figure('process start to first PDF, best of nine', start, 'ms', 600, 1800),
     figure('size', long.bytes / 1000, 'kB', 25, 30),
   ];
 };

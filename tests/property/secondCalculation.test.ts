@@ -272,8 +272,9 @@ describe('a second calculation, written from the rules alone, finds what the pro
         const report = reportOf(end, beside);
         if (!report) return;
         const second = secondCalculation(end);
-        const answers = report.checks.map(({ id }) => second[id]!);
-        expect(report.checks.flatMap((one, at) => differences(one, answers[at]!, end.section.radius))).toEqual([]);
+        const ruled = report.checks.filter(({ reason }) => reason !== 'no-rule');
+        const answers = ruled.map(({ id }) => second[id]!);
+        expect(ruled.flatMap((one, at) => differences(one, answers[at]!, end.section.radius))).toEqual([]);
         expect(report.verdict).toBe(verdictOf(answers));
         expect(alike((report.capacity ?? Number.NaN) * 1e3, capacityOf(answers), 3e-4)).toBe(true);
         compared += 1;

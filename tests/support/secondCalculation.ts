@@ -260,7 +260,10 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
     const pull = k * 0.9 * t * (Lgt - (count - 0.5) * dn) * u;
     return pull + 0.6 * 0.9 * t * Math.min(y * Lgv, u * (Lgv - (n - 0.5) * dn));
   };
-  const webTears = [...upright(tw, fy, fu, y1 - dt, mTop), ...along(tw, fy, fu, eEnd)];
+  // A cope shorter than the end distance may cut into an outer row: the web before the hole then ends at the cope's face.
+  const cutInto = (cope: Cope | null, into: boolean) => (cope && into ? cope.length : 0);
+  const before = eEnd - Math.max(cutInto(top, y1 - d0 / 2 < dt), cutInto(bottom, yn + d0 / 2 > h - db));
+  const webTears = [...upright(tw, fy, fu, y1 - dt, mTop), ...along(tw, fy, fu, before)];
   const k = options['web-block'] === 'cautious' ? 0.3 : 0.5;
   const webBlock = block(k, tw, fy, fu, y1 - dt + rows, eEnd + (mTop - 1) * q, mTop);
   const { fy: yp, fu: up } = ply;
@@ -316,6 +319,16 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
     return gap > 0 ? size('refer', gap, 10) : { ...size('fails', gap, 10), reason: 'clash' };
   };
 
+  /** Only a flange of the support that lies within the beam's depth can meet a cope's face. */
+  const clearance = (): Answer => {
+    const { flange, radius, topOfSteel, depth } = support!;
+    const flangeAbove = flange + radius <= topOfSteel;
+    const flangeBelow = h <= depth - flange - radius - topOfSteel;
+    const near = [...(top && !flangeAbove ? [top] : []), ...(bottom && !flangeBelow ? [bottom] : [])];
+    if (near.length > 0) return sizes(...near.map(clear));
+    return no(top ? 'clear-of-support' : 'no-top-cope');
+  };
+
   return {
     'web-gross-shear': strength(V, { per: 1, resistance: 0.9 * h * tw * shear((h - 2 * tf) / tw).fs }),
     'stress-full': stress(cutOf(section, 0, h).peak),
@@ -359,7 +372,7 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
             ...(mTop > 0 ? [edge(y1 - dt, cut, tw)] : []),
             ...(mBottom > 0 ? [size('fails', h - db - yn, cut)] : []),
           )
-        : no('no-bottom-cope'),
+        : no('intact-flange'),
     'fit-edge-plate': sizes(...[eTop, eBot, ex].map((given) => edge(given, plateEdge, tp))),
     'fit-end': edge(eEnd, cut, tw),
     'fit-plate-depth': sizes(
@@ -368,9 +381,9 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
       size('refer', h - yn - eBot, bottom ? db : tf + r),
     ),
     'fit-cope-length': each(({ length }) => size('refer', length, eEnd + wide + d0 / 2)),
-    'fit-cope-depth': deepEnough.length > 0 ? sizes(...deepEnough) : no(support ? 'clear-of-support' : 'no-support'),
+    'fit-cope-depth': deepEnough.length > 0 ? sizes(...deepEnough) : no('no-cope'),
     'fit-cope-radius': each(({ radius }) => size('refer', radius ?? 0, 10)),
-    'fit-cope-clearance': support ? each(clear) : no('no-support'),
+    'fit-cope-clearance': !support ? no('no-support') : !coped ? no('no-cope') : clearance(),
     'fit-setback': size('refer', g, 8, 20),
     'fit-rotation': weld
       ? sizes(

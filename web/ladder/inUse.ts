@@ -4,7 +4,7 @@ import { dn, fu, fub, fup, fy, fyp, Xu } from '../../core/end/given.ts';
 import { quantity } from '../../core/formula/line.ts';
 import { numberOf } from '../../core/formula/number.ts';
 import type { Tree } from '../../core/formula/tree.ts';
-import { standards } from '../../core/standards/index.ts';
+import { standards } from '../../core/standards/known.ts';
 import { unitOf } from '../../core/units/systems.ts';
 
 /** A symbol and what stands for it, with its unit. */

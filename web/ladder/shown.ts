@@ -1,10 +1,9 @@
 import { computed } from '@preact/signals';
 import type { ExaminedNumbers } from '../../core/check/examined.ts';
-import { wordsOf } from '../../core/check/examineNumbers.ts';
 import type { Check, SaidFault } from '../../core/check/report.ts';
-import { standards } from '../../core/standards/index.ts';
 import { commonwealth } from '../../core/words/commonwealth.ts';
 import type { Words } from '../../core/words/words.ts';
+import { wordsFor } from '../../core/words/wordsFor.ts';
 import { chosen, faults, lastGood } from '../state/bench.ts';
 
 /** What the bench shows: the end examined last without a fault; null before there is one. */
@@ -18,8 +17,8 @@ export const stale = computed(() => missing.value.length > 0);
 
 /** Words of the standard's market. */
 export const words = computed<Words>(() => {
-  const standard = standards[shown.value?.report.standard.id ?? ''];
-  return standard ? wordsOf(standard) : commonwealth;
+  const report = shown.value?.report;
+  return report ? wordsFor(report.words) : commonwealth;
 });
 
 /** The check whose rung is touched, where the report has it and it says something. */

@@ -1,4 +1,4 @@
-import { standards } from '../../core/standards/index.ts';
+import { standards } from '../../core/standards/known.ts';
 import { optionName, optionValue } from '../../core/words/optionWords.ts';
 import { Choice } from '../field/Choice.tsx';
 import { standard } from '../state/bench.ts';

@@ -7,6 +7,8 @@ const strengths = [
 ] as const;
 
 /** A steel by its grade in the standard, or by its strengths. */
-export const SteelField = ({ path }: { readonly path: string }) => (
-  <GradeField path={path} label="Grade" names={standard.value?.materials.grades ?? []} strengths={strengths} />
-);
+export const SteelField = ({ path }: { readonly path: string }) => {
+  const materials = standard.value?.materials;
+  const steels = path.startsWith('joint.') ? materials?.plates : materials?.sections;
+  return <GradeField path={path} label="Grade" names={steels?.grades ?? []} strengths={strengths} />;
+};

@@ -1,6 +1,6 @@
 import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
-import { standards } from '../../core/standards/index.ts';
+import { standards } from '../../core/standards/known.ts';
 import { fieldName, type Words } from '../../core/words/words.ts';
 
 /** What the drawing of an end writes beside its sizes. */

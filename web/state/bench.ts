@@ -1,14 +1,15 @@
 import { computed, effect, signal } from '@preact/signals';
 import type { ExaminedNumbers } from '../../core/check/examined.ts';
-import { examineNumbers, wordsOf } from '../../core/check/examineNumbers.ts';
+import { examineNumbers } from '../../core/check/examineNumbers.ts';
 import type { SaidFault } from '../../core/check/report.ts';
 import type { CheckName } from '../../core/end/checkNames.ts';
-import { standards } from '../../core/standards/index.ts';
+import { standards } from '../../core/standards/known.ts';
 import type { Standard } from '../../core/standards/standard.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
 import { commonwealth } from '../../core/words/commonwealth.ts';
 import { faultSentences } from '../../core/words/faults.ts';
 import { faultText, type Words } from '../../core/words/words.ts';
+import { wordsFor } from '../../core/words/wordsFor.ts';
 import { endOf } from './endOf.ts';
 import { type Entry, emptyEntry, textOf } from './entry.ts';
 import { filledFrom } from './filledFrom.ts';
@@ -31,7 +32,7 @@ export const standard = computed<Standard | undefined>(() => {
 });
 
 /** Words of the standard's market. */
-export const words = computed<Words>(() => (standard.value ? wordsOf(standard.value) : commonwealth));
+export const words = computed<Words>(() => (standard.value ? wordsFor(standard.value.region) : commonwealth));
 
 /** The end as the JSON of a file, as far as its fields can be read. */
 export const input = computed(() => endOf(entry.value));

@@ -1,4 +1,4 @@
-import { standards } from '../../core/standards/index.ts';
+import { standards } from '../../core/standards/known.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
 import { chosen, demanded, editing, entry, faults, input, lastGood, timeline } from './bench.ts';
 import { type Entry, textOf, withProposals, withText } from './entry.ts';

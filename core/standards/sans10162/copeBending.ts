@@ -1,8 +1,7 @@
-import { channelCope, copeLimits, type Gate, uncoped } from '../../end/gates.ts';
+import { channelCope, copeLimits, type Gate, noRectangle, noTee, uncoped } from '../../end/gates.ts';
 import { type Cut, fy, rectangle, tee, V } from '../../end/given.ts';
 import { step, times } from '../../formula/tree.ts';
 import type { StrengthRule, Way } from '../standard.ts';
-import { noRectangle, noTee } from './copeShear.ts';
 import { phi } from './factors.ts';
 
 /** Bending of what remains at each cope's face under V e_c: first yield of the cut edge, holes not taken off. */

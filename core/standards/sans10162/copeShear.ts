@@ -1,4 +1,4 @@
-import { channelCope, copeLimits, type Gate, uncoped } from '../../end/gates.ts';
+import { channelCope, copeLimits, type Gate, noRectangle, noTee, uncoped } from '../../end/gates.ts';
 import { type Cut, flag, fy, rectangle, tee, tw, V } from '../../end/given.ts';
 import { atMost, not, over, pick, step, times } from '../../formula/tree.ts';
 import type { StrengthRule, Way } from '../standard.ts';
@@ -7,10 +7,6 @@ import { firstLimit, shearStress } from './shearStress.ts';
 
 const source = { clause: '13.4', basis: 'memory' } as const;
 const mean = flag('option cope-shear: mean', (f) => f.options['cope-shear'] === 'mean');
-
-/** No such section at this end. */
-export const noRectangle: Gate = { when: flag('', (f) => !f.rectangle.here), reason: 'no-cope' };
-export const noTee: Gate = { when: flag('', (f) => !f.tee.here), reason: 'no-cope' };
 
 /**
  * Shear of a section without two flanges, SANS 10162-1:2011 cl. 13.4 (members without two flanges): elastic distribution, its peak held

@@ -1,8 +1,7 @@
-import { coped as endCoped, type Gate, isChannel, uncoped } from '../../end/gates.ts';
+import { coped as endCoped, type Gate, isChannel, noRectangle, noTee, uncoped } from '../../end/gates.ts';
 import { type Cut, flag, fy, rectangle, tee, V, whole } from '../../end/given.ts';
 import { all, not, over, step, times } from '../../formula/tree.ts';
 import type { StrengthRule, Way } from '../standard.ts';
-import { noRectangle, noTee } from './copeShear.ts';
 import { phi } from './factors.ts';
 
 /** Elastic shear stress V Q/(I t) at its peak in the web, held to 0.66 φ f_y where option `elastic-shear: verdict` asks for it. */

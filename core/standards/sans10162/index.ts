@@ -1,14 +1,7 @@
-import { flag } from '../../end/given.ts';
-import { all } from '../../formula/tree.ts';
-import { noRule, type Standard } from '../standard.ts';
-import { plateBlock, webBlock } from './block.ts';
-import { boltShear, plateBearing, webBearing } from './bolts.ts';
-import { copeBending } from './copeBending.ts';
-import { copeBuckling } from './copeBuckling.ts';
-import { copeShear } from './copeShear.ts';
-import { stressCope, stressFull } from './elasticStress.ts';
-import { phi, phiB, phiBr, phiW } from './factors.ts';
-import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitClauses.ts';
+import { flag, fy } from '../../end/given.ts';
+import { all, times } from '../../formula/tree.ts';
+import { listedOf } from '../listed.ts';
+import { copeBuckling } from '../methods/copeBuckling.ts';
 import {
   fitCopeClearance,
   fitCopeDepth,
@@ -17,10 +10,19 @@ import {
   fitPlateDepth,
   fitRotation,
   fitSetback,
-} from './fitPractice.ts';
+} from '../methods/fitPractice.ts';
+import { plateBuckling } from '../methods/plateBuckling.ts';
+import { noRule, type Standard } from '../standard.ts';
+import { plateBlock, webBlock } from './block.ts';
+import { boltShear, plateBearing, webBearing } from './bolts.ts';
+import { copeBending } from './copeBending.ts';
+import { copeShear } from './copeShear.ts';
+import { stressCope, stressFull } from './elasticStress.ts';
+import { E, phi, phiB, phiBr, phiW } from './factors.ts';
+import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitClauses.ts';
 import { materials } from './materials.ts';
 import { plateNetShear, webNetShear } from './netShear.ts';
-import { plateBending, plateBuckling, plateGrossShear } from './plate.ts';
+import { plateBending, plateGrossShear } from './plate.ts';
 import { plateTearout, webTearout } from './tearOut.ts';
 import { webTie } from './tie.ts';
 import { verified } from './verified.ts';
@@ -34,10 +36,7 @@ const slimWeld = flag('', (f) => f.leg < 0.625 * f.tp);
 
 /** SANS 10162-1:2011, structural use of steel, limit-states design of hot-rolled steelwork. */
 export const sans10162: Standard = {
-  id: 'sans-10162-1',
-  title: 'SANS 10162-1',
-  edition: '2011',
-  level: 'factored',
+  ...listedOf('sans-10162-1'),
   options: {
     'elastic-shear': ['report', 'verdict'],
     'bolt-group': ['elastic', 'instantaneous-centre'],
@@ -54,7 +53,7 @@ export const sans10162: Standard = {
     'web-block': webBlock,
     'web-tearout': webTearout,
     'cope-bending': copeBending,
-    'cope-buckling': copeBuckling,
+    'cope-buckling': copeBuckling(E, fy, (stress, W) => times(phi, stress, W)),
     'web-bearing': webBearing,
     'web-tie': webTie,
     'stress-full': stressFull,
@@ -66,8 +65,9 @@ export const sans10162: Standard = {
     'plate-net-shear': plateNetShear,
     'plate-block': plateBlock,
     'plate-bending': plateBending,
-    'plate-buckling': plateBuckling,
+    'plate-buckling': plateBuckling((Q, fy, W) => times(phi, Q, fy, W)),
     weld,
+    'support-shear': noRule(),
   },
   fit: {
     'fit-pitch': fitPitch,

@@ -3,7 +3,7 @@ import { type Gate, noTieForce, singleRow } from '../../end/gates.ts';
 import { dn, flag, fu, fup, fy, fyp, ho, hp, n, T, tp, tw } from '../../end/given.ts';
 import { type Block, platePulled, webPulled } from '../../end/tearPaths.ts';
 import { least, minus, step, type Tree, times } from '../../formula/tree.ts';
-import type { Length, Stress } from '../../units/dimension.ts';
+import type { Force, Length, Stress } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { generalBlock } from './block.ts';
 import { bearingOn, boltResistance } from './bolts.ts';
@@ -12,7 +12,7 @@ import { filletLine } from './weld.ts';
 
 const source = { clause: '13.11 to 13.13', basis: 'memory' } as const;
 
-const way = (of: string, resistance: Way['resistance'], off: Way['off'] = []): Way => ({
+const way = (of: string, resistance: Tree<Force>, off: Way['off'] = []): Way => ({
   of,
   symbol: 'T',
   load: 'T',

@@ -1,4 +1,4 @@
-import { type Gate, oneColumn } from '../../end/gates.ts';
+import { type Gate, oneColumn, uncoped } from '../../end/gates.ts';
 import {
   cb,
   ct,
@@ -35,8 +35,8 @@ import type { FitRule } from '../standard.ts';
 const source = { clause: 'practice', basis: 'practice' } as const;
 const mm = (length: number) => constant(`${length} mm`, length, '1,0');
 
-const noTop: Gate = { when: flag('', (f) => f.dt === 0), reason: 'no-cope' };
-const noBottom: Gate = { when: flag('', (f) => f.db === 0), reason: 'no-cope' };
+const noTop: Gate = { when: flag('', (f) => f.dt === 0), reason: 'no-top-cope' };
+const noBottom: Gate = { when: flag('', (f) => f.db === 0), reason: 'no-bottom-cope' };
 const noSupport: Gate = { when: flag('', (f) => !f.support.here), reason: 'no-support' };
 const outsideSupport: Gate = {
   when: flag('', (f) => f.g >= (f.support.b - f.support.tw) / 2),
@@ -68,8 +68,8 @@ export const fitCopeLength: FitRule = {
   source,
   breach: 'refer',
   parts: [
-    { of: 'top', given: ct, least: pastHoles, off: [noTop] },
-    { of: 'bottom', given: cb, least: pastHoles, off: [noBottom] },
+    { of: 'top', given: ct, least: pastHoles, off: [uncoped, noTop] },
+    { of: 'bottom', given: cb, least: pastHoles, off: [uncoped, noBottom] },
   ],
 };
 
@@ -87,28 +87,28 @@ const noneNeeded = (
   reason: 'clear-of-support',
 });
 
+/** The support's flange above the beam, or below its foot. */
+const flangeAbove = noneNeeded((f) => f.support.tf + f.support.r - f.support.topOfSteel);
+const flangeBelow = noneNeeded((f) => f.h - (f.support.h - f.support.tf - f.support.r - f.support.topOfSteel));
+
 /** Copes reach past flange and fillet, and clear the supporting beam's flanges where the end stands within them. */
 export const fitCopeDepth: FitRule = {
   source,
   breach: 'refer',
   parts: [
-    { of: 'top', given: dt, least: root, off: [noTop] },
-    { of: 'bottom', given: db, least: root, off: [noBottom] },
+    { of: 'top', given: dt, least: root, off: [uncoped, noTop] },
+    { of: 'bottom', given: db, least: root, off: [uncoped, noBottom] },
     {
       of: 'top, at the support',
       given: dt,
       least: underTop,
-      off: [noSupport, outsideSupport, noneNeeded((f) => f.support.tf + f.support.r - f.support.topOfSteel)],
+      off: [noSupport, outsideSupport, flangeAbove],
     },
     {
       of: 'bottom, at the support',
       given: db,
       least: overBottom,
-      off: [
-        noSupport,
-        outsideSupport,
-        noneNeeded((f) => f.h - (f.support.h - f.support.tf - f.support.r - f.support.topOfSteel)),
-      ],
+      off: [noSupport, outsideSupport, flangeBelow],
     },
   ],
 };
@@ -117,8 +117,8 @@ export const fitCopeRadius: FitRule = {
   source,
   breach: 'refer',
   parts: [
-    { of: 'top', given: rt, least: mm(10), off: [noTop] },
-    { of: 'bottom', given: rb, least: mm(10), off: [noBottom] },
+    { of: 'top', given: rt, least: mm(10), off: [uncoped, noTop] },
+    { of: 'bottom', given: rb, least: mm(10), off: [uncoped, noBottom] },
   ],
 };
 
@@ -132,8 +132,20 @@ export const fitCopeClearance: FitRule = {
   source,
   breach: 'refer',
   parts: [
-    { of: 'top', given: clearTop, least: mm(10), off: [noSupport, noTop], clash: atMost(clearTop, mm(0)) },
-    { of: 'bottom', given: clearBottom, least: mm(10), off: [noSupport, noBottom], clash: atMost(clearBottom, mm(0)) },
+    {
+      of: 'top',
+      given: clearTop,
+      least: mm(10),
+      off: [noSupport, uncoped, noTop, flangeAbove],
+      clash: atMost(clearTop, mm(0)),
+    },
+    {
+      of: 'bottom',
+      given: clearBottom,
+      least: mm(10),
+      off: [noSupport, uncoped, noBottom, flangeBelow],
+      clash: atMost(clearBottom, mm(0)),
+    },
   ],
 };
 

@@ -1,0 +1,94 @@
+import { fault } from '../end/fault.ts';
+import type { End } from '../end/schema.ts';
+import { standards } from '../standards/known.ts';
+import type { Standard } from '../standards/standard.ts';
+import { nearest } from '../steel/nearest.ts';
+import { plain } from '../units/figures.ts';
+import { fromSystem, toSystem, unitOf } from '../units/systems.ts';
+import { filled } from '../words/words.ts';
+import { wordsFor } from '../words/wordsFor.ts';
+import type { ExaminedNumbers } from './examined.ts';
+import { numbersOf, regionOf, said } from './examineNumbers.ts';
+import { planOf } from './plan.ts';
+import type { Check, Note, Numbers, SaidFault } from './report.ts';
+import { resolve } from './resolve.ts';
+
+/** The same end under a second standard. */
+export interface Beside {
+  readonly examined: ExaminedNumbers;
+  /** False where that standard works at the other level and no reaction was given for it: strengths only, no line and no states. */
+  readonly stated: boolean;
+}
+
+const isVerdict = ({ state }: Check): boolean => state === 'holds' || state === 'fails';
+
+/** Checks that a reaction of the other level says nothing about: the tie force always, all that depends on V where none is given. */
+const withoutLevel = (check: Check, stated: boolean, text: string): Check => {
+  if (check.id === 'web-tie' && check.state !== 'notApplicable') {
+    return { ...check, state: 'notApplicable', reason: 'tie-other-level', reasonText: text, utilisation: null };
+  }
+  if (stated || check.id.startsWith('fit-') || check.reactionAtFailure === undefined) return check;
+  return { ...check, demand: null, utilisation: null, state: isVerdict(check) ? 'information' : check.state };
+};
+
+const carriedNote = (examined: ExaminedNumbers, standard: Standard): Note => {
+  const { end, facts, report } = examined;
+  const unit = unitOf('-2,1', end.units).name;
+  const stress = (value: number) => plain(toSystem(value, '-2,1', end.units), 1);
+  const text = filled(wordsFor(regionOf(end, standard)).notes['strengths-carried'] ?? '', {
+    from: report.standard.title,
+    web: `${stress(facts.fy)}/${stress(facts.fu)}`,
+    plate: `${stress(facts.fyp)}/${stress(facts.fup)}`,
+    bolts: `${stress(facts.fub)} ${unit}`,
+  });
+  return { code: 'strengths-carried', text };
+};
+
+const besideUnder = (
+  examined: ExaminedNumbers,
+  standard: Standard,
+  given: number | undefined,
+): Beside | readonly SaidFault[] => {
+  const { facts, report } = examined;
+  const { options: _, level: __, ...rest } = examined.end;
+  const end: End = { ...rest, standard: standard.id };
+  const found = resolve(end, standard, {
+    web: { fy: facts.fy, fu: facts.fu },
+    fyf: facts.fyf,
+    plate: { fy: facts.fyp, fu: facts.fup },
+    support: { fy: facts.fys, fu: facts.fus },
+    fub: facts.fub,
+  });
+  const words = wordsFor(regionOf(end, standard));
+  if ('faults' in found) return said(found.faults, words).faults;
+  const sameLevel = standard.level === report.level;
+  const stated = sameLevel || given !== undefined;
+  const V = fromSystem(sameLevel ? report.reaction : (given ?? 0), '0,1', end.units);
+  const { resolved } = found;
+  const numbers = numbersOf(end, planOf(standard, end.joint.kind), resolved, V);
+  const told: Numbers = {
+    ...numbers,
+    checks: sameLevel
+      ? numbers.checks
+      : numbers.checks.map((one) => withoutLevel(one, stated, words.reasons['tie-other-level'] ?? '')),
+    notes: [carriedNote(examined, standard), ...numbers.notes.filter(({ code }) => code !== 'strength-given')],
+  };
+  return { examined: { end, facts: resolved.facts, designation: resolved.designation, report: told }, stated };
+};
+
+/**
+ * The end under the second standard that its sheet names: strengths of steel and bolts carried over from the first, with the second's own
+ * hole, net, factor and geometry rules and its options at their defaults. Null where no second standard is named.
+ */
+export const besideOf = (examined: ExaminedNumbers): Beside | { readonly faults: readonly SaidFault[] } | null => {
+  const asked = examined.end.sheet?.beside;
+  if (!asked) return null;
+  const path = 'sheet.beside.standard';
+  const standard = Object.hasOwn(standards, asked.standard) ? standards[asked.standard] : undefined;
+  if (!standard) {
+    return said([fault('unknown-standard', path, asked.standard, nearest(asked.standard, Object.keys(standards), 3))]);
+  }
+  if (standard.id === examined.end.standard) return said([fault('same-standard', path, asked.standard, null)]);
+  const found = besideUnder(examined, standard, asked.reaction);
+  return 'examined' in found ? found : { faults: found };
+};

@@ -1,0 +1,28 @@
+import type { Region } from '../words/regions.ts';
+
+/** What is told of a design standard before its rules are at hand. */
+export interface Listed {
+  readonly id: string;
+  readonly title: string;
+  readonly edition: string;
+  /** The level at which the reaction is given. */
+  readonly level: 'factored' | 'service';
+  /** Whose trade words it speaks. */
+  readonly region: Region;
+}
+
+const entry = <Id extends string>(
+  id: Id,
+  title: string,
+  edition: string,
+  level: Listed['level'],
+  region: Region,
+): Listed & { readonly id: Id } => ({ id, title, edition, level, region });
+
+/** Every design standard that an end can name, in the order of the lists. */
+export const listed = [entry('sans-10162-1', 'SANS 10162-1', '2011', 'factored', 'commonwealth')] as const;
+
+export type StandardId = (typeof listed)[number]['id'];
+
+/** What is listed of a standard. */
+export const listedOf = (id: StandardId): Listed => listed.find((one) => one.id === id)!;

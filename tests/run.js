@@ -30,6 +30,7 @@ const test = () => {
 
 install();
 if (wanted.includes('--bench')) {
+  build();
   process.exit(run(...tool('tsx', 'tests/bench/run.ts')));
 }
 if (wanted.includes('--check')) {

@@ -27,8 +27,6 @@ export default defineConfig({
           testTimeout: 90_000,
           hookTimeout: 90_000,
           fileParallelism: false,
-          // A browser on a busy machine may miss a wait; what fails twice has failed.
-          retry: 1,
         },
       },
     ],

@@ -1,7 +1,7 @@
 import type { FitName, PartName, StrengthName } from '../end/checkNames.ts';
 import type { Gate, Limit } from '../end/gates.ts';
 import type { Joint } from '../end/schema.ts';
-import { type NumberReader, numberOf, testOf } from '../formula/number.ts';
+import { markShared, type NumberReader, numberOf, testOf } from '../formula/number.ts';
 import { joints } from '../joints/index.ts';
 import {
   type FitPart,
@@ -10,6 +10,7 @@ import {
   type NoRule,
   type Standard,
   type StrengthRule,
+  treesOf,
   type Way,
 } from '../standards/standard.ts';
 
@@ -103,13 +104,30 @@ const fitPartPlan = (part: FitPart, breach: 'fails' | 'refer'): FitPartPlan => (
 const reasonOf = (rule: StrengthRule | FitRule | NoRule): string =>
   isNoRule(rule) ? (rule.covered ? 'covered' : 'no-rule') : '';
 
+/** Finds the steps that several rules of a standard lean on, before any of them is composed. */
+const markSharedIn = ({ strength, fit, notes, leastReaction }: Standard): void => {
+  for (const rule of [...Object.values(strength), ...Object.values(fit)]) {
+    if (isNoRule(rule)) continue;
+    for (const one of 'ways' in rule ? rule.ways : rule.parts) {
+      const conditions = 'demand' in one ? [...(one.limits ?? []), ...(one.off ?? [])] : (one.off ?? []);
+      const more =
+        'demand' in one ? [...treesOf(one), one.unbounded, one.informs] : [one.given, one.least, one.most, one.clash];
+      markShared(...conditions.map(({ when }) => when), ...more.filter((it) => it !== undefined));
+    }
+  }
+  markShared(...notes.map(({ when }) => when), ...(leastReaction ? [leastReaction] : []));
+};
+
 const made = new Map<string, Plan>();
+const marked = new Set<string>();
 
 /** The plan of one standard and kind of joint, made at first use. */
 export const planOf = (standard: Standard, kind: Joint['kind']): Plan => {
   const key = `${standard.id} ${kind}`;
   const known = made.get(key);
   if (known) return known;
+  if (!marked.has(standard.id)) markSharedIn(standard);
+  marked.add(standard.id);
   const list = joints[kind];
   const strength = list.strength.map(([id, part]) => {
     const rule = standard.strength[id];

@@ -7,7 +7,7 @@ type Test = (facts: never) => boolean;
 /** Most steps that all standards and joints together may have. */
 const CELLS = 1 << 14;
 
-/** Steps are computed once a run, however many checks lean on them: the run in which each was computed, and its value. */
+/** Shared steps are computed once a run, however many checks lean on them: the run in which each was computed, and its value. */
 const ranAt = new Int32Array(CELLS);
 const kept = new Float64Array(CELLS);
 let cells = 0;
@@ -25,6 +25,27 @@ const newCell = (): number => {
 };
 
 const readers = new WeakMap<Tree, NumberReader>();
+const met = new WeakSet<Tree>();
+const shared = new WeakSet<Tree>();
+
+const isStep = (tree: Tree): boolean => tree.op === 'step';
+
+/** Marks the steps that more than one formula leans on; only these are remembered within a run. */
+export const markShared = (...roots: readonly (Tree | Condition)[]): void => {
+  for (const one of roots) {
+    if (one.op === 'flag') continue;
+    const tree = one as Tree;
+    if (isStep(tree)) {
+      if (met.has(tree)) {
+        shared.add(tree);
+        continue;
+      }
+      met.add(tree);
+    }
+    if (one.op === 'pick') markShared(...one.branches.flatMap(({ when, then }) => [when, then]), one.otherwise);
+    else if ('of' in one) markShared(...(one.of as readonly (Tree | Condition)[]));
+  }
+};
 
 /** Composes a tree into closures, once; the same tree always gives the same reader. */
 export const numberOf = (tree: Tree): NumberReader => {
@@ -79,7 +100,7 @@ const compose = (tree: Tree): NumberReader => {
       return (facts) => solve(facts, ...of.map((one) => one(facts)));
     }
     case 'step':
-      return remembered(numberOf(tree.of[0]));
+      return shared.has(tree) ? remembered(numberOf(tree.of[0])) : numberOf(tree.of[0]);
   }
 };
 

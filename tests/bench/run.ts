@@ -1,6 +1,7 @@
 import { loadavg } from 'node:os';
 import { standards } from '../../core/standards/index.ts';
 import { apiBench } from './apiBench.ts';
+import { benchBench } from './benchBench.ts';
 import { coreBench } from './coreBench.ts';
 import { sheetBench } from './sheetBench.ts';
 import type { Figure } from './timing.ts';
@@ -24,6 +25,7 @@ process.stdout.write(`Node ${process.version}, load ${loadavg()[0]!.toFixed(2)};
 for (const standard of Object.values(standards)) collect(coreBench(standard));
 collect(await sheetBench());
 collect(await apiBench());
+collect(await benchBench());
 
 process.stdout.write(`load ${loadavg()[0]!.toFixed(2)} at the end\n`);
 const broken = figures.filter((figure) => !kept(figure));

@@ -10,10 +10,8 @@ export interface SheetRow {
   readonly results: readonly number[];
 }
 
-const column = (at: number): string => {
-  const first = Math.floor(at / 26);
-  return (first > 0 ? String.fromCharCode(64 + first) : '') + String.fromCharCode(65 + (at % 26));
-};
+const column = (at: number): string =>
+  (at < 26 ? '' : column(Math.floor(at / 26) - 1)) + String.fromCharCode(65 + (at % 26));
 
 /** Collects the inputs first, so that formula cells can follow them. */
 class Builder {

@@ -6,8 +6,8 @@ export interface Ground {
   line(from: Point, to: Point, weight: number, owner?: object): void;
   /** A box that nothing else may stand on. */
   take(box: Box): void;
-  /** What covering this box would cost, lines taken at a share of their weight; counting stops beyond `enough`. */
-  cost(box: Box, owner?: object, enough?: number, share?: number): number;
+  /** What covering this box would cost; counting stops beyond `enough`. Words within `aside` to its left and right count as covered. */
+  cost(box: Box, owner?: object, enough?: number, aside?: number): number;
   /** How many words a line would run through. */
   words(from: Point, to: Point): number;
   /** What a leader along this line would cost. */
@@ -55,16 +55,16 @@ export const createGround = (): Ground => {
     take: (box) => {
       boxes.push(box);
     },
-    cost: (box, owner, enough = Number.POSITIVE_INFINITY, share = 1) => {
+    cost: (box, owner, enough = Number.POSITIVE_INFINITY, aside = 0) => {
       const { left, top, right, bottom } = box;
       let sum = 0;
-      for (const it of boxes) if (overlaps(it, box)) sum += WORDS;
+      for (const it of boxes) if (overlaps(it, box, aside)) sum += WORDS;
       for (let i = 0; i < segments.length && sum < enough; i++) {
         const it = segments[i]!;
         // Most lines are far away: told here, since this is the innermost loop of all.
         if (it.left > right || it.right < left || it.top > bottom || it.bottom < top) continue;
         if (it.owner !== undefined && it.owner === owner) continue;
-        if (meets(it, box)) sum += share * it.weight;
+        if (meets(it, box)) sum += it.weight;
       }
       return sum;
     },
@@ -87,8 +87,8 @@ export const createGround = (): Ground => {
   };
 };
 
-const overlaps = (a: Box, b: Box): boolean =>
-  a.left < b.right && b.left < a.right && a.top < b.bottom && b.top < a.bottom;
+const overlaps = (a: Box, b: Box, aside: number): boolean =>
+  a.left < b.right + aside && b.left - aside < a.right && a.top < b.bottom && b.top < a.bottom;
 
 /** True where a segment touches a box: the part of it within the box's four sides is not empty. */
 const meets = (it: Segment, { left, top, right, bottom }: Box): boolean => {

@@ -11,6 +11,8 @@ const VARIANT = 1.5;
 const OUTSIDE = 12;
 /** A leader steeper than about 50 degrees. */
 const STEEP = 3;
+/** Air between words that else would be read on, in text heights. */
+const ASIDE = 0.35;
 /** Words that would make the drawing wider. */
 const WIDER = 40;
 /** Words that would make it higher, by the text height. */
@@ -60,7 +62,7 @@ const search = (pad: Pad, it: Callout, places: Places): Found | undefined => {
       move(box, own, left, top);
       const there = base + dislike(it, box, places, em);
       if (there >= least) continue;
-      const words = there + ground.cost(box, undefined, least - there);
+      const words = there + ground.cost(box, undefined, least - there, ASIDE * em);
       if (words >= least) continue;
       const { leader, cost } = leaderOf(pad, it, box, words, least);
       if (cost < least) [best, least] = [{ lines, at: { x: left, y: top }, leader }, cost];

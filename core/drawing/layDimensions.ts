@@ -7,6 +7,8 @@ import { rings } from './rings.ts';
 
 const LINE_WEIGHT = 9;
 const TICK_WEIGHT = 20;
+/** A place further off with a leader is looked for where the places at the line cost more than this. */
+const AWAY = 10;
 /** In text heights: half-length of the oblique stroke, the free space beside a value in its line, a line drawn on beyond its end. */
 const TICK = 0.3;
 const GAP = 0.25;
@@ -37,7 +39,8 @@ interface Spot {
 const layValue = (pad: Pad, it: Placed): void => {
   const { dimension } = it;
   const close = cheapest(pad, it, candidates(pad, it));
-  const best = close.cost < WORDS ? close.spot : cheapest(pad, it, anywhere(pad, it)).spot;
+  const far = close.cost < AWAY ? close : cheapest(pad, it, anywhere(pad, it));
+  const best = far.cost < close.cost ? far.spot : close.spot;
   drawOwnLine(pad, it, best);
   const width = widthOf(pad, dimension.line);
   const { x, y } = spotPoint(it, best);
@@ -55,9 +58,30 @@ const cheapest = (pad: Pad, it: Placed, spots: readonly Spot[]): { spot: Spot; c
   for (const spot of spots) {
     if (spot.cost >= least) continue;
     const cost = spot.cost + pad.ground.cost(valueBox(pad, it, spot), it, least - spot.cost);
-    if (cost < least) [best, least] = [spot, cost];
+    if (cost >= least) continue;
+    const whole = cost + linesCost(pad, it, spot);
+    if (whole < least) [best, least] = [spot, whole];
   }
   return { spot: best, cost: least };
+};
+
+/** What the value's own lines cost: the leader, and the dimension line drawn on beyond its end, which should not pass close by other words. */
+const linesCost = (pad: Pad, it: Placed, spot: Spot): number => {
+  const { em, ground } = pad;
+  if (spot.manner === 'away') return ground.crossing(leaderEnd(pad, it, spot), middleOf(it));
+  if (spot.manner !== 'on') return 0;
+  const drawn = drawnOn(pad, it, spot);
+  const [from, to] = spot.along < startOf(it) ? [drawn[0], startOf(it)] : [endOf(it), drawn[1]];
+  const beside = [-GAP * em, 0, GAP * em].map((off) => ({ ...it, level: it.level + off }));
+  return WORDS * Math.max(...beside.map((line) => ground.words(pointOn(line, from), pointOn(line, to))));
+};
+
+/** From where to where a line runs that is drawn on beyond its end. */
+const drawnOn = (pad: Pad, it: Placed, spot: Spot): [number, number] => {
+  const { em, values } = pad;
+  const [start, end] = [startOf(it), endOf(it)];
+  const far = values === 'gap' ? ON * em : widthOf(pad, it.dimension.line) + 0.7 * em;
+  return spot.along < start ? [start - far, end + 0.45 * em] : [start - 0.45 * em, end + far];
 };
 
 /** Where even the places beside the line are taken: further off, with a leader. */
@@ -68,7 +92,7 @@ const anywhere = (pad: Pad, it: Placed): Spot[] => {
     manner: 'away',
     along: middle + (level ? x : y) * pad.em,
     across: (level ? y : x) * pad.em,
-    cost: far,
+    cost: AWAY + far,
   }));
 };
 
@@ -125,12 +149,14 @@ const drawOwnLine = (pad: Pad, it: Placed, spot: Spot): void => {
     piece(start, spot.along - half);
     piece(spot.along + half, end);
   } else if (spot.manner === 'on') {
-    const far = pad.values === 'gap' ? ON * em : along + 0.7 * em;
-    const [before, after] = spot.along < start ? [far, 0.45 * em] : [0.45 * em, far];
-    piece(start - before, end + after);
-    keepOff(pad, [pointOn(it, start - before), pointOn(it, end + after)], LINE_WEIGHT, it);
+    const [from, to] = drawnOn(pad, it, spot);
+    piece(from, to);
+    keepOff(pad, [pointOn(it, from), pointOn(it, to)], LINE_WEIGHT, it);
   } else piece(start, end);
-  if (spot.manner === 'away') drawLine(pad, 'size', pointOn(it, (start + end) / 2), leaderEnd(pad, it, spot), { path });
+  if (spot.manner === 'away') {
+    drawLine(pad, 'size', middleOf(it), leaderEnd(pad, it, spot), { path });
+    keepOff(pad, [middleOf(it), leaderEnd(pad, it, spot)], LINE_WEIGHT, it);
+  }
 };
 
 /** The middle of the side of the value's box that faces its line. */
@@ -161,6 +187,8 @@ const spotPoint = (it: Placed, { along, across }: Spot): Point =>
 
 const pointOn = ({ dimension, level }: Placed, along: number): Point =>
   dimension.axis === 'x' ? { x: along, y: level } : { x: level, y: along };
+
+const middleOf = (it: Placed): Point => pointOn(it, (startOf(it) + endOf(it)) / 2);
 
 const ends = ({ axis, from, to }: Dimension): [number, number] => [from[axis], to[axis]];
 const startOf = ({ dimension }: Placed): number => Math.min(...ends(dimension));

@@ -1,18 +1,22 @@
 import { chords, endOf } from './arcs.ts';
-import type { Box, Circle, FailurePath, Point } from './drawing.ts';
+import type { Circle, FailurePath, Point, Tag } from './drawing.ts';
 import { hatchLines } from './hatch.ts';
 import { layTag } from './layTag.ts';
-import { drawStroke, type Pad } from './pad.ts';
+import { boxOf, drawStroke, keepOff, type Pad } from './pad.ts';
 
 /** Spacing of the hatch in text heights. */
 const HATCH = 0.5;
+/** How much words keep off the edge of a black area. */
+const BLACK = 40;
 
-/** A way of failing over the piece: areas, lines, and its words where they cover least. */
-export const layPath = (pad: Pad, given: FailurePath, holes: readonly Circle[], piece: Box): void => {
+/** The areas and lines of a way of failing, where they run through the fewest words; gives its words back, which speak of the lines as they lie now. */
+export const layPathLines = (pad: Pad, given: FailurePath, holes: readonly Circle[]): readonly Tag[] => {
   const path = moved(given, clearShift(pad, given));
   for (const { outline, fill } of path.areas) {
-    if (fill === 'black') pad.marks.push({ shape: 'fill', layer: 'path', outline });
-    else {
+    if (fill === 'black') {
+      pad.marks.push({ shape: 'fill', layer: 'path', outline });
+      keepOff(pad, outline, BLACK);
+    } else {
       for (const [from, to] of hatchLines(outline, HATCH * pad.em, holes)) {
         drawStroke(pad, 'path', { kind: 'hatch', from, to: [to] });
       }
@@ -22,7 +26,13 @@ export const layPath = (pad: Pad, given: FailurePath, holes: readonly Circle[], 
   for (const { kind, centre, radius, filled } of path.circles) {
     pad.marks.push({ shape: 'circle', layer: 'path', kind, centre, radius, filled: filled ?? false });
   }
-  for (const tag of path.tags) layTag(pad, tag, piece);
+  return path.tags;
+};
+
+/** Words of a path where they cover least. */
+export const layTags = (pad: Pad, tags: readonly Tag[]): void => {
+  const drawn = boxOf(pad.marks);
+  for (const tag of tags) layTag(pad, tag, drawn);
 };
 
 /** The shift at which the strokes run through the fewest words. */

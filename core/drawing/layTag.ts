@@ -1,17 +1,17 @@
 import type { Box, Point, Tag } from './drawing.ts';
-import { CAPITAL, drawLine, type Pad, setLine } from './pad.ts';
+import { CAPITAL, drawLine, keepOff, type Pad, setLine } from './pad.ts';
 import { AIR, blockBox, move } from './place.ts';
 import { rings } from './rings.ts';
 
 /** Dislike of words away from the part they speak of, and from its middle, per text height; of a leader; and of words outside the drawing. */
-const APART = 1.4;
+const APART = 1;
 const MIDDLE = 0.12;
 const LEADER = 2;
 const OUTSIDE = 25;
-/** Words of a path are heavy and may stand on thin lines: share of the weight of lines that counts. */
-const OVER_LINES = 0.22;
 /** Words this near need no leader, in text heights. */
 const NEAR = 0.9;
+/** How much other words keep off a leader. */
+const LINE = 8;
 /** Points of the part that are looked at. */
 const POINTS = 9;
 
@@ -40,13 +40,17 @@ export const layTag = (pad: Pad, { along, text }: Tag, drawing: Box): void => {
       const apart = apartOf(point, box) / em;
       const before = walk + apart * APART + (apart > NEAR ? LEADER : 0) + outside;
       if (before >= least) continue;
-      let cost = before + ground.cost(box, undefined, least - before, OVER_LINES);
+      let cost = before + ground.cost(box, undefined, least - before);
       if (apart > NEAR && cost < least) cost += ground.crossing(leaderStart(pad, box, point), point);
       if (cost < least) [best, least] = [{ at: { x: left, y: top }, box: { ...box }, apart, point }, cost];
     }
   }
   if (best === undefined) return;
-  if (best.apart > NEAR) drawLine(pad, 'path', leaderStart(pad, best.box, best.point), best.point);
+  if (best.apart > NEAR) {
+    const start = leaderStart(pad, best.box, best.point);
+    drawLine(pad, 'path', start, best.point);
+    keepOff(pad, [start, best.point], LINE);
+  }
   setLine(pad, 'path', line, best.at);
 };
 

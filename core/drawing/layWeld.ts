@@ -1,9 +1,12 @@
 import type { Box, Point, WeldMark } from './drawing.ts';
 import { CAPITAL, drawHead, drawStroke, keepOff, type Pad, setLine, widthOf } from './pad.ts';
 
-/** In text heights: the triangle's leg, and the reference line beyond the words. */
+/** In text heights: the triangle's leg, from its upright side to the knee, and the air around words and symbol. */
 const LEG = 0.7;
-const BEYOND = 1.05;
+const CORNER = 0.95;
+const AIR = 0.3;
+/** Of the words over the reference line. */
+const LIFT = 0.25;
 
 interface Spot {
   readonly target: Point;
@@ -35,16 +38,16 @@ const spots = function* ({ em }: Pad, { targets }: WeldMark): Generator<Spot & {
 };
 
 const symbolBox = (pad: Pad, { line }: WeldMark, knee: Point): Box => ({
-  left: knee.x - widthOf(pad, line) - (BEYOND + 0.25) * pad.em,
+  left: knee.x - widthOf(pad, line) - (CORNER + 2 * AIR) * pad.em,
   right: knee.x + 0.1 * pad.em,
-  top: knee.y - (CAPITAL + 0.4) * pad.em,
-  bottom: knee.y + (LEG + 0.1) * pad.em,
+  top: knee.y - (CAPITAL + LIFT + AIR) * pad.em,
+  bottom: knee.y + (LEG + AIR) * pad.em,
 });
 
 const draw = (pad: Pad, weld: WeldMark, { target, knee }: Spot): void => {
   const { em, ground } = pad;
-  const start = { x: knee.x - widthOf(pad, weld.line) - (BEYOND + 0.15) * em, y: knee.y };
-  const corner = knee.x - 0.95 * em;
+  const corner = knee.x - CORNER * em;
+  const start = { x: corner - AIR * em - widthOf(pad, weld.line), y: knee.y };
   drawStroke(pad, 'words', { kind: 'narrow', from: start, to: [knee, target] });
   drawHead(pad, 'words', [knee, target], 0.6);
   const leg = LEG * em;
@@ -57,7 +60,7 @@ const draw = (pad: Pad, weld: WeldMark, { target, knee }: Spot): void => {
     ],
     closed: true,
   });
-  setLine(pad, 'words', weld.line, { x: start.x + 0.1 * em, y: knee.y - 0.25 * em });
+  setLine(pad, 'words', weld.line, { x: start.x, y: knee.y - LIFT * em });
   ground.take(symbolBox(pad, weld, knee));
   keepOff(pad, [knee, target], 8);
 };

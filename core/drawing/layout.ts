@@ -3,7 +3,7 @@ import type { Laid, Mark } from './laid.ts';
 import { layCallouts } from './layCallouts.ts';
 import { layDimensions } from './layDimensions.ts';
 import { layFace } from './layFace.ts';
-import { layPath } from './layPath.ts';
+import { layPathLines, layTags } from './layPath.ts';
 import { layPiece } from './layPiece.ts';
 import { layWeld } from './layWeld.ts';
 import { condensed, type Measure } from './measure.ts';
@@ -16,6 +16,8 @@ export interface LayoutOptions {
   readonly values: 'gap' | 'parallel';
   /** Width of a text in the pen's own font. */
   readonly measure?: Measure;
+  /** True where one path is shown for good, as on paper: words keep off it. Else it is laid over the drawing and moves nothing of it. */
+  readonly pathStays?: boolean;
 }
 
 /** How much words keep off lines where paths will run. */
@@ -24,18 +26,21 @@ const CLEAR = 2.5;
 export const AIR = 0.35;
 
 /**
- * Gives every line and word of a drawing its place, the same for every pen. A failure path is laid over the drawing and moves nothing of it;
- * the box holds the drawing, and the path's words where these had to stand outside.
+ * Gives every line and word of a drawing its place, the same for every pen. The box holds the drawing, and the path's words where these had
+ * to stand outside.
  */
 export const layoutDrawing = (drawing: Drawing, options: LayoutOptions, path: FailurePath | null = null): Laid => {
   const pad = createPad(options.textHeight, options.measure ?? condensed, options.values);
+  const { pathStays = false } = options;
   layPiece(pad, drawing);
+  if (path !== null && pathStays) layPathLines(pad, path, drawing.holes);
   const placed = layDimensions(pad, drawing);
   layFace(pad, drawing, placed);
+  if (path !== null && pathStays) layTags(pad, path.tags);
   for (const line of drawing.keptClear) keepOff(pad, line, CLEAR);
   if (drawing.weld !== null) layWeld(pad, drawing.weld);
   layCallouts(pad, drawing.callouts, drawing.beam);
-  if (path !== null) layPath(pad, path, drawing.holes, boxOf(pad.marks));
+  if (path !== null && !pathStays) layTags(pad, layPathLines(pad, path, drawing.holes));
   const { left, top, right, bottom } = boxOf(pad.marks);
   const air = AIR * pad.em;
   return {

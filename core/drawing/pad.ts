@@ -1,5 +1,5 @@
 import { chords } from './arcs.ts';
-import type { Arc, Box, Line, LineKind, Point, Stroke } from './drawing.ts';
+import type { Arc, Box, Line, LineKind, Point, Stroke, Word } from './drawing.ts';
 import { createGround, type Ground } from './ground.ts';
 import type { LaidRun, Layer, Mark } from './laid.ts';
 import type { Measure } from './measure.ts';
@@ -86,10 +86,13 @@ export const drawHead = ({ em, marks }: Pad, layer: Layer, points: readonly Poin
   });
 };
 
-export const widthOf = ({ measure, em, widths }: Pad, line: Line): number => {
+const wordWidth = ({ measure, em }: Pad, { text, role }: Word): number => measure(text, em, role === 'path');
+
+export const widthOf = (pad: Pad, line: Line): number => {
+  const { em, widths } = pad;
   const known = widths.get(line);
   if (known !== undefined) return known;
-  const words = line.reduce((sum, { text }) => sum + measure(text, em), 0);
+  const words = line.reduce((sum, word) => sum + wordWidth(pad, word), 0);
   const width = words + Math.max(0, line.length - 1) * SPACE * em;
   widths.set(line, width);
   return width;
@@ -97,10 +100,11 @@ export const widthOf = ({ measure, em, widths }: Pad, line: Line): number => {
 
 /** A line of words whose left end (upright: lower end) stands on the base line at `at`. */
 export const setLine = (pad: Pad, layer: Layer, line: Line, at: Point, rotation: 0 | -90 = 0): void => {
-  const { em, measure, marks, ground } = pad;
+  const { em, marks, ground } = pad;
   let along = 0;
-  for (const { text, role, path, italic } of line) {
-    const width = measure(text, em);
+  for (const word of line) {
+    const { text, role, path, italic } = word;
+    const width = wordWidth(pad, word);
     const box = wordBox(at, along, width, em, rotation);
     const middle = along + width / 2;
     marks.push({

@@ -59,7 +59,8 @@ export interface PaperSize {
 export const penAt = ({ pen }: Context, scale: number): LayoutOptions => ({
   textHeight: SIZE * POINT * scale,
   values: 'parallel',
-  measure: (text, size) => (pen.width(text, { size: SIZE }) * size) / (SIZE * POINT),
+  pathStays: true,
+  measure: (text, size, bold) => (pen.width(text, { size: SIZE, bold }) * size) / (SIZE * POINT),
 });
 
 /** What no layout of a piece at 1:`scale` goes below: known without laying one out. */

@@ -2,7 +2,7 @@ import type { Point } from '../drawing/drawing.ts';
 import { layoutDrawing } from '../drawing/layout.ts';
 import { fromSystem, type UnitSystem } from '../units/systems.ts';
 import type { Context, Zone } from './context.ts';
-import { drawMark } from './figureMarks.ts';
+import { drawMarks } from './figureMarks.ts';
 import { besideWidth, captionsOf, type FigureWords, LEADING, placeWords, style } from './figureWords.ts';
 import { NARROW, WIDE } from './page.ts';
 import type { Spot } from './pen.ts';
@@ -53,8 +53,10 @@ export const figuresOf = (context: Context, width: number, height: number, code:
     const free = width - besideWidth(code) - least(scale).width;
     const longer = longerPiece(context, scale, free);
     const figure = longer && figureAt(context, longer, words, scale);
-    // Words beside the beam may still take the code's place.
-    return figure && (figure.coded || !code) ? figure : figureAt(context, usual, words, scale);
+    // Words beside the beam may still take the code's place; those that the data repeat give way to it.
+    if (figure && (figure.coded || !code)) return figure;
+    const short = figureAt(context, usual, words, scale);
+    return short.coded || !code || !at(scale, false).coded ? short : at(scale, false);
   };
   const made = new Map<string, Figure>();
   const at = (scale: number, labelled: boolean): Figure => {
@@ -79,7 +81,7 @@ const figureAt = (context: Context, { drawing, path }: Piece, words: FigureWords
   const placed = placeWords(laid, words, scale);
   const draw = (x: number, y: number): void => {
     const place = (p: Point): Spot => ({ x: x + (p.x - box.left) / scale, y: y + (p.y - box.top) / scale });
-    for (const mark of marks) drawMark(context, mark, place, scale);
+    drawMarks(context, marks, place, scale);
     setLines(pen, x + placed.x, y + placed.y + 3, placed.lines, style, LEADING);
     drawScale(context, x + placed.x, y + placed.y + placed.lines.length * LEADING + 3.4, scale);
     if (code && placed.code) drawCode(pen, x + placed.code.x, y + placed.code.y, code);

@@ -7,13 +7,20 @@ import { HAIR, NARROW, WIDE } from './page.ts';
 import { POINT, type Spot, type TextStyle } from './pen.ts';
 import { plainRun } from './textBlock.ts';
 
-/** One mark of a laid drawing on the paper; `place` takes it there, at 1:`scale`. */
-export const drawMark = (context: Context, mark: Mark, place: (p: Point) => Spot, scale: number): void => {
-  const { pen } = context;
+/** Marks of a laid drawing on the paper; lines give way where words must stand on them. */
+export const drawMarks = (context: Context, marks: readonly Mark[], place: (p: Point) => Spot, scale: number): void => {
+  const words = marks.filter((mark) => mark.shape === 'text');
+  for (const mark of marks) if (mark.shape !== 'text') drawMark(context, mark, place, scale);
+  for (const { box } of words) {
+    const [from, to] = [place({ x: box.left, y: box.top }), place({ x: box.right, y: box.bottom })];
+    context.pen.box(from.x, from.y, to.x - from.x, to.y - from.y, { fill: 'white' });
+  }
+  for (const mark of words) drawWord(context, mark, place, scale);
+};
+
+/** One line, area or hole; `place` takes it to the paper, at 1:`scale`. */
+const drawMark = ({ pen }: Context, mark: Exclude<Mark, LaidText>, place: (p: Point) => Spot, scale: number): void => {
   switch (mark.shape) {
-    case 'text':
-      drawWord(context, mark, place, scale);
-      return;
     case 'fill': {
       const [from, ...to] = mark.outline.map(place);
       if (from) pen.path(from, to, { fill: 'black', closed: true });

@@ -83,7 +83,7 @@ export const sheetWords = {
   optionsBelow: 'options in force: see below',
   basis: 'Basis: ',
   unverified: '* not yet compared with numbers from outside the program.',
-  qrLeftOut: 'No square code: the file carries the data.',
+  qrLeftOut: 'No square code: the file has the data.',
   prepared: 'Prepared',
   checked: 'Checked',
   approved: 'Approved',

@@ -64,8 +64,8 @@ describe('the square code of the sheet', () => {
     }
   });
 
-  it('keeps its place beside words that stand on the beam: no good end is without it but one whose piece is as wide as its room', async () => {
-    for (const one of goodEnds().filter(({ name }) => name !== 'long-cope')) {
+  it('keeps its place beside words that stand on the beam: no good end is without it but two whose pieces are as wide or as high as their room', async () => {
+    for (const one of goodEnds().filter(({ name }) => !['long-cope', 'slender-web'].includes(name))) {
       const input = examined(one.end);
       const link = encodeLink(input.end, input.report.fingerprint);
       const { pages } = await sheetPages({ ...input, link }, { workings: 'governing' });
@@ -76,7 +76,7 @@ describe('the square code of the sheet', () => {
   it('is left out, and this is said, where it has no room', async () => {
     const { grid, texts } = await pageWith(fullest, 2000);
     expect(grid).toBeUndefined();
-    expect(texts).toContain('No square code: the file carries the data.');
+    expect(texts).toContain('No square code: the file has the data.');
   });
 
   it('is drawn as it is: dark where the code is dark', async () => {

@@ -3,13 +3,15 @@ import type { Section } from '../shape/section.ts';
 /**
  * One family of rolled sections as its source lists it. Only what cannot be computed is kept; areas and moduli follow from the dimensions.
  *
- * A row reads `label mass h b tf tw r`, without the mass where the label ends in it, and with a last word where another list labels the same
- * shape otherwise.
+ * A row reads `label mass h b tf tw r`, without the mass where the label ends in it; the toe radius follows where the flanges taper, and a
+ * last word where another list labels the same shape otherwise.
  */
 export interface SectionTable {
   readonly family: string;
   /** What stands before the label in the full designation. */
   readonly prefix: string;
+  /** What others write before the same label. */
+  readonly otherPrefix?: string;
   /** Where the family is sold first. */
   readonly market: string;
   readonly shape: Section['family'];
@@ -17,16 +19,18 @@ export interface SectionTable {
   readonly source: string;
   /** mm and kg/m where absent; otherwise inches and lb/ft. */
   readonly units?: 'in-lb';
+  /** Slope of the inner flange faces, degrees; absent for parallel flanges. */
+  readonly slope?: number;
   /** The list whose labels stand in the last word. */
   readonly otherList?: string;
-  /** The label without its mass names one section only. */
-  readonly sizeNamesOne?: true;
+  /** The label is read without its mass too, where that names one section of the library alone. */
+  readonly readWithoutMass?: true;
   readonly rows: string;
 }
 
 /** A section found by name. */
 export interface SectionRecord {
-  /** As this library writes it: `UB 406x178x60`, `IPE 300`, `HEA 200`, `W18x40`, `PFC 200x75x23`. */
+  /** As this library writes it: `UB 406x178x60`, `IPE 300`, `HEA 200`, `W18x40`, `410UB53.7`, `ISMB 400`. */
   readonly designation: string;
   readonly family: string;
   readonly market: string;
@@ -62,6 +66,7 @@ const readRow = (table: SectionTable, row: string): SectionRow => {
   const [label = '', ...rest] = row.split(' ');
   const [length, weight] = table.units === 'in-lb' ? [millimetresPerInch, kilogramsPerMetre] : [1, 1];
   const sizes = rest.filter((one) => !one.includes('x')).map(Number);
+  const taper = table.slope === undefined ? {} : { slope: (table.slope * Math.PI) / 180, toe: sizes.pop()! * length };
   const mass = sizes.length === 6 ? sizes.shift()! : Number(label.slice(label.lastIndexOf('x') + 1));
   const [h = 0, b = 0, tf = 0, tw = 0, r = 0] = sizes;
   const otherLabel = rest.find((one) => one.includes('x'));
@@ -73,7 +78,15 @@ const readRow = (table: SectionTable, row: string): SectionRow => {
       family: table.family,
       market: table.market,
       mass: mass * weight,
-      section: { family: table.shape, h: h * length, b: b * length, tf: tf * length, tw: tw * length, r: r * length },
+      section: {
+        family: table.shape,
+        h: h * length,
+        b: b * length,
+        tf: tf * length,
+        tw: tw * length,
+        r: r * length,
+        ...taper,
+      },
       source: table.source,
     },
   };

@@ -7,7 +7,7 @@ export const pfc: SectionTable = {
   market: 'UK',
   shape: 'channel',
   source: 'SCI/BCSA steel section tables (BS EN 10365, BS 4-1)',
-  sizeNamesOne: true,
+  readWithoutMass: true,
   rows: `
 430x100x64 64.4 430 100 19 11 15
 380x100x54 380 100 17.5 9.5 15

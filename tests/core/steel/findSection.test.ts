@@ -1,6 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { findSection, listSections } from '../../../core/steel/findSection.ts';
+import { aiscW } from '../../../core/steel/sections/aiscW.ts';
+import { readTable } from '../../../core/steel/sectionTable.ts';
 
 const found = (name: string) => {
   const answer = findSection(name);
@@ -44,6 +46,22 @@ describe('a section is found by its name', () => {
     ['PFC 200x75', 'PFC 200x75x23'],
     ['200x75x23 PFC', 'PFC 200x75x23'],
     ['200x75x23', 'PFC 200x75x23'],
+    ['410UB53.7', '410UB53.7'],
+    ['410 UB 53.7', '410UB53.7'],
+    ['410ub53.7', '410UB53.7'],
+    ['UB 410x53.7', '410UB53.7'],
+    ['530UB82', '530UB82.0'],
+    ['310UC96.8', '310UC96.8'],
+    ['310 uc 96.8', '310UC96.8'],
+    ['200PFC', '200PFC'],
+    ['200 PFC', '200PFC'],
+    ['PFC 200', '200PFC'],
+    ['ISMB 400', 'ISMB 400'],
+    ['ismb400', 'ISMB 400'],
+    ['MB 400', 'ISMB 400'],
+    ['MB400', 'ISMB 400'],
+    ['ISMB 200x25.4', 'ISMB 200x25.4'],
+    ['MB 200 x 24.2', 'ISMB 200x24.2'],
   ])('%s is %s', (name, designation) => {
     expect(found(name).designation).toBe(designation);
     expect(found(name).readAs).toBeUndefined();
@@ -68,6 +86,13 @@ describe('a section is found by its name', () => {
       source: 'SCI/BCSA steel section tables (BS EN 10365, BS 4-1)',
     });
     expect(found('PFC 200x75').section).toEqual({ family: 'channel', h: 200, b: 75, tf: 12.5, tw: 6, r: 12 });
+    expect(found('410UB53.7').section).toEqual({ family: 'I', h: 403, b: 178, tf: 10.9, tw: 7.6, r: 11.4 });
+  });
+
+  it('with the slope of its flanges and their toe radius where they taper: ISMB 400 slopes 8 degrees', () => {
+    const slope = (8 * Math.PI) / 180;
+    expect(found('ISMB 400').section).toEqual({ family: 'I', h: 400, b: 140, tf: 16, tw: 8.9, r: 14, slope, toe: 7 });
+    expect(found('ISMB 400').mass).toBe(61.6);
   });
 
   it('in inches where its list is in inches: W18x40 is 17.9 x 6.02 in, flange 0.525 in, web 0.315 in, 40 lb/ft', () => {
@@ -106,8 +131,25 @@ describe('a label of another list is read as the shape it names, and says so', (
     ['W410x38.8', 'W16x26'],
     ['W460x68', 'W18x46'],
     ['w 310 x 33', 'W12x22'],
+    ['W310x38.7', 'W12x26'],
+    ['W310x39', 'W12x26'],
   ])('%s of Canadian lists is %s', (name, designation) => {
     expect(found(name)).toMatchObject({ designation, readFrom: 'Canada' });
+  });
+
+  it('for every W shape, under its exact mass and under the rounded one: no two Canadian labels round to the same', () => {
+    const rows = readTable(aiscW);
+    expect(rows).toHaveLength(283);
+    for (const { record, otherLabel = '' } of rows) {
+      const [depth, mass] = otherLabel.split('x');
+      for (const label of [otherLabel, `${depth}x${Math.round(Number(mass))}`]) {
+        expect(found(`W${label}`)).toMatchObject({
+          designation: record.designation,
+          readAs: `W${label}`,
+          readFrom: 'Canada',
+        });
+      }
+    }
   });
 });
 
@@ -122,6 +164,8 @@ describe('a name that is not known', () => {
     ['W18x41', 'W18x40'],
     ['305x165x42', 'UB 305x165x41'],
     ['UPE 210', 'UPE 220'],
+    ['410UB53', '410UB53.7'],
+    ['ISMB 410', 'ISMB 400'],
   ])('%s has %s as its nearest', (name, neighbour) => {
     expect(proposals(name)).toHaveLength(3);
     expect(proposals(name)[0]).toBe(neighbour);
@@ -132,6 +176,12 @@ describe('a name that is not known', () => {
     expect(proposals('300')).toHaveLength(3);
     for (const name of proposals('UB 406x178')) expect(name).toMatch(/^UB 406x178x/);
     expect(proposals('200x75')).toHaveLength(3);
+  });
+
+  it('that two editions of a list give different shapes gets both as proposals, with their masses', () => {
+    for (const name of ['ISMB 200', 'MB 200', 'ismb200'])
+      expect(proposals(name)).toEqual(['ISMB 200x25.4', 'ISMB 200x24.2']);
+    expect(proposals('ISMB 300')).toEqual(['ISMB 300x44.2', 'ISMB 300x46']);
   });
 
   it.each(['', '   ', '???', '×'])('without letter or number (%j) has no neighbours', (name) => {
@@ -195,6 +245,11 @@ describe('the list of sections', () => {
       'HEM: Europe',
       'UPE: Europe',
       'W: North America',
+      'UB (AU): Australia',
+      'UC (AU): Australia',
+      'PFC (AU): Australia',
+      'ISMB: India',
+      'ISMB 1989: India',
     ]);
     expect(new Set(designations).size).toBe(designations.length);
   });

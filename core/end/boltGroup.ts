@@ -31,6 +31,12 @@ export const J = step(
 /** Horizontal force of V at arm z on a bolt of an outer row, N: elastic vector sum. */
 export const H = step('H', over(times(V, z, yMax), J));
 
+/** Upright force of V at arm z on a bolt of the column that carries most, N: V shared evenly, and its share of V z. */
+export const upright = step(
+  'R_v',
+  pick([[oneColumn, over(V, N)]], times(V, plus(over(1, N), over(times(z, xMax), J)))),
+);
+
 /**
  * Force on the farthest bolt, N: elastic vector sum of V shared evenly and of V z turned about the centroid.
  * Not defined for one bolt alone, which holds no moment.

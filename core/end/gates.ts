@@ -16,18 +16,21 @@ export interface Limit extends Gate {
 
 export const coped = flag('the end is coped', (f) => f.rectangle.here || f.tee.here);
 export const oneBolt = flag('one bolt alone', (f) => f.n === 1 && f.m === 1);
-export const oneRow = flag('', (f) => f.n === 1);
-export const oneColumn = flag('', (f) => f.m === 1);
+export const oneRow = flag('', (f) => f.n === 1, 'one bolt row');
+export const oneColumn = flag('', (f) => f.m === 1, 'one bolt column');
 export const noColumnInCope = flag('an intact flange lies above every column', (f) => f.mTop === 0);
 export const isChannel = flag('a channel', (f) => f.channel);
 const noTie = flag('no tie force', (f) => f.T === 0);
 
 /** No such section at this end. */
-export const noRectangle: Gate = { when: flag('', (f) => !f.rectangle.here), reason: 'no-cope' };
-export const noTee: Gate = { when: flag('', (f) => !f.tee.here), reason: 'no-cope' };
+export const noRectangle: Gate = {
+  when: flag('', (f) => !f.rectangle.here, 'no section with both edges cut'),
+  reason: 'no-cope',
+};
+export const noTee: Gate = { when: flag('', (f) => !f.tee.here, 'no tee'), reason: 'no-cope' };
 /** A tee with its bottom cut: the cut edge is in tension. */
 export const cutEdgeInTension: Gate = {
-  when: flag('', (f) => f.tee.here && !f.tee.topCut),
+  when: flag('', (f) => f.tee.here && !f.tee.topCut, 'a tee cut at its bottom'),
   reason: 'cut-edge-in-tension',
 };
 
@@ -54,4 +57,6 @@ export const boltNotListed: Limit = {
   reason: 'bolt-not-listed',
   always: true,
 };
+/** One bolt alone holds no moment: no force on it can be stated. */
+export const oneBoltRefers: Limit = { when: oneBolt, reason: 'one-bolt', always: true, noNumber: true };
 export const channelCope: Limit = { when: isChannel, reason: 'channel-cope', always: true, noNumber: true };

@@ -13,6 +13,7 @@ export const block = (t: Tree<Length>, vertical: Tree<Length>, horizontal: Tree<
   return {
     Agv: step('A_gv', times(t, Lgv)),
     Anv: step('A_nv', times(t, minus(Lgv, times(minus(n, 0.5), dn)))),
+    Agt: step('A_gt', times(t, Lgt)),
     Ant: step('A_nt', times(t, minus(Lgt, half(columns)))),
   };
 };
@@ -52,6 +53,7 @@ export const pulled = (t: Tree<Length>, edge: Tree<Length>) => {
   return {
     Agv: step('A_gv', times(2, t, L)),
     Anv: step('A_nv', times(2, t, minus(L, half(m)))),
+    Agt: step('A_gt', times(t, minus(n, 1), p)),
     Ant: step('A_nt', times(t, minus(n, 1), minus(p, dn))),
   };
 };

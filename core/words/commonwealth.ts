@@ -66,6 +66,7 @@ export const commonwealth: Words = {
     along: 'along',
     rectangle: 'web cut at both edges',
     tee: 'tee',
+    resultant: 'in full',
   },
   reasons: {
     'no-rule': 'no rule in this standard',
@@ -80,6 +81,8 @@ export const commonwealth: Words = {
     'no-bottom-cope': 'no notch below',
     'no-tie': 'no tie force',
     'no-support': "the supporting beam's section is not given",
+    'support-flange': "fixed to a column's flange, which this does not shear",
+    'support-not-told': 'thickness or grade of the support is not told',
     'clear-of-support': 'clear of the supporting flange',
     'no-weld': 'no weld in this joint',
     'fin-plates-only': 'a rule for fin plates',

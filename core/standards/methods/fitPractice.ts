@@ -57,21 +57,28 @@ export const fitPlateDepth: FitRule = {
       given: hp,
       least: step('h_min', times(0.5, minus(h, times(2, plus(tf, r)))), source, 'half the clear web'),
     },
-    { of: 'top', given: plateTop, least: pick([[flag('', (f) => f.dt > 0), dt]], root) },
-    { of: 'bottom', given: plateFoot, least: pick([[flag('', (f) => f.db > 0), db]], root) },
+    { of: 'top', given: plateTop, least: pick([[flag('', (f) => f.dt > 0, 'coped above'), dt]], root) },
+    { of: 'bottom', given: plateFoot, least: pick([[flag('', (f) => f.db > 0, 'coped below'), db]], root) },
   ],
 };
 
-/** A cope clears the last column's holes. */
-const pastHoles = step('c_min', plus(eEnd, times(minus(m, 1), q), over(d0, 2)), source);
-export const fitCopeLength: FitRule = {
-  source,
-  breach: 'refer',
-  parts: [
-    { of: 'top', given: ct, least: pastHoles, off: [uncoped, noTop] },
-    { of: 'bottom', given: cb, least: pastHoles, off: [uncoped, noBottom] },
-  ],
+const lastColumn = plus(eEnd, times(minus(m, 1), q));
+const copeLength = (past: Tree<Length>): FitRule => {
+  const least = step('c_min', past, source);
+  return {
+    source,
+    breach: 'refer',
+    parts: [
+      { of: 'top', given: ct, least, off: [uncoped, noTop] },
+      { of: 'bottom', given: cb, least, off: [uncoped, noBottom] },
+    ],
+  };
 };
+
+/** A cope clears the last column's holes. */
+export const fitCopeLength: FitRule = copeLength(plus(lastColumn, over(d0, 2)));
+/** A cope reaches the last column's centres. */
+export const fitCopeLengthToCentres: FitRule = copeLength(lastColumn);
 
 const positive = (length: Tree<Length>): Tree<Length> => most(length, mm(0));
 const underTop = step('d_min', positive(minus(plus(support.tf, support.r), support.above)), source);

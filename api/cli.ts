@@ -17,6 +17,8 @@ const follow = async (asked: Asked): Promise<number> => {
       return (await import('./terminal/sheetCommand.ts')).sheetCommand(asked);
     case 'serve':
       return (await import('./terminal/serveCommand.ts')).serveCommand(asked);
+    case 'standards':
+      return (await import('./terminal/standardsCommand.ts')).standardsCommand(asked);
     case 'version':
       return said(`${VERSION}\n`);
     case 'help':

@@ -5,6 +5,8 @@ export const help = `Copewright checks the coped, drilled end of a steel beam be
   copewright check --ndjson < ends.ndjson           one report or faults a line, in order
   copewright sheet FILE.json -o out.pdf [--workings all]
                                                     the sheet for the job folder
+  copewright standards [ID]                         the standards; one in full: factors, options,
+                                                    every check with clause and formula
   copewright serve [--port N] [--host H]            bench and API, http://127.0.0.1:4280
   copewright help, copewright --version
 

@@ -48,7 +48,12 @@ export type Constant<D extends Dimension = Dimension> = Tree<D> & { readonly op:
 /** A choice that depends on the input. */
 export type Condition =
   | { readonly op: 'atMost' | 'below'; readonly of: readonly [Tree, Tree] }
-  | { readonly op: 'flag'; readonly read: (facts: never) => boolean; readonly text: string }
+  | {
+      readonly op: 'flag';
+      readonly read: (facts: never) => boolean;
+      readonly text: string;
+      readonly called: string;
+    }
   | { readonly op: 'not'; readonly of: readonly [Condition] }
   | { readonly op: 'all' | 'any'; readonly of: readonly Condition[] };
 
@@ -86,12 +91,16 @@ export const givenOf =
   <D extends Dimension>(symbol: string, dimension: D, read: (facts: F) => number): Tree<D> =>
     make({ op: 'given', symbol, read: read as (facts: never) => number }, dimension);
 
-/** Makes the builder of yes-or-no facts of one kind; `text` says in words what is true when it holds. */
+/**
+ * Makes the builder of yes-or-no facts of one kind; `text` says in words what is true when it holds and stands in workings. Where a working
+ * need not say it, `text` is empty and `called` names the fact for lists of formulas.
+ */
 export const flagOf =
   <F>() =>
-  (text: string, read: (facts: F) => boolean): Condition => ({
+  (text: string, read: (facts: F) => boolean, called: string = text): Condition => ({
     op: 'flag',
     text,
+    called,
     read: read as (facts: never) => boolean,
   });
 

@@ -6,6 +6,7 @@ import { join } from 'node:path';
 import { afterAll, describe, expect, test, vi } from 'vitest';
 import { cli } from '../../../api/cli.ts';
 import { VERSION } from '../../../core/check/version.ts';
+import { standards } from '../../../core/standards/index.ts';
 import { LINES_TYPE, post, postJson } from '../ask.ts';
 import { exampleEnd, failingEnd, referringEnd } from '../exampleEnd.ts';
 
@@ -46,6 +47,27 @@ const expectSentence = ({ status, out, err }: Awaited<ReturnType<typeof run>>): 
   expect([status, out]).toEqual([2, '']);
   expect(err).toMatch(/^[^\n]+\.\n$/);
 };
+
+describe('copewright standards', () => {
+  test('lists every standard with the level of its reactions', async () => {
+    const { status, out } = await run('standards');
+    expect(status).toBe(0);
+    for (const { id, title } of Object.values(standards)) expect(out).toMatch(new RegExp(`^${id} .*${title}`, 'm'));
+  });
+
+  test('prints one in full: factors, options, every check with clause, basis and its formula with all branches', async () => {
+    const { status, out } = await run('standards', 'sans-10162-1');
+    expect(status).toBe(0);
+    expect(out).toContain('φ = 0.9, φ_b = 0.8');
+    expect(out).toMatch(/Shear of the full section \(web-gross-shear\); 13\.4\.1\.1, memory; held against published/);
+    expect(out).toMatch(/f_s = 0\.66 f_y where λ_w ≤ 440 √\(5\.34 \/ f_y\)/);
+    expect(out).toMatch(/= 180.000 × 5\.34 \/ λ_w², otherwise/);
+    expect(out).toContain('licensed practice decides');
+    expect(Math.max(...out.split('\n').map(({ length }) => length))).toBeLessThanOrEqual(100);
+  });
+
+  test('names the nearest for one that is not known', async () => expectSentence(await run('standards', 'sans-10162')));
+});
 
 describe('copewright check', () => {
   test('ends with 0 where the end holds, with 1 where it fails or refers', async () => {

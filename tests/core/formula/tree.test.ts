@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { newRun, numberOf } from '../../../core/formula/number.ts';
+import { markShared, newRun, numberOf } from '../../../core/formula/number.ts';
 import {
   atMost,
   constant,
@@ -97,6 +97,7 @@ describe('numbers', () => {
     });
     const shared = step('s', times(2, counted));
     const both = plus(shared, times(3, shared));
+    markShared(both);
     expect(read(both)).toBe(80);
     expect(reads).toBe(1);
     expect(read(both, { ...plate, t: 20 })).toBe(160);

@@ -76,19 +76,29 @@ export const instantaneousCentre = (pattern: Pattern, e: number, curve: BoltCurv
   return { C: balance(pattern, l0, curve).vertical, l0 };
 };
 
-const solved = new Map<string, number>();
 const KEPT = 256;
 
-/** Coefficient C of a pattern and arm; the last few hundred patterns solved are remembered, as schedules repeat them. */
-export const coefficientOf = (n: number, m: number, p: number, q: number, e: number): number => {
-  const key = `${n} ${m} ${p} ${q} ${e}`;
-  const known = solved.get(key);
-  if (known !== undefined) return known;
-  const { C } = instantaneousCentre({ n, m, p, q }, e, metricBoltCurve);
-  if (solved.size >= KEPT) solved.clear();
-  solved.set(key, C);
-  return C;
+/** Coefficient C of a pattern of n rows and m columns, pitch p, gauge q, at arm e; mm. */
+export type Coefficient = (n: number, m: number, p: number, q: number, e: number) => number;
+
+/** Solves groups by one curve; the last few hundred patterns solved are remembered, as schedules repeat them. */
+export const coefficientsBy = (curve: BoltCurve): Coefficient => {
+  const solved = new Map<string, number>();
+  return (n, m, p, q, e) => {
+    const key = `${n} ${m} ${p} ${q} ${e}`;
+    const known = solved.get(key);
+    if (known !== undefined) return known;
+    const { C } = instantaneousCentre({ n, m, p, q }, e, curve);
+    if (solved.size >= KEPT) solved.clear();
+    solved.set(key, C);
+    return C;
+  };
 };
+
+export const coefficientOf: Coefficient = coefficientsBy(metricBoltCurve);
+
+/** Moment that a group alone holds about its centroid over the strength of one bolt, C′ in mm. */
+export const pureMoment = (pattern: Pattern, curve: BoltCurve = boltCurve): number => balance(pattern, 0, curve).moment;
 
 /** C of the bolt group at arm z. */
 const C = step(

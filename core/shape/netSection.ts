@@ -1,0 +1,74 @@
+/** A column of equal holes: level of the first, pitch, number, diameter, mm; levels down from top of steel or from the plate's own top. */
+export interface Holes {
+  readonly first: number;
+  readonly pitch: number;
+  readonly count: number;
+  readonly diameter: number;
+}
+
+/** An I of plain rectangles of which what lies between two levels is left, mm. A level inside the section means that its flange is gone. */
+export interface PlainCut {
+  readonly h: number;
+  readonly b: number;
+  readonly tf: number;
+  readonly tw: number;
+  readonly from: number;
+  readonly to: number;
+}
+
+/** Level at which the i-th hole begins and ends; holes that run into one another count once, what lies outside the section not at all. */
+const holeTop = ({ first, pitch, diameter }: Holes, i: number, before: number): number =>
+  Math.max(first + i * pitch - diameter / 2, before);
+const holeFoot = ({ first, pitch, diameter }: Holes, i: number, most: number): number =>
+  Math.min(first + i * pitch + diameter / 2, most);
+
+/** Elastic modulus of a cut I with a column of holes out of its web, to the farther edge, mm³; 0 where the holes leave nothing. */
+export const netModulus = ({ h, b, tf, tw, from, to }: PlainCut, holes: Holes): number => {
+  let [area, first, second] = [0, 0, 0];
+  const add = (width: number, a: number, z: number): void => {
+    area += width * (z - a);
+    first += (width * (z ** 2 - a ** 2)) / 2;
+    second += (width * (z ** 3 - a ** 3)) / 3;
+  };
+  const [webTop, webFoot] = [from > 0 ? from : tf, to < h ? to : h - tf];
+  if (from === 0) add(b, 0, tf);
+  if (to === h) add(b, h - tf, h);
+  add(tw, webTop, webFoot);
+  let before = webTop;
+  for (let i = 0; i < holes.count; i += 1) {
+    const [a, z] = [holeTop(holes, i, before), holeFoot(holes, i, webFoot)];
+    if (z <= a) continue;
+    add(-tw, a, z);
+    before = z;
+  }
+  if (!(area > 0)) return 0;
+  const centroid = first / area;
+  return Math.max(0, second - first * centroid) / Math.max(centroid - from, to - centroid);
+};
+
+/** Plastic modulus of a plate with a column of holes at their own heights, mm³; 0 where the holes leave nothing. */
+export const netPlasticModulus = (thickness: number, depth: number, holes: Holes): number => {
+  const solid: number[] = [];
+  let [left, before] = [0, 0];
+  for (let i = 0; i <= holes.count; i += 1) {
+    const end = i === holes.count ? depth : Math.min(holeTop(holes, i, before), depth);
+    if (end > before) {
+      solid.push(before, end);
+      left += end - before;
+    }
+    if (i < holes.count) before = Math.max(before, holeFoot(holes, i, depth));
+  }
+  let [missing, axis] = [left / 2, depth];
+  for (let at = 0; at < solid.length; at += 2) {
+    const long = solid[at + 1]! - solid[at]!;
+    if (long >= missing) {
+      axis = solid[at]! + missing;
+      break;
+    }
+    missing -= long;
+  }
+  const upTo = (y: number): number => ((y - axis) * Math.abs(y - axis)) / 2;
+  let modulus = 0;
+  for (let at = 0; at < solid.length; at += 2) modulus += upTo(solid[at + 1]!) - upTo(solid[at]!);
+  return thickness * modulus;
+};

@@ -1,4 +1,5 @@
 import type { Check } from '../check/report.ts';
+import { BAR, columnsOf, isFit, isRow, NAME } from './columns.ts';
 import type { Context } from './context.ts';
 import { PER_V } from './ladderBar.ts';
 import { small, table, WIDTH } from './page.ts';
@@ -26,15 +27,11 @@ export const HEADER = 4;
 export const ROW = 4.05;
 export const MORE = 3.5;
 
-/** Right edges of right-aligned columns, left edges of the others, mm from the left of the window. */
+/** Right edges of right-aligned columns, left edges of the others, mm from the left of the window; the numbers stand between name and bar. */
 export const at = {
   sign: 1.2,
-  name: 4.2,
-  symbol: 52.4,
-  demand: 62.6,
-  resistance: 74.2,
-  unit: 75,
-  bar: 84.6,
+  name: NAME,
+  bar: BAR,
   ratio: 119.2,
   failsAt: 131.6,
   clause: 133.6,
@@ -43,7 +40,6 @@ export const at = {
 } as const;
 /** Where a reason starts that stands in the place of the bar: right of the line at V. */
 export const BESIDE = at.bar + PER_V + 1.2;
-const NAME_WIDTH = 41;
 /** Between clause and basis, mm. */
 const CLAUSE_GAP = 0.9;
 
@@ -68,23 +64,23 @@ const marksOf = (shared: Shared, check: Check): string => {
   return `${check.verified === 'none' ? ' *' : ''}${letter ? ` (${letter})` : ''}`;
 };
 
-const nameOf = ({ pen, words }: Context, shared: Shared, check: Check, governs: boolean): Lines => {
+const nameOf = ({ pen, words }: Context, shared: Shared, check: Check, governs: boolean, width: number): Lines => {
   const marks = marksOf(shared, check);
   const lead = governs ? say.table.governs : '';
   const full = `${lead}${titleOf(check)}${marks}`;
   const style: TextStyle = { ...table, bold: governs };
-  if (pen.width(full, style) <= NAME_WIDTH) return [[plainRun(full)]];
+  if (pen.width(full, style) <= width) return [[plainRun(full)]];
   const short = words.short[check.id] ?? check.title;
-  return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${marks}`)], style, NAME_WIDTH);
+  return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${marks}`)], style, width);
 };
 
-const rowOf = (context: Context, shared: Shared, check: Check): Row => {
+const rowOf = (context: Context, shared: Shared, check: Check, nameWidth: number): Row => {
   const { pen, input } = context;
   const governs = check.id === input.report.governing;
   return {
     kind: 'check',
     check,
-    name: nameOf(context, shared, check, governs),
+    name: nameOf(context, shared, check, governs, nameWidth),
     clause: wrap(pen, [plainRun(check.clause)], small, clauseWidth(context, check)),
     ...reasonOf(context, shared, check),
   };
@@ -110,12 +106,13 @@ export const basisOf = ({ basis, clause }: Check): string => (basis === clause ?
 /** Checks that stand as rows: strength that holds, fails or refers, weakest first; then rules of fit that do not hold. */
 export const rowsOf = (context: Context): Row[] => {
   const { checks } = context.input.report;
-  const told = checks.filter(({ state }) => state === 'holds' || state === 'fails' || state === 'refer');
-  const strength = told.filter(({ id }) => !id.startsWith('fit-'));
-  const fit = told.filter(({ id, state }) => id.startsWith('fit-') && state !== 'holds');
+  const told = checks.filter(isRow);
+  const strength = told.filter((one) => !isFit(one));
+  const fit = told.filter(isFit);
   const heading: Row[] = fit.length > 0 ? [{ kind: 'fit' }] : [];
   const shared = sharedReasons(context);
-  const rows = (of: readonly Check[]): Row[] => of.map((one) => rowOf(context, shared, one));
+  const { nameWidth } = columnsOf(context);
+  const rows = (of: readonly Check[]): Row[] => of.map((one) => rowOf(context, shared, one, nameWidth));
   return [...rows(strength), ...heading, ...rows(fit)];
 };
 
@@ -133,4 +130,4 @@ export const rowsWithin = (rows: readonly Row[], height: number): number => {
 };
 
 /** Rules of fit have no bar. */
-export const hasBar = (row: Row): boolean => row.kind === 'check' && !row.check.id.startsWith('fit-');
+export const hasBar = (row: Row): boolean => row.kind === 'check' && !isFit(row.check);

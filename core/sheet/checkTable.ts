@@ -1,6 +1,6 @@
 import { at, BESIDE, basisOf, type CheckRow, HEADER, hasBar, heightOf, MORE, type Row } from './checkRows.ts';
+import { type Columns, columnsOf, demandText, resistanceText } from './columns.ts';
 import type { Context, Zone } from './context.ts';
-import { limitText } from './fitLimit.ts';
 import { drawBar, PER_V } from './ladderBar.ts';
 import { DOTTED, HAIR, LEFT, NARROW, small, table, WIDE, WIDTH } from './page.ts';
 import type { TextStyle } from './pen.ts';
@@ -14,11 +14,12 @@ export const tableZone = (context: Context, rows: readonly Row[]): Zone => {
   const body = rows.reduce((sum, row) => sum + heightOf(row), 0);
   const draw = (_x: number, y: number): void => {
     const { pen } = context;
-    drawHeader(context, y);
+    const columns = columnsOf(context);
+    drawHeader(context, columns, y);
     let top = y + HEADER;
     rows.forEach((row, i) => {
       if (i > 0) pen.line(LEFT, top, LEFT + WIDTH, top, HAIR, DOTTED);
-      drawRow(context, row, top);
+      drawRow(context, columns, row, top);
       top += heightOf(row);
     });
     const line = LEFT + at.bar + PER_V;
@@ -32,14 +33,14 @@ export const tableZone = (context: Context, rows: readonly Row[]): Zone => {
 const strengthHeight = (rows: readonly Row[]): number =>
   rows.filter(hasBar).reduce((sum, row) => sum + heightOf(row), 0);
 
-const drawHeader = ({ pen, input, numbers }: Context, y: number): void => {
+const drawHeader = ({ pen, input, numbers }: Context, { demand, resistance }: Columns, y: number): void => {
   const base = y + 2.9;
   const right = (x: number, text: string): void => {
     pen.text(LEFT + x, base, text, { ...small, anchor: 'end' });
   };
   pen.text(LEFT + at.name, base, say.table.check, small);
-  right(at.demand - 1.8, say.table.demand);
-  right(at.resistance, say.table.resistance);
+  right(demand, say.table.demand);
+  right(resistance, say.table.resistance);
   const reaction = [...richText('V'), plainRun(` ${numbers.load(input.report.reaction)}`)];
   pen.text(LEFT + at.bar + PER_V, base, reaction, { size: 9, bold: true, anchor: 'middle' });
   right(at.ratio, say.table.ratio);
@@ -49,33 +50,34 @@ const drawHeader = ({ pen, input, numbers }: Context, y: number): void => {
   pen.line(LEFT, y + HEADER, LEFT + WIDTH, y + HEADER, NARROW);
 };
 
-const drawRow = (context: Context, row: Row, top: number): void => {
+const drawRow = (context: Context, columns: Columns, row: Row, top: number): void => {
   const { pen, input } = context;
   if (row.kind === 'fit') {
     pen.line(LEFT, top, LEFT + WIDTH, top, NARROW);
     pen.text(LEFT + at.name, top + 3, say.table.fit, small);
-    pen.text(LEFT + at.demand, top + 3, say.table.limit, { ...small, anchor: 'end' });
-    pen.text(LEFT + at.resistance, top + 3, say.table.given, { ...small, anchor: 'end' });
+    pen.text(LEFT + columns.demand, top + 3, say.table.limit, { ...small, anchor: 'end' });
+    pen.text(LEFT + columns.resistance, top + 3, say.table.given, { ...small, anchor: 'end' });
     return;
   }
   const bold = row.check.id === input.report.governing;
-  drawCells(context, row, top + 3.05, bold);
+  drawCells(context, columns, row, top + 3.05);
   if (bold) for (const y of [top, top + heightOf(row)]) pen.line(LEFT, y, LEFT + WIDTH, y, 0.35);
 };
 
-const drawCells = (context: Context, row: CheckRow, base: number, bold: boolean): void => {
+const drawCells = (context: Context, columns: Columns, row: CheckRow, base: number): void => {
   const { pen, numbers, input } = context;
   const { check, name, clause, beside, below } = row;
+  const bold = check.id === input.report.governing;
   const style: TextStyle = { ...table, bold };
   const right = (x: number, text: string): void => {
     pen.text(LEFT + x, base, text, { ...style, anchor: 'end' });
   };
   drawSign(pen, LEFT + at.sign, base - 1.05, 1, check);
   setLines(pen, LEFT + at.name, base, name, style, MORE);
-  pen.text(LEFT + at.symbol, base, richText(check.symbol), { ...table, anchor: 'end' });
-  right(at.demand, hasBar(row) ? numbers.amount(check.demand, check.unit) : limitText(numbers, check));
-  right(at.resistance, numbers.amount(check.resistance, check.unit));
-  pen.text(LEFT + at.unit, base, check.unit, style);
+  pen.text(LEFT + columns.symbol, base, richText(check.symbol), { ...table, anchor: 'end' });
+  right(columns.demand, demandText(context, check));
+  right(columns.resistance, resistanceText(context, check));
+  pen.text(LEFT + columns.unit, base, check.unit, style);
   if (beside) pen.text(LEFT + BESIDE, base, beside, small);
   else right(at.ratio, numbers.ratio(check.utilisation));
   if (!beside && hasBar(row)) {

@@ -2,7 +2,11 @@ import fc from 'fast-check';
 import { beforeAll, describe, expect, it } from 'vitest';
 import { type Examined, examine } from '../../../core/check/examine.ts';
 import type { Check } from '../../../core/check/report.ts';
+import { closingLines } from '../../../core/sheet/closing.ts';
+import { numbersOf } from '../../../core/sheet/numbers.ts';
 import { sheetPages, sheetPdf } from '../../../core/sheet/sheet.ts';
+import { blockHeight } from '../../../core/sheet/titleBlock.ts';
+import { wordsFor } from '../../../core/words/wordsFor.ts';
 import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
 import { end, examined, fullest, withSheet } from './ends.ts';
 import { boxOf, type FoundBox, type FoundText, pathsOf, textsOf, wholeText } from './readPdf.ts';
@@ -216,6 +220,37 @@ describe('what is too much for one page', () => {
     const bases = pages.flat().filter(({ text }) => ['memory', 'practice', 'research', 'seen'].includes(text));
     expect(bases.filter(({ size }) => Math.abs(size - 8) < 0.05).length).toBe(count);
     expect(wholeText(pages[0]!)).toContain('on sheet 2');
+  });
+
+  it('numbers of six digits take no room of their neighbours: the columns are as wide as they', async () => {
+    const whole = examined(fullest);
+    const checks = whole.report.checks.map((one) => ({
+      ...one,
+      demand: one.demand === null ? null : 1000 * one.demand,
+      resistance: one.resistance === null ? null : 1000 * one.resistance,
+    }));
+    const pages = await pagesOf({ ...whole, report: { ...whole.report, checks } });
+    expect(wholeText(pages[0]!)).toMatch(/\d{3}\s\d{3}\.\d/);
+    for (const page of pages) expect(covering(page)).toEqual([]);
+  });
+
+  it('cautions of several lines are set in full, above what else stands at the foot', async () => {
+    const whole = examined({ ...fullest, sheet: { paper: 'Letter' } });
+    const pen = await sheetPages(whole, { workings: 'all' });
+    const context = { pen, input: whole, numbers: numbersOf('mm-kN', '.'), words: wordsFor(whole.report.words) };
+    const long = {
+      ...context,
+      words: { ...context.words, cautions: Array.from({ length: 9 }, () => 'Ask the designer first.') },
+    };
+    const block = { code: null, lost: true };
+    const lines = closingLines(long, 180, true);
+    expect(lines.length).toBeGreaterThan(1);
+    expect(lines.map((line) => line.map(({ text }) => text).join('')).join(' ')).toBe(
+      `${'Ask the designer first. '.repeat(9)}No square code: the file has the data.`,
+    );
+    // 3.65 mm for each line more than one.
+    const more = blockHeight(long, block) - blockHeight(context, { code: null, lost: false });
+    expect(more).toBeCloseTo(3.65 * (lines.length - 1), 6);
   });
 
   it('a formula that no number from outside has confirmed is marked, and the mark explained', async () => {

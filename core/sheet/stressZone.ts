@@ -12,6 +12,8 @@ const LEADING = 3.6;
 const LABELS = 3.7;
 /** Between ordinates, mm of paper. */
 const ORDINATES = 2.4;
+/** Between a profile and the number of its peak, mm. */
+const PEAK = 1;
 const style: TextStyle = { ...body, family: 'narrow' };
 
 /** Standard's own limit and the reaction that reaches it, where the standard has one. */
@@ -50,7 +52,7 @@ export const stressProfiles = (context: Context, width: number, scales: readonly
   const captionLines = Math.max(...captions.map((lines) => lines.length));
   const depth = Math.max(...sections.map(({ profile }) => profile.at(-1)![0]));
   const most = Math.max(...sections.map(({ peakStress }) => peakStress), 1e-9);
-  const label = pen.width(numbers.amount(most, 'MPa'), style) + 1.5;
+  const label = pen.width(numbers.amount(most, 'MPa'), style) + PEAK + 0.5;
   const perStress = (Math.min(column, 31) - label - 2) / most;
   return scales.map((scale): Zone => {
     const toPaper = (level: number): number => fromSystem(level, '1,0', numbers.units) / scale;
@@ -100,8 +102,9 @@ const drawProfile = (
   const mean = left + section.meanStress * perStress;
   pen.line(mean, first.y, mean, last.y, NARROW, [2.2, 0.8]);
   const peak = { x: left + section.peakStress * perStress, y: top + toPaper(section.peakAt) };
-  pen.line(left - 1.2, peak.y, peak.x + 0.6, peak.y, HAIR, [3, 0.7, 0.3, 0.7]);
-  pen.text(peak.x + 0.8, peak.y + 1.1, numbers.amount(section.peakStress, 'MPa'), style);
+  // No stroke before the number, which would read as a minus sign.
+  pen.line(left - 1.2, peak.y, peak.x, peak.y, HAIR, [3, 0.7, 0.3, 0.7]);
+  pen.text(peak.x + PEAK, peak.y + 1.1, numbers.amount(section.peakStress, 'MPa'), style);
 };
 
 /** Fine ordinates that show the area as stress. */

@@ -61,6 +61,8 @@ const plain = (name: string): string =>
 export const boltStrength = (propertyClass: string, diameter: number): number | undefined => {
   if (!metric.includes(diameter)) return undefined;
   switch (propertyClass) {
+    case '4.6':
+      return 400;
     case '4.8':
       return 420;
     case '8.8':

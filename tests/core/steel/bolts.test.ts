@@ -56,8 +56,9 @@ describe('a bolt size', () => {
 });
 
 describe('the tensile strength of ISO 898-1 property classes', () => {
-  it('is 420 MPa for 4.8 and 1040 MPa for 10.9 at every size', () => {
+  it('is 400 MPa for 4.6, 420 MPa for 4.8 and 1040 MPa for 10.9 at every size', () => {
     for (const diameter of [12, 16, 20, 22, 24, 27, 30, 36]) {
+      expect(boltStrength('4.6', diameter)).toBe(400);
       expect(boltStrength('4.8', diameter)).toBe(420);
       expect(boltStrength('10.9', diameter)).toBe(1040);
     }

@@ -13,6 +13,7 @@ import type { Standard } from '../../core/standards/standard.ts';
 import { isNoRule, treesOf } from '../../core/standards/standard.ts';
 import { goodEnds } from '../support/published.ts';
 import { sheetRow } from '../support/spreadsheet.ts';
+import { underStandard } from '../support/underStandard.ts';
 import { type Contestant, type Figure, interleaved } from './timing.ts';
 
 const ENDS = 1000;
@@ -20,7 +21,7 @@ const ENDS = 1000;
 /** A schedule of ends, each with its own reaction, pitch and notch. Invented. */
 const schedule = (standard: Standard): End[] => {
   const { end } = goodEnds().find(({ name }) => name === 'example')!;
-  const read = readEnd({ ...end, standard: standard.id });
+  const read = readEnd(underStandard(end, standard));
   if ('faults' in read) throw new Error('the example end is refused');
   return Array.from({ length: ENDS }, (_, i) => {
     const one = structuredClone(read.end);

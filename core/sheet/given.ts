@@ -9,7 +9,8 @@ import { plainRun, setLines, wrap } from './textBlock.ts';
 type Row = readonly [label: string, value: string];
 
 const { labels } = say;
-const LABEL = 14;
+/** Between the labels and what they name, mm. */
+const AIR = 1.5;
 const LEADING = 3.68;
 const HEADING = 4.4;
 
@@ -131,18 +132,26 @@ const otherRows = (context: Context): Row[] => {
   return rows;
 };
 
+/** A symbol and its number stay on one line. */
+const kept = (value: string): string => value.replace(/(?<![\p{L}\d_])(\p{L}(?:_\w+)?′?) (?=\d)/gu, '$1\u00a0');
+
 /** The data that the checks stand on; `width` mm wide. */
 export const givenZone = (context: Context, width: number): Zone => {
   const { pen, numbers, input } = context;
   const style: TextStyle = { ...body, family: 'narrow' };
-  const rows = [
+  const given = [
     ...beamRows(context),
     copeRow(context),
     ...boltRows(context),
     ...plateRows(context),
     ...loadRows(context),
     ...otherRows(context),
-  ].map(([label, value]) => ({ label, lines: wrap(pen, richText(value, 'prose'), style, width - LABEL) }));
+  ];
+  const inset = AIR + Math.max(...given.map(([label]) => pen.width(label, style)));
+  const rows = given.map(([label, value]) => ({
+    label,
+    lines: wrap(pen, richText(kept(value), 'prose'), style, width - inset),
+  }));
   const count = rows.reduce((sum, { lines }) => sum + lines.length, 0);
   const draw = (x: number, y: number): void => {
     const note = ` ${say.unitNote(numbers.units, input.end.sheet?.decimal ?? '.')}`;
@@ -150,7 +159,7 @@ export const givenZone = (context: Context, width: number): Zone => {
     let at = y + HEADING;
     for (const { label, lines } of rows) {
       pen.text(x, at + 2.9, label, style);
-      setLines(pen, x + LABEL, at + 2.9, lines, style, LEADING);
+      setLines(pen, x + inset, at + 2.9, lines, style, LEADING);
       at += lines.length * LEADING;
     }
   };

@@ -9,7 +9,7 @@ export const N = step('N', times(n, m));
 export const yMax = step('y_max', over(times(minus(n, 1), p), 2));
 
 /** Half the width of the pattern, mm. */
-const xMax = step('x_max', over(times(minus(m, 1), q), 2));
+export const xMax = step('x_max', over(times(minus(m, 1), q), 2));
 
 const ySquares = over(times(m, n, minus(squared(n), 1), squared(p)), 12);
 const xSquares = over(times(n, m, minus(squared(m), 1), squared(q)), 12);

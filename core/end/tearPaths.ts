@@ -44,7 +44,9 @@ export const along = (t: Tree<Length>, edge: Tree<Length>) => ({
   next: { L: q, Ln: step('L_n', minus(q, dn)) },
 });
 export type AlongTear = ReturnType<typeof along>;
-export const webTearAlong: AlongTear = along(tw, pick([[besideShortCope, eRow]], eEnd));
+/** Web beside an outer row's first hole: to the beam's end, or to the face of a short cope that cuts into the row. mm */
+export const rowEnd: Tree<Length> = pick([[besideShortCope, eRow]], eEnd);
+export const webTearAlong: AlongTear = along(tw, rowEnd);
 export const plateTearAlong: AlongTear = along(tp, ex);
 
 /** A block pulled along the beam by a tie force: two planes along the outer rows, tension between them. mm2 */

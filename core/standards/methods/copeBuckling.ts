@@ -33,18 +33,32 @@ export const methodLimits = (c: Tree<Length>, dc: Tree<Length>, share: number): 
   limit(atMost(dc, times(share, h)), 'cope-deeper-than-method'),
 ];
 
+const ratio: Tree<Pure> = over(tee.depth, tee.c);
+
+/** Of the tee behind a top cope: f for the stress that grows along the cope, k of a plate with one free edge. */
+export const copeFactor = step(
+  'f',
+  pick([[atMost(tee.c, h), over(times(2, tee.c), h)]], plus(1, over(tee.c, h))),
+  source,
+);
+export const plateFactor = step(
+  'k',
+  pick([[atMost(tee.c, tee.depth), times(2.2, power(ratio, 1.65))]], times(2.2, ratio)),
+  source,
+);
+
 /** Elastic buckling stress of the tee behind a top cope, its cut edge in compression, MPa. */
-export const teeStress = (E: Tree<Stress>): Tree<Stress> => {
-  const { c, depth } = tee;
-  const f = step('f', pick([[atMost(c, h), over(times(2, c), h)]], plus(1, over(c, h))), source);
-  const ratio: Tree<Pure> = over(depth, c);
-  const k = step('k', pick([[atMost(c, depth), times(2.2, power(ratio, 1.65))]], times(2.2, ratio)), source);
-  return step(
+export const teeStress = (E: Tree<Stress>): Tree<Stress> =>
+  step(
     'F_cr',
-    times(over(times(squared(pi), E), times(12, minus(1, squared(nu)))), squared(over(tw, depth)), f, k),
+    times(
+      over(times(squared(pi), E), times(12, minus(1, squared(nu)))),
+      squared(over(tw, tee.depth)),
+      copeFactor,
+      plateFactor,
+    ),
     source,
   );
-};
 
 /** Moment that a section of modulus W, mm3, carries at a stress, N mm: a standard's own factor on the method. */
 export type Resist = (stress: Tree<Stress>, W: Tree<'3,0'>) => Tree<Moment>;
@@ -59,8 +73,8 @@ const singleCope = (E: Tree<Stress>, fy: Tree<Stress>, resist: Resist): Way => (
   limits: [...common, ...methodLimits(tee.c, tee.dc, 0.5)],
 });
 
-const longer = step('c', most(ct, cb), undefined, 'the longer cope');
-const deeper = step('d_c', most(dt, db), undefined, 'the deeper cope');
+export const longer = step('c', most(ct, cb), undefined, 'the longer cope');
+export const deeper = step('d_c', most(dt, db), undefined, 'the deeper cope');
 const fd = step('f_d', minus(3.5, times(7.5, over(deeper, h))), source);
 
 /** Elastic buckling stress of the web between two copes, a narrow strip that buckles sideways, MPa. */
@@ -68,7 +82,7 @@ export const rectangleStress = (E: Tree<Stress>): Tree<Stress> =>
   step('F_cr', times(over(times(0.62, pi, E, squared(tw)), times(longer, rectangle.depth)), fd), source);
 
 /** Two copes so deep that the method has no stress left. */
-const nothingLeft: Limit = {
+export const nothingLeft: Limit = {
   when: not(below(0, fd)),
   reason: 'cope-deeper-than-method',
   always: true,

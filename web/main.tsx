@@ -11,7 +11,7 @@ import { begin } from './state/edits.ts';
 import { textOf } from './state/entry.ts';
 import { isLink } from './state/isLink.ts';
 import { readKept, startKeeping } from './state/keep.ts';
-import { loadTheRest } from './state/later.ts';
+import { loadTheRest, tryAgain } from './state/later.ts';
 
 /** After the piece stands, what the first view does without is fetched, ms. */
 const ONCE_IT_STANDS = 500;
@@ -42,6 +42,7 @@ effect(() => {
 listenForKeys();
 watchPointer();
 render(<Bench />, document.getElementById('bench')!);
+addEventListener('online', tryAgain);
 addEventListener('hashchange', () => void openLink());
 void openLink();
 const waiting = effect(() => {

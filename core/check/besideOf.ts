@@ -8,7 +8,7 @@ import { fromSystem, toSystem, unitOf } from '../units/systems.ts';
 import { filled } from '../words/words.ts';
 import { wordsFor } from '../words/wordsFor.ts';
 import type { ExaminedNumbers } from './examined.ts';
-import { numbersOf, regionOf, said } from './examineNumbers.ts';
+import { listedIds, numbersOf, regionOf, said } from './examineNumbers.ts';
 import { planOf } from './plan.ts';
 import type { Check, Note, Numbers, SaidFault } from './report.ts';
 import { resolve } from './resolve.ts';
@@ -86,7 +86,7 @@ export const besideOf = (examined: ExaminedNumbers): Beside | { readonly faults:
   const path = 'sheet.beside.standard';
   const standard = Object.hasOwn(standards, asked.standard) ? standards[asked.standard] : undefined;
   if (!standard) {
-    return said([fault('unknown-standard', path, asked.standard, nearest(asked.standard, Object.keys(standards), 3))]);
+    return said([fault('unknown-standard', path, asked.standard, nearest(asked.standard, listedIds, 3))]);
   }
   if (standard.id === examined.end.standard) return said([fault('same-standard', path, asked.standard, null)]);
   const found = besideUnder(examined, standard, asked.reaction);

@@ -1,4 +1,5 @@
 import '../standards/index.ts';
+import '../steel/findSection.ts';
 import { complete } from './complete.ts';
 import type { Examination } from './examined.ts';
 import { examineNumbers } from './examineNumbers.ts';
@@ -7,7 +8,7 @@ export type { Examination, Examined } from './examined.ts';
 export { said } from './examineNumbers.ts';
 
 /**
- * Checks an end in full, every standard at hand; `working` adds the working of every check. Never throws for what a user wrote: what cannot be computed comes back
+ * Checks an end in full, every standard and section at hand; `working` adds the working of every check. Never throws for what a user wrote: what cannot be computed comes back
  * as faults.
  */
 export const examine = (input: unknown, { working = true } = {}): Examination => {

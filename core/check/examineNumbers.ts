@@ -4,6 +4,7 @@ import { readEnd } from '../end/readEnd.ts';
 import { type End, plyOf } from '../end/schema.ts';
 import { testOf } from '../formula/number.ts';
 import { standards } from '../standards/known.ts';
+import { listed } from '../standards/listed.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findGrade } from '../steel/grades.ts';
 import { nearest } from '../steel/nearest.ts';
@@ -24,6 +25,9 @@ import type { Note, Numbers, SaidFault } from './report.ts';
 import { type Resolved, resolve } from './resolve.ts';
 import { sectionStresses } from './sectionStresses.ts';
 import { VERSION } from './version.ts';
+
+/** Names that an unknown standard may stand for. */
+export const listedIds: readonly string[] = listed.map(({ id }) => id);
 
 /** Whose words an end is spoken of in: those it asks for, else those of the standard's market. */
 export const regionOf = ({ sheet }: Pick<End, 'sheet'>, { region }: Pick<Standard, 'region'>): Region =>
@@ -120,9 +124,7 @@ export const examineNumbers = (
   const { end } = read;
   const standard = Object.hasOwn(standards, end.standard) ? standards[end.standard] : undefined;
   if (!standard) {
-    return said([
-      fault('unknown-standard', 'standard', end.standard, nearest(end.standard, Object.keys(standards), 3)),
-    ]);
+    return said([fault('unknown-standard', 'standard', end.standard, nearest(end.standard, listedIds, 3))]);
   }
   const found = resolve(end, standard);
   if ('faults' in found) return said(found.faults, wordsFor(regionOf(end, standard)));

@@ -15,7 +15,7 @@ import type { Section } from '../shape/section.ts';
 import { type BoltSteel, namedIn, type Steel, type Steels } from '../standards/materials.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findBoltSize } from '../steel/bolts.ts';
-import { findSection } from '../steel/findSection.ts';
+import { findSection } from '../steel/knownSections.ts';
 import { nearest } from '../steel/nearest.ts';
 import { fromSystem } from '../units/systems.ts';
 

@@ -59,6 +59,9 @@ test('after one load the bench works without a network: it loads, checks, opens 
 
   await bench.page.reload();
   await bench.drawing.waitFor();
+  // Some browsers forget over a reload that they were put off the network; the server is gone either way.
+  await context.setOffline(false);
+  await context.setOffline(true);
   await bench.page.getByText('No network: all checks still work').waitFor();
   await bench.size('Reaction, kN').focus();
   await bench.page.keyboard.type('175');

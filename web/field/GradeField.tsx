@@ -1,6 +1,6 @@
 import type { TargetedEvent, TargetedKeyboardEvent } from 'preact';
 import { entry } from '../state/bench.ts';
-import { choose } from '../state/edits.ts';
+import { choose } from '../state/choose.ts';
 import { textOf } from '../state/entry.ts';
 import { faultAt, isAssumed } from '../state/fieldText.ts';
 import { Field } from './Field.tsx';

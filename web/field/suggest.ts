@@ -1,4 +1,5 @@
-import { findSection, listSections } from '../../core/steel/findSection.ts';
+import { findSection, listSections } from '../../core/steel/knownSections.ts';
+import { otherFamilies } from '../state/sections.ts';
 
 const MOST = 8;
 
@@ -7,7 +8,8 @@ interface Known {
   readonly plain: string;
 }
 
-let known: readonly Known[] | undefined;
+let known: readonly Known[] = [];
+let whole = false;
 
 const plain = (text: string): string =>
   text
@@ -15,8 +17,12 @@ const plain = (text: string): string =>
     .replace(/[×*]/g, 'X')
     .replace(/[^A-Z0-9.]/g, '');
 
+/** The families at hand; all of them once they have come. */
 const names = (): readonly Known[] => {
-  known ??= listSections().flatMap(({ designations }) => designations.map((name) => ({ name, plain: plain(name) })));
+  const all = otherFamilies.value !== null;
+  if (known.length > 0 && whole === all) return known;
+  whole = all;
+  known = listSections().flatMap(({ designations }) => designations.map((name) => ({ name, plain: plain(name) })));
   return known;
 };
 

@@ -1,12 +1,12 @@
 import { computed, effect } from '@preact/signals';
 import { announce } from '../state/announce.ts';
-import { missing, shown } from './shown.ts';
+import { missing, shown, stale } from './shown.ts';
 import { incompleteLine, type VerdictLine, verdictLine } from './verdict.ts';
 
-/** The verdict on what stands in the fields; null before anything does. */
+/** The verdict on what stands in the fields; null before anything does, and while rules or tables that it names are on their way. */
 export const verdictShown = computed<VerdictLine | null>(() => {
   if (missing.value.length > 0) return incompleteLine(missing.value);
-  return shown.value ? verdictLine(shown.value.report) : null;
+  return shown.value && !stale.value ? verdictLine(shown.value.report) : null;
 });
 
 /** The verdict in sentences. */

@@ -1,6 +1,6 @@
 import { Choice } from '../field/Choice.tsx';
 import { Field } from '../field/Field.tsx';
-import { standard } from '../state/bench.ts';
+import { listing } from '../state/bench.ts';
 import { isShare } from './isShare.ts';
 
 const levels = [
@@ -21,7 +21,7 @@ export const LoadFields = () => (
       path="level"
       label="Level"
       options={levels}
-      empty={standard.value ? `${standard.value.level} (assumed)` : 'assumed'}
+      empty={listing.value ? `${listing.value.level} (assumed)` : 'assumed'}
     />
     <Field path="tie" label="Tie force" empty="none, assumed" />
   </>

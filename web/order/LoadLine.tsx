@@ -1,4 +1,4 @@
-import { entry, standard } from '../state/bench.ts';
+import { entry, listing } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { unitAt } from '../state/fieldText.ts';
 import { isShare } from './isShare.ts';
@@ -20,7 +20,7 @@ const Sentence = () => {
           <Value path="reaction" missing="reaction?" /> {unitAt('reaction')}
         </>
       )}{' '}
-      up at the support face, <Value path="level" text={level || (standard.value?.level ?? 'level')} />
+      up at the support face, <Value path="level" text={level || (listing.value?.level ?? 'level')} />
       {level === '' && ' (assumed)'}; {noTie ? <Value path="tie" text="no" /> : <Value path="tie" />}
       {noTie ? '' : ` ${unitAt('tie')}`} tie.
     </>

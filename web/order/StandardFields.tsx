@@ -1,13 +1,14 @@
-import { standards } from '../../core/standards/known.ts';
+import { listed } from '../../core/standards/listed.ts';
 import { optionName, optionValue } from '../../core/words/optionWords.ts';
 import { Choice } from '../field/Choice.tsx';
 import { standard } from '../state/bench.ts';
+import { titled } from '../state/rules.ts';
 
-const titled = Object.values(standards).map(({ id, title, edition }) => ({ value: id, label: `${title}:${edition}` }));
+const all = listed.map((one) => ({ value: one.id, label: titled(one) }));
 
 export const StandardFields = () => (
   <>
-    <Choice path="standard" label="Standard" options={titled} />
+    <Choice path="standard" label="Standard" options={all} />
     {Object.entries(standard.value?.options ?? {}).map(([key, values]) => (
       <Choice
         key={key}

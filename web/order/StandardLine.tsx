@@ -1,18 +1,21 @@
 import { optionName, optionValue } from '../../core/words/optionWords.ts';
-import { entry, standard } from '../state/bench.ts';
+import { entry, listing } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { titled } from '../state/rules.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { Value } from './Value.tsx';
 
 const chosenOptions = (): string[] =>
-  Object.keys(standard.value?.options ?? {}).filter((key) => textOf(entry.value, `options.${key}`) !== '');
+  Object.keys(entry.value.texts).flatMap((path) =>
+    path.startsWith('options.') ? [path.slice('options.'.length)] : [],
+  );
 
 const Sentence = () => {
-  const known = standard.value;
+  const known = listing.value;
   const keys = chosenOptions();
   return (
     <>
-      <Value path="standard" missing="standard?" {...(known && { text: `${known.title}:${known.edition}` })} />;{' '}
+      <Value path="standard" missing="standard?" {...(known && { text: titled(known) })} />;{' '}
       {keys.length === 0
         ? 'its usual options (assumed)'
         : keys.map((key, at) => (

@@ -1,8 +1,9 @@
 import { Verdict } from '../ladder/index.ts';
 import { FieldLink } from '../order/FieldLink.tsx';
-import { entry, standard } from '../state/bench.ts';
+import { entry, listing } from '../state/bench.ts';
 import { carried } from '../state/carried.ts';
 import { textOf } from '../state/entry.ts';
+import { titled } from '../state/rules.ts';
 import { beginEmpty } from './beginEmpty.ts';
 
 /** Longer marks are set smaller, so that they stay on their line. */
@@ -21,7 +22,7 @@ const Mark = () => {
 
 const Job = () => {
   const job = textOf(entry.value, 'sheet.job');
-  const known = standard.value;
+  const known = listing.value;
   return (
     <div class="bench-job">
       <p class="job-name">
@@ -31,7 +32,7 @@ const Job = () => {
       </p>
       <p class="job-line">
         <FieldLink path="standard" kind="value">
-          {known ? `${known.title}:${known.edition}` : textOf(entry.value, 'standard') || 'standard?'}
+          {known ? titled(known) : textOf(entry.value, 'standard') || 'standard?'}
         </FieldLink>
         <button type="button" class="button" onClick={() => void carried(({ issueSheet }) => issueSheet())}>
           Issue sheet

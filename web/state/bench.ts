@@ -3,16 +3,18 @@ import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import { examineNumbers } from '../../core/check/examineNumbers.ts';
 import type { SaidFault } from '../../core/check/report.ts';
 import type { CheckName } from '../../core/end/checkNames.ts';
-import { standards } from '../../core/standards/known.ts';
+import type { Listed } from '../../core/standards/listed.ts';
 import type { Standard } from '../../core/standards/standard.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
-import { commonwealth } from '../../core/words/commonwealth.ts';
 import { faultSentences } from '../../core/words/faults.ts';
+import { type Region, regions } from '../../core/words/regions.ts';
 import { faultText, type Words } from '../../core/words/words.ts';
 import { wordsFor } from '../../core/words/wordsFor.ts';
+import { type Awaited, awaitedOf } from './awaited.ts';
 import { endOf } from './endOf.ts';
 import { type Entry, emptyEntry, textOf } from './entry.ts';
 import { filledFrom } from './filledFrom.ts';
+import { listedAs, rulesOf } from './rules.ts';
 import { newTimeline, type Timeline } from './timeline.ts';
 import { inTradeOrder } from './tradeOrder.ts';
 
@@ -25,17 +27,32 @@ export const entry = computed<Entry>(() => timeline.value.entry);
 /** The unit system of the whole end. */
 export const units = computed<UnitSystem>(() => entry.value.units);
 
-/** The design standard in force; undefined where the entry names one that this version does not have. */
+/** What is listed of the standard that the entry names; undefined where this version does not have it. */
+export const listing = computed<Listed | undefined>(() => listedAs(textOf(entry.value, 'standard')));
+
+/** The rules of the standard in force; undefined while they are on their way, and where there are none. */
 export const standard = computed<Standard | undefined>(() => {
-  const id = textOf(entry.value, 'standard');
-  return Object.hasOwn(standards, id) ? standards[id] : undefined;
+  const rules = rulesOf(textOf(entry.value, 'standard'));
+  return typeof rules === 'object' ? rules : undefined;
 });
 
-/** Words of the standard's market. */
-export const words = computed<Words>(() => (standard.value ? wordsFor(standard.value.region) : commonwealth));
+/** Whose trade words are spoken where the end does not say. */
+export const marketRegion = computed<Region>(() => listing.value?.region ?? 'commonwealth');
+
+/** Whose trade words are spoken. */
+export const region = computed<Region>(() => {
+  const said = textOf(entry.value, 'sheet.words');
+  return regions.find((one) => one === said) ?? marketRegion.value;
+});
+
+/** Everything that is said to people, in those words. */
+export const words = computed<Words>(() => wordsFor(region.value));
 
 /** The end as the JSON of a file, as far as its fields can be read. */
 export const input = computed(() => endOf(entry.value));
+
+/** What the end names and the bench has not yet; null where everything is at hand. */
+export const awaited = computed<Awaited | null>(() => awaitedOf(input.value.input));
 
 /** The last end that could be examined, so that drawing and ladder stay while a field is half typed; null before the first. */
 export const lastGood = signal<ExaminedNumbers | null>(null);
@@ -54,9 +71,11 @@ const unknownNames = (end: Readonly<Record<string, unknown>>, gaps: readonly str
 
 /**
  * The end looked at in full, or the faults that stand in the way, in the order of the trade: texts that cannot be read and what the core
- * finds, each with its path and its sentence.
+ * finds, each with its path and its sentence. None while something that the end names is on its way.
  */
 export const examination = computed<ReturnType<typeof examineNumbers>>(() => {
+  const waits = awaited.value;
+  if (waits) return { faults: waits === 'coming' ? [] : [waits] };
   const { input: end, faults: misread } = input.value;
   const found = examineNumbers(end);
   if (misread.length === 0 && 'examined' in found) return found;
@@ -74,7 +93,7 @@ export const examination = computed<ReturnType<typeof examineNumbers>>(() => {
   };
 });
 
-/** Faults of the end in force; empty where it could be examined. */
+/** Faults of the end in force; empty where it could be examined, and while something that it names is on its way. */
 export const faults = computed<readonly SaidFault[]>(() =>
   'faults' in examination.value ? examination.value.faults : [],
 );

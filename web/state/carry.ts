@@ -1,7 +1,7 @@
 import { complete } from '../../core/check/complete.ts';
 import type { Examined } from '../../core/check/examined.ts';
 import { assumedValues } from './assumedValues.ts';
-import { demanded, examination } from './bench.ts';
+import { awaited, demanded, examination } from './bench.ts';
 import { onceConfirmed } from './confirming.ts';
 import { replace } from './edits.ts';
 import { entryOf } from './entryOf.ts';
@@ -13,6 +13,10 @@ import { type Opened, openedFile, openedLink } from './opened.ts';
 const whole = (wanted: string, { working = false } = {}): Examined | undefined => {
   const found = examination.value;
   if ('examined' in found) return complete(found.examined, { working });
+  if (awaited.value === 'coming') {
+    refuse(`${wanted} waits for rules or sections that are still on their way. Try again in a moment.`);
+    return undefined;
+  }
   demanded.value = true;
   refuse(`${wanted} needs a complete end: what is missing stands at the top of the order`);
   return undefined;

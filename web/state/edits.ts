@@ -1,45 +1,32 @@
-import { standards } from '../../core/standards/known.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
-import { chosen, demanded, editing, entry, faults, input, lastGood, timeline } from './bench.ts';
-import { type Entry, textOf, withProposals, withText } from './entry.ts';
+import { chosen, demanded, editing, entry, faults, input, lastGood, timeline, words } from './bench.ts';
+import { type Entry, withText } from './entry.ts';
 import { notice, refuse } from './notice.ts';
-import { proposalsFor } from './proposals.ts';
 import { stepName } from './stepName.ts';
 import { steppedValue } from './steppedValue.ts';
 import { switchUnits } from './switchUnits.ts';
 import { advance, newTimeline, seal, stepBack, stepForward } from './timeline.ts';
+import { withSpacing } from './withSpacing.ts';
 
-const make = (after: Entry, path: string, typing: boolean): void => {
+/** Puts another entry in force, as a step named by what it did at a path; while `typing`, as part of the step before on the same field. */
+export const make = (after: Entry, path: string, typing: boolean): void => {
   notice.value = null;
-  timeline.value = advance(timeline.value, after, (before) => stepName(before, after, path), typing ? path : undefined);
+  timeline.value = advance(
+    timeline.value,
+    after,
+    (before) => stepName(words.value, before, after, path),
+    typing ? path : undefined,
+  );
 };
-
-const proposed = (after: Entry, path: string, text: string): Entry =>
-  withProposals(after, proposalsFor({ entry: after, last: lastGood.value }, path, text));
 
 /** Puts what is typed at a path; all typing in one field until `leave` is one step of the timeline. */
 export const write = (path: string, text: string): void => make(withText(entry.value, path, text), path, true);
 
-/**
- * Chooses a value from a list, as one step; `also` holds what goes with it, by path. Parts that are switched on get proposed values, marked as
- * assumed. A standard that works at the other level of load empties the reaction: it must be asked for again.
- */
-export const choose = (path: string, value: string, also: Readonly<Record<string, string>> = {}): void => {
-  const level = (id: string) => (Object.hasOwn(standards, id) ? standards[id]?.level : undefined);
-  const turned = path === 'standard' && level(value) !== level(textOf(entry.value, path));
-  const others = turned ? { reaction: '', 'reaction.ofWebShear': '', level: '' } : also;
-  const after = Object.entries({ ...others, [path]: value }).reduce(
-    (it, [one, text]) => withText(it, one, text),
-    entry.value,
-  );
-  make(proposed(after, path, value), path, false);
-};
-
 /** Closes the step of typing in a field. What a new row or column needs is proposed here, not while its number is half typed. */
 export const leave = (path: string): void => {
   if (editing.value === path) editing.value = null;
-  const completed = proposed(entry.value, path, textOf(entry.value, path));
-  const joined = advance(timeline.value, completed, (before) => stepName(before, completed, path), path);
+  const completed = withSpacing(entry.value, path);
+  const joined = advance(timeline.value, completed, (before) => stepName(words.value, before, completed, path), path);
   timeline.value = seal(completed.assumed.length === entry.value.assumed.length ? timeline.value : joined);
 };
 
@@ -63,7 +50,7 @@ export const step = (path: string, direction: 1 | -1, big = false): void => {
   const text = steppedValue(entry.value, path, direction, big);
   if (text === undefined) return;
   editing.value = null;
-  make(proposed(withText(entry.value, path, text), path, text), path, true);
+  make(withSpacing(withText(entry.value, path, text), path), path, true);
 };
 
 export const undo = (): void => {

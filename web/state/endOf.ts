@@ -1,4 +1,4 @@
-import type { Fault } from '../../core/end/fault.ts';
+import { type Fault, fault } from '../../core/end/fault.ts';
 import { type Entry, textOf } from './entry.ts';
 import { isFault, readField } from './readField.ts';
 
@@ -6,6 +6,8 @@ import { isFault, readField } from './readField.ts';
 export interface EntryRead {
   readonly input: Readonly<Record<string, unknown>>;
   readonly faults: readonly Fault[];
+  /** Why the second standard had to be left out. */
+  readonly besideFaults: readonly Fault[];
 }
 
 type Tree = { [key: string]: unknown };
@@ -105,9 +107,27 @@ const reaction = (reader: EntryReader): unknown =>
   reader.by('reaction') === 'share' ? { ofWebShear: reader.number('reaction.ofWebShear') } : reader.number('reaction');
 
 const wordsUnder = (reader: EntryReader, path: string): Tree | undefined => {
-  const found = reader.under(path).sort();
+  const found = reader
+    .under(path)
+    .filter((one) => !one.startsWith('sheet.beside.'))
+    .sort();
   if (found.length === 0) return undefined;
   return Object.fromEntries(found.map((one) => [one.slice(path.length + 1), reader.words(one)]));
+};
+
+const isForce = (value: number): boolean => value >= 0 && value <= 1e6;
+
+/** The second standard, and why its reaction cannot be taken: the first is told all the same. */
+const beside = (reader: EntryReader): { readonly beside?: Tree; readonly faults: readonly Fault[] } => {
+  const at = 'sheet.beside';
+  const standard = reader.words(`${at}.standard`);
+  if (standard === undefined) return { faults: [] };
+  const reading = readField(reader.entry, `${at}.reaction`);
+  if (isFault(reading)) return { faults: [reading] };
+  if (reading !== undefined && !isForce(reading.value)) {
+    return { faults: [fault('too-small', `${at}.reaction`, reading.value, { least: 0 })] };
+  }
+  return { beside: { standard, reaction: reading?.value }, faults: [] };
 };
 
 /** Leaves out what is not there. */
@@ -118,9 +138,15 @@ const pruned = (tree: Tree): Tree =>
       .map(([key, value]) => [key, typeof value === 'object' && value !== null ? pruned(value as Tree) : value]),
   );
 
+const sheet = (reader: EntryReader, second: Tree | undefined): Tree | undefined => {
+  const words = wordsUnder(reader, 'sheet');
+  return words || second ? { ...words, beside: second } : undefined;
+};
+
 /** The end that an entry describes. A text that cannot be read is a fault, and its field is left out; so no such end may be used. */
 export const endOf = (entry: Entry): EntryRead => {
   const reader = new EntryReader(entry);
+  const second = beside(reader);
   const input = pruned({
     mark: reader.words('mark'),
     standard: reader.words('standard'),
@@ -138,7 +164,7 @@ export const endOf = (entry: Entry): EntryRead => {
     piece: reader.words('piece'),
     end: reader.words('end'),
     quantity: reader.number('quantity'),
-    sheet: wordsUnder(reader, 'sheet'),
+    sheet: sheet(reader, second.beside),
   });
-  return { input, faults: reader.faults };
+  return { input, faults: reader.faults, besideFaults: second.faults };
 };

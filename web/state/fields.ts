@@ -71,6 +71,7 @@ export const numberFields: Readonly<Record<string, QuantityField | CountField>> 
   'support.topOfSteel': size(5, Number.NEGATIVE_INFINITY),
   'support.otherReaction': force(),
   quantity: count(100000),
+  'sheet.beside.reaction': force(),
 };
 
 function plyFields(ply: string): Record<string, QuantityField> {

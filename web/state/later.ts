@@ -1,15 +1,24 @@
 import { signal } from '@preact/signals';
 
-/** A part of the program that the first view does without; null until it is there. Reading it asks for it. */
+/** A part of the program that the first view does without. */
 export interface Later<T> {
+  /** Null until it is there. Reading it asks for it. */
   readonly value: T | null;
+  /** It was asked for and could not be loaded. */
+  readonly failed: boolean;
 }
 
-const asks: (() => void)[] = [];
+interface Asked {
+  readonly ask: () => void;
+  readonly again: () => void;
+}
+
+const parts: Asked[] = [];
 
 /** Names a part that is loaded when it is first read, or once the page stands. Where loading fails, the next reading asks again. */
 export const later = <T>(load: () => Promise<T>): Later<T> => {
   const part = signal<{ readonly it: T } | null>(null);
+  const failed = signal(false);
   let asked = false;
   const ask = (): void => {
     if (asked) return;
@@ -20,19 +29,31 @@ export const later = <T>(load: () => Promise<T>): Later<T> => {
       },
       () => {
         asked = false;
+        failed.value = true;
       },
     );
   };
-  asks.push(ask);
+  const again = (): void => {
+    failed.value = false;
+  };
+  parts.push({ ask, again });
   return {
     get value() {
       ask();
       return part.value?.it ?? null;
+    },
+    get failed() {
+      return failed.value;
     },
   };
 };
 
 /** Loads every part that was named, so that it is there when it is wanted. */
 export const loadTheRest = (): void => {
-  for (const ask of asks) ask();
+  for (const { ask } of parts) ask();
+};
+
+/** Lets what could not be loaded be asked for again. */
+export const tryAgain = (): void => {
+  for (const { again } of parts) again();
 };

@@ -66,7 +66,7 @@ const ownSizes = (known: Known): Proposals => {
   };
 };
 
-/** What the bench proposes when `value` is put at `path`. Everything proposed is marked as assumed until someone touches it. */
+/** What the bench proposes when `value` is chosen at `path`. Everything proposed is marked as assumed until someone touches it. */
 export const proposalsFor = (known: Known, path: string, value: string): Proposals => {
   const facts = known.last?.facts;
   switch (`${path}=${value}`) {
@@ -93,14 +93,6 @@ export const proposalsFor = (known: Known, path: string, value: string): Proposa
     case 'joint.kind=fin-plate':
       return { ...otherPly(known, 'joint.ply', 'joint.plate'), 'joint.weld.leg': size(known)(8, '5/16') };
     default:
-      return spacing(known, path, value);
+      return {};
   }
-};
-
-/** A second row or column needs its distance. */
-const spacing = (known: Known, path: string, value: string): Proposals => {
-  if (!(Number(value) > 1)) return {};
-  if (path === 'joint.bolts.rows') return { 'joint.bolts.pitch': size(known)(70, '3') };
-  if (path === 'joint.bolts.columns') return { 'joint.bolts.gauge': size(known)(70, '3') };
-  return {};
 };

@@ -21,6 +21,8 @@ const fields: readonly (readonly [prefix: string, line: LineName])[] = [
   ['tie', 'load'],
   ['standard', 'standard'],
   ['options', 'standard'],
+  ['sheet.beside', 'standard'],
+  ['sheet.words', 'standard'],
   ['mark', 'sheet'],
   ['sheet', 'sheet'],
   ['piece', 'sheet'],

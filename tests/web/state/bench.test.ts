@@ -1,6 +1,7 @@
-import { beforeEach, describe, expect, test } from 'vitest';
+import { beforeAll, beforeEach, describe, expect, test, vi } from 'vitest';
 import { INCH } from '../../../core/units/systems.ts';
 import * as state from '../../../web/state/bench.ts';
+import { choose } from '../../../web/state/choose.ts';
 import { demoEntry } from '../../../web/state/demo.ts';
 import * as edits from '../../../web/state/edits.ts';
 import { emptyEntry } from '../../../web/state/entry.ts';
@@ -8,8 +9,11 @@ import * as fieldText from '../../../web/state/fieldText.ts';
 import { entryFrom } from '../../../web/state/keep.ts';
 import { notice } from '../../../web/state/notice.ts';
 import { openedFile, openedLink, openedText } from '../../../web/state/opened.ts';
+import { otherFamilies } from '../../../web/state/sections.ts';
 
-const bench = { ...state, ...edits, ...fieldText };
+const bench = { ...state, ...edits, ...fieldText, choose };
+
+beforeAll(() => vi.waitFor(() => expect(otherFamilies.value).toBe(true)));
 
 beforeEach(() => {
   bench.begin(demoEntry());

@@ -1,6 +1,7 @@
 import { beforeEach, describe, expect, test } from 'vitest';
 import { assumedValues } from '../../../web/state/assumedValues.ts';
 import { entry, lastGood } from '../../../web/state/bench.ts';
+import { choose } from '../../../web/state/choose.ts';
 import { confirmAll, confirmShown, onceConfirmed } from '../../../web/state/confirming.ts';
 import { demoEntry } from '../../../web/state/demo.ts';
 import * as edits from '../../../web/state/edits.ts';
@@ -16,7 +17,7 @@ beforeEach(() => {
 describe('what the bench puts in', () => {
   test('it is named with its value and unit until it is touched or confirmed', () => {
     expect(said()).toEqual([]);
-    edits.choose('bottom', 'on');
+    choose('bottom', 'on');
     expect(said()).toEqual([
       'Length of the bottom notch 90 mm',
       'Depth of the bottom notch 25 mm',
@@ -28,12 +29,12 @@ describe('what the bench puts in', () => {
   });
 
   test('a part that is off, or of another joint, is not spoken of', () => {
-    edits.choose('bottom', 'on');
-    edits.choose('bottom', 'none');
+    choose('bottom', 'on');
+    choose('bottom', 'none');
     expect(said()).toEqual([]);
-    edits.choose('joint.kind', 'web-bolts');
+    choose('joint.kind', 'web-bolts');
     expect(said()).toContain('Thickness of the ply 10 mm');
-    edits.choose('joint.kind', 'fin-plate');
+    choose('joint.kind', 'fin-plate');
     expect(said()).toEqual([]);
   });
 
@@ -50,7 +51,7 @@ describe('what the bench puts in', () => {
     onceConfirmed(act);
     expect([done, confirmShown.value]).toEqual([1, false]);
 
-    edits.choose('bottom', 'on');
+    choose('bottom', 'on');
     const { report } = lastGood.value!;
     onceConfirmed(act);
     expect([done, confirmShown.value]).toEqual([1, true]);
@@ -62,7 +63,7 @@ describe('what the bench puts in', () => {
   });
 
   test('undoing what put it in and doing it again asks again', () => {
-    edits.choose('bottom', 'on');
+    choose('bottom', 'on');
     edits.confirm(['bottom.length', 'bottom.depth', 'bottom.radius']);
     edits.undo();
     edits.redo();

@@ -1,4 +1,5 @@
 import { describe, expect, test } from 'vitest';
+import { commonwealth } from '../../../core/words/commonwealth.ts';
 import { emptyEntry, withText } from '../../../web/state/entry.ts';
 import { stepName } from '../../../web/state/stepName.ts';
 import { advance, newTimeline, seal, stepBack, stepForward, type Timeline } from '../../../web/state/timeline.ts';
@@ -7,7 +8,7 @@ const start = newTimeline(emptyEntry('sans-10162-1', 'mm-kN'));
 
 const typed = (timeline: Timeline, path: string, text: string): Timeline => {
   const after = withText(timeline.entry, path, text);
-  return advance(timeline, after, (before) => stepName(before, after, path), path);
+  return advance(timeline, after, (before) => stepName(commonwealth, before, after, path), path);
 };
 
 const names = ({ done }: Timeline): string[] => done.map(({ name }) => name);

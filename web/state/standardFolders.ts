@@ -1,0 +1,4 @@
+import type { Standard } from '../../core/standards/standard.ts';
+
+/** How the rules of each standard but the one of the first view are fetched, by its id. */
+export const standardFolders: Readonly<Record<string, () => Promise<Standard>>> = {};

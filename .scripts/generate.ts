@@ -125,7 +125,10 @@ const between = (text: string, name: string, body: string): string => {
 const read = (path: string): string =>
   existsSync(new URL(path, root)) ? readFileSync(new URL(path, root), 'utf8') : '';
 
-const folders: Readonly<Record<string, string>> = { 'sans-10162-1': 'sans10162' };
+const folders: Readonly<Record<string, string>> = {
+  'sans-10162-1': 'sans10162',
+  'as-4100': 'as4100',
+};
 const files: [path: string, text: string][] = [
   ...Object.values(standards).map((standard): [string, string] => [
     `core/standards/${folders[standard.id]}/verified.ts`,

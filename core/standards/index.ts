@@ -1,7 +1,9 @@
+import { as4100 } from './as4100/index.ts';
 import { admit, standards } from './known.ts';
 import { sans10162 } from './sans10162/index.ts';
 
 admit(sans10162);
+admit(as4100);
 
 /** Every design standard, by its id. */
 export { standards };

@@ -20,7 +20,10 @@ const entry = <Id extends string>(
 ): Listed & { readonly id: Id } => ({ id, title, edition, level, region });
 
 /** Every design standard that an end can name, in the order of the lists. */
-export const listed = [entry('sans-10162-1', 'SANS 10162-1', '2011', 'factored', 'commonwealth')] as const;
+export const listed = [
+  entry('sans-10162-1', 'SANS 10162-1', '2011', 'factored', 'commonwealth'),
+  entry('as-4100', 'AS 4100', '2020', 'factored', 'commonwealth'),
+] as const;
 
 export type StandardId = (typeof listed)[number]['id'];
 

@@ -23,6 +23,9 @@ export interface Strength {
   readonly fu: number;
 }
 
+/** End of a band, mm, that stops short of its limit: the limit itself belongs to the next band. */
+export const under = (limit: number): number => limit * (1 - 1e-12);
+
 /** Structural steels of EN 10025-2 Table 7, the same in SANS 50025-2: minimum values, not the rounded ones of design standards. */
 const en10025 = {
   source: 'EN 10025-2 Table 7 (SANS 50025-2)',

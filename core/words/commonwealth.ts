@@ -93,6 +93,8 @@ export const commonwealth: Words = {
     'flange-left': 'the notch is shallower than the flange',
     'channel-cope': 'a notched channel bends about no principal axis',
     'slender-cut-web': 'the cut web is too slender: k_v = 5.34 needs both edges held',
+    'slender-cut': 'the cut web may buckle before it yields in shear',
+    'web-below-least': 'the web is thinner than the least for an unstiffened web',
     'cope-longer-than-method': 'the notch is longer than the method covers, 2 h',
     'cope-deeper-than-method': 'the notch is deeper than the method covers',
     'weld-leg-below-least': 'the weld leg is below the least for this thickness',
@@ -113,7 +115,8 @@ export const commonwealth: Words = {
     static: 'Static load: no fatigue, seismic or fire.',
     bearing: 'Bolts in bearing.',
     'no-axial': 'No axial force with V; a tie force acts alone.',
-    support: "Support not rotating, reaction at its face; the support's own strength is not checked.",
+    support:
+      'Support not rotating, reaction at its face; its own strength is not checked, but where a check of it stands in the list.',
     square: 'Square end, cut as drawn.',
     material: 'Material as named.',
     'channel-shear-centre': 'Reaction assumed through the shear centre of the channel.',
@@ -132,13 +135,17 @@ export const commonwealth: Words = {
     'strengths-carried': 'Strengths carried over from {from}: web {web}, plate {plate}, bolts {bolts}.',
     'least-reaction':
       'The reaction given, {given}, is below the least action that the standard has joints designed for: {value} was used.',
+    'least-action':
+      'The standard has joints carry the lesser of 0.15 of the shear of the full section and 40 kN at least: a way of failing below that fails at every reaction.',
+    'weld-category': 'Welds of category SP are assumed: so the specification must ask. Option weld: GP takes 0.60.',
+    'tie-in-web-only': 'Under the tie force bolts and web are checked; plate, weld and support are not.',
     'reaction-from-share': 'The reaction is {share} of the shear of the full section: {value}.',
     'section-read-as': '{label} ({list}) was read as {value}.',
     'two-column-block':
       "With two columns this form's nominal strength equals the present US one, but φ 0.90 stands where that takes 0.75: the design value is a fifth higher. Option web-block: cautious takes 0.3.",
     'weld-slimmer-than-plate': 'The weld is sized for V z; a leg below 0.625 t_p cannot make the plate yield first.',
     'support-outline':
-      "Of the support, the section's outline serves for clearances and its thickness for the weld's least leg; its own strength and a beam opposite are not checked.",
+      "Of the support, the section's outline serves for clearances and its thickness for the weld's least leg; its own strength is not checked, but where a check of it stands in the list, and a beam opposite never.",
     'strength-given': '{field}: strength as given, not from a table.',
     'memory-grade': 'The strengths of {value} are from memory of an older standard: confirm them.',
   },

@@ -21,6 +21,12 @@ const optionWords: Readonly<Record<string, string>> = {
   plastic: 'plastic',
   standard: 'as the clause',
   cautious: 'cautious',
+  uniform: 'even tension',
+  'non-uniform': 'uneven tension',
+  hand: 'sheared or cut by hand',
+  machine: 'cut by machine',
+  SP: 'structural purpose',
+  GP: 'general purpose',
   sheared: 'sheared',
   cut: 'flame cut or sawn',
 };

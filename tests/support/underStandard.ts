@@ -17,6 +17,8 @@ export const underStandard = (end: Json, standard: Standard): Json => {
     const ply = rest.joint[name] as Json | undefined;
     if (ply) ply.grade = steel(ply.grade, plates);
   }
+  const support = rest.support as Json | undefined;
+  if (support?.grade) support.grade = steel(support.grade, sections);
   const bolts = rest.joint.bolts as Json;
   if (typeof bolts.grade === 'string' && !boltGrades.includes(bolts.grade)) bolts.grade = { fu: 830 };
   return { ...rest, standard: standard.id };

@@ -1,4 +1,6 @@
 import type { Standard } from '../../core/standards/standard.ts';
 
 /** How the rules of each standard but the one of the first view are fetched, by its id. */
-export const standardFolders: Readonly<Record<string, () => Promise<Standard>>> = {};
+export const standardFolders: Readonly<Record<string, () => Promise<Standard>>> = {
+  'as-4100': async () => (await import('../../core/standards/as4100/index.ts')).as4100,
+};

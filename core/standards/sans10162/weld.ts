@@ -1,24 +1,17 @@
-import { hp, leg, tp, ts, V, Xu, z } from '../../end/given.ts';
-import { atMost, below, constant, most, over, pick, plus, root, squared, step, times } from '../../formula/tree.ts';
+import { hp, leg, V, Xu, z } from '../../end/given.ts';
+import { over, plus, root, squared, step, times } from '../../formula/tree.ts';
+import { leastLeg, legBelow } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiW } from './factors.ts';
 
 const source = { clause: '13.13.2.2', basis: 'memory' } as const;
-const mm = (length: number) => constant('s_min', length, '1,0');
-
-/** Thicker of the parts joined, as far as the support's is told. */
-const thicker = step('t', most(tp, ts), source);
-
 /** Least leg by the thicker part, mm. */
-export const leastLeg = step(
-  's_min',
-  pick(
-    [
-      [atMost(thicker, constant('12 mm', 12, '1,0')), mm(5)],
-      [atMost(thicker, constant('20 mm', 20, '1,0')), mm(6)],
-    ],
-    mm(8),
-  ),
+const least = leastLeg(
+  [
+    [12, 5],
+    [20, 6],
+  ],
+  8,
   source,
 );
 
@@ -40,7 +33,7 @@ export const weld: StrengthRule = {
         'elastic line: shear, and bending at its ends',
       ),
       resistance: filletLine,
-      limits: [{ when: below(leg, leastLeg), reason: 'weld-leg-below-least', always: false }],
+      limits: [legBelow(least)],
     },
   ],
 };

@@ -47,6 +47,24 @@ const reactionOf = ({ reaction, units }: End, plan: Plan, facts: Facts): number 
     ? fromSystem(reaction, '0,1', units)
     : reaction.ofWebShear * grossShearOf(evaluate(plan, facts, 0));
 
+/** What is to be said of the grades named: from memory, or not listed by the standard; each once. */
+const gradeNotes = (end: End, { materials }: Standard): { readonly code: string; readonly name: string }[] => {
+  const found = new Map<string, { code: string; name: string }>();
+  const add = (code: string, name: string) => found.set(`${code} ${name}`, { code, name });
+  for (const [grade, steels] of [
+    [end.beam.grade, materials.sections],
+    [plyOf(end.joint).grade, materials.plates],
+  ] as const) {
+    const name = typeof grade === 'string' ? steels.named(grade) : undefined;
+    if (name === undefined) continue;
+    const own = steels.noteOf?.(name);
+    if (own) add(own, name);
+    const known = steels.noteOf ? undefined : findGrade(name);
+    if (known && 'basis' in known && known.basis === 'memory') add('memory-grade', name);
+  }
+  return [...found.values()];
+};
+
 const notesOf = (
   end: End,
   plan: Plan,
@@ -73,11 +91,7 @@ const notesOf = (
   ] as const) {
     if (typeof grade !== 'string') say('strength-given', { field: capital(fieldName(words, path)) }, path);
   }
-  for (const grade of new Set([end.beam.grade, plyOf(end.joint).grade])) {
-    if (typeof grade !== 'string') continue;
-    const found = findGrade(grade);
-    if ('basis' in found && found.basis === 'memory') say('memory-grade', { value: found.name });
-  }
+  for (const { code, name } of gradeNotes(end, plan.standard)) say(code, { value: name });
   for (const { code, when } of plan.standard.notes) if (testOf(when)(resolved.facts as never)) say(code);
   return notes;
 };

@@ -11,6 +11,8 @@ export interface Steels {
   readonly named: (written: string) => string | undefined;
   /** Strengths of a grade in an element of this thickness, mm; undefined outside the grade's range. */
   readonly strengthAt: (grade: string, thickness: number) => Steel | undefined;
+  /** Code of a note (core/words) to print for a grade: its strengths are from memory, or the standard does not list it. */
+  readonly noteOf?: (grade: string) => string | undefined;
 }
 
 /** Strengths of a bolt, MPa. */

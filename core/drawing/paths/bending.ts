@@ -2,13 +2,14 @@ import type { Area, Point, Stroke } from '../drawing.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import { type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
-import { cutOf, faceOf } from './shear.ts';
+import { copeRupture, cutOf, faceOf } from './shear.ts';
 
 /** Width of the stress figure over its depth. */
 const WIDE = 0.14;
 
 /** V at arm e_c bends what is left at the cope's face. */
 export const copeBending: PathMaker = (it, words, of) => {
+  if (of.startsWith('rupture')) return copeRupture(it, words, of);
   const cut = cutOf(it, of);
   if (cut === null || cut.shape === null) return null;
   const [top, foot] = faceOf(it, cut);
@@ -21,10 +22,11 @@ export const copeBending: PathMaker = (it, words, of) => {
   });
 };
 
-/** V at arm z bends the plate, at the middle of the bolts. */
-export const plateBending: PathMaker = (it, words) => {
+/** V bends the plate, at the middle of the bolts; where a standard names a way of it, at the first column. */
+export const plateBending: PathMaker = (it, words, of) => {
   const { left, top, bottom } = plateBox(it);
-  const x = left + it.z;
+  const reach = of === '' ? it.z : it.z1;
+  const x = left + reach;
   const [head, foot] = [
     { x, y: top },
     { x, y: bottom },
@@ -33,7 +35,7 @@ export const plateBending: PathMaker = (it, words) => {
   return path(`The ${words.plate} bends; its edges yield first.`, {
     strokes: [torn(head, foot), ...arm.strokes],
     areas: stressFigure(head, foot, (top + bottom) / 2),
-    tags: [tag(...arm.ends, `arm ${length(it.z, words.units)}`)],
+    tags: [tag(...arm.ends, `arm ${length(reach, words.units)}`)],
     fields: ['setback', 'joint.endDistance', plateField(it, 'topEdge'), plateField(it, 'bottomEdge')],
   });
 };

@@ -70,7 +70,32 @@ export const plateNetTension: PathMaker = (it, words) => {
   return netLine(it, words, { top, foot: bottom, name: words.plate, how: 'is pulled apart', in: 'net in tension' });
 };
 
+/** What a coped section bends at where its holes tear: the column inside the cope farthest from the support. */
+export const copeRupture: PathMaker = (it, words, of) => {
+  const both = of.endsWith('rectangle');
+  const column = both ? Math.min(it.mTop, it.mBottom) : Math.max(it.mTop, it.mBottom);
+  if (column === 0) return null;
+  const top = it.mTop >= column ? it.dt : 0;
+  const foot = it.mBottom >= column ? it.h - it.db : it.h;
+  return netLine(it, words, { column: column - 1, top, foot, name: 'web', how: 'bends until it tears', in: 'net' });
+};
+
+/** Pulled apart through the depth that is left, before the bolts. */
+export const webGrossTension: PathMaker = (it, words) => {
+  const x = columnX(it, 0) / 2;
+  const [top, foot] = [
+    { x, y: it.dt },
+    { x, y: it.h - it.db },
+  ];
+  return path('The web yields in tension.', {
+    strokes: [torn(top, foot)],
+    tags: [tag(top, foot, `${length(it.ho, words.units)} in tension`)],
+    fields: ['top.depth', 'bottom.depth'],
+  });
+};
+
 interface Net {
+  readonly column?: number;
   readonly top: number;
   readonly foot: number;
   readonly name: string;
@@ -78,8 +103,8 @@ interface Net {
   readonly in: string;
 }
 
-const netLine = (it: Facts, words: DrawingWords, { top, foot, name, how, in: said }: Net): FailurePath => {
-  const x = columnX(it, 0);
+const netLine = (it: Facts, words: DrawingWords, { column = 0, top, foot, name, how, in: said }: Net): FailurePath => {
+  const x = columnX(it, column);
   const r = it.d0 / 2;
   const edges = [top, ...Array.from({ length: it.n }, (_, i) => [rowY(it, i) - r, rowY(it, i) + r]).flat(), foot];
   const strokes: Stroke[] = [];

@@ -6,14 +6,15 @@ import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
 import { block, type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
 
-/** Two planes beside the bolts: `up` to the cut edge beside every column inside the cope, or `along` the last row to the beam's end. */
+/** Two planes beside the bolts: `up` to the cut edge beside every column inside the cope (of the `first row` alone, or of all), or `along` the last row to the beam's end. */
 export const webTearout: PathMaker = (it, words, of) => {
   if (of === 'along') {
     return along(it, words, { from: columnX(it, 0), edge: 0, name: 'web', field: 'joint.endDistance' });
   }
   if (it.mTop === 0 || it.dt === 0) return null;
   const fields = ['joint.firstRow', 'top.depth', 'joint.bolts.pitch'];
-  return upright(it, words, { columns: it.mTop, from: it.yn, edge: it.dt, name: 'web', fields });
+  const from = of === 'first row' ? it.y1 : it.yn;
+  return upright(it, words, { columns: it.mTop, from, edge: it.dt, name: 'web', fields });
 };
 
 /** In the plate: `down` to its bottom edge beside every column, or `along` the last row to its free edge. */

@@ -6,7 +6,7 @@ import type { DrawingWords } from '../words.ts';
 import { platePulled, webPulled } from './block.ts';
 import { blackBolts, halfMoon } from './bolts.ts';
 import { type PathMaker, path, tag } from './pathMaker.ts';
-import { plateNetTension, webNetTension } from './shear.ts';
+import { plateNetTension, webGrossTension, webNetTension } from './shear.ts';
 import { weld } from './weld.ts';
 
 /** The tie force pulls the beam away from the support: the parts that hold it, each by itself. */
@@ -47,6 +47,7 @@ const ways: Readonly<Record<string, PathMaker>> = {
   'block, web': webPulled,
   'block, plate': platePulled,
   'net tension, web': webNetTension,
+  'gross tension, web': webGrossTension,
   'net tension, plate': plateNetTension,
   weld,
 };

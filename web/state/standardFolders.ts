@@ -2,5 +2,7 @@ import type { Standard } from '../../core/standards/standard.ts';
 
 /** How the rules of each standard but the one of the first view are fetched, by its id. */
 export const standardFolders: Readonly<Record<string, () => Promise<Standard>>> = {
+  'aisc-360-lrfd': async () => (await import('../../core/standards/aisc360/index.ts')).aisc360Lrfd,
+  'aisc-360-asd': async () => (await import('../../core/standards/aisc360/index.ts')).aisc360Asd,
   'as-4100': async () => (await import('../../core/standards/as4100/index.ts')).as4100,
 };

@@ -54,8 +54,8 @@ const publishedRow = (
   one: ReturnType<typeof compared>[number],
 ): string => {
   const { expectation, ours } = one;
-  const { check, row, field, of, value, unit, within, sum, why } = expectation;
-  const what = [check, of, row, field].filter(Boolean).join(', ');
+  const { check, row, field, of, way, value, unit, within, sum, why } = expectation;
+  const what = [check, of ?? way, row, field].filter(Boolean).join(', ');
   const difference = value === 0 ? '' : `${(((ours - value) / value) * 100).toFixed(2)} %`;
   return `| ${cell(what)} | ${figure(value)} ${unit} | ${figure(ours)} | ${difference} | ±${significant(within, 3)}: ${cell(why)} | ${standing} | ${cell(says)}${sum ? `; ${cell(sum)}` : ''} | ${cell(source)} |`;
 };
@@ -127,6 +127,7 @@ const read = (path: string): string =>
 
 const folders: Readonly<Record<string, string>> = {
   'sans-10162-1': 'sans10162',
+  'csa-s16': 'csaS16',
   'as-4100': 'as4100',
 };
 const files: [path: string, text: string][] = [

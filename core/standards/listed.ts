@@ -22,6 +22,7 @@ const entry = <Id extends string>(
 /** Every design standard that an end can name, in the order of the lists. */
 export const listed = [
   entry('sans-10162-1', 'SANS 10162-1', '2011', 'factored', 'commonwealth'),
+  entry('csa-s16', 'CSA S16', '2019', 'factored', 'north-america'),
   entry('as-4100', 'AS 4100', '2020', 'factored', 'commonwealth'),
 ] as const;
 

@@ -5,6 +5,8 @@ export interface Expectation {
   readonly check: string;
   /** Part of the check, where it has several. */
   readonly of?: string;
+  /** A way that need not govern, by name: the resistance of that way is compared. */
+  readonly way?: string;
   /** Number of the check compared: `resistance` where absent. */
   readonly field?: 'demand' | 'resistance' | 'reactionAtFailure' | 'utilisation';
   /** Or the value of a row of its working, by symbol. */

@@ -2,6 +2,7 @@ import type { Standard } from '../../core/standards/standard.ts';
 
 /** How the rules of each standard but the one of the first view are fetched, by its id. */
 export const standardFolders: Readonly<Record<string, () => Promise<Standard>>> = {
+  'csa-s16': async () => (await import('../../core/standards/csaS16/index.ts')).csaS16,
   'aisc-360-lrfd': async () => (await import('../../core/standards/aisc360/index.ts')).aisc360Lrfd,
   'aisc-360-asd': async () => (await import('../../core/standards/aisc360/index.ts')).aisc360Asd,
   'as-4100': async () => (await import('../../core/standards/as4100/index.ts')).as4100,

@@ -19,34 +19,36 @@ import type { StrengthRule } from '../standard.ts';
 
 const source = { clause: 'US bar form', basis: 'research' } as const;
 
-const lambda = step(
-  'λ',
-  over(times(hp, root(over(inMPa(fyp), 6.895))), times(10, tp, root(plus(475, times(280, squared(over(hp, z1))))))),
-  source,
-);
-
 /** Share of its yield moment that a rectangular bar of depth h_p, thickness t_p and free length z_1 reaches: published US form. */
-export const barFactor = step(
-  'Q',
-  pick(
-    [
-      [atMost(lambda, 0.7), constant('1', 1)],
-      [atMost(lambda, 1.41), minus(1.34, times(0.486, lambda))],
-    ],
-    over(1.3, squared(lambda)),
-  ),
-  source,
-);
+export const barFactor = (fy: Tree<Stress>): Tree<Pure> => {
+  const lambda = step(
+    'λ',
+    over(times(hp, root(over(inMPa(fy), 6.895))), times(10, tp, root(plus(475, times(280, squared(over(hp, z1))))))),
+    source,
+  );
+  return step(
+    'Q',
+    pick(
+      [
+        [atMost(lambda, 0.7), constant('1', 1)],
+        [atMost(lambda, 1.41), minus(1.34, times(0.486, lambda))],
+      ],
+      over(1.3, squared(lambda)),
+    ),
+    source,
+  );
+};
 
 /** A plate so short that it cannot buckle: z_1 <= t_p/0.15. */
 export const shortPlate: Gate = { when: atMost(z1, over(tp, 0.15)), reason: 'short-plate' };
 
 /**
  * Buckling of a long plate between weld and first bolt column: published US form for a rectangular bar, no clause of the standard.
- * `resist` puts the standard's factor on Q f_y and the elastic modulus.
+ * `resist` puts the standard's factor on Q f_y and the elastic modulus; `fy` is the plate's yield strength in the standard's own symbol.
  */
 export const plateBuckling = (
   resist: (Q: Tree<Pure>, fy: Tree<Stress>, W: Tree<'3,0'>) => Tree<Moment>,
+  fy: Tree<Stress> = fyp,
 ): StrengthRule => ({
   source,
   ways: [
@@ -55,7 +57,7 @@ export const plateBuckling = (
       symbol: 'V z_1',
       load: 'V',
       demand: step('M', times(V, z1), source),
-      resistance: step('M_r', resist(barFactor, fyp, over(times(tp, squared(hp)), 6)), source),
+      resistance: step('M_r', resist(barFactor(fy), fy, over(times(tp, squared(hp)), 6)), source),
       off: [shortPlate],
     },
   ],

@@ -1,0 +1,70 @@
+import { elasticForce } from '../../end/boltGroup.ts';
+import { oneBolt, wideHole } from '../../end/gates.ts';
+import { d, flag, m, n, p, q, tp, tw } from '../../end/given.ts';
+import { centreForce } from '../../end/instantaneousCentre.ts';
+import { below, constant, minus, over, pick, squared, step, type Tree, times } from '../../formula/tree.ts';
+import type { Force, Length, Stress } from '../../units/dimension.ts';
+import type { StrengthRule } from '../standard.ts';
+import { phiB, phiBr } from './factors.ts';
+import { Fu, Fub, Fup } from './given.ts';
+
+const shear = { clause: '13.12.1.2 c', basis: 'seen' } as const;
+const bearing = { clause: '13.12.1.2 a', basis: 'seen' } as const;
+const byCentre = flag(
+  'option bolt-group: instantaneous-centre',
+  (f) => f.options['bolt-group'] === 'instantaneous-centre',
+);
+const threadsIn = flag('threads in the shear plane', (f) => f.threadsIn);
+
+const area = step('A_b', over(times(constant('π', Math.PI), squared(d)), 4));
+const shank = times(0.6, phiB, area, Fub);
+const plain = pick([[threadsIn, times(shank, 0.7)]], shank);
+
+/** One bolt in one plane, in a joint of the given length: 0.70 where threads lie in it, 0.50/0.60 in joints of 760 mm and more. */
+const boltResistance = (length: Tree<Length>): Tree<Force> =>
+  pick(
+    [[below(step('L', length), constant('760 mm', 760, '1,0')), step('V_r', plain, shear)]],
+    step('V_r', times(step('V_1', plain, shear), over(0.5, 0.6)), shear, 'long joint, L ≥ 760 mm'),
+  );
+
+/** Along the rows under V, along the columns under a tie force. */
+export const boltInShear = boltResistance(times(minus(n, 1), p));
+export const boltTied = boltResistance(times(minus(m, 1), q));
+
+/** Bolts in shear, CSA S16:19 cl. 13.12.1.2 c): shank area, 0.70 with threads in the plane, less in long joints. */
+export const boltShear: StrengthRule = {
+  source: shear,
+  ways: [
+    {
+      of: '',
+      symbol: 'R_max',
+      load: 'V',
+      demand: pick([[byCentre, centreForce]], elasticForce),
+      resistance: boltInShear,
+      unbounded: oneBolt,
+    },
+  ],
+};
+
+/** Bearing at one bolt in a round hole, cl. 13.12.1.2 a). N */
+export const bearingOn = (t: Tree<Length>, Fu: Tree<Stress>): Tree<Force> =>
+  step('B_r', times(3, phiBr, t, d, Fu), bearing);
+
+/** The force is the elastic one under either option. */
+const rule = (t: Tree<Length>, Fu: Tree<Stress>): StrengthRule => ({
+  source: bearing,
+  ways: [
+    {
+      of: '',
+      symbol: 'R_max',
+      load: 'V',
+      demand: elasticForce,
+      resistance: bearingOn(t, Fu),
+      unbounded: oneBolt,
+      limits: [wideHole],
+    },
+  ],
+});
+
+export const webBearing = rule(tw, Fu);
+export const plateBearing = rule(tp, Fup);

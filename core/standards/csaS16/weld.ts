@@ -1,0 +1,47 @@
+import { flag, hp, leg, V, Xu, z } from '../../end/given.ts';
+import { least, over, pick, plus, root, squared, step, times } from '../../formula/tree.ts';
+import { leastLeg, legBelow } from '../methods/leastLeg.ts';
+import type { StrengthRule } from '../standard.ts';
+import { phiW } from './factors.ts';
+import { Fup, Fus } from './given.ts';
+
+const source = { clause: '13.13.2.2', basis: 'seen' } as const;
+const memory = { clause: '13.13.2.2', basis: 'memory' } as const;
+
+/** Least leg by the thicker part, mm. */
+const leastLegSize = leastLeg(
+  [
+    [12, 5],
+    [20, 6],
+  ],
+  8,
+  memory,
+);
+
+const supportTold = flag("the support's grade is told", (f) => f.fus > 0);
+
+/** Strength of the parts joined beside the weld, MPa: of the plate, and of the support where it is told. */
+const base = step('F_u', pick([[supportTold, least(Fup, Fus)]], Fup), memory, 'parts joined');
+
+/** Strength of one fillet along its length, N/mm: the weaker of the throat and of the leg in the parts joined, θ = 0, M_w = 1. */
+export const filletLine = step('v_r', times(0.67, phiW, leg, least(over(Xu, root(2)), base)), source);
+
+/** Two upright fillets of the plate's depth under V and V z, elastic line, CSA S16:19 cl. 13.13.2.2. */
+export const weld: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: '',
+      symbol: 'v',
+      load: 'V',
+      demand: step(
+        'v',
+        root(plus(squared(over(V, times(2, hp))), squared(over(times(6, V, z), times(2, squared(hp)))))),
+        source,
+        'elastic line: shear, and bending at its ends',
+      ),
+      resistance: filletLine,
+      limits: [legBelow(leastLegSize)],
+    },
+  ],
+};

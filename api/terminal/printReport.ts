@@ -3,7 +3,7 @@ import { limitText } from '../../core/sheet/fitLimit.ts';
 import { type Numbers, numbersOf } from '../../core/sheet/numbers.ts';
 import { sheetWords as say } from '../../core/sheet/sheetWords.ts';
 import { titleOf } from '../../core/sheet/verdictSentence.ts';
-import type { Words } from '../../core/words/words.ts';
+import { shortOf, type Words } from '../../core/words/words.ts';
 import { wordsFor } from '../../core/words/wordsFor.ts';
 import { type Column, type Row, setColumns } from './columns.ts';
 import { printWorking } from './printWorking.ts';
@@ -43,7 +43,7 @@ const sizesOf = (check: Check, numbers: Numbers): string => {
 const rowOf = ({ report, numbers, words }: Context, check: Check): Row => {
   const { id, state, unit, clause, basis, utilisation, reactionAtFailure, verified, reasonText } = check;
   const lead = id === report.governing ? say.table.governs : '';
-  const title = titleOf({ ...check, title: words.short[id] ?? check.title });
+  const title = titleOf({ ...check, title: shortOf(words, check) });
   const told = (state === 'fails' || state === 'refer') && reasonText;
   return {
     cells: [

@@ -25,7 +25,7 @@ export const assumptionsOf = (end: End, standard: Standard, channel: boolean, wo
       say('radius-assumed', { field: capital(fieldName(words, `${edge}.radius`)) }, `${edge}.radius`);
     }
   }
-  if (joint.kind === 'fin-plate' && joint.weld.electrode === undefined) {
+  if (joint.kind === 'fin-plate' && joint.weld.electrode === undefined && standard.materials.electrode > 0) {
     say('electrode-assumed', { value: `${standard.materials.electrode} MPa` }, 'joint.weld.electrode');
   }
   if (end.support?.kind === 'beam-web' && end.support.section !== undefined && end.support.topOfSteel === undefined) {

@@ -48,10 +48,11 @@ const sayWhy = (check: Draft, { reason }: Result, of: string, words: Words): voi
     check.reason = reason;
     check.reasonText = words.reasons[reason] ?? reason;
   }
-  if (of) {
-    check.of = of;
-    check.ofText = words.ways[of] ?? of;
-  }
+  if (!of) return;
+  check.of = of;
+  const own = words.titles[`${check.id}, ${of}`];
+  if (own) check.title = own;
+  else check.ofText = words.ways[of] ?? of;
 };
 
 const strengthCheck = (context: Context, plan: StrengthPlan, result: Result): Check => {

@@ -46,7 +46,7 @@ const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void
   }
   const limit = firstMet(plan.limits, facts);
   if (limit?.noNumber) {
-    into.state = 'refer';
+    into.state = plan.informs?.(facts as never) ? 'information' : 'refer';
     into.reason = limit.reason;
     return;
   }

@@ -179,7 +179,9 @@ class Resolver {
     }
     const section = found?.section;
     const fixedTo = thickness || (section ? (support.kind === 'column-flange' ? section.tf : section.tw) : 0);
-    const steel = carried?.support ?? this.supportSteel(fixedTo);
+    const { webStrengthAt } = this.standard.materials;
+    const ofWeb = section && support.kind !== 'column-flange' ? webStrengthAt(section) : 0;
+    const steel = carried?.support ?? this.supportSteel(Math.max(fixedTo, ofWeb));
     const given = { kind: support.kind, thickness: fixedTo, steel };
     if (!section || support.kind !== 'beam-web') return { ...given, outline: noSupport };
     const { h, b, tw, tf, r } = section;

@@ -73,8 +73,9 @@ export const leg = given('s', '1,0', (f) => f.leg);
 /** Part of the support that the joint is fixed to; 0 where it is not told. */
 export const ts = given('t_s', '1,0', (f) => f.ts);
 
-/** Full section: second moment; first moment and thickness at the peak of V Q/(I t). */
+/** Full section: area, second moment; first moment and thickness at the peak of V Q/(I t). */
 export const whole = {
+  A: given('A', '2,0', (f) => f.whole.area),
   I: given('I', '4,0', (f) => f.I),
   Q: given('Q', '3,0', (f) => f.Q),
   t: given('t', '1,0', (f) => f.t),
@@ -85,6 +86,7 @@ const cut = (of: (f: Facts) => CutFacts) => ({
   c: given('c', '1,0', (f) => of(f).c),
   dc: given('d_c', '1,0', (f) => of(f).dc),
   ec: given('e_c', '1,0', (f) => of(f).ec),
+  A: given('A', '2,0', (f) => of(f).A),
   I: given('I', '4,0', (f) => of(f).I),
   W: given('W', '3,0', (f) => of(f).W),
   Q: given('Q', '3,0', (f) => of(f).Q),

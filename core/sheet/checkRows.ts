@@ -1,4 +1,5 @@
 import type { Check } from '../check/report.ts';
+import { shortOf } from '../words/words.ts';
 import { BAR, columnsOf, isFit, isRow, NAME } from './columns.ts';
 import type { Context } from './context.ts';
 import { PER_V } from './ladderBar.ts';
@@ -70,7 +71,7 @@ const nameOf = ({ pen, words }: Context, shared: Shared, check: Check, governs: 
   const full = `${lead}${titleOf(check)}${marks}`;
   const style: TextStyle = { ...table, bold: governs };
   if (pen.width(full, style) <= width) return [[plainRun(full)]];
-  const short = words.short[check.id] ?? check.title;
+  const short = shortOf(words, check);
   return wrap(pen, [plainRun(`${lead}${titleOf({ ...check, title: short })}${marks}`)], style, width);
 };
 

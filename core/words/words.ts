@@ -8,7 +8,7 @@ export interface Words {
   readonly finPlate: string;
   /** gauge or gage. */
   readonly gauge: string;
-  /** Title of a check in full, by id. */
+  /** Title of a check in full, by id; of a way that is called something else, by `id, way`. */
   readonly titles: Readonly<Record<string, string>>;
   /** The same for a narrow column. */
   readonly short: Readonly<Record<string, string>>;
@@ -32,6 +32,12 @@ interface FaultLike {
   readonly given: unknown;
   readonly limit: unknown;
 }
+
+/** Name of a check, or of its way that is called something else, for a narrow column; its title where it has none. */
+export const shortOf = (
+  { short }: Pick<Words, 'short'>,
+  { id, of, title }: { readonly id: string; readonly of?: string; readonly title: string },
+): string => (of ? short[`${id}, ${of}`] : undefined) ?? short[id] ?? title;
 
 /** Name of a field, or the last part of its path where it has none. */
 export const fieldName = (words: Words, path: string): string => words.fields[path] ?? path.split('.').at(-1) ?? path;

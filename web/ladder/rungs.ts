@@ -1,5 +1,5 @@
 import type { Check, Numbers } from '../../core/check/report.ts';
-import type { Words } from '../../core/words/words.ts';
+import { shortOf, type Words } from '../../core/words/words.ts';
 
 /** The checks of a report as the ladder groups them. */
 export interface Rungs {
@@ -48,7 +48,7 @@ const stronger = (a: Check, b: Check): number => {
 };
 
 /** Name of a check in a narrow column. */
-export const shortName = ({ id, title }: Check, words: Words): string => words.short[id] ?? title;
+export const shortName = (check: Check, words: Words): string => shortOf(words, check);
 
 /** Name of a check in full, with the section, leg or edge that its numbers speak of. */
 export const fullName = ({ title, ofText }: Check): string => (ofText ? `${title}, ${ofText}` : title);

@@ -20,9 +20,19 @@ type Standing = keyof typeof strength;
 /** Rows of a working that are the check's own formula, not a quantity on the way to it. */
 const wholeFormula = (row: string | undefined): boolean => row === undefined || row === 'F_cr';
 
+/** Standards of one folder have the same rules: what holds one holds all. */
+const folders: Readonly<Record<string, string>> = {
+  'sans-10162-1': 'sans10162',
+  'csa-s16': 'csaS16',
+  'aisc-360-lrfd': 'aisc360',
+  'aisc-360-asd': 'aisc360',
+  'as-4100': 'as4100',
+  'is-800': 'is800',
+};
+
 const verifiedOf = (id: string): Record<string, Standing> => {
   const best: Record<string, Standing> = {};
-  const standardsOwn = fixtures.filter(({ standard }) => standard === id);
+  const standardsOwn = fixtures.filter(({ standard }) => folders[standard] === folders[id]);
   for (const { standing, expect } of standardsOwn) {
     for (const { check, row, field } of expect) {
       const formula =
@@ -125,16 +135,13 @@ const between = (text: string, name: string, body: string): string => {
 const read = (path: string): string =>
   existsSync(new URL(path, root)) ? readFileSync(new URL(path, root), 'utf8') : '';
 
-const folders: Readonly<Record<string, string>> = {
-  'sans-10162-1': 'sans10162',
-  'csa-s16': 'csaS16',
-  'as-4100': 'as4100',
-};
 const files: [path: string, text: string][] = [
-  ...Object.values(standards).map((standard): [string, string] => [
-    `core/standards/${folders[standard.id]}/verified.ts`,
-    verifiedFile(standard),
-  ]),
+  ...new Map(
+    Object.values(standards).map((standard) => [
+      `core/standards/${folders[standard.id]}/verified.ts`,
+      verifiedFile(standard),
+    ]),
+  ),
   ['fixtures/published/README.md', publishedTable()],
   ['fixtures/published/bases.md', basesPage()],
   ...(existsSync(new URL('README.md', root))

@@ -78,19 +78,27 @@ export const instantaneousCentre = (pattern: Pattern, e: number, curve: BoltCurv
 
 const KEPT = 256;
 
+interface Solved extends Pattern {
+  readonly C: number;
+}
+
 /** Coefficient C of a pattern of n rows and m columns, pitch p, gauge q, at arm e; mm. */
 export type Coefficient = (n: number, m: number, p: number, q: number, e: number) => number;
 
 /** Solves groups by one curve; the last few hundred patterns solved are remembered, as schedules repeat them. */
 export const coefficientsBy = (curve: BoltCurve): Coefficient => {
-  const solved = new Map<string, number>();
+  const solved = new Map<number, Solved[]>();
+  let kept = 0;
   return (n, m, p, q, e) => {
-    const key = `${n} ${m} ${p} ${q} ${e}`;
-    const known = solved.get(key);
-    if (known !== undefined) return known;
+    const known = solved.get(e)?.find((one) => one.n === n && one.m === m && one.p === p && one.q === q);
+    if (known) return known.C;
     const { C } = instantaneousCentre({ n, m, p, q }, e, curve);
-    if (solved.size >= KEPT) solved.clear();
-    solved.set(key, C);
+    if (kept >= KEPT) {
+      solved.clear();
+      kept = 0;
+    }
+    solved.set(e, [...(solved.get(e) ?? []), { n, m, p, q, C }]);
+    kept += 1;
     return C;
   };
 };

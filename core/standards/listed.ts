@@ -23,6 +23,8 @@ const entry = <Id extends string>(
 export const listed = [
   entry('sans-10162-1', 'SANS 10162-1', '2011', 'factored', 'commonwealth'),
   entry('csa-s16', 'CSA S16', '2019', 'factored', 'north-america'),
+  entry('aisc-360-lrfd', 'ANSI/AISC 360, LRFD', '2022', 'factored', 'north-america'),
+  entry('aisc-360-asd', 'ANSI/AISC 360, ASD', '2022', 'service', 'north-america'),
   entry('as-4100', 'AS 4100', '2020', 'factored', 'commonwealth'),
 ] as const;
 

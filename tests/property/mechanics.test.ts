@@ -34,6 +34,17 @@ const changed = (x: PlausibleEnd, change: Partial<PlausibleEnd>): [Report, Repor
   return before && after ? [before, after] : undefined;
 };
 
+/**
+ * Under AISC 360 a thicker ply can turn a conventional plate into an extended one: other rules, whose arm is longer and whose group is as
+ * strong as its weakest bolt. By the standard's own rule that weakens the bolts, so such pairs are left out.
+ */
+const otherKindOfPlate = (pair: readonly Report[]): boolean =>
+  new Set(pair.map((one) => one.checks.find(({ id }) => id === 'plate-bending')?.reason === 'conventional-plate'))
+    .size > 1;
+
+/** AISC 360: a thicker web moves the middle planes of web and plate apart, so that the lap twists more (Manual 10-7). */
+const twists = (one: Report, id: string): boolean => one.standard.id.startsWith('aisc-360') && id === 'plate-buckling';
+
 describe('more steel at the same fy and fu never weakens', () => {
   test('a thicker web', () => {
     fc.assert(
@@ -41,7 +52,8 @@ describe('more steel at the same fy and fu never weakens', () => {
         const pair = changed(x, { tw: x.tw + tenths / 10 });
         // Slack: the branches of the shear stress meet with rounded constants, a step of at most 0.2 % where a web passes from elastic to
         // inelastic buckling.
-        if (pair) expect(lowered(...pair, 0.002)).toEqual([]);
+        if (!pair || otherKindOfPlate(pair)) return;
+        expect(lowered(...pair, 0.002).filter((id) => !twists(pair[0], id))).toEqual([]);
       }),
       runs,
     );
@@ -51,7 +63,7 @@ describe('more steel at the same fy and fu never weakens', () => {
     fc.assert(
       fc.property(plausibleEnd, fc.integer({ min: 1, max: 10 }), (x, more) => {
         const pair = changed(x, { tp: x.tp + more });
-        if (pair) expect(lowered(...pair)).toEqual([]);
+        if (pair && !otherKindOfPlate(pair)) expect(lowered(...pair)).toEqual([]);
       }),
       runs,
     );

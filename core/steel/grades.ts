@@ -37,23 +37,12 @@ const en10025 = {
 /** The South African grades that went before. */
 const sans1431 = { source: 'SANS 1431', basis: 'memory', fyUpTo: [16, 40, 63], fuUpTo: [63] } as const;
 
-/** Canadian grades, to 100 mm; above that some yield less. */
-const csaG40 = { source: 'CSA G40.21', fyUpTo: [100], fuUpTo: [100] } as const;
-/** American grades in the metric figures of Canadian lists, one strength for every thickness that is rolled. */
-const metricAstm = { fyUpTo: [150], fuUpTo: [150] } as const;
-
 const grades: readonly Grade[] = [
   { name: 'S235JR', ...en10025, fy: [235, 225, 215, 215, 215, 195], fu: [360, 350], thin: 360 },
   { name: 'S275JR', ...en10025, fy: [275, 265, 255, 245, 235, 225], fu: [410, 400], thin: 430 },
   { name: 'S355JR', ...en10025, fy: [355, 345, 335, 325, 315, 295], fu: [470, 450], thin: 510 },
   { name: '300WA', ...sans1431, fy: [300, 290, 280], fu: [450] },
   { name: '350WA', ...sans1431, fy: [350, 340, 330], fu: [480] },
-  { name: '260W', ...csaG40, basis: 'memory', fy: [260], fu: [410] },
-  { name: '300W', ...csaG40, basis: 'seen', fy: [300], fu: [450] },
-  { name: '350W', ...csaG40, basis: 'seen', fy: [350], fu: [450] },
-  { name: 'A992', source: 'ASTM A992, metric', ...metricAstm, basis: 'seen', fy: [345], fu: [450] },
-  { name: 'A572-50', source: 'ASTM A572 grade 50, metric', ...metricAstm, basis: 'memory', fy: [345], fu: [450] },
-  { name: 'A36', source: 'ASTM A36, metric', ...metricAstm, basis: 'memory', fy: [250], fu: [400] },
 ];
 
 const byName: ReadonlyMap<string, Grade> = new Map(grades.map((grade) => [grade.name, grade]));

@@ -1,9 +1,11 @@
 import { boltStrength } from '../../steel/bolts.ts';
-import { strengthAt } from '../../steel/grades.ts';
+import { canadianGrade, canadianGradeNames } from '../../steel/canadianGrades.ts';
+import { strengthAt as europeanStrength, strengthOf } from '../../steel/grades.ts';
 import { type Materials, namedIn, type Steels } from '../materials.ts';
 
+/** Grades of EN 10025-2: not listed by the standard. */
 const european = ['S235', 'S275', 'S355'];
-const grades = ['260W', '300W', '350W', 'A992', 'A572-50', 'A36', ...european];
+const grades = [...canadianGradeNames, ...european];
 
 /** `G40.21-350W` as `350W`, `A572 Gr. 50` as `A572-50`, `S355J2` as `S355`. */
 const readAs = (plain: string): string =>
@@ -13,11 +15,17 @@ const readAs = (plain: string): string =>
     .replace(/^A572(?:GRADE|GR\.?|-GR\.?)?50$/, 'A572-50')
     .replace(/^(S(?:235|275|355))(?:JR|J0|J2|K2)\S*$/, '$1');
 
-const steels: Steels = {
-  grades,
-  named: namedIn(grades, readAs),
-  strengthAt: (grade, thickness) => strengthAt(european.includes(grade) ? `${grade}JR` : grade, thickness),
+const strengthAt: Steels['strengthAt'] = (name, thickness) => {
+  const grade = canadianGrade(name);
+  return grade ? strengthOf(grade, thickness) : europeanStrength(`${name}JR`, thickness);
 };
+
+const noteOf = (name: string): string | undefined => {
+  if (european.includes(name)) return 'grade-not-listed';
+  return canadianGrade(name)?.basis === 'memory' ? 'memory-grade' : undefined;
+};
+
+const steels: Steels = { grades, named: namedIn(grades, readAs), strengthAt, noteOf };
 
 /** Least tensile strength of bolts by their American names, MPa, and the thread series that each is made in. */
 const american: Readonly<Record<string, { readonly fub: number; readonly thread: 'metric' | 'inch' }>> = {

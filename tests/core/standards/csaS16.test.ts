@@ -201,6 +201,13 @@ describe('materials', () => {
     expect(sections.strengthAt('S355', 17)).toEqual({ fy: 345, fu: 470 });
   });
 
+  test('steels from memory, and those the standard does not list, are named as such', () => {
+    const grade = (name: string) => codes({ ...base, beam: { section: 'UB 406x178x60', grade: name } });
+    expect(grade('A36')).toContain('memory-grade');
+    expect(grade('S355')).toContain('grade-not-listed');
+    for (const code of ['memory-grade', 'grade-not-listed']) expect(grade('350W')).not.toContain(code);
+  });
+
   test('a bolt has the strength of its own series, and none in the other', () => {
     expect(bolt('A325M', 20)?.fub).toBe(830);
     expect(bolt('A325', 19.05)?.fub).toBe(825);

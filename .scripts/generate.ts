@@ -26,6 +26,8 @@ const folders: Readonly<Record<string, string>> = {
   'csa-s16': 'csaS16',
   'aisc-360-lrfd': 'aisc360',
   'aisc-360-asd': 'aisc360',
+  'en-1993': 'en1993',
+  'en-1993-uk': 'en1993',
   'as-4100': 'as4100',
   'is-800': 'is800',
 };

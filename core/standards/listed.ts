@@ -25,6 +25,8 @@ export const listed = [
   entry('csa-s16', 'CSA S16', '2019', 'factored', 'north-america'),
   entry('aisc-360-lrfd', 'ANSI/AISC 360, LRFD', '2022', 'factored', 'north-america'),
   entry('aisc-360-asd', 'ANSI/AISC 360, ASD', '2022', 'service', 'north-america'),
+  entry('en-1993', 'EN 1993-1-8, recommended values', '2005', 'factored', 'commonwealth'),
+  entry('en-1993-uk', 'EN 1993-1-8, UK National Annex', '2005', 'factored', 'commonwealth'),
   entry('as-4100', 'AS 4100', '2020', 'factored', 'commonwealth'),
 ] as const;
 

@@ -1,3 +1,4 @@
+import { lastColumnX } from '../bolts.ts';
 import type { Area, Point, Stroke } from '../drawing.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
@@ -11,14 +12,36 @@ const WIDE = 0.14;
 export const copeBending: PathMaker = (it, words, of) => {
   if (of.startsWith('rupture')) return copeRupture(it, words, of);
   const cut = cutOf(it, of);
-  if (cut === null || cut.shape === null) return null;
-  const [top, foot] = faceOf(it, cut);
-  const arm = level({ x: -it.g, y: foot.y - 0.14 * cut.depth }, cut.c);
-  return path(`What is left of the beam bends at the face of the ${words.cope}; the edges yield first.`, {
+  if (cut === null || cut.shape === null) return of === 'beside a long plate' ? webBesidePlate(it, words, of) : null;
+  const [face, below] = faceOf(it, cut);
+  const atBolts = of.endsWith('last column');
+  const x = atBolts ? lastColumnX(it) : face.x;
+  const where = atBolts ? 'last column of bolts' : `face of the ${words.cope}`;
+  const [top, foot] = [
+    { x, y: face.y },
+    { x, y: below.y },
+  ];
+  const arm = level({ x: -it.g, y: foot.y - 0.14 * cut.depth }, x);
+  return path(`What is left of the beam bends at the ${where}; the edges yield first.`, {
     strokes: [torn(top, foot), ...arm.strokes],
     areas: stressFigure(top, foot, cut.shape.centroid),
-    tags: [tag(...arm.ends, `arm ${length(cut.ec, words.units)}`)],
+    tags: [tag(...arm.ends, `arm ${length(it.g + x, words.units)}`)],
     fields: ['setback', cut.c === it.ct ? 'top.length' : 'bottom.length', 'top.depth', 'bottom.depth'],
+  });
+};
+
+/** Level planes above and below the bolts shear, and the upright one between the outer rows bends. */
+const webBesidePlate: PathMaker = (it, words) => {
+  const x = lastColumnX(it);
+  const [top, foot] = [
+    { x, y: it.y1 },
+    { x, y: it.yn },
+  ];
+  const arm = level({ x: -it.g, y: (it.y1 + it.yn) / 2 }, x);
+  return path('The web beside the plate bends between the outer rows and shears along them.', {
+    strokes: [torn({ x: 0, y: it.y1 }, top, foot, { x: 0, y: it.yn }), ...arm.strokes],
+    tags: [tag(...arm.ends, `arm ${length(it.g + x, words.units)}`)],
+    fields: ['setback', 'joint.endDistance', 'joint.bolts.pitch'],
   });
 };
 

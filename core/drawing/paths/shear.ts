@@ -121,7 +121,13 @@ const netLine = (it: Facts, words: DrawingWords, { column = 0, top, foot, name, 
 
 /** The cut section a check speaks of; by itself the rectangle, else the tee. */
 export const cutOf = (it: Facts, of: string): CutFacts | null => {
-  const named = of === 'tee' ? it.tee : of === 'rectangle' ? it.rectangle : it.rectangle.here ? it.rectangle : it.tee;
+  const named = of.startsWith('tee')
+    ? it.tee
+    : of.startsWith('rectangle')
+      ? it.rectangle
+      : it.rectangle.here
+        ? it.rectangle
+        : it.tee;
   return named.here ? named : null;
 };
 

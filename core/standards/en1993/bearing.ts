@@ -1,0 +1,128 @@
+import { noColumnInCope, oneColumn, oneRow, wideHole } from '../../end/gates.ts';
+import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fu, fub, fup, p, q, tp, tw, V } from '../../end/given.ts';
+import {
+  type Condition,
+  constant,
+  least,
+  minus,
+  most,
+  not,
+  over,
+  pick,
+  plus,
+  root,
+  squared,
+  step,
+  type Tree,
+  times,
+} from '../../formula/tree.ts';
+import type { Force, Length, Pure, Stress } from '../../units/dimension.ts';
+import type { StrengthRule } from '../standard.ts';
+import { v, w } from './bolts.ts';
+import { gammaM2, gammaMu } from './factors.ts';
+import { boltLimits } from './limits.ts';
+import { leastOf } from './optional.ts';
+import { guide, seen } from './sources.ts';
+
+const source = seen('1-8 3.6.1');
+const most1 = constant('1', 1);
+const most25 = constant('2.5', 2.5);
+const several = { rows: not(oneRow), columns: not(oneColumn) };
+
+/** A term of the least, and when it is there. */
+type Term = readonly [Condition, Tree<Pure>];
+
+/** Distances of one ply: an edge beside the outer row that counts only under a condition, the edge level with it, and its strength. */
+interface Ply {
+  readonly fu: Tree<Stress>;
+  readonly t: Tree<Length>;
+  /** Toward it the upright force presses; absent where a flange closes the way. */
+  readonly before: readonly (readonly [Condition, Tree<Length>])[];
+  /** Above and below the rows. */
+  readonly beside: readonly (readonly [Condition, Tree<Length>])[];
+  readonly level: Tree<Length>;
+}
+
+const endTerm = (e: Tree<Length>): Tree<Pure> => over(e, times(3, d0));
+const edgeTerm = (e: Tree<Length>): Tree<Pure> => minus(over(times(2.8, e), d0), 1.7);
+const inner = (s: Tree<Length>): Tree<Pure> => minus(over(s, times(3, d0)), 0.25);
+const between = (s: Tree<Length>): Tree<Pure> => minus(over(times(1.4, s), d0), 1.7);
+
+/** The lowest serves every bolt, and never below nothing. */
+const lowest = (symbol: 'α_b' | 'k_1', always: readonly [Tree<Pure>, ...Tree<Pure>[]], optional: readonly Term[]) =>
+  step(symbol, most(leastOf(always, optional), 0), source);
+
+/** Bearing of one bolt, N: 0.8 of it in holes wider than the standard ones. */
+const oneBolt = (symbol: string, k1: Tree<Pure>, alphaB: Tree<Pure>, { fu, t }: Ply, gamma: Tree<Pure>): Tree<Force> =>
+  step(
+    symbol,
+    pick([[wideHole.when, over(times(0.8, k1, alphaB, fu, d, t), gamma)]], over(times(k1, alphaB, fu, d, t), gamma)),
+    source,
+  );
+
+const bearingOn = (ply: Ply) => {
+  const { fu, before, beside, level } = ply;
+  const strength = over(fub, fu);
+  const upright = {
+    alphaB: lowest(
+      'α_b',
+      [strength, most1],
+      [...before.map(([here, e]): Term => [here, endTerm(e)]), [several.rows, inner(p)]],
+    ),
+    k1: lowest('k_1', [edgeTerm(level), most25], [[several.columns, between(q)]]),
+  };
+  const along = {
+    alphaB: lowest('α_b', [endTerm(level), strength, most1], [[several.columns, inner(q)]]),
+    k1: lowest('k_1', [most25], [...beside.map(([here, e]): Term => [here, edgeTerm(e)]), [several.rows, between(p)]]),
+  };
+  return {
+    vertical: oneBolt('F_ver', upright.k1, upright.alphaB, ply, gammaM2),
+    horizontal: oneBolt('F_hor', along.k1, along.alphaB, ply, gammaM2),
+    tie: oneBolt('F_hor', along.k1, along.alphaB, ply, gammaMu),
+  };
+};
+
+const topCoped = not(noColumnInCope);
+const bottomCoped = flag('', (f) => f.mBottom > 0, 'a column inside the bottom cope');
+const always = flag('', () => true, 'always');
+
+const onWeb = bearingOn({
+  fu,
+  t: tw,
+  before: [[topCoped, at]],
+  beside: [
+    [topCoped, at],
+    [bottomCoped, ab],
+  ],
+  level: eEnd,
+});
+const onPlate = bearingOn({
+  fu: fup,
+  t: tp,
+  before: [[always, eBot]],
+  beside: [[always, least(eTop, eBot)]],
+  level: ex,
+});
+
+/** Bearing of one bolt along the beam under the tie force, N. */
+export const webTieBearing: Tree<Force> = onWeb.tie;
+export const plateTieBearing: Tree<Force> = onPlate.tie;
+
+/** V at which the farthest bolt's two components use its bearing up, added as squares: stricter than each alone, as the joint guide. N */
+const group = ({ vertical, horizontal }: ReturnType<typeof bearingOn>): Tree<Force> =>
+  step(
+    'V_Rd',
+    pick([[oneRow, over(vertical, v)]], over(1, root(plus(squared(over(v, vertical)), squared(over(w, horizontal)))))),
+    guide,
+  );
+export const webGroup: Tree<Force> = group(onWeb);
+export const plateGroup: Tree<Force> = group(onPlate);
+
+const rule = (resistance: Tree<Force>): StrengthRule => ({
+  source,
+  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance, limits: boltLimits }],
+});
+
+/** Bearing, EN 1993-1-8 3.6.1 Table 3.4: the web is pressed up, the plate down, both along the beam. */
+export const webBearing: StrengthRule = rule(webGroup);
+export const plateBearing: StrengthRule = rule(plateGroup);

@@ -20,10 +20,13 @@ const area = step('A_b', over(times(constant('π', Math.PI), squared(d)), 4));
 const shank = times(0.6, phiB, area, Fub);
 const plain = pick([[threadsIn, times(shank, 0.7)]], shank);
 
+/** Where joints are long, free of the noise that lengths in inches bring. */
+const long = constant('760 mm', 760 * (1 - 1e-12), '1,0');
+
 /** One bolt in one plane, in a joint of the given length: 0.70 where threads lie in it, 0.50/0.60 in joints of 760 mm and more. */
 const boltResistance = (length: Tree<Length>): Tree<Force> =>
   pick(
-    [[below(step('L', length), constant('760 mm', 760, '1,0')), step('V_r', plain, shear)]],
+    [[below(step('L', length), long), step('V_r', plain, shear)]],
     step('V_r', times(step('V_1', plain, shear), over(0.5, 0.6)), shear, 'long joint, L ≥ 760 mm'),
   );
 

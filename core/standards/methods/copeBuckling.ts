@@ -27,10 +27,13 @@ const pi = constant('π', Math.PI);
 const limit = (when: Limit['when'], reason: string): Limit => ({ when: not(when), reason, always: true });
 const common: readonly Limit[] = [channelCope, ...copeLimits];
 
+/** A share of a depth as a limit: sizes that meet it exactly keep meeting it after conversion from inches. */
+const shareOf = (share: number): Tree<Pure> => constant(String(share), share * (1 + 1e-12));
+
 /** Where the method was made: c <= 2 h, and this share of h in depth. Beyond, it refers, with its number. */
 export const methodLimits = (c: Tree<Length>, dc: Tree<Length>, share: number): readonly Limit[] => [
-  limit(atMost(c, times(2, h)), 'cope-longer-than-method'),
-  limit(atMost(dc, times(share, h)), 'cope-deeper-than-method'),
+  limit(atMost(c, times(shareOf(2), h)), 'cope-longer-than-method'),
+  limit(atMost(dc, times(shareOf(share), h)), 'cope-deeper-than-method'),
 ];
 
 const ratio: Tree<Pure> = over(tee.depth, tee.c);

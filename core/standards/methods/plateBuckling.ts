@@ -39,8 +39,11 @@ export const barFactor = (fy: Tree<Stress>): Tree<Pure> => {
   );
 };
 
-/** A plate so short that it cannot buckle: z_1 <= t_p/0.15. */
-export const shortPlate: Gate = { when: atMost(z1, over(tp, 0.15)), reason: 'short-plate' };
+/** A plate so short that it cannot buckle: z_1 <= t_p/0.15; sizes that meet it exactly keep meeting it after conversion from inches. */
+export const shortPlate: Gate = {
+  when: atMost(z1, over(tp, constant('0.15', 0.15 * (1 - 1e-12)))),
+  reason: 'short-plate',
+};
 
 /**
  * Buckling of a long plate between weld and first bolt column: published US form for a rectangular bar, no clause of the standard.

@@ -103,6 +103,43 @@ describe('one bolt alone', () => {
   });
 });
 
+describe('a size that stands exactly on a limit', () => {
+  test('is within it, in inches as in millimetres', () => {
+    const inch = (mm: number) => mm / 25.4;
+    const metric = withJoint({ endDistance: 48, plate: { ...plate, thickness: 9 } });
+    // z_1 = 12 + 48 = 60 = 9/0.15
+    expect(checkOf(metric, 'plate-buckling')).toMatchObject({ state: 'notApplicable', reason: 'short-plate' });
+    const inches = {
+      ...base,
+      units: 'in-kip',
+      beam: { section: 'UB 406x178x60', grade: { fy: 460 / 6.894757293168361, fu: 80 } },
+      top: { length: inch(110), depth: inch(45), radius: inch(12) },
+      setback: inch(12),
+      joint: {
+        kind: 'fin-plate',
+        firstRow: inch(90),
+        endDistance: inch(48),
+        bolts: { ...bolts, pitch: inch(70) },
+        plate: { thickness: inch(9), grade: '300W', topEdge: inch(40), bottomEdge: inch(40), edge: inch(50) },
+        weld: { leg: inch(8), electrode: 71 },
+      },
+    };
+    expect(checkOf(inches, 'plate-buckling')).toMatchObject({ state: 'notApplicable', reason: 'short-plate' });
+    // At 460 MPa the mean of yield and tensile strength still counts.
+    const mean = checkOf(inches, 'web-net-shear').working!.find(({ symbol }) => symbol === 'F_m')!;
+    expect(mean.value).toBeCloseTo((460 / 6.894757293168361 + 80) / 2, 9);
+  });
+
+  test('a joint of 760 mm is a long one, one of 759 mm is not', () => {
+    const end = (pitch: number) => ({
+      ...withBolts({ rows: 11, pitch }),
+      beam: { section: { depth: 1000, width: 300, flange: 20, web: 12, radius: 20 }, grade: '350W' },
+    });
+    const [short, long] = [75.9, 76].map((pitch) => checkOf(end(pitch), 'bolt-shear').resistance!);
+    expect(long! / short!).toBeCloseTo(0.5 / 0.6, 12);
+  });
+});
+
 describe('block tearing', () => {
   test('counts 0.3 of the tension plane from two columns on, says so, and says that three have no published value', () => {
     const end = (columns: number) => ({

@@ -39,6 +39,14 @@ const firstUsedUp = (results: readonly Result[]): Result | undefined => {
   return first;
 };
 
+/** A way that may not be the first to fail refers where it is. */
+const referWhereFirst = (plan: Plan, facts: Facts, first: Result): void => {
+  const way = plan.strength.find(({ id }) => id === first.id)?.ways[first.way];
+  if (first.state !== 'holds' || !way?.whereFirst?.test(facts as never)) return;
+  first.state = 'refer';
+  first.reason = way.whereFirst.reason;
+};
+
 /** The worst failing check that no reaction is to blame for: a tie, a size, a clash. */
 const worstWithoutV = (...lists: readonly (readonly Result[])[]): Result | undefined => {
   let found: Result | undefined;
@@ -66,6 +74,7 @@ export const evaluate = (plan: Plan, facts: Facts, given: number): Evaluation =>
     for (let at = 0; at < plan.strength.length; at += 1) stateAtReaction(plan.strength[at]!, facts, strength[at]!);
   }
   const first = firstUsedUp(strength);
+  if (first) referWhereFirst(plan, facts, first);
   return {
     strength,
     fit,

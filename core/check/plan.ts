@@ -33,6 +33,7 @@ export interface WayPlan {
   readonly failsAt?: NumberReader;
   readonly off: readonly GatePlan[];
   readonly limits: readonly LimitPlan[];
+  readonly whereFirst?: GatePlan;
   readonly unbounded?: Test;
   readonly informs?: Test;
 }
@@ -87,6 +88,7 @@ const wayPlan = (way: Way): WayPlan => ({
   off: (way.off ?? []).map(gatePlan),
   limits: (way.limits ?? []).map(limitPlan),
   ...(way.resistance && { resistance: numberOf(way.resistance) }),
+  ...(way.whereFirst && { whereFirst: gatePlan(way.whereFirst) }),
   ...(way.failsAt && { failsAt: numberOf(way.failsAt) }),
   ...(way.unbounded && { unbounded: testOf(way.unbounded) }),
   ...(way.informs && { informs: testOf(way.informs) }),

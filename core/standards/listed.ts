@@ -28,6 +28,7 @@ export const listed = [
   entry('en-1993', 'EN 1993-1-8, recommended values', '2005', 'factored', 'commonwealth'),
   entry('en-1993-uk', 'EN 1993-1-8, UK National Annex', '2005', 'factored', 'commonwealth'),
   entry('as-4100', 'AS 4100', '2020', 'factored', 'commonwealth'),
+  entry('is-800', 'IS 800', '2007', 'factored', 'commonwealth'),
 ] as const;
 
 export type StandardId = (typeof listed)[number]['id'];

@@ -24,6 +24,8 @@ export interface Way {
   /** Not applicable under any of these. */
   readonly off?: readonly Gate[];
   readonly limits?: readonly Limit[];
+  /** Refers, where it would hold, if of all ways of the end this one is used up first and this is met. */
+  readonly whereFirst?: Gate;
   /** Used up by any load at all when this is met; no demand can then be stated. */
   readonly unbounded?: Condition;
   /** Numbers without a verdict while this is met. */

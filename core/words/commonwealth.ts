@@ -107,6 +107,10 @@ export const commonwealth: Words = {
     'channel-cope': 'a notched channel bends about no principal axis',
     'slender-cut-web': 'the cut web is too slender: k_v = 5.34 needs both edges held',
     'slender-cut': 'the cut web may buckle before it yields in shear',
+    'block-as-clause': 'the clause as it stands over-predicts such ends: it may not be what fails first',
+    'grip-too-long': 'the grip is longer than 8 d',
+    'short-weld': 'without a leg at each end the weld is shorter than four legs',
+    'thin-throat': 'the throat is below 3 mm',
     'web-below-least': 'the web is thinner than the least for an unstiffened web',
     'cope-longer-than-method': 'the notch is longer than the method covers, 2 h',
     'cope-deeper-than-method': 'the notch is deeper than the method covers',
@@ -182,6 +186,9 @@ export const commonwealth: Words = {
     'least-action':
       'The standard has joints carry the lesser of 0.15 of the shear of the full section and 40 kN at least: a way of failing below that fails at every reaction.',
     'weld-category': 'Welds of category SP are assumed: so the specification must ask. Option weld: GP takes 0.60.',
+    'parallel-flanges': 'The flanges are taken as parallel, as given.',
+    'half-tension-plane':
+      'With two columns or more inside the notch half of the tension plane counts in the block of the web, below the clause: tests found such ends over-predicted. Option web-block: standard takes the clause as it stands.',
     'tie-in-web-only': 'Under the tie force bolts and web are checked; plate, weld and support are not.',
     'joint-guide':
       'Joint guide 2008: Steel Buildings in Europe, Multi-Storey Steel Buildings, Part 5: Joint Design. Clauses 1-1, 1-5 and 1-8 are those of EN 1993-1-1, 1993-1-5 and 1993-1-8 of 2005 and 2006.',

@@ -57,6 +57,8 @@ const optionWords: Readonly<Record<string, string>> = {
   'non-uniform': 'uneven tension',
   hand: 'sheared or cut by hand',
   machine: 'cut by machine',
+  shop: 'made in the shop',
+  site: 'made on site',
   SP: 'structural purpose',
   GP: 'general purpose',
   sheared: 'sheared',

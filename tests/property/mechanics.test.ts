@@ -18,6 +18,8 @@ const capacityOf = (one: Report, id: string): number | undefined => {
   return check.reactionAtFailure ?? undefined;
 };
 
+const demandOf = (one: Report, id: string): number => one.checks.find((c) => c.id === id)!.demand!;
+
 /** Ids whose reaction at failure the change lowered, beyond `slack`. */
 const lowered = (before: Report, after: Report, slack = 1e-9): string[] =>
   before.checks
@@ -37,10 +39,11 @@ const changed = (x: PlausibleEnd, change: Partial<PlausibleEnd>): [Report, Repor
 const isEn1993 = ({ standard }: PlausibleEnd): boolean => standard.startsWith('en-1993');
 
 /** EN 1993 takes a throat off either end of a fillet: one too short for its throat refers, and more throat can then weaken it. */
-const shortForItsThroat = (x: PlausibleEnd, leg: number): boolean => {
-  const throat = leg / Math.SQRT2;
-  return isEn1993(x) && 2 * x.e + (x.rows - 1) * x.pitch - 2 * throat < Math.max(30, 6 * throat);
+const shortForItsThroat = (x: PlausibleEnd, id: string): boolean => {
+  const throat = x.leg / Math.SQRT2;
+  return isEn1993(x) && id === 'weld' && 2 * x.e + (x.rows - 1) * x.pitch - 2 * throat < Math.max(30, 6 * throat);
 };
+
 /**
  * Under AISC 360 a thicker ply can turn a conventional plate into an extended one: other rules, whose arm is longer and whose group is as
  * strong as its weakest bolt. By the standard's own rule that weakens the bolts, so such pairs are left out.
@@ -52,6 +55,16 @@ const otherKindOfPlate = (pair: readonly Report[]): boolean =>
 /** AISC 360: a thicker web moves the middle planes of web and plate apart, so that the lap twists more (Manual 10-7). */
 const twists = (one: Report, id: string): boolean => one.standard.id.startsWith('aisc-360') && id === 'plate-buckling';
 
+/**
+ * IS 800 8.4.2.2: where the inelastic branch ends, at λ_w 1.2, it lies at 0.68 and the elastic one at 0.694, so that a web that grows past it
+ * loses 2.1 % of its shear stress.
+ */
+const branchesApart = (one: Report, id: string): boolean => one.standard.id === 'is-800' && id === 'web-gross-shear';
+
+/** IS 800 10.5: the length of a weld is without a leg at each end, so that on a plate less than six legs deep a larger leg weakens. */
+const legsTaken = ({ standard, e, rows, pitch, leg }: PlausibleEnd, id: string): boolean =>
+  standard === 'is-800' && id === 'weld' && 2 * e + (rows - 1) * pitch < 6 * leg;
+
 describe('more steel at the same fy and fu never weakens', () => {
   test('a thicker web', () => {
     fc.assert(
@@ -60,7 +73,8 @@ describe('more steel at the same fy and fu never weakens', () => {
         // Slack: the branches of the shear stress meet with rounded constants, a step of at most 0.2 % where a web passes from elastic to
         // inelastic buckling.
         if (!pair || otherKindOfPlate(pair)) return;
-        expect(lowered(...pair, 0.002).filter((id) => !twists(pair[0], id))).toEqual([]);
+        expect(lowered(...pair, 0.002).filter((id) => !twists(pair[0], id) && !branchesApart(pair[0], id))).toEqual([]);
+        expect(lowered(...pair, 0.021).filter((id) => branchesApart(pair[0], id))).toEqual([]);
       }),
       runs,
     );
@@ -82,7 +96,8 @@ describe('more steel at the same fy and fu never weakens', () => {
         for (const change of [{ e: x.e + more }, { ex: x.ex + more }, { leg: x.leg + more }]) {
           const pair = changed(x, change);
           if (!pair) continue;
-          const weaker = lowered(...pair).filter((id) => id !== 'weld' || !shortForItsThroat(x, change.leg ?? x.leg));
+          const then = { ...x, ...change };
+          const weaker = lowered(...pair).filter((id) => !legsTaken(then, id) && !shortForItsThroat(then, id));
           expect(weaker).toEqual([]);
         }
       }),
@@ -130,6 +145,9 @@ describe('a longer cope never strengthens', () => {
   });
 });
 
+/** IS 800 and EN 1993 take another shear area of a coped web than of the whole section, however shallow the cope. */
+const otherShearArea = (one: Report): boolean => /^(is-800|en-1993)/.test(one.standard.id);
+
 describe('what changes nothing', () => {
   test('the unit system: the same end in inches and kips has the same numbers', () => {
     fc.assert(
@@ -155,12 +173,15 @@ describe('what changes nothing', () => {
   test('a cope that shrinks to nothing leaves the stress of the full section', () => {
     fc.assert(
       fc.property(plausibleEnd, (x) => {
-        const found = report(endOf({ ...x, copes: 'top', dt: 1e-7, V: 100 }));
-        if (!found) return;
-        const [full, cut] = [capacityOf(found, 'stress-full'), capacityOf(found, 'stress-cope')];
-        expect(cut! / full!).toBeCloseTo(1, 6);
-        const none = report(endOf({ ...x, copes: 'none', V: 100 }))!;
-        expect(capacityOf(found, 'web-net-shear')! / capacityOf(none, 'web-net-shear')!).toBeCloseTo(1, 6);
+        const [found, none] = [
+          report(endOf({ ...x, copes: 'top', dt: 1e-5, V: 100 })),
+          report(endOf({ ...x, copes: 'none', V: 100 })),
+        ];
+        expect(found === undefined).toBe(none === undefined);
+        if (!found || !none) return;
+        expect(demandOf(found, 'stress-cope') / demandOf(found, 'stress-full')).toBeCloseTo(1, 6);
+        const [cut, whole] = [capacityOf(found, 'web-net-shear'), capacityOf(none, 'web-net-shear')];
+        if (cut && whole && !otherShearArea(found)) expect(cut / whole).toBeCloseTo(1, 6);
         expect(capacityOf(found, 'web-gross-shear')).toBe(capacityOf(none, 'web-gross-shear'));
       }),
       runs,

@@ -6,4 +6,5 @@ export const standardFolders: Readonly<Record<string, () => Promise<Standard>>> 
   'aisc-360-lrfd': async () => (await import('../../core/standards/aisc360/index.ts')).aisc360Lrfd,
   'aisc-360-asd': async () => (await import('../../core/standards/aisc360/index.ts')).aisc360Asd,
   'as-4100': async () => (await import('../../core/standards/as4100/index.ts')).as4100,
+  'is-800': async () => (await import('../../core/standards/is800/index.ts')).is800,
 };

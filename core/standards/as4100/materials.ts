@@ -1,22 +1,10 @@
 import { australianPlates, australianSections } from '../../steel/australianGrades.ts';
-import { type Grade, strengthOf } from '../../steel/grades.ts';
-import { type Materials, namedIn, type Steels } from '../materials.ts';
+import type { Materials } from '../materials.ts';
+import { steelsOf } from '../methods/steelsOf.ts';
 import { coreArea } from './coreArea.ts';
 
 /** 300PLUS, and the grades with a promise of toughness, have the strengths of the grade itself. */
 const readAs = (plain: string): string => plain.replace(/^300PLUS$/, '300').replace(/^(\d{3})L(?:0|15)$/, '$1');
-
-const steels = (all: readonly Grade[]): Steels => {
-  const grades = all.map(({ name }) => name);
-  return {
-    grades,
-    named: namedIn(grades, readAs),
-    strengthAt: (name, thickness) => {
-      const grade = all.find((one) => one.name === name);
-      return grade && strengthOf(grade, thickness);
-    },
-  };
-};
 
 /** Least tensile strength of a bolt of this property class and diameter, mm, in MPa. */
 const boltStrength = (propertyClass: string, diameter: number): number | undefined => {
@@ -37,8 +25,8 @@ const boltStrength = (propertyClass: string, diameter: number): number | undefin
  * category alike, holes 2 mm (up to M24) or 3 mm wider than the bolt; no allowance in net areas (9.1.10).
  */
 export const materials: Materials = {
-  sections: steels(australianSections),
-  plates: steels(australianPlates),
+  sections: steelsOf(australianSections, readAs),
+  plates: steelsOf(australianPlates, readAs),
   webStrengthAt: ({ tw }) => tw,
   boltGrades: [...['4.6', '8.8', '10.9'], ...['4.6/S', '8.8/S', '8.8/TB', '8.8/TF', '10.9/S', '10.9/TB', '10.9/TF']],
   bolt: (grade, diameter) => {

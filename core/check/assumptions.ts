@@ -1,5 +1,7 @@
 import type { End } from '../end/schema.ts';
 import type { Standard } from '../standards/standard.ts';
+import { plain } from '../units/figures.ts';
+import { unitOf } from '../units/systems.ts';
 import { capital } from '../words/capital.ts';
 import { fieldName, filled, type Words } from '../words/words.ts';
 import type { Note } from './report.ts';
@@ -26,7 +28,9 @@ export const assumptionsOf = (end: End, standard: Standard, channel: boolean, wo
     }
   }
   if (joint.kind === 'fin-plate' && joint.weld.electrode === undefined && standard.materials.electrode > 0) {
-    say('electrode-assumed', { value: `${standard.materials.electrode} MPa` }, 'joint.weld.electrode');
+    const { name, size } = unitOf('-2,1', end.units);
+    const value = `${plain(standard.materials.electrode / size, 1)} ${name}`;
+    say('electrode-assumed', { value }, 'joint.weld.electrode');
   }
   if (end.support?.kind === 'beam-web' && end.support.section !== undefined && end.support.topOfSteel === undefined) {
     say('top-of-steel-assumed', {}, 'support.topOfSteel');

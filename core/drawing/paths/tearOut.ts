@@ -13,8 +13,9 @@ export const webTearout: PathMaker = (it, words, of) => {
   }
   if (it.mTop === 0 || it.dt === 0) return null;
   const fields = ['joint.firstRow', 'top.depth', 'joint.bolts.pitch'];
-  const from = of === 'first row' ? it.y1 : it.yn;
-  return upright(it, words, { columns: it.mTop, from, edge: it.dt, name: 'web', fields });
+  const alone = of === 'first row';
+  const from = alone ? it.y1 : it.yn;
+  return upright(it, words, { columns: it.mTop, from, edge: it.dt, name: 'web', fields, alone });
 };
 
 /** In the plate: `down` to its bottom edge beside every column, or `along` the last row to its free edge. */
@@ -35,9 +36,15 @@ interface Upright {
   readonly edge: number;
   readonly name: string;
   readonly fields: readonly string[];
+  /** One row alone: a line too short for more words than its length. */
+  readonly alone?: boolean;
 }
 
-const upright = (it: Facts, words: DrawingWords, { columns, from, edge, name, fields }: Upright): FailurePath => {
+const upright = (
+  it: Facts,
+  words: DrawingWords,
+  { columns, from, edge, name, fields, alone }: Upright,
+): FailurePath => {
   const r = it.d0 / 2;
   const centres = Array.from({ length: columns }, (_, j) => columnX(it, j));
   const strokes = centres.flatMap((x): Stroke[] =>
@@ -48,7 +55,7 @@ const upright = (it: Facts, words: DrawingWords, { columns, from, edge, name, fi
   return path(`The bolts tear out of the ${name}, on two planes beside each column.`, {
     strokes,
     areas: centres.map((centre) => block(centre - r, Math.min(from, edge), centre + r, Math.max(from, edge))),
-    tags: [tag({ x, y: from }, { x, y: edge }, `${2 * columns} × ${size} in shear`)],
+    tags: [tag({ x, y: from }, { x, y: edge }, `${alone ? '' : `${2 * columns} × `}${size} in shear`)],
     fields,
   });
 };

@@ -37,27 +37,46 @@ const freely = flag(
   'option hole-deformation: not-considered',
   (f) => f.options['hole-deformation'] === 'not-considered',
 );
-const bearingShare = pick([[freely, constant('3.0', 3)]], constant('2.4', 2.4));
-const tearShare = pick([[freely, constant('1.5', 1.5)]], constant('1.2', 1.2));
 
-const borne = (t: Tree<Length>, Fu: Tree<Stress>): Tree<Force> => times(bearingShare, d, t, Fu);
-const torn = (clear: Tree<Length>, t: Tree<Length>, Fu: Tree<Stress>): Tree<Force> => times(tearShare, clear, t, Fu);
+/** Bearing and tear-out where the deformation of the hole counts, 2.4 and 1.2, or does not, 3.0 and 1.5. */
+interface Shares {
+  readonly borne: (t: Tree<Length>, Fu: Tree<Stress>) => Tree<Force>;
+  readonly torn: (clear: Tree<Length>, t: Tree<Length>, Fu: Tree<Stress>) => Tree<Force>;
+}
+const shares = (said: readonly [string, string]): Shares => {
+  const [b, t] = said.map((one) => constant(one, Number(one))) as [Tree<'0,0'>, Tree<'0,0'>];
+  return { borne: (ply, Fu) => times(b, d, ply, Fu), torn: (clear, ply, Fu) => times(t, clear, ply, Fu) };
+};
+const counted = shares(['2.4', '1.2']);
+const notCounted = shares(['3.0', '1.5']);
+const either = (force: (by: Shares) => Tree<Force>): Tree<Force> => pick([[freely, force(notCounted)]], force(counted));
+
 const between = minus(p, d0);
 const beside = minus(q, d0);
 const half = over(d0, 2);
 
 /** Bearing, and tear-out to the next hole of the column. */
 const inner = (symbol: string, t: Tree<Length>, Fu: Tree<Stress>, note: string): Tree<Force> =>
-  step(symbol, pick([[oneRow, borne(t, Fu)]], least(borne(t, Fu), torn(between, t, Fu))), bearing, note);
+  step(
+    symbol,
+    either(({ borne, torn }) => pick([[oneRow, borne(t, Fu)]], least(borne(t, Fu), torn(between, t, Fu)))),
+    bearing,
+    note,
+  );
 
 export const rw = inner('r_w', tw, Fu, 'bolt in the web');
 /** First row of a column inside the cope: tear-out up to the cut edge. */
-export const rwTop = step('r_w1', least(rw, torn(minus(at, half), tw, Fu)), bearing, 'first row, to the cut edge');
+export const rwTop = step(
+  'r_w1',
+  either(({ torn }) => least(rw, torn(minus(at, half), tw, Fu))),
+  bearing,
+  'first row, to the cut edge',
+);
 export const rp = inner('r_p', tp, Fup, 'bolt in the plate');
 /** Last row: tear-out down to the plate's edge. */
 export const rpFoot = step(
   'r_pn',
-  least(borne(tp, Fup), torn(minus(eBot, half), tp, Fup)),
+  either(({ borne, torn }) => least(borne(tp, Fup), torn(minus(eBot, half), tp, Fup))),
   bearing,
   'last row, to the edge of the plate',
 );
@@ -65,18 +84,39 @@ export const rpFoot = step(
 /** Clear distance to the beam's end and to the plate's free edge, none where the end distance used is too short. */
 const endClear = step('l_c', most(minus(endUsed, half), noLength), bearing, "to the beam's end");
 const edgeClear = step('l_c', minus(ex, half), bearing, "to the plate's free edge");
-const along = (clear: Tree<Length>): Tree<Length> => pick([[oneColumn, clear]], least(clear, beside));
+const nearer = (clear: Tree<Length>): Tree<Length> =>
+  step('l_a', pick([[oneColumn, clear]], least(clear, beside)), bearing, 'along the row');
 
+const webAlong = nearer(endClear);
+const plateAlong = nearer(edgeClear);
 /** Tear-out along the row: to the end or edge, or to the next column, whichever is nearer. */
-export const rwEnd = step('r_we', torn(along(endClear), tw, Fu), bearing, 'along the row, web');
-export const rpEdge = step('r_pe', torn(along(edgeClear), tp, Fup), bearing, 'along the row, plate');
+export const rwEnd = step(
+  'r_we',
+  either(({ torn }) => torn(webAlong, tw, Fu)),
+  bearing,
+  'along the row, web',
+);
+export const rpEdge = step(
+  'r_pe',
+  either(({ torn }) => torn(plateAlong, tp, Fup)),
+  bearing,
+  'along the row, plate',
+);
+
+const along = (symbol: string, clear: Tree<Length>, t: Tree<Length>, Fu: Tree<Stress>, note: string): Tree<Force> =>
+  step(
+    symbol,
+    either(({ borne, torn }) => least(borne(t, Fu), torn(clear, t, Fu))),
+    bearing,
+    note,
+  );
 
 /** Column next to the beam's end and that next to the plate's free edge, pulled along the beam; and those between. */
 export const pulled = {
-  webLast: least(borne(tw, Fu), torn(endClear, tw, Fu)),
-  webInner: least(borne(tw, Fu), torn(beside, tw, Fu)),
-  plateLast: least(borne(tp, Fup), torn(edgeClear, tp, Fup)),
-  plateInner: least(borne(tp, Fup), torn(beside, tp, Fup)),
+  webLast: along('r_we', endClear, tw, Fu, "to the beam's end"),
+  webInner: along('r_w', beside, tw, Fu, 'in the web, to the next column'),
+  plateLast: along('r_pe', edgeClear, tp, Fup, "to the plate's free edge"),
+  plateInner: along('r_p', beside, tp, Fup, 'in the plate, to the next column'),
 };
 
 /** The web's first row where some column stands inside the cope, else any of its bolts. */

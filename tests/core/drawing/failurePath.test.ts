@@ -49,6 +49,7 @@ const ways: Readonly<Record<string, readonly string[]>> = {
     'bearing, web',
     'block, web',
     'net tension, web',
+    'gross tension, web',
     'bearing, plate',
     'block, plate',
     'net tension, plate',
@@ -112,6 +113,24 @@ describe('the path of a failure', () => {
     expect(texts(pathOf('web-tearout', 'up', facts))).toEqual(['2 × 185 in shear']);
     expect(texts(pathOf('plate-tearout', 'down', facts))).toEqual(['2 × 180 in shear']);
     expect(lengths(torn(pathOf('web-tearout', 'up', facts))).upright).toBeCloseTo(2 * 185, 9);
+  });
+
+  it('tears the first row alone out of the web, and the net section at the last column inside the cope', () => {
+    // K-207/L: a_t = 90 - 45 = 45; net depth 361.4 - 3 x 22 = 295.4.
+    const facts = sampleFacts();
+    const first = pathOf('web-tearout', 'first row', facts);
+    expect(texts(first)).toEqual(['45 in shear']);
+    expect(lengths(torn(first)).upright).toBeCloseTo(2 * 45, 9);
+    const rupture = pathOf('cope-bending', 'rupture, tee', facts);
+    expect(texts(rupture)).toEqual(['295.4 net']);
+    for (const { from } of torn(rupture)) expect(from.x).toBe(facts.eEnd);
+    expect(failurePath('cope-bending', 'rupture, rectangle', facts, sampleWords)).toBeNull();
+  });
+
+  it('bends the plate at the middle of the bolts, or at the first column where a standard names a way of it', () => {
+    const facts = sampleFacts(variedEnds['two columns']);
+    expect(texts(pathOf('plate-bending', '', facts))).toEqual([`arm ${facts.z}`]);
+    expect(texts(pathOf('plate-bending', 'rupture', facts))).toEqual([`arm ${facts.z1}`]);
   });
 
   it('tears along the lowest row, where the bolts push the web to its end and the plate to its free edge', () => {

@@ -1,3 +1,4 @@
+import '../words/furtherWords.ts';
 import { aisc360Asd, aisc360Lrfd } from './aisc360/index.ts';
 import { as4100 } from './as4100/index.ts';
 import { csaS16 } from './csaS16/index.ts';

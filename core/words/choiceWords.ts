@@ -1,9 +1,15 @@
-/** Plain words for values that are chosen from a list, by the path of their field. The same in every region. */
-export const choiceWords: Readonly<Record<string, Readonly<Record<string, string>>>> = {
-  'joint.kind': { 'fin-plate': 'fin plate', 'web-bolts': 'web bolted to a ply' },
+import type { Words } from './words.ts';
+
+/** Plain words for values that are chosen from a list, by the path of their field. */
+const choiceWords = (words: Words): Readonly<Record<string, Readonly<Record<string, string>>>> => ({
+  'joint.kind': { 'fin-plate': words.finPlate, 'web-bolts': 'web bolted to a ply' },
   'support.kind': { 'beam-web': "beam's web" },
-};
+});
+
+/** A value of a field in plain words; the value itself where it has none. */
+export const choiceText = (words: Words, path: string, value: string): string =>
+  choiceWords(words)[path]?.[value] ?? value;
 
 /** The list of a field's values with their words. */
-export const choicesOf = (path: string): { readonly value: string; readonly label: string }[] =>
-  Object.entries(choiceWords[path] ?? {}).map(([value, label]) => ({ value, label }));
+export const choicesOf = (words: Words, path: string): { readonly value: string; readonly label: string }[] =>
+  Object.entries(choiceWords(words)[path] ?? {}).map(([value, label]) => ({ value, label }));

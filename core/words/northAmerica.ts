@@ -1,11 +1,16 @@
 import { commonwealth } from './commonwealth.ts';
-import { respoken } from './respoken.ts';
+import { type Instead, respoken } from './respoken.ts';
 import type { Words } from './words.ts';
 
-/** Words of Canada and the United States: cope, single plate, gage. */
-export const northAmerica: Words = respoken(commonwealth, [
+const instead: Instead = [
   ['notched', 'coped'],
   ['notch', 'cope'],
   ['fin plate', 'single plate'],
   ['gauge', 'gage'],
-]);
+];
+
+/** The same texts in the words of Canada and the United States: cope, single plate, gage. */
+export const saidThere = <T>(texts: T): T => respoken(texts, instead);
+
+/** Words of Canada and the United States. */
+export const northAmerica: Words = saidThere(commonwealth);

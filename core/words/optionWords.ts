@@ -1,7 +1,7 @@
 import { capital } from './capital.ts';
 
 /** Plain words for the options of standards and their values. The same in every region. */
-const optionWords: Readonly<Record<string, string>> = {
+const optionWords: Record<string, string> = {
   'elastic-shear': 'Elastic shear stress',
   'bolt-group': 'Bolt group',
   'cope-shear': 'Shear at the cut',
@@ -13,34 +13,10 @@ const optionWords: Readonly<Record<string, string>> = {
   weld: 'Weld',
   'cope-bending': 'Bending at the cut',
   'plate-bending': 'Plate bending',
-  'plain-web': 'Shear area of a plain web',
-  'tee-shear': 'Shear area of a tee',
-  'long-joint': 'Long joints',
-  execution: 'Execution class',
-  reduced: 'nine tenths of it',
   full: 'all of it',
-  amended: 'as amended',
-  'first-print': 'as first printed',
-  EXC1: 'class one',
-  EXC2: 'class two',
-  EXC3: 'class three',
-  EXC4: 'class four',
-  'cope-method': 'Method at copes',
-  'double-cope-arm': 'Arm to two copes',
-  'end-underrun': 'Short-cut beams',
-  'hole-deformation': 'Deformation of holes',
-  'eccentric-bearing': 'Bearing of eccentric groups',
-  'lap-torsion': 'Twist of the lap',
-  current: '15th and 16th edition of the Manual',
-  older: '14th edition of the Manual',
-  longer: 'to the longer one',
   top: 'to the top one',
-  deducted: 'deducted from the end distance',
-  'as-drawn': 'end distance as drawn',
-  lowest: 'by the weakest bolt',
-  sum: 'by the sum of the bolts',
   limit: 'limits the plate',
-  none: 'held by a slab, not checked',
+  none: 'held by a slab so not checked',
   size: 'by its leg',
   strength: 'by its strength',
   report: 'for information',
@@ -48,21 +24,16 @@ const optionWords: Readonly<Record<string, string>> = {
   elastic: 'elastic',
   'instantaneous-centre': 'instantaneous centre',
   mean: 'mean stress',
-  plastic: 'plastic',
   standard: 'as the clause',
   cautious: 'cautious',
-  unified: 'over the gross length',
-  net: 'over the net length',
-  uniform: 'even tension',
-  'non-uniform': 'uneven tension',
   hand: 'sheared or cut by hand',
-  machine: 'cut by machine',
-  shop: 'made in the shop',
-  site: 'made on site',
-  SP: 'structural purpose',
-  GP: 'general purpose',
   sheared: 'sheared',
   cut: 'flame cut or sawn',
+};
+
+/** Puts words of further options at hand. */
+export const admitOptions = (more: Readonly<Record<string, string>>): void => {
+  Object.assign(optionWords, more);
 };
 
 const spaced = (key: string): string => key.replace(/-/g, ' ');

@@ -5,7 +5,7 @@ import { Choice } from '../field/Choice.tsx';
 import { Field } from '../field/Field.tsx';
 import { SectionField } from '../field/SectionField.tsx';
 import { Switch } from '../field/Switch.tsx';
-import { entry, standard, units } from '../state/bench.ts';
+import { entry, standard, units, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { isPly, plyPath } from './isPly.ts';
 import { SteelField } from './SteelField.tsx';
@@ -20,7 +20,7 @@ const weldMetal = (): string => {
 const SupportFields = () => (
   <fieldset class="part">
     <legend class="unseen">Support</legend>
-    <Choice path="support.kind" label="Face" options={choicesOf('support.kind')} />
+    <Choice path="support.kind" label="Face" options={choicesOf(words.value, 'support.kind')} />
     <SectionField path="support.section" label="Section" />
     <Field path="support.topOfSteel" label="Top above" empty="level, assumed" />
   </fieldset>
@@ -30,7 +30,7 @@ export const JointFields = () => {
   const ply = plyPath();
   return (
     <>
-      <Choice path="joint.kind" label="Kind" options={choicesOf('joint.kind')} />
+      <Choice path="joint.kind" label="Kind" options={choicesOf(words.value, 'joint.kind')} />
       <Field path={`${ply}.thickness`} label="Thickness" />
       <SteelField path={`${ply}.grade`} />
       <Field path={`${ply}.topEdge`} label="Top edge" />

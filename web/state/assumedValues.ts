@@ -1,5 +1,5 @@
 import { capital } from '../../core/words/capital.ts';
-import { choiceWords } from '../../core/words/choiceWords.ts';
+import { choiceText } from '../../core/words/choiceWords.ts';
 import { fieldName } from '../../core/words/words.ts';
 import { entry, words } from './bench.ts';
 import { textOf } from './entry.ts';
@@ -18,7 +18,7 @@ const showsItself = (path: string): boolean => path.endsWith('.by') || textOf(en
 
 const said = (path: string): string => {
   const value = shown(path);
-  return [capital(fieldName(words.value, path)), choiceWords[path]?.[value] ?? value, unitAt(path)]
+  return [capital(fieldName(words.value, path)), choiceText(words.value, path, value), unitAt(path)]
     .filter(Boolean)
     .join(' ');
 };

@@ -3,19 +3,18 @@ import { type Listed, listed } from '../../core/standards/listed.ts';
 import { sans10162 } from '../../core/standards/sans10162/index.ts';
 import type { Standard } from '../../core/standards/standard.ts';
 import { later } from './later.ts';
-import { standardFolders } from './standardFolders.ts';
 
 admit(sans10162);
 
+const fetch = async (id: string): Promise<Standard> => {
+  const { standardFolders } = await import('./standardFolders.ts');
+  const rules = await standardFolders[id]!();
+  admit(rules);
+  return rules;
+};
+
 const fetched = new Map(
-  Object.entries(standardFolders).map(([id, load]) => [
-    id,
-    later(async () => {
-      const rules = await load();
-      admit(rules);
-      return rules;
-    }),
-  ]),
+  listed.filter(({ id }) => !Object.hasOwn(standards, id)).map(({ id }) => [id as string, later(() => fetch(id))]),
 );
 
 /** What is listed of a standard; undefined where this version does not have it. */

@@ -5,6 +5,7 @@ import { sheetPages } from '../../../core/sheet/sheet.ts';
 import { sheetWords } from '../../../core/sheet/sheetWords.ts';
 import { UNKNOWN } from '../../../core/sheet/trueType.ts';
 import { commonwealth } from '../../../core/words/commonwealth.ts';
+import '../../../core/words/furtherWords.ts';
 import { end, examined, fullest } from './ends.ts';
 
 /** Every string in a tree of words; functions are called with letters in their places. */

@@ -44,7 +44,14 @@ vi.mock('../../../web/state/standardFolders.ts', () => ({
 
 const text = (path: string): string => bench.entry.value.texts[path] ?? '';
 const codes = () => bench.faults.value.map(({ path, code }) => `${path} ${code}`);
-const settled = () => new Promise((resolve) => setTimeout(resolve));
+
+/** Lets the rules of a standard come, or fail to, once they were asked for. */
+const settle = async (id: keyof typeof invented, how: 'come' | 'fail'): Promise<void> => {
+  await vi.waitFor(() => expect(loads.has(id)).toBe(true));
+  loads.get(id)?.[how]();
+  loads.delete(id);
+  await new Promise((resolve) => setTimeout(resolve));
+};
 const demoUnder = (id: string): Entry => withText(demoEntry(), 'standard', id);
 
 beforeEach(() => edits.begin(demoEntry()));
@@ -59,8 +66,7 @@ describe('the rules of a standard that is not at hand', () => {
     expect(bench.lastGood.value).toBe(before);
     expect(text('joint.bolts.pitch')).toBe('80');
     edits.write('joint.bolts.pitch', '85');
-    loads.get('service-code')?.come();
-    await settled();
+    await settle('service-code', 'come');
     expect(bench.awaited.value).toBeNull();
     expect(bench.isCurrent.value).toBe(true);
     expect(bench.lastGood.value?.report.standard.title).toBe('Service code');
@@ -70,16 +76,14 @@ describe('the rules of a standard that is not at hand', () => {
   test('where they cannot be loaded that is said beside the standard, and they are asked for again once there is a network', async () => {
     edits.begin(demoUnder('other-code'));
     expect(bench.awaited.value).toBe('coming');
-    loads.get('other-code')?.fail();
-    await settled();
+    await settle('other-code', 'fail');
     expect(codes()).toEqual(['standard not-loaded']);
     expect(faultAt('standard')).toBe(
       'The rules of Other code:2 could not be loaded. Try again once there is a network.',
     );
     tryAgain();
     expect(bench.awaited.value).toBe('coming');
-    loads.get('other-code')?.come();
-    await settled();
+    await settle('other-code', 'come');
     expect(codes()).toEqual(['beam.grade unknown-grade', 'joint.bolts.grade unknown-bolt-grade']);
   });
 

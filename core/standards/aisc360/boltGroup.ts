@@ -21,7 +21,7 @@ export const C = step(
     ],
     found(
       '0,0',
-      'instantaneous centre, R_i = R_ult (1 − e^(−3.4 l_i/l_max))^0.55',
+      'instantaneous centre, R_i = R_ult (1 − e^(−3.4 ρ_i))^0.55, ρ_i = l_i/l_max',
       [n, m, p, q, e],
       (_, n, m, p, q, e) => solved(n!, m!, p!, q!, e!),
     ),

@@ -80,15 +80,11 @@ const Cb = step(
   most(pick([[below(ct, cb), times(over(ct, cb), gradient)]], gradient), constant('1.84', 1.84)),
   source,
 );
-const rectangleMoment = step(
-  'M_n',
-  pick(
-    [[older, times(least(rectangleStress(E), Fy), plainRectangle.S)]],
-    barMoment({ depth: ho, t: tw, Lb: ct, Cb, Fy }),
-  ),
-  source,
+const rectangleMoment = pick(
+  [[older, step('M_n', times(least(rectangleStress(E), Fy), plainRectangle.S), source)]],
+  barMoment({ depth: ho, t: tw, Lb: ct, Cb, Fy }),
 );
-const toTop = flag('option double-cope-arm: top', (f) => f.options['double-cope-arm'] === 'top');
+export const toTop = flag('option double-cope-arm: top', (f) => f.options['double-cope-arm'] === 'top');
 const arm = step('e_c', plus(g, pick([[toTop, ct]], longer)), source);
 
 const twoCopes: Gate = { when: not(noRectangle.when), reason: 'two-copes' };

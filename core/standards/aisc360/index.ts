@@ -1,5 +1,5 @@
 import { flag } from '../../end/given.ts';
-import { all } from '../../formula/tree.ts';
+import { all, not } from '../../formula/tree.ts';
 import { listedOf } from '../listed.ts';
 import { elasticStress } from '../methods/elasticStress.ts';
 import { noRule, type Standard } from '../standard.ts';
@@ -7,7 +7,7 @@ import { plateBlock, webBlock } from './block.ts';
 import { boltShear, plateBearing, webBearing, webTearout } from './bolts.ts';
 import { conventional, extended } from './conventional.ts';
 import { copeBending } from './copeBending.ts';
-import { copeBuckling } from './copeBuckling.ts';
+import { copeBuckling, toTop } from './copeBuckling.ts';
 import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitBolts.ts';
 import { fitCopeClearance, fitCopeDepth, fitCopeLength, fitCopeRadius, twoCopes } from './fitCope.ts';
 import { fitPlateDepth, fitRotation, fitSetback } from './fitPlate.ts';
@@ -83,7 +83,7 @@ export const aisc360 = (method: Method): Standard => ({
   notes: [
     { code: 'conventional-plate', when: conventional },
     { code: 'extended-plate', when: all(finPlate, extended) },
-    { code: 'double-cope-arm', when: twoCopes },
+    { code: 'double-cope-arm', when: all(twoCopes, not(toTop)) },
     { code: 'tie-in-web-only', when: tied },
   ],
 });

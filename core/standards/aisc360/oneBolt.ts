@@ -82,13 +82,13 @@ export const rpFoot = step(
 );
 
 /** Clear distance to the beam's end and to the plate's free edge, none where the end distance used is too short. */
-const endClear = step('l_c', most(minus(endUsed, half), noLength), bearing, "to the beam's end");
-const edgeClear = step('l_c', minus(ex, half), bearing, "to the plate's free edge");
-const nearer = (clear: Tree<Length>): Tree<Length> =>
-  step('l_a', pick([[oneColumn, clear]], least(clear, beside)), bearing, 'along the row');
+const endClear = step('l_cw', most(minus(endUsed, half), noLength), bearing, "to the beam's end");
+const edgeClear = step('l_cp', minus(ex, half), bearing, "to the plate's free edge");
+const nearer = (symbol: string, clear: Tree<Length>): Tree<Length> =>
+  step(symbol, pick([[oneColumn, clear]], least(clear, beside)), bearing, 'along the row');
 
-const webAlong = nearer(endClear);
-const plateAlong = nearer(edgeClear);
+const webAlong = nearer('l_aw', endClear);
+const plateAlong = nearer('l_ap', edgeClear);
 /** Tear-out along the row: to the end or edge, or to the next column, whichever is nearer. */
 export const rwEnd = step(
   'r_we',

@@ -32,7 +32,7 @@ export const plateBending = (method: Method): StrengthRule => {
     source,
     ways: [
       {
-        of: 'bending with shear',
+        of: 'with shear',
         symbol: 'V',
         load: 'V',
         demand: V,
@@ -54,7 +54,7 @@ export const plateBending = (method: Method): StrengthRule => {
 
 const bar = barMoment({ depth: hp, t: tp, Lb: z1, Cb: constant('C_b', 1.84), Fy: Fyp });
 const olderMoment = step('M_n', over(times(barFactor(Fyp), Fyp, tp, squared(hp)), 6), source);
-const barStrength: Tree<Moment> = step('M_n', pick([[older, olderMoment]], bar), source);
+const barStrength: Tree<Moment> = pick([[older, olderMoment]], bar);
 const unbraced = step(
   'R_n',
   over(times(constant('1500 ksi', 1500 * KSI, '-2,1'), constant('π', Math.PI), hp, cubed(tp)), squared(z1)),

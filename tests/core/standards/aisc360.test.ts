@@ -267,7 +267,8 @@ describe('copes', () => {
       twoCopes,
     );
     expect([toLonger.demand, toTop.demand]).toEqual([expect.closeTo(0.312, 9), expect.closeTo(0.212, 9)]);
-    expect(notesOf({}, twoCopes)).toContain('double-cope-arm');
+    expect(notesOf({}, twoCopes)).not.toContain('double-cope-arm');
+    expect(notesOf({ options: undefined }, twoCopes)).toContain('double-cope-arm');
   });
 
   test('a bottom cope alone does not buckle; its stem in tension yields at no more than 1.6 F_y S', () => {

@@ -66,7 +66,12 @@ const saidOf = (gates: readonly Gate[], words: Words): Said[] => {
 /** What opens a rule's formulas: its ways or parts, with their trees, gates and limits. */
 const insideOf = (rule: StrengthRule | FitRule) =>
   'ways' in rule
-    ? rule.ways.map((way) => ({ of: way.of, trees: treesOf(way), off: way.off ?? [], limits: way.limits ?? [] }))
+    ? rule.ways.map((way) => ({
+        of: way.of,
+        trees: treesOf(way),
+        off: way.off ?? [],
+        limits: [...(way.limits ?? []), ...(way.whereFirst ? [way.whereFirst] : [])],
+      }))
     : rule.parts.map(({ of, given, least, most, off }) => ({
         of,
         trees: [given, least, most].filter((one) => one !== undefined),

@@ -42,11 +42,11 @@ describe.each(Object.values(standards))('$id', (standard) => {
       if (isNoRule(rule)) continue;
       if ('ways' in rule) {
         for (const way of rule.ways) {
-          const { demand, resistance, off, limits, unbounded, informs } = way;
+          const { demand, resistance, off, limits, unbounded, informs, whereFirst } = way;
           trees.push(...treesOf(way));
           if (resistance) expect(dimensionFromLeaves(demand)).toEqual(dimensionFromLeaves(resistance));
           for (const { when } of [...(off ?? []), ...(limits ?? [])]) checkCondition(when);
-          for (const when of [unbounded, informs]) if (when) checkCondition(when);
+          for (const when of [unbounded, informs, whereFirst?.when]) if (when) checkCondition(when);
         }
       } else {
         for (const { given, least, most, off } of rule.parts) {

@@ -22,7 +22,7 @@ const core = step(
 const shank = step('A_o', over(times(constant('π', Math.PI), squared(d)), 4), source);
 
 /** Bolts stronger than property class 8.8 with threads in the plane. */
-const strong = below(constant('830', 830, '-2,1'), fuf);
+const strong = below(constant('830 MPa', 830, '-2,1'), fuf);
 const kd = step('k_rd', pick([[all(threadsIn, strong), constant('0.83', 0.83)]], constant('1', 1)), source);
 
 const length = step('l_j', times(minus(n, 1), p));

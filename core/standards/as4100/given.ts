@@ -14,4 +14,4 @@ export const fyb = step('f_yb', least(fyw, fyf), undefined, 'web or flange');
 
 /** A slenderness by the yield strength, √(f_y/250). */
 export const byYield = (ratio: Tree<Pure>, fy: Tree<Stress>): Tree<Pure> =>
-  times(ratio, root(over(fy, constant('250', 250, '-2,1'))));
+  times(ratio, root(over(fy, constant('250 MPa', 250, '-2,1'))));

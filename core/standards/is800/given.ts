@@ -12,7 +12,7 @@ export const fuw = given('f_uw', '-2,1', (f) => f.Xu);
 export const fyb = step('f_yb', least(fyw, fyf), undefined, 'web or flange');
 
 /** ε = √(250/f_y). */
-export const epsilon = (fy: Tree<Stress>): Tree<Pure> => root(over(constant('250', 250, '-2,1'), fy));
+export const epsilon = (fy: Tree<Stress>): Tree<Pure> => root(over(constant('250 MPa', 250, '-2,1'), fy));
 
 /** Yielding and rupture of an area in shear, N. */
 export const yieldShear = (area: Tree<Area>, fy: Tree<Stress>): Tree<Force> =>

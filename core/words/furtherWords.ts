@@ -63,7 +63,7 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
       'With two columns or more inside the notch half of the tension plane counts in the block of the web, below the clause: tests found such ends over-predicted. Option web-block: standard takes the clause as it stands.',
     'tie-in-web-only': 'Under the tie force bolts and web are checked; plate, weld and support are not.',
     'joint-guide':
-      'Joint guide 2008: Steel Buildings in Europe, Multi-Storey Steel Buildings, Part 5: Joint Design. Clauses 1-1, 1-5 and 1-8 are those of EN 1993-1-1, 1993-1-5 and 1993-1-8 of 2005 and 2006.',
+      'Joint guide 2008: Steel Buildings in Europe, Multi-Storey Steel Buildings, Part 5. Clauses 1-1, 1-5 and 1-8: parts of EN 1993.',
     'notch-in-buckling':
       'A beam that is not held against lateral-torsional buckling needs the notch in that check: it lowers the stiffness of the end.',
     'bolts-govern': 'The bolts give before plate and web bear: the end has little ductility.',

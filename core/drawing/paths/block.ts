@@ -1,6 +1,8 @@
 import { columnX, lastColumnX } from '../bolts.ts';
+import type { FailurePath } from '../drawing.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
+import type { DrawingWords } from '../words.ts';
 import { block, type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
 
 /** Sheared along the inner column up to the cut edge, pulled apart along the last row to the beam's end; columns inside the cope only. */
@@ -85,4 +87,44 @@ export const platePulled: PathMaker = (it, words) => {
     ],
     fields: [plateField(it, 'edge'), 'joint.bolts.pitch', 'joint.bolts.gauge'],
   });
+};
+
+interface PulledAside {
+  readonly name: string;
+  /** Ends of the sheared plane: at the ply's free end, and at the far column. */
+  readonly from: number;
+  readonly x: number;
+  readonly row: number;
+  readonly edge: number;
+}
+
+/** Pulled out toward one edge: one plane along the far row, tension from there to the edge. */
+const pulledAside = (words: DrawingWords, { name, from, x, row, edge }: PulledAside): FailurePath => {
+  const size = (mm: number): string => length(Math.abs(mm), words.units);
+  const corners = [
+    { x: from, y: row },
+    { x, y: row },
+    { x, y: edge },
+  ] as const;
+  return path(`The tie force pulls the hatched block out of the ${name}, as far as its edge.`, {
+    strokes: [torn(...corners)],
+    areas: [block(Math.min(from, x), Math.min(row, edge), Math.max(from, x), Math.max(row, edge))],
+    tags: [
+      tag(corners[0], corners[1], `${size(x - from)} in shear`),
+      tag(corners[1], corners[2], `${size(edge - row)} in tension`),
+    ],
+    fields: ['joint.bolts.pitch', 'joint.bolts.gauge'],
+  });
+};
+
+export const webPulledToTop: PathMaker = (it, words) =>
+  pulledAside(words, { name: 'web', from: 0, x: lastColumnX(it), row: it.yn, edge: it.dt });
+export const webPulledToFoot: PathMaker = (it, words) =>
+  pulledAside(words, { name: 'web', from: 0, x: lastColumnX(it), row: it.y1, edge: it.h - it.db });
+
+/** To the nearer of the plate's edges. */
+export const platePulledToEdge: PathMaker = (it, words) => {
+  const { right, top, bottom } = plateBox(it);
+  const [row, edge] = it.eTop <= it.eBot ? [it.yn, top] : [it.y1, bottom];
+  return pulledAside(words, { name: words.plate, from: right, x: columnX(it, 0), row, edge });
 };

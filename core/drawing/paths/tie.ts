@@ -3,7 +3,7 @@ import { centres } from '../bolts.ts';
 import type { FailurePath, Stroke } from '../drawing.ts';
 import { force, forceUnit } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
-import { platePulled, webPulled } from './block.ts';
+import { platePulled, platePulledToEdge, webPulled, webPulledToFoot, webPulledToTop } from './block.ts';
 import { blackBolts, halfMoon } from './bolts.ts';
 import { type PathMaker, path, tag } from './pathMaker.ts';
 import { plateNetTension, webGrossTension, webNetTension } from './shear.ts';
@@ -45,7 +45,10 @@ const ways: Readonly<Record<string, PathMaker>> = {
   'bearing, web': (it, words) => bearing(it, words, 'web', -1),
   'bearing, plate': (it, words) => bearing(it, words, words.plate, 1),
   'block, web': webPulled,
+  'block to the top, web': webPulledToTop,
+  'block to the foot, web': webPulledToFoot,
   'block, plate': platePulled,
+  'block to an edge, plate': platePulledToEdge,
   'net tension, web': webNetTension,
   'gross tension, web': webGrossTension,
   'net tension, plate': plateNetTension,

@@ -27,6 +27,7 @@ import {
 } from '../../formula/tree.ts';
 import type { Force, Length, Moment } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
+import { from } from './bound.ts';
 import { gammaM0 } from './factors.ts';
 import { type CutInShear, rectangleInShear, teeInShear } from './shearArea.ts';
 import { guide } from './sources.ts';
@@ -84,7 +85,7 @@ const lastColumn = plus(eEnd, times(minus(m, 1), q));
  */
 const waysOf = (of: 'rectangle' | 'tee', { cut, V: Vpl }: CutInShear, block: Tree<Force>, none: Gate): Way[] => {
   const xN = step('x_N', minus(cut.c, lastColumn), guide, 'cope beyond the last column');
-  const near = below(xN, times(2, d));
+  const near = below(xN, times(from(2), d));
   const M0 = step('M_0', over(times(fy, cut.W), gammaM0), guide);
   const beside = step('V_pl,2', pick([[noColumnInCope, Vpl]], least(Vpl, block)), guide);
   const column = plus(g, lastColumn);

@@ -6,7 +6,6 @@ import {
   atMost,
   below,
   type Condition,
-  constant,
   cubed,
   inMPa,
   least,
@@ -21,6 +20,7 @@ import {
 import type { Length } from '../../units/dimension.ts';
 import { methodLimits, teeStress } from '../methods/copeBuckling.ts';
 import type { StrengthRule, Way } from '../standard.ts';
+import { upTo } from './bound.ts';
 import { E, gammaM1 } from './factors.ts';
 import { guide } from './sources.ts';
 
@@ -34,12 +34,16 @@ const depthLimit = step('D_lim', pick([[twoCopes, over(h, 5)]], over(h, 2)), gui
 
 /** Longest cope that needs no check: h in stocky webs, less in slender ones; S235 by the row of S275. */
 const longest = (stocky: number, slender: number): Tree<Length> =>
-  pick([[atMost(ratio, stocky), h]], over(times(slender, h), cubed(ratio)));
-const lengthLimit = step('L', pick([[atMost(inMPa(fy), 275), longest(54.3, 160_000)]], longest(48, 110_000)), guide);
+  pick([[atMost(ratio, upTo(stocky)), h]], over(times(slender, h), cubed(ratio)));
+const lengthLimit = step(
+  'L',
+  pick([[atMost(inMPa(fy), upTo(275)), longest(54.3, 160_000)]], longest(48, 110_000)),
+  guide,
+);
 
 /** No limits are published for steels above S355. */
-const noLimits: Condition = below(constant('355 MPa', 355, '-2,1'), fy);
-const outside = any(noLimits, below(lengthLimit, longer), below(depthLimit, deeper));
+const noLimits: Condition = below(upTo(355, '-2,1'), fy);
+const outside = any(noLimits, below(times(upTo(1), lengthLimit), longer), below(times(upTo(1), depthLimit), deeper));
 
 const beyondLimits: Gate = { when: outside, reason: 'outside-cope-limits' };
 const withinLimits: Gate = { when: not(outside), reason: 'inside-cope-limits' };

@@ -48,6 +48,7 @@ import {
 } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
+import { upTo } from './bound.ts';
 import { gammaM2 } from './factors.ts';
 import { guide, memory, seen } from './sources.ts';
 import { supportGates } from './support.ts';
@@ -180,15 +181,15 @@ export const fitCopeClearance: FitRule = {
 export const fitSetback: FitRule = {
   source: ductility,
   breach: 'refer',
-  parts: [{ of: '', given: g, least: step('g_min', pick([[atMost(h, mm(610)), mm(10)]], mm(20)), ductility) }],
+  parts: [{ of: '', given: g, least: step('g_min', pick([[atMost(h, upTo(610, '1,0')), mm(10)]], mm(20)), ductility) }],
 };
 
 /** Thickest ply in which a bolt's hole gives before the bolt; none above S355. */
 const thickest = (fy: Tree<Stress>): Tree<Length> =>
   pick(
     [
-      [atMost(inMPa(fy), 275), times(0.5, d)],
-      [atMost(inMPa(fy), 355), times(0.42, d)],
+      [atMost(inMPa(fy), upTo(275)), times(0.5, d)],
+      [atMost(inMPa(fy), upTo(355)), times(0.42, d)],
     ],
     mm(0),
   );

@@ -17,6 +17,7 @@ import {
 import type { Force, Length, Pure } from '../../units/dimension.ts';
 import type { Way } from '../standard.ts';
 import { gammaM0 } from './factors.ts';
+import { holeLimits } from './limits.ts';
 import { shortPlate } from './plateBuckling.ts';
 import { guide } from './sources.ts';
 import { wholeShear } from './webShear.ts';
@@ -93,5 +94,6 @@ export const webBesideLongPlate = (net: Tree<Force>, gammaM2n: Tree<Pure>): Way 
       guide,
     ),
     off: [isCoped, notFinPlate, shortPlate, singleRow],
+    limits: holeLimits,
   };
 };

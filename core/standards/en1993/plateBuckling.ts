@@ -15,6 +15,7 @@ import {
   times,
 } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
+import { from } from './bound.ts';
 import { gammaM0, gammaM1 } from './factors.ts';
 import { plateModulus } from './plate.ts';
 import { guide, memory } from './sources.ts';
@@ -24,7 +25,7 @@ const Eb = constant('E_b', 205_000, '-2,1');
 const pi = constant('π', Math.PI);
 
 /** A plate so short that it cannot buckle, z to the centroid of the bolts. */
-export const shortPlate: Gate = { when: atMost(z, over(tp, 0.15)), reason: 'short-plate-z' };
+export const shortPlate: Gate = { when: atMost(z, over(tp, from(0.15))), reason: 'short-plate-z' };
 
 const lambda = step('λ_LT', times(2.8, root(over(times(z1, hp), times(1.5, squared(tp))))), guide);
 const first = step('λ_L0', times(0.4, pi, root(over(Eb, fyp))), table17);

@@ -4,7 +4,7 @@ import { namedIn, type Steel, type Steels } from '../materials.ts';
 type Row = readonly [upTo: number, fy: number, fu: number];
 type Table = Readonly<Record<string, readonly Row[]>>;
 
-/** EN 1993-1-1:2005 Table 3.1, S355 as corrected in 2009; S460 the lesser of its deliveries. From memory; 275/430 seen in the joint guide. */
+/** EN 1993-1-1:2005 Table 3.1, S355 as corrected in 2009; S460 the lesser of its deliveries. From memory, but S275, seen in the joint guide. */
 const table31: Table = {
   S235: [
     [40, 235, 360],
@@ -57,14 +57,15 @@ const grades = ['S235', 'S275', 'S355', 'S460'];
 const withoutSubgrade = (name: string): string =>
   name.replace(/^(S235|S275|S355|S460)(?:JR|J0|J2|K2|NL|N|ML|M)?(?:\+(?:AR|N|M))?$/, '$1');
 
-const steelsOf = (table: Table): Steels => ({
+const steelsOf = (table: Table, fromMemory: readonly string[]): Steels => ({
   grades,
   named: namedIn(grades, withoutSubgrade),
   strengthAt: (grade, thickness): Steel | undefined => {
     const row = thickness > 0 ? table[grade]?.find(([upTo]) => thickness <= upTo) : undefined;
     return row && { fy: row[1], fu: row[2] };
   },
+  noteOf: (grade) => (fromMemory.includes(grade) ? 'memory-grade' : undefined),
 });
 
-export const recommendedSteels: Steels = steelsOf(table31);
-export const ukSteels: Steels = steelsOf(products);
+export const recommendedSteels: Steels = steelsOf(table31, ['S235', 'S355', 'S460']);
+export const ukSteels: Steels = steelsOf(products, ['S235', 'S460']);

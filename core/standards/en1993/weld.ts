@@ -15,6 +15,7 @@ import {
   times,
 } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
+import { upTo } from './bound.ts';
 import { gammaM2 } from './factors.ts';
 import { leastOf } from './optional.ts';
 import { guide, seen } from './sources.ts';
@@ -34,9 +35,9 @@ export const betaW = step(
   'β_w',
   pick(
     [
-      [atMost(inMPa(fup), 360), beta(0.8)],
-      [atMost(inMPa(fup), 430), beta(0.85)],
-      [atMost(inMPa(fup), 510), beta(0.9)],
+      [atMost(inMPa(fup), upTo(360)), beta(0.8)],
+      [atMost(inMPa(fup), upTo(430)), beta(0.85)],
+      [atMost(inMPa(fup), upTo(510)), beta(0.9)],
     ],
     beta(1),
   ),

@@ -59,6 +59,11 @@ describe('materials', () => {
     expect(faultOf(joint({ bolts: { grade: '12.9' } }))).toEqual(['unknown-bolt-grade joint.bolts.grade']);
   });
 
+  test('strengths from memory are said to be so', () => {
+    expect(notes({ beam: { section: 'UB 406x178x60', grade: 'S460M' } })).toContain('memory-grade');
+    expect(notes()).not.toContain('memory-grade');
+  });
+
   test('classes whose thread shears at 0.5 f_ub do so with threads in the plane only', () => {
     // 10.9: 0.5 x 1000 x 245/1.25 = 98.0 kN; out of the thread 0.6 x 1000 x 314.16/1.25 = 150.80 kN.
     const force = (threads: string) =>
@@ -88,6 +93,47 @@ describe('materials', () => {
     const support = { kind: 'column-flange', thickness: 12, grade: 'S235' };
     // 5.657 x 360/(√3 x 0.85 x 1.25) = 1106.6
     expect(check('weld', { support }).resistance).toBeCloseTo(1106.59, 1);
+  });
+});
+
+describe('in inches and ksi', () => {
+  test('sizes and strengths that meet a bound exactly still meet it', () => {
+    const inch = (mm: number) => mm / 25.4;
+    const ksi = (MPa: number) => (MPa * 25.4 ** 2) / 4448.2216152605;
+    const at = (h: number, top: { length: number; depth: number }, fy: number) =>
+      reportOf({
+        standard: 'en-1993',
+        units: 'in-kip',
+        reaction: 10,
+        beam: {
+          section: { depth: inch(h), width: inch(180), flange: inch(13), web: inch(9), radius: inch(10) },
+          grade: { fy: ksi(fy), fu: ksi(430) },
+        },
+        top: { length: inch(top.length), depth: inch(top.depth), radius: inch(10) },
+        setback: inch(10),
+        joint: {
+          kind: 'fin-plate',
+          firstRow: inch(top.depth + 50),
+          endDistance: inch(50),
+          bolts: { size: 'M20', grade: '8.8', threads: 'in', rows: 2, columns: 2, pitch: inch(70), gauge: inch(60) },
+          plate: {
+            thickness: inch(12),
+            grade: { fy: ksi(275), fu: ksi(430) },
+            topEdge: inch(40),
+            bottomEdge: inch(40),
+            edge: inch(50),
+          },
+          weld: { leg: inch(8) },
+        },
+      }).checks;
+    for (let h = 350; h <= 430; h += 7) {
+      const checks = at(h, { length: h, depth: h / 2 }, 355);
+      expect(checks.find(({ id }) => id === 'cope-buckling')).not.toHaveProperty('reactionAtFailure');
+    }
+    // The face stands exactly 2 d past the last column: 50 + 60 + 40.
+    expect(at(400, { length: 150, depth: 60 }, 275).find(({ id }) => id === 'cope-bending')?.of).toMatch(
+      /last column$/,
+    );
   });
 });
 

@@ -1,4 +1,4 @@
-import type { Examined } from '../check/examine.ts';
+import type { Examined } from '../check/examined.ts';
 import type { Words } from '../words/words.ts';
 import type { Numbers } from './numbers.ts';
 import type { Pen } from './pen.ts';
@@ -8,13 +8,27 @@ export interface SheetInput extends Examined {
   readonly link?: string;
 }
 
-/** What every zone of the sheet draws with and from. */
-export interface Context {
+/** What the sheet says under one standard. */
+export interface Under {
   readonly pen: Pen;
   readonly input: SheetInput;
   readonly numbers: Numbers;
   /** The region's own words. */
   readonly words: Words;
+}
+
+/** The same end under the second standard that the sheet names. */
+export interface Second extends Under {
+  /** False where no reaction at that standard's level is given: strengths only, without states. */
+  readonly stated: boolean;
+}
+
+/** What every zone of the sheet draws with and from. */
+export interface Context extends Under {
+  /** Null where the sheet names no second standard, or one that has nothing to say of this end. */
+  readonly second: Second | null;
+  /** Why the second standard that is named has nothing to say; empty where it has or none is named. */
+  readonly fault: string;
 }
 
 /** A part of the page that knows how high it is before it is drawn. */

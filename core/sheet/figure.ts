@@ -13,7 +13,7 @@ import { sheetWords as say } from './sheetWords.ts';
 import { setLines } from './textBlock.ts';
 
 /** A piece drawn less deep than this cannot be read, mm. */
-const LEAST_DEPTH = 28;
+const LEAST_DEPTH = 26;
 
 /** The end to scale with its dimensions and the governing path, its caption and the scale bar. */
 export interface Figure extends Zone {

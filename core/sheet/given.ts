@@ -1,4 +1,5 @@
 import { fixed, plain } from '../units/figures.ts';
+import { capital } from '../words/capital.ts';
 import type { Context, Zone } from './context.ts';
 import { body } from './page.ts';
 import type { TextStyle } from './pen.ts';
@@ -48,9 +49,8 @@ const copeRow = (context: Context): Row => {
     c > 0
       ? `${say[edge]} c_${suffix} ${numbers.mm(c)}, d_${suffix} ${numbers.mm(d)}, ρ_${suffix} ${numbers.mm(r)}${assumed(context, `${edge}.radius`)}`
       : `${say[edge]} ${say.none}`;
-  const label = words.cope.charAt(0).toUpperCase() + words.cope.slice(1);
   return [
-    label,
+    capital(words.cope),
     `${one('top', 't', facts.ct, facts.dt, facts.rt)}; ${one('bottom', 'b', facts.cb, facts.db, facts.rb)}`,
   ];
 };
@@ -80,7 +80,7 @@ export const holesAssumed = ({ input }: Context): string => {
 };
 
 const plateRows = (context: Context): Row[] => {
-  const { input, numbers } = context;
+  const { input, numbers, words } = context;
   const { end, facts } = input;
   const { mm, mpa } = numbers;
   const { joint } = end;
@@ -95,7 +95,10 @@ const plateRows = (context: Context): Row[] => {
   const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
   const metal = facts.Xu > 0 ? `, X_u ${mpa(facts.Xu)}${assumed(context, 'joint.weld.electrode')}` : '';
   return [
-    [labels.finPlate, `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${gradeName(context, joint.plate.grade)}`],
+    [
+      capital(words.finPlate),
+      `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${gradeName(context, joint.plate.grade)}`,
+    ],
     ['', edges],
     [labels.weld, `${say.fillets} s ${mm(facts.leg)}${metal}`],
   ];

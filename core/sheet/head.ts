@@ -2,6 +2,7 @@ import type { Context } from './context.ts';
 import { FRAME, LEFT, small, TOP, WIDTH } from './page.ts';
 import type { TextStyle } from './pen.ts';
 import { sheetWords as say } from './sheetWords.ts';
+import { optionsText, standardName } from './standardNames.ts';
 import { atMostLines, oneLine, plainRun, setLines, wrap } from './textBlock.ts';
 import { drawEmpty } from './titleBlock.ts';
 
@@ -16,23 +17,11 @@ const MARK = 48;
 const WIDEST_MARK = 84;
 const STANDARD = 64;
 
-/** Standard with its edition, as one designation. */
-export const standardName = ({ input }: Context): string => {
-  const { title, edition } = input.report.standard;
-  return /^\d{4}/.test(edition) ? `${title}:${edition}` : `${title}, ${edition}`;
-};
-
-/** Every option in force, as `key value`. */
-export const optionsText = ({ input }: Context): string =>
-  Object.entries(input.report.options)
-    .map(([key, value]) => `${key} ${value}`)
-    .join(', ');
-
 const optionStyle: TextStyle = { size: 8, family: 'narrow' };
 
 /** True where the options find room in the head strip. */
 export const optionsFit = (context: Context): boolean =>
-  wrap(context.pen, [plainRun(optionsText(context))], optionStyle, STANDARD).length <= 2;
+  wrap(context.pen, [plainRun(optionsText(context))], optionStyle, STANDARD).length <= (context.second ? 1 : 2);
 
 /** Mark, job, drawing, standard with edition and options. */
 export const drawHead = (context: Context): void => {
@@ -79,11 +68,19 @@ const drawJob = ({ pen, input }: Context, left: number, width: number): void => 
     pen.text(left + width, base, oneLine(pen, `${say.number} ${number}`, small, half - 1), { ...small, anchor: 'end' });
 };
 
+/** Standards with their editions, and the options of the first; lines closer where there are two standards. */
 const drawStandard = (context: Context, left: number): void => {
-  const { pen } = context;
-  pen.text(left, TOP + 4.1, say.title, small);
+  const { pen, second } = context;
   const style: TextStyle = { size: 10, bold: true };
-  pen.text(left, TOP + 8.2, oneLine(pen, standardName(context), style, STANDARD), style);
+  const [first, leading] = second ? [7.6, 3.7] : [8.2, 3.4];
+  pen.text(left, TOP + first - 4.1, say.title, small);
+  pen.text(left, TOP + first, oneLine(pen, standardName(context), style, STANDARD), style);
+  if (second) {
+    const other: TextStyle = { size: 9 };
+    const text = `${say.beside} ${standardName(second)}`;
+    pen.text(left, TOP + first + leading, oneLine(pen, text, other, STANDARD), other);
+  }
   const text = optionsFit(context) ? optionsText(context) : say.optionsBelow;
-  setLines(pen, left, TOP + 11.6, wrap(pen, [plainRun(text)], optionStyle, STANDARD), optionStyle, 3.2);
+  const base = TOP + first + (second ? 2 * leading - 0.1 : leading);
+  setLines(pen, left, base, wrap(pen, [plainRun(text)], optionStyle, STANDARD), optionStyle, 3.2);
 };

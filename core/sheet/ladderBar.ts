@@ -2,26 +2,31 @@ import type { Check } from '../check/report.ts';
 import type { Pen } from './pen.ts';
 import { isClose } from './sign.ts';
 
-/** mm that the reaction V takes on the axis, which ends at 3 V; a bar that goes on is broken off. */
-export const PER_V = 8.5;
-const END = 3 * PER_V;
-const BROKEN = END + 1.4;
+/** The axis ends at 3 V; a bar that goes on is broken off a little beyond. */
+const END = 3;
+const BEYOND = 1.4;
 
-/** The reaction at which a check fails, as a bar from x along the row's middle y. */
+/** Where a bar stands: its left edge and its middle, and what the reaction V takes on the axis; mm. */
+export interface BarPlace {
+  readonly x: number;
+  readonly y: number;
+  readonly height: number;
+  readonly perV: number;
+}
+
+/** The reaction at which a check fails, as a bar; the axis counts in the reaction V, in the same unit. */
 export const drawBar = (
   pen: Pen,
-  x: number,
-  y: number,
+  { x, y, height, perV }: BarPlace,
   reaction: number,
   { reactionAtFailure, state, utilisation }: Check,
   governs: boolean,
 ): void => {
-  // The axis counts in V: without a reaction it has no length.
+  // Without a reaction the axis has no length.
   if (reactionAtFailure === null || reactionAtFailure === undefined || reaction <= 0) return;
   const times = reactionAtFailure / reaction;
-  const beyond = times > 3;
-  const length = beyond ? BROKEN : times * PER_V;
-  const height = governs ? 2.5 : 2;
+  const beyond = times > END;
+  const length = beyond ? END * perV + BEYOND : times * perV;
   const top = y - height / 2;
   if (state === 'fails') {
     pen.box(x, top, Math.max(length, 0.4), height, { fill: 'black' });
@@ -29,22 +34,28 @@ export const drawBar = (
   }
   const width = governs ? 0.35 : 0.2;
   const style = state === 'refer' ? { width: 0.25, dash: [1, 0.7] } : { width };
-  if (beyond) drawBroken(pen, x, top, height, style);
+  if (beyond) drawBroken(pen, { x, top, length, height }, style);
   else pen.box(x, top, length, height, style);
   if (state === 'holds' && isClose(utilisation)) pen.box(x, y, length, height / 2, { fill: 'black' });
 };
 
+interface Bar {
+  readonly x: number;
+  readonly top: number;
+  readonly length: number;
+  readonly height: number;
+}
+
 /** Open to the right, with the zigzag of a break. */
 const drawBroken = (
   pen: Pen,
-  x: number,
-  top: number,
-  height: number,
+  { x, top, length, height }: Bar,
   style: { width: number; dash?: readonly number[] },
 ): void => {
-  const right = x + BROKEN;
-  const zig = 0.45;
+  const right = x + length;
+  const zig = 0.225 * height;
   const bottom = top + height;
+  const over = 0.2 * height;
   pen.path(
     { x: right, y: top },
     [
@@ -60,7 +71,7 @@ const drawBroken = (
     { x: right + zig, y: middle - zig / 2 },
     { x: right - zig, y: middle + zig / 2 },
     { x: right, y: middle + zig },
-    { x: right, y: bottom + 0.4 },
+    { x: right, y: bottom + over },
   ];
-  pen.path({ x: right, y: top - 0.4 }, zigzag, { width: style.width });
+  pen.path({ x: right, y: top - over }, zigzag, { width: style.width });
 };

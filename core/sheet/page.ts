@@ -30,3 +30,4 @@ export const table = { size: 9 } as const;
 export const small = { size: 8 } as const;
 export const foot = { size: 8.5 } as const;
 export const LEADING = 3.65;
+export const FOOT_LEADING = 3.45;

@@ -28,7 +28,8 @@ const drawingWords = (context: Context): DrawingWords => {
     boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
     holes: bolts.holes ?? holesAssumed(context),
     cope: words.cope,
-    plate: (end.joint.kind === 'fin-plate' ? say.labels.finPlate : say.labels.ply).toLowerCase(),
+    gauge: words.gauge,
+    plate: end.joint.kind === 'fin-plate' ? words.finPlate : say.labels.ply.toLowerCase(),
   };
 };
 

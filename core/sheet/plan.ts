@@ -2,17 +2,22 @@ import { type Row, rowsOf, rowsWithin } from './checkRows.ts';
 import { tableZone } from './checkTable.ts';
 import type { Context, Zone } from './context.ts';
 import { type Figure, type Figures, figuresOf } from './figure.ts';
-import { footingZone } from './footing.ts';
+import { footingZones } from './footing.ts';
 import { givenZone } from './given.ts';
-import { limitsZone } from './limitsZone.ts';
-import { FIGURE_TOP } from './page.ts';
+import { limitsZones } from './limitsZone.ts';
 import type { Code } from './qr.ts';
+import { figureTop } from './secondVerdict.ts';
 import { stressNumbers, stressProfiles } from './stressZone.ts';
-import { workingElsewhere, workingZones } from './workingZone.ts';
+import { workingElsewhere, workingsInLines, workingWithAll, workingZones } from './workingZone.ts';
 
 /** Widths of figure and data, mm. */
-export const FIGURE_WIDTH = 113;
-export const DATA_WIDTH = 65;
+interface Widths {
+  readonly figure: number;
+  readonly data: number;
+}
+
+/** Beside a second standard the data are wider, for fewer lines. */
+const widthsOf = ({ second }: Context): Widths => (second ? { figure: 108, data: 70 } : { figure: 113, data: 65 });
 const STRESS_SCALES = [2, 5, 10, 20] as const;
 /** Most that the stress profiles may take, the air above them, and what the figure may get beyond its need, mm. */
 const STRESS_HEIGHT = 72;
@@ -21,6 +26,7 @@ const SPARE = 6;
 
 /** What stands on the first sheet, and what goes on further ones. */
 export interface Plan {
+  readonly widths: Widths;
   readonly figure: Figure;
   readonly given: Zone;
   readonly stress: Zone;
@@ -36,18 +42,25 @@ export interface Plan {
   readonly workingLater: boolean;
 }
 
+/** Under the table, and under the working. */
+interface Texts {
+  readonly footing: Zone;
+  readonly limits: Zone;
+}
+
 interface Parts {
   readonly context: Context;
   readonly rows: readonly Row[];
   readonly given: Zone;
-  readonly footing: Zone;
-  readonly limits: Zone;
+  /** What stands around the working, the fullest first. */
+  readonly texts: readonly Texts[];
   readonly figures: Figures;
   /** Profiles of the shear stress at standard scales, the largest first, and the same in numbers alone. */
   readonly profiles: readonly Zone[];
   readonly stressInNumbers: Zone;
   /** mm between verdict and title block. */
   readonly room: number;
+  readonly widths: Widths;
 }
 
 /** How the shear stress is shown: profiles, or numbers where these leave no room. */
@@ -66,13 +79,13 @@ interface Choice {
 }
 
 /** What stands below figure and data. */
-interface Below {
+interface Below extends Texts {
   readonly rows: readonly Row[];
   readonly working: Zone | null;
 }
 
 /** Height left for figure and data, mm. */
-const roomAbove = ({ context, room, footing, limits }: Parts, { rows, working }: Below): number =>
+const roomAbove = ({ context, room }: Parts, { rows, footing, working, limits }: Below): number =>
   room - (tableZone(context, rows).height + footing.height + (working?.height ?? 0) + limits.height);
 
 /** Height that the data need at least. */
@@ -81,21 +94,33 @@ const dataHeight = (parts: Parts, showing: Showing): number =>
 
 /** The first sheet with this figure, fit or not. */
 const laidOut = (parts: Parts, figure: Figure, showing: Showing, below: Below): Plan => {
-  const { context, given, footing, limits } = parts;
-  const { rows, working } = below;
+  const { context, given } = parts;
+  const { rows, footing, working, limits } = below;
   const least = Math.max(figure.height, dataHeight(parts, showing));
   const upper = least + Math.max(0, Math.min(roomAbove(parts, below) - least, SPARE));
   const stress = stressWithin(parts, showing, upper - given.height - AIR);
   const later = parts.rows.slice(rows.length);
   const table = tableZone(context, rows);
-  return { figure, given, stress, table, footing, working, limits, upper, later, workingLater: false };
+  return {
+    widths: parts.widths,
+    figure,
+    given,
+    stress,
+    table,
+    footing,
+    working,
+    limits,
+    upper,
+    later,
+    workingLater: false,
+  };
 };
 
 /** The first sheet under these choices; null where it does not fit. Only figures that may fit are laid out. */
 const planned = (parts: Parts, { showing, scale, labelled }: Choice, below: Below): Plan | null => {
-  const { figures } = parts;
+  const { figures, widths } = parts;
   const height = roomAbove(parts, below);
-  const fits = (one: { width: number; height: number }): boolean => one.height <= height && one.width <= FIGURE_WIDTH;
+  const fits = (one: { width: number; height: number }): boolean => one.height <= height && one.width <= widths.figure;
   if (dataHeight(parts, showing) > height || !fits(figures.least(scale))) return null;
   const figure = figures.at(scale, labelled);
   return fits(figure) ? laidOut(parts, figure, showing, below) : null;
@@ -111,13 +136,16 @@ const choices = ({ figures }: Parts): Choice[] => {
   );
 };
 
-/** All on one sheet: the largest figure first, then the fullest working. */
-const onOneSheet = (parts: Parts): Plan | null => {
-  const { rows } = parts;
-  const workings = workingZones(parts.context);
+/** What may stand below the figure, the fullest first: of text and working the text gives way first. */
+const belows = ({ rows, texts }: Parts, workings: readonly (Zone | null)[]): Below[] =>
+  workings.flatMap((working) => texts.map((text) => ({ rows, working, ...text })));
+
+/** All on one sheet: the largest figure first, then the fullest text. */
+const onOneSheet = (parts: Parts, workings: readonly (Zone | null)[]): Plan | null => {
+  const all = belows(parts, workings);
   for (const choice of choices(parts)) {
-    for (const working of workings) {
-      const plan = planned(parts, choice, { rows, working });
+    for (const below of all) {
+      const plan = planned(parts, choice, below);
       if (plan) return plan;
     }
   }
@@ -126,32 +154,44 @@ const onOneSheet = (parts: Parts): Plan | null => {
 
 /** The working on the next sheet; where that is not enough, the table goes on there too. */
 const onMore = (parts: Parts): Plan => {
-  const { context, rows, figures, room, footing, limits } = parts;
+  const { context, rows, figures, room, texts } = parts;
   const working = workingElsewhere(context, 2);
-  for (const choice of choices(parts)) {
-    const plan = planned(parts, choice, { rows, working });
-    if (plan) return { ...plan, workingLater: true };
-  }
+  const plan = onOneSheet(parts, [working]);
+  if (plan) return { ...plan, workingLater: true };
+  const { footing, limits } = texts.at(-1)!;
   const figure = figures.smallest();
   const upper = Math.max(figure.height, dataHeight(parts, 'numbers'));
   const others = upper + footing.height + limits.height + working.height;
-  const first = rows.slice(0, Math.max(1, rowsWithin(rows, room - others)));
-  return { ...laidOut(parts, figure, 'numbers', { rows: first, working }), workingLater: true };
+  const first = rows.slice(0, Math.max(1, rowsWithin(context, rows, room - others)));
+  return { ...laidOut(parts, figure, 'numbers', { rows: first, working, footing, limits }), workingLater: true };
+};
+
+const textsOf = (context: Context): Texts[] => {
+  const limits = limitsZones(context);
+  return footingZones(context).map((footing, i) => ({ footing, limits: limits[i]! }));
+};
+
+/** Two standards on one sheet: rather the last lines of the working than a second sheet, rather none. */
+const pairedOnOneSheet = (parts: Parts): Plan | null => {
+  const { context } = parts;
+  if (!context.second) return null;
+  return onOneSheet(parts, workingsInLines(context)) ?? onOneSheet(parts, [workingWithAll(context)]);
 };
 
 /** Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on further sheets. */
 export const planOf = (context: Context, blockTop: number, code: Code | null): Plan => {
-  const room = blockTop - FIGURE_TOP - 0.6;
+  const room = blockTop - figureTop(context) - 0.6;
+  const widths = widthsOf(context);
   const parts: Parts = {
     context,
     rows: rowsOf(context),
-    given: givenZone(context, DATA_WIDTH),
-    footing: footingZone(context),
-    limits: limitsZone(context),
-    profiles: stressProfiles(context, DATA_WIDTH, STRESS_SCALES),
-    stressInNumbers: stressNumbers(context, DATA_WIDTH),
-    figures: figuresOf(context, FIGURE_WIDTH, room, code),
+    given: givenZone(context, widths.data),
+    texts: textsOf(context),
+    profiles: stressProfiles(context, widths.data, STRESS_SCALES),
+    stressInNumbers: stressNumbers(context, widths.data),
+    figures: figuresOf(context, widths.figure, room, code),
     room,
+    widths,
   };
-  return onOneSheet(parts) ?? onMore(parts);
+  return onOneSheet(parts, workingZones(context)) ?? pairedOnOneSheet(parts) ?? onMore(parts);
 };

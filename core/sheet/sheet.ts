@@ -4,34 +4,34 @@ import { endKeywords } from './endInPdf.ts';
 import { loadFaces } from './faces.ts';
 import { drawHead } from './head.ts';
 import { numbersOf } from './numbers.ts';
-import { bottomOf, FIGURE_TOP, LEFT, type Paper, papers, WIDTH } from './page.ts';
+import { bottomOf, LEFT, type Paper, papers, WIDTH } from './page.ts';
 import { writePdf } from './pdf.ts';
 import { Pen } from './pen.ts';
-import { DATA_WIDTH, FIGURE_WIDTH, type Plan, planOf } from './plan.ts';
+import { type Plan, planOf } from './plan.ts';
 import { type Code, codeOf, sideOf } from './qr.ts';
+import { withSecond } from './second.ts';
+import { figureTop } from './secondVerdict.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { blockHeight, CODE_ROOM, drawTitleBlock } from './titleBlock.ts';
 import { drawVerdict, governingOf } from './verdictLine.ts';
-import { drawFurtherFrame, furtherPages, workedChecks } from './workingPages.ts';
+import { allWorked, type Worked } from './workingBlocks.ts';
+import { drawFurtherFrame, furtherPages } from './workingPages.ts';
 
 export interface SheetOptions {
   /** `governing`: the working of the check that governs, on the first sheet; `all`: those of all checks on further sheets too. */
   readonly workings: 'governing' | 'all';
 }
 
-/** Zones from the top down; what is left of the height stands between them. */
-const drawPlan = (plan: Plan, blockTop: number): void => {
-  const { figure, given, stress, table, footing, working, limits, upper } = plan;
+/** Zones from `top` down; what is left of the height stands between them. */
+const drawPlan = (plan: Plan, top: number, blockTop: number): void => {
+  const { widths, figure, given, stress, table, footing, working, limits, upper } = plan;
   const used = upper + table.height + footing.height + (working?.height ?? 0) + limits.height;
-  const gap = Math.max(0, Math.min(4, (blockTop - FIGURE_TOP - used - 0.6) / 3));
-  figure.draw(
-    LEFT + Math.max(0, (FIGURE_WIDTH - figure.width) / 2),
-    FIGURE_TOP + Math.max(0, (upper - figure.height) / 2),
-  );
-  const data = LEFT + WIDTH - DATA_WIDTH;
-  given.draw(data, FIGURE_TOP);
-  stress.draw(data, FIGURE_TOP + Math.max(given.height + 1, upper - stress.height));
-  let y = FIGURE_TOP + upper + gap;
+  const gap = Math.max(0, Math.min(4, (blockTop - top - used - 0.6) / 3));
+  figure.draw(LEFT + Math.max(0, (widths.figure - figure.width) / 2), top + Math.max(0, (upper - figure.height) / 2));
+  const data = LEFT + WIDTH - widths.data;
+  given.draw(data, top);
+  stress.draw(data, top + Math.max(given.height + 1, upper - stress.height));
+  let y = top + upper + gap;
   table.draw(LEFT, y);
   y += table.height;
   footing.draw(LEFT, y);
@@ -51,19 +51,25 @@ const planned = (context: Context, bottom: number, inBlock: Code | null, found: 
   return lost ? at(true, null) : first;
 };
 
+/** Workings on further sheets: all where they are asked for, else that of the check that governs where it has no room on the first. */
+const workedOf = (context: Context, workings: SheetOptions['workings'], { workingLater }: Plan): readonly Worked[] => {
+  const { second } = context;
+  if (workings === 'all') return [context, ...(second ? [second] : [])].map(allWorked);
+  const governing = governingOf(context);
+  return workingLater && governing ? [{ under: context, checks: [governing] }] : [];
+};
+
 /** All pages as marks. */
 const drawSheet = (context: Context, { workings }: SheetOptions, bottom: number): void => {
   const { pen, input } = context;
   const found = input.link === undefined ? null : codeOf(input.link, CODE_ROOM);
   const code = found !== null && sideOf(found) <= CODE_ROOM ? found : null;
   const { plan, blockTop, lost } = planned(context, bottom, code, found);
-  const governing = governingOf(context);
-  const checks = workings === 'all' ? workedChecks(context) : plan.workingLater && governing ? [governing] : [];
-  const further = furtherPages(context, plan.later, checks, bottom);
+  const further = furtherPages(context, plan.later, workedOf(context, workings, plan), bottom);
   const of = further.length + 1;
   drawHead(context);
   drawVerdict(context);
-  drawPlan(plan, blockTop);
+  drawPlan(plan, figureTop(context), blockTop);
   drawTitleBlock(context, blockTop, { code, lost, sheet: 1, of });
   further.forEach((draw, i) => {
     pen.turnTo(i + 1);
@@ -79,7 +85,7 @@ export const sheetPages = async (input: SheetInput, options: SheetOptions): Prom
   const paper: Paper = end.sheet?.paper ?? 'A4';
   const words = wordsFor(report.words);
   const numbers = numbersOf(report.units, end.sheet?.decimal ?? '.');
-  drawSheet({ pen, input, numbers, words }, options, bottomOf(paper));
+  drawSheet(withSecond({ pen, input, numbers, words }), options, bottomOf(paper));
   return pen;
 };
 

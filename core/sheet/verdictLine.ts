@@ -1,8 +1,9 @@
 import type { Check } from '../check/report.ts';
-import type { Context } from './context.ts';
+import type { Context, Under } from './context.ts';
 import { FIGURE_TOP, LEFT, NARROW, VERDICT_TOP, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
+import { drawSecondVerdict, figureTop } from './secondVerdict.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { drawSign, isClose } from './sign.ts';
 import { atMostLines, setLines, wrap } from './textBlock.ts';
@@ -15,7 +16,7 @@ const tries: readonly { style: TextStyle; lines: number; leading: number; first:
   { style: { size: 9.5 }, lines: 2, leading: 3.9, first: 4.4 },
 ];
 
-export const governingOf = ({ input }: Context): Check | undefined =>
+export const governingOf = ({ input }: Pick<Under, 'input'>): Check | undefined =>
   input.report.checks.find(({ id }) => id === input.report.governing);
 
 /** The verdict's sign, word and ratio, and the sentence. */
@@ -25,7 +26,7 @@ export const drawVerdict = (context: Context): void => {
   const governing = governingOf(context);
   const utilisation = governing?.utilisation ?? null;
   pen.line(LEFT, VERDICT_TOP, LEFT + WIDTH, VERDICT_TOP, NARROW);
-  pen.line(LEFT, FIGURE_TOP - 1.2, LEFT + WIDTH, FIGURE_TOP - 1.2, NARROW);
+  pen.line(LEFT, figureTop(context) - 1.2, LEFT + WIDTH, figureTop(context) - 1.2, NARROW);
   const stated = verdict === 'refer' || utilisation === null ? '' : ` ${numbers.ratio(utilisation)}`;
   const text = `${say.verdict[verdict]}${stated}`;
   const width = pen.width(text, word);
@@ -37,6 +38,7 @@ export const drawVerdict = (context: Context): void => {
   pen.text(wordLeft, middle + 2.25, text, { ...word, white: verdict === 'fails' });
   const close = verdict === 'holds' && isClose(utilisation) ? drawClose(context, middle) : 0;
   drawSentence(context, wordLeft + width + 4, LEFT + WIDTH - close - (close ? 3 : 0));
+  drawSecondVerdict(context);
 };
 
 const drawClose = ({ pen, numbers }: Context, middle: number): number => {

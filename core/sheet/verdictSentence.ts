@@ -1,4 +1,5 @@
 import type { Check, Numbers } from '../check/report.ts';
+import { shortOf, type Words } from '../words/words.ts';
 import { limitText } from './fitLimit.ts';
 import type { Numbers as Figures } from './numbers.ts';
 import { sheetWords as say } from './sheetWords.ts';
@@ -6,6 +7,13 @@ import { sheetWords as say } from './sheetWords.ts';
 /** Title of a check with the part that its numbers speak of. */
 export const titleOf = ({ title, ofText }: Pick<Check, 'title' | 'ofText'>): string =>
   ofText ? `${title}, ${ofText}` : title;
+
+/** The same for a narrow column. */
+export const shortTitleOf = (words: Words, check: Check): string =>
+  titleOf({
+    title: shortOf(words, check),
+    ...(check.ofText && { ofText: say.shortWays[check.of ?? ''] ?? check.ofText }),
+  });
 
 /** What refers and why: by name where one or two do for the same reason, else by their number. */
 const refersText = (checks: readonly Check[]): string => {

@@ -2,7 +2,7 @@ import type { Check } from '../check/report.ts';
 import { RESULT_FIGURES, STEP_FIGURES } from '../formula/line.ts';
 import type { WorkingRow } from '../formula/working.ts';
 import { fixed, significant } from '../units/figures.ts';
-import type { Context } from './context.ts';
+import type { Under } from './context.ts';
 import type { SetRun } from './pen.ts';
 import { richText } from './richText.ts';
 import { plainRun } from './textBlock.ts';
@@ -25,7 +25,7 @@ const same = (a: number, b: number | null): boolean => b !== null && Math.abs(a 
 const closesOf = (check: Check, row: WorkingRow, last: boolean): boolean =>
   last || (row.unit === check.unit && same(row.value, check.demand) && row.symbol === check.symbol);
 
-const sidesOf = (context: Context, row: WorkingRow, closes: boolean): SetRun[][] => {
+const sidesOf = (context: Under, row: WorkingRow, closes: boolean): SetRun[][] => {
   const { marked } = context.numbers;
   const value = significant(row.value, closes ? RESULT_FIGURES : STEP_FIGURES);
   const sides: SetRun[][] = [];
@@ -39,7 +39,7 @@ const sidesOf = (context: Context, row: WorkingRow, closes: boolean): SetRun[][]
 };
 
 /** The steps of a check's working. */
-export const stepsOf = (context: Context, check: Check): Step[] => {
+export const stepsOf = (context: Under, check: Check): Step[] => {
   const rows = check.working ?? [];
   return rows.map((row, i) => {
     const closes = closesOf(check, row, i === rows.length - 1);
@@ -69,7 +69,7 @@ export const shortLine = ({ symbol, sides }: Step): SetRun[] => {
 };
 
 /** How the ratio comes about, where demand and resistance alone make it; else from the reaction. */
-export const ratioText = ({ numbers, input }: Context, check: Check): string => {
+export const ratioText = ({ numbers, input }: Under, check: Check): string => {
   const { utilisation, demand, resistance, reactionAtFailure } = check;
   if (utilisation === null) return '';
   const shown = fixed(utilisation, 3);

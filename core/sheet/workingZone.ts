@@ -1,9 +1,10 @@
 import type { Check } from '../check/report.ts';
-import type { Context, Zone } from './context.ts';
+import type { Context, Under, Zone } from './context.ts';
+import { lower } from './lower.ts';
 import { body, LEFT, WIDTH } from './page.ts';
 import type { SetRun, TextStyle } from './pen.ts';
-import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
+import { standardTitles } from './standardNames.ts';
 import { type Lines, plainRun, setLines, wrap } from './textBlock.ts';
 import { governingOf } from './verdictLine.ts';
 import { titleOf } from './verdictSentence.ts';
@@ -20,18 +21,18 @@ export const sourceText = ({ clause, basis }: Check): string => {
   return [named, basis === clause ? '' : basis].filter(Boolean).join(', ');
 };
 
-const headingOf = (context: Context, check: Check): SetRun[] => {
+/** `lead`: what stands before the title. */
+const headingOf = (context: Under, check: Check, lead: string): SetRun[] => {
   const { numbers } = context;
   const ratio = ratioText(context, check);
   const printed = numbers.ratio(check.utilisation);
   return [
-    plainRun(`${say.working}${titleOf(check).charAt(0).toLowerCase()}${titleOf(check).slice(1)}`, true),
+    plainRun(`${lead}${lower(titleOf(check))}`, true),
     plainRun(`  ${sourceText(check)}${ratio ? `;  ${say.ratioIs} ${ratio}, ${say.printed} ${printed}` : ''}`),
   ];
 };
 
-const broken = (context: Context, runs: readonly SetRun[]): SetRun[][] =>
-  wrap(context.pen, runs, style, WIDTH - INDENT);
+const broken = (context: Under, runs: readonly SetRun[]): SetRun[][] => wrap(context.pen, runs, style, WIDTH - INDENT);
 
 /** One line of the block, with a second step beside the first where both are short. */
 interface Line {
@@ -39,9 +40,13 @@ interface Line {
   right?: readonly SetRun[];
 }
 
+/** Demand and resistance alone, with their numbers. */
+const closingLines = (context: Under, steps: readonly Step[]): SetRun[][] =>
+  steps.filter(({ closes }) => closes).flatMap((step) => broken(context, wholeLine(step, true)));
+
 /** Demand and resistance with their numbers, the steps before them by formula and value. */
-const shortLines = (context: Context, steps: readonly Step[]): SetRun[][] => {
-  const closing = steps.filter(({ closes }) => closes).flatMap((step) => broken(context, wholeLine(step, true)));
+const shortLines = (context: Under, steps: readonly Step[]): SetRun[][] => {
+  const closing = closingLines(context, steps);
   const others = steps.filter(({ closes }) => !closes);
   if (others.length === 0) return closing;
   const list = others.flatMap((step, i) => [...(i > 0 ? [plainRun('; ')] : []), ...shortLine(step)]);
@@ -49,7 +54,7 @@ const shortLines = (context: Context, steps: readonly Step[]): SetRun[][] => {
 };
 
 /** Every step with its numbers, one below the other; two short ones share a line. */
-const fullLines = (context: Context, steps: readonly Step[]): Line[] => {
+const fullLines = (context: Under, steps: readonly Step[]): Line[] => {
   const { pen } = context;
   const half = (WIDTH - INDENT) / 2;
   const lines: (Line & { open: boolean })[] = [];
@@ -69,18 +74,38 @@ const fullLines = (context: Context, steps: readonly Step[]): Line[] => {
   return lines;
 };
 
-/** The working of the check that governs, in full and in short; null where it has none. */
-export const workingZones = (context: Context): readonly (Zone | null)[] => {
+/** The working of the check that governs, in full, in short, and its last lines alone; none where it has none. */
+const zonesOf = (context: Under, lead: string): readonly Zone[] => {
   const check = governingOf(context);
   const steps = check ? stepsOf(context, check) : [];
-  if (!check || steps.length === 0) return [null];
-  const heading = wrap(context.pen, headingOf(context, check), style, WIDTH);
-  return [fullLines(context, steps), shortLines(context, steps).map((left) => ({ left }))].map((lines) =>
-    zoneOf(context, heading, lines),
-  );
+  if (!check || steps.length === 0) return [];
+  const heading = wrap(context.pen, headingOf(context, check, lead), style, WIDTH);
+  const [short, closing] = [shortLines, closingLines].map((of) => of(context, steps).map((left) => ({ left })));
+  return [fullLines(context, steps), short!, closing!].map((lines) => zoneOf(context, heading, lines));
 };
 
-const zoneOf = ({ pen }: Context, heading: Lines, lines: readonly Line[]): Zone => ({
+const stacked = (above: Zone, below: Zone): Zone => ({
+  height: above.height + below.height,
+  draw: (x, y) => {
+    above.draw(x, y);
+    below.draw(x, y + above.height);
+  },
+});
+
+/** Workings of the checks that govern, the fullest first: those of both standards, then the first's alone; null where there is none. */
+export const workingZones = (context: Context): readonly (Zone | null)[] => {
+  const { second } = context;
+  const [one, two] = standardTitles(context);
+  const [full, short] = zonesOf(context, second ? say.workingUnder(one) : say.working);
+  if (!full || !short) return [null];
+  if (!second) return [full, short];
+  const [fullOther, shortOther] = second.stated ? zonesOf(second, say.workingUnder(two)) : [];
+  const both =
+    fullOther && shortOther ? [stacked(full, fullOther), stacked(full, shortOther), stacked(short, shortOther)] : [];
+  return [...both, full, short];
+};
+
+const zoneOf = ({ pen }: Under, heading: Lines, lines: readonly Line[]): Zone => ({
   height: HEADING + (heading.length - 1 + lines.length) * LEADING,
   draw: (_x, y) => {
     setLines(pen, LEFT, y + 3.3, heading, style, LEADING);
@@ -93,11 +118,19 @@ const zoneOf = ({ pen }: Context, heading: Lines, lines: readonly Line[]): Zone 
   },
 });
 
-/** Says on which sheet the working stands. */
-export const workingElsewhere = ({ pen }: Context, sheet: number): Zone => ({
+/** The last lines alone of the working of the check that governs under the first of two standards; none where it has none. */
+export const workingsInLines = (context: Context): readonly Zone[] =>
+  zonesOf(context, say.workingUnder(standardTitles(context)[0])).slice(2);
+
+const remark = ({ pen }: Under, text: string): Zone => ({
   height: HEADING,
   draw: (_x, y) => {
-    const runs = [plainRun(say.working, true), ...richText(say.onSheet(sheet), 'prose')];
-    pen.text(LEFT, y + 3.3, runs, style);
+    pen.text(LEFT, y + 3.3, [plainRun(say.working, true), plainRun(text)], style);
   },
 });
+
+/** Says on which sheet the working stands. */
+export const workingElsewhere = (context: Context, sheet: number): Zone => remark(context, say.onSheet(sheet));
+
+/** Says that the working comes with those of all checks. */
+export const workingWithAll = (context: Context): Zone => remark(context, say.withAll);

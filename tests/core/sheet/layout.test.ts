@@ -10,6 +10,7 @@ import { wordsFor } from '../../../core/words/wordsFor.ts';
 import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
 import { end, examined, fullest, withSheet } from './ends.ts';
 import { boxOf, type FoundBox, type FoundText, pathsOf, textsOf, wholeText } from './readPdf.ts';
+import { onPaper, pairs } from './twoStandards.ts';
 
 const A4 = { width: 210, height: 297 };
 const LETTER = { width: 215.9, height: 279.4 };
@@ -57,6 +58,9 @@ const ends: readonly (readonly [name: string, input: object])[] = [
   ['on Letter', withSheet({ ...end.sheet, paper: 'Letter' })],
   ['with a decimal comma', withSheet({ ...end.sheet, decimal: ',' })],
   ['with a notch of three metres', { ...end, top: { length: 3000, depth: 45, radius: 10 } }],
+  ...pairs.flatMap(([name, input]) =>
+    (['A4', 'Letter'] as const).map((paper) => [`${name}, on ${paper}`, onPaper(input, paper)] as const),
+  ),
 ];
 
 describe.each(ends)('the sheet of an end that %s', (_, input) => {
@@ -77,7 +81,7 @@ describe.each(ends)('the sheet of an end that %s', (_, input) => {
 
   it('is set no smaller than 8 pt, subscripts no smaller than 6.5 pt', () => {
     for (const { text, size } of [page, ...further].flat()) {
-      expect(size, text).toBeGreaterThan(/^[A-Za-z0-9,.]{1,8}$/.test(text) ? 6.45 : 7.95);
+      expect(size, text).toBeGreaterThan(/^[A-Za-z0-9,.(−_ρ)]{1,8}$/.test(text) ? 6.45 : 7.95);
     }
   });
 
@@ -237,7 +241,8 @@ describe('what is too much for one page', () => {
   it('cautions of several lines are set in full, above what else stands at the foot', async () => {
     const whole = examined({ ...fullest, sheet: { paper: 'Letter' } });
     const pen = await sheetPages(whole, { workings: 'all' });
-    const context = { pen, input: whole, numbers: numbersOf('mm-kN', '.'), words: wordsFor(whole.report.words) };
+    const under = { pen, input: whole, numbers: numbersOf('mm-kN', '.'), words: wordsFor(whole.report.words) };
+    const context = { ...under, second: null, fault: '' };
     const long = {
       ...context,
       words: { ...context.words, cautions: Array.from({ length: 9 }, () => 'Ask the designer first.') },
@@ -266,11 +271,17 @@ describe('what is too much for one page', () => {
   });
 });
 
+const paperAndSecond = fc.record({
+  paper: fc.constantFrom('A4', 'Letter'),
+  beside: fc.record({ standard: fc.constantFrom('csa-s16', 'aisc-360-asd', 'as-4100', 'en-1993', 'none') }),
+});
+
 describe('any plausible end', () => {
   it('gets a sheet whose text stays in the window and whose numbers are all finite', async () => {
     await fc.assert(
-      fc.asyncProperty(plausibleEnd, fc.constantFrom('A4', 'Letter'), async (drawn, paper) => {
-        const found = examine({ ...endOf(drawn), mark: 'X-1', sheet: { paper } });
+      fc.asyncProperty(plausibleEnd, paperAndSecond, async (drawn, sheet) => {
+        const { paper } = sheet;
+        const found = examine({ ...endOf(drawn), mark: 'X-1', sheet });
         fc.pre('examined' in found);
         if (!('examined' in found)) return;
         const { pages } = await sheetPages(found.examined, { workings: 'all' });

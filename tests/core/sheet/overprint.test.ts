@@ -7,9 +7,10 @@ import { goodEnds } from '../../support/published.ts';
 import { examined } from './ends.ts';
 import { inOtherUnits } from './inOtherUnits.ts';
 import { boxOf, type FoundBox } from './readPdf.ts';
+import { pairs } from './twoStandards.ts';
 
 const demo = JSON.parse(readFileSync(new URL('../../../fixtures/demo/citrus-packhouse.json', import.meta.url), 'utf8'));
-const ends = [{ name: 'citrus-packhouse', end: demo }, ...goodEnds()].map(({ name, end }) => [name, end] as const);
+const alone = [{ name: 'citrus-packhouse', end: demo }, ...goodEnds()].map(({ name, end }) => [name, end] as const);
 
 const pagesOf = async (end: object, paper: string): Promise<Mark[][]> => {
   const input = examined({ ...end, sheet: { ...(end as { sheet?: object }).sheet, paper } });
@@ -91,16 +92,18 @@ const drawingWords = (page: readonly Mark[]) =>
     return [{ text: mark.text, bold: mark.face.name.includes('Bold'), ground, struck }];
   });
 
-describe.each(ends)('the sheet of %s', (_, end) => {
+describe.each([...alone, ...pairs])('the sheet of %s', (_, end) => {
   it.each(['A4', 'Letter'])(
     'on %s prints no text on another nor on the square code, in its own units and the other',
     async (paper) => {
-      for (const given of [end, inOtherUnits(end)]) {
+      for (const given of [end, inOtherUnits(end as { units: string })]) {
         for (const page of await pagesOf(given, paper)) expect(overprints(page)).toEqual([]);
       }
     },
   );
+});
 
+describe.each(alone)('the drawing on the sheet of %s', (_, end) => {
   it.each(['A4', 'Letter'])(
     'on %s draws no line over a word of the drawing, and no line under a force',
     async (paper) => {

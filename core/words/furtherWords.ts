@@ -33,6 +33,7 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'inside-cope-limits': 'the notch is inside the published limits',
     'both-coped': 'both flanges are notched',
     'last-column-at-face': 'the last column stands at the face of the notch',
+    'last-column-apart': 'the face stands clear of the last column',
     'conventional-plate': 'not asked of a conventional plate',
     'extended-plate': 'not asked of an extended plate or a web bolted to a ply',
     'ply-not-described': 'the ply beyond the bolts is not described: check it apart',

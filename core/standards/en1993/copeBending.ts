@@ -85,32 +85,17 @@ const lastColumn = plus(eEnd, times(minus(m, 1), q));
  */
 const waysOf = (of: 'rectangle' | 'tee', { cut, V: Vpl }: CutInShear, block: Tree<Force>, none: Gate): Way[] => {
   const xN = step('x_N', minus(cut.c, lastColumn), guide, 'cope beyond the last column');
-  const near = below(xN, times(from(2), d));
+  const near = all(not(oneColumn), below(xN, times(from(2), d)));
   const M0 = step('M_0', over(times(fy, cut.W), gammaM0), guide);
   const beside = step('V_pl,2', pick([[noColumnInCope, Vpl]], least(Vpl, block)), guide);
   const column = plus(g, lastColumn);
-  const face: Interaction = {
-    M0,
-    Vpl: pick(
-      [
-        [oneColumn, Vpl],
-        [near, beside],
-      ],
-      Vpl,
-    ),
-    arm: pick(
-      [
-        [oneColumn, cut.ec],
-        [near, most(cut.ec, column)],
-      ],
-      cut.ec,
-    ),
-  };
   const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
-  const asOne: Gate = { when: all(not(oneColumn), near), reason: 'last-column-at-face' };
+  const asOne: Gate = { when: near, reason: 'last-column-at-face' };
+  const apart: Gate = { when: not(near), reason: 'last-column-apart' };
   return [
     way(`${of}, last column`, 'V e', { M0, Vpl: beside, arm: column }, [singleColumn, asOne, none]),
-    way(of, 'V e_c', face, [none]),
+    way(of, 'V e', { M0, Vpl: beside, arm: step('e', most(cut.ec, column), guide, 'x_N < 2 d') }, [apart, none]),
+    way(of, 'V e_c', { M0, Vpl, arm: cut.ec }, [asOne, none]),
   ];
 };
 

@@ -38,6 +38,7 @@ const rectangleArea = step(
   'A_v,r',
   pick([[fullWeb, times(tw, rectangle.depth)]], times(0.9, tw, rectangle.depth)),
   guide,
+  'published notes differ: all of it, or 0.9',
 );
 
 /** Plastic shear resistance on a shear area, N. */

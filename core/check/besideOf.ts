@@ -22,14 +22,15 @@ export interface Beside {
 
 const isVerdict = ({ state }: Check): boolean => state === 'holds' || state === 'fails';
 
-/** Checks that a reaction of the other level says nothing about: the tie force always, all that depends on V where none is given. */
-const withoutLevel = (check: Check, stated: boolean, text: string): Check => {
-  if (check.id === 'web-tie' && check.state !== 'notApplicable') {
-    return { ...check, state: 'notApplicable', reason: 'tie-other-level', reasonText: text, utilisation: null };
-  }
+/** What a check says where the level is another: nothing of the tie force and, where no reaction is given, strengths alone. */
+const atOtherLevel = (check: Check, stated: boolean, tied: boolean, text: string): Check => {
+  if (check.id === 'web-tie' && tied) return { ...check, reason: 'tie-other-level', reasonText: text };
   if (stated || check.id.startsWith('fit-') || check.reactionAtFailure === undefined) return check;
   return { ...check, demand: null, utilisation: null, state: isVerdict(check) ? 'information' : check.state };
 };
+
+/** Notes about what the first standard's report says already. */
+const ofTheFirst: ReadonlySet<string> = new Set(['strength-given', 'reaction-from-share']);
 
 const carriedNote = (examined: ExaminedNumbers, standard: Standard): Note => {
   const { end, facts, report } = examined;
@@ -51,7 +52,9 @@ const besideUnder = (
 ): Beside | readonly SaidFault[] => {
   const { facts, report } = examined;
   const { options: _, level: __, ...rest } = examined.end;
-  const end: End = { ...rest, standard: standard.id };
+  const sameLevel = standard.level === report.level;
+  // The tie force is given at the first standard's level.
+  const end: End = { ...rest, standard: standard.id, ...(!sameLevel && { tie: 0 }) };
   const found = resolve(end, standard, {
     web: { fy: facts.fy, fu: facts.fu },
     fyf: facts.fyf,
@@ -61,17 +64,18 @@ const besideUnder = (
   });
   const words = wordsFor(regionOf(end, standard));
   if ('faults' in found) return said(found.faults, words).faults;
-  const sameLevel = standard.level === report.level;
   const stated = sameLevel || given !== undefined;
-  const V = fromSystem(sameLevel ? report.reaction : (given ?? 0), '0,1', end.units);
+  const own = typeof end.reaction === 'number' ? end.reaction : report.reaction;
+  const V = fromSystem(sameLevel ? own : (given ?? 0), '0,1', end.units);
+  const tied = (examined.end.tie ?? 0) > 0;
   const { resolved } = found;
   const numbers = numbersOf(end, planOf(standard, end.joint.kind), resolved, V);
   const told: Numbers = {
     ...numbers,
     checks: sameLevel
       ? numbers.checks
-      : numbers.checks.map((one) => withoutLevel(one, stated, words.reasons['tie-other-level'] ?? '')),
-    notes: [carriedNote(examined, standard), ...numbers.notes.filter(({ code }) => code !== 'strength-given')],
+      : numbers.checks.map((one) => atOtherLevel(one, stated, tied, words.reasons['tie-other-level'] ?? '')),
+    notes: [carriedNote(examined, standard), ...numbers.notes.filter(({ code }) => !ofTheFirst.has(code))],
   };
   return { examined: { end, facts: resolved.facts, designation: resolved.designation, report: told }, stated };
 };

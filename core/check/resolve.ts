@@ -40,6 +40,12 @@ export interface Carried {
 
 const noSteel: Steel = { fy: 0, fu: 0 };
 const noBoltSteel: BoltSteel = { fub: 0, listed: false };
+/** A bolt that the standard lists, with a tensile strength carried over from another: its shear strength goes with it. */
+const withTensile = ({ fub, shear, listed }: BoltSteel, carried: number): BoltSteel => {
+  const scale = carried / fub;
+  return { fub: carried, listed, ...(shear && { shear: { in: shear.in * scale, out: shear.out * scale } }) };
+};
+
 const noBolt: BoltFacts = {
   d: 0,
   d0: 0,
@@ -139,10 +145,13 @@ class Resolver {
   private boltSteel(own: number | undefined, d: number): BoltSteel {
     const { grade } = this.end.joint.bolts;
     const { boltGrades, bolt } = this.standard.materials;
+    const name = typeof grade === 'string' ? namedIn(boltGrades)(grade) : undefined;
     const strength = own ?? (typeof grade === 'string' ? undefined : fromSystem(grade.fu, '-2,1', this.end.units));
-    if (strength !== undefined) return bolt(strength, d) ?? noBoltSteel;
+    if (strength !== undefined) {
+      const listed = name === undefined ? undefined : bolt(name, d);
+      return listed ? withTensile(listed, strength) : (bolt(strength, d) ?? noBoltSteel);
+    }
     const path = 'joint.bolts.grade';
-    const name = namedIn(boltGrades)(grade as string);
     if (name === undefined) {
       this.faults.push(fault('unknown-bolt-grade', path, grade, boltGrades));
       return noBoltSteel;

@@ -29,8 +29,8 @@ const atOtherLevel = (check: Check, stated: boolean, tied: boolean, text: string
   return { ...check, demand: null, utilisation: null, state: isVerdict(check) ? 'information' : check.state };
 };
 
-/** Notes about what the first standard's report says already. */
-const ofTheFirst: ReadonlySet<string> = new Set(['strength-given', 'reaction-from-share']);
+/** Notes about strengths and the reaction, which are the first standard's. */
+const ofTheFirst: ReadonlySet<string> = new Set(['strength-given', 'memory-grade', 'reaction-from-share']);
 
 const carriedNote = (examined: ExaminedNumbers, standard: Standard): Note => {
   const { end, facts, report } = examined;

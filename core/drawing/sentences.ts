@@ -35,7 +35,7 @@ const boltSentence = (it: Facts, words: DrawingWords): string => {
   const mm = (value: number): string => length(value, words.units);
   const rows = it.n === 1 ? 'One row' : `${it.n} rows`;
   const columns = it.m === 1 ? 'one column' : `${it.m} columns`;
-  const spacing = [it.n > 1 ? `, pitch ${mm(it.p)}` : '', it.m > 1 ? `, gauge ${mm(it.q)}` : ''].join('');
+  const spacing = [it.n > 1 ? `, pitch ${mm(it.p)}` : '', it.m > 1 ? `, ${words.gauge} ${mm(it.q)}` : ''].join('');
   return `${rows} of ${words.boltSize} ${words.boltGrade} bolts in ${columns}${spacing}; first row ${mm(it.y1)} below top of steel, first column ${mm(it.eEnd)} from the beam's end; holes ${mm(it.d0)} ${words.holes}.`;
 };
 

@@ -12,6 +12,8 @@ export interface DrawingWords {
   readonly holes: string;
   /** `notch` or `cope`. */
   readonly cope: string;
+  /** `gauge` or `gage`. */
+  readonly gauge: string;
   /** Of the part that the web is bolted to, such as `fin plate`, `single plate` or `ply`. */
   readonly plate: string;
   /** Beam drawn at least beyond the last cope or the plate, mm: words with leaders stand on it. */

@@ -9,8 +9,13 @@ import { onTheBench } from './onTheBench.ts';
 
 const { visit } = onTheBench();
 
-/** An end with everything that takes room: it fails in several ways, and refers. */
-const crowded = linkOf({ ...demoEnd, reaction: 480, top: { length: 95, depth: 35, radius: 0 } });
+/** An end with everything that takes room: it fails in several ways, and refers, with a second standard beside the first. */
+const crowded = linkOf({
+  ...demoEnd,
+  reaction: 480,
+  top: { length: 95, depth: 35, radius: 0 },
+  sheet: { job: 'A job with a name', beside: { standard: 'aisc-360-asd', reaction: 320 } },
+});
 
 /** How far the page scrolls sideways, px. */
 const sideways = (bench: Bench) =>
@@ -143,11 +148,12 @@ const ends = [
   [{ ...demoEnd, mark: 'H-1' }, /^HOLDS/],
   [{ ...demoEnd, mark: 'F-1', reaction: 480 }, /^FAILS/],
   [{ ...demoEnd, mark: 'R-1', top: { length: 95, depth: 35, radius: 0 } }, /^REFER/],
+  [{ ...demoEnd, mark: 'B-1', sheet: { beside: { standard: 'csa-s16' } } }, /^HOLDS/],
 ] as const;
 
 describe('the accessibility checker has no serious and no critical finding', () => {
   test.each([1440, 390])(
-    'for an end that holds, fails or refers, with a line and a rung open, %i px wide',
+    'for an end that holds, fails, refers or stands under two standards, with a line and a rung open, %i px wide',
     async (width) => {
       const bench = await (await visit({ viewport: { width, height: 900 } })).tab();
       await bench.turn('Bolts');

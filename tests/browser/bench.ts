@@ -13,7 +13,7 @@ export interface ShownRung {
 
 const VERDICT = /^(?:HOLDS|FAILS|REFER|INCOMPLETE)(?: [\d.]+)?/;
 
-const RUNG = /^(.+?), (holds|fails|refers)(?:, close)?(, the weakest)?; (?:fails at )?(\S+?)(?: \w+)?; ratio (\S+)$/;
+const RUNG = /^(.+?) (holds|fails|refers)(?:, close)?(, the weakest)?, (?:fails at )?(\S+?)(?: \w*)?, ratio ([^\s;]+)/;
 
 const numberIn = (text: string | undefined): number | null => (/^[–∞]$/.test(text ?? '') ? null : Number(text));
 
@@ -38,7 +38,7 @@ export class Bench {
 
   /** What the Undo button would take back, or the Redo button bring again; empty where there is nothing. */
   async next(tool: 'Undo' | 'Redo'): Promise<string> {
-    const text = (await this.tool(new RegExp(`^${tool}`)).textContent()) ?? '';
+    const text = (await this.tool(new RegExp(`^${tool}`)).getAttribute('aria-label')) ?? '';
     return text.slice(`${tool}: `.length);
   }
 
@@ -72,7 +72,7 @@ export class Bench {
 
   /** A rung, or a line of the footing. */
   rung(name: string): Locator {
-    return this.page.getByRole('button', { name: new RegExp(`^${name} ?,`) });
+    return this.page.getByRole('button', { name: new RegExp(`^${name}(?:,| holds| fails| refers)`) });
   }
 
   get rungs(): Promise<ShownRung[]> {

@@ -2,7 +2,8 @@ import { readFileSync } from 'node:fs';
 import { checkEnd } from '../../core/check/checkEnd.ts';
 import type { Check, Report } from '../../core/check/report.ts';
 import { encodeLink } from '../../core/exchange/link.ts';
-import { commonwealth } from '../../core/words/commonwealth.ts';
+import { shortOf } from '../../core/words/words.ts';
+import { wordsFor } from '../../core/words/wordsFor.ts';
 import type { ShownRung } from './bench.ts';
 
 /** The invented end that stands on the bench at the first visit. */
@@ -34,10 +35,10 @@ const hundredths = (value: number | null): number | null =>
 
 /** What the ladder must say of a report: reactions rounded down to 0.1, ratios to 0.01. */
 export const rungsOf = (report: Report): ShownRung[] =>
-  measured(report).map(({ id, title, state, reactionAtFailure, utilisation }, at, all) => ({
-    name: commonwealth.short[id] ?? title,
-    word: state === 'refer' ? 'refers' : state,
+  measured(report).map((check, at, all) => ({
+    name: shortOf(wordsFor(report.words), check),
+    word: check.state === 'refer' ? 'refers' : check.state,
     weakest: at === all.length - 1,
-    failsAt: floorTenth(reactionAtFailure!),
-    ratio: hundredths(utilisation),
+    failsAt: floorTenth(check.reactionAtFailure!),
+    ratio: hundredths(check.utilisation),
   }));

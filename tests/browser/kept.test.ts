@@ -8,7 +8,7 @@ const { visit } = onTheBench();
 /** Steps of every kind, each with its name on the timeline. */
 const steps: readonly (readonly [name: string, act: (bench: Bench) => Promise<unknown>, open?: string])[] = [
   ['Pitch 80 → 70', (bench) => bench.type('Pitch, mm', '70')],
-  ['Hole diameter empty → 24', (bench) => bench.field('Bolts', 'Hole size').fill('24'), 'Bolts'],
+  ['Hole diameter empty → 24', (bench) => bench.field('Bolts', 'Hole diameter').fill('24'), 'Bolts'],
   ['Holes drilled → punched', (bench) => bench.field('Bolts', 'Holes').selectOption('punched')],
   ['Bottom notch added', (bench) => bench.field('Cut', 'Bottom notch').check(), 'Cut'],
   ['Bottom notch removed', (bench) => bench.field('Cut', 'Bottom notch').uncheck()],

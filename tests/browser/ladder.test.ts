@@ -29,12 +29,12 @@ const captionOf = (name: string): string => {
   return failurePath(id, of, found.examined.facts, words)!.caption.replace(/_/g, '');
 };
 
-const workingOf = (bench: Bench, name: string) => bench.page.getByRole('group', { name: new RegExp(`^${name} ?,`) });
+const workingOf = (bench: Bench, name: string) => bench.page.getByRole('group', { name: new RegExp(`^${name}[ ,]`) });
 const isOpen = (bench: Bench, name: string) => bench.rung(name).getAttribute('aria-expanded');
 /** The rung that has focus, of those named. */
 const onRung = async (bench: Bench) => {
   const focused = await bench.focused;
-  return rungs.find(({ name }) => focused.startsWith(`${name}, `))?.name;
+  return rungs.find(({ name }) => focused.startsWith(`${name} `))?.name;
 };
 /** What is drawn on the piece, mark by mark. */
 const marks = (bench: Bench): Promise<string[]> =>

@@ -24,7 +24,7 @@ const typed: readonly (readonly [field: string, text: string, arrow?: string])[]
   ['Bolts: First row', '90'],
   ['Bolts: End distance', '45'],
   ['Bolts: Holes', 'drilled'],
-  ['Bolts: Hole size', ''],
+  ['Bolts: Hole diameter', ''],
   ['Bolts: Threads', '', 'ArrowDown'],
   ['Joint: Kind', 'fin plate'],
   ['Joint: Thickness', '10'],

@@ -1,16 +1,16 @@
 import type { Check } from '../../core/check/report.ts';
 import { unitOf } from '../../core/units/systems.ts';
-import { stateWords } from '../../core/words/stateWords.ts';
 import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import { chosen } from '../state/bench.ts';
+import { besideParts } from './besideParts.ts';
 import { cited } from './cited.ts';
-import { isMost, size } from './fitSizes.ts';
 import { Heading } from './Heading.tsx';
 import { NotApplicable } from './NotApplicable.tsx';
 import { OpenWorking } from './OpenWorking.tsx';
 import { RichText } from './RichText.tsx';
 import { rungsOf } from './rungs.ts';
 import { Sign } from './Sign.tsx';
+import { Sizes } from './Sizes.tsx';
 import { shown, stale, words } from './shown.ts';
 import { markOf } from './standing.ts';
 import { onRungKey, reached, touch } from './touch.ts';
@@ -19,11 +19,15 @@ import { onRungKey, reached, touch } from './touch.ts';
 export const Footing = () => {
   const report = shown.value?.report;
   if (!report) return null;
-  const { footing, notApplicable } = rungsOf(report);
+  const Beside = besideParts();
+  const { footing, notApplicable } = Beside ? Beside.pairedRungs(report) : rungsOf(report);
   const length = unitOf('1,0', report.units).name;
   const first = footing.find(({ id }) => id === reached.value) ?? footing[0];
   return (
-    <section class={`footing${stale.value ? ' stale' : ''}`} aria-labelledby="footing-heading">
+    <section
+      class={`footing${Beside ? ' footing-paired' : ''}${stale.value ? ' stale' : ''}`}
+      aria-labelledby="footing-heading"
+    >
       <Heading id="footing-heading" level={3} title="Footing">
         given / required, {length}; no force
       </Heading>
@@ -38,6 +42,7 @@ export const Footing = () => {
 };
 
 const Rule = ({ check, first }: { check: Check; first: boolean }) => {
+  const Beside = besideParts();
   const { id, title, ofText, state, reasonText } = check;
   const open = chosen.value === id;
   const breach = state !== 'holds';
@@ -61,8 +66,8 @@ const Rule = ({ check, first }: { check: Check; first: boolean }) => {
           {title}
           {ofText && <span class="rule-of">, {ofText}</span>}
         </span>
-        <span class="unseen">{`, ${stateWords[state]}${mark === 'close' ? ', close' : ''}: `}</span>
-        <Sizes check={check} />
+        {state === 'notApplicable' ? <span class="rule-sizes">no rule</span> : <Sizes check={check} />}
+        {Beside && <Beside.RuleSizes id={id} />}
       </button>
       {breach && reasonText && !open && (
         <p class="rule-reason">
@@ -71,6 +76,7 @@ const Rule = ({ check, first }: { check: Check; first: boolean }) => {
         </p>
       )}
       {open && <OpenWorking check={check} labelledBy={`rung-${id}`} />}
+      {open && Beside && <Beside.SecondWorking id={id} />}
     </li>
   );
 };
@@ -78,19 +84,3 @@ const Rule = ({ check, first }: { check: Check; first: boolean }) => {
 /** Clause and its standing; for practice, that it is no clause. */
 const sourceOf = ({ clause, basis }: Check): string =>
   basis === 'practice' ? (words.value.bases.practice ?? basis) : `${cited(clause)}, ${basis}`;
-
-/** Given over required; a bound from above carries its sign. */
-const Sizes = ({ check }: { check: Check }) => {
-  const { units } = shown.value!.report;
-  const given = check.resistance === null ? '–' : size(check.resistance, units);
-  const required = check.demand === null ? '–' : size(check.demand, units);
-  const most = isMost(check);
-  return (
-    <span class="rule-sizes">
-      {given}
-      <span aria-hidden="true">{most ? ' / ≤ ' : ' / '}</span>
-      <span class="unseen">{most ? ' given, at most ' : ' given, at least '}</span>
-      {required}
-    </span>
-  );
-};

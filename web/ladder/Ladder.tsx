@@ -3,6 +3,7 @@ import { plain } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { chosen } from '../state/bench.ts';
 import { axisOf, shareOn } from './axis.ts';
+import { besideParts } from './besideParts.ts';
 import { CloseUp } from './CloseUp.tsx';
 import { Heading } from './Heading.tsx';
 import { Rung } from './Rung.tsx';
@@ -14,21 +15,24 @@ import { onRungKey, reached } from './touch.ts';
 /** All ways of failing on one kN axis, the weakest at the foot. */
 export const Ladder = () => {
   const report = shown.value?.report;
+  const Beside = besideParts();
   return (
     <section class={`ladder${stale.value ? ' stale' : ''}`} aria-labelledby="ladder-heading">
       <Heading id="ladder-heading" level={2} title="Ladder">
         the end reaction at which each way fails
       </Heading>
+      {Beside && <Beside.BesideVerdict />}
       {report && <Rungs report={report} />}
     </section>
   );
 };
 
 const Rungs = ({ report }: { report: Numbers }) => {
-  const { rungs, unmeasured, alone } = rungsOf(report);
+  const Beside = besideParts();
+  const { rungs, unmeasured, alone } = Beside ? Beside.pairedRungs(report) : rungsOf(report);
   const { reaction, units } = report;
   const force = unitOf('0,1', units).name;
-  const weakest = rungs.at(-1);
+  const weakest = rungs.findLast(({ state }) => state !== 'notApplicable');
   const axis = axisOf(reaction, weakest?.reactionAtFailure ?? null);
   const all = [...rungs, ...alone, ...unmeasured];
   const first = all.find(({ id }) => id === reached.value) ?? weakest ?? all[0];
@@ -38,7 +42,7 @@ const Rungs = ({ report }: { report: Numbers }) => {
   );
   return (
     // biome-ignore lint/a11y/noStaticElementInteractions: the keys go from one button inside to the next.
-    <div class={`rungs${open ? ' rungs-open' : ''}`} onKeyDown={onRungKey}>
+    <div class={`rungs${open ? ' rungs-open' : ''}${Beside ? ' rungs-paired' : ''}`} onKeyDown={onRungKey}>
       <div class="rungs-head" aria-hidden="true">
         <span class="rungs-flag">
           {axis.line !== null && (

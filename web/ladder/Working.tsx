@@ -1,3 +1,4 @@
+import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import type { Check } from '../../core/check/report.ts';
 import { workingOfCheck } from '../../core/check/workings.ts';
 import { roundedDown } from '../../core/units/figures.ts';
@@ -16,18 +17,32 @@ import { type WorkingLine, workingLines } from './workingLines.ts';
 
 export interface WorkingProps {
   readonly check: Check;
+  /** The end that the check is of; absent = the one that is shown. */
+  readonly of?: ExaminedNumbers;
+  /** The standard it is under, where two are shown. */
+  readonly under?: string;
   /** Id of what it belongs to. */
   readonly labelledBy: string;
 }
 
+/** Id of a working; two standards' workings of one check stand side by side. */
+const workingId = ({ id }: Check, under: string | undefined): string => `working-${id}${under ? '-beside' : ''}`;
+
+/** The first is named by its rung, the second by its standard too. */
+const named = (check: Check, under: string | undefined, rung: string) =>
+  under ? { 'aria-label': `${under}: ${fullName(check)}` } : { 'aria-labelledby': rung };
+
 /** How a check comes to its number, line by line, with what it leans on and how far it is verified. */
-export const Working = ({ check: bare, labelledBy }: WorkingProps) => {
-  const check: Check = { ...bare, working: workingOfCheck(shown.value!, bare.id) };
+export const Working = ({ check: bare, of = shown.value!, under, labelledBy }: WorkingProps) => {
+  const check: Check = { ...bare, working: workingOfCheck(of, bare.id) };
   return (
     // biome-ignore lint/a11y/useSemanticElements: a fieldset groups controls; this groups text under the name of its rung.
-    <div class="working" id={`working-${check.id}`} role="group" aria-labelledby={labelledBy}>
+    <div class="working" id={workingId(check, under)} role="group" {...named(check, under, labelledBy)}>
       <p class="working-head">
-        <b>{fullName(check)}</b>
+        <b>
+          {under && `${under}: `}
+          {fullName(check)}
+        </b>
         <span>{sourceOf(check)}</span>
       </p>
       {check.reasonText && (
@@ -36,9 +51,9 @@ export const Working = ({ check: bare, labelledBy }: WorkingProps) => {
         </p>
       )}
       <ol class="working-lines">{workingLines(check).map(lineRow)}</ol>
-      <Close check={check} />
-      <Leaning check={check} />
-      {!isFooting(check) && (
+      <Close check={check} of={of} />
+      <Leaning check={check} of={of} />
+      {!isFooting(check) && !under && (
         <button type="button" class="working-see" onClick={toPiece}>
           see it on the piece
         </button>
@@ -86,9 +101,14 @@ const lineRow = ({ symbol, expression, numbers, value, unit, clause, note, resul
   );
 };
 
+interface Of {
+  readonly check: Check;
+  readonly of: ExaminedNumbers;
+}
+
 /** Demand over resistance, and the reaction at which it is used up. */
-const Close = ({ check }: { check: Check }) => {
-  const { report } = shown.value!;
+const Close = ({ check, of }: Of) => {
+  const { report } = of;
   const used = usedUp(check, report);
   const at = check.reactionAtFailure;
   const force = unitOf('0,1', report.units).name;
@@ -118,8 +138,8 @@ const Close = ({ check }: { check: Check }) => {
 };
 
 /** Factors and strengths in use, the standing of the formula, and what checks it from outside. */
-const Leaning = ({ check }: { check: Check }) => {
-  const leans = inUse(shown.value!, check);
+const Leaning = ({ check, of }: Of) => {
+  const leans = inUse(of, check);
   const basis = check.basis && words.value.bases[check.basis];
   return (
     <div class="working-foot">

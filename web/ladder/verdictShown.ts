@@ -1,5 +1,6 @@
 import { computed, effect } from '@preact/signals';
 import { announce } from '../state/announce.ts';
+import { besideParts } from './besideParts.ts';
 import { missing, shown, stale } from './shown.ts';
 import { incompleteLine, type VerdictLine, verdictLine } from './verdict.ts';
 
@@ -13,7 +14,13 @@ export const verdictShown = computed<VerdictLine | null>(() => {
 export const verdictSaid = computed<string>(() => {
   const verdict = verdictShown.value;
   if (!verdict) return '';
-  return [`${verdict.word} ${verdict.ratio}`.trim(), verdict.lead + verdict.first, verdict.spare, verdict.others]
+  return [
+    `${verdict.word} ${verdict.ratio}`.trim(),
+    verdict.lead + verdict.first,
+    verdict.spare,
+    verdict.others,
+    besideParts()?.verdictSaid(),
+  ]
     .filter(Boolean)
     .join('. ');
 });

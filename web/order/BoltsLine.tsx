@@ -1,4 +1,4 @@
-import { entry } from '../state/bench.ts';
+import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { several } from './several.ts';
@@ -29,7 +29,7 @@ const Sentence = () => {
       {several('joint.bolts.columns') && (
         <>
           {' '}
-          at <Value path="joint.bolts.gauge" missing="gauge?" />
+          at <Value path="joint.bolts.gauge" missing={`${words.value.gauge}?`} />
         </>
       )}
       ; first row <Value path="joint.firstRow" missing="level?" /> down,{' '}

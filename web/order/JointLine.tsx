@@ -1,4 +1,5 @@
-import { entry } from '../state/bench.ts';
+import { capital } from '../../core/words/capital.ts';
+import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { shown, unitAt } from '../state/fieldText.ts';
 import { isFault, readField } from '../state/readField.ts';
@@ -53,7 +54,7 @@ const Sentence = () => {
   const ply = plyPath();
   return (
     <>
-      <Value path="joint.kind" text={isPly() ? 'Web bolted to a ply' : 'Fin plate'} />{' '}
+      <Value path="joint.kind" text={isPly() ? 'Web bolted to a ply' : capital(words.value.finPlate)} />{' '}
       <Value path={`${ply}.thickness`} missing="thickness?" /> thick, <GradeValue path={`${ply}.grade`} />, edges{' '}
       <Value path={`${ply}.topEdge`} missing="top?" />, <Value path={`${ply}.bottomEdge`} missing="bottom?" /> and{' '}
       <Value path={`${ply}.edge`} missing="free?" />

@@ -19,7 +19,7 @@ export const Piece = () => {
   return (
     <section class={`piece${stale.value ? ' stale' : ''}`} aria-labelledby="piece-heading">
       <Heading id="piece-heading" level={2} title="Piece">
-        {it?.fields && 'every underlined size is a field'}
+        {it?.fields && <span class="hint">every underlined size is a field</span>}
       </Heading>
       <div class="piece-frame" ref={frame}>
         {it && <Drawn it={it} />}

@@ -13,6 +13,7 @@ export const drawingWords = ({ end, designation, report }: ExaminedNumbers, word
     boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
     holes: bolts.holes ?? standards[report.standard.id]?.materials.holesAssumed ?? '',
     cope: words.cope,
+    gauge: words.gauge,
     plate: fieldName(words, kind === 'fin-plate' ? 'joint.plate' : 'joint.ply'),
   };
 };

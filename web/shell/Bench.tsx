@@ -3,13 +3,14 @@ import { Order } from '../order/Order.tsx';
 import { Piece } from '../piece/index.ts';
 import { confirmShown } from '../state/confirming.ts';
 import { later } from '../state/later.ts';
+import { newVersion, otherTab } from '../state/network.ts';
+import { notice } from '../state/notice.ts';
 import { Stress } from '../stress/index.ts';
 import { Announcer } from './Announcer.tsx';
 import { DropPlace } from './DropPlace.tsx';
 import { Foot } from './Foot.tsx';
 import { Head } from './Head.tsx';
 import { finderShown, keysShown } from './keys.ts';
-import { Notices } from './Notices.tsx';
 import { TopBand } from './TopBand.tsx';
 
 const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
@@ -17,6 +18,13 @@ const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
 const OpenDialogs = () => {
   const Dialogs = (keysShown.value || finderShown.value || confirmShown.value) && dialogs.value;
   return Dialogs && <Dialogs />;
+};
+
+const notices = later(async () => (await import('./Notices.tsx')).Notices);
+
+const OpenNotices = () => {
+  const Notices = (notice.value || otherTab.value || newVersion.value) && notices.value;
+  return Notices && <Notices />;
 };
 
 /** The bench: order, piece and ladder under one head. */
@@ -28,7 +36,7 @@ export const Bench = () => (
     <TopBand />
     <main>
       <Head />
-      <Notices />
+      <OpenNotices />
       <div class="bench">
         <Order />
         <div class="bench-middle">

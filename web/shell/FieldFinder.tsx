@@ -28,6 +28,8 @@ const others = [
   'support.section',
   'level',
   'standard',
+  'sheet.beside.standard',
+  'sheet.words',
   'mark',
   'sheet.date',
   'sheet.paper',

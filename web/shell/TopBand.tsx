@@ -1,5 +1,6 @@
 import type { TargetedEvent } from 'preact';
 import { useRef } from 'preact/hooks';
+import { Segments } from '../field/Segments.tsx';
 import { timeline, units } from '../state/bench.ts';
 import { carried } from '../state/carried.ts';
 import { redo, setUnits, undo } from '../state/edits.ts';
@@ -8,20 +9,12 @@ import { beginEmpty } from './beginEmpty.ts';
 import { keysShown } from './keys.ts';
 
 const systems = [
-  { system: 'mm-kN', label: 'mm · kN' },
-  { system: 'in-kip', label: 'in · kip' },
+  { value: 'mm-kN', label: 'mm · kN' },
+  { value: 'in-kip', label: 'in · kip' },
 ] as const;
 
 const UnitsSwitch = () => (
-  <fieldset class="units-switch">
-    <legend class="unseen">Units of the whole end</legend>
-    {systems.map(({ system, label }) => (
-      <label key={system}>
-        <input type="radio" name="units" checked={units.value === system} onChange={() => setUnits(system)} />
-        <span>{label}</span>
-      </label>
-    ))}
-  </fieldset>
+  <Segments name="units" title="Units of the whole end" choices={systems} inForce={units.value} set={setUnits} />
 );
 
 const OpenButton = () => {
@@ -49,17 +42,19 @@ const OpenButton = () => {
   );
 };
 
+const spoken = (word: string, step: string | undefined): string => (step === undefined ? word : `${word}: ${step}`);
+
 const Undoing = () => {
   const { done, undone } = timeline.value;
   const last = done.at(-1)?.name;
   const next = undone.at(-1)?.name;
   return (
     <>
-      <button type="button" disabled={last === undefined} title={last} onClick={undo}>
-        Undo{last !== undefined && <span class="unseen">: {last}</span>}
+      <button type="button" disabled={last === undefined} title={last} aria-label={spoken('Undo', last)} onClick={undo}>
+        Undo
       </button>
-      <button type="button" disabled={next === undefined} title={next} onClick={redo}>
-        Redo{next !== undefined && <span class="unseen">: {next}</span>}
+      <button type="button" disabled={next === undefined} title={next} aria-label={spoken('Redo', next)} onClick={redo}>
+        Redo
       </button>
     </>
   );

@@ -2,6 +2,7 @@ import type { UnitSystem } from '../../core/units/systems.ts';
 import { chosen, demanded, editing, entry, faults, input, lastGood, timeline, words } from './bench.ts';
 import { type Entry, withText } from './entry.ts';
 import { notice, refuse } from './notice.ts';
+import { secondFaults } from './secondStandard.ts';
 import { stepName } from './stepName.ts';
 import { steppedValue } from './steppedValue.ts';
 import { switchUnits } from './switchUnits.ts';
@@ -65,10 +66,12 @@ export const redo = (): void => {
  * number could read differently there.
  */
 export const setUnits = (system: UnitSystem): void => {
-  const unread = input.value.faults;
+  const unread = [...input.value.faults, ...input.value.besideFaults];
   if (unread.length > 0) {
     demanded.value = true;
-    const lines = faults.value.filter(({ path }) => unread.some((one) => one.path === path)).map(({ text }) => text);
+    const lines = [...faults.value, ...secondFaults.value]
+      .filter(({ path }) => unread.some((one) => one.path === path))
+      .map(({ text }) => text);
     refuse('The units stay as they are while a field cannot be read', lines);
     return;
   }

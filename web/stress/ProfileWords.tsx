@@ -29,6 +29,7 @@ export const ProfileName = ({
       class="profile-name"
       style={style}
       id={`rung-${check.id}`}
+      aria-label={`Elastic shear stress, ${title}`}
       aria-expanded={chosen.value === check.id}
       aria-controls={`working-${check.id}`}
       onClick={() => touch(check.id)}
@@ -36,37 +37,40 @@ export const ProfileName = ({
         if (event.key === 'Escape' && chosen.value === check.id) chosen.value = null;
       }}
     >
-      <span class="unseen">Elastic shear stress, </span>
       {title}
     </button>
   );
 };
 
-/** What the lines of a profile stand for, with their numbers. */
+/** What the lines of a profile stand for, with their numbers; said aloud in one sentence. */
 export const ProfileCaption = ({ profile, width }: { profile: Profile; width: number }) => {
   const { title, peak, mean, limitText, firstYield } = profile;
+  const limit = limitText && `limit ${limitText}`;
+  const yields = firstYield && `first yield at ${firstYield}`;
   return (
     <p style={{ width: `${width}px` }}>
-      <span class="unseen">{`${title}: peak ${peak.text}, `}</span>
-      <span class="key-mean" />
-      {mean.text}
-      <span class="unseen">, </span>
-      <br />
-      {limitText && (
-        <>
-          <span class="key-limit" />
-          limit {limitText}
-          <span class="unseen">, </span>
-          <br />
-        </>
-      )}
-      {firstYield && (
-        <>
-          first yield at
-          <br />
-          {firstYield}
-        </>
-      )}
+      <span class="unseen">
+        {title}: {[`peak ${peak.text}`, mean.text, limit, yields].filter(Boolean).join(', ')}.
+      </span>
+      <span aria-hidden="true">
+        <span class="key-mean" />
+        {mean.text}
+        <br />
+        {limit && (
+          <>
+            <span class="key-limit" />
+            {limit}
+            <br />
+          </>
+        )}
+        {firstYield && (
+          <>
+            first yield at
+            <br />
+            {firstYield}
+          </>
+        )}
+      </span>
     </p>
   );
 };

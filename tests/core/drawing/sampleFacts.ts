@@ -139,6 +139,7 @@ export const sampleWords: DrawingWords = {
   boltGrade: '8.8',
   holes: 'drilled',
   cope: 'notch',
+  gauge: 'gauge',
   plate: 'fin plate',
 };
 

@@ -12,6 +12,7 @@ describe('words of the drawing', () => {
       boltGrade: '8.8',
       holes: 'drilled',
       cope: 'notch',
+      gauge: 'gauge',
       plate: 'fin plate',
     });
   });

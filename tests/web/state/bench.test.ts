@@ -161,6 +161,30 @@ describe('the bench', () => {
     expect(texts()['joint.weld.leg']).toBe('1/4');
   });
 
+  test('sixteenths of an inch are shown as fractions however they are typed; other sizes as they stand', () => {
+    bench.setUnits('in-kip');
+    for (const [typed, shown] of [
+      ['3.25', '3 1/4'],
+      ['3-1/4', '3 1/4'],
+      ['1 1/2', '1 1/2'],
+      ['0.0625', '1/16'],
+      ['4', '4'],
+      ['3.3', '3.3'],
+      ['3.14159265', '3.14159265'],
+    ] as const) {
+      bench.editing.value = 'joint.bolts.pitch';
+      bench.write('joint.bolts.pitch', typed);
+      expect(bench.shown('joint.bolts.pitch')).toBe(typed);
+      bench.leave('joint.bolts.pitch');
+      expect(bench.shown('joint.bolts.pitch')).toBe(shown);
+      const value = bench.lastGood.value?.end.joint.bolts.pitch;
+      bench.write('joint.bolts.pitch', shown);
+      expect(bench.lastGood.value?.end.joint.bolts.pitch).toBe(value);
+    }
+    bench.write('reaction', '34.25');
+    expect(bench.shown('reaction')).toBe('34.25');
+  });
+
   test('a number written in another unit is shown in the unit of the end once its field is left', () => {
     bench.editing.value = 'setback';
     bench.write('setback', '1/2 in');

@@ -81,7 +81,14 @@ const ends = fc.record({
   ),
   options: maybe(fc.record({ 'bolt-group': fc.constantFrom('elastic', 'instantaneous-centre') })),
   quantity: maybe(fc.integer({ min: 1, max: 500 })),
-  sheet: maybe(fc.record({ job: word, decimal: maybe(fc.constantFrom('.', ',')) })),
+  sheet: maybe(
+    fc.record({
+      job: word,
+      decimal: maybe(fc.constantFrom('.', ',')),
+      words: maybe(fc.constantFrom('north-america', 'commonwealth')),
+      beside: maybe(fc.record({ standard: word, reaction: maybe(lengths) })),
+    }),
+  ),
 });
 
 describe('an end and the fields of the bench', () => {

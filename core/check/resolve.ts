@@ -12,7 +12,7 @@ import { type Fault, fault } from '../end/fault.ts';
 import { copeFaults, holeFaults, patternFaults, sectionFaults } from '../end/geometryFaults.ts';
 import { type End, type GradeGiven, plyOf } from '../end/schema.ts';
 import type { Section } from '../shape/section.ts';
-import { type BoltSteel, namedIn, type Steel, type Steels } from '../standards/materials.ts';
+import type { BoltSteel, Steel, Steels } from '../standards/materials.ts';
 import type { Standard } from '../standards/standard.ts';
 import { findBoltSize } from '../steel/bolts.ts';
 import { findSection } from '../steel/knownSections.ts';
@@ -145,7 +145,7 @@ class Resolver {
   private boltSteel(own: number | undefined, d: number): BoltSteel {
     const { grade } = this.end.joint.bolts;
     const { boltGrades, bolt } = this.standard.materials;
-    const name = typeof grade === 'string' ? namedIn(boltGrades)(grade) : undefined;
+    const name = typeof grade === 'string' ? boltGrades.find((one) => one === grade.trim()) : undefined;
     const strength = own ?? (typeof grade === 'string' ? undefined : fromSystem(grade.fu, '-2,1', this.end.units));
     if (strength !== undefined) {
       const listed = name === undefined ? undefined : bolt(name, d);

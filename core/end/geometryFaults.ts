@@ -4,6 +4,9 @@ import { lengthSize } from './factsOf.ts';
 import { type Fault, fault } from './fault.ts';
 import { type End, plyOf } from './schema.ts';
 
+/** mm: a hole that touches an edge touches it in inches too. */
+const NOISE = 1e-9;
+
 /** Lengths back in the file's own unit, free of conversion noise. */
 const inFile = (end: End) => {
   const k = lengthSize(end);
@@ -46,7 +49,7 @@ export const patternFaults = (end: End, hole: number): Fault[] => {
     if (count < 2) return;
     const path = `joint.bolts.${name}`;
     if (value === undefined) found.push(fault('missing', path, null, 'number'));
-    else if (value * k <= hole) found.push(fault(code, path, value, { above: file(hole) }));
+    else if (value * k <= hole + NOISE) found.push(fault(code, path, value, { above: file(hole) }));
   };
   spaced(bolts.rows, bolts.pitch, 'pitch', 'rows-overlap');
   spaced(bolts.columns ?? 1, bolts.gauge, 'gauge', 'columns-overlap');
@@ -60,23 +63,23 @@ export const holeFaults = (end: End, f: Facts): Fault[] => {
   const half = f.d0 / 2;
   const top = Math.max(f.mTop > 0 ? f.dt : 0, f.mTop < f.m ? f.tf : 0, f.tf > f.dt ? f.tf : 0);
   const foot = f.h - Math.max(f.mBottom > 0 ? f.db : 0, f.mBottom < f.m ? f.tf : 0, f.tf > f.db ? f.tf : 0);
-  if (f.y1 - half <= top) {
+  if (f.y1 - half <= top + NOISE) {
     found.push(fault('hole-outside-web', 'joint.firstRow', end.joint.firstRow, { above: file(top + half) }));
   }
-  if (f.yn + half >= foot) {
+  if (f.yn + half >= foot - NOISE) {
     const path = f.n > 1 ? 'joint.bolts.rows' : 'joint.firstRow';
     const given = f.n > 1 ? f.n : end.joint.firstRow;
     const fits = Math.floor((foot - half - f.y1) / f.p) + 1;
     const limit = f.n > 1 && fits >= 1 ? { most: fits, lastRowBelow: file(foot - half) } : { below: file(foot - half) };
     found.push(fault('hole-below-web', path, given, limit));
   }
-  if (f.eEnd <= half) {
+  if (f.eEnd <= half + NOISE) {
     found.push(fault('hole-outside-web', 'joint.endDistance', end.joint.endDistance, { above: file(half) }));
   }
   const ply = end.joint.kind === 'fin-plate' ? 'plate' : 'ply';
   const given = plyOf(end.joint);
   for (const name of ['topEdge', 'bottomEdge', 'edge'] as const) {
-    if (given[name] * lengthSize(end) > half) continue;
+    if (given[name] * lengthSize(end) > half + NOISE) continue;
     found.push(fault('hole-outside-plate', `joint.${ply}.${name}`, given[name], { above: file(half) }));
   }
   return found;

@@ -44,13 +44,21 @@ export interface Materials {
   readonly electrode: number;
 }
 
+/** Spellings of a grade are without number, so what is kept of them has a bound. */
+const MET_MOST = 256;
+
 /** A name without blanks, in capitals. */
 const plain = (name: string): string => name.trim().toUpperCase().replace(/\s+/g, '');
 
 /** Finds a grade by its name in any case and spacing; `readAs` first turns what people write into the name listed. */
-export const namedIn =
-  (grades: readonly string[], readAs: (plain: string) => string = (name) => name) =>
-  (written: string): string | undefined => {
+export const namedIn = (grades: readonly string[], readAs: (plain: string) => string = (name) => name) => {
+  const byName = new Map(grades.map((one) => [plain(one), one]));
+  const met = new Map<string, string | undefined>(grades.map((one) => [one, one]));
+  return (written: string): string | undefined => {
+    if (met.has(written)) return met.get(written);
     const wanted = plain(written);
-    return grades.find((one) => plain(one) === wanted) ?? grades.find((one) => plain(one) === plain(readAs(wanted)));
+    const found = byName.get(wanted) ?? byName.get(plain(readAs(wanted)));
+    if (met.size < MET_MOST) met.set(written, found);
+    return found;
   };
+};

@@ -60,7 +60,7 @@ const Rungs = ({ report }: { report: Numbers }) => {
       </div>
       {weakest && <CloseUp weakest={weakest} reaction={reaction} force={force} />}
       {alone.length > 0 && (
-        <ol class="rungs-apart" aria-label="By a tie force, acting alone">
+        <ol class="rungs-apart" aria-label="By something other than the reaction">
           {alone.map(row)}
         </ol>
       )}

@@ -1,8 +1,9 @@
 import type { Check } from '../../core/check/report.ts';
-import { plain, roundedDown } from '../../core/units/figures.ts';
+import { roundedDown } from '../../core/units/figures.ts';
 import { verdictWords as say } from '../../core/words/verdictWords.ts';
 import type { Axis } from './axis.ts';
 import { Bar } from './Bar.tsx';
+import { ownLoad } from './ownLoad.ts';
 import { RichText } from './RichText.tsx';
 import { isCompared, markOf, ratioText } from './standing.ts';
 
@@ -38,18 +39,21 @@ export const Measure = ({ check, axis, force }: Props) => {
 };
 
 /** A way of failing by a load other than the reaction. */
-const Alone = ({ check, force }: Pick<Props, 'check' | 'force'>) => (
-  <>
-    <span class="rung-alone">
-      <RichText text={check.symbol} manner="formula" /> = {plain(check.demand ?? 0)} of
-    </span>
-    <span class="rung-force">
-      {check.resistance === null ? '–' : roundedDown(check.resistance)}
-      <Unit name={check.unit || force} check={check} />
-    </span>
-    <Ratio check={check} />
-  </>
-);
+const Alone = ({ check, force }: Pick<Props, 'check' | 'force'>) => {
+  const { demand, resistance } = ownLoad(check, force);
+  return (
+    <>
+      <span class="rung-alone">
+        <RichText text={check.symbol} manner="formula" /> = {demand} of
+      </span>
+      <span class="rung-force">
+        {resistance}
+        <Unit name={check.unit || force} check={check} />
+      </span>
+      <Ratio check={check} />
+    </>
+  );
+};
 
 /** Said aloud between a number and its ratio. */
 const Unit = ({ name, check }: { readonly name: string; readonly check: Check }) => (

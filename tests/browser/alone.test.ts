@@ -1,5 +1,5 @@
 import { describe, expect, test } from 'vitest';
-import { demoEnd, reportOf, rungsOf } from './demoEnd.ts';
+import { australianEnd, demoEnd, linkOf, reportOf, rungsOf } from './demoEnd.ts';
 import { eventually } from './eventually.ts';
 import { onTheBench } from './onTheBench.ts';
 
@@ -75,4 +75,8 @@ test('after one load the bench works without a network: it loads, checks, opens 
   await eventually(() => another.verdict).toBe(await bench.verdict);
   await another.drop('sheet.pdf', bytes);
   await another.page.getByText(/^Opened sheet\.pdf/).waitFor();
+  // Rules and sections that no page has asked for yet are there too.
+  const fresh = await tab(linkOf(australianEnd));
+  await eventually(() => fresh.verdict).toMatch(/^(?:HOLDS|FAILS|REFER) [\d.]+$/);
+  expect(await fresh.page.getByText('AS 4100:2020').count()).toBeGreaterThan(0);
 });

@@ -1,15 +1,9 @@
-import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
-import { demoEnd, linkOf, reportOf, rungsOf } from './demoEnd.ts';
+import { australianEnd, demoEnd, linkOf, reportOf, rungsOf } from './demoEnd.ts';
 import { eventually } from './eventually.ts';
 import { onTheBench } from './onTheBench.ts';
 
 const { visit } = onTheBench();
-
-/** An end under a standard whose rules are no part of the first view, with a section that is none either. */
-const australian = JSON.parse(
-  readFileSync(new URL('../../fixtures/input/good/as-4100-fin-plate.json', import.meta.url), 'utf8'),
-);
 
 const csa = 'CSA S16:2019';
 const second = 'sheet' in demoEnd ? { ...(demoEnd.sheet as object), beside: { standard: 'csa-s16' } } : {};
@@ -58,8 +52,8 @@ describe('two standards side by side', () => {
 describe('another standard', () => {
   test('that an end names is fetched, from a link as from the list, with no fault on the way', async () => {
     const { tab } = await visit();
-    const bench = await tab(linkOf(australian));
-    const { verdict, governing, checks } = reportOf(australian);
+    const bench = await tab(linkOf(australianEnd));
+    const { verdict, governing, checks } = reportOf(australianEnd);
     const ratio = checks.find(({ id }) => id === governing)!.utilisation!.toFixed(2);
     await eventually(() => bench.verdict).toBe(`${verdict.toUpperCase()} ${ratio}`);
     await bench.turn('Standard');
@@ -78,6 +72,7 @@ describe('in inches', () => {
     await bench.type('Pitch, in', '3.25');
     await eventually(() => bench.size('Pitch, in').inputValue()).toBe('3 1/4');
     await bench.turn('Bolts');
+    await bench.field('Bolts', 'Size').waitFor();
     const sizes = await bench.field('Bolts', 'Size').getByRole('option').allTextContents();
     expect(sizes.slice(0, 3)).toEqual(['1/2 in', '5/8 in', '3/4 in']);
     expect(sizes.at(-1)).toBe('M36');

@@ -11,6 +11,11 @@ export const demoEnd: Readonly<Record<string, unknown>> = JSON.parse(
   readFileSync(new URL('../../fixtures/demo/citrus-packhouse.json', import.meta.url), 'utf8'),
 );
 
+/** An end under a standard whose rules are no part of the first view, with a section that is none either. */
+export const australianEnd: Readonly<Record<string, unknown>> = JSON.parse(
+  readFileSync(new URL('../../fixtures/input/good/as-4100-fin-plate.json', import.meta.url), 'utf8'),
+);
+
 /** The report on an end, made in Node. */
 export const reportOf = (end: unknown): Report => {
   const outcome = checkEnd(end, { working: true });

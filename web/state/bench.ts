@@ -57,6 +57,9 @@ export const awaited = computed<Awaited | null>(() => awaitedOf(input.value.inpu
 /** The last end that could be examined, so that drawing and ladder stay while a field is half typed; null before the first. */
 export const lastGood = signal<ExaminedNumbers | null>(null);
 
+/** Codes of faults of names: not known, or without a strength for the size they are of. */
+const NAME = /^(?:unknown|grade|bolt-grade)-/;
+
 /**
  * Names that are not known, in an end that has gaps: the core looks names up only once an end is whole, so the gaps are filled from the last
  * end for that alone.
@@ -66,7 +69,7 @@ const unknownNames = (end: Readonly<Record<string, unknown>>, gaps: readonly str
   if (!last) return [];
   const found = examineNumbers(filledFrom(end, last.end, gaps));
   if (!('faults' in found)) return [];
-  return found.faults.filter(({ code, path }) => code.startsWith('unknown-') && !gaps.includes(path));
+  return found.faults.filter(({ code, path }) => NAME.test(code) && !gaps.includes(path));
 };
 
 /**

@@ -2,8 +2,9 @@ import { effect } from '@preact/signals';
 import { render } from 'preact';
 import { watchPointer } from './field/afterPointer.ts';
 import { figure } from './piece/figure.ts';
-import { Bench } from './shell/Bench.tsx';
+import { App } from './shell/App.tsx';
 import { listenForKeys } from './shell/keys.ts';
+import { followAddress } from './standards/openStandard.ts';
 import { entry, lastGood } from './state/bench.ts';
 import { carried } from './state/carried.ts';
 import { demoEntry } from './state/demo.ts';
@@ -41,9 +42,13 @@ effect(() => {
 });
 listenForKeys();
 watchPointer();
-render(<Bench />, document.getElementById('bench')!);
+followAddress();
+render(<App />, document.getElementById('bench')!);
 addEventListener('online', tryAgain);
-addEventListener('hashchange', () => void openLink());
+addEventListener('hashchange', () => {
+  followAddress();
+  void openLink();
+});
 void openLink();
 const waiting = effect(() => {
   // Of an end that is not complete yet there is no piece to wait for.

@@ -8,10 +8,11 @@ const caseText = (when: string): string => (when === '' ? '' : when === 'otherwi
 
 const compares = (text: string): boolean => /[≤<>≥]/.test(text);
 
-const formulaLines = ({ symbol, cases, note }: FormulaRow): string[] => [
+const formulaLines = ({ symbol, cases, under, note }: FormulaRow): string[] => [
   ...cases.flatMap(({ expression, when }, at) =>
     hanging(at === 0 ? `  ${symbol} = ` : `  ${' '.repeat(symbol.length)} = `, `${expression}${caseText(when)}`),
   ),
+  ...(under ? wrap(`for ${under}`, WIDTH - 6).map((line) => `      ${line}`) : []),
   ...(note ? wrap(note, WIDTH - 6).map((line) => `      ${line}`) : []),
 ];
 

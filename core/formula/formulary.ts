@@ -1,3 +1,4 @@
+import { unitOf } from '../units/systems.ts';
 import { quantity, symbolsOf } from './line.ts';
 import type { Basis, Condition, Tree } from './tree.ts';
 
@@ -11,10 +12,14 @@ export interface FormulaCase {
 export interface FormulaRow {
   readonly symbol: string;
   readonly cases: readonly FormulaCase[];
+  /** The choice that leads to this step, where it stands in one branch only; else empty. */
+  readonly under: string;
   readonly clause: string;
   readonly basis: Basis | '';
   readonly note: string;
 }
+
+type Step = Tree & { readonly op: 'step' };
 
 const relation = { atMost: ['≤', '>'], below: ['<', '≥'] } as const;
 
@@ -75,19 +80,30 @@ const variantsOf = (tree: Tree): Variant[] => {
 const valuesIn = (tree: Tree, factors: ReadonlySet<Tree>): string[] => {
   if (tree.op === 'constant') {
     const said = factors.has(tree) || tree.symbol === 'π' || /^\d/.test(tree.symbol);
-    return said ? [] : [`${tree.symbol} = ${quantity(tree.value, tree.dimension, 'mm-kN')}`];
+    const unit = unitOf(tree.dimension, 'mm-kN').name;
+    const value = quantity(tree.value, tree.dimension, 'mm-kN');
+    return said ? [] : [`${tree.symbol} = ${value}${unit && ` ${unit}`}`];
   }
   return tree.op === 'step' || tree.op === 'pick' || !('of' in tree)
     ? []
     : tree.of.flatMap((one) => valuesIn(one, factors));
 };
 
-const rowOf = (tree: Tree & { op: 'step' }, factors: ReadonlySet<Tree>): FormulaRow => ({
-  symbol: tree.symbol,
-  cases: variantsOf(tree.of[0]).map(({ tree: one, when }) => ({
+const casesOf = (tree: Tree, factors: ReadonlySet<Tree>): FormulaCase[] => {
+  const cases = variantsOf(tree).map(({ tree: one, when }) => ({
     expression: [symbolsOf(one, undefined as never).text, ...new Set(valuesIn(one, factors))].join(', '),
     when: [...new Set(when)].filter(Boolean).join('; '),
-  })),
+  }));
+  const [first] = cases;
+  return cases.every(({ expression }) => expression === first!.expression)
+    ? [{ expression: first!.expression, when: '' }]
+    : cases;
+};
+
+const rowOf = (tree: Step, under: string, factors: ReadonlySet<Tree>): FormulaRow => ({
+  symbol: tree.symbol,
+  cases: casesOf(tree.of[0], factors),
+  under,
   clause: tree.source?.clause ?? '',
   basis: tree.source?.basis ?? '',
   note: tree.note ?? '',
@@ -105,17 +121,18 @@ const comparedIn = (condition: Condition): readonly Tree[] => {
   }
 };
 
-const visit = (tree: Tree, steps: Set<Tree & { op: 'step' }>): void => {
+/** Notes each step in the order of use, with the choice that leads to it; a step that several lead to stands under none. */
+const visit = (tree: Tree, under: string, steps: Map<Step, string>): void => {
   if (tree.op === 'pick') {
     for (const { when, then } of tree.branches) {
-      for (const one of comparedIn(when)) visit(one, steps);
-      visit(then, steps);
+      for (const one of comparedIn(when)) visit(one, under, steps);
+      visit(then, conditionText(when) || under, steps);
     }
-    visit(tree.otherwise, steps);
+    visit(tree.otherwise, under, steps);
     return;
   }
-  if ('of' in tree) for (const one of tree.of) visit(one, steps);
-  if (tree.op === 'step') steps.add(tree);
+  if ('of' in tree) for (const one of tree.of) visit(one, under, steps);
+  if (tree.op === 'step') steps.set(tree, steps.has(tree) && steps.get(tree) !== under ? '' : under);
 };
 
 /**
@@ -124,7 +141,7 @@ const visit = (tree: Tree, steps: Set<Tree & { op: 'step' }>): void => {
  */
 export const formularyOf = (trees: readonly Tree[], factors: readonly Tree[] = []): FormulaRow[] => {
   const apart = new Set(factors);
-  const steps = new Set<Tree & { op: 'step' }>();
-  for (const tree of trees) visit(tree, steps);
-  return [...steps].map((one) => rowOf(one, apart));
+  const steps = new Map<Step, string>();
+  for (const tree of trees) visit(tree, '', steps);
+  return [...steps].map(([one, under]) => rowOf(one, under, apart));
 };

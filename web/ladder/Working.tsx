@@ -5,6 +5,7 @@ import { roundedDown } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { stateWords } from '../../core/words/stateWords.ts';
 import { verifiedWords } from '../../core/words/verifiedWords.ts';
+import { standardAddress } from '../standards/openStandard.ts';
 import { cited } from './cited.ts';
 import { inUse } from './inUse.ts';
 import { RichText } from './RichText.tsx';
@@ -156,7 +157,7 @@ const Leaning = ({ check, of }: Of) => {
       )}
       <p>
         {basis && `${check.basis}: ${basis}; `}
-        {verifiedWords[check.verified]}
+        {verifiedWords[check.verified]}; <a href={standardAddress(of.report.standard.id, check.id)}>the rule in full</a>
       </p>
     </div>
   );

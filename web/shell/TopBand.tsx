@@ -7,6 +7,7 @@ import { redo, setUnits, undo } from '../state/edits.ts';
 import { notice } from '../state/notice.ts';
 import { beginEmpty } from './beginEmpty.ts';
 import { keysShown } from './keys.ts';
+import { Pages } from './Pages.tsx';
 
 const systems = [
   { value: 'mm-kN', label: 'mm · kN' },
@@ -64,11 +65,7 @@ const Undoing = () => {
 export const TopBand = () => (
   <header class="top-band">
     <b class="brand">Copewright</b>
-    <nav aria-label="Pages">
-      <a href="./" aria-current="page">
-        Bench
-      </a>
-    </nav>
+    <Pages />
     <div class="whole-end" role="toolbar" aria-label="The whole end">
       <Undoing />
       <button type="button" onClick={beginEmpty}>

@@ -35,13 +35,14 @@ describe('formulas in symbols, whatever the end', () => {
       basis: 'seen',
     });
     expect(formularyOf([k])).toEqual([
-      { symbol: 'λ', cases: [{ expression: 'w / t', when: '' }], clause: '', basis: '', note: '' },
+      { symbol: 'λ', cases: [{ expression: 'w / t', when: '' }], under: '', clause: '', basis: '', note: '' },
       {
         symbol: 'k',
         cases: [
           { expression: '1', when: 'λ ≤ 15' },
           { expression: '15 / λ', when: 'otherwise' },
         ],
+        under: '',
         clause: '5.1',
         basis: 'seen',
         note: '',
@@ -61,6 +62,19 @@ describe('formulas in symbols, whatever the end', () => {
   test('a named number stands with its value, the factors of the standard do not', () => {
     const [row] = formularyOf([step('N', times(phi, constant('k', 0.3), w))], [phi]);
     expect(row!.cases[0]!.expression).toBe('φ k w, k = 0.3');
+  });
+
+  test('a step that only one branch leans on says which', () => {
+    const wide = step('a', times(2, w));
+    const rows = formularyOf([step('b', pick([[sawn, wide]], t))]);
+    expect(rows[0]).toMatchObject({ symbol: 'a', under: 'a sawn edge' });
+    expect(rows[1]).toMatchObject({ symbol: 'b', under: '' });
+  });
+
+  test('branches that read alike stand once', () => {
+    const [one, other] = [step('M', times(2, w)), step('M', times(3, w))];
+    const rows = formularyOf([step('R', times(phi, pick([[sawn, one]], other)))], [phi]);
+    expect(rows.at(-1)!.cases).toEqual([{ expression: 'φ M', when: '' }]);
   });
 
   test('conditions are said either way round', () => {

@@ -68,7 +68,8 @@ const Facts = ({ page }: { readonly page: StandardPage }) => (
 const Rules = ({ standard, rule }: { readonly standard: Standard; readonly rule: string }) => {
   const page = standardPage(standard);
   useEffect(() => {
-    document.getElementById(rule ? `rule-${rule}` : 'standards')?.scrollIntoView();
+    if (rule) document.getElementById(`rule-${rule}`)?.scrollIntoView();
+    else scrollTo(0, 0);
   }, [page.id, rule]);
   return (
     <>

@@ -90,6 +90,7 @@ export const commonwealth: Words = {
     'no-tie': 'no tie force',
     'no-support': "the supporting beam's section is not given",
     'clear-of-support': 'clear of the supporting flange',
+    'flange-cut-back': 'the flange is cut back past the wrench',
     'no-weld': 'no weld in this joint',
     'fin-plates-only': 'a rule for fin plates',
     'hole-above-standard': 'the holes are wider than the standard ones',

@@ -169,6 +169,18 @@ const edges: readonly (readonly [d: number, sheared: number, cut: number])[] = [
   [36, 64, 46],
 ];
 
+/** Bolts, mm: outside of the socket, width of the wide nut across its flats. */
+const sockets: readonly (readonly [d: number, socket: number, flats: number])[] = [
+  [12, 30, 22],
+  [16, 38, 27],
+  [20, 46, 32],
+  [22, 50, 36],
+  [24, 54, 41],
+  [27, 61, 46],
+  [30, 68, 50],
+  [36, 82, 60],
+];
+
 /** Every check of the end, by name. */
 export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answer>> => {
   const { section, top, bottom, setback: g, firstRow: y1, endDistance: eEnd, bolts, ply, weld, support, options } = end;
@@ -329,6 +341,23 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
     return no(top ? 'clear-of-support' : 'no-top-cope');
   };
 
+  /** Half a socket and 2 mm to a face; past half a wide nut, across its corners, to the next bolt. */
+  const wrench = (): Answer[] => {
+    const [, socket, nut] = sockets.find(([size]) => size === d)!;
+    const reach = socket / 2 + 2;
+    const apart = reach + nut / Math.sqrt(3);
+    const gone = (cope: Cope | null) =>
+      cope !== null && cope.depth >= tf + r - 1e-9 && cope.length >= eEnd + wide + reach - 1e-9;
+    return [
+      ...(gone(top) ? [] : [size('refer', y1 - tf - r, reach)]),
+      ...(gone(bottom) ? [] : [size('refer', h - yn - tf - r, reach)]),
+      size('refer', g + eEnd, reach),
+      ...(weld ? [size('refer', g + eEnd - weld.leg, reach)] : []),
+      ...(n > 1 ? [size('refer', p, apart)] : []),
+      ...(m > 1 ? [size('refer', q, apart)] : []),
+    ];
+  };
+
   return {
     'web-gross-shear': strength(V, { per: 1, resistance: 0.9 * h * tw * shear((h - 2 * tf) / tw).fs }),
     'stress-full': stress(cutOf(section, 0, h).peak),
@@ -391,6 +420,6 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
           size('refer', weld.leg, 0.625 * tp),
         )
       : no('fin-plates-only'),
-    'fit-wrench': no('no-rule'),
+    'fit-wrench': sizes(...wrench()),
   };
 };

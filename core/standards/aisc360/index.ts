@@ -2,6 +2,7 @@ import { flag } from '../../end/given.ts';
 import { all, not } from '../../formula/tree.ts';
 import { listedOf } from '../listed.ts';
 import { elasticStress } from '../methods/elasticStress.ts';
+import { fitWrench } from '../methods/fitWrench.ts';
 import { noRule, type Standard } from '../standard.ts';
 import { plateBlock, webBlock } from './block.ts';
 import { boltShear, plateBearing, webBearing, webTearout } from './bolts.ts';
@@ -77,7 +78,7 @@ export const aisc360 = (method: Method): Standard => ({
     'fit-cope-clearance': fitCopeClearance,
     'fit-setback': fitSetback,
     'fit-rotation': fitRotation,
-    'fit-wrench': noRule(),
+    'fit-wrench': fitWrench,
   },
   verified,
   notes: [

@@ -34,4 +34,5 @@ export const verified: Standard['verified'] = {
   'fit-cope-clearance': 'hand',
   'fit-setback': 'hand',
   'fit-rotation': 'published',
+  'fit-wrench': 'hand',
 };

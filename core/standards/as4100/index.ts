@@ -12,6 +12,7 @@ import {
   fitRotation,
   fitSetback,
 } from '../methods/fitPractice.ts';
+import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { supportShear } from '../methods/supportShear.ts';
 import { noRule, type Standard } from '../standard.ts';
@@ -90,7 +91,7 @@ export const as4100: Standard = {
     'fit-cope-clearance': fitCopeClearance,
     'fit-setback': fitSetback,
     'fit-rotation': fitRotation,
-    'fit-wrench': noRule(),
+    'fit-wrench': fitWrench,
   },
   verified,
   notes: [

@@ -32,4 +32,5 @@ export const verified: Standard['verified'] = {
   'fit-cope-clearance': 'hand',
   'fit-setback': 'hand',
   'fit-rotation': 'hand',
+  'fit-wrench': 'hand',
 };

@@ -2,6 +2,7 @@ import type { Tree } from '../../formula/tree.ts';
 import type { Pure } from '../../units/dimension.ts';
 import { listedOf, type StandardId } from '../listed.ts';
 import type { Steels } from '../materials.ts';
+import { fitWrench } from '../methods/fitWrench.ts';
 import { noRule, type Standard } from '../standard.ts';
 import { plateBearing, webBearing } from './bearing.ts';
 import { plateBlock, webBlock, webBlockOf, webTearout } from './block.ts';
@@ -85,7 +86,7 @@ const fit: Standard['fit'] = {
   'fit-cope-clearance': fitCopeClearance,
   'fit-setback': fitSetback,
   'fit-rotation': fitRotation,
-  'fit-wrench': noRule(),
+  'fit-wrench': fitWrench,
 };
 
 /** EN 1993-1-8:2005 and EN 1993-1-1:2005 with one country's factors and strengths. */

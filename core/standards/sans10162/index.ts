@@ -11,6 +11,7 @@ import {
   fitRotation,
   fitSetback,
 } from '../methods/fitPractice.ts';
+import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { noRule, type Standard } from '../standard.ts';
 import { plateBlock, webBlock } from './block.ts';
@@ -82,7 +83,7 @@ export const sans10162: Standard = {
     'fit-cope-clearance': fitCopeClearance,
     'fit-setback': fitSetback,
     'fit-rotation': fitRotation,
-    'fit-wrench': noRule(),
+    'fit-wrench': fitWrench,
   },
   verified,
   notes: [

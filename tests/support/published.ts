@@ -1,34 +1,7 @@
 import { readdirSync, readFileSync } from 'node:fs';
+import type { Example } from '../../core/check/proof.ts';
 
-/** One number that the program did not make, with where it comes from. */
-export interface Expectation {
-  readonly check: string;
-  /** Part of the check, where it has several. */
-  readonly of?: string;
-  /** A way that need not govern, by name: the resistance of that way is compared. */
-  readonly way?: string;
-  /** Number of the check compared: `resistance` where absent. */
-  readonly field?: 'demand' | 'resistance' | 'reactionAtFailure' | 'utilisation';
-  /** Or the value of a row of its working, by symbol. */
-  readonly row?: string;
-  readonly value: number;
-  readonly unit: string;
-  readonly within: number;
-  /** The sum by hand. */
-  readonly sum?: string;
-  /** Why the difference is allowed. */
-  readonly why: string;
-}
-
-export interface PublishedFixture {
-  readonly id: string;
-  readonly standard: string;
-  readonly standing: 'published' | 'theory' | 'hand';
-  readonly source: string;
-  readonly says: string;
-  readonly end: unknown;
-  readonly expect: readonly Expectation[];
-}
+export type PublishedFixture = Example;
 
 const readAll = <T>(folder: string): [name: string, value: T][] => {
   const place = new URL(`../../fixtures/${folder}/`, import.meta.url);

@@ -5,7 +5,7 @@ import { roundedDown } from '../../core/units/figures.ts';
 import { unitOf } from '../../core/units/systems.ts';
 import { stateWords } from '../../core/words/stateWords.ts';
 import { verifiedWords } from '../../core/words/verifiedWords.ts';
-import { standardAddress } from '../standards/openStandard.ts';
+import { standardAddress } from '../shell/address.ts';
 import { cited } from './cited.ts';
 import { inUse } from './inUse.ts';
 import { RichText } from './RichText.tsx';

@@ -1,13 +1,20 @@
-import { read } from '../standards/openStandard.ts';
 import { later } from '../state/later.ts';
+import { page } from './address.ts';
 import { Bench } from './Bench.tsx';
 
 const standardsPage = later(async () => (await import('../standards/StandardsPage.tsx')).StandardsPage);
+const proofPage = later(async () => (await import('../proof/ProofPage.tsx')).ProofPage);
+
+const coming = <p role="status">The page is on its way.</p>;
 
 /** The page that the address asks for. */
 export const App = () => {
-  const open = read.value;
-  if (!open) return <Bench />;
-  const Page = standardsPage.value;
-  return Page ? <Page {...open} /> : <p role="status">The page is on its way.</p>;
+  const open = page.value;
+  if (open === 'bench') return <Bench />;
+  if (open === 'proof') {
+    const Proof = proofPage.value;
+    return Proof ? <Proof /> : coming;
+  }
+  const Standards = standardsPage.value;
+  return Standards ? <Standards id={open.standard} rule={open.rule} /> : coming;
 };

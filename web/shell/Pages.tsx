@@ -1,17 +1,23 @@
-import { read, standardAddress } from '../standards/openStandard.ts';
 import { entry } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { PROOF, page, standardAddress } from './address.ts';
+
+const current = (is: boolean): 'page' | undefined => (is ? 'page' : undefined);
 
 /** The pages, and which of them is shown. */
 export const Pages = () => {
-  const open = read.value;
+  const open = page.value;
+  const standard = typeof open === 'object' ? open.standard : textOf(entry.value, 'standard');
   return (
     <nav aria-label="Pages">
-      <a href="#bench" aria-current={open ? undefined : 'page'}>
+      <a href="#bench" aria-current={current(open === 'bench')}>
         Bench
       </a>
-      <a href={standardAddress(open?.id ?? textOf(entry.value, 'standard'))} aria-current={open ? 'page' : undefined}>
+      <a href={standardAddress(standard)} aria-current={current(typeof open === 'object')}>
         Standards
+      </a>
+      <a href={PROOF} aria-current={current(open === 'proof')}>
+        Proof
       </a>
     </nav>
   );

@@ -6,10 +6,10 @@ import type { Standard } from '../../core/standards/standard.ts';
 import { significant } from '../../core/units/figures.ts';
 import { optionName, optionValue } from '../../core/words/optionWords.ts';
 import { RichText } from '../ladder/RichText.tsx';
-import { Pages } from '../shell/Pages.tsx';
+import { standardAddress } from '../shell/address.ts';
+import { PageHead } from '../shell/PageHead.tsx';
 import { listedAs, rulesOf, titled } from '../state/rules.ts';
 import { CheckRules } from './CheckRules.tsx';
-import { standardAddress } from './openStandard.ts';
 
 interface Props {
   /** Id of the standard that is read. */
@@ -99,10 +99,7 @@ export const StandardsPage = ({ id, rule }: Props) => {
   }, [id]);
   return (
     <>
-      <header class="top-band">
-        <b class="brand">Copewright</b>
-        <Pages />
-      </header>
+      <PageHead />
       <main class="standards" id="standards">
         <header class="standards-head">
           <h1>{known ? titled(known) : 'Standards'}</h1>

@@ -37,6 +37,9 @@ export const upright = step(
   pick([[oneColumn, over(V, N)]], times(V, plus(over(1, N), over(times(z, xMax), J)))),
 );
 
+/** What the bolt column nearest the support takes of V at arm z, N: its even share, and what holds V z about the centroid. */
+export const nearColumn = step('V_c', times(n, upright));
+
 /**
  * Force on the farthest bolt, N: elastic vector sum of V shared evenly and of V z turned about the centroid.
  * Not defined for one bolt alone, which holds no moment.

@@ -38,6 +38,7 @@ export const cutEdgeInTension: Gate = {
 export const uncoped: Gate = { when: not(coped), reason: 'no-cope' };
 export const intactFlange: Gate = { when: noColumnInCope, reason: 'intact-flange' };
 export const singleRow: Gate = { when: oneRow, reason: 'single-row' };
+export const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 export const noTieForce: Gate = { when: noTie, reason: 'no-tie' };
 
 /** What no standard's formula for the end's own section covers, whatever the number says. */

@@ -64,6 +64,8 @@ export const commonwealth: Words = {
   },
   ways: {
     up: 'upward',
+    'up, near column': 'upward, near column',
+    'down, near column': 'downward, near column',
     down: 'downward',
     along: 'along',
     'rupture, rectangle': 'rupture, web cut at both edges',

@@ -261,8 +261,12 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
 
   const planes = (t: number, y: number, u: number, L: number, Ln: number) =>
     2 * t * Math.min(0.6 * 0.9 * y * L, 0.6 * 0.9 * u * Ln);
-  const upright = (t: number, y: number, u: number, edge: number, count: number): Part[] =>
-    count > 0 ? [{ per: 1, resistance: count * planes(t, y, u, edge + rows, edge + rows - (n - 0.5) * dn) }] : [];
+  const upright = (t: number, y: number, u: number, edge: number, count: number): Part[] => {
+    if (count === 0) return [];
+    const one = planes(t, y, u, edge + rows, edge + rows - (n - 0.5) * dn);
+    const near = { per: 1 / m + (n * z * wide) / 2 / J, resistance: one };
+    return [{ per: 1, resistance: count * one }, ...(m > 1 ? [near] : [])];
+  };
   const along = (t: number, y: number, u: number, edge: number): Part[] => {
     const toEdge = planes(t, y, u, edge, edge - dn / 2);
     const resistance = m > 1 ? Math.min(toEdge, planes(t, y, u, q, q - dn)) : toEdge;

@@ -15,7 +15,8 @@ export const webTearout: PathMaker = (it, words, of) => {
   const fields = ['joint.firstRow', 'top.depth', 'joint.bolts.pitch'];
   const alone = of === 'first row';
   const from = alone ? it.y1 : it.yn;
-  return upright(it, words, { columns: it.mTop, from, edge: it.dt, name: 'web', fields, alone });
+  const columns = of.endsWith('near column') ? 1 : it.mTop;
+  return upright(it, words, { columns, from, edge: it.dt, name: 'web', fields, alone });
 };
 
 /** In the plate: `down` to its bottom edge beside every column, or `along` the last row to its free edge. */
@@ -26,7 +27,8 @@ export const plateTearout: PathMaker = (it, words, of) => {
     return along(it, words, { from: lastColumnX(it), edge: right, name: words.plate, field });
   }
   const fields = [plateField(it, 'bottomEdge'), 'joint.bolts.pitch'];
-  return upright(it, words, { columns: it.m, from: it.y1, edge: bottom, name: words.plate, fields });
+  const columns = of.endsWith('near column') ? 1 : it.m;
+  return upright(it, words, { columns, from: it.y1, edge: bottom, name: words.plate, fields });
 };
 
 interface Upright {

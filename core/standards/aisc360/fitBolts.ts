@@ -1,4 +1,4 @@
-import { type Gate, intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
 import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, found, p, q, tp, tw } from '../../end/given.ts';
 import { least, most, over, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
@@ -9,7 +9,6 @@ import { inches } from './given.ts';
 
 const spacing = clause('J3.3, J3.6');
 const edges = clause('J3.5, J3.6');
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const noBottomCope: Gate = {
   when: flag('', (f) => f.mBottom === 0, 'no cope below the bolts'),
   reason: 'no-bottom-cope',

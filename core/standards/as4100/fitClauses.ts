@@ -1,4 +1,4 @@
-import { type Gate, intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
 import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, tp, tw } from '../../end/given.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
@@ -8,7 +8,6 @@ import type { FitRule } from '../standard.ts';
 const spacing = { clause: '9.5.1, 9.5.3', basis: 'seen' } as const;
 const edges = { clause: '9.5.2, 9.5.4', basis: 'seen' } as const;
 const mm = (length: number) => constant(`${length} mm`, length, '1,0');
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const noBottomCope: Gate = {
   when: flag('no column inside a bottom cope', (f) => f.mBottom === 0),
   reason: 'no-bottom-cope',

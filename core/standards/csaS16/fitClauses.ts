@@ -1,4 +1,4 @@
-import { type Gate, intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
 import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, tp, tw } from '../../end/given.ts';
 import { step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
@@ -8,7 +8,6 @@ import { cutEdge, greatestEdge, plateEdge } from './edgeDistance.ts';
 const spacing = { clause: '22.3.1', basis: 'seen' } as const;
 const edges = { clause: 'Table 6, 22.3.3', basis: 'memory' } as const;
 const inLine = { clause: '22.3.4', basis: 'seen' } as const;
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const noBottomCope: Gate = {
   when: flag('', (f) => f.mBottom === 0, 'no column inside the bottom cope'),
   reason: 'no-bottom-cope',

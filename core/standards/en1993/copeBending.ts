@@ -6,6 +6,7 @@ import {
   noRectangle,
   noTee,
   oneColumn,
+  singleColumn,
   uncoped,
 } from '../../end/gates.ts';
 import { d, eEnd, fy, g, m, q, V } from '../../end/given.ts';
@@ -89,7 +90,6 @@ const waysOf = (of: 'rectangle' | 'tee', { cut, V: Vpl }: CutInShear, block: Tre
   const M0 = step('M_0', over(times(fy, cut.W), gammaM0), guide);
   const beside = step('V_pl,2', pick([[noColumnInCope, Vpl]], least(Vpl, block)), guide);
   const column = plus(g, lastColumn);
-  const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
   const asOne: Gate = { when: near, reason: 'last-column-at-face' };
   const apart: Gate = { when: not(near), reason: 'last-column-apart' };
   return [

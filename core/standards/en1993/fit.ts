@@ -1,4 +1,4 @@
-import { type Gate, intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
 import {
   ab,
   at,
@@ -65,7 +65,6 @@ const bottomFlange: Gate = {
   when: flag('a bottom flange below every column', (f) => f.mBottom === 0),
   reason: 'no-bottom-cope',
 };
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const notFinPlate: Gate = { when: flag('no fin plate', (f) => f.kind !== 'fin-plate'), reason: 'fin-plates-only' };
 const noSupport: Gate = { when: flag('no section of a supporting beam', (f) => !f.support.here), reason: 'no-support' };
 

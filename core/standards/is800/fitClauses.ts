@@ -1,4 +1,4 @@
-import { type Gate, intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
 import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fyp, p, q, tp, tw } from '../../end/given.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
@@ -7,7 +7,6 @@ import { epsilon, fyw } from './given.ts';
 
 const spacing = { clause: '10.2.2, 10.2.3', basis: 'seen' } as const;
 const edges = { clause: '10.2.4', basis: 'seen' } as const;
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const noBottomCope: Gate = {
   when: flag('no column inside a bottom cope', (f) => f.mBottom === 0),
   reason: 'no-bottom-cope',

@@ -1,5 +1,5 @@
 import type { Facts } from '../../end/facts.ts';
-import { type Gate, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, singleColumn, singleRow } from '../../end/gates.ts';
 import { flag, given, h, leg, n, p, q, r, tf, y1, z1 } from '../../end/given.ts';
 import { minus, over, plus, step, times } from '../../formula/tree.ts';
 import { wrenchRoom } from '../../steel/wrenchRoom.ts';
@@ -31,7 +31,6 @@ const bottomCut: Gate = {
   when: flag('', (f) => cutBack(f, f.cb, f.db), 'the bottom flange cut back past the wrench'),
   reason: 'flange-cut-back',
 };
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const noWeld: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'no-weld' };
 
 const root = step('t_f + r', plus(tf, r), source);

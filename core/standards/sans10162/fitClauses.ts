@@ -1,4 +1,4 @@
-import { type Gate, intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
 import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, tp, tw } from '../../end/given.ts';
 import { step, times } from '../../formula/tree.ts';
 import type { FitRule } from '../standard.ts';
@@ -6,7 +6,6 @@ import { cutEdge, greatestEdge, plateEdge } from './edgeDistance.ts';
 
 const spacing = { clause: '22.3.1', basis: 'memory' } as const;
 const edges = { clause: '22.3', basis: 'memory' } as const;
-const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 const noBottomCope: Gate = { when: flag('', (f) => f.mBottom === 0), reason: 'no-bottom-cope' };
 
 /** Least spacing of bolts 2.7 d, SANS 10162-1:2011 cl. 22.3.1. */

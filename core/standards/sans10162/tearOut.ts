@@ -1,5 +1,5 @@
-import { H } from '../../end/boltGroup.ts';
-import { intactFlange, oneColumn, singleRow } from '../../end/gates.ts';
+import { H, nearColumn } from '../../end/boltGroup.ts';
+import { type Gate, intactFlange, oneColumn, singleColumn, singleRow } from '../../end/gates.ts';
 import { fu, fup, fy, fyp, V } from '../../end/given.ts';
 import {
   type AlongTear,
@@ -11,15 +11,37 @@ import {
 } from '../../end/tearPaths.ts';
 import { least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force, Length, Stress } from '../../units/dimension.ts';
-import type { StrengthRule } from '../standard.ts';
+import type { StrengthRule, Way } from '../standard.ts';
 import { phi } from './factors.ts';
 
 const source = { clause: '13.11', basis: 'memory' } as const;
 const practice = { clause: '13.11 planes', basis: 'practice' } as const;
 
-/** Two shear planes beside each bolt column, cl. 13.11 without a tension plane. */
-const upright = ({ t, columns, Lgv, Lnv }: UprightTear, fy: Tree<Stress>, fu: Tree<Stress>) =>
-  step('V_r', times(columns, least(times(0.6, phi, fy, 2, t, Lgv), times(0.6, phi, fu, 2, t, Lnv))), source);
+/**
+ * Two shear planes beside each bolt column, cl. 13.11 without a tension plane: all columns against V, and with several columns the one
+ * nearest the support against what it takes of V at its arm, as an even share alone would not hold V z.
+ */
+const upright = (
+  of: 'up' | 'down',
+  tear: UprightTear,
+  fy: Tree<Stress>,
+  fu: Tree<Stress>,
+  off: readonly Gate[],
+): Way[] => {
+  const { t, columns, Lgv, Lnv } = tear;
+  const one = step('R_col', least(times(0.6, phi, fy, 2, t, Lgv), times(0.6, phi, fu, 2, t, Lnv)), source);
+  return [
+    { of, symbol: 'V', load: 'V', demand: V, resistance: step('V_r', times(columns, one), source), off },
+    {
+      of: `${of}, near column`,
+      symbol: 'V_c',
+      load: 'V',
+      demand: nearColumn,
+      resistance: one,
+      off: [...off, singleColumn],
+    },
+  ];
+};
 
 /** Two planes beside one bolt, torn along its row: the planes of cl. 13.11 applied rationally, no clause of its own. */
 const along = ({ t, edge, next }: AlongTear, fy: Tree<Stress>, fu: Tree<Stress>): Tree<Force> => {
@@ -33,7 +55,7 @@ const along = ({ t, edge, next }: AlongTear, fy: Tree<Stress>, fu: Tree<Stress>)
 export const webTearout: StrengthRule = {
   source,
   ways: [
-    { of: 'up', symbol: 'V', load: 'V', demand: V, resistance: upright(webTearUp, fy, fu), off: [intactFlange] },
+    ...upright('up', webTearUp, fy, fu, [intactFlange]),
     {
       of: 'along',
       symbol: 'H',
@@ -49,7 +71,7 @@ export const webTearout: StrengthRule = {
 export const plateTearout: StrengthRule = {
   source,
   ways: [
-    { of: 'down', symbol: 'V', load: 'V', demand: V, resistance: upright(plateTearDown, fyp, fup) },
+    ...upright('down', plateTearDown, fyp, fup, []),
     {
       of: 'along',
       symbol: 'H',

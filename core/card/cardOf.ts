@@ -1,0 +1,124 @@
+import type { ExaminedNumbers } from '../check/examined.ts';
+import { said } from '../check/examineNumbers.ts';
+import { fingerprintOf } from '../check/fingerprint.ts';
+import type { Check, Note, SaidFault } from '../check/report.ts';
+import { fitNames, strengthNames } from '../end/checkNames.ts';
+import { fault } from '../end/fault.ts';
+import { plyOf } from '../end/schema.ts';
+import { wordsFor } from '../words/wordsFor.ts';
+import type { Card, CardCheck, CardRow, MadeCard } from './card.ts';
+import { plateDepth } from './cardEnd.ts';
+import { cellOf, type Looked } from './cellOf.ts';
+import { letters } from './letters.ts';
+import { type Asked, readCard } from './readCard.ts';
+
+const distinct = <T>(all: readonly T[], key: (one: T) => string): T[] => [
+  ...new Map(all.map((one) => [key(one), one])).values(),
+];
+
+/** Faults that stand in the way of every cell are the template's own. */
+const sharedFaults = (looked: readonly Looked[]): readonly SaidFault[] => {
+  const key = ({ code, path }: SaidFault): string => `${code} ${path}`;
+  const [first, ...others] = looked.map(({ faults }) => faults);
+  const keys = others.map((faults) => new Set(faults.map(key)));
+  return (first ?? []).filter((one) => keys.every((all) => all.has(key(one))));
+};
+
+/** What the reaction of one end alone gives rise to. */
+const ofOneReaction = new Set(['least-reaction']);
+
+const notesOf = (all: readonly ExaminedNumbers[], of: 'assumptions' | 'notes'): Note[] =>
+  distinct(
+    all.flatMap(({ report }) => report[of]).filter(({ code }) => !ofOneReaction.has(code)),
+    ({ text }) => text,
+  );
+
+/** Every standing of a check that says something somewhere. */
+const standingsOf = (all: readonly ExaminedNumbers[]): Check[] =>
+  distinct(
+    all.flatMap(({ report }) => report.checks).filter(({ state }) => state !== 'notApplicable'),
+    ({ id, basis, verified }) => `${id} ${basis} ${verified}`,
+  );
+
+const checksOf = (card: Pick<Card, 'words' | 'sections'>, standings: readonly Check[]): CardCheck[] => {
+  const { titles } = wordsFor(card.words);
+  const met = new Set(standings.filter(({ state }) => state !== 'information').map(({ id }) => id));
+  const governing = new Set(
+    card.sections.flatMap(({ cells }) => cells.map((one) => (one.verdict === 'holds' ? one.governing : ''))),
+  );
+  return strengthNames
+    .filter((id) => met.has(id))
+    .map((id) => ({ id, title: titles[id] ?? id, letter: letters[id], governs: governing.has(id) }))
+    .sort((a, b) => (a.letter < b.letter ? -1 : 1));
+};
+
+const fitOf = (standings: readonly Check[], words: Card['words']): Card['fit'] => {
+  const { titles } = wordsFor(words);
+  const met = new Set<string>(standings.map(({ id }) => id));
+  return fitNames.filter((id) => met.has(id)).map((id) => ({ id, title: titles[id] ?? id }));
+};
+
+const made = (asked: Asked, table: readonly (readonly Looked[])[], all: readonly ExaminedNumbers[]): MadeCard => {
+  const like = all.find(({ report }) => report.verdict === 'holds') ?? all[0]!;
+  const { standard, level, units, words, options, version } = like.report;
+  const { mark: _, ...end } = like.end;
+  const sections: CardRow[] = asked.sections.map((section, i) => ({
+    section,
+    cells: table[i]!.map(({ cell }) => cell),
+  }));
+  const standings = standingsOf(all);
+  const { rows } = asked;
+  const card: Card = {
+    standard,
+    level,
+    units,
+    words,
+    options,
+    version,
+    joint: end.joint.kind,
+    rows,
+    plateDepths: rows.map((one) => plateDepth(plyOf(end.joint), end, one)),
+    sections,
+    checks: checksOf({ words, sections }, standings),
+    fit: fitOf(standings, words),
+    assumptions: notesOf(all, 'assumptions'),
+    notes: notesOf(all, 'notes'),
+    fingerprint: fingerprintOf({ ...bare(end), sections: asked.sections, rows }, standard),
+  };
+  return { card, end, like, standings };
+};
+
+/** The template without what it does not say of the card. */
+const bare = ({ beam, joint, ...end }: MadeCard['end']): MadeCard['end'] => ({
+  ...end,
+  reaction: 0,
+  beam: { ...beam, section: '' },
+  joint: { ...joint, bolts: { ...joint.bolts, rows: 0 } } as MadeCard['end']['joint'],
+});
+
+/** The first few reasons, each once. */
+const reasonsOf = (looked: readonly Looked[]): string[] => {
+  const all = looked.flatMap(({ cell }) => (cell.verdict === 'holds' ? [] : cell.because));
+  return distinct(all, ({ code }) => code)
+    .slice(0, 3)
+    .map(({ title, text }) => [title, text.replace(/\.$/, '')].filter(Boolean).join(': '));
+};
+
+/**
+ * The shop card of one fitting and setback: `{ end, family or sections, rows }` as parsed JSON, where the section, reaction and rows of the template `end`
+ * are not read. Never throws: what cannot be read, and a card without anything to print, come back as faults.
+ */
+export const cardOf = (input: unknown): { readonly made: MadeCard } | { readonly faults: readonly SaidFault[] } => {
+  const read = readCard(input);
+  if ('faults' in read) return said(read.faults);
+  const { asked } = read;
+  const table = asked.sections.map((section) => asked.rows.map((rows) => cellOf(asked.template, section, rows)));
+  const looked = table.flat();
+  const shared = sharedFaults(looked);
+  if (shared.length > 0) return { faults: shared };
+  const all = looked.flatMap(({ examined }) => (examined ? [examined] : []));
+  if (looked.every(({ cell }) => cell.verdict === 'fails')) {
+    return said([fault('nothing-to-print', 'sections', null, reasonsOf(looked))]);
+  }
+  return { made: made(asked, table, all) };
+};

@@ -16,7 +16,7 @@ const LEADING = 3.68;
 const HEADING = 4.4;
 
 /** ` (assumed)` where the report says that nothing was given at this path. */
-const assumed = ({ input }: Context, path: string): string =>
+export const assumed = ({ input }: Context, path: string): string =>
   input.report.assumptions.some((one) => one.path === path) ? say.assumed : '';
 
 const gradeName = ({ numbers }: Context, grade: string | { fy?: number; fu: number }): string => {

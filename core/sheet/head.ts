@@ -15,7 +15,8 @@ const marks: readonly TextStyle[] = [
 ];
 const MARK = 48;
 const WIDEST_MARK = 84;
-const STANDARD = 64;
+/** Room for the standard at the right of the head, mm. */
+export const STANDARD = 64;
 
 const optionStyle: TextStyle = { size: 8, family: 'narrow' };
 
@@ -31,7 +32,7 @@ export const drawHead = (context: Context): void => {
   const jobLeft = LEFT + Math.max(MARK, used) + 2;
   const standardLeft = LEFT + WIDTH - STANDARD;
   drawJob(context, jobLeft, standardLeft - jobLeft - 3);
-  drawStandard(context, standardLeft);
+  drawStandard(context, standardLeft, say.title);
 };
 
 const drawMark = ({ pen, input }: Context): number => {
@@ -52,7 +53,8 @@ const drawMark = ({ pen, input }: Context): number => {
   return WIDEST_MARK;
 };
 
-const drawJob = ({ pen, input }: Context, left: number, width: number): void => {
+/** Job, drawing and number, `width` mm wide. */
+export const drawJob = ({ pen, input }: Context, left: number, width: number): void => {
   const { job = '', drawing = '', number = '' } = input.end.sheet ?? {};
   pen.text(left, TOP + 4.1, say.job, small);
   const style: TextStyle = { size: 10 };
@@ -68,12 +70,12 @@ const drawJob = ({ pen, input }: Context, left: number, width: number): void => 
     pen.text(left + width, base, oneLine(pen, `${say.number} ${number}`, small, half - 1), { ...small, anchor: 'end' });
 };
 
-/** Standards with their editions, and the options of the first; lines closer where there are two standards. */
-const drawStandard = (context: Context, left: number): void => {
+/** Standards with their editions under a title, and the options of the first; lines closer where there are two standards. */
+export const drawStandard = (context: Context, left: number, title: string): void => {
   const { pen, second } = context;
   const style: TextStyle = { size: 10, bold: true };
   const [first, leading] = second ? [7.6, 3.7] : [8.2, 3.4];
-  pen.text(left, TOP + first - 4.1, say.title, small);
+  pen.text(left, TOP + first - 4.1, title, small);
   pen.text(left, TOP + first, oneLine(pen, standardName(context), style, STANDARD), style);
   if (second) {
     const other: TextStyle = { size: 9 };

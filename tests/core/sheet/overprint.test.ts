@@ -1,12 +1,13 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, it } from 'vitest';
 import { encodeLink } from '../../../core/exchange/link.ts';
-import { type Mark, type PathMark, POINT, type Spot, type TextMark } from '../../../core/sheet/pen.ts';
+import type { Mark, PathMark, Spot } from '../../../core/sheet/pen.ts';
 import { sheetPages } from '../../../core/sheet/sheet.ts';
 import { goodEnds } from '../../support/published.ts';
 import { examined } from './ends.ts';
 import { inOtherUnits } from './inOtherUnits.ts';
-import { boxOf, type FoundBox } from './readPdf.ts';
+import { boxOfText, overprints } from './overprints.ts';
+import type { FoundBox } from './readPdf.ts';
 import { pairs } from './twoStandards.ts';
 
 const demo = JSON.parse(readFileSync(new URL('../../../fixtures/demo/citrus-packhouse.json', import.meta.url), 'utf8'));
@@ -16,30 +17,6 @@ const pagesOf = async (end: object, paper: string): Promise<Mark[][]> => {
   const input = examined({ ...end, sheet: { ...(end as { sheet?: object }).sheet, paper } });
   const link = encodeLink(input.end, input.report.fingerprint);
   return (await sheetPages({ ...input, link }, { workings: 'all' })).pages;
-};
-
-const boxOfText = (mark: TextMark): FoundBox =>
-  boxOf({ ...mark, width: (mark.face.width(mark.text) * mark.size * POINT) / 1000 });
-
-const shared = (a: FoundBox, b: FoundBox): boolean =>
-  Math.min(a.right, b.right) - Math.max(a.left, b.left) > 0.1 &&
-  Math.min(a.bottom, b.bottom) - Math.max(a.top, b.top) > 0.1;
-
-/** Texts, and the square code with them. */
-const boxesOf = (page: readonly Mark[]): { text: string; box: FoundBox }[] =>
-  page.flatMap((mark) => {
-    if (mark.kind === 'text') return mark.text.trim() ? [{ text: mark.text, box: boxOfText(mark) }] : [];
-    if (mark.kind !== 'grid') return [];
-    const side = mark.rows.length * mark.module;
-    const box = { left: mark.x, top: mark.y, right: mark.x + side, bottom: mark.y + side };
-    return [{ text: 'square code', box }];
-  });
-
-const overprints = (page: readonly Mark[]): string[] => {
-  const all = boxesOf(page);
-  return all.flatMap((a, i) =>
-    all.slice(i + 1).flatMap((b) => (shared(a.box, b.box) ? [`${a.text} on ${b.text}`] : [])),
-  );
 };
 
 /** The part of the line from a to b that lies in the box is not empty. */

@@ -1,0 +1,133 @@
+import { type Cope, type End, type GradeGiven, plyOf } from '../../end/schema.ts';
+import { capital } from '../../words/capital.ts';
+import type { Zone } from '../context.ts';
+import { assumed, holesAssumed } from '../given.ts';
+import { body, LEFT, WIDTH } from '../page.ts';
+import type { TextStyle } from '../pen.ts';
+import { richText } from '../richText.ts';
+import { sheetWords } from '../sheetWords.ts';
+import { plainRun, setLines, wrap } from '../textBlock.ts';
+import { type CardContext, plateName, size } from './cardContext.ts';
+import { cardWords as say } from './cardWords.ts';
+
+type Row = readonly [label: string, value: string];
+
+const LEADING = 3.68;
+const HEADING = 4.4;
+/** Between the two columns, and between labels and what they name, mm. */
+const GAP = 6;
+const AIR = 1.8;
+
+const gradeText = ({ numbers }: CardContext, grade: GradeGiven): string =>
+  typeof grade === 'string' ? grade : `f_y ${numbers.load(grade.fy)}, f_u ${numbers.load(grade.fu)}`;
+
+const copeText = (context: CardContext, edge: 'top' | 'bottom', cope: Cope | null | undefined): string => {
+  if (!cope) return `${sheetWords[edge]} ${sheetWords.none}`;
+  const [length, depth, radius] = [cope.length, cope.depth, cope.radius ?? 0].map((one) => size(context, one));
+  return `${sheetWords[edge]} ${length} ${say.long}, ${depth} ${say.deep}, ${say.radius} ${radius}${assumed(context, `${edge}.radius`)}`;
+};
+
+const copeRows = (context: CardContext): Row[] => {
+  const { top, bottom } = context.input.end;
+  const label = capital(context.words.cope);
+  if (!top && !bottom) return [[label, sheetWords.none]];
+  return [
+    [label, copeText(context, 'top', top)],
+    ['', copeText(context, 'bottom', bottom)],
+  ];
+};
+
+const boltText = (context: CardContext, { bolts }: End['joint']): string => {
+  const { facts } = context.input;
+  const grade = typeof bolts.grade === 'string' ? bolts.grade : `f_ub ${context.numbers.load(bolts.grade.fu)}`;
+  const threads = sheetWords.threads[facts.threadsIn ? 'in' : 'out'] + assumed(context, 'joint.bolts.threads');
+  const made = (bolts.holes ?? holesAssumed(context)) + assumed(context, 'joint.bolts.holes');
+  return `${bolts.size} ${grade}, ${threads}; ${say.hole(context.numbers.mm(facts.d0), made)}`;
+};
+
+const columnText = (context: CardContext, { endDistance, bolts }: End['joint']): string => {
+  const { columns = 1, gauge = 0 } = bolts;
+  const first = say.fromEnd(size(context, endDistance));
+  if (columns === 1) return `${say.oneColumn}${assumed(context, 'joint.bolts.columns')}, ${first}`;
+  return `${columns}, ${say.first}${first}, ${context.words.gauge} ${size(context, gauge)}`;
+};
+
+const fittingRows = (context: CardContext): Row[] => {
+  const { words, numbers, input } = context;
+  const { joint } = input.end;
+  const { facts } = input;
+  const { thickness, topEdge, bottomEdge, edge } = plyOf(joint);
+  const edges = say.edges(size(context, topEdge), size(context, bottomEdge), size(context, edge));
+  const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
+  if (joint.kind === 'web-bolts')
+    return [[sheetWords.labels.ply, `${size(context, thickness)}; ${say.byRows}; ${edges}`]];
+  const metal = facts.Xu > 0 ? `, X_u ${numbers.mpa(facts.Xu)}${assumed(context, 'joint.weld.electrode')}` : '';
+  return [
+    [capital(words.finPlate), `${size(context, thickness)} × ${numbers.mm(width)}, ${say.byRows}; ${edges}`],
+    [sheetWords.labels.weld, `${sheetWords.fillets} ${size(context, joint.weld.leg)}${metal}`],
+  ];
+};
+
+const supportRows = ({ input, numbers }: CardContext): Row[] => {
+  const { support } = input.end;
+  if (!support) return [];
+  const name = support.section ?? (support.thickness === undefined ? '' : numbers.load(support.thickness));
+  const level =
+    support.topOfSteel === undefined ? '' : `, ${sheetWords.topOfSteel} ${numbers.load(support.topOfSteel)}`;
+  return [[sheetWords.labels.support, `${sheetWords.supportKinds[support.kind]} ${name}${level}`.trim()]];
+};
+
+/** What every end of the card has in common: beam and place of the bolts, and the fitting; each in one column. */
+const columnsOf = (context: CardContext): readonly (readonly Row[])[] => {
+  const { numbers, input, made } = context;
+  const { end } = input;
+  const { joint } = end;
+  const { labels } = say;
+  const pitch = joint.bolts.pitch === undefined ? '' : `, ${say.pitch(size(context, joint.bolts.pitch))}`;
+  const steel = `${say.beam} ${gradeText(context, end.beam.grade)}, ${plateName(context)} ${gradeText(context, plyOf(joint).grade)}`;
+  const level = `${made.card.level}${assumed(context, 'level')}`;
+  return [
+    [
+      [labels.steel, steel],
+      ...copeRows(context),
+      [labels.setback, size(context, end.setback)],
+      [labels.reaction, `${level}; ${sheetWords.tie} ${numbers.load(end.tie ?? 0)}`],
+      ...supportRows(context),
+    ],
+    [
+      [sheetWords.labels.bolts, boltText(context, joint)],
+      [labels.columns, columnText(context, joint)],
+      [labels.rows, `${say.firstRow(size(context, joint.firstRow))}${pitch}`],
+      ...fittingRows(context),
+    ],
+  ];
+};
+
+/** The template in words, in two columns. */
+export const cardGivenZone = (context: CardContext): Zone => {
+  const { pen, numbers, input } = context;
+  const style: TextStyle = { ...body, family: 'narrow' };
+  const width = (WIDTH - GAP) / 2;
+  const columns = columnsOf(context).map((rows) => {
+    const inset = AIR + Math.max(...rows.map(([label]) => pen.width(label, style)));
+    const set = rows.map(([label, value]) => ({
+      label,
+      lines: wrap(pen, richText(value, 'prose'), style, width - inset),
+    }));
+    return { inset, rows: set, lines: set.reduce((sum, { lines }) => sum + lines.length, 0) };
+  });
+  const draw = (_x: number, y: number): void => {
+    const note = ` ${sheetWords.unitNote(numbers.units, input.end.sheet?.decimal ?? '.')}`;
+    pen.text(LEFT, y + 3.3, [plainRun(sheetWords.given, true), plainRun(note)], style);
+    columns.forEach(({ inset, rows }, i) => {
+      const x = LEFT + i * (width + GAP);
+      let at = y + HEADING;
+      for (const { label, lines } of rows) {
+        pen.text(x, at + 2.9, label, style);
+        setLines(pen, x + inset, at + 2.9, lines, style, LEADING);
+        at += lines.length * LEADING;
+      }
+    });
+  };
+  return { height: HEADING + Math.max(...columns.map(({ lines }) => lines)) * LEADING, draw };
+};

@@ -15,6 +15,8 @@ const follow = async (asked: Asked): Promise<number> => {
       return checkCommand(asked);
     case 'sheet':
       return (await import('./terminal/sheetCommand.ts')).sheetCommand(asked);
+    case 'card':
+      return (await import('./terminal/cardCommand.ts')).cardCommand(asked);
     case 'serve':
       return (await import('./terminal/serveCommand.ts')).serveCommand(asked);
     case 'standards':

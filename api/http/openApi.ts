@@ -29,7 +29,7 @@ const problemNames: Readonly<Record<number, string>> = {
   400: 'Not readable as JSON, or an unknown query',
   413: 'Too large',
   415: 'A kind of body that is not taken here',
-  422: 'The end cannot be checked; the faults say why',
+  422: 'The end cannot be checked, or the card not printed; the faults say why',
 };
 
 const operation = (route: Route): Json => ({
@@ -40,7 +40,9 @@ const operation = (route: Route): Json => ({
     description: route.meaning[name],
     schema: { type: 'string', enum: values },
   })),
-  ...(route.method === 'post' && { requestBody: { required: true, content: contentOf(route.takes, exampleEnd) } }),
+  ...(route.method === 'post' && {
+    requestBody: { required: true, content: contentOf(route.takes, route.example ?? exampleEnd) },
+  }),
   responses: {
     200: { description: route.summary, content: contentOf(route.gives) },
     ...Object.fromEntries(

@@ -17,6 +17,8 @@ export interface Route {
   readonly meaning: Readonly<Record<string, string>>;
   /** Kinds of body that it takes; none for GET. */
   readonly takes: Readonly<Record<string, Content>>;
+  /** A body that it takes; the example of an end where absent. */
+  readonly example?: unknown;
   readonly gives: Readonly<Record<string, Content>>;
   /** Status codes of the problems that it may answer with. */
   readonly problems: readonly number[];

@@ -1,6 +1,8 @@
+import { exampleEnd } from '../exampleEnd.ts';
 import { familyNames, getSections } from './getSections.ts';
 import { getStandards } from './getStandards.ts';
 import { openApi } from './openApi.ts';
+import { postCard } from './postCard.ts';
 import { postCheck } from './postCheck.ts';
 import { postSheet } from './postSheet.ts';
 import { json } from './reply.ts';
@@ -39,6 +41,19 @@ export const routes: readonly Route[] = [
     gives: { 'application/pdf': { other: 'The sheet' } },
     problems: taking,
     handler: postSheet,
+  },
+  {
+    method: 'post',
+    path: '/v1/card',
+    summary:
+      'The shop card of one fitting and setback: the reaction that each section carries with each count of bolt rows. The same card gives the same bytes.',
+    query: { as: ['pdf', 'json'] },
+    meaning: { as: 'json gives the table in place of the printed card' },
+    takes: { 'application/json': 'CardRequest' },
+    example: { end: exampleEnd, sections: ['UB 406x178x60', 'UB 457x191x67', 'UB 533x210x92'], rows: [2, 3, 4, 5] },
+    gives: { 'application/pdf': { other: 'The card' }, 'application/json': 'Card' },
+    problems: taking,
+    handler: postCard,
   },
   {
     method: 'get',

@@ -12,6 +12,10 @@ interface Command {
 const commands = {
   check: { options: { working: 'boolean', json: 'boolean', ndjson: 'boolean' }, files: 1 },
   sheet: { options: { output: 'string', workings: 'string' }, files: 1 },
+  card: {
+    options: { family: 'string', sections: 'string', rows: 'string', output: 'string', json: 'boolean' },
+    files: 1,
+  },
   standards: { options: {}, files: 1 },
   serve: { options: { port: 'string', host: 'string' }, files: 0 },
   help: { options: {}, files: 1 },

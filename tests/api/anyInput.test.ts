@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { problemSchema, reportSchema } from '../../api/http/schemas.ts';
+import { reportSchema } from '../../api/http/reportSchema.ts';
+import { problemSchema } from '../../api/http/schemas.ts';
 import { anyEnd, anyNumbers, fullEnd } from './anyEnd.ts';
 import { post, postJson } from './ask.ts';
 

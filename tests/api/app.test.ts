@@ -1,7 +1,8 @@
 import { describe, expect, test } from 'vitest';
 import { createApp } from '../../api/app.ts';
 import { LINES_MOST } from '../../api/http/postCheck.ts';
-import { problemSchema, reportSchema, sectionsSchema, standardsSchema } from '../../api/http/schemas.ts';
+import { reportSchema } from '../../api/http/reportSchema.ts';
+import { problemSchema, sectionsSchema, standardsSchema } from '../../api/http/schemas.ts';
 import { checkEnd } from '../../core/check/checkEnd.ts';
 import { standards } from '../../core/standards/index.ts';
 import { findSection, listSections } from '../../core/steel/findSection.ts';

@@ -145,6 +145,48 @@ describe('copewright sheet', () => {
   });
 });
 
+describe('copewright card', () => {
+  const sections = ['UB 406x178x60', 'UB 457x191x67'];
+  const listed = ['--sections', sections.join(', ')];
+
+  test('writes the PDF that the API answers with, and ends with 0, whether the end itself holds or not', async () => {
+    const out = join(folder, 'card.pdf');
+    expect(await run('card', failing, ...listed, '--rows', '2-4', '-o', out)).toEqual({ status: 0, out: '', err: '' });
+    const body = { end: exampleEnd, sections, rows: [2, 3, 4] };
+    const bytes = Buffer.from(await (await postJson('/v1/card', body)).arrayBuffer());
+    expect(readFileSync(out).equals(bytes)).toBe(true);
+  });
+
+  test('prints the table as JSON when asked, of a family too', async () => {
+    const { status, out } = await run('card', holding, '--family', 'UB', '--rows', '2,3', '--json');
+    expect(status).toBe(0);
+    const answer = await postJson('/v1/card?as=json', { end: exampleEnd, family: 'UB', rows: [2, 3] });
+    expect(out).toBe(`${await answer.text()}\n`);
+  });
+
+  test('what cannot be followed ends with 2 and one sentence', async () => {
+    expectSentence(await run('card', '--family', 'UB', '-o', 'x.pdf'));
+    expectSentence(await run('card', holding, '--family', 'UB'));
+    expectSentence(await run('card', holding, '--family', 'UB', '--json', '-o', '-'));
+    for (const rows of ['2-', '8-2', 'all', '2.5', ''])
+      expectSentence(await run('card', holding, '--family', 'UB', `--rows=${rows}`, '-o', 'x.pdf'));
+    expectSentence(await run('card', holding, ...listed, '-o', join(folder, 'none', 'x.pdf')));
+    expectSentence(await run('card', join(folder, 'none.json'), ...listed, '-o', 'x.pdf'));
+  });
+
+  test('says each fault as a sentence with its path', async () => {
+    const refused = async (...args: string[]): Promise<string> => {
+      const { status, out, err } = await run('card', holding, ...args, '--json');
+      expect([status, out]).toEqual([2, '']);
+      return err;
+    };
+    expect(await refused('--family', 'UBB')).toMatch(/^family: .*nearest: UB/);
+    expect(await refused('--sections', 'UB 406x178x61')).toMatch(/^sections: .*nearest: UB 406x178x60/);
+    expect(await refused()).toMatch(/^sections: .*family or of a list/);
+    expect((await run('card', faulty, '--family', 'UB', '--json')).err).toContain('setback: ');
+  });
+});
+
 describe('copewright serve', () => {
   test('says in one line that a port is in use, and ends with 2', async () => {
     const taken = createServer().listen(0, '127.0.0.1');

@@ -14,6 +14,7 @@ const layers: readonly (readonly string[])[] = [
   ['core/standards'],
   ['core/joints'],
   ['core/check'],
+  ['core/advice'],
   ['core/drawing', 'core/card'],
   ['core/sheet', 'core/exchange'],
   ['api', 'web'],
@@ -104,7 +105,7 @@ describe('imports run one way', () => {
 
   test('shared code never asks which standard it serves', () => {
     const asked = files
-      .filter((file) => /^core\/(formula|shape|steel|end|joints|check|drawing|card)\//.test(file))
+      .filter((file) => /^core\/(formula|shape|steel|end|joints|check|advice|drawing|card)\//.test(file))
       .filter((file) =>
         /sans-10162|csa-s16|aisc-360|en-1993|as-4100|is-800/.test(readFileSync(join(root, file), 'utf8')),
       );

@@ -1,10 +1,12 @@
 import type { ExaminedNumbers } from '../check/examined.ts';
-import { said } from '../check/examineNumbers.ts';
 import { fingerprintOf } from '../check/fingerprint.ts';
 import type { Check, Note, SaidFault } from '../check/report.ts';
 import { fitNames, strengthNames } from '../end/checkNames.ts';
-import { fault } from '../end/fault.ts';
+import { type Fault, fault } from '../end/fault.ts';
 import { plyOf } from '../end/schema.ts';
+import { cardFaultSentences } from '../words/cardFaults.ts';
+import { commonwealth } from '../words/commonwealth.ts';
+import { faultText } from '../words/words.ts';
 import { wordsFor } from '../words/wordsFor.ts';
 import type { Card, CardCheck, CardRow, MadeCard } from './card.ts';
 import { plateDepth } from './cardEnd.ts';
@@ -15,6 +17,10 @@ import { type Asked, readCard } from './readCard.ts';
 const distinct = <T>(all: readonly T[], key: (one: T) => string): T[] => [
   ...new Map(all.map((one) => [key(one), one])).values(),
 ];
+
+const said = (faults: readonly Fault[]): { readonly faults: readonly SaidFault[] } => ({
+  faults: faults.map((one) => ({ ...one, text: faultText(commonwealth, cardFaultSentences, one) })),
+});
 
 /** Faults that stand in the way of every cell are the template's own. */
 const sharedFaults = (looked: readonly Looked[]): readonly SaidFault[] => {

@@ -149,7 +149,7 @@ describe('copes proposed from the support', () => {
       }),
       { numRuns: 300 },
     );
-    expect(met).toBeGreaterThan(4 * short);
+    expect(met).toBeGreaterThan(2 * short);
   });
 
   test('a beam less deep than its support, tops level, is always let in', () => {

@@ -8,7 +8,7 @@ import { cardFaultSentences } from '../words/cardFaults.ts';
 import { commonwealth } from '../words/commonwealth.ts';
 import { faultText } from '../words/words.ts';
 import { wordsFor } from '../words/wordsFor.ts';
-import type { Card, CardCheck, CardRow, MadeCard } from './card.ts';
+import type { Card, CardCheck, CardRow, MadeCard, Why } from './card.ts';
 import { plateDepth } from './cardEnd.ts';
 import { cellOf, type Looked } from './cellOf.ts';
 import { letters } from './letters.ts';
@@ -65,7 +65,7 @@ const fitOf = (standings: readonly Check[], words: Card['words']): Card['fit'] =
 };
 
 const made = (asked: Asked, table: readonly (readonly Looked[])[], all: readonly ExaminedNumbers[]): MadeCard => {
-  const like = all.find(({ report }) => report.verdict === 'holds') ?? all[0]!;
+  const like = all.find(({ report }) => report.verdict === 'holds')!;
   const { standard, level, units, words, options, version } = like.report;
   const { mark: _, ...end } = like.end;
   const sections: CardRow[] = asked.sections.map((section, i) => ({
@@ -102,17 +102,25 @@ const bare = ({ beam, joint, ...end }: MadeCard['end']): MadeCard['end'] => ({
   joint: { ...joint, bolts: { ...joint.bolts, rows: 0 } } as MadeCard['end']['joint'],
 });
 
-/** The first few reasons, each once. */
+/** The reasons that most cells give, each once. */
 const reasonsOf = (looked: readonly Looked[]): string[] => {
-  const all = looked.flatMap(({ cell }) => (cell.verdict === 'holds' ? [] : cell.because));
-  return distinct(all, ({ code }) => code)
+  const counts = new Map<string, { count: number; readonly why: Why }>();
+  for (const { cell } of looked) {
+    for (const why of cell.verdict === 'holds' ? [] : cell.because) {
+      const found = counts.get(why.code) ?? { count: 0, why };
+      found.count += 1;
+      counts.set(why.code, found);
+    }
+  }
+  return [...counts.values()]
+    .sort((one, other) => other.count - one.count)
     .slice(0, 3)
-    .map(({ title, text }) => [title, text.replace(/\.$/, '')].filter(Boolean).join(': '));
+    .map(({ why: { title, text } }) => [title, text.replace(/\.$/, '')].filter(Boolean).join(': '));
 };
 
 /**
  * The shop card of one fitting and setback: `{ end, family or sections, rows }` as parsed JSON, where the section, reaction and rows of the template `end`
- * are not read. Never throws: what cannot be read, and a card without anything to print, come back as faults.
+ * are not read. Never throws: what cannot be read, and a card without a single number, come back as faults.
  */
 export const cardOf = (input: unknown): { readonly made: MadeCard } | { readonly faults: readonly SaidFault[] } => {
   const read = readCard(input);
@@ -123,7 +131,7 @@ export const cardOf = (input: unknown): { readonly made: MadeCard } | { readonly
   const shared = sharedFaults(looked);
   if (shared.length > 0) return { faults: shared };
   const all = looked.flatMap(({ examined }) => (examined ? [examined] : []));
-  if (looked.every(({ cell }) => cell.verdict === 'fails')) {
+  if (looked.every(({ cell }) => cell.verdict !== 'holds')) {
     return said([fault('nothing-to-print', 'sections', null, reasonsOf(looked))]);
   }
   return { made: made(asked, table, all) };

@@ -25,14 +25,22 @@ const copesText = ({ input, words, numbers }: CardContext): string => {
 };
 
 /** The fitting in short, as a person asks for the card. */
-const headline = (context: CardContext): string => {
+const fittingText = (context: CardContext): string => {
   const { input, words, numbers } = context;
   const { joint } = input.end;
   const { bolts } = joint;
   const plate = joint.kind === 'fin-plate' ? capital(words.finPlate) : say.joints['web-bolts'];
   const columns = input.facts.m > 1 ? `${input.facts.m} ${say.columns} ` : '';
   const grade = typeof bolts.grade === 'string' ? ` ${bolts.grade}` : '';
-  return `${plate} ${numbers.mm(input.facts.tp)}, ${columns}${bolts.size}${grade}, ${copesText(context)}`;
+  return `${plate} ${numbers.mm(input.facts.tp)}, ${columns}${bolts.size}${grade}`;
+};
+
+/** The fitting with its copes in the largest type that takes them; where none does the copes are left to the data below. */
+const leadOf = (context: CardContext, room: number) => {
+  const fitting = fittingText(context);
+  const lead = `${fitting}, ${copesText(context)}`;
+  const style = LEADS.find((one) => context.pen.width(lead, one) <= room);
+  return style ? { lead, style } : { lead: fitting, style: LEADS[0]! };
 };
 
 /** Name, job, standard; and under it the fitting and what the numbers are. */
@@ -48,8 +56,7 @@ export const drawCardHead = (context: CardContext): void => {
   const base = VERDICT_TOP + 6.6;
   const carries = say.carries(numbers.force, made.card.level);
   const room = WIDTH - pen.width(carries, AFTER) - 4;
-  const lead = headline(context);
-  const style = LEADS.find((one) => pen.width(lead, one) <= room) ?? LEADS.at(-1)!;
+  const { lead, style } = leadOf(context, room);
   pen.text(LEFT, base, oneLine(pen, lead, style, room), style);
   pen.text(LEFT + WIDTH, base, carries, { ...AFTER, anchor: 'end' });
   pen.line(LEFT, VERDICT_TOP + 9.6, LEFT + WIDTH, VERDICT_TOP + 9.6, WIDE);

@@ -10,11 +10,8 @@ import { cardWords as say } from './cardWords.ts';
 
 const hasNumber = ({ cells }: CardRow): boolean => cells.some(({ verdict }) => verdict === 'holds');
 
-/** The rows that the table prints: those with a number; where there is none at all, every one. */
-export const listedRows = ({ made }: CardContext): readonly CardRow[] => {
-  const { sections } = made.card;
-  return sections.some(hasNumber) ? sections.filter(hasNumber) : sections;
-};
+/** The rows that the table prints: those with a number. */
+export const listedRows = ({ made }: CardContext): readonly CardRow[] => made.card.sections.filter(hasNumber);
 
 /** A designation stays on one line. */
 const kept = (designation: string): string => designation.replaceAll(' ', '\u00a0');
@@ -31,8 +28,7 @@ const named = (rows: readonly CardRow[]): string => {
 };
 
 const runsOf = (context: CardContext): SetRun[][] => {
-  const listed = new Set(listedRows(context));
-  const rest = context.made.card.sections.filter((one) => !listed.has(one));
+  const rest = context.made.card.sections.filter((one) => !hasNumber(one));
   const referred = rest.filter(({ cells }) => cells.some(({ verdict }) => verdict === 'refer'));
   const left = rest.filter((one) => !referred.includes(one));
   return [[say.referredRows, referred] as const, [say.blankRows, left] as const].flatMap(([lead, rows]) =>

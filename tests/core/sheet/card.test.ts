@@ -82,11 +82,6 @@ describe('the printed shop card', () => {
     expect(pages[0]).toContain(`Sections without a number stand on sheet ${pages.length}.`);
   });
 
-  it('prints REFER in every cell where no section has a number', async () => {
-    const [text = ''] = await pagesOf({ end, sections: ['UB 1016x305x584'], rows: [2, 3] });
-    expect(text).toContain('UB 1016 × 305 × 584 REFER REFER');
-  });
-
   it('speaks the words of the region, in inches and kips with tenths', async () => {
     const [text = ''] = await pagesOf({ end: inches, sections: ['W16x36', 'W18x50'], rows: [3, 4] });
     for (const said of ['Single plate 3/8, 3/4 A325, top cope 4 1/2 × 1 1/2', 'kip, factored', 'to 0.1 kip'])

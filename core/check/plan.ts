@@ -1,7 +1,8 @@
 import type { FitName, PartName, StrengthName } from '../end/checkNames.ts';
 import type { Gate, Limit } from '../end/gates.ts';
 import type { Joint } from '../end/schema.ts';
-import { markShared, type NumberReader, numberOf, testOf } from '../formula/number.ts';
+import { type NumberReader, numberOf, testOf } from '../formula/number.ts';
+import { markShared } from '../formula/shared.ts';
 import { joints } from '../joints/index.ts';
 import {
   type FitPart,

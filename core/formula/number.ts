@@ -1,7 +1,9 @@
+import { leastOf, mostOf, type NumberReader, raised, solved, sum } from './readers.ts';
+import { isShared } from './shared.ts';
 import type { Condition, Tree } from './tree.ts';
 
-/** Reads the number of a tree from facts, in N and mm. */
-export type NumberReader = (facts: never) => number;
+export type { NumberReader } from './readers.ts';
+
 type Test = (facts: never) => boolean;
 
 /** Most steps that all standards and joints together may have. */
@@ -25,28 +27,6 @@ const newCell = (): number => {
 };
 
 const readers = new WeakMap<Tree, NumberReader>();
-const met = new WeakSet<Tree>();
-const shared = new WeakSet<Tree>();
-
-const isStep = (tree: Tree): boolean => tree.op === 'step';
-
-/** Marks the steps that more than one formula leans on; only these are remembered within a run. */
-export const markShared = (...roots: readonly (Tree | Condition)[]): void => {
-  for (const one of roots) {
-    if (one.op === 'flag') continue;
-    const tree = one as Tree;
-    if (isStep(tree)) {
-      if (met.has(tree)) {
-        shared.add(tree);
-        continue;
-      }
-      met.add(tree);
-    }
-    if (one.op === 'pick') markShared(...one.branches.flatMap(({ when, then }) => [when, then]), one.otherwise);
-    else if ('of' in one) markShared(...(one.of as readonly (Tree | Condition)[]));
-  }
-};
-
 /** Composes a tree into closures, once; the same tree always gives the same reader. */
 export const numberOf = (tree: Tree): NumberReader => {
   const known = readers.get(tree);
@@ -70,9 +50,9 @@ const compose = (tree: Tree): NumberReader => {
     case 'plus':
       return sum(tree.of.map(numberOf));
     case 'least':
-      return extreme(tree.of.map(numberOf), Math.min);
+      return leastOf(tree.of.map(numberOf));
     case 'most':
-      return extreme(tree.of.map(numberOf), Math.max);
+      return mostOf(tree.of.map(numberOf));
     case 'over': {
       const [a, b] = [numberOf(tree.of[0]), numberOf(tree.of[1])];
       return (facts) => a(facts) / b(facts);
@@ -93,14 +73,10 @@ const compose = (tree: Tree): NumberReader => {
       return numberOf(tree.of[0]);
     case 'pick':
       return chosen(tree.branches, numberOf(tree.otherwise));
-    case 'found': {
-      const [of, solve] = [tree.of.map(numberOf), tree.solve];
-      const [a] = of;
-      if (of.length === 1 && a) return (facts) => solve(facts, a(facts));
-      return (facts) => solve(facts, ...of.map((one) => one(facts)));
-    }
+    case 'found':
+      return solved(tree.of.map(numberOf), tree.solve);
     case 'step':
-      return shared.has(tree) ? remembered(numberOf(tree.of[0])) : numberOf(tree.of[0]);
+      return isShared(tree) ? remembered(numberOf(tree.of[0])) : numberOf(tree.of[0]);
   }
 };
 
@@ -145,36 +121,6 @@ const product = (of: readonly Tree[]): NumberReader => {
         return value;
       };
   }
-};
-
-const sum = (of: readonly NumberReader[]): NumberReader => {
-  const [a, b] = of as [NumberReader, NumberReader];
-  if (of.length === 2) return (facts) => a(facts) + b(facts);
-  return (facts) => {
-    let value = 0;
-    for (let i = 0; i < of.length; i += 1) value += of[i]!(facts);
-    return value;
-  };
-};
-
-const extreme = (of: readonly NumberReader[], better: (a: number, b: number) => number): NumberReader => {
-  const [a, b] = of as [NumberReader, NumberReader];
-  if (of.length === 2) return (facts) => better(a(facts), b(facts));
-  return (facts) => {
-    let value = a(facts);
-    for (let i = 1; i < of.length; i += 1) value = better(value, of[i]!(facts));
-    return value;
-  };
-};
-
-const raised = (base: NumberReader, exponent: number): NumberReader => {
-  if (exponent === 2) {
-    return (facts) => {
-      const value = base(facts);
-      return value * value;
-    };
-  }
-  return (facts) => base(facts) ** exponent;
 };
 
 const chosen = (branches: readonly { when: Condition; then: Tree }[], otherwise: NumberReader): NumberReader => {

@@ -1,5 +1,6 @@
 import { describe, expect, test } from 'vitest';
-import { markShared, newRun, numberOf } from '../../../core/formula/number.ts';
+import { newRun, numberOf } from '../../../core/formula/number.ts';
+import { markShared } from '../../../core/formula/shared.ts';
 import {
   atMost,
   constant,

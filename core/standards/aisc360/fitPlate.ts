@@ -34,7 +34,11 @@ export const fitPlateDepth: FitRule = {
   source,
   breach: 'fails',
   parts: [
-    { of: 'depth', given: hp, least: step('h_min', over(minus(h, times(2, root)), 2), source, 'half the clear web') },
+    {
+      of: 'depth',
+      given: hp,
+      least: step('h_min', over(minus(h, times(2, plus(tf, r))), 2), source, 'half the clear web'),
+    },
     { of: 'top', given: step('y_p', minus(y1, eTop), source, 'top of the plate'), least: root, off: [copedAbove] },
     {
       of: 'bottom',

@@ -33,11 +33,11 @@ const bottomCut: Gate = {
 };
 const noWeld: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'no-weld' };
 
-const root = step('t_f + r', plus(tf, r), source);
+const root = plus(tf, r);
 const toTop = step('y_w', minus(y1, root), source, 'from the first row to the root of the top flange');
 const toBottom = step(
   'y_w',
-  minus(h, plus(y1, times(minus(n, 1), p), root)),
+  minus(h, plus(y1, times(minus(n, 1), p), tf, r)),
   source,
   'from the last row to the root of the bottom flange',
 );

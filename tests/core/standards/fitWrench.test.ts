@@ -17,10 +17,10 @@ interface Sizes {
 }
 
 /** I 400 deep, flange 15, root radius 15, uncoped but where said; M20, setback 10. */
-const checksOf = (x: Sizes): readonly Check[] => {
+const checksOf = (x: Sizes, working = false): readonly Check[] => {
   const ply = { thickness: 10, grade: { fy: 355, fu: 470 }, topEdge: 50, bottomEdge: 50, edge: 50 };
   const kind = x.kind ?? 'fin-plate';
-  const outcome = checkEnd({
+  const end = {
     standard: x.standard ?? 'sans-10162-1',
     units: 'mm-kN',
     reaction: 100,
@@ -37,11 +37,12 @@ const checksOf = (x: Sizes): readonly Check[] => {
       bolts: { size: x.size ?? 'M20', grade: { fu: 830 }, rows: x.rows ?? 3, pitch: x.pitch ?? 70 },
       ...(kind === 'fin-plate' ? { plate: ply, weld: { leg: x.leg ?? 8 } } : { ply }),
     },
-  });
+  };
+  const outcome = checkEnd(end, { working });
   if ('faults' in outcome) throw new Error(outcome.faults.map(({ text }) => text).join(' '));
   return outcome.report.checks;
 };
-const wrenchOf = (x: Sizes): Check => checksOf(x).find(({ id }) => id === 'fit-wrench')!;
+const wrenchOf = (x: Sizes, working = false): Check => checksOf(x, working).find(({ id }) => id === 'fit-wrench')!;
 
 describe('room for the wrench', () => {
   test('a bolt too near a whole flange refers, with what is there and what is needed', () => {
@@ -103,5 +104,15 @@ describe('room for the wrench', () => {
         expect(wrenchOf({ ...told, pitch: least }).state, `${id} ${size} at ${least}`).toBe('holds');
       }
     }
+  });
+});
+
+describe('its working', () => {
+  test('takes flange and root as one from the way to the bolts', () => {
+    const rows = wrenchOf({ firstRow: 50 }, true).working ?? [];
+    expect(rows.map(({ symbol, expression, numbers }) => `${symbol} = ${expression} = ${numbers}`)).toEqual([
+      'y_w = y_1 − (t_f + r) = 50 − (15 + 15)',
+      'R_w = D_w / 2 + s_w = 46 / 2 + 2',
+    ]);
   });
 });

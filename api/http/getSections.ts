@@ -15,7 +15,7 @@ const familyOf = ({ family, market, designations }: ReturnType<typeof listSectio
     market,
     shape: found[0]?.section.family ?? 'I',
     source: found[0]?.source ?? '',
-    sections: found.map(({ designation, mass, section: { h, b, tf, tw, r } }) => ({
+    sections: found.map(({ designation, mass, section: { h, b, tf, tw, r, slope, toe } }) => ({
       designation,
       mass: tidy(mass),
       depth: tidy(h),
@@ -23,6 +23,8 @@ const familyOf = ({ family, market, designations }: ReturnType<typeof listSectio
       flange: tidy(tf),
       web: tidy(tw),
       radius: tidy(r),
+      ...(slope !== undefined && { slope: tidy((slope * 180) / Math.PI) }),
+      ...(toe !== undefined && { toeRadius: tidy(toe) }),
     })),
   };
 };

@@ -50,6 +50,8 @@ export const sectionsSchema = z
             flange: number,
             web: number,
             radius: number,
+            slope: number.exactOptional().meta(said('Of a tapered flange, degrees')),
+            toeRadius: number.exactOptional().meta(said('Of a tapered flange')),
           }),
         ),
       }),

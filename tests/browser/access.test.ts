@@ -1,7 +1,5 @@
-import { readFileSync } from 'node:fs';
-import { createRequire } from 'node:module';
-import type { AxeResults } from 'axe-core';
 import { describe, expect, test } from 'vitest';
+import { findings, sideways } from './accessible.ts';
 import type { Bench } from './bench.ts';
 import { demoEnd, linkOf } from './demoEnd.ts';
 import { eventually } from './eventually.ts';
@@ -16,10 +14,6 @@ const crowded = linkOf({
   top: { length: 95, depth: 35, radius: 0 },
   sheet: { job: 'A job with a name', beside: { standard: 'aisc-360-asd', reaction: 320 } },
 });
-
-/** How far the page scrolls sideways, px. */
-const sideways = (bench: Bench) =>
-  bench.page.evaluate(() => document.documentElement.scrollWidth - document.documentElement.clientWidth);
 
 /** The verdict where it can be seen without scrolling. */
 const inSight = async (bench: Bench) => {
@@ -132,18 +126,6 @@ describe('at 400 % zoom', () => {
   });
 });
 
-const axe = readFileSync(createRequire(import.meta.url).resolve('axe-core/axe.min.js'), 'utf8');
-
-/** Serious and critical findings of the accessibility checker: its rule, and the parts of the page it is about. */
-const findings = async ({ page }: Bench): Promise<string[]> => {
-  await page.evaluate(axe);
-  const { passes, violations } = await page.evaluate<AxeResults>('axe.run(document, { resultTypes: ["violations"] })');
-  expect(passes.length).toBeGreaterThan(20);
-  return violations
-    .filter(({ impact }) => impact === 'serious' || impact === 'critical')
-    .flatMap(({ id, nodes }) => nodes.map(({ target, failureSummary }) => `${id}: ${target} ${failureSummary}`));
-};
-
 const ends = [
   [{ ...demoEnd, mark: 'H-1' }, /^HOLDS/],
   [{ ...demoEnd, mark: 'F-1', reaction: 480 }, /^FAILS/],
@@ -163,6 +145,10 @@ describe('the accessibility checker has no serious and no critical finding', () 
         await eventually(() => bench.verdict).toMatch(verdict);
         await bench.rung('Bolt shear').click();
         await bench.ladder.getByRole('button', { expanded: true }).waitFor();
+        await bench.page
+          .getByRole('group', { name: /^Bolt shear/ })
+          .first()
+          .waitFor();
         expect(await findings(bench)).toEqual([]);
       }
     },

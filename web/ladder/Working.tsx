@@ -14,7 +14,8 @@ import { Sign } from './Sign.tsx';
 import { shown, words } from './shown.ts';
 import { markOf } from './standing.ts';
 import { usedUp } from './usedUp.ts';
-import { type WorkingLine, workingLines } from './workingLines.ts';
+import { WorkingLines } from './WorkingLines.tsx';
+import { workingLines } from './workingLines.ts';
 
 export interface WorkingProps {
   readonly check: Check;
@@ -51,7 +52,7 @@ export const Working = ({ check: bare, of = shown.value!, under, labelledBy }: W
           {stateWords[check.state]}: <RichText text={check.reasonText} />
         </p>
       )}
-      <ol class="working-lines">{workingLines(check).map(lineRow)}</ol>
+      <WorkingLines lines={workingLines(check)} />
       <Close check={check} of={of} />
       <Leaning check={check} of={of} />
       {!isFooting(check) && !under && (
@@ -71,36 +72,6 @@ const toPiece = (): void => {
 /** Clause or method, and its standing. */
 const sourceOf = ({ clause, basis }: Check): string =>
   [...new Set([clause && cited(clause), basis])].filter(Boolean).join(', ');
-
-const lineRow = ({ symbol, expression, numbers, value, unit, clause, note, result }: WorkingLine) => {
-  const Value = result ? 'b' : 'span';
-  return (
-    <li>
-      <span class="working-symbol">
-        <RichText text={symbol} manner="formula" />
-      </span>
-      <span class="working-terms">
-        {expression && (
-          <span class="term">
-            {'= '}
-            <RichText text={expression} manner="formula" />{' '}
-          </span>
-        )}
-        <span class="term">
-          {numbers && `= ${numbers} `}
-          {'= '}
-          <Value class="working-value">{unit ? `${value} ${unit}` : value}</Value>
-          {clause && <span class="working-clause"> {clause}</span>}
-        </span>
-        {note && (
-          <span class="working-note">
-            <RichText text={note} />
-          </span>
-        )}
-      </span>
-    </li>
-  );
-};
 
 interface Of {
   readonly check: Check;

@@ -20,7 +20,10 @@ export interface WorkingLine {
   readonly result: boolean;
 }
 
-const lineOf = (row: WorkingRow, check: Check, last: boolean): WorkingLine => {
+/** What the lines of a check are set by. */
+type Worked = Pick<Check, 'working' | 'symbol' | 'clause'>;
+
+const lineOf = (row: WorkingRow, check: Worked, last: boolean): WorkingLine => {
   const result = last || row.symbol === check.symbol;
   const value = significant(row.value, result ? RESULT_FIGURES : STEP_FIGURES);
   return {
@@ -35,8 +38,8 @@ const lineOf = (row: WorkingRow, check: Check, last: boolean): WorkingLine => {
   };
 };
 
-/** The working of a check, line by line. */
-export const workingLines = (check: Check): WorkingLine[] => {
+/** A working, line by line. */
+export const workingLines = (check: Worked): WorkingLine[] => {
   const rows = check.working ?? [];
   return rows.map((row, at) => lineOf(row, check, at === rows.length - 1));
 };

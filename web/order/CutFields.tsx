@@ -1,6 +1,7 @@
 import { Field } from '../field/Field.tsx';
 import { Switch } from '../field/Switch.tsx';
 import { entry, words } from '../state/bench.ts';
+import { copes } from '../state/copes.ts';
 import { textOf } from '../state/entry.ts';
 
 const Cope = ({ edge }: { readonly edge: 'top' | 'bottom' }) => {
@@ -20,10 +21,16 @@ const Cope = ({ edge }: { readonly edge: 'top' | 'bottom' }) => {
   );
 };
 
+const Proposed = () => {
+  const parts = copes.value;
+  return parts && <parts.CopeProposal />;
+};
+
 export const CutFields = () => (
   <>
     <Cope edge="top" />
     <Cope edge="bottom" />
     <Field path="setback" label="Setback" />
+    <Proposed />
   </>
 );

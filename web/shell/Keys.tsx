@@ -1,6 +1,7 @@
 import type { TargetedEvent } from 'preact';
 import { Dialog } from './Dialog.tsx';
-import { keysShown, setSingleKeys, singleKeys } from './keys.ts';
+import { keysShown } from './keys.ts';
+import { setSingleKeys, singleKeys } from './singleKeys.ts';
 
 const inFields = [
   ['Enter', 'next field; Shift + Enter: the one before'],
@@ -13,6 +14,7 @@ const inFields = [
 const single = [
   ['/', 'go to a field by its name'],
   ['1 to 7', 'open a line of the order: beam, cut, bolts, joint, load, standard, sheet'],
+  ['C', 'take the cut that is proposed from the support'],
   ['?', 'this list'],
 ] as const;
 

@@ -1,35 +1,15 @@
 import { signal } from '@preact/signals';
 import { turnTo } from '../order/goTo.ts';
 import { carried } from '../state/carried.ts';
+import { copes } from '../state/copes.ts';
 import { redo, undo } from '../state/edits.ts';
 import { lineNames } from '../state/tradeOrder.ts';
+import { singleKeys } from './singleKeys.ts';
 
 /** The list of keys is open. */
 export const keysShown = signal(false);
 /** The search for a field is open. */
 export const finderShown = signal(false);
-
-const PLACE = 'copewright.keys';
-
-const keptSwitch = (): boolean => {
-  try {
-    return localStorage.getItem(PLACE) !== 'off';
-  } catch {
-    return true;
-  }
-};
-
-/** Keys of a single letter work while no field has focus; people who dictate may switch them off. */
-export const singleKeys = signal(keptSwitch());
-
-export const setSingleKeys = (on: boolean): void => {
-  singleKeys.value = on;
-  try {
-    localStorage.setItem(PLACE, on ? 'on' : 'off');
-  } catch {
-    // Without storage the choice holds for this visit.
-  }
-};
 
 const withControl: Readonly<Record<string, () => void>> = {
   z: undo,
@@ -48,6 +28,7 @@ const single = (key: string): (() => void) | undefined => {
       keysShown.value = true;
     };
   }
+  if (key === 'c') return () => copes.value?.takeProposal();
   const line = /^[1-9]$/.test(key) ? lineNames[Number(key) - 1] : undefined;
   if (!line) return undefined;
   return () => turnTo(line);

@@ -1,0 +1,2 @@
+export { CopeProposal } from './CopeProposal.tsx';
+export { takeProposal } from './takeProposal.ts';

@@ -59,6 +59,8 @@ describe('the first view of the bench', () => {
       'core/steel/findSection.ts',
       'core/steel/sections/aiscW.ts',
       'core/check/besideOf.ts',
+      'core/advice/copeFromSupport.ts',
+      'core/card/cardOf.ts',
       'web/state/proposals.ts',
       'web/order/lineFields.ts',
     ];

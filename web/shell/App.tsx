@@ -3,6 +3,7 @@ import { page } from './address.ts';
 import { Bench } from './Bench.tsx';
 
 const standardsPage = later(async () => (await import('../standards/StandardsPage.tsx')).StandardsPage);
+const cardPage = later(async () => (await import('../card/CardPage.tsx')).CardPage);
 const proofPage = later(async () => (await import('../proof/ProofPage.tsx')).ProofPage);
 
 const coming = <p role="status">The page is on its way.</p>;
@@ -11,9 +12,9 @@ const coming = <p role="status">The page is on its way.</p>;
 export const App = () => {
   const open = page.value;
   if (open === 'bench') return <Bench />;
-  if (open === 'proof') {
-    const Proof = proofPage.value;
-    return Proof ? <Proof /> : coming;
+  if (typeof open === 'string') {
+    const Page = (open === 'card' ? cardPage : proofPage).value;
+    return Page ? <Page /> : coming;
   }
   const Standards = standardsPage.value;
   return Standards ? <Standards id={open.standard} rule={open.rule} /> : coming;

@@ -7,8 +7,8 @@ import { newVersion, otherTab } from '../state/network.ts';
 import { notice } from '../state/notice.ts';
 import { Stress } from '../stress/index.ts';
 import { Announcer } from './Announcer.tsx';
-import { DropPlace } from './DropPlace.tsx';
 import { Foot } from './Foot.tsx';
+import { fileOver } from './fileOver.ts';
 import { Head } from './Head.tsx';
 import { finderShown, keysShown } from './keys.ts';
 import { TopBand } from './TopBand.tsx';
@@ -16,7 +16,7 @@ import { TopBand } from './TopBand.tsx';
 const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
 
 const OpenDialogs = () => {
-  const Dialogs = (keysShown.value || finderShown.value || confirmShown.value) && dialogs.value;
+  const Dialogs = (keysShown.value || finderShown.value || confirmShown.value || fileOver.value) && dialogs.value;
   return Dialogs && <Dialogs />;
 };
 
@@ -53,6 +53,5 @@ export const Bench = () => (
     <VerdictStrip />
     <Announcer />
     <OpenDialogs />
-    <DropPlace />
   </>
 );

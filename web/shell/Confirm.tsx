@@ -2,6 +2,7 @@ import type { TargetedMouseEvent } from 'preact';
 import { goTo } from '../order/goTo.ts';
 import { assumedValues } from '../state/assumedValues.ts';
 import { confirmAll, confirmShown } from '../state/confirming.ts';
+import { page } from './address.ts';
 import { Dialog } from './Dialog.tsx';
 
 const onConfirm = (event: TargetedMouseEvent<HTMLButtonElement>): void => {
@@ -11,6 +12,7 @@ const onConfirm = (event: TargetedMouseEvent<HTMLButtonElement>): void => {
 
 const onField = (path: string): void => {
   confirmShown.value = false;
+  if (page.value !== 'bench') location.hash = '#bench';
   goTo(path);
 };
 

@@ -1,6 +1,6 @@
 import { entry } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
-import { PROOF, page, standardAddress } from './address.ts';
+import { CARD, PROOF, page, standardAddress } from './address.ts';
 
 const current = (is: boolean): 'page' | undefined => (is ? 'page' : undefined);
 
@@ -12,6 +12,9 @@ export const Pages = () => {
     <nav aria-label="Pages">
       <a href="#bench" aria-current={current(open === 'bench')}>
         Bench
+      </a>
+      <a href={CARD} aria-current={current(open === 'card')}>
+        Card
       </a>
       <a href={standardAddress(standard)} aria-current={current(typeof open === 'object')}>
         Standards

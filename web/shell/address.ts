@@ -1,11 +1,12 @@
 import { signal } from '@preact/signals';
 
-/** What is shown: the bench, a standard in full (at one of its checks where `rule` names it), or the proof. */
-type Page = 'bench' | 'proof' | { readonly standard: string; readonly rule: string };
+/** What is shown: the bench, its shop card, a standard in full (at one of its checks where `rule` names it), or the proof. */
+type Page = 'bench' | 'card' | 'proof' | { readonly standard: string; readonly rule: string };
 
 export const page = signal<Page>('bench');
 
 const STANDARD = '#standard=';
+export const CARD = '#card';
 export const PROOF = '#proof';
 
 /** Address of a standard's page, or of one of its checks. */
@@ -21,6 +22,7 @@ const unescaped = (text: string): string => {
 };
 
 const pageAt = (hash: string): Page => {
+  if (hash === CARD) return 'card';
   if (hash === PROOF) return 'proof';
   if (!hash.startsWith(STANDARD)) return 'bench';
   const [standard = '', rule = ''] = hash.slice(STANDARD.length).split('/').map(unescaped);

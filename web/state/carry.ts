@@ -1,3 +1,4 @@
+import type { MadeCard } from '../../core/card/card.ts';
 import { complete } from '../../core/check/complete.ts';
 import type { Examined } from '../../core/check/examined.ts';
 import { assumedValues } from './assumedValues.ts';
@@ -82,6 +83,20 @@ export const issueSheet = (): void => {
   const examined = whole('The sheet', { working: true });
   if (examined) onceConfirmed(() => void writeSheet(examined));
 };
+
+const writeCard = async (made: MadeCard): Promise<void> => {
+  try {
+    const { cardPdf } = await import('../../core/sheet/card/card.ts');
+    const name = `shop-card-${made.card.fingerprint}.pdf`;
+    hand(new Uint8Array(await cardPdf(made)), 'application/pdf', name);
+    tell(`Shop card written as ${name}`);
+  } catch (error) {
+    refuse('The shop card could not be written', [error instanceof Error ? error.message : String(error)]);
+  }
+};
+
+/** Writes a shop card as a PDF, once what the bench put into its template is confirmed. */
+export const issueCard = (made: MadeCard): void => onceConfirmed(() => void writeCard(made));
 
 /** Puts what was opened on the bench, as one step that can be undone; or says why it could not be opened and leaves the bench as it is. */
 const take = (opened: Opened, from: string): void => {

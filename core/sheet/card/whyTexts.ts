@@ -8,12 +8,14 @@ const whysOf = ({ sections }: Card, verdict: 'refer' | 'fails'): Why[] =>
     cells.flatMap((one) => (one.verdict !== 'holds' && one.verdict === verdict ? one.because : [])),
   );
 
+type Told = Pick<CardContext, 'made' | 'words'>;
+
 /** A fault in words that hold for every cell. */
-const faultText = ({ words }: CardContext, code: string): string =>
+const faultText = ({ words }: Told, code: string): string =>
   code === 'cope-too-deep' ? say.tooDeep(words.cope) : (say.faults[code] ?? say.otherFault);
 
 /** Why cells have no number: each reason once, with the checks that give it. */
-export const whyTexts = (context: CardContext, verdict: 'refer' | 'fails'): string[] => {
+export const whyTexts = (context: Told, verdict: 'refer' | 'fails'): string[] => {
   const titles = new Map<string, Set<string>>();
   for (const { code, title, text } of whysOf(context.made.card, verdict)) {
     const reason = title ? lower(text.replace(/\.$/, '')) : faultText(context, code);

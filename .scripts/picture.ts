@@ -9,8 +9,8 @@ import { startBench } from '../tests/browser/startBench.ts';
 
 const pictures = new URL('../.pictures/', import.meta.url);
 /** A README is read over slow lines too, bytes. */
-const MOST = 300_000;
-const RESOLUTION = '88';
+const MOST = 330_000;
+const RESOLUTION = '96';
 /** A window that shows the piece and the whole ladder with a working open, px. */
 const WINDOW = { width: 1440, height: 1040 };
 

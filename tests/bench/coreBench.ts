@@ -7,10 +7,10 @@ import type { Facts } from '../../core/end/facts.ts';
 import { coefficientOf, instantaneousCentre } from '../../core/end/instantaneousCentre.ts';
 import { readEnd } from '../../core/end/readEnd.ts';
 import type { End } from '../../core/end/schema.ts';
-import { newRun, numberOf } from '../../core/formula/number.ts';
+import { newRun, numberOf, testOf } from '../../core/formula/number.ts';
 import type { Tree } from '../../core/formula/tree.ts';
 import type { Standard } from '../../core/standards/standard.ts';
-import { isNoRule, treesOf } from '../../core/standards/standard.ts';
+import { isNoRule, treesOf, type Way } from '../../core/standards/standard.ts';
 import { goodEnds } from '../support/published.ts';
 import { sheetRow } from '../support/spreadsheet.ts';
 import { underStandard } from '../support/underStandard.ts';
@@ -47,15 +47,18 @@ const turning = <T>(list: readonly T[]): (() => T) => {
   };
 };
 
-/** Every formula of a standard's strength checks, and facts to put into them. */
-const formulasOf = (standard: Standard, ends: readonly End[]): { trees: Tree[]; facts: Facts[] } => ({
-  trees: Object.values(standard.strength).flatMap((rule) => (isNoRule(rule) ? [] : rule.ways.flatMap(treesOf))),
-  facts: ends.slice(0, 200).map((end) => {
+/** Every formula of the strength checks that apply to a schedule, and facts to put into them. */
+const formulasOf = (standard: Standard, ends: readonly End[]): { trees: Tree[]; facts: Facts[] } => {
+  const facts = ends.slice(0, 200).map((end) => {
     const found = resolve(end, standard);
     if ('faults' in found) throw new Error('an end of the schedule is refused');
     return found.resolved.facts;
-  }),
-});
+  });
+  // The ends of a schedule differ in sizes alone, so that what applies to the first applies to all.
+  const applies = ({ off = [] }: Way): boolean => !off.some(({ when }) => testOf(when)(facts[0] as never));
+  const ways = Object.values(standard.strength).flatMap((rule) => (isNoRule(rule) ? [] : rule.ways));
+  return { trees: ways.filter(applies).flatMap(treesOf), facts };
+};
 
 /** All these formulas worked out once, as closures. */
 const reading = ({ trees, facts }: ReturnType<typeof formulasOf>): (() => number) => {

@@ -20,7 +20,7 @@ describe('the order of the checks', () => {
   });
 });
 
-describe('states of the rules file', () => {
+describe('states of checks', () => {
   const five = ['web-block', 'web-net-shear', 'cope-shear', 'cope-bending', 'cope-buckling'];
 
   test('a cope shallower than the flange refers five checks, each with its number, and the cope depth', () => {

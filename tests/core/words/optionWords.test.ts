@@ -15,7 +15,7 @@ describe('options in words', () => {
     },
   );
 
-  test('a value of the rules file never reaches people as a word of the program', () => {
+  test('the name of a value never reaches people in place of its words', () => {
     expect(optionName('web-block')).toBe('Block tearing, web');
     expect(optionValue('report')).toBe('for information');
     expect(optionValue('verdict')).toBe('counts in the verdict');

@@ -44,7 +44,7 @@ export const cardSchema = z
     words: reportSchema.shape.words,
     options: optionsSchema,
     version: z.string(),
-    joint: z.enum(['fin-plate', 'web-bolts']),
+    joint: z.enum(['fin-plate', 'web-bolts', 'double-cleat', 'single-cleat', 'end-plate', 'full-end-plate']),
     rows: z.array(z.int()).meta(said('Counts of bolt rows, one for each cell of a section')),
     plateDepths: z.array(number).meta(said('Depth of plate or ply with each count of rows')),
     sections: z.array(

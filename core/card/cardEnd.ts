@@ -1,3 +1,4 @@
+import { fittingSizes } from '../end/fittingSizes.ts';
 import type { End } from '../end/schema.ts';
 
 /** What of the end of one cell is not the template's. */
@@ -7,8 +8,31 @@ export interface Place {
   readonly reaction: number;
 }
 
-const isObject = (value: unknown): value is Readonly<Record<string, unknown>> =>
+type Some = Readonly<Record<string, unknown>>;
+
+const isObject = (value: unknown): value is Some =>
   typeof value === 'object' && value !== null && !Array.isArray(value);
+
+/** A plate or cleat of a depth of its own grows by a pitch with every row; its edges are kept. */
+const grown = (fitting: unknown, bolts: unknown, rows: number): unknown => {
+  if (!isObject(fitting) || !isObject(bolts) || typeof fitting.depth !== 'number') return fitting;
+  const { rows: were, pitch = 0 } = bolts;
+  if (typeof were !== 'number' || typeof pitch !== 'number') return fitting;
+  return { ...fitting, depth: Number((fitting.depth + (rows - were) * pitch).toPrecision(9)) };
+};
+
+/** The joint with so many bolt rows, in web and support alike. */
+const withRows = (joint: unknown, rows: number): unknown => {
+  if (!isObject(joint)) return joint;
+  const { bolts, supportBolts, plate, cleat } = joint;
+  return {
+    ...joint,
+    ...(isObject(bolts) && { bolts: { ...bolts, rows } }),
+    ...(isObject(supportBolts) && { supportBolts: { ...supportBolts, rows } }),
+    ...(plate !== undefined && { plate: grown(plate, supportBolts, rows) }),
+    ...(cleat !== undefined && { cleat: grown(cleat, supportBolts, rows) }),
+  };
+};
 
 /** The template with what it would not say itself; anything may be given, and what is no object stays as it is. */
 export const cardEnd = (template: unknown, { section, rows, reaction }: Place): unknown => {
@@ -18,13 +42,12 @@ export const cardEnd = (template: unknown, { section, rows, reaction }: Place): 
     ...template,
     reaction,
     beam: isObject(beam) ? { ...beam, section } : beam,
-    joint: isObject(joint) && isObject(joint.bolts) ? { ...joint, bolts: { ...joint.bolts, rows } } : joint,
+    joint: withRows(joint, rows),
   };
 };
 
-/** Depth of the plate or ply with so many rows: first row, pitch and edges are kept. In the template's unit. */
-export const plateDepth = (
-  { topEdge, bottomEdge }: { topEdge: number; bottomEdge: number },
-  { joint }: End,
-  rows: number,
-): number => Number((topEdge + (rows - 1) * (joint.bolts.pitch ?? 0) + bottomEdge).toPrecision(9));
+/** Depth of the plate, ply or cleat with so many rows: first row, pitch and edges are kept. In the template's unit. */
+export const plateDepth = (end: End, rows: number): number => {
+  const grown = cardEnd(end, { section: '', rows, reaction: 0 }) as End;
+  return Number(fittingSizes(grown, 1).hp.toPrecision(9));
+};

@@ -3,13 +3,12 @@ import { fingerprintOf } from '../check/fingerprint.ts';
 import type { Check, Note, SaidFault } from '../check/report.ts';
 import { fitNames, strengthNames } from '../end/checkNames.ts';
 import { type Fault, fault } from '../end/fault.ts';
-import { plyOf } from '../end/schema.ts';
 import { cardFaultSentences } from '../words/cardFaults.ts';
 import { commonwealth } from '../words/commonwealth.ts';
 import { faultText } from '../words/words.ts';
 import { wordsFor } from '../words/wordsFor.ts';
 import type { Card, CardCheck, CardRow, MadeCard, Why } from './card.ts';
-import { plateDepth } from './cardEnd.ts';
+import { cardEnd, plateDepth } from './cardEnd.ts';
 import { cellOf, type Looked } from './cellOf.ts';
 import { letters } from './letters.ts';
 import { type Asked, readCard } from './readCard.ts';
@@ -83,7 +82,7 @@ const made = (asked: Asked, table: readonly (readonly Looked[])[], all: readonly
     version,
     joint: end.joint.kind,
     rows,
-    plateDepths: rows.map((one) => plateDepth(plyOf(end.joint), end, one)),
+    plateDepths: rows.map((one) => plateDepth(end, one)),
     sections,
     checks: checksOf({ words, sections }, standings),
     fit: fitOf(standings, words),
@@ -95,12 +94,8 @@ const made = (asked: Asked, table: readonly (readonly Looked[])[], all: readonly
 };
 
 /** The template without what it does not say of the card. */
-const bare = ({ beam, joint, ...end }: MadeCard['end']): MadeCard['end'] => ({
-  ...end,
-  reaction: 0,
-  beam: { ...beam, section: '' },
-  joint: { ...joint, bolts: { ...joint.bolts, rows: 0 } } as MadeCard['end']['joint'],
-});
+const bare = (end: MadeCard['end']): MadeCard['end'] =>
+  cardEnd(end, { section: '', rows: 0, reaction: 0 }) as MadeCard['end'];
 
 /** The reasons that most cells give, each once. */
 const reasonsOf = (looked: readonly Looked[]): string[] => {

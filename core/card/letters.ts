@@ -1,8 +1,8 @@
 import type { StrengthName } from '../end/checkNames.ts';
 
 /**
- * The letter of each check, the same on every card: A to L the beam, M the bolts, N to U the plate, W the weld, X the support. I and O are
- * left out, since they read as figures; V is the reaction.
+ * The letter of each check, the same on every card: A to L the beam, M the bolts, N to U the plate or cleat, W the weld, X to Z the support.
+ * I and O are left out, since they read as figures; V is the reaction.
  */
 export const letters: Readonly<Record<StrengthName, string>> = {
   'web-gross-shear': 'A',
@@ -24,6 +24,22 @@ export const letters: Readonly<Record<StrengthName, string>> = {
   'plate-bearing': 'S',
   'plate-bending': 'T',
   'plate-buckling': 'U',
+  'cleat-gross-shear': 'N',
+  'cleat-net-shear': 'P',
+  'cleat-block': 'Q',
+  'cleat-tearout': 'R',
+  'cleat-bearing': 'S',
+  'cleat-bending': 'T',
+  'cleat-buckling': 'U',
+  'endplate-gross-shear': 'N',
+  'endplate-net-shear': 'P',
+  'endplate-block': 'Q',
+  'endplate-tearout': 'R',
+  'endplate-bearing': 'S',
+  'endplate-web-shear': 'T',
   weld: 'W',
+  'weld-web': 'W',
   'support-shear': 'X',
+  'support-bolt-shear': 'Y',
+  'support-bearing': 'Z',
 };

@@ -61,6 +61,7 @@ const besideUnder = (
     plate: { fy: facts.fyp, fu: facts.fup },
     support: { fy: facts.fys, fu: facts.fus },
     fub: facts.fub,
+    fubs: facts.supportBolts.fub,
   });
   const words = wordsFor(regionOf(end, standard));
   if ('faults' in found) return said(found.faults, words).faults;

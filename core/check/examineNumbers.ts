@@ -1,7 +1,8 @@
 import type { Facts } from '../end/facts.ts';
 import { type Fault, fault } from '../end/fault.ts';
+import { fittingOf, supportBoltsOf, webBoltsOf } from '../end/jointParts.ts';
 import { readEnd } from '../end/readEnd.ts';
-import { type End, plyOf } from '../end/schema.ts';
+import type { End } from '../end/schema.ts';
 import { testOf } from '../formula/number.ts';
 import { standards } from '../standards/known.ts';
 import { listed } from '../standards/listed.ts';
@@ -53,7 +54,7 @@ const gradeNotes = (end: End, { materials }: Standard): { readonly code: string;
   const add = (code: string, name: string) => found.set(`${code} ${name}`, { code, name });
   for (const [grade, steels] of [
     [end.beam.grade, materials.sections],
-    [plyOf(end.joint).grade, materials.plates],
+    [fittingOf(end.joint).grade, 'cleat' in end.joint ? (materials.cleats ?? materials.plates) : materials.plates],
   ] as const) {
     const name = typeof grade === 'string' ? steels.named(grade) : undefined;
     if (name === undefined) continue;
@@ -83,13 +84,14 @@ const notesOf = (
   if (V.used > V.given) say('least-reaction', { given: force(V.given), value: force(V.used) }, 'reaction');
   if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
   if (end.support) say('support-outline', {}, 'support');
-  const plyPath = end.joint.kind === 'fin-plate' ? 'joint.plate.grade' : 'joint.ply.grade';
+  const fitting = fittingOf(end.joint);
   for (const [path, grade] of [
     ['beam.grade', end.beam.grade],
-    [plyPath, plyOf(end.joint).grade],
-    ['joint.bolts.grade', end.joint.bolts.grade],
+    [`${fitting.path}.grade`, fitting.grade],
+    ['joint.bolts.grade', webBoltsOf(end.joint)?.bolts.grade],
+    ['joint.supportBolts.grade', supportBoltsOf(end.joint)?.grade],
   ] as const) {
-    if (typeof grade !== 'string') say('strength-given', { field: capital(fieldName(words, path)) }, path);
+    if (typeof grade === 'object') say('strength-given', { field: capital(fieldName(words, path)) }, path);
   }
   for (const { code, name } of gradeNotes(end, plan.standard)) say(code, { value: name });
   for (const { code, when } of plan.standard.notes) if (testOf(when)(resolved.facts as never)) say(code);

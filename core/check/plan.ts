@@ -83,10 +83,10 @@ const limitPlan = (limit: Limit): LimitPlan => ({
   noNumber: limit.noNumber ?? false,
 });
 
-const wayPlan = (way: Way): WayPlan => ({
+const wayPlan = (way: Way, off: Gate | undefined): WayPlan => ({
   demand: numberOf(way.demand),
   load: way.load,
-  off: (way.off ?? []).map(gatePlan),
+  off: [...(off ? [off] : []), ...(way.off ?? [])].map(gatePlan),
   limits: (way.limits ?? []).map(limitPlan),
   ...(way.resistance && { resistance: numberOf(way.resistance) }),
   ...(way.whereFirst && { whereFirst: gatePlan(way.whereFirst) }),
@@ -95,11 +95,11 @@ const wayPlan = (way: Way): WayPlan => ({
   ...(way.informs && { informs: testOf(way.informs) }),
 });
 
-const fitPartPlan = (part: FitPart, breach: 'fails' | 'refer'): FitPartPlan => ({
+const fitPartPlan = (part: FitPart, breach: 'fails' | 'refer', off: Gate | undefined): FitPartPlan => ({
   given: numberOf(part.given),
   ...(part.least && { least: numberOf(part.least) }),
   ...(part.most && { most: numberOf(part.most) }),
-  off: (part.off ?? []).map(gatePlan),
+  off: [...(off ? [off] : []), ...(part.off ?? [])].map(gatePlan),
   breach: part.breach ?? breach,
   ...(part.clash && { clash: testOf(part.clash) }),
 });
@@ -132,21 +132,27 @@ export const planOf = (standard: Standard, kind: Joint['kind']): Plan => {
   if (!marked.has(standard.id)) markSharedIn(standard);
   marked.add(standard.id);
   const list = joints[kind];
-  const strength = list.strength.map(([id, part]) => {
+  const strength = list.strength.map(([id, part, off]) => {
     const rule = standard.strength[id];
-    return { id, part, rule, noRule: reasonOf(rule), ways: isNoRule(rule) ? [] : rule.ways.map(wayPlan) };
+    return {
+      id,
+      part,
+      rule,
+      noRule: reasonOf(rule),
+      ways: isNoRule(rule) ? [] : rule.ways.map((way) => wayPlan(way, off)),
+    };
   });
   const plan: Plan = {
     standard,
     strength,
-    fit: list.fit.map(([id, part]) => {
+    fit: list.fit.map(([id, part, off]) => {
       const rule = standard.fit[id];
       return {
         id,
         part,
         rule,
         noRule: reasonOf(rule),
-        parts: isNoRule(rule) ? [] : rule.parts.map((part) => fitPartPlan(part, rule.breach)),
+        parts: isNoRule(rule) ? [] : rule.parts.map((part) => fitPartPlan(part, rule.breach, off)),
       };
     }),
     atReaction: strength.some(({ ways }) => ways.some(({ failsAt }) => failsAt)),

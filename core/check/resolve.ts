@@ -1,16 +1,11 @@
 import type { Facts } from '../end/facts.ts';
-import {
-  type BoltFacts,
-  factsOf,
-  lengthSize,
-  noSupport,
-  noSupportGiven,
-  type Strengths,
-  type SupportGiven,
-} from '../end/factsOf.ts';
+import { factsOf, lengthSize, noSupport, noSupportGiven, type Strengths, type SupportGiven } from '../end/factsOf.ts';
 import { type Fault, fault } from '../end/fault.ts';
-import { copeFaults, holeFaults, patternFaults, sectionFaults } from '../end/geometryFaults.ts';
-import { type End, type GradeGiven, plyOf } from '../end/schema.ts';
+import { copeFaults, patternFaults, sectionFaults } from '../end/geometryFaults.ts';
+import { fittingFaults, holeFaults } from '../end/holeFaults.ts';
+import { fittingOf, supportBoltsOf, webBoltsOf, weldOf } from '../end/jointParts.ts';
+import type { End, GradeGiven, SupportBolts, WebBolts } from '../end/schema.ts';
+import type { SupportBoltGiven } from '../end/supportBoltFacts.ts';
 import type { Section } from '../shape/section.ts';
 import type { BoltSteel, Steel, Steels } from '../standards/materials.ts';
 import type { Standard } from '../standards/standard.ts';
@@ -36,6 +31,8 @@ export interface Carried {
   readonly plate: Steel;
   readonly support: Steel;
   readonly fub: number;
+  /** Of the bolts into the support; 0 where there are none. */
+  readonly fubs: number;
 }
 
 const noSteel: Steel = { fy: 0, fu: 0 };
@@ -46,7 +43,7 @@ const withTensile = ({ fub, shear, listed }: BoltSteel, carried: number): BoltSt
   return { fub: carried, listed, ...(shear && { shear: { in: shear.in * scale, out: shear.out * scale } }) };
 };
 
-const noBolt: BoltFacts = {
+const noBolt: SupportBoltGiven = {
   d: 0,
   d0: 0,
   dStandard: 0,
@@ -56,6 +53,7 @@ const noBolt: BoltFacts = {
   boltListed: false,
   inch: false,
   As: 0,
+  threadsIn: true,
 };
 
 /** Looks up names and collects what is wrong with them. */
@@ -121,12 +119,13 @@ class Resolver {
     return name === undefined ? web.fy : (sections.strengthAt(name, tf)?.fy ?? web.fy);
   }
 
-  bolt(own?: number): BoltFacts {
-    const { bolts } = this.end.joint;
+  /** Bolts of one kind: through the web, or into the support; `own`: a tensile strength carried over, MPa. */
+  bolt(bolts: WebBolts | SupportBolts | undefined, path: string, own?: number): SupportBoltGiven {
+    if (!bolts) return noBolt;
     const { materials } = this.standard;
     const found = findBoltSize(bolts.size);
     if ('nearest' in found) {
-      this.faults.push(fault('unknown-bolt-size', 'joint.bolts.size', bolts.size, found.nearest));
+      this.faults.push(fault('unknown-bolt-size', `${path}.size`, bolts.size, found.nearest));
       return noBolt;
     }
     const d = found.diameter;
@@ -134,16 +133,22 @@ class Resolver {
     const d0 = bolts.hole === undefined ? dStandard : bolts.hole * lengthSize(this.end);
     if (d0 < d) {
       const limit = { least: Number((d / lengthSize(this.end)).toPrecision(8)) };
-      this.faults.push(fault('hole-smaller-than-bolt', 'joint.bolts.hole', bolts.hole, limit));
+      this.faults.push(fault('hole-smaller-than-bolt', `${path}.hole`, bolts.hole, limit));
     }
     const dn = materials.netHole(d0, bolts.holes ?? materials.holesAssumed, d);
-    const { fub, shear, listed } = this.boltSteel(own, d);
-    const fnv = shear ? (bolts.threads === 'out' ? shear.out : shear.in) : 0;
-    return { d, d0, dStandard, dn, fub, fnv, boltListed: listed, inch: found.thread === 'inch', As: found.tensileArea };
+    const { fub, shear, listed } = this.boltSteel(bolts, path, own, d);
+    const threadsIn = bolts.threads !== 'out';
+    const fnv = shear ? (threadsIn ? shear.in : shear.out) : 0;
+    const { thread, tensileArea } = found;
+    return { d, d0, dStandard, dn, fub, fnv, boltListed: listed, inch: thread === 'inch', As: tensileArea, threadsIn };
   }
 
-  private boltSteel(own: number | undefined, d: number): BoltSteel {
-    const { grade } = this.end.joint.bolts;
+  private boltSteel(
+    { grade, size }: WebBolts | SupportBolts,
+    path: string,
+    own: number | undefined,
+    d: number,
+  ): BoltSteel {
     const { boltGrades, bolt } = this.standard.materials;
     const name = typeof grade === 'string' ? boltGrades.find((one) => one === grade.trim()) : undefined;
     const strength = own ?? (typeof grade === 'string' ? undefined : fromSystem(grade.fu, '-2,1', this.end.units));
@@ -151,13 +156,12 @@ class Resolver {
       const listed = name === undefined ? undefined : bolt(name, d);
       return listed ? withTensile(listed, strength) : (bolt(strength, d) ?? noBoltSteel);
     }
-    const path = 'joint.bolts.grade';
     if (name === undefined) {
-      this.faults.push(fault('unknown-bolt-grade', path, grade, boltGrades));
+      this.faults.push(fault('unknown-bolt-grade', `${path}.grade`, grade, boltGrades));
       return noBoltSteel;
     }
     const found = bolt(name, d);
-    if (found === undefined) this.faults.push(fault('bolt-grade-not-for-size', path, grade, this.end.joint.bolts.size));
+    if (found === undefined) this.faults.push(fault('bolt-grade-not-for-size', `${path}.grade`, grade, size));
     return found ?? noBoltSteel;
   }
 
@@ -223,23 +227,26 @@ export const resolve = (
 ): { readonly resolved: Resolved } | { readonly faults: Fault[] } => {
   const resolver = new Resolver(end, standard);
   const { joint, units } = end;
-  const { sections, plates, webStrengthAt, electrode } = standard.materials;
-  const ply = plyOf(joint);
-  const plyPath = `joint.${joint.kind === 'fin-plate' ? 'plate' : 'ply'}.grade`;
+  const { sections, plates, cleats, webStrengthAt, electrode } = standard.materials;
+  const fitting = fittingOf(joint);
+  const steels = 'cleat' in joint ? (cleats ?? plates) : plates;
   if (!carried) resolver.level();
   const beam = resolver.section();
   const web =
     carried?.web ??
     (beam ? resolver.strength(end.beam.grade, sections, webStrengthAt(beam.section), 'beam.grade') : noSteel);
-  const plate = carried?.plate ?? resolver.strength(ply.grade, plates, ply.thickness * lengthSize(end), plyPath);
-  const bolt = resolver.bolt(carried?.fub);
+  const plate =
+    carried?.plate ??
+    resolver.strength(fitting.grade, steels, fitting.thickness * lengthSize(end), `${fitting.path}.grade`);
+  const { threadsIn: _, ...bolt } = resolver.bolt(webBoltsOf(joint)?.bolts, 'joint.bolts', carried?.fub);
+  const supportBolt = resolver.bolt(supportBoltsOf(joint), 'joint.supportBolts', carried?.fubs);
   const options = resolver.options(carried ? {} : end.options);
   const support = resolver.support(carried);
   const { faults } = resolver;
-  if (bolt.d0 > 0) faults.push(...patternFaults(end, bolt.d0));
+  faults.push(...patternFaults(end, { web: bolt.d0, support: supportBolt.d0 }));
   if (beam) faults.push(...copeFaults(end, beam.section));
   if (!beam || faults.length > 0) return { faults };
-  const metal = joint.kind === 'fin-plate' ? joint.weld.electrode : undefined;
+  const metal = weldOf(joint)?.electrode;
   const strengths: Strengths = {
     fy: web.fy,
     fu: web.fu,
@@ -247,10 +254,11 @@ export const resolve = (
     fyp: plate.fy,
     fup: plate.fu,
     ...bolt,
+    supportBolt,
     Xu: metal === undefined ? electrode : fromSystem(metal, '-2,1', units),
   };
   const facts = factsOf(end, beam.section, strengths, support, options);
-  const holes = holeFaults(end, facts);
-  if (holes.length > 0) return { faults: holes };
+  const outside = [...holeFaults(end, facts), ...fittingFaults(end, facts)];
+  if (outside.length > 0) return { faults: outside };
   return { resolved: { section: beam.section, designation: beam.designation, readAs: beam.readAs, facts } };
 };

@@ -14,6 +14,8 @@ import { webTie } from './paths/tie.ts';
 import { weld } from './paths/weld.ts';
 import type { DrawingWords } from './words.ts';
 
+const noPath: PathMaker = () => null;
+
 const makers: Readonly<Record<StrengthName, PathMaker>> = {
   'web-gross-shear': webGrossShear,
   'cope-shear': copeShear,
@@ -35,6 +37,22 @@ const makers: Readonly<Record<StrengthName, PathMaker>> = {
   'plate-bending': plateBending,
   'plate-buckling': plateBuckling,
   weld,
+  'cleat-bearing': plateBearing,
+  'cleat-tearout': plateTearout,
+  'cleat-gross-shear': plateGrossShear,
+  'cleat-net-shear': plateNetShear,
+  'cleat-block': plateBlock,
+  'cleat-bending': plateBending,
+  'cleat-buckling': plateBuckling,
+  'endplate-bearing': noPath,
+  'endplate-tearout': noPath,
+  'endplate-gross-shear': noPath,
+  'endplate-net-shear': noPath,
+  'endplate-block': noPath,
+  'endplate-web-shear': noPath,
+  'weld-web': noPath,
+  'support-bolt-shear': noPath,
+  'support-bearing': noPath,
   'support-shear': supportShear,
 };
 

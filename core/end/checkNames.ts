@@ -20,6 +20,22 @@ export const strengthNames = [
   'plate-bending',
   'plate-buckling',
   'weld',
+  'cleat-bearing',
+  'cleat-tearout',
+  'cleat-gross-shear',
+  'cleat-net-shear',
+  'cleat-block',
+  'cleat-bending',
+  'cleat-buckling',
+  'endplate-bearing',
+  'endplate-tearout',
+  'endplate-gross-shear',
+  'endplate-net-shear',
+  'endplate-block',
+  'endplate-web-shear',
+  'weld-web',
+  'support-bolt-shear',
+  'support-bearing',
   'support-shear',
 ] as const;
 
@@ -44,5 +60,5 @@ export type StrengthName = (typeof strengthNames)[number];
 export type FitName = (typeof fitNames)[number];
 export type CheckName = StrengthName | FitName;
 /** What a check speaks of. */
-export const partNames = ['web', 'bolts', 'plate', 'weld', 'support', 'end'] as const;
+export const partNames = ['web', 'bolts', 'plate', 'cleat', 'weld', 'support-bolts', 'support', 'end'] as const;
 export type PartName = (typeof partNames)[number];

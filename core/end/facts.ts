@@ -1,5 +1,6 @@
 import type { Section } from '../shape/section.ts';
 import type { Shape } from '../shape/shape.ts';
+import type { Joint } from './schema.ts';
 
 /** The section that remains behind a cope, as seen at the face of that cope. N and mm. */
 export interface CutFacts {
@@ -36,6 +37,34 @@ export interface SupportFacts {
   readonly topOfSteel: number;
 }
 
+/** Bolts that hold a cleat's support leg, or an end plate, to the support. mm, MPa; `n` is 0 where there are none. */
+export interface SupportBoltFacts {
+  /** Rows, and lines: two with an end plate or a pair of cleats, one with one cleat. */
+  readonly n: number;
+  readonly lines: number;
+  readonly p: number;
+  /** Cross centres: between the lines on either side of the web. */
+  readonly cc: number;
+  readonly d: number;
+  readonly inch: boolean;
+  readonly As: number;
+  readonly d0: number;
+  readonly dStandard: number;
+  /** Hole diameter for net areas. */
+  readonly dn: number;
+  readonly fub: number;
+  readonly fnv: number;
+  readonly boltListed: boolean;
+  readonly threadsIn: boolean;
+  /** Edges of the leg or plate above the first row and below the last. */
+  readonly eTop: number;
+  readonly eBot: number;
+  /** Vertical edge distance, the lesser of those two: safe for either direction of the force. */
+  readonly ev: number;
+  /** From a line to the free edge of the leg or plate beside it. */
+  readonly eh: number;
+}
+
 /**
  * What is known of one end once its names are looked up: no standard owns these numbers. N, mm, MPa; symbols of the trade.
  * Heights run down from top of steel, lengths along the beam from its own end.
@@ -51,7 +80,7 @@ export interface Facts {
   readonly tw: number;
   readonly r: number;
   readonly channel: boolean;
-  /** Strengths of the web, of the flange (yield), of the plate (or ply), of bolt and electrode (0 where it plays no part). */
+  /** Strengths of the web, of the flange (yield), of the plate (ply, cleat), of bolt and electrode (0 where it plays no part). */
   readonly fy: number;
   readonly fu: number;
   readonly fyf: number;
@@ -72,7 +101,7 @@ export interface Facts {
   readonly db: number;
   readonly rb: number;
   readonly ho: number;
-  /** Rows, columns, pitch, gauge, first row, last row, end distance. */
+  /** Rows, columns, pitch, gauge, first row, last row, end distance of the bolts through the web; rows and columns are 0 where it is welded. */
   readonly n: number;
   readonly m: number;
   readonly p: number;
@@ -105,8 +134,22 @@ export interface Facts {
   readonly eTop: number;
   readonly eBot: number;
   readonly ex: number;
+  /** Top of the plate, ply or cleat, down from top of steel. */
+  readonly yp: number;
+  /** Angles beside the web and shear planes of its bolts: 2 for a pair of cleats, else 1. */
+  readonly k: number;
+  /** Legs of a cleat on the web and on the support, and the root radius between them; 0 where there is none. */
+  readonly legWeb: number;
+  readonly legSupport: number;
+  readonly rootRadius: number;
+  /** Width of an end plate; 0 for other joints. */
+  readonly bp: number;
+  /** Leg of the joint's weld, what it runs along, and the return of a cleat's weld along the web. */
   readonly leg: number;
-  readonly kind: 'fin-plate' | 'web-bolts';
+  readonly weldTo: 'none' | 'support' | 'web';
+  readonly weldReturn: number;
+  readonly supportBolts: SupportBoltFacts;
+  readonly kind: Joint['kind'];
   /** Full section: second moment, and first moment and thickness where V Q/(I t) peaks in the web. */
   readonly whole: Shape;
   readonly I: number;
@@ -118,6 +161,8 @@ export interface Facts {
   readonly flangeLeft: boolean;
   readonly support: SupportFacts;
   readonly supportKind: 'none' | 'beam-web' | 'column-flange' | 'column-web';
+  /** Reaction of a beam on the other side of the same web, N; 0 where there is none. */
+  readonly Vo: number;
   /** Thickness of the part of the support that the joint is fixed to; 0 where it is not told. */
   readonly ts: number;
   /** Strengths of the support; 0 where its grade is not told. */

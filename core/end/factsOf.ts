@@ -4,7 +4,10 @@ import { shearPeak } from '../shape/shearStress.ts';
 import { fromSystem, INCH } from '../units/systems.ts';
 import { cutsOf } from './cuts.ts';
 import type { Facts, SupportFacts } from './facts.ts';
-import { type End, plyOf } from './schema.ts';
+import { fittingSizes } from './fittingSizes.ts';
+import { cleatsIn, webBoltsOf, weldOf } from './jointParts.ts';
+import type { End } from './schema.ts';
+import { type SupportBoltGiven, supportBoltFacts } from './supportBoltFacts.ts';
 
 /** What is known of a bolt and its hole, as in the facts. */
 export type BoltFacts = Pick<Facts, 'd' | 'd0' | 'dStandard' | 'dn' | 'fub' | 'fnv' | 'boltListed' | 'inch' | 'As'>;
@@ -25,6 +28,7 @@ export interface Strengths extends BoltFacts {
   readonly fyp: number;
   readonly fup: number;
   readonly Xu: number;
+  readonly supportBolt: SupportBoltGiven;
 }
 
 /** No supporting beam's section is known. */
@@ -84,26 +88,25 @@ export const factsOf = (
 ): Facts => {
   const k = lengthSize(end);
   const { joint } = end;
-  const { bolts } = joint;
-  const ply = plyOf(joint);
-  const g = end.setback * k;
+  const placed = webBoltsOf(joint);
+  const sizes = fittingSizes(end, k);
+  const g = joint.kind === 'end-plate' || joint.kind === 'full-end-plate' ? sizes.tp : end.setback * k;
   const ct = (end.top?.length ?? 0) * k;
   const dt = (end.top?.depth ?? 0) * k;
   const cb = (end.bottom?.length ?? 0) * k;
   const db = (end.bottom?.depth ?? 0) * k;
-  const n = bolts.rows;
-  const m = bolts.columns ?? 1;
-  const p = n > 1 ? (bolts.pitch ?? 0) * k : 0;
-  const q = m > 1 ? (bolts.gauge ?? 0) * k : 0;
-  const y1 = joint.firstRow * k;
-  const yn = y1 + (n - 1) * p;
-  const eEnd = joint.endDistance * k;
+  const n = placed?.bolts.rows ?? 0;
+  const m = placed ? (placed.bolts.columns ?? 1) : 0;
+  const p = n > 1 ? (placed?.bolts.pitch ?? 0) * k : 0;
+  const q = m > 1 ? (placed?.bolts.gauge ?? 0) * k : 0;
+  const y1 = (placed?.firstRow ?? 0) * k;
+  const yn = n > 0 ? y1 + (n - 1) * p : 0;
+  const eEnd = (placed?.endDistance ?? 0) * k;
   const { d0 } = strengths;
   const { h, b, tf, tw, r } = section;
   const cuts = cutsOf(section, { g, ct, dt, cb, db });
   const shear = wholeShear(section);
-  const eTop = ply.topEdge * k;
-  const eBot = ply.bottomEdge * k;
+  const weld = weldOf(joint);
   return {
     V: 1,
     T: fromSystem(end.tie ?? 0, '0,1', end.units),
@@ -149,15 +152,14 @@ export const factsOf = (
     d0,
     dStandard: strengths.dStandard,
     dn: strengths.dn,
-    threadsIn: bolts.threads !== 'out',
-    z: g + eEnd + ((m - 1) * q) / 2,
-    z1: g + eEnd,
-    tp: ply.thickness * k,
-    hp: eTop + (n - 1) * p + eBot,
-    eTop,
-    eBot,
-    ex: ply.edge * k,
-    leg: joint.kind === 'fin-plate' ? joint.weld.leg * k : 0,
+    threadsIn: placed?.bolts.threads !== 'out',
+    z: n > 0 ? g + eEnd + ((m - 1) * q) / 2 : 0,
+    z1: n > 0 ? g + eEnd : 0,
+    ...sizes,
+    k: cleatsIn(joint),
+    leg: (weld?.leg ?? 0) * k,
+    weldTo: weld?.to ?? 'none',
+    supportBolts: supportBoltFacts(end, k, sizes, tw, strengths.supportBolt),
     kind: joint.kind,
     whole: shear.whole,
     I: shear.I,
@@ -169,6 +171,7 @@ export const factsOf = (
     flangeLeft: (dt > 0 && dt < tf) || (db > 0 && db < tf),
     support: support.outline,
     supportKind: support.kind,
+    Vo: fromSystem(end.support?.otherReaction ?? 0, '0,1', end.units),
     ts: support.thickness,
     fys: support.steel.fy,
     fus: support.steel.fu,

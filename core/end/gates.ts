@@ -41,6 +41,48 @@ export const singleRow: Gate = { when: oneRow, reason: 'single-row' };
 export const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 export const noTieForce: Gate = { when: noTie, reason: 'no-tie' };
 
+/** The web is welded to its plate or cleat: nothing is drilled in it. */
+export const noWebHoles: Gate = { when: flag('', (f) => f.n === 0, 'no bolts in the web'), reason: 'no-web-holes' };
+/** The web is bolted: no weld runs along it. */
+export const noWebWeld: Gate = {
+  when: flag('', (f) => f.weldTo !== 'web', 'no weld along the web'),
+  reason: 'web-bolted',
+};
+/** No weld joins plate or cleat to the support. */
+export const noSupportWeld: Gate = {
+  when: flag('', (f) => f.weldTo !== 'support', 'no weld to the support'),
+  reason: 'no-weld',
+};
+/** Plate or cleat is welded to the support. */
+export const noSupportBolts: Gate = {
+  when: flag('', (f) => f.supportBolts.n === 0, 'no bolts in the support'),
+  reason: 'no-support-bolts',
+};
+export const oneSupportRow: Gate = {
+  when: flag('', (f) => f.supportBolts.n === 1, 'one row of bolts in the support'),
+  reason: 'single-row',
+};
+/** One angle alone: what it hangs on stands beside the web. */
+export const pairOfCleats: Gate = { when: flag('', (f) => f.k === 2, 'a pair of cleats'), reason: 'pair-of-cleats' };
+/** An end plate of the beam's full depth is no simple joint: what would hold refers. */
+export const fullDepthPlate: Limit = {
+  when: flag('an end plate of the full depth', (f) => f.kind === 'full-end-plate'),
+  reason: 'full-depth-plate',
+  always: false,
+};
+/** A hole for a support bolt wider than the standard one. */
+export const wideSupportHole: Limit = {
+  when: flag('a support hole wider than the standard one', (f) => f.supportBolts.d0 > f.supportBolts.dStandard + 1e-9),
+  reason: 'hole-above-standard',
+  always: false,
+};
+/** A support bolt that the standard does not list. */
+export const supportBoltNotListed: Limit = {
+  when: flag('a support bolt that the standard does not list', (f) => !f.supportBolts.boltListed),
+  reason: 'bolt-not-listed',
+  always: true,
+};
+
 /** What no standard's formula for the end's own section covers, whatever the number says. */
 export const copeLimits: readonly Limit[] = [
   { when: flag('a hole at the face of a cope', (f) => f.holeAtCopeFace), reason: 'hole-at-cope-face', always: true },

@@ -73,6 +73,36 @@ export const leg = given('s', '1,0', (f) => f.leg);
 /** Part of the support that the joint is fixed to; 0 where it is not told. */
 export const ts = given('t_s', '1,0', (f) => f.ts);
 
+/** Top of the plate or cleat, down from top of steel, mm. */
+export const yp = given('y_p', '1,0', (f) => f.yp);
+/** Angles beside the web, and shear planes of its bolts. */
+export const k = given('k', '0,0', (f) => f.k);
+/** Legs of a cleat on web and support, width of an end plate, return of a weld along the web, mm. */
+export const legWeb = given('l_w', '1,0', (f) => f.legWeb);
+export const legSupport = given('l_s', '1,0', (f) => f.legSupport);
+export const bp = given('b_p', '1,0', (f) => f.bp);
+export const weldReturn = given('l_r', '1,0', (f) => f.weldReturn);
+/** Reaction of a beam on the other side of the same web, N. */
+export const Vo = given('V_o', '0,1', (f) => f.Vo);
+
+/** Bolts into the support: rows, lines, pitch, cross centres, sizes, edges of leg or plate; mm, mm2, MPa. */
+export const supportBolts = {
+  n: given('n_s', '0,0', (f) => f.supportBolts.n),
+  lines: given('m_s', '0,0', (f) => f.supportBolts.lines),
+  p: given('p_s', '1,0', (f) => f.supportBolts.p),
+  cc: given('c_c', '1,0', (f) => f.supportBolts.cc),
+  d: given('d_s', '1,0', (f) => f.supportBolts.d),
+  As: given('A_s,s', '2,0', (f) => f.supportBolts.As),
+  d0: given('d_0,s', '1,0', (f) => f.supportBolts.d0),
+  dn: given('d′_s', '1,0', (f) => f.supportBolts.dn),
+  fub: given('f_ub,s', '-2,1', (f) => f.supportBolts.fub),
+  fnv: given('F_nv,s', '-2,1', (f) => f.supportBolts.fnv),
+  eTop: given('e_1,s', '1,0', (f) => f.supportBolts.eTop),
+  eBot: given('e_2,s', '1,0', (f) => f.supportBolts.eBot),
+  ev: given('e_v', '1,0', (f) => f.supportBolts.ev),
+  eh: given('e_h', '1,0', (f) => f.supportBolts.eh),
+};
+
 /** Full section: area, second moment; first moment and thickness at the peak of V Q/(I t). */
 export const whole = {
   A: given('A', '2,0', (f) => f.whole.area),

@@ -1,6 +1,7 @@
 import type * as z from 'zod/mini';
 import { nearest } from '../steel/nearest.ts';
 import { type Fault, fault } from './fault.ts';
+import { jointFaults } from './jointFaults.ts';
 import { knownKeys } from './knownKeys.ts';
 import { type End, endSchema } from './schema.ts';
 
@@ -106,5 +107,6 @@ export const readEnd = (input: unknown): { readonly end: End } | { readonly faul
   if (typeof reaction === 'number' && reaction < 0) {
     return { faults: [fault('uplift', 'reaction', reaction, { least: 0 })] };
   }
-  return { end: parsed.data };
+  const faults = jointFaults(parsed.data);
+  return faults.length > 0 ? { faults } : { end: parsed.data };
 };

@@ -34,16 +34,20 @@ const cope = z.nullable(
   }),
 );
 
-const bolts = z.strictObject({
+const boltItself = {
   size: about(name(), 'M12 to M36, or inch sizes 1/2 to 1-1/4'),
   grade: z.union([name(), z.strictObject({ fu: positive() })]),
   threads: z.optional(about(z.enum(['in', 'out']), 'Threads in or out of the shear plane; absent = in, assumed')),
+  holes: z.optional(z.enum(['drilled', 'punched'])),
+  hole: z.optional(about(positive(), 'Hole diameter, in place of the standard one')),
+};
+
+const bolts = z.strictObject({
+  ...boltItself,
   rows: count(30),
   columns: z.optional(count(6)),
   pitch: z.optional(about(atLeastZero(), 'Between rows; needed from two rows up')),
   gauge: z.optional(about(atLeastZero(), 'Between columns; needed from two columns up')),
-  holes: z.optional(z.enum(['drilled', 'punched'])),
-  hole: z.optional(about(positive(), 'Hole diameter, in place of the standard one')),
 });
 
 const ply = z.strictObject({
@@ -54,10 +58,11 @@ const ply = z.strictObject({
   edge: about(positive(), 'From the last bolt column to the free edge'),
 });
 
-const weld = z.strictObject({
+const fillet = {
   leg: positive(),
   electrode: z.optional(about(positive(), 'Strength of the weld metal')),
-});
+};
+const weld = z.strictObject(fillet);
 
 const place = {
   firstRow: about(positive(), 'First bolt row, down from top of steel'),
@@ -65,9 +70,59 @@ const place = {
   bolts,
 };
 
+/** Bolts into the support: one line in each leg of a cleat, two lines in an end plate. */
+const supportBolts = z.strictObject({
+  ...boltItself,
+  rows: count(30),
+  pitch: z.optional(about(atLeastZero(), 'Between rows; needed from two rows up')),
+  crossCentres: about(
+    positive(),
+    "Between the lines on either side of the web; of one cleat, twice the line's distance from the web's middle",
+  ),
+  topEdge: about(positive(), 'From the top of cleat or plate to the first row'),
+});
+
+/** The weld of a cleat's leg, with the return at its ends. */
+const legWeld = (returns: string) => z.strictObject({ ...fillet, return: z.optional(about(positive(), returns)) });
+
+const cleat = z.strictObject({
+  legWeb: about(positive(), "Leg on the beam's web, from the heel"),
+  legSupport: about(positive(), 'Leg on the support, from the heel'),
+  thickness: positive(),
+  grade,
+  radius: z.optional(about(atLeastZero(), 'Root radius between the legs')),
+  topEdge: z.optional(about(positive(), 'Above the first row of web bolts')),
+  bottomEdge: z.optional(about(positive(), 'Below the last row of web bolts')),
+  top: z.optional(about(positive(), 'Top of the cleat, down from top of steel; where its web leg is welded')),
+  depth: z.optional(about(positive(), 'Depth of the cleat; where its web leg is welded')),
+  webWeld: z.optional(legWeld('Top and bottom, along the beam; absent = all of the leg on the web')),
+  supportWeld: z.optional(legWeld('Across the top of the leg; its strength is not counted')),
+});
+
+const endPlate = z.strictObject({
+  thickness: positive(),
+  width: positive(),
+  depth: positive(),
+  grade,
+  top: about(positive(), 'Top of the plate, down from top of steel'),
+});
+
+const cleats = {
+  firstRow: z.optional(place.firstRow),
+  endDistance: z.optional(place.endDistance),
+  bolts: z.optional(bolts),
+  cleat,
+  supportBolts: z.optional(supportBolts),
+};
+const endPlates = { plate: endPlate, webWeld: weld, supportBolts };
+
 const joint = z.discriminatedUnion('kind', [
   z.strictObject({ kind: z.literal('fin-plate'), ...place, plate: ply, weld }),
   z.strictObject({ kind: z.literal('web-bolts'), ...place, ply }),
+  z.strictObject({ kind: z.literal('double-cleat'), ...cleats }),
+  z.strictObject({ kind: z.literal('single-cleat'), ...cleats }),
+  z.strictObject({ kind: z.literal('end-plate'), ...endPlates }),
+  z.strictObject({ kind: z.literal('full-end-plate'), ...endPlates }),
 ]);
 
 const ownSection = z.strictObject({
@@ -145,5 +200,5 @@ export type Cope = NonNullable<End['top']>;
 export type Joint = End['joint'];
 export type GradeGiven = End['beam']['grade'];
 
-/** The plate or ply through which a joint's bolts pass, whatever its name. */
-export const plyOf = (joint: Joint) => (joint.kind === 'fin-plate' ? joint.plate : joint.ply);
+export type WebBolts = z.infer<typeof bolts>;
+export type SupportBolts = z.infer<typeof supportBolts>;

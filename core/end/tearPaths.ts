@@ -1,7 +1,7 @@
 import { minus, over, pick, plus, step, type Tree, times } from '../formula/tree.ts';
 import type { Length, Pure } from '../units/dimension.ts';
 import { oneColumn } from './gates.ts';
-import { at, dn, eBot, eEnd, eRow, ex, flag, m, mTop, n, p, q, tp, tw } from './given.ts';
+import { at, dn, eBot, eEnd, eRow, ex, flag, m, mTop, n, p, q, supportBolts, tp, tw } from './given.ts';
 
 const rows = times(minus(n, 1), p);
 const half = (columns: Tree<Pure>): Tree<Length> => times(minus(columns, 0.5), dn);
@@ -61,3 +61,32 @@ export const pulled = (t: Tree<Length>, edge: Tree<Length>) => {
 };
 export const webPulled: Block = pulled(tw, eEnd);
 export const platePulled: Block = pulled(tp, ex);
+
+/**
+ * In the leg or plate on the support, beside one line of bolts: from the line's outer bolt up (or down) to the nearer edge, and along to the
+ * free edge. mm2
+ */
+export const supportBlock: Block = (() => {
+  const { n, p, dn, ev, eh } = supportBolts;
+  const Lgv = step('L_gv', plus(ev, times(minus(n, 1), p)));
+  return {
+    Agv: step('A_gv', times(tp, Lgv)),
+    Anv: step('A_nv', times(tp, minus(Lgv, times(minus(n, 0.5), dn)))),
+    Agt: step('A_gt', times(tp, eh)),
+    Ant: step('A_nt', times(tp, minus(eh, times(0.5, dn)))),
+  };
+})();
+
+/** Two planes beside one line of support bolts, torn upright out of the leg or plate. mm */
+export const supportTearUp: UprightTear = (() => {
+  const { n, p, dn, ev, lines } = supportBolts;
+  const Lgv = step('L_gv', plus(ev, times(minus(n, 1), p)));
+  return { t: tp, columns: lines, Lgv, Lnv: step('L_nv', minus(Lgv, times(minus(n, 0.5), dn))) };
+})();
+
+/** Support leg beside an outer bolt, torn along to its free edge. mm */
+export const supportTearAlong: AlongTear['edge'] & { readonly t: AlongTear['t'] } = {
+  t: tp,
+  L: supportBolts.eh,
+  Ln: step('L_n', minus(supportBolts.eh, over(supportBolts.dn, 2))),
+};

@@ -1,3 +1,4 @@
+import { fittingOf, webBoltsOf, weldOf } from '../end/jointParts.ts';
 import { fixed, plain } from '../units/figures.ts';
 import { capital } from '../words/capital.ts';
 import type { Context, Zone } from './context.ts';
@@ -59,7 +60,8 @@ const boltRows = (context: Context): Row[] => {
   const { input, numbers } = context;
   const { end, facts } = input;
   const { mm, mpa } = numbers;
-  const { bolts } = end.joint;
+  const bolts = webBoltsOf(end.joint)?.bolts;
+  if (!bolts) return [];
   const columns = facts.m > 1 ? `${facts.m} × ` : '';
   const grade = typeof bolts.grade === 'string' ? ` ${bolts.grade}` : '';
   const threads = say.threads[facts.threadsIn ? 'in' : 'out'] + assumed(context, 'joint.bolts.threads');
@@ -86,18 +88,18 @@ const plateRows = (context: Context): Row[] => {
   const { joint } = end;
   const edges = `e_top ${mm(facts.eTop)}, e_bot ${mm(facts.eBot)}, e_x ${mm(facts.ex)}`;
   if (joint.kind === 'web-bolts') {
-    const size = `${mm(facts.tp)} × ${mm(facts.hp)}, ${gradeName(context, joint.ply.grade)}`;
+    const size = `${mm(facts.tp)} × ${mm(facts.hp)}, ${gradeName(context, fittingOf(joint).grade)}`;
     return [
       [labels.ply, size],
       ['', edges],
     ];
   }
   const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
-  const metal = facts.Xu > 0 ? `, X_u ${mpa(facts.Xu)}${assumed(context, 'joint.weld.electrode')}` : '';
+  const metal = facts.Xu > 0 ? `, X_u ${mpa(facts.Xu)}${assumed(context, `${weldOf(joint)?.path}.electrode`)}` : '';
   return [
     [
       capital(words.finPlate),
-      `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${gradeName(context, joint.plate.grade)}`,
+      `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${gradeName(context, fittingOf(joint).grade)}`,
     ],
     ['', edges],
     [labels.weld, `${say.fillets} s ${mm(facts.leg)}${metal}`],

@@ -5,6 +5,7 @@ import { failurePath } from '../drawing/failurePath.ts';
 import type { LayoutOptions } from '../drawing/layout.ts';
 import { leastBox } from '../drawing/leastBox.ts';
 import type { DrawingWords } from '../drawing/words.ts';
+import { supportBoltsOf, webBoltsOf } from '../end/jointParts.ts';
 import type { Context } from './context.ts';
 import { holesAssumed, sectionName } from './given.ts';
 import { POINT } from './pen.ts';
@@ -20,7 +21,7 @@ const REACH = 30;
 const drawingWords = (context: Context): DrawingWords => {
   const { input, numbers, words } = context;
   const { end, designation } = input;
-  const { bolts } = end.joint;
+  const bolts = webBoltsOf(end.joint)?.bolts ?? supportBoltsOf(end.joint)!;
   return {
     units: numbers.units,
     section: sectionName(designation).replaceAll(' × ', '×') || say.ownSize,

@@ -29,6 +29,8 @@ export interface BoltSteel {
 export interface Materials {
   readonly sections: Steels;
   readonly plates: Steels;
+  /** Steels of cleats, where they are not those of plates. */
+  readonly cleats?: Steels;
   /** Thickness by which the strength of a beam's web is read: the web's own, or the thickest part's. */
   readonly webStrengthAt: (section: { readonly tf: number; readonly tw: number }) => number;
   readonly boltGrades: readonly string[];

@@ -2,7 +2,14 @@ import type { Words } from './words.ts';
 
 /** Plain words for values that are chosen from a list, by the path of their field. */
 const choiceWords = (words: Words): Readonly<Record<string, Readonly<Record<string, string>>>> => ({
-  'joint.kind': { 'fin-plate': words.finPlate, 'web-bolts': 'web bolted to a ply' },
+  'joint.kind': {
+    'fin-plate': words.finPlate,
+    'double-cleat': 'two cleats',
+    'single-cleat': 'one cleat',
+    'end-plate': 'end plate',
+    'full-end-plate': 'end plate of the full depth',
+    'web-bolts': 'web bolted to a ply',
+  },
   'support.kind': { 'beam-web': "beam's web" },
 });
 

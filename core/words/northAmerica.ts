@@ -7,6 +7,8 @@ const instead: Instead = [
   ['notch', 'cope'],
   ['fin plate', 'single plate'],
   ['gauge', 'gage'],
+  ['a cleat', 'an angle'],
+  ['cleat', 'angle'],
 ];
 
 /** The same texts in the words of Canada and the United States: cope, single plate, gage. */

@@ -26,6 +26,7 @@ const schedule = (standard: Standard): End[] => {
   return Array.from({ length: ENDS }, (_, i) => {
     const one = structuredClone(read.end);
     one.reaction = 100 + i / 10;
+    if (one.joint.kind !== 'fin-plate') throw new Error('the example end has no fin plate');
     one.joint.bolts.pitch = 60 + (i % 40);
     one.top = { length: 90 + (i % 60), depth: 40 + (i % 17) / 2, radius: 10 };
     return one;

@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { checkEnd } from '../../core/check/checkEnd.ts';
 import type { Check, Report } from '../../core/check/report.ts';
+import { webBoltsOf } from '../../core/end/jointParts.ts';
 import type { End } from '../../core/end/schema.ts';
 import { INCH, KIP } from '../../core/units/systems.ts';
 import { endOf, type PlausibleEnd, plausibleEnd } from '../support/arbitraryEnd.ts';
@@ -111,7 +112,7 @@ describe('more steel at the same fy and fu never weakens', () => {
         const end = endOf(x);
         const joint = {
           ...end.joint,
-          bolts: { ...end.joint.bolts, grade: { fu: 1000 } },
+          bolts: { ...webBoltsOf(end.joint)!.bolts, grade: { fu: 1000 } },
           weld: { leg: x.leg, electrode: 550 },
         };
         const [before, after] = [report(end), report({ ...end, joint })];

@@ -36,6 +36,14 @@ export const block = (left: number, top: number, right: number, bottom: number):
   ],
 });
 
-/** Field names of the plate or of the ply. */
-export const plateField = ({ kind }: Facts, name: string): string =>
-  `${kind === 'fin-plate' ? 'joint.plate' : 'joint.ply'}.${name}`;
+const fittings: Readonly<Record<Facts['kind'], string>> = {
+  'fin-plate': 'joint.plate',
+  'web-bolts': 'joint.ply',
+  'double-cleat': 'joint.cleat',
+  'single-cleat': 'joint.cleat',
+  'end-plate': 'joint.plate',
+  'full-end-plate': 'joint.plate',
+};
+
+/** Field names of the plate, ply or cleat. */
+export const plateField = ({ kind }: Facts, name: string): string => `${fittings[kind]}.${name}`;

@@ -1,4 +1,5 @@
-import { type Cope, type End, type GradeGiven, plyOf } from '../../end/schema.ts';
+import { fittingOf, type PlacedBolts, webBoltsOf, weldOf } from '../../end/jointParts.ts';
+import type { Cope, GradeGiven } from '../../end/schema.ts';
 import { capital } from '../../words/capital.ts';
 import type { Zone } from '../context.ts';
 import { assumed, holesAssumed } from '../given.ts';
@@ -37,7 +38,7 @@ const copeRows = (context: CardContext): Row[] => {
   ];
 };
 
-const boltText = (context: CardContext, { bolts }: End['joint']): string => {
+const boltText = (context: CardContext, { bolts }: PlacedBolts): string => {
   const { facts } = context.input;
   const grade = typeof bolts.grade === 'string' ? bolts.grade : `f_ub ${context.numbers.load(bolts.grade.fu)}`;
   const threads = sheetWords.threads[facts.threadsIn ? 'in' : 'out'] + assumed(context, 'joint.bolts.threads');
@@ -45,7 +46,7 @@ const boltText = (context: CardContext, { bolts }: End['joint']): string => {
   return `${bolts.size} ${grade}, ${threads}; ${say.hole(context.numbers.mm(facts.d0), made)}`;
 };
 
-const columnText = (context: CardContext, { endDistance, bolts }: End['joint']): string => {
+const columnText = (context: CardContext, { endDistance, bolts }: PlacedBolts): string => {
   const { columns = 1, gauge = 0 } = bolts;
   const first = say.fromEnd(size(context, endDistance));
   if (columns === 1) return `${say.oneColumn}${assumed(context, 'joint.bolts.columns')}, ${first}`;
@@ -56,15 +57,16 @@ const fittingRows = (context: CardContext): Row[] => {
   const { words, numbers, input } = context;
   const { joint } = input.end;
   const { facts } = input;
-  const { thickness, topEdge, bottomEdge, edge } = plyOf(joint);
-  const edges = say.edges(size(context, topEdge), size(context, bottomEdge), size(context, edge));
+  const { thickness } = fittingOf(joint);
+  const edges = say.edges(numbers.mm(facts.eTop), numbers.mm(facts.eBot), numbers.mm(facts.ex));
   const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
   if (joint.kind === 'web-bolts')
     return [[sheetWords.labels.ply, `${size(context, thickness)}; ${say.byRows}; ${edges}`]];
-  const metal = facts.Xu > 0 ? `, X_u ${numbers.mpa(facts.Xu)}${assumed(context, 'joint.weld.electrode')}` : '';
+  const metal =
+    facts.Xu > 0 ? `, X_u ${numbers.mpa(facts.Xu)}${assumed(context, `${weldOf(joint)?.path}.electrode`)}` : '';
   return [
     [capital(words.finPlate), `${size(context, thickness)} × ${numbers.mm(width)}, ${say.byRows}; ${edges}`],
-    [sheetWords.labels.weld, `${sheetWords.fillets} ${size(context, joint.weld.leg)}${metal}`],
+    [sheetWords.labels.weld, `${sheetWords.fillets} ${numbers.mm(facts.leg)}${metal}`],
   ];
 };
 
@@ -83,8 +85,9 @@ const columnsOf = (context: CardContext): readonly (readonly Row[])[] => {
   const { end } = input;
   const { joint } = end;
   const { labels } = say;
-  const pitch = joint.bolts.pitch === undefined ? '' : `, ${say.pitch(size(context, joint.bolts.pitch))}`;
-  const steel = `${say.beam} ${gradeText(context, end.beam.grade)}, ${plateName(context)} ${gradeText(context, plyOf(joint).grade)}`;
+  const placed = webBoltsOf(joint);
+  const pitch = placed?.bolts.pitch === undefined ? '' : `, ${say.pitch(size(context, placed.bolts.pitch))}`;
+  const steel = `${say.beam} ${gradeText(context, end.beam.grade)}, ${plateName(context)} ${gradeText(context, fittingOf(joint).grade)}`;
   const level = `${made.card.level}${assumed(context, 'level')}`;
   return [
     [
@@ -95,9 +98,13 @@ const columnsOf = (context: CardContext): readonly (readonly Row[])[] => {
       ...supportRows(context),
     ],
     [
-      [sheetWords.labels.bolts, boltText(context, joint)],
-      [labels.columns, columnText(context, joint)],
-      [labels.rows, `${say.firstRow(size(context, joint.firstRow))}${pitch}`],
+      ...(placed
+        ? ([
+            [sheetWords.labels.bolts, boltText(context, placed)],
+            [labels.columns, columnText(context, placed)],
+            [labels.rows, `${say.firstRow(size(context, placed.firstRow))}${pitch}`],
+          ] as const)
+        : []),
       ...fittingRows(context),
     ],
   ];

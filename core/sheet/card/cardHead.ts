@@ -1,3 +1,4 @@
+import { supportBoltsOf, webBoltsOf } from '../../end/jointParts.ts';
 import { capital } from '../../words/capital.ts';
 import { drawJob, drawStandard, STANDARD } from '../head.ts';
 import { FRAME, LEFT, TOP, VERDICT_TOP, WIDE, WIDTH } from '../page.ts';
@@ -28,7 +29,7 @@ const copesText = ({ input, words, numbers }: CardContext): string => {
 const fittingText = (context: CardContext): string => {
   const { input, words, numbers } = context;
   const { joint } = input.end;
-  const { bolts } = joint;
+  const bolts = webBoltsOf(joint)?.bolts ?? supportBoltsOf(joint)!;
   const plate = joint.kind === 'fin-plate' ? capital(words.finPlate) : say.joints['web-bolts'];
   const columns = input.facts.m > 1 ? `${input.facts.m} ${say.columns} ` : '';
   const grade = typeof bolts.grade === 'string' ? ` ${bolts.grade}` : '';

@@ -5,6 +5,7 @@ import { cardOf } from '../../../core/card/cardOf.ts';
 import { letters } from '../../../core/card/letters.ts';
 import { checkEnd } from '../../../core/check/checkEnd.ts';
 import type { Outcome, SaidFault } from '../../../core/check/report.ts';
+import { joints } from '../../../core/joints/index.ts';
 import { standards } from '../../../core/standards/index.ts';
 import { listSections } from '../../../core/steel/findSection.ts';
 import { goodEndsUnder } from '../../support/underStandard.ts';
@@ -191,9 +192,11 @@ describe('a shop card', () => {
   });
 
   test('names each check by a letter of its own, which is no figure and not V', () => {
-    const all = Object.values(letters);
-    expect(new Set(all).size).toBe(all.length);
-    for (const one of all) expect(one).toMatch(/^[A-HJ-NP-UWX]$/);
+    for (const one of Object.values(letters)) expect(one).toMatch(/^[A-HJ-NP-UW-Z]$/);
+    for (const { strength } of Object.values(joints)) {
+      const here = strength.map(([id]) => id).filter((id) => id !== 'weld');
+      expect(new Set(here.map((id) => letters[id])).size).toBe(here.length);
+    }
   });
 });
 

@@ -45,6 +45,27 @@ export const channel250: Section = {
 
 const none: SupportFacts = { here: false, b: 0, tw: 0, tf: 0, r: 0, h: 0, topOfSteel: 0 };
 
+const noSupportBolts: Facts['supportBolts'] = {
+  n: 0,
+  lines: 0,
+  p: 0,
+  cc: 0,
+  d: 0,
+  inch: false,
+  As: 0,
+  d0: 0,
+  dStandard: 0,
+  dn: 0,
+  fub: 0,
+  fnv: 0,
+  boltListed: false,
+  threadsIn: true,
+  eTop: 0,
+  eBot: 0,
+  ev: 0,
+  eh: 0,
+};
+
 /** Facts in the sense of the conventions, worked out from the sizes. */
 export const sampleFacts = (given: Sample = {}): Facts => {
   const section = given.section ?? section406;
@@ -116,7 +137,17 @@ export const sampleFacts = (given: Sample = {}): Facts => {
     eTop,
     eBot,
     ex,
+    yp: y1 - eTop,
+    k: kind === 'double-cleat' ? 2 : 1,
+    legWeb: 0,
+    legSupport: 0,
+    rootRadius: 0,
+    bp: 0,
     leg,
+    weldTo: kind === 'fin-plate' ? 'support' : 'none',
+    weldReturn: 0,
+    supportBolts: noSupportBolts,
+    Vo: 0,
     kind,
     whole,
     I: whole.inertia,

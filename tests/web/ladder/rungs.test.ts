@@ -2,6 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { examine } from '../../../core/check/examine.ts';
 import type { Check } from '../../../core/check/report.ts';
+import { webBoltsOf } from '../../../core/end/jointParts.ts';
 import { rungsOf } from '../../../web/ladder/rungs.ts';
 import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
 import { demo, demoJoint } from './demoEnds.ts';
@@ -63,7 +64,7 @@ describe('rungs', () => {
 
   test('a single bolt, which holds no moment, leaves black bars of no length at the foot', () => {
     const { joint } = demo().end;
-    const { report } = demoJoint({ bolts: { ...joint.bolts, rows: 1 } });
+    const { report } = demoJoint({ bolts: { ...webBoltsOf(joint)!.bolts, rows: 1 } });
     const foot = rungsOf(report).rungs.at(-1)!;
     expect([foot.state, foot.reactionAtFailure]).toEqual(['fails', 0]);
   });

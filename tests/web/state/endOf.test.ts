@@ -1,6 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { canonicalJson } from '../../../core/end/canonical.ts';
+import { webBoltsOf } from '../../../core/end/jointParts.ts';
 import { readEnd } from '../../../core/end/readEnd.ts';
 import type { End } from '../../../core/end/schema.ts';
 import demo from '../../../fixtures/demo/citrus-packhouse.json' with { type: 'json' };
@@ -122,7 +123,7 @@ describe('an end and the fields of the bench', () => {
     const there = endOf(switchUnits(entry, 'in-kip')).input as unknown as End;
     expect(there.units).toBe('in-kip');
     expect(there.setback * 25.4).toBe(12);
-    expect(there.joint.firstRow * 25.4).toBe(85);
+    expect(webBoltsOf(there.joint)!.firstRow * 25.4).toBe(85);
     expect(there.top!.length * 25.4).toBe(95);
   });
 

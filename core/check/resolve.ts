@@ -56,6 +56,17 @@ const noBolt: SupportBoltGiven = {
   threadsIn: true,
 };
 
+const defaultsOf = new WeakMap<Standard, Facts['options']>();
+
+/** Every option of a standard at its default. */
+const defaultOptions = (standard: Standard): Facts['options'] => {
+  const known = defaultsOf.get(standard);
+  if (known) return known;
+  const made = Object.fromEntries(Object.entries(standard.options).map(([key, values]) => [key, values[0]]));
+  defaultsOf.set(standard, made);
+  return made;
+};
+
 /** Looks up names and collects what is wrong with them. */
 class Resolver {
   readonly faults: Fault[] = [];
@@ -165,11 +176,12 @@ class Resolver {
     return found ?? noBoltSteel;
   }
 
-  options(given: End['options']): Record<string, string> {
+  options(given: End['options']): Facts['options'] {
     const known = this.standard.options;
-    const inForce: Record<string, string> = {};
-    for (const key of Object.keys(known)) inForce[key] = known[key]![0];
-    for (const [key, value] of Object.entries(given ?? {})) {
+    const defaults = defaultOptions(this.standard);
+    if (!given) return defaults;
+    const inForce = { ...defaults };
+    for (const [key, value] of Object.entries(given)) {
       const values = Object.hasOwn(known, key) ? known[key] : undefined;
       if (!values) this.faults.push(fault('unknown-option', `options.${key}`, key, Object.keys(known)));
       else if (!values.includes(value)) {
@@ -238,9 +250,9 @@ export const resolve = (
   const plate =
     carried?.plate ??
     resolver.strength(fitting.grade, steels, fitting.thickness * lengthSize(end), `${fitting.path}.grade`);
-  const { threadsIn: _, ...bolt } = resolver.bolt(webBoltsOf(joint)?.bolts, 'joint.bolts', carried?.fub);
+  const bolt = resolver.bolt(webBoltsOf(joint)?.bolts, 'joint.bolts', carried?.fub);
   const supportBolt = resolver.bolt(supportBoltsOf(joint), 'joint.supportBolts', carried?.fubs);
-  const options = resolver.options(carried ? {} : end.options);
+  const options = resolver.options(carried ? undefined : end.options);
   const support = resolver.support(carried);
   const { faults } = resolver;
   faults.push(...patternFaults(end, { web: bolt.d0, support: supportBolt.d0 }));
@@ -253,7 +265,7 @@ export const resolve = (
     fyf: carried?.fyf ?? resolver.flangeYield(beam.section, web),
     fyp: plate.fy,
     fup: plate.fu,
-    ...bolt,
+    bolt,
     supportBolt,
     Xu: metal === undefined ? electrode : fromSystem(metal, '-2,1', units),
   };

@@ -21,13 +21,14 @@ export interface SupportGiven {
 }
 
 /** What a standard says of the materials, bolts and holes of one end. MPa, mm. */
-export interface Strengths extends BoltFacts {
+export interface Strengths {
   readonly fy: number;
   readonly fu: number;
   readonly fyf: number;
   readonly fyp: number;
   readonly fup: number;
   readonly Xu: number;
+  readonly bolt: BoltFacts;
   readonly supportBolt: SupportBoltGiven;
 }
 
@@ -102,7 +103,8 @@ export const factsOf = (
   const y1 = (placed?.firstRow ?? 0) * k;
   const yn = n > 0 ? y1 + (n - 1) * p : 0;
   const eEnd = (placed?.endDistance ?? 0) * k;
-  const { d0 } = strengths;
+  const { bolt } = strengths;
+  const { d0 } = bolt;
   const { h, b, tf, tw, r } = section;
   const cuts = cutsOf(section, { g, ct, dt, cb, db });
   const shear = wholeShear(section);
@@ -122,9 +124,9 @@ export const factsOf = (
     fyf: strengths.fyf,
     fyp: strengths.fyp,
     fup: strengths.fup,
-    fub: strengths.fub,
-    fnv: strengths.fnv,
-    boltListed: strengths.boltListed,
+    fub: bolt.fub,
+    fnv: bolt.fnv,
+    boltListed: bolt.boltListed,
     Xu: strengths.Xu,
     g,
     ct,
@@ -146,16 +148,26 @@ export const factsOf = (
     ab: h - db - yn,
     mTop: dt > 0 ? columnsInside(ct, eEnd, q, m, d0) : 0,
     mBottom: db > 0 ? columnsInside(cb, eEnd, q, m, d0) : 0,
-    d: strengths.d,
-    inch: strengths.inch,
-    As: strengths.As,
+    d: bolt.d,
+    inch: bolt.inch,
+    As: bolt.As,
     d0,
-    dStandard: strengths.dStandard,
-    dn: strengths.dn,
+    dStandard: bolt.dStandard,
+    dn: bolt.dn,
     threadsIn: placed?.bolts.threads !== 'out',
     z: n > 0 ? g + eEnd + ((m - 1) * q) / 2 : 0,
     z1: n > 0 ? g + eEnd : 0,
-    ...sizes,
+    tp: sizes.tp,
+    hp: sizes.hp,
+    eTop: sizes.eTop,
+    eBot: sizes.eBot,
+    ex: sizes.ex,
+    yp: sizes.yp,
+    legWeb: sizes.legWeb,
+    legSupport: sizes.legSupport,
+    rootRadius: sizes.rootRadius,
+    bp: sizes.bp,
+    weldReturn: sizes.weldReturn,
     k: cleatsIn(joint),
     leg: (weld?.leg ?? 0) * k,
     weldTo: weld?.to ?? 'none',

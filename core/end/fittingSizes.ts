@@ -18,7 +18,21 @@ const plySizes = (joint: Of<'fin-plate' | 'web-bolts'>, k: number): FittingSizes
   const eBot = ply.bottomEdge * k;
   const rows = bolts.rows > 1 ? (bolts.rows - 1) * (bolts.pitch ?? 0) * k : 0;
   const yp = joint.firstRow * k - eTop;
-  return { tp: ply.thickness * k, hp: eTop + rows + eBot, eTop, eBot, ex: ply.edge * k, yp, ...noLegs };
+  const tp = ply.thickness * k;
+  const ex = ply.edge * k;
+  return {
+    tp,
+    hp: eTop + rows + eBot,
+    eTop,
+    eBot,
+    ex,
+    yp,
+    legWeb: 0,
+    legSupport: 0,
+    rootRadius: 0,
+    bp: 0,
+    weldReturn: 0,
+  };
 };
 
 /** The heel stands at the support's face, so that the web leg reaches over the setback to the bolts. */

@@ -28,12 +28,12 @@ export const fittingOf = (joint: Joint): Fitting => {
     case 'fin-plate':
     case 'end-plate':
     case 'full-end-plate':
-      return { path: 'joint.plate', ...joint.plate };
+      return { path: 'joint.plate', thickness: joint.plate.thickness, grade: joint.plate.grade };
     case 'web-bolts':
-      return { path: 'joint.ply', ...joint.ply };
+      return { path: 'joint.ply', thickness: joint.ply.thickness, grade: joint.ply.grade };
     case 'double-cleat':
     case 'single-cleat':
-      return { path: 'joint.cleat', ...joint.cleat };
+      return { path: 'joint.cleat', thickness: joint.cleat.thickness, grade: joint.cleat.grade };
   }
 };
 
@@ -48,7 +48,7 @@ export const supportBoltsOf = (joint: Joint): SupportBolts | undefined =>
 export const weldOf = (joint: Joint): JointWeld | undefined => {
   switch (joint.kind) {
     case 'fin-plate':
-      return { path: 'joint.weld', to: 'support', ...joint.weld };
+      return { path: 'joint.weld', to: 'support', leg: joint.weld.leg, electrode: joint.weld.electrode };
     case 'end-plate':
     case 'full-end-plate':
       return { path: 'joint.webWeld', to: 'web', ...joint.webWeld };

@@ -4,7 +4,7 @@ import type { Check } from '../../core/check/report.ts';
 import type { Joint } from '../../core/end/schema.ts';
 import { joints } from '../../core/joints/index.ts';
 import type { Standard } from '../../core/standards/standard.ts';
-import { endOf, plausibleEnd } from './arbitraryEnd.ts';
+import { jointEndOf, plausibleJoint } from './arbitraryJoint.ts';
 import { goodEndsUnder } from './underStandard.ts';
 
 /**
@@ -29,24 +29,33 @@ const coverageOf = (check: Check): Coverage => {
   return hasNumber(check) ? 'computes' : 'outside';
 };
 
-/** The end with its fin plate as a ply of the support, or the other way round, a tie force, a support that is told, and no option chosen. */
-const asKind = (end: Record<string, unknown>, kind: Joint['kind']): Record<string, unknown> => {
-  const joint = end.joint as Record<string, unknown>;
-  const { plate, ply, weld, kind: _, ...rest } = joint;
+/** A tie force, a support that is told, and no option chosen. */
+const told = (end: Record<string, unknown>): Record<string, unknown> => {
   const steel = (end.beam as Record<string, unknown>).grade;
-  const parts = kind === 'fin-plate' ? { plate: plate ?? ply, weld: weld ?? { leg: 8 } } : { ply: ply ?? plate };
   const support = { kind: 'beam-web', section: 'UB 610x229x125', grade: steel };
-  return { ...end, options: {}, tie: 50, support, joint: { kind, ...rest, ...parts } };
+  return { ...end, options: {}, tie: 50, support };
+};
+
+/** The end with its fin plate as a ply of the support, or the other way round; undefined where it is joined in yet another way. */
+const asKind = (end: Record<string, unknown>, kind: Joint['kind']): Record<string, unknown> | undefined => {
+  const { plate, ply, weld, kind: own, ...rest } = end.joint as Record<string, unknown>;
+  if (own === kind) return end;
+  if (own === 'fin-plate' && kind === 'web-bolts') return { ...end, joint: { kind, ...rest, ply: plate } };
+  if (own === 'web-bolts' && kind === 'fin-plate') {
+    return { ...end, joint: { kind, ...rest, plate: ply, weld: weld ?? { leg: 8 } } };
+  }
+  return undefined;
 };
 
 /** What every check of a joint does under a standard, found by running good ends and some hundreds of random ones. */
 export const coverageUnder = (standard: Standard, kind: Joint['kind']): Record<string, Coverage> => {
   const random = fc
-    .sample(plausibleEnd, { numRuns: SAMPLES, seed: SEED })
-    .map((one) => endOf({ ...one, standard: standard.id }) as Record<string, unknown>);
+    .sample(plausibleJoint, { numRuns: SAMPLES, seed: SEED })
+    .map((one) => jointEndOf({ ...one, standard: standard.id }, kind) as Record<string, unknown>);
+  const good = goodEndsUnder(standard).flatMap(({ end }) => asKind(end, kind) ?? []);
   const best: Record<string, Coverage> = {};
-  for (const end of [...goodEndsUnder(standard).map((one) => one.end), ...random]) {
-    const outcome = checkEnd(asKind(end, kind));
+  for (const end of [...good, ...random].flatMap((one) => [told(one), { ...one, options: {} }])) {
+    const outcome = checkEnd(end);
     if ('faults' in outcome) continue;
     for (const check of outcome.report.checks) {
       const found = coverageOf(check);

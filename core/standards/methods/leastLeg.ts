@@ -1,5 +1,5 @@
 import type { Limit } from '../../end/gates.ts';
-import { leg, tp, ts } from '../../end/given.ts';
+import { flag, leg, tp, ts, tw } from '../../end/given.ts';
 import { atMost, below, constant, most, pick, plus, type Source, step, type Tree } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 
@@ -9,8 +9,9 @@ const NOISE = 1e-9;
 const size = (mm: number): Tree<Length> => constant('s_min', mm, '1,0');
 const upTo = (mm: number): Tree<Length> => constant(`${mm} mm`, mm + NOISE, '1,0');
 
+const toWeb = flag('', (f) => f.weldTo === 'web', 'a weld along the web');
 /** Thicker of the parts joined, as far as the support's is told, mm. */
-const thicker = step('t', most(tp, ts));
+const thicker = step('t', pick([[toWeb, most(tp, tw)]], most(tp, ts)));
 
 /** Least leg of a fillet by the thicker part joined, mm: rows of greatest thickness and leg, and the leg beyond the last row. */
 export const leastLeg = (

@@ -12,6 +12,7 @@ import type { Standard } from '../standards/standard.ts';
 import { findBoltSize } from '../steel/bolts.ts';
 import { findSection } from '../steel/knownSections.ts';
 import { nearest } from '../steel/nearest.ts';
+import { wrenchRoom } from '../steel/wrenchRoom.ts';
 import { fromSystem } from '../units/systems.ts';
 
 /** An end whose names are looked up: facts in N and mm, and what the section was read as. */
@@ -48,6 +49,7 @@ const noBolt: SupportBoltGiven = {
   d0: 0,
   dStandard: 0,
   dn: 0,
+  socket: 0,
   fub: 0,
   fnv: 0,
   boltListed: false,
@@ -150,8 +152,21 @@ class Resolver {
     const { fub, shear, listed } = this.boltSteel(bolts, path, own, d);
     const threadsIn = bolts.threads !== 'out';
     const fnv = shear ? (threadsIn ? shear.in : shear.out) : 0;
-    const { thread, tensileArea } = found;
-    return { d, d0, dStandard, dn, fub, fnv, boltListed: listed, inch: thread === 'inch', As: tensileArea, threadsIn };
+    const socket = this.socket(bolts, path, d);
+    const { thread, tensileArea: As } = found;
+    return { d, d0, dStandard, dn, socket, fub, fnv, boltListed: listed, inch: thread === 'inch', As, threadsIn };
+  }
+
+  /** The shop's own socket, which goes over the nut, or that of common practice. */
+  private socket(bolts: WebBolts | SupportBolts, path: string, d: number): number {
+    const { socket, corners } = wrenchRoom(d);
+    if (bolts.socket === undefined) return socket;
+    const k = lengthSize(this.end);
+    if (bolts.socket * k <= corners) {
+      const limit = { above: Number((corners / k).toPrecision(4)) };
+      this.faults.push(fault('socket-below-nut', `${path}.socket`, bolts.socket, limit));
+    }
+    return bolts.socket * k;
   }
 
   private boltSteel(

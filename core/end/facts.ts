@@ -52,6 +52,8 @@ export interface SupportBoltFacts {
   readonly dStandard: number;
   /** Hole diameter for net areas. */
   readonly dn: number;
+  /** Outside diameter of the wrench's socket. */
+  readonly socket: number;
   readonly fub: number;
   readonly fnv: number;
   readonly boltListed: boolean;
@@ -126,6 +128,8 @@ export interface Facts {
   readonly dStandard: number;
   /** Hole diameter for net areas, d'. */
   readonly dn: number;
+  /** Outside diameter of the wrench's socket. */
+  readonly socket: number;
   readonly threadsIn: boolean;
   readonly z: number;
   readonly z1: number;

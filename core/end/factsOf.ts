@@ -10,7 +10,10 @@ import type { End } from './schema.ts';
 import { type SupportBoltGiven, supportBoltFacts } from './supportBoltFacts.ts';
 
 /** What is known of a bolt and its hole, as in the facts. */
-export type BoltFacts = Pick<Facts, 'd' | 'd0' | 'dStandard' | 'dn' | 'fub' | 'fnv' | 'boltListed' | 'inch' | 'As'>;
+export type BoltFacts = Pick<
+  Facts,
+  'd' | 'd0' | 'dStandard' | 'dn' | 'fub' | 'fnv' | 'boltListed' | 'inch' | 'As' | 'socket'
+>;
 
 /** What is known of the support: its outline, and what the joint is fixed to. MPa, mm; 0 where it is not told. */
 export interface SupportGiven {
@@ -154,6 +157,7 @@ export const factsOf = (
     d0,
     dStandard: bolt.dStandard,
     dn: bolt.dn,
+    socket: bolt.socket,
     threadsIn: placed?.bolts.threads !== 'out',
     z: n > 0 ? g + eEnd + ((m - 1) * q) / 2 : 0,
     z1: n > 0 ? g + eEnd : 0,

@@ -40,6 +40,7 @@ const boltItself = {
   threads: z.optional(about(z.enum(['in', 'out']), 'Threads in or out of the shear plane; absent = in, assumed')),
   holes: z.optional(z.enum(['drilled', 'punched'])),
   hole: z.optional(about(positive(), 'Hole diameter, in place of the standard one')),
+  socket: z.optional(about(positive(), "Outside diameter of the shop's wrench socket; absent = common practice")),
 };
 
 const bolts = z.strictObject({

@@ -17,6 +17,7 @@ const none: SupportBoltFacts = {
   d0: 0,
   dStandard: 0,
   dn: 0,
+  socket: 0,
   fub: 0,
   fnv: 0,
   boltListed: false,

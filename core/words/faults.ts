@@ -39,6 +39,7 @@ export const faultSentences: Readonly<Record<string, string>> = {
   'section-impossible': '{field} of {given} cannot be with the other sizes; it must be {limit}.',
   'cope-too-deep': '{field} of {given} leaves nothing of the beam; it must be {limit}.',
   'hole-smaller-than-bolt': 'The hole of {given} is smaller than the bolt; it must be {limit}.',
+  'socket-below-nut': 'A socket of {given} does not go over the nut; it must be {limit}.',
   'hole-outside-web': '{field} of {given} puts a hole over the edge of the web; it must be {limit}.',
   'hole-below-web': '{field} of {given} puts the last hole over the lower edge of the web; it must be {limit}.',
   'hole-outside-plate': '{field} of {given} puts a hole over the edge of the plate; it must be {limit}.',

@@ -52,7 +52,9 @@ export const coverageUnder = (standard: Standard, kind: Joint['kind']): Record<s
   const random = fc
     .sample(plausibleJoint, { numRuns: SAMPLES, seed: SEED })
     .map((one) => jointEndOf({ ...one, standard: standard.id }, kind) as Record<string, unknown>);
-  const good = goodEndsUnder(standard).flatMap(({ end }) => asKind(end, kind) ?? []);
+  const good = goodEndsUnder(standard)
+    .map(({ end }) => asKind(end, kind))
+    .filter((end) => end !== undefined);
   const best: Record<string, Coverage> = {};
   for (const end of [...good, ...random].flatMap((one) => [told(one), { ...one, options: {} }])) {
     const outcome = checkEnd(end);

@@ -1,37 +1,41 @@
-import type { Facts } from '../../end/facts.ts';
-import { type Gate, singleColumn, singleRow } from '../../end/gates.ts';
-import { flag, given, h, leg, n, p, q, r, tf, y1, z1 } from '../../end/given.ts';
-import { minus, over, plus, step, times } from '../../formula/tree.ts';
+import { type Gate, noSupportBolts, noWebHoles, singleColumn, singleRow } from '../../end/gates.ts';
+import { flag, given, h, leg, n, p, q, r, supportBolts, tf, tp, tw, y1, yp, z1 } from '../../end/given.ts';
+import { minus, over, plus, step, type Tree, times } from '../../formula/tree.ts';
 import { wrenchRoom } from '../../steel/wrenchRoom.ts';
+import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
+import { bottomCut, headsApart, supportBottomCut, supportTopCut, topCut } from './wrenchGates.ts';
 
 /** Practice, no clause: an end without room for the wrench is referred, never failed, for another tool may do. */
 const source = { clause: 'practice', basis: 'practice' } as const;
 
-const socket = given('D_w', '1,0', (f) => wrenchRoom(f.d).socket);
-const spare = given('s_w', '1,0', (f) => wrenchRoom(f.d).spare);
-const corners = given('e_n', '1,0', (f) => wrenchRoom(f.d).corners);
-
-const toFace = step('R_w', plus(over(socket, 2), spare), source, 'half the socket and room beside it');
-const toBolt = step('p_w', plus(toFace, over(corners, 2)), source, 'past head or nut of the next bolt');
-
-/** mm: sizes that meet in inches meet in mm. */
-const NOISE = 1e-9;
-
-/** A cope of this length and depth leaves no flange beside the wrench of any bolt. */
-const cutBack = ({ eEnd, m, q, tf, r, d }: Facts, length: number, depth: number): boolean => {
-  const { socket, spare } = wrenchRoom(d);
-  return depth >= tf + r - NOISE && length >= eEnd + (m - 1) * q + socket / 2 + spare - NOISE;
+const inWeb = {
+  socket: given('D_w', '1,0', (f) => f.socket),
+  spare: given('s_w', '1,0', (f) => wrenchRoom(f.d).spare),
+  corners: given('e_n', '1,0', (f) => wrenchRoom(f.d).corners),
 };
-const topCut: Gate = {
-  when: flag('', (f) => cutBack(f, f.ct, f.dt), 'the top flange cut back past the wrench'),
-  reason: 'flange-cut-back',
+const inSupport = {
+  socket: given('D_w,s', '1,0', (f) => f.supportBolts.socket),
+  spare: given('s_w,s', '1,0', (f) => wrenchRoom(f.supportBolts.d).spare),
+  corners: given('e_n,s', '1,0', (f) => wrenchRoom(f.supportBolts.d).corners),
 };
-const bottomCut: Gate = {
-  when: flag('', (f) => cutBack(f, f.cb, f.db), 'the bottom flange cut back past the wrench'),
-  reason: 'flange-cut-back',
+
+/** From a bolt's axis: to a face beside it, and to the next bolt. mm */
+const roomOf = ({ socket, spare, corners }: typeof inWeb) => {
+  const toFace = step('R_w', plus(over(socket, 2), spare), source, 'half the socket and room beside it');
+  return { toFace, toBolt: step('p_w', plus(toFace, over(corners, 2)), source, 'past head or nut of the next bolt') };
 };
-const noWeld: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'no-weld' };
+const web = roomOf(inWeb);
+const support = roomOf(inSupport);
+
+const noFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'no-weld' };
+const cleatsBothSides: Gate = { when: flag('', (f) => f.k > 1, 'a pair of cleats'), reason: 'pair-of-cleats' };
+const noCleat: Gate = { when: flag('', (f) => f.legWeb === 0, 'no cleat'), reason: 'no-cleat' };
+const cleat: Gate = { when: flag('', (f) => f.legWeb > 0, 'a cleat'), reason: 'cleats' };
+const oneSupportRow: Gate = {
+  when: flag('', (f) => f.supportBolts.n < 2, 'one row of support bolts'),
+  reason: 'single-row',
+};
 
 const root = plus(tf, r);
 const toTop = step('y_w', minus(y1, root), source, 'from the first row to the root of the top flange');
@@ -42,21 +46,67 @@ const toBottom = step(
   'from the last row to the root of the bottom flange',
 );
 const toWeld = step('x_w', minus(z1, leg), source, 'from the first column to the toe of the weld');
+const toOtherLeg = step('x_w', minus(z1, tp), source, 'from the first column to the leg on the support');
+
+const firstRow = plus(yp, supportBolts.eTop);
+const supportToTop = step('y_w', minus(firstRow, root), source, 'from the first row to the root of the top flange');
+const supportToBottom = step(
+  'y_w',
+  minus(h, plus(firstRow, times(minus(supportBolts.n, 1), supportBolts.p), tf, r)),
+  source,
+  'from the last row to the root of the bottom flange',
+);
+const beside: Tree<Length> = over(minus(supportBolts.cc, tw), 2);
+const toWebLeg = step('x_w', minus(beside, tp), source, 'from the line to the leg on the web');
+const toWebWeld = step('x_w', minus(beside, leg), source, 'from the line to the weld along the web');
+/** Nut, washer and tail: common practice, from memory, on either side. */
+const projection = step(
+  'l_n',
+  times(
+    1.3,
+    given('d', '1,0', (f) => f.d),
+  ),
+  source,
+  'nut, washer and tail of a web bolt',
+);
+const toHeads = step('x_w', minus(toWebLeg, projection), source, 'from the line to the nuts of the web bolts');
 
 /**
  * Room for head, washer, nut and wrench about every bolt, across its axis, mm: to the beam's flanges where these are not cut back, to the
- * support on the web's side and past the weld on the plate's, and to the next bolt. Along its axis the space is taken to be open: a column's
- * flanges or a beam opposite are not looked at. Bolts M12 to M36, 1/2 to 1-1/4 in.
+ * support or to the cleat's other leg, past welds and the nuts of the other bolts, and to the next bolt. Along its axis the space is taken
+ * to be open: a column's flanges or a beam opposite are not looked at. Bolts M12 to M36, 1/2 to 1-1/4 in.
  */
 export const fitWrench: FitRule = {
   source,
   breach: 'refer',
   parts: [
-    { of: 'top flange', given: toTop, least: toFace, off: [topCut] },
-    { of: 'bottom flange', given: toBottom, least: toFace, off: [bottomCut] },
-    { of: 'support, web side', given: z1, least: toFace },
-    { of: 'support, plate side', given: toWeld, least: toFace, off: [noWeld] },
-    { of: 'rows', given: p, least: toBolt, off: [singleRow] },
-    { of: 'columns', given: q, least: toBolt, off: [singleColumn] },
+    { of: 'top flange', given: toTop, least: web.toFace, off: [noWebHoles, topCut] },
+    { of: 'bottom flange', given: toBottom, least: web.toFace, off: [noWebHoles, bottomCut] },
+    { of: 'support, web side', given: z1, least: web.toFace, off: [noWebHoles, cleatsBothSides] },
+    { of: 'support, plate side', given: toWeld, least: web.toFace, off: [noFinPlate] },
+    { of: 'support leg', given: toOtherLeg, least: web.toFace, off: [noWebHoles, noCleat] },
+    { of: 'rows', given: p, least: web.toBolt, off: [noWebHoles, singleRow] },
+    { of: 'columns', given: q, least: web.toBolt, off: [noWebHoles, singleColumn] },
+    {
+      of: 'support bolts, top flange',
+      given: supportToTop,
+      least: support.toFace,
+      off: [noSupportBolts, supportTopCut],
+    },
+    {
+      of: 'support bolts, bottom flange',
+      given: supportToBottom,
+      least: support.toFace,
+      off: [noSupportBolts, supportBottomCut],
+    },
+    { of: 'support bolts, web leg', given: toWebLeg, least: support.toFace, off: [noSupportBolts, noCleat] },
+    {
+      of: 'support bolts, web bolts',
+      given: toHeads,
+      least: support.toFace,
+      off: [noSupportBolts, noWebHoles, headsApart],
+    },
+    { of: 'support bolts, web', given: toWebWeld, least: support.toFace, off: [noSupportBolts, cleat] },
+    { of: 'support bolts, rows', given: supportBolts.p, least: support.toBolt, off: [noSupportBolts, oneSupportRow] },
   ],
 };

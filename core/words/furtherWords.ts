@@ -14,10 +14,10 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'three-in-line': 'three bolts or more in line',
     'stocky-web': 'the web yields before it buckles in shear',
     'slender-web': 'the web buckles before it yields in shear',
-    'support-flange': "fixed to a column's flange, which this does not shear",
-    'support-not-told': 'thickness or grade of the support is not told',
     'slender-cut': 'the cut web may buckle before it yields in shear',
     'block-as-clause': 'the clause as it stands over-predicts such ends: it may not be what fails first',
+    'one-line': 'one line of bolts, whose arm counts',
+    'one-line-opposite': 'one cleat alone, with a beam on the other side of the same web',
     'grip-too-long': 'the grip is longer than 8 d',
     'short-weld': 'without a leg at each end the weld is shorter than four legs',
     'thin-throat': 'the throat is below 3 mm',
@@ -47,6 +47,16 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'radius-not-stated': 'the radius is not stated',
     'bolts-first': 'the plies are too thick for the bolts to plough',
     ploughing: 'the bolts plough a thin ply before they break',
+    'one-cleat': 'the bolts of one cleat stand beside the web: the rules have pairs and end plates only',
+    'cleats-only': 'a rule for cleats',
+    'end-plates-only': 'a rule for end plates',
+    'plates-only': 'a rule for plates beside the web',
+    'plates-and-cleats': 'not asked of a web bolted to a ply',
+    'bolted-to-support': 'bolted to the support',
+    'welded-support-leg': 'no rule says how a cleat welded to its support turns with the end',
+    'tie-covered': 'a tie force is covered for this joint',
+    'bolts-near-web': 'the support bolts stand too near the web for the rule',
+    'fills-setback': 'the end plate fills the setback',
   },
   notes: {
     'conventional-plate':
@@ -62,7 +72,8 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'parallel-flanges': 'The flanges are taken as parallel, as given.',
     'half-tension-plane':
       'With two columns or more inside the notch half of the tension plane counts in the block of the web, below the clause: tests found such ends over-predicted. Option web-block: standard takes the clause as it stands.',
-    'tie-in-web-only': 'Under the tie force bolts and web are checked; plate, weld and support are not.',
+    'tie-in-web-only':
+      'Under the tie force the bolts through the web and the web are checked; plate or cleat, weld, and the support with its bolts are not.',
     'joint-guide':
       'Joint guide 2008: Steel Buildings in Europe, Multi-Storey Steel Buildings, Part 5. Clauses 1-1, 1-5 and 1-8: parts of EN 1993.',
     'notch-in-buckling':
@@ -70,6 +81,7 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'bolts-govern': 'The bolts give before plate and web bear: the end has little ductility.',
     'guide-spacing': 'The joint guide advises edge and end distances of 2 d and a pitch of 2.5 d; some are less here.',
     'tie-support': 'Under the tie force the support itself, its web in bending, is not checked.',
+    'leg-weld-full': "The weld of a cleat's leg along the web is taken as full size to the ends of its returns.",
     'two-columns-ut':
       'U_t 0.3 for two bolt columns is from memory of the standard; for the plate it is taken as for the web, by judgement.',
     'three-columns-ut': 'For three bolt columns or more no value of U_t is published: 0.3, that of two, was used.',

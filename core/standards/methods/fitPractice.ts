@@ -1,33 +1,6 @@
-import { type Gate, oneColumn, uncoped } from '../../end/gates.ts';
-import {
-  cb,
-  ct,
-  d,
-  d0,
-  db,
-  dt,
-  eBot,
-  eEnd,
-  eTop,
-  flag,
-  g,
-  h,
-  hp,
-  leg,
-  m,
-  n,
-  p,
-  q,
-  r,
-  rb,
-  rt,
-  support,
-  tf,
-  tp,
-  tw,
-  y1,
-} from '../../end/given.ts';
-import { atMost, constant, least, minus, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
+import { fullDepthPlate, type Gate, noWebHoles, uncoped } from '../../end/gates.ts';
+import { cb, ct, d0, db, dt, eEnd, flag, g, h, hp, m, q, r, rb, rt, support, tf, yp } from '../../end/given.ts';
+import { atMost, constant, minus, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
 
@@ -45,9 +18,9 @@ const outsideSupport: Gate = {
 
 /** Flange and root fillet. */
 const root = step('t_f + r', plus(tf, r), source);
-const plateTop = step('y_p', minus(y1, eTop), source, 'top of the plate');
-const plateFoot = step('y_q', minus(h, plus(y1, times(minus(n, 1), p), eBot)), source, 'foot of the plate, from below');
+const plateFoot = step('y_q', minus(h, plus(yp, hp)), source, 'foot of the plate, from below');
 
+/** Plate or cleat takes half of the clear web and stands between the fillets, or the cut edges. */
 export const fitPlateDepth: FitRule = {
   source,
   breach: 'refer',
@@ -56,9 +29,20 @@ export const fitPlateDepth: FitRule = {
       of: 'depth',
       given: hp,
       least: step('h_min', times(0.5, minus(h, times(2, plus(tf, r)))), source, 'half the clear web'),
+      off: [fullDepthPlate],
     },
-    { of: 'top', given: plateTop, least: pick([[flag('', (f) => f.dt > 0, 'coped above'), dt]], root) },
-    { of: 'bottom', given: plateFoot, least: pick([[flag('', (f) => f.db > 0, 'coped below'), db]], root) },
+    {
+      of: 'top',
+      given: yp,
+      least: pick([[flag('', (f) => f.dt > 0, 'coped above'), dt]], root),
+      off: [fullDepthPlate],
+    },
+    {
+      of: 'bottom',
+      given: plateFoot,
+      least: pick([[flag('', (f) => f.db > 0, 'coped below'), db]], root),
+      off: [fullDepthPlate],
+    },
   ],
 };
 
@@ -69,8 +53,8 @@ const copeLength = (past: Tree<Length>): FitRule => {
     source,
     breach: 'refer',
     parts: [
-      { of: 'top', given: ct, least, off: [uncoped, noTop] },
-      { of: 'bottom', given: cb, least, off: [uncoped, noBottom] },
+      { of: 'top', given: ct, least, off: [noWebHoles, uncoped, noTop] },
+      { of: 'bottom', given: cb, least, off: [noWebHoles, uncoped, noBottom] },
     ],
   };
 };
@@ -156,26 +140,12 @@ export const fitCopeClearance: FitRule = {
   ],
 };
 
+const fillsSetback: Gate = { when: flag('an end plate', (f) => f.bp > 0), reason: 'fills-setback' };
+
 export const fitSetback: FitRule = {
   source,
   breach: 'refer',
-  parts: [{ of: '', given: g, least: mm(8), most: mm(20) }],
+  parts: [{ of: '', given: g, least: mm(8), most: mm(20), off: [fillsSetback] }],
 };
 
-const thinner = pick([[oneColumn, least(tp, tw)]], most(tp, tw));
-const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate'), reason: 'fin-plates-only' };
-
-/** The end turns by bolts ploughing the thinner ply (both plies from two columns up), and the weld outlasts the plate. */
-export const fitRotation: FitRule = {
-  source,
-  breach: 'refer',
-  parts: [
-    {
-      of: 'ply',
-      given: step('t', thinner, source),
-      most: step('t_max', plus(over(d, 2), mm(2)), source),
-      off: [notFinPlate],
-    },
-    { of: 'weld leg', given: leg, least: step('s_min', times(0.625, tp), source), off: [notFinPlate] },
-  ],
-};
+export { fitRotation } from './fitRotation.ts';

@@ -1,8 +1,8 @@
-import type { Gate } from '../../end/gates.ts';
-import { flag, V } from '../../end/given.ts';
-import type { Source, Tree } from '../../formula/tree.ts';
+import { fullDepthPlate, type Gate } from '../../end/gates.ts';
+import { flag, V, Vo } from '../../end/given.ts';
+import { minus, not, plus, type Source, step, type Tree } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
-import type { StrengthRule } from '../standard.ts';
+import type { StrengthRule, Way } from '../standard.ts';
 
 const noSupport: Gate = { when: flag('no support is given', (f) => f.supportKind === 'none'), reason: 'no-support' };
 const columnFlange: Gate = {
@@ -14,8 +14,35 @@ const notTold: Gate = {
   reason: 'support-not-told',
 };
 
-/** Shear of the web that carries the joint, on both sides of the plate: N; the webs of beams and columns, not a column's flange. */
+/** A beam on the other side hangs on the same web; a column's two flanges are not the same. */
+export const sharedWeb = flag(
+  'a beam on the other side of the same web',
+  (f) => f.Vo > 0 && (f.supportKind === 'beam-web' || f.supportKind === 'column-web'),
+);
+const shared: Gate = { when: sharedWeb, reason: 'beam-opposite' };
+const alone: Gate = { when: not(sharedWeb), reason: 'no-beam-opposite' };
+
+/**
+ * What a web of the support carries, N, against V or, where a beam on the other side hangs on the same web, against V + V_o: its reaction is
+ * taken as given, so that V may grow to what it leaves.
+ */
+export const onSupport = (way: Omit<Way, 'symbol' | 'demand' | 'load'> & { resistance: Tree<Force> }): Way[] => [
+  { ...way, symbol: 'V', load: 'V', demand: V, off: [...(way.off ?? []), shared] },
+  {
+    ...way,
+    symbol: 'V + V_o',
+    load: 'V',
+    demand: step('V_s', plus(V, Vo), undefined, 'with the beam on the other side'),
+    failsAt: step('V_fail', minus(way.resistance, Vo), undefined, 'what the beam on the other side leaves'),
+    off: [...(way.off ?? []), alone],
+  },
+];
+
+/**
+ * Shear of the web that carries the joint, on both sides of it: N; the webs of beams and columns, not a column's flange. A beam on the other
+ * side of that web is added.
+ */
 export const supportShear = (source: Source, resistance: Tree<Force>): StrengthRule => ({
   source,
-  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance, off: [noSupport, columnFlange, notTold] }],
+  ways: onSupport({ of: '', resistance, off: [noSupport, columnFlange, notTold], limits: [fullDepthPlate] }),
 });

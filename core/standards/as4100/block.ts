@@ -1,6 +1,6 @@
-import { copeLimits, intactFlange, oneColumn } from '../../end/gates.ts';
-import { flag, fup, fyp, V } from '../../end/given.ts';
-import { type Block, plateBlock as plate, webBlock as web } from '../../end/tearPaths.ts';
+import { copeLimits, fullDepthPlate, intactFlange, noSupportBolts, noWebHoles, oneColumn } from '../../end/gates.ts';
+import { flag, fup, fyp, k, V } from '../../end/given.ts';
+import { type Block, plateBlock as plate, supportBlock, webBlock as web } from '../../end/tearPaths.ts';
 import { all, constant, least, not, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force, Pure, Stress } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -41,8 +41,42 @@ export const webBlock: StrengthRule = {
   ],
 };
 
+const inPlate = pick([[all(oneColumn, not(plateUneven)), even]], uneven);
+const ofPlate = blockShear(plate, fyp, fup, inPlate);
+/** Beside one line of support bolts: one column. */
+const ofLine = blockShear(supportBlock, fyp, fup, pick([[plateUneven, uneven]], even));
+
 /** Block tearing of the plate: k_bs 1.0 for one column (the component rule of ASI Handbook 1), 0.5 for more. */
 export const plateBlock: StrengthRule = {
+  source,
+  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: ofPlate }],
+};
+
+/** Block tearing of the cleats: all web legs as plates, all support legs beside their line of bolts. */
+export const cleatBlock: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: 'web leg',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('k φR_bs', times(k, ofPlate), source),
+      off: [noWebHoles],
+    },
+    {
+      of: 'support leg',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('k φR_bs', times(k, ofLine), source),
+      off: [noSupportBolts],
+    },
+  ],
+};
+
+/** Block tearing of the end plate, beside both lines of bolts. */
+export const endPlateBlock: StrengthRule = {
   source,
   ways: [
     {
@@ -50,7 +84,8 @@ export const plateBlock: StrengthRule = {
       symbol: 'V',
       load: 'V',
       demand: V,
-      resistance: blockShear(plate, fyp, fup, pick([[all(oneColumn, not(plateUneven)), even]], uneven)),
+      resistance: step('2 φR_bs', times(2, ofLine), source),
+      limits: [fullDepthPlate],
     },
   ],
 };

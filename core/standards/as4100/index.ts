@@ -16,24 +16,28 @@ import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { supportShear } from '../methods/supportShear.ts';
 import { noRule, type Standard } from '../standard.ts';
-import { plateBearing, webBearing, webTearout } from './bearing.ts';
-import { plateBlock, webBlock } from './block.ts';
-import { boltShear } from './bolts.ts';
+import { cleatBearing, plateBearing, webBearing, webTearout } from './bearing.ts';
+import { cleatBlock, endPlateBlock, plateBlock, webBlock } from './block.ts';
+import { boltShear, supportBoltShear } from './bolts.ts';
+import { cleatBending, cleatGrossShear } from './cleat.ts';
 import { copeBending } from './copeBending.ts';
 import { copeShear } from './copeShear.ts';
+import { endPlateGrossShear, endPlateWebShear } from './endPlate.ts';
 import { E, factors, phi } from './factors.ts';
 import { fitCopeRadius, fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitClauses.ts';
 import { fyb } from './given.ts';
 import { materials } from './materials.ts';
 import { plateBending, plateGrossShear } from './plate.ts';
+import { supportBearing } from './supportBearing.ts';
 import { webTie } from './tie.ts';
 import { verified } from './verified.ts';
 import { fullShear, webGrossShear } from './webGrossShear.ts';
 import { weld } from './weld.ts';
+import { weldWeb } from './weldWeb.ts';
 
 const { stressFull, stressCope } = elasticStress({ clause: 'elastic', basis: 'practice' });
 const shear = { clause: '5.11.3', basis: 'seen' } as const;
-const structuralWeld = flag('welds of category SP', (f) => f.kind === 'fin-plate' && f.options.weld === 'SP');
+const structuralWeld = flag('welds of category SP', (f) => f.weldTo !== 'none' && f.options.weld === 'SP');
 const always = flag('every end', () => true);
 
 /** AS 4100:2020, steel structures. Coped ends after ASI Design Guide Handbook 1 (Hogan 2007), as the standard has no clause for them. */
@@ -73,22 +77,22 @@ export const as4100: Standard = {
     'plate-bending': plateBending,
     'plate-buckling': plateBuckling((Q, fy, Z) => times(phi, Q, fy, Z)),
     weld,
-    'cleat-bearing': noRule(),
-    'cleat-tearout': noRule(),
-    'cleat-gross-shear': noRule(),
+    'cleat-bearing': cleatBearing,
+    'cleat-tearout': noRule('cleat-bearing'),
+    'cleat-gross-shear': cleatGrossShear,
     'cleat-net-shear': noRule(),
-    'cleat-block': noRule(),
-    'cleat-bending': noRule(),
+    'cleat-block': cleatBlock,
+    'cleat-bending': cleatBending,
     'cleat-buckling': noRule(),
-    'endplate-bearing': noRule(),
-    'endplate-tearout': noRule(),
-    'endplate-gross-shear': noRule(),
+    'endplate-bearing': noRule('support-bearing'),
+    'endplate-tearout': noRule('support-bearing'),
+    'endplate-gross-shear': endPlateGrossShear,
     'endplate-net-shear': noRule(),
-    'endplate-block': noRule(),
-    'endplate-web-shear': noRule(),
-    'weld-web': noRule(),
-    'support-bolt-shear': noRule(),
-    'support-bearing': noRule(),
+    'endplate-block': endPlateBlock,
+    'endplate-web-shear': endPlateWebShear,
+    'weld-web': weldWeb,
+    'support-bolt-shear': supportBoltShear,
+    'support-bearing': supportBearing,
     'support-shear': supportShear(
       shear,
       step('φV_c', times(2, 0.5, phi, fys, ts, hp), shear, 'both sides of the plate'),

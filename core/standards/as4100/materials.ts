@@ -20,12 +20,15 @@ const boltStrength = (propertyClass: string, diameter: number): number | undefin
   }
 };
 
+const rolled = steelsOf(australianSections, readAs);
+
 /**
- * Materials of AS 4100:2020: sections of AS/NZS 3679.1, plates of AS/NZS 3678, bolts of property classes 4.6, 8.8 and 10.9 in every
+ * Materials of AS 4100:2020: sections and cleats of AS/NZS 3679.1, plates of AS/NZS 3678, bolts of property classes 4.6, 8.8 and 10.9 in every
  * category alike, holes 2 mm (up to M24) or 3 mm wider than the bolt; no allowance in net areas (9.1.10).
  */
 export const materials: Materials = {
-  sections: steelsOf(australianSections, readAs),
+  sections: rolled,
+  cleats: rolled,
   plates: steelsOf(australianPlates, readAs),
   webStrengthAt: ({ tw }) => tw,
   boltGrades: [...['4.6', '8.8', '10.9'], ...['4.6/S', '8.8/S', '8.8/TB', '8.8/TF', '10.9/S', '10.9/TB', '10.9/TF']],

@@ -1,11 +1,12 @@
 import { N } from '../../end/boltGroup.ts';
-import { type Limit, noTieForce, singleRow } from '../../end/gates.ts';
+import { type Limit, noTieForce, noWebHoles, singleRow } from '../../end/gates.ts';
 import { dn, ho, n, T, tw } from '../../end/given.ts';
 import { webPulled } from '../../end/tearPaths.ts';
 import { least, minus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
+import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
-import { bearingOn, tearing, webAlong } from './bearing.ts';
+import { webPull } from './bearing.ts';
 import { blockShear, even } from './block.ts';
 import { boltLimits, boltResistance } from './bolts.ts';
 import { phi } from './factors.ts';
@@ -20,7 +21,7 @@ const way = (of: string, resistance: Tree<Force>, off: Way['off'] = [], limits: 
   load: 'T',
   demand: T,
   resistance,
-  off: [noTieForce, ...off],
+  off: [noTieForce, noWebHoles, ...off],
   limits,
 });
 
@@ -29,14 +30,15 @@ const net = step('φN_u', times(phi, 0.85, fu, tw, minus(ho, times(n, dn))), mem
 
 /**
  * Tie force along the beam, acting alone, in bolts and web: bolts in shear shared evenly, bearing and tear-out along the rows, the block
- * pulled out to the beam's end, the web in tension. Plate, weld and support are not covered.
+ * pulled out to the beam's end, the web in tension. Plate, cleat, weld and support are not covered; a welded leg or an end plate refers.
  */
 export const webTie: StrengthRule = {
   source,
   ways: [
     way('bolts', step('φT', times(N, boltResistance), source), [], boltLimits),
-    way('bearing, web', step('φT', times(N, least(bearingOn(tw, fu), tearing(webAlong, tw, fu))), source)),
+    way('bearing, web', step('φT', times(N, webPull), source)),
     way('block, web', blockShear(webPulled, fyw, fu, even), [singleRow]),
     { ...way('net tension, web', step('φN_t', least(gross, net), member)), source: member },
+    tieNotCovered,
   ],
 };

@@ -1,8 +1,9 @@
 import { checkText, END_MOST_BYTES, lineOf } from '../checkText.ts';
+import { reportJson } from '../json/reportJson.ts';
 import { linesOf } from '../linesOf.ts';
 import { faulty, problem } from './problem.ts';
 import { readBody } from './readBody.ts';
-import { json, lines } from './reply.ts';
+import { lines, writtenJson } from './reply.ts';
 import type { Handler } from './route.ts';
 
 /** Most bytes of many ends in one request, and most lines. */
@@ -40,5 +41,5 @@ export const postCheck: Handler = async (request, query, type) => {
   const body = await readBody(request, END_MOST_BYTES);
   if (body instanceof Response) return body;
   const outcome = checkText(body, { working });
-  return 'report' in outcome ? json(outcome.report) : faulty(outcome.faults);
+  return 'report' in outcome ? writtenJson(reportJson(outcome.report)) : faulty(outcome.faults);
 };

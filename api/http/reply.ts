@@ -32,7 +32,11 @@ export const reply = (
 /** Computed anew for each request, so never to be kept. */
 const fresh = { 'Cache-Control': 'no-store' } as const;
 
-export const json = (value: unknown): Response => reply(200, JSON.stringify(value), 'application/json', fresh);
+/** JSON that is written already. */
+export const writtenJson = (text: string | Uint8Array<ArrayBuffer>): Response =>
+  reply(200, text, 'application/json', fresh);
+
+export const json = (value: unknown): Response => writtenJson(JSON.stringify(value));
 
 export const pdf = (bytes: Uint8Array<ArrayBuffer>, name: string): Response =>
   reply(200, bytes, 'application/pdf', { ...fresh, 'Content-Disposition': `inline; filename="${name}"` });

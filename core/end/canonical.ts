@@ -1,12 +1,17 @@
+/** Signs that JSON writes as they are. */
+const plain = /^[ !#-[\]-~]*$/;
+
+const quoted = (text: string): string => (plain.test(text) ? `"${text}"` : JSON.stringify(text));
+
 /** JSON with sorted keys and without blanks: the same end always gives the same text. Absent values are left out. */
 export const canonicalJson = (value: unknown): string => {
+  if (typeof value === 'string') return quoted(value);
+  if (typeof value !== 'object' || value === null) return JSON.stringify(value);
   if (Array.isArray(value)) return `[${value.map((one) => canonicalJson(one ?? null)).join(',')}]`;
-  if (typeof value === 'object' && value !== null) {
-    const entries = Object.entries(value)
-      .filter(([, one]) => one !== undefined)
-      .sort(([a], [b]) => (a < b ? -1 : a > b ? 1 : 0))
-      .map(([key, one]) => `${JSON.stringify(key)}:${canonicalJson(one)}`);
-    return `{${entries.join(',')}}`;
+  let text = '';
+  for (const key of Object.keys(value).sort()) {
+    const one = (value as Readonly<Record<string, unknown>>)[key];
+    if (one !== undefined) text += `${text && ','}${quoted(key)}:${canonicalJson(one)}`;
   }
-  return JSON.stringify(value);
+  return `{${text}}`;
 };

@@ -9,23 +9,43 @@ export interface ShearPeak {
   readonly at: number;
 }
 
+const peaks = new WeakMap<Shape, ShearPeak>();
+
 /**
  * Where V Q/(I t) is largest in the web, root fillets included. The flange is left out: where the width jumps from flange to web the
  * formula speaks of no real stress. The peak stands at the centroid if that lies in the plain web; with the centroid in a flange or
- * among the fillets it stands in the fillets, found by halving to a rounding error. Where no web is left, the centroid is taken.
+ * among the fillets it stands in the fillets, found by halving to a rounding error. Where no web is left, the centroid is taken. Worked
+ * out once for each shape.
  */
 export const shearPeak = (shape: Shape): ShearPeak => {
+  const seen = peaks.get(shape);
+  if (seen !== undefined) return seen;
   const level = Math.min(Math.max(shape.centroid, shape.webTop), shape.webBottom);
   const it = webBandAt(shape, level);
   const at = it.factor < 0 ? peakInFillets(shape, it, level) : level;
-  return { perNewton: firstMoment(shape, at) / (shape.inertia * widthAt(it, at)), at };
+  const peak = { perNewton: firstMoment(shape, at) / (shape.inertia * widthAt(it, at)), at };
+  peaks.set(shape, peak);
+  return peak;
 };
 
-/** Points of the curve of V Q/(I t) down the shape, tau in MPa for the shear force V in N: a level where the width jumps stands twice. */
-export const shearProfile = (shape: Shape, V: number): [y: number, tau: number][] => {
+/** A level of the curve, mm; first moment above it, mm³; width there, mm. */
+interface Level {
+  readonly y: number;
+  readonly Q: number;
+  readonly t: number;
+}
+
+/** Both edges are free: what rounding leaves there is nothing. */
+const edge = (y: number): Level => ({ y, Q: 0, t: 1 });
+
+const curves = new WeakMap<Shape, readonly Level[]>();
+
+/** What the curve is drawn from whatever the shear force: worked out once for each shape. */
+const curveOf = (shape: Shape): readonly Level[] => {
+  const seen = curves.get(shape);
+  if (seen !== undefined) return seen;
   const peak = shearPeak(shape).at;
-  const points: [number, number][] = [];
-  const force = V / shape.inertia;
+  const curve: Level[] = [];
   // First moment above the band: carried down from band to band, so that no level sums the bands above it again.
   let above = 0;
   for (const it of bandsOf(shape)) {
@@ -36,13 +56,26 @@ export const shearProfile = (shape: Shape, V: number): [y: number, tau: number][
     for (const y of levels(it, top, bottom, peak, count)) {
       const part = moments(it, top, y);
       Q = above + shape.centroid * part.area - part.first;
-      // Both edges are free: what rounding leaves there is nothing.
-      const tau = y === shape.top || y === shape.bottom ? 0 : (force * Q) / widthAt(it, y);
-      const last = points.at(-1);
-      const same = last !== undefined && last[0] === y && Math.abs(last[1] - tau) <= 1e-9 * Math.abs(tau);
-      if (!same) points.push([y, tau]);
+      curve.push(y === shape.top || y === shape.bottom ? edge(y) : { y, Q, t: widthAt(it, y) });
     }
     above = Q;
+  }
+  curves.set(shape, curve);
+  return curve;
+};
+
+/** Points of the curve of V Q/(I t) down the shape, tau in MPa for the shear force V in N: a level where the width jumps stands twice. */
+export const shearProfile = (shape: Shape, V: number): [y: number, tau: number][] => {
+  const points: [number, number][] = [];
+  const force = V / shape.inertia;
+  let last = Number.NaN;
+  let lastTau = Number.NaN;
+  for (const { y, Q, t } of curveOf(shape)) {
+    const tau = (force * Q) / t;
+    if (last === y && Math.abs(lastTau - tau) <= 1e-9 * Math.abs(tau)) continue;
+    points.push([y, tau]);
+    last = y;
+    lastTau = tau;
   }
   return points;
 };
@@ -80,13 +113,17 @@ const levels = (it: Band, from: number, to: number, peak: number, count: number)
     ? [...steps(it, from, peak, count / 2), ...steps(it, peak, to, count / 2)]
     : steps(it, from, to, count);
 
+const angleAt = (it: Band, y: number): number => Math.asin(Math.max(-1, Math.min(1, (y - it.centre) / it.radius)));
+
 const steps = (it: Band, from: number, to: number, count: number): number[] => {
-  const angle = (y: number): number => Math.asin(Math.max(-1, Math.min(1, (y - it.centre) / it.radius)));
-  const between = (a: number, b: number, i: number): number => a + ((b - a) * i) / count;
-  return Array.from({ length: count + 1 }, (_, i) => {
-    if (i === 0) return from;
-    if (i === count) return to;
-    if (it.factor === 0) return between(from, to, i);
-    return it.centre + it.radius * Math.sin(between(angle(from), angle(to), i));
-  });
+  const arc = it.factor !== 0;
+  const start = arc ? angleAt(it, from) : from;
+  const whole = (arc ? angleAt(it, to) : to) - start;
+  const found = [from];
+  for (let i = 1; i < count; i++) {
+    const between = start + (whole * i) / count;
+    found.push(arc ? it.centre + it.radius * Math.sin(between) : between);
+  }
+  found.push(to);
+  return found;
 };

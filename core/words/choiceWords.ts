@@ -10,7 +10,12 @@ const choiceWords = (words: Words): Readonly<Record<string, Readonly<Record<stri
     'full-end-plate': 'end plate of the full depth',
     'web-bolts': 'web bolted to a ply',
   },
-  'support.kind': { 'beam-web': "beam's web" },
+  'joint.cleat.legs': {
+    bolted: 'both bolted',
+    'web-welded': 'web leg welded',
+    'support-welded': 'support leg welded',
+  },
+  'support.kind': { 'beam-web': "beam's web", 'column-flange': "column's flange", 'column-web': "column's web" },
 });
 
 /** A value of a field in plain words; the value itself where it has none. */

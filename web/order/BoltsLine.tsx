@@ -1,5 +1,6 @@
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { joinedIn } from '../state/joined.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { several } from './several.ts';
 import { Value } from './Value.tsx';
@@ -7,25 +8,30 @@ import { Value } from './Value.tsx';
 const rows = (count: string): string => (count === '1' ? 'row' : 'rows');
 const columns = (count: string): string => (count === '1' || count === '' ? 'column' : 'columns');
 
-const ClassValue = () => {
-  const path = 'joint.bolts.grade';
+const ClassValue = ({ path }: { readonly path: string }) => {
   const own = textOf(entry.value, `${path}.by`) === 'strength';
   return own ? <Value path={path} text="of own strength" /> : <Value path={path} missing="class?" />;
 };
 
-const Sentence = () => {
+/** So many rows of a bolt, at a pitch. */
+const Rows = ({ path }: { readonly path: string }) => (
+  <>
+    <Value path={`${path}.rows`} missing="how many?" /> {rows(textOf(entry.value, `${path}.rows`))} of{' '}
+    <Value path={`${path}.size`} missing="size?" /> <ClassValue path={`${path}.grade`} />
+    {several(`${path}.rows`) && (
+      <>
+        {' '}
+        at <Value path={`${path}.pitch`} missing="pitch?" />
+      </>
+    )}
+  </>
+);
+
+const InWeb = () => {
   const down = textOf(entry.value, 'joint.bolts.columns');
   return (
     <>
-      <Value path="joint.bolts.rows" missing="how many?" /> {rows(textOf(entry.value, 'joint.bolts.rows'))} of{' '}
-      <Value path="joint.bolts.size" missing="size?" /> <ClassValue />
-      {several('joint.bolts.rows') && (
-        <>
-          {' '}
-          at <Value path="joint.bolts.pitch" missing="pitch?" />
-        </>
-      )}{' '}
-      in <Value path="joint.bolts.columns" missing="1" /> {columns(down)}
+      <Rows path="joint.bolts" /> in <Value path="joint.bolts.columns" missing="1" /> {columns(down)}
       {several('joint.bolts.columns') && (
         <>
           {' '}
@@ -38,5 +44,28 @@ const Sentence = () => {
   );
 };
 
-/** The bolts through the web: size, class, pattern, place and holes. */
+const InSupport = () => (
+  <>
+    Into the support <Rows path="joint.supportBolts" />,{' '}
+    <Value path="joint.supportBolts.crossCentres" missing="how far?" /> apart across the web, first row{' '}
+    <Value path="joint.supportBolts.topEdge" missing="edge?" /> below the top.
+  </>
+);
+
+const Sentence = () => {
+  const { webBolts, supportBolts } = joinedIn(entry.value);
+  return (
+    <>
+      {webBolts && <InWeb />}
+      {supportBolts && (
+        <>
+          {webBolts && ' '}
+          <InSupport />
+        </>
+      )}
+    </>
+  );
+};
+
+/** The bolts through the web and into the support: size, class, pattern, place and holes. */
 export const BoltsLine = () => <OrderLine name="bolts" title="Bolts" sentence={<Sentence />} />;

@@ -3,6 +3,7 @@ import { Switch } from '../field/Switch.tsx';
 import { entry, words } from '../state/bench.ts';
 import { copes } from '../state/copes.ts';
 import { textOf } from '../state/entry.ts';
+import { joinedIn } from '../state/joined.ts';
 
 const Cope = ({ edge }: { readonly edge: 'top' | 'bottom' }) => {
   const title = `${edge === 'top' ? 'Top' : 'Bottom'} ${words.value.cope}`;
@@ -30,7 +31,7 @@ export const CutFields = () => (
   <>
     <Cope edge="top" />
     <Cope edge="bottom" />
-    <Field path="setback" label="Setback" />
+    {!joinedIn(entry.value).endPlate && <Field path="setback" label="Setback" />}
     <Proposed />
   </>
 );

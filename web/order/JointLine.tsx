@@ -1,10 +1,11 @@
 import { capital } from '../../core/words/capital.ts';
+import { choiceText } from '../../core/words/choiceWords.ts';
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { shown, unitAt } from '../state/fieldText.ts';
+import { type Joined, joinedIn } from '../state/joined.ts';
 import { isFault, readField } from '../state/readField.ts';
 import { GradeValue } from './GradeValue.tsx';
-import { isPly, plyPath } from './isPly.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { spokenSection } from './spokenSection.ts';
 import { Value } from './Value.tsx';
@@ -30,6 +31,19 @@ const Level = () => {
   );
 };
 
+const places: Readonly<Record<string, string>> = {
+  'beam-web': 'On the web of a',
+  'column-flange': 'On the flange of a column',
+  'column-web': 'On the web of a column',
+};
+
+const Opposite = () =>
+  textOf(entry.value, 'support.otherReaction') === '' ? null : (
+    <>
+      , a beam opposite with <Value path="support.otherReaction" /> {unitAt('support.otherReaction')}
+    </>
+  );
+
 const Support = () => {
   if (textOf(entry.value, 'support') !== 'on') {
     return (
@@ -39,32 +53,107 @@ const Support = () => {
       </>
     );
   }
+  const kind = textOf(entry.value, 'support.kind') || 'beam-web';
   const section = textOf(entry.value, 'support.section');
+  const thickness = textOf(entry.value, 'support.thickness');
   return (
     <>
       {' '}
-      On the web of a{' '}
-      <Value path="support.section" missing="section?" {...(section !== '' && { text: spokenSection(section) })} />,{' '}
-      <Level />.
+      {places[kind] ?? 'On a'}{' '}
+      {section === '' && thickness !== '' ? (
+        <>
+          part <Value path="support.thickness" /> thick
+        </>
+      ) : (
+        <Value path="support.section" missing="section?" {...(section !== '' && { text: spokenSection(section) })} />
+      )}
+      {kind === 'beam-web' && (
+        <>
+          , <Level />
+        </>
+      )}
+      <Opposite />.
+    </>
+  );
+};
+
+const Steel = ({ path }: { readonly path: string }) => (
+  <>
+    <Value path={`${path}.thickness`} missing="thickness?" /> thick, <GradeValue path={`${path}.grade`} />
+  </>
+);
+
+const Edges = ({ path, free }: { readonly path: string; readonly free: boolean }) => (
+  <>
+    , edges <Value path={`${path}.topEdge`} missing="top?" />
+    {free ? ', ' : ' and '}
+    <Value path={`${path}.bottomEdge`} missing="bottom?" />
+    {free && (
+      <>
+        {' '}
+        and <Value path={`${path}.edge`} missing="free?" />
+      </>
+    )}
+  </>
+);
+
+/** Top and depth of a fitting that no web bolt places. */
+const Placed = ({ path }: { readonly path: string }) => (
+  <>
+    , <Value path={`${path}.depth`} missing="depth?" /> deep, its top <Value path={`${path}.top`} missing="level?" />{' '}
+    down
+  </>
+);
+
+const sides: Readonly<Record<string, string>> = {
+  'joint.weld': '',
+  'joint.webWeld': ' to the web',
+  'joint.cleat.webWeld': ' round the leg on the web',
+  'joint.cleat.supportWeld': ' to the support',
+};
+
+const Weld = ({ joined: { weld, kind } }: { readonly joined: Joined }) => (
+  <>
+    ; {kind === 'single-cleat' ? 'a' : 'two'} <Value path={`${weld}.leg`} missing="leg?" /> {unitAt(`${weld}.leg`)}{' '}
+    {kind === 'single-cleat' ? 'fillet' : 'fillets'}
+    {sides[weld]}
+  </>
+);
+
+const Fitting = ({ joined }: { readonly joined: Joined }) => {
+  const { fitting, cleat, endPlate, webBolts } = joined;
+  if (endPlate) {
+    return (
+      <>
+        <Value path="joint.plate.width" missing="width?" /> wide, <Steel path={fitting} />
+        <Placed path={fitting} />
+      </>
+    );
+  }
+  if (!cleat) {
+    return (
+      <>
+        <Steel path={fitting} />
+        <Edges path={fitting} free />
+      </>
+    );
+  }
+  return (
+    <>
+      <Value path="joint.cleat.legWeb" missing="leg?" /> on the web by{' '}
+      <Value path="joint.cleat.legSupport" missing="leg?" />, <Steel path={fitting} />
+      {webBolts ? <Edges path={fitting} free={false} /> : <Placed path={fitting} />}
     </>
   );
 };
 
 const Sentence = () => {
-  const ply = plyPath();
+  const joined = joinedIn(entry.value);
   return (
     <>
-      <Value path="joint.kind" text={isPly() ? 'Web bolted to a ply' : capital(words.value.finPlate)} />{' '}
-      <Value path={`${ply}.thickness`} missing="thickness?" /> thick, <GradeValue path={`${ply}.grade`} />, edges{' '}
-      <Value path={`${ply}.topEdge`} missing="top?" />, <Value path={`${ply}.bottomEdge`} missing="bottom?" /> and{' '}
-      <Value path={`${ply}.edge`} missing="free?" />
-      {isPly() ? (
-        '.'
-      ) : (
-        <>
-          ; two <Value path="joint.weld.leg" missing="leg?" /> {unitAt('joint.weld.leg')} fillets.
-        </>
-      )}
+      <Value path="joint.kind" text={capital(choiceText(words.value, 'joint.kind', joined.kind))} />{' '}
+      <Fitting joined={joined} />
+      {joined.weld !== '' && <Weld joined={joined} />}.
       <Support />
     </>
   );

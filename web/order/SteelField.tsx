@@ -9,6 +9,7 @@ const strengths = [
 /** A steel by its grade in the standard, or by its strengths. */
 export const SteelField = ({ path }: { readonly path: string }) => {
   const materials = standard.value?.materials;
-  const steels = path.startsWith('joint.') ? materials?.plates : materials?.sections;
+  const plates = path.startsWith('joint.cleat') ? (materials?.cleats ?? materials?.plates) : materials?.plates;
+  const steels = path.startsWith('joint.') ? plates : materials?.sections;
   return <GradeField path={path} label="Grade" names={steels?.grades ?? []} strengths={strengths} />;
 };

@@ -1,5 +1,6 @@
 import { type Fault, fault } from '../../core/end/fault.ts';
 import { type Entry, textOf } from './entry.ts';
+import { fittingSizes, type Joined, joinedIn, weldSizes } from './joined.ts';
 import { isFault, readField } from './readField.ts';
 
 /** The end that an entry describes, as the JSON of a file, and the fields whose text could not be read. */
@@ -62,34 +63,50 @@ const beam = (reader: EntryReader): Tree => ({
   grade: reader.grade('beam.grade'),
 });
 
-const bolts = (reader: EntryReader): Tree => {
-  const at = 'joint.bolts';
+const bolts = (reader: EntryReader, at: string, pattern: readonly string[]): Tree => ({
+  size: reader.words(`${at}.size`),
+  grade: reader.grade(`${at}.grade`, ['fu']),
+  threads: reader.words(`${at}.threads`),
+  ...reader.numbers(at, pattern),
+  holes: reader.words(`${at}.holes`),
+  ...reader.numbers(at, ['hole', 'socket']),
+});
+
+const fitting = (reader: EntryReader, joined: Joined): Tree => {
+  const at = joined.fitting;
+  const weld = joined.weld ? reader.numbers(joined.weld, weldSizes(joined)) : undefined;
   return {
-    size: reader.words(`${at}.size`),
-    grade: reader.grade(`${at}.grade`, ['fu']),
-    threads: reader.words(`${at}.threads`),
-    ...reader.numbers(at, ['rows', 'columns', 'pitch', 'gauge']),
-    holes: reader.words(`${at}.holes`),
-    hole: reader.number(`${at}.hole`),
+    thickness: reader.number(`${at}.thickness`),
+    grade: reader.grade(`${at}.grade`),
+    ...reader.numbers(at, fittingSizes(joined)),
+    ...(joined.cleat && joined.weld && { [joined.weld.slice(at.length + 1)]: weld }),
   };
 };
 
-const ply = (reader: EntryReader, at: string): Tree => ({
-  thickness: reader.number(`${at}.thickness`),
-  grade: reader.grade(`${at}.grade`),
-  ...reader.numbers(at, ['topEdge', 'bottomEdge', 'edge']),
-});
+/** Last part of a path. */
+const last = (path: string): string => path.slice(path.lastIndexOf('.') + 1);
 
 const joint = (reader: EntryReader): Tree => {
-  const kind = reader.words('joint.kind');
+  const joined = joinedIn(reader.entry);
+  const { cleat, weld, webBolts, supportBolts } = joined;
   return {
-    kind,
-    ...reader.numbers('joint', ['firstRow', 'endDistance']),
-    bolts: bolts(reader),
-    ...(kind === 'web-bolts'
-      ? { ply: ply(reader, 'joint.ply') }
-      : { plate: ply(reader, 'joint.plate'), weld: reader.numbers('joint.weld', ['leg', 'electrode']) }),
+    kind: reader.words('joint.kind'),
+    ...(webBolts && {
+      ...reader.numbers('joint', ['firstRow', 'endDistance']),
+      bolts: bolts(reader, 'joint.bolts', ['rows', 'columns', 'pitch', 'gauge']),
+    }),
+    ...(supportBolts && {
+      supportBolts: bolts(reader, 'joint.supportBolts', ['rows', 'pitch', 'crossCentres', 'topEdge']),
+    }),
+    [last(joined.fitting)]: fitting(reader, joined),
+    ...(weld !== '' && !cleat && { [last(weld)]: reader.numbers(weld, weldSizes(joined)) }),
   };
+};
+
+/** An end plate fills the setback, so that none need be typed. */
+const setback = (reader: EntryReader): number | undefined => {
+  const given = reader.number('setback');
+  return given === undefined && joinedIn(reader.entry).endPlate ? reader.number('joint.plate.thickness') : given;
 };
 
 const support = (reader: EntryReader): Tree | undefined =>
@@ -157,7 +174,7 @@ export const endOf = (entry: Entry): EntryRead => {
     beam: beam(reader),
     top: cope(reader, 'top'),
     bottom: cope(reader, 'bottom'),
-    setback: reader.number('setback'),
+    setback: setback(reader),
     joint: joint(reader),
     support: support(reader),
     options: wordsUnder(reader, 'options'),

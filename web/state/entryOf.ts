@@ -3,6 +3,7 @@ import { writeQuantity } from '../../core/units/printQuantity.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
 import type { Entry } from './entry.ts';
 import { fieldAt } from './fields.ts';
+import { LEGS, type Legs } from './joined.ts';
 
 /** Objects that stand where a name or a number could, and what the bench calls that way of giving the value. */
 const otherWay: readonly (readonly [pattern: RegExp, by: string])[] = [
@@ -30,11 +31,17 @@ const collect = (value: unknown, path: string, units: UnitSystem, texts: Record<
   }
 };
 
+const legsOf = ({ webWeld, supportWeld }: Extract<End['joint'], { cleat: unknown }>['cleat']): Legs => {
+  if (webWeld) return 'web-welded';
+  return supportWeld ? 'support-welded' : 'bolted';
+};
+
 /** The entry from which `endOf` makes this end again, value for value. */
 export const entryOf = (end: End): Entry => {
   const { units, ...rest } = end;
   const texts: Record<string, string> = {};
   collect(rest, '', units, texts);
+  if ('cleat' in end.joint) texts[LEGS] = legsOf(end.joint.cleat);
   for (const [path, text] of Object.entries(texts)) if (text === '') delete texts[path];
   return { units, texts, assumed: [] };
 };

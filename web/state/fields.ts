@@ -61,10 +61,29 @@ export const numberFields: Readonly<Record<string, QuantityField | CountField>> 
   'joint.bolts.pitch': size(5, 0),
   'joint.bolts.gauge': size(5, 0),
   'joint.bolts.hole': size(1),
+  'joint.bolts.socket': size(1),
+  'joint.supportBolts.grade.fu': strength,
+  'joint.supportBolts.rows': count(30),
+  'joint.supportBolts.pitch': size(5, 0),
+  'joint.supportBolts.crossCentres': size(5),
+  'joint.supportBolts.topEdge': size(5),
+  'joint.supportBolts.hole': size(1),
+  'joint.supportBolts.socket': size(1),
   ...plyFields('joint.plate'),
   ...plyFields('joint.ply'),
-  'joint.weld.leg': size(1),
-  'joint.weld.electrode': strength,
+  ...plyFields('joint.cleat'),
+  'joint.plate.width': size(5),
+  'joint.plate.depth': size(5),
+  'joint.plate.top': size(5),
+  'joint.cleat.legWeb': size(5),
+  'joint.cleat.legSupport': size(5),
+  'joint.cleat.radius': size(1, 0),
+  'joint.cleat.top': size(5),
+  'joint.cleat.depth': size(5),
+  ...weldFields('joint.weld'),
+  ...weldFields('joint.webWeld'),
+  ...weldFields('joint.cleat.webWeld'),
+  ...weldFields('joint.cleat.supportWeld'),
   'support.thickness': size(1),
   'support.grade.fy': strength,
   'support.grade.fu': strength,
@@ -83,6 +102,10 @@ function plyFields(ply: string): Record<string, QuantityField> {
     [`${ply}.bottomEdge`]: size(5),
     [`${ply}.edge`]: size(5),
   };
+}
+
+function weldFields(weld: string): Record<string, QuantityField> {
+  return { [`${weld}.leg`]: size(1), [`${weld}.electrode`]: strength, [`${weld}.return`]: size(5) };
 }
 
 const words: WordsField = { kind: 'words' };

@@ -1,7 +1,9 @@
 import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import { writeQuantity } from '../../core/units/printQuantity.ts';
 import { INCH, toSystem } from '../../core/units/systems.ts';
-import { type Entry, textOf } from './entry.ts';
+import type { Entry } from './entry.ts';
+import { LEGS } from './joined.ts';
+import { jointProposals } from './jointProposals.ts';
 
 /** Values put where nothing stands yet when a part is switched on, by path. */
 export type Proposals = Readonly<Record<string, string>>;
@@ -36,20 +38,16 @@ const cope = (known: Known, path: 'top' | 'bottom'): Proposals => {
   };
 };
 
-const otherPly = (known: Known, from: string, to: string): Proposals =>
-  Object.fromEntries(
-    ['thickness', 'grade', 'grade.by', 'grade.fy', 'grade.fu', 'topEdge', 'bottomEdge', 'edge'].map((name) => [
-      `${to}.${name}`,
-      textOf(known.entry, `${from}.${name}`),
-    ]),
-  );
-
 const strengths = (known: Known, path: string, fy: number | undefined, fu: number | undefined): Proposals => {
   const { units } = known.entry;
   const text = (mpa: number | undefined): string =>
     mpa ? writeQuantity(Number(toSystem(mpa, '-2,1', units).toPrecision(5)), '-2,1', units) : '';
   return { [`${path}.fy`]: text(fy), [`${path}.fu`]: text(fu) };
 };
+
+const tensile = (known: Known, path: string, fu: number | undefined): Proposals => ({
+  [`${path}.fu`]: strengths(known, path, undefined, fu)[`${path}.fu`]!,
+});
 
 const ownSizes = (known: Known): Proposals => {
   const section = known.last?.facts.section;
@@ -81,18 +79,15 @@ export const proposalsFor = (known: Known, path: string, value: string): Proposa
     case 'beam.grade.by=strength':
       return strengths(known, 'beam.grade', facts?.fy, facts?.fu);
     case 'joint.plate.grade.by=strength':
-      return strengths(known, 'joint.plate.grade', facts?.fyp, facts?.fup);
+    case 'joint.cleat.grade.by=strength':
     case 'joint.ply.grade.by=strength':
-      return strengths(known, 'joint.ply.grade', facts?.fyp, facts?.fup);
+      return strengths(known, path.replace(/\.by$/, ''), facts?.fyp, facts?.fup);
     case 'joint.bolts.grade.by=strength':
-      return {
-        'joint.bolts.grade.fu': strengths(known, 'joint.bolts.grade', undefined, facts?.fub)['joint.bolts.grade.fu']!,
-      };
-    case 'joint.kind=web-bolts':
-      return otherPly(known, 'joint.plate', 'joint.ply');
-    case 'joint.kind=fin-plate':
-      return { ...otherPly(known, 'joint.ply', 'joint.plate'), 'joint.weld.leg': size(known)(8, '5/16') };
+      return tensile(known, 'joint.bolts.grade', facts?.fub);
+    case 'joint.supportBolts.grade.by=strength':
+      return tensile(known, 'joint.supportBolts.grade', facts?.supportBolts.fub);
     default:
-      return {};
+      if (path !== 'joint.kind' && path !== LEGS) return {};
+      return jointProposals(known.entry, facts, size(known), (mm) => roundUp(known, mm));
   }
 };

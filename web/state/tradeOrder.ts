@@ -14,6 +14,7 @@ const fields: readonly (readonly [prefix: string, line: LineName])[] = [
   ['joint.bolts', 'bolts'],
   ['joint.firstRow', 'bolts'],
   ['joint.endDistance', 'bolts'],
+  ['joint.supportBolts', 'bolts'],
   ['joint', 'joint'],
   ['support', 'joint'],
   ['reaction', 'load'],

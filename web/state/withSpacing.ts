@@ -2,6 +2,7 @@ import { type Entry, textOf, withProposals } from './entry.ts';
 
 const distances: Readonly<Record<string, string>> = {
   'joint.bolts.rows': 'joint.bolts.pitch',
+  'joint.supportBolts.rows': 'joint.supportBolts.pitch',
   'joint.bolts.columns': 'joint.bolts.gauge',
 };
 

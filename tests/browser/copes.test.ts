@@ -31,7 +31,7 @@ describe('the cut that the support asks for', () => {
     expect(await proposed(bench).count()).toBe(0);
 
     await bench.turn('Joint');
-    await bench.field('Joint', 'Carried by a beam').check();
+    await bench.field('Joint', 'Support').check();
     await bench.field('Joint', 'Section').fill('UB 533x210x92');
     await bench.press('Tab');
     await bench.field('Joint', 'Top above').fill('0');

@@ -34,7 +34,7 @@ const typed: readonly (readonly [field: string, text: string, arrow?: string])[]
   ['Joint: Free edge', '50'],
   ['Joint: Weld leg', '8'],
   ['Joint: Weld metal', ''],
-  ['Joint: Carried by a beam', ' '],
+  ['Joint: Support', ' '],
   ['Support: Face', ''],
   ['Support: Section', 'UB 457x191x67'],
   ['Support: Top above', '0'],

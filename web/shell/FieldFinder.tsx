@@ -21,11 +21,19 @@ const others = [
   'joint.bolts.grade',
   'joint.bolts.holes',
   'joint.bolts.threads',
+  'joint.supportBolts.size',
+  'joint.supportBolts.grade',
+  'joint.supportBolts.holes',
+  'joint.supportBolts.threads',
   'joint.kind',
+  'joint.cleat.legs',
+  'joint.cleat.grade',
   'joint.plate.grade',
   'joint.ply.grade',
   'support',
+  'support.kind',
   'support.section',
+  'support.grade',
   'level',
   'standard',
   'sheet.beside.standard',
@@ -36,8 +44,7 @@ const others = [
 ];
 
 /** Fields of own sizes and strengths are reached through the list that turns to them; others are no fields of the bench yet. */
-const isOwn = (path: string): boolean =>
-  /^beam\.section\.|\.grade\.f[yu]$|ofWebShear$|^support\.(thickness|otherReaction)/.test(path);
+const isOwn = (path: string): boolean => /^beam\.section\.|\.grade\.f[yu]$|ofWebShear$/.test(path);
 
 const found = (it: Entry, of: Words, text: string): { readonly path: string; readonly name: string }[] => {
   const wanted = text.trim().toLowerCase();

@@ -47,6 +47,8 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'radius-not-stated': 'the radius is not stated',
     'bolts-first': 'the plies are too thick for the bolts to plough',
     ploughing: 'the bolts plough a thin ply before they break',
+    'no-end-plate': 'no end plate in this joint',
+    'weld-above-edge': 'the weld leg is larger than the edge it runs along allows',
     'one-cleat': 'the bolts of one cleat stand beside the web: the rules have pairs and end plates only',
     'cleats-only': 'a rule for cleats',
     'end-plates-only': 'a rule for end plates',
@@ -56,7 +58,6 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'welded-support-leg': 'no rule says how a cleat welded to its support turns with the end',
     'tie-covered': 'a tie force is covered for this joint',
     'bolts-near-web': 'the support bolts stand too near the web for the rule',
-    'fills-setback': 'the end plate fills the setback',
   },
   notes: {
     'conventional-plate':
@@ -72,8 +73,17 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'parallel-flanges': 'The flanges are taken as parallel, as given.',
     'half-tension-plane':
       'With two columns or more inside the notch half of the tension plane counts in the block of the web, below the clause: tests found such ends over-predicted. Option web-block: standard takes the clause as it stands.',
+    'support-grip':
+      "The support's thickness is not told: the grip of its bolts counts leg or plate alone. Beyond 5 d a grip lowers their strength.",
     'tie-in-web-only':
       'Under the tie force the bolts through the web and the web are checked; plate or cleat, weld, and the support with its bolts are not.',
+    'web-bolts-no-arm':
+      'One column of web bolts within 3 in of the support: the handbook leaves its arm out, and so does this.',
+    'pair-no-arm': 'The two cleats hold each other at the support: the arm of their support bolts is left out.',
+    'beam-opposite-added':
+      'The beam on the other side of the same web is added in bearing and shear of that web; the handbook leaves that to the reader.',
+    'tie-not-in-legs':
+      "Under the tie force the bending of the cleats' legs, and the support bolts in tension with the prying that goes with it, are not checked.",
     'joint-guide':
       'Joint guide 2008: Steel Buildings in Europe, Multi-Storey Steel Buildings, Part 5. Clauses 1-1, 1-5 and 1-8: parts of EN 1993.',
     'notch-in-buckling':

@@ -1,6 +1,6 @@
-import { copeLimits, intactFlange } from '../../end/gates.ts';
-import { flag, fu, fup, fyp, V } from '../../end/given.ts';
-import { type Block, plateBlock as plate, webBlock as web } from '../../end/tearPaths.ts';
+import { copeLimits, fullDepthPlate, intactFlange, noSupportBolts, noWebHoles } from '../../end/gates.ts';
+import { flag, fu, fup, fyp, k, V } from '../../end/given.ts';
+import { type Block, plateBlock as plate, supportBlock, webBlock as web } from '../../end/tearPaths.ts';
 import { all, constant, least, most, not, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Area, Force, Pure, Stress } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -52,8 +52,50 @@ export const webBlock: StrengthRule = {
   ],
 };
 
+const ofPlate = blockShear(plate, fyp, fup);
+/** Beside one line of support bolts. */
+const ofLine = blockShear(supportBlock, fyp, fup);
+
 /** Block tearing of the plate, cl. 6.4.1. */
 export const plateBlock: StrengthRule = {
   source,
-  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: blockShear(plate, fyp, fup) }],
+  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: ofPlate }],
+};
+
+/** Block tearing of the cleats: all web legs as plates, all support legs beside their line of bolts. */
+export const cleatBlock: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: 'web leg',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('k T_db', times(k, ofPlate), source),
+      off: [noWebHoles],
+    },
+    {
+      of: 'support leg',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('k T_db', times(k, ofLine), source),
+      off: [noSupportBolts],
+    },
+  ],
+};
+
+/** Block tearing of the end plate, beside both lines of bolts. */
+export const endPlateBlock: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: '',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('2 T_db', times(2, ofLine), source),
+      limits: [fullDepthPlate],
+    },
+  ],
 };

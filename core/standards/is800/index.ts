@@ -17,26 +17,32 @@ import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { supportShear } from '../methods/supportShear.ts';
 import { noRule, type Standard } from '../standard.ts';
-import { plateBearing, webBearing } from './bearing.ts';
-import { cautious, plateBlock, severalColumns, webBlock } from './block.ts';
-import { boltShear } from './bolts.ts';
+import { cleatBearing, plateBearing, webBearing } from './bearing.ts';
+import { cautious, cleatBlock, endPlateBlock, plateBlock, severalColumns, webBlock } from './block.ts';
+import { boltShear, supportBoltShear } from './bolts.ts';
+import { cleatBending, cleatGrossShear } from './cleat.ts';
 import { copeBending } from './copeBending.ts';
 import { copeShear } from './copeShear.ts';
+import { endPlateGrossShear, endPlateWebShear } from './endPlate.ts';
 import { E, factors, gm0 } from './factors.ts';
 import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitClauses.ts';
 import { fyb, yieldShear } from './given.ts';
 import { materials } from './materials.ts';
-import { plateNetShear, webNetShear } from './netShear.ts';
+import { cleatNetShear, endPlateNetShear, plateNetShear, webNetShear } from './netShear.ts';
 import { plateBending, plateGrossShear } from './plate.ts';
+import { supportBearing } from './supportBearing.ts';
 import { webTearout } from './tearOut.ts';
 import { webTie } from './tie.ts';
 import { verified } from './verified.ts';
 import { webGrossShear } from './webGrossShear.ts';
 import { weld } from './weld.ts';
+import { weldWeb } from './weldWeb.ts';
 
 const { stressFull, stressCope } = elasticStress({ clause: 'elastic', basis: 'practice' });
 const shear = { clause: '8.4.1', basis: 'seen' } as const;
 const parallel = flag('flanges without a slope', (f) => f.section.slope === undefined);
+
+const gripInDoubt = flag('thickness of the support not told', (f) => f.supportBolts.n > 0 && f.ts === 0);
 
 /** IS 800:2007, general construction in steel, limit-state part. */
 export const is800: Standard = {
@@ -73,22 +79,22 @@ export const is800: Standard = {
     'plate-bending': plateBending,
     'plate-buckling': plateBuckling((Q, fy, Z) => over(times(Q, fy, Z), gm0)),
     weld,
-    'cleat-bearing': noRule(),
-    'cleat-tearout': noRule(),
-    'cleat-gross-shear': noRule(),
-    'cleat-net-shear': noRule(),
-    'cleat-block': noRule(),
-    'cleat-bending': noRule(),
+    'cleat-bearing': cleatBearing,
+    'cleat-tearout': noRule('cleat-bearing'),
+    'cleat-gross-shear': cleatGrossShear,
+    'cleat-net-shear': cleatNetShear,
+    'cleat-block': cleatBlock,
+    'cleat-bending': cleatBending,
     'cleat-buckling': noRule(),
-    'endplate-bearing': noRule(),
-    'endplate-tearout': noRule(),
-    'endplate-gross-shear': noRule(),
-    'endplate-net-shear': noRule(),
-    'endplate-block': noRule(),
-    'endplate-web-shear': noRule(),
-    'weld-web': noRule(),
-    'support-bolt-shear': noRule(),
-    'support-bearing': noRule(),
+    'endplate-bearing': noRule('support-bearing'),
+    'endplate-tearout': noRule('support-bearing'),
+    'endplate-gross-shear': endPlateGrossShear,
+    'endplate-net-shear': endPlateNetShear,
+    'endplate-block': endPlateBlock,
+    'endplate-web-shear': endPlateWebShear,
+    'weld-web': weldWeb,
+    'support-bolt-shear': supportBoltShear,
+    'support-bearing': supportBearing,
     'support-shear': supportShear(
       shear,
       step('V_d', yieldShear(times(2, hp, ts), fys), shear, 'both sides of the plate'),
@@ -113,6 +119,7 @@ export const is800: Standard = {
   notes: [
     { code: 'parallel-flanges', when: parallel },
     { code: 'half-tension-plane', when: all(severalColumns, cautious) },
+    { code: 'support-grip', when: gripInDoubt },
     { code: 'tie-in-web-only', when: not(noTieForce.when) },
   ],
 };

@@ -1,5 +1,5 @@
-import { copeLimits } from '../../end/gates.ts';
-import { dn, flag, fu, fup, h, ho, hp, n, tf, tp, tw, V } from '../../end/given.ts';
+import { copeLimits, fullDepthPlate, noSupportBolts, noWebHoles } from '../../end/gates.ts';
+import { dn, flag, fu, fup, h, ho, hp, k, n, supportBolts, tf, tp, tw, V } from '../../end/given.ts';
 import { minus, most, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -12,7 +12,7 @@ import { nothing, ruptureShear } from './given.ts';
 const source = { clause: '8.4.1.1 note', basis: 'memory' } as const;
 
 const net = (t: Tree<Length>, depth: Tree<Length>, fu: Tree<Stress>) =>
-  step('V_dn', ruptureShear(most(times(t, minus(depth, times(n, dn))), nothing), fu), source);
+  step('V_dn', ruptureShear(most(times(t, depth), nothing), fu), source);
 
 const both = flag('both flanges coped', (f) => f.dt > 0 && f.db > 0);
 const one = flag('one flange coped', (f) => f.dt > 0 || f.db > 0);
@@ -31,10 +31,61 @@ const depth = step(
 
 export const webNetShear: StrengthRule = {
   source,
-  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: net(tw, depth, fu), limits: copeLimits }],
+  ways: [
+    {
+      of: '',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: net(tw, minus(depth, times(n, dn)), fu),
+      limits: copeLimits,
+    },
+  ],
 };
+
+const ofPlate = net(tp, minus(hp, times(n, dn)), fup);
+/** Beside the line of support bolts. */
+const ofLine = net(tp, minus(hp, times(supportBolts.n, supportBolts.dn)), fup);
 
 export const plateNetShear: StrengthRule = {
   source,
-  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: net(tp, hp, fup) }],
+  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: ofPlate }],
+};
+
+/** The cleats' legs, each through its own line of bolts. */
+export const cleatNetShear: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: 'web leg',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('k V_dn', times(k, ofPlate), source),
+      off: [noWebHoles],
+    },
+    {
+      of: 'support leg',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('k V_dn', times(k, ofLine), source),
+      off: [noSupportBolts],
+    },
+  ],
+};
+
+/** The end plate through both lines of bolts. */
+export const endPlateNetShear: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: '',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('2 V_dn', times(2, ofLine), source),
+      limits: [fullDepthPlate],
+    },
+  ],
 };

@@ -1,9 +1,10 @@
 import { N } from '../../end/boltGroup.ts';
-import { type Limit, noTieForce, singleRow } from '../../end/gates.ts';
+import { type Limit, noTieForce, noWebHoles, singleRow } from '../../end/gates.ts';
 import { dn, fu, ho, n, T, tw } from '../../end/given.ts';
 import { webPulled } from '../../end/tearPaths.ts';
 import { least, minus, most, over, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
+import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { webAlong } from './bearing.ts';
 import { blockShear } from './block.ts';
@@ -20,7 +21,7 @@ const way = (of: string, resistance: Tree<Force>, off: Way['off'] = [], limits: 
   load: 'T',
   demand: T,
   resistance,
-  off: [noTieForce, ...off],
+  off: [noTieForce, noWebHoles, ...off],
   limits,
 });
 
@@ -29,7 +30,7 @@ const net = step('T_dn', over(times(0.9, fu, most(times(tw, minus(ho, times(n, d
 
 /**
  * Tie force along the beam, acting alone, in bolts and web: bolts in shear shared evenly, bearing along the rows, the block pulled out to
- * the beam's end, the web in tension. Plate, weld and support are not covered.
+ * the beam's end, the web in tension. Plate, cleat, weld and support are not covered; a welded leg or an end plate refers.
  */
 export const webTie: StrengthRule = {
   source,
@@ -38,5 +39,6 @@ export const webTie: StrengthRule = {
     way('bearing, web', step('T_d', times(N, webAlong), source)),
     way('block, web', blockShear(webPulled, fyw, fu), [singleRow]),
     { ...way('net tension, web', step('T_d', least(gross, net), member)), source: member },
+    tieNotCovered,
   ],
 };

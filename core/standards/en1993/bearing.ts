@@ -1,10 +1,9 @@
-import { noColumnInCope, oneColumn, oneRow, wideHole } from '../../end/gates.ts';
-import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fu, fub, fup, p, q, tp, tw, V } from '../../end/given.ts';
+import { noColumnInCope, oneColumn, oneRow } from '../../end/gates.ts';
+import { ab, at, eBot, eEnd, eTop, ex, flag, fu, fub, fup, k, p, q, tp, tw, V } from '../../end/given.ts';
 import {
   type Condition,
   constant,
   least,
-  minus,
   most,
   not,
   over,
@@ -21,6 +20,7 @@ import type { StrengthRule } from '../standard.ts';
 import { v, w } from './bolts.ts';
 import { gammaM2, gammaMu } from './factors.ts';
 import { boltLimits } from './limits.ts';
+import { bearingOf, bearingTermsOf, webBolt } from './oneBolt.ts';
 import { leastOf } from './optional.ts';
 import { guide, seen } from './sources.ts';
 
@@ -43,22 +43,11 @@ interface Ply {
   readonly level: Tree<Length>;
 }
 
-const endTerm = (e: Tree<Length>): Tree<Pure> => over(e, times(3, d0));
-const edgeTerm = (e: Tree<Length>): Tree<Pure> => minus(over(times(2.8, e), d0), 1.7);
-const inner = (s: Tree<Length>): Tree<Pure> => minus(over(s, times(3, d0)), 0.25);
-const between = (s: Tree<Length>): Tree<Pure> => minus(over(times(1.4, s), d0), 1.7);
+const terms = bearingTermsOf(webBolt);
 
 /** The lowest serves every bolt, and never below nothing. */
 const lowest = (symbol: 'α_b' | 'k_1', always: readonly [Tree<Pure>, ...Tree<Pure>[]], optional: readonly Term[]) =>
   step(symbol, most(leastOf(always, optional), 0), source);
-
-/** Bearing of one bolt, N: 0.8 of it in holes wider than the standard ones. */
-const oneBolt = (symbol: string, k1: Tree<Pure>, alphaB: Tree<Pure>, { fu, t }: Ply, gamma: Tree<Pure>): Tree<Force> =>
-  step(
-    symbol,
-    pick([[wideHole.when, over(times(0.8, k1, alphaB, fu, d, t), gamma)]], over(times(k1, alphaB, fu, d, t), gamma)),
-    source,
-  );
 
 const bearingOn = (ply: Ply) => {
   const { fu, before, beside, level } = ply;
@@ -67,18 +56,22 @@ const bearingOn = (ply: Ply) => {
     alphaB: lowest(
       'α_b',
       [strength, most1],
-      [...before.map(([here, e]): Term => [here, endTerm(e)]), [several.rows, inner(p)]],
+      [...before.map(([here, e]): Term => [here, terms.end(e)]), [several.rows, terms.inner(p)]],
     ),
-    k1: lowest('k_1', [edgeTerm(level), most25], [[several.columns, between(q)]]),
+    k1: lowest('k_1', [terms.edge(level), most25], [[several.columns, terms.between(q)]]),
   };
   const along = {
-    alphaB: lowest('α_b', [endTerm(level), strength, most1], [[several.columns, inner(q)]]),
-    k1: lowest('k_1', [most25], [...beside.map(([here, e]): Term => [here, edgeTerm(e)]), [several.rows, between(p)]]),
+    alphaB: lowest('α_b', [terms.end(level), strength, most1], [[several.columns, terms.inner(q)]]),
+    k1: lowest(
+      'k_1',
+      [most25],
+      [...beside.map(([here, e]): Term => [here, terms.edge(e)]), [several.rows, terms.between(p)]],
+    ),
   };
   return {
-    vertical: oneBolt('F_ver', upright.k1, upright.alphaB, ply, gammaM2),
-    horizontal: oneBolt('F_hor', along.k1, along.alphaB, ply, gammaM2),
-    tie: oneBolt('F_hor', along.k1, along.alphaB, ply, gammaMu),
+    vertical: bearingOf('F_ver', webBolt, ply, upright, gammaM2),
+    horizontal: bearingOf('F_hor', webBolt, ply, along, gammaM2),
+    tie: bearingOf('F_hor', webBolt, ply, along, gammaMu),
   };
 };
 
@@ -108,13 +101,15 @@ const onPlate = bearingOn({
 export const webTieBearing: Tree<Force> = onWeb.tie;
 export const plateTieBearing: Tree<Force> = onPlate.tie;
 
-/** V at which the farthest bolt's two components use its bearing up, added as squares: stricter than each alone, as the joint guide. N */
-const group = ({ vertical, horizontal }: ReturnType<typeof bearingOn>): Tree<Force> =>
-  step(
-    'V_Rd',
-    pick([[oneRow, over(vertical, v)]], over(1, root(plus(squared(over(v, vertical)), squared(over(w, horizontal)))))),
-    guide,
-  );
+/**
+ * V at which the farthest bolt's two components use its bearing up on plies alike, added as squares: stricter than each alone, as the joint
+ * guide. N
+ */
+const group = ({ vertical, horizontal }: ReturnType<typeof bearingOn>, plies: Tree<Pure> | 1 = 1): Tree<Force> => {
+  const both = root(plus(squared(over(v, vertical)), squared(over(w, horizontal))));
+  const row = plies === 1 ? vertical : times(plies, vertical);
+  return step('V_Rd', pick([[oneRow, over(row, v)]], over(plies, both) as Tree<Force>), guide);
+};
 export const webGroup: Tree<Force> = group(onWeb);
 export const plateGroup: Tree<Force> = group(onPlate);
 
@@ -126,3 +121,5 @@ const rule = (resistance: Tree<Force>): StrengthRule => ({
 /** Bearing, EN 1993-1-8 3.6.1 Table 3.4: the web is pressed up, the plate down, both along the beam. */
 export const webBearing: StrengthRule = rule(webGroup);
 export const plateBearing: StrengthRule = rule(plateGroup);
+/** One cleat, or a pair that shares V. */
+export const cleatBearing: StrengthRule = rule(group(onPlate, k));

@@ -10,9 +10,18 @@ import { seen } from './sources.ts';
 
 const source = seen('1-8 3.10.2');
 
-/** Block under an eccentric load: half the net tension plane, net shear plane at yield. */
-const eccentric = ({ Anv, Ant }: Block, fy: Tree<Stress>, fu: Tree<Stress>, gamma: Tree<Pure>): Tree<Force> =>
-  step('V_Rd,b', plus(over(times(0.5, fu, Ant), gamma), over(times(fy, Anv), times(root(3), gammaM0))), source);
+/** One block, N: `tension` of its net tension plane at rupture, its net shear plane at yield. */
+export const blockOf = (
+  { Anv, Ant }: Block,
+  { fy, fu }: { readonly fy: Tree<Stress>; readonly fu: Tree<Stress> },
+  gammaM2n: Tree<Pure>,
+  tension: Tree<Pure> | 0.5 = 0.5,
+): Tree<Force> =>
+  plus(over(times(tension, fu, Ant) as Tree<Force>, gammaM2n), over(times(fy, Anv), times(root(3), gammaM0)));
+
+/** Block under an eccentric load: half the net tension plane. */
+const eccentric = (block: Block, fy: Tree<Stress>, fu: Tree<Stress>, gammaM2n: Tree<Pure>): Tree<Force> =>
+  step('V_Rd,b', blockOf(block, { fy, fu }, gammaM2n), source);
 
 /** Block tearing resistance of the coped web, columns inside the cope, N. */
 export const webBlockOf = (gammaM2n: Tree<Pure>): Tree<Force> => eccentric(web, fy, fu, gammaM2n);

@@ -5,11 +5,11 @@ import {
   noColumnInCope,
   noRectangle,
   noTee,
-  oneColumn,
+  noWebHoles,
   singleColumn,
   uncoped,
 } from '../../end/gates.ts';
-import { d, eEnd, fy, g, m, q, V } from '../../end/given.ts';
+import { d, eEnd, flag, fy, g, m, q, V } from '../../end/given.ts';
 import {
   all,
   atMost,
@@ -78,6 +78,7 @@ const way = (of: string, symbol: string, at: Interaction, off: readonly Gate[]):
   limits,
 });
 
+const severalColumns = flag('', (f) => f.m > 1, 'two bolt columns or more');
 const lastColumn = plus(eEnd, times(minus(m, 1), q));
 
 /**
@@ -86,14 +87,14 @@ const lastColumn = plus(eEnd, times(minus(m, 1), q));
  */
 const waysOf = (of: 'rectangle' | 'tee', { cut, V: Vpl }: CutInShear, block: Tree<Force>, none: Gate): Way[] => {
   const xN = step('x_N', minus(cut.c, lastColumn), guide, 'cope beyond the last column');
-  const near = all(not(oneColumn), below(xN, times(from(2), d)));
+  const near = all(severalColumns, below(xN, times(from(2), d)));
   const M0 = step('M_0', over(times(fy, cut.W), gammaM0), guide);
   const beside = step('V_pl,2', pick([[noColumnInCope, Vpl]], least(Vpl, block)), guide);
   const column = plus(g, lastColumn);
   const asOne: Gate = { when: near, reason: 'last-column-at-face' };
   const apart: Gate = { when: not(near), reason: 'last-column-apart' };
   return [
-    way(`${of}, last column`, 'V e', { M0, Vpl: beside, arm: column }, [singleColumn, asOne, none]),
+    way(`${of}, last column`, 'V e', { M0, Vpl: beside, arm: column }, [noWebHoles, singleColumn, asOne, none]),
     way(of, 'V e', { M0, Vpl: beside, arm: step('e', most(cut.ec, column), guide, 'x_N < 2 d') }, [apart, none]),
     way(of, 'V e_c', { M0, Vpl, arm: cut.ec }, [asOne, none]),
   ];

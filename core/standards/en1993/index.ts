@@ -4,27 +4,18 @@ import { listedOf, type StandardId } from '../listed.ts';
 import type { Steels } from '../materials.ts';
 import { fitWrench } from '../methods/fitWrench.ts';
 import { noRule, type Standard } from '../standard.ts';
-import { plateBearing, webBearing } from './bearing.ts';
+import { cleatBearing, plateBearing, webBearing } from './bearing.ts';
 import { plateBlock, webBlock, webBlockOf, webTearout } from './block.ts';
 import { boltShear } from './bolts.ts';
+import { cleatBending, cleatBlock, cleatGrossShear, cleatNetShear } from './cleats.ts';
 import { copeBending } from './copeBending.ts';
 import { copeBuckling } from './copeBuckling.ts';
 import { stressCope, stressFull } from './elasticStress.ts';
+import { endPlateBlock, endPlateGrossShear, endPlateNetShear, endPlateWebShear } from './endPlate.ts';
 import { gammaM0, gammaM1, gammaM2, gammaMu, netRecommended, netUk } from './factors.ts';
-import {
-  fitCopeClearance,
-  fitCopeDepth,
-  fitCopeLength,
-  fitCopeRadius,
-  fitEdgePlate,
-  fitEdgeWeb,
-  fitEnd,
-  fitGauge,
-  fitPitch,
-  fitPlateDepth,
-  fitRotation,
-  fitSetback,
-} from './fit.ts';
+import { fitCopeClearance, fitCopeDepth, fitCopeLength, fitCopeRadius, fitPlateDepth, fitSetback } from './fit.ts';
+import { fitRotation } from './fitRotation.ts';
+import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitSpacing.ts';
 import { webBesideLongPlate } from './longPlate.ts';
 import { materialsWith } from './materials.ts';
 import { plateNetShear, webNet, webNetShear } from './netShear.ts';
@@ -33,10 +24,12 @@ import { plateBending, plateGrossShear } from './plate.ts';
 import { plateBuckling } from './plateBuckling.ts';
 import { recommendedSteels, ukSteels } from './steels.ts';
 import { supportShear } from './support.ts';
+import { supportBearing, supportBoltShear } from './supportBolts.ts';
 import { webTie } from './tie.ts';
 import { verified } from './verified.ts';
 import { copeShear, webGrossShear } from './webShear.ts';
 import { weld } from './weld.ts';
+import { weldWeb } from './weldWeb.ts';
 
 /** What a country chooses: the factor of net sections, the strengths of its steels. */
 interface Annex {
@@ -69,23 +62,23 @@ const strengthWith = (gammaM2n: Tree<Pure>): Standard['strength'] => {
     'plate-bending': plateBending,
     'plate-buckling': plateBuckling,
     weld,
-    'cleat-bearing': noRule(),
+    'cleat-bearing': cleatBearing,
     'cleat-tearout': noRule(),
-    'cleat-gross-shear': noRule(),
-    'cleat-net-shear': noRule(),
-    'cleat-block': noRule(),
-    'cleat-bending': noRule(),
+    'cleat-gross-shear': cleatGrossShear,
+    'cleat-net-shear': cleatNetShear(gammaM2n),
+    'cleat-block': cleatBlock(gammaM2n),
+    'cleat-bending': cleatBending,
     'cleat-buckling': noRule(),
-    'endplate-bearing': noRule(),
+    'endplate-bearing': noRule('support-bearing'),
     'endplate-tearout': noRule(),
-    'endplate-gross-shear': noRule(),
-    'endplate-net-shear': noRule(),
-    'endplate-block': noRule(),
-    'endplate-web-shear': noRule(),
-    'weld-web': noRule(),
-    'support-bolt-shear': noRule(),
-    'support-bearing': noRule(),
-    'support-shear': supportShear,
+    'endplate-gross-shear': endPlateGrossShear,
+    'endplate-net-shear': endPlateNetShear(gammaM2n),
+    'endplate-block': endPlateBlock(gammaM2n),
+    'endplate-web-shear': endPlateWebShear,
+    'weld-web': weldWeb,
+    'support-bolt-shear': supportBoltShear,
+    'support-bearing': supportBearing,
+    'support-shear': supportShear(gammaM2n),
   };
 };
 

@@ -1,16 +1,36 @@
-import { boltNotListed, type Limit, oneBolt, oneRow } from '../../end/gates.ts';
+import {
+  boltNotListed,
+  fullDepthPlate,
+  type Limit,
+  oneBolt,
+  oneRow,
+  oneSupportRow,
+  supportBoltNotListed,
+} from '../../end/gates.ts';
 import { flag } from '../../end/given.ts';
 
 /** Clearance beyond which a round hole is no oversize hole of EN 1090-2 any more, mm. From memory. */
 const mostClearance = (d: number): number => (d <= 12 ? 3 : d <= 22 ? 4 : d <= 24 ? 6 : 8);
 
+const above = (d0: number, d: number): boolean => d0 > d + mostClearance(d) + 1e-9;
+
 /** Holes wider than the rules for oversize holes cover. */
 export const holeLimits: readonly Limit[] = [
   {
-    when: flag('a hole wider than an oversize one', (f) => f.d0 > f.d + mostClearance(f.d) + 1e-9),
+    when: flag('a hole wider than an oversize one', (f) => above(f.d0, f.d)),
     reason: 'hole-above-oversize',
     always: false,
   },
+];
+
+/** The same of the holes for the bolts into the support, in leg or plate; an end plate of the full depth is outside the joint guide. */
+export const supportHoleLimits: readonly Limit[] = [
+  {
+    when: flag('a support hole wider than an oversize one', (f) => above(f.supportBolts.d0, f.supportBolts.d)),
+    reason: 'hole-above-oversize',
+    always: false,
+  },
+  fullDepthPlate,
 ];
 
 /** What the joint guide's bolt groups cover: two rows or more, one column or two; one bolt alone has no number. */
@@ -21,3 +41,18 @@ export const groupLimits: readonly Limit[] = [
 ];
 
 export const boltLimits: readonly Limit[] = [...groupLimits, boltNotListed, ...holeLimits];
+
+/** The line of bolts of one cleat alone stands beside the web: the joint guide has pairs and end plates only. */
+export const oneCleat: Limit = {
+  when: flag('one cleat alone', (f) => f.kind === 'single-cleat'),
+  reason: 'one-cleat',
+  always: true,
+  noNumber: true,
+};
+
+export const supportBoltLimits: readonly Limit[] = [
+  oneCleat,
+  { when: oneSupportRow.when, reason: 'rows-below-two', always: true },
+  supportBoltNotListed,
+  ...supportHoleLimits,
+];

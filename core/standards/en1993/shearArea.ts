@@ -6,7 +6,8 @@ import { gammaM0 } from './factors.ts';
 import { guide, seen } from './sources.ts';
 
 const source = seen('1-1 6.2.6');
-const fullWeb = flag('option plain-web: full', (f) => f.options['plain-web'] === 'full');
+/** All of a plain web counts in shear, in place of 0.9 of it. */
+export const fullWeb = flag('option plain-web: full', (f) => f.options['plain-web'] === 'full');
 const firstPrint = flag('option tee-shear: first-print', (f) => f.options['tee-shear'] === 'first-print');
 
 export const epsilon = step('ε', root(over(235, inMPa(fy))));

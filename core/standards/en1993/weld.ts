@@ -1,4 +1,5 @@
-import { flag, fup, fus, hp, leg, V, Xu, z } from '../../end/given.ts';
+import type { Limit } from '../../end/gates.ts';
+import { flag, fup, fus, hp, k, leg, legSupport, V, Xu, z } from '../../end/given.ts';
 import {
   atMost,
   below,
@@ -6,17 +7,21 @@ import {
   inMPa,
   minus,
   most,
+  not,
   over,
   pick,
   plus,
   root,
   squared,
   step,
+  type Tree,
   times,
 } from '../../formula/tree.ts';
+import type { Pure, Stress } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
 import { upTo } from './bound.ts';
 import { gammaM2 } from './factors.ts';
+import { notCleat } from './kinds.ts';
 import { leastOf } from './optional.ts';
 import { guide, seen } from './sources.ts';
 
@@ -27,42 +32,56 @@ const beta = (value: number) => constant('β_w', value);
 /** Throat of a fillet with equal legs, mm. */
 export const throat = step('a', over(leg, root(2)), source);
 
-/**
- * Correlation factor by the plate's tensile strength, Table 4.1. A weaker support would have a smaller one, and the larger of the two
- * stands with the weaker strength, so that it is always the plate's.
- */
-export const betaW = step(
-  'β_w',
+/** Correlation factor by tensile strength, Table 4.1. */
+export const betaOf = (fu: Tree<Stress>): Tree<Pure> =>
   pick(
     [
-      [atMost(inMPa(fup), upTo(360)), beta(0.8)],
-      [atMost(inMPa(fup), upTo(430)), beta(0.85)],
-      [atMost(inMPa(fup), upTo(510)), beta(0.9)],
+      [atMost(inMPa(fu), upTo(360)), beta(0.8)],
+      [atMost(inMPa(fu), upTo(430)), beta(0.85)],
+      [atMost(inMPa(fu), upTo(510)), beta(0.9)],
     ],
     beta(1),
-  ),
-  source,
-);
+  );
+
+/**
+ * That factor by the plate's strength. A weaker support would have a smaller one, and the larger of the two stands with the weaker strength,
+ * so that it is always the plate's.
+ */
+export const betaW = step('β_w', betaOf(fup), source);
+
+/** Tensile strength of the weld metal, where it is told. */
+export const metal = [flag('', (f) => f.Xu > 0, 'the weld metal is told'), Xu] as const;
 
 /** The least tensile strength of the parts joined and of the weld metal, as far as they are told, MPa. */
 export const weldedFu = step(
   'f_u',
-  leastOf(
-    [fup],
-    [
-      [flag('', (f) => f.fus > 0, 'the grade of the support is told'), fus],
-      [flag('', (f) => f.Xu > 0, 'the weld metal is told'), Xu],
-    ],
-  ),
+  leastOf([fup], [[flag('', (f) => f.fus > 0, 'the grade of the support is told'), fus], metal]),
   source,
 );
 
 /** Full-size length, without a throat at either end, mm. */
-const l = step('l', minus(hp, times(2, throat)), source);
+export const fullLength = step('l', minus(hp, times(2, throat)), source);
 
-const resistance = step('f_vw,d', over(times(throat, weldedFu), times(root(3), betaW, gammaM2)), source);
+/** Strength of a fillet whatever the direction of its force, simplified method, N/mm. */
+export const filletStrength = (fu: Tree<Stress>, betaW: Tree<Pure>) =>
+  step('f_vw,d', over(times(throat, fu), times(root(3), betaW, gammaM2)), source);
 
-/** Two upright fillets under V and V z, simplified method of EN 1993-1-8 4.5.3.3: one strength whatever the direction. */
+export const weldLimits: readonly Limit[] = [
+  { when: atMost(fullLength, mm(0)), reason: 'weld-too-short', always: true, noNumber: true },
+  { when: below(throat, mm(3)), reason: 'weld-throat-below-least', always: false },
+  { when: below(fullLength, most(mm(30), times(6, throat))), reason: 'weld-too-short', always: false },
+];
+
+/** How a cleat welded to its support turns with the end, no rule says. */
+const stiffLeg: Limit = { when: flag('always', () => true), reason: 'welded-support-leg', always: false };
+
+const resistance = filletStrength(weldedFu, betaW);
+const note = 'elastic line: shear, and bending at its ends';
+
+/**
+ * Fillets to the support, EN 1993-1-8 4.5.3.3: two along a fin plate under V and V z; one along the toe of each cleat under its share of V,
+ * which stands that leg's length from it.
+ */
 export const weld: StrengthRule = {
   source,
   ways: [
@@ -72,16 +91,32 @@ export const weld: StrengthRule = {
       load: 'V',
       demand: step(
         'v',
-        root(plus(squared(over(V, times(2, l))), squared(over(times(3, V, z), squared(l))))),
+        root(plus(squared(over(V, times(2, fullLength))), squared(over(times(3, V, z), squared(fullLength))))),
         guide,
-        'elastic line: shear, and bending at its ends',
+        note,
       ),
       resistance,
-      limits: [
-        { when: atMost(l, mm(0)), reason: 'weld-too-short', always: true, noNumber: true },
-        { when: below(throat, mm(3)), reason: 'weld-throat-below-least', always: false },
-        { when: below(l, most(mm(30), times(6, throat))), reason: 'weld-too-short', always: false },
-      ],
+      off: [{ when: not(notCleat.when), reason: 'fin-plates-only' }],
+      limits: weldLimits,
+    },
+    {
+      of: 'support leg',
+      symbol: 'v',
+      load: 'V',
+      demand: step(
+        'v',
+        root(
+          plus(
+            squared(over(V, times(k, fullLength))),
+            squared(over(times(6, V, legSupport), times(k, squared(fullLength)))),
+          ),
+        ),
+        guide,
+        note,
+      ),
+      resistance,
+      off: [notCleat],
+      limits: [...weldLimits, stiffLeg],
     },
   ],
 };

@@ -1,6 +1,7 @@
 import type { Facts } from '../end/facts.ts';
 import { centres, lastColumnX, rowY } from './bolts.ts';
-import type { Callout, Line, Point, WeldMark, Word } from './drawing.ts';
+import type { Callout, Line, Point, Word } from './drawing.ts';
+import { plateField } from './fields.ts';
 import { bottomCut, type Cut, topCut } from './outline.ts';
 import { plateBox } from './plate.ts';
 import { length } from './sizes.ts';
@@ -9,28 +10,13 @@ import type { DrawingWords } from './words.ts';
 /** Radii, bolts, plate and section: words with a leader to what they name. `right`: where the drawing stops. */
 export const callouts = (it: Facts, words: DrawingWords, right: number): Callout[] => [
   ...radii(it, words),
-  bolts(it, words, right),
+  ...(it.n > 0 ? [bolts(it, words, right)] : []),
   plate(it, words, right),
   section(it, words, right),
 ];
 
-/** Two fillets along the plate at the support's face. */
-export const weldMark = (it: Facts, words: DrawingWords): WeldMark | null => {
-  if (it.kind !== 'fin-plate') return null;
-  const { left: x, top, bottom } = plateBox(it);
-  const inset = Math.min(0.03 * (bottom - top), 6);
-  return {
-    targets: [
-      { x, y: bottom - inset },
-      { x, y: top + inset },
-      { x, y: (top + bottom) / 2 },
-    ],
-    line: [note('z'), { text: length(it.leg, words.units), role: 'size', path: 'joint.weld.leg' }],
-  };
-};
-
-const note = (text: string): Word => ({ text, role: 'note' });
-const second = (text: string): Word => ({ text, role: 'second' });
+export const note = (text: string): Word => ({ text, role: 'note' });
+export const second = (text: string): Word => ({ text, role: 'second' });
 
 const radii = (it: Facts, words: DrawingWords): Callout[] => {
   const radius = (cut: Cut, given: number, path: string, level: (y: number) => number): Callout[] => {
@@ -73,19 +59,29 @@ const bolts = (it: Facts, words: DrawingWords, right: number): Callout => {
 };
 
 const plate = (it: Facts, words: DrawingWords, right: number): Callout => {
-  const { top, bottom, right: edge } = plateBox(it);
-  const last = lastColumnX(it) + it.d0 / 2;
-  const x = last + Math.max(0, edge - last) * 0.75;
+  const { left, top, bottom, right: edge } = plateBox(it);
+  const last = it.n > 0 ? lastColumnX(it) + it.d0 / 2 : left;
+  const x = it.n > 0 ? last + Math.max(0, edge - last) * 0.75 : (left + edge) / 2;
   const spots = [0.62, 0.5, 0.74, 0.38, 0.86, 0.26];
   return {
     name: 'plate',
     targets: spots.map((s) => ({ x, y: top + (bottom - top) * s })),
     end: 'dot',
-    variants: [[[note(`${words.plate} ${length(it.tp, words.units)}`)], [second('far side')]]],
+    variants: [plateLines(it, words)],
     near: { x: (edge + right) / 2, y: top + (bottom - top) * 0.55 },
     onBeam: true,
     align: 'start',
   };
+};
+
+/** Name and thickness with where it stands; an end plate's thickness is drawn, a cleat's is not. */
+const plateLines = (it: Facts, words: DrawingWords): Line[] => {
+  const thickness = length(it.tp, words.units);
+  if (it.bp > 0) return [[note(words.plate)]];
+  if (it.legWeb === 0) return [[note(`${words.plate} ${thickness}`)], [second('far side')]];
+  const name = it.k > 1 ? `${it.k} ${words.plate}s` : words.plate;
+  const size: Word = { text: thickness, role: 'size', path: plateField(it, 'thickness') };
+  return [[note(name), size], [second(it.k > 1 ? 'one on each side' : 'near side')]];
 };
 
 const section = (it: Facts, words: DrawingWords, right: number): Callout => {

@@ -1,15 +1,17 @@
 import type { Facts } from '../end/facts.ts';
 import { shearPeak } from '../shape/shearStress.ts';
 import { centreLines, holes } from './bolts.ts';
-import { callouts, weldMark } from './callouts.ts';
+import { callouts } from './callouts.ts';
 import { dimensions } from './dimensions.ts';
 import type { Box, Drawing, Line, Point } from './drawing.ts';
 import { drawnLength } from './drawnLength.ts';
+import { before, fittingFromSide } from './fitting.ts';
 import { elevation } from './outline.ts';
-import { plateBox, plateEdges } from './plate.ts';
+import { plateBox } from './plate.ts';
 import { sentences } from './sentences.ts';
 import { forceUnit, length, reaction } from './sizes.ts';
 import { faceSpan, supportBox, supportSection } from './support.ts';
+import { weldFromSide } from './weldMarks.ts';
 import type { DrawingWords } from './words.ts';
 
 /**
@@ -21,9 +23,17 @@ export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
   const box = pieceBox(facts, right);
   const { h } = facts;
   return {
+    name: 'side',
+    title: [{ text: 'side view', role: 'second' }],
     box,
     beam: { left: 0, top: 0, right, bottom: h },
-    strokes: [...supportSection(facts), ...plateEdges(facts), ...elevation(facts, right), ...centreLines(facts)],
+    strokes: [
+      ...supportSection(facts),
+      ...fittingFromSide(facts),
+      ...elevation(facts, right, before(facts)),
+      ...centreLines(facts),
+    ],
+    cuts: [],
     holes: holes(facts),
     breaks: [{ x: right, top: 0, bottom: h }],
     dimensions: [
@@ -38,7 +48,7 @@ export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
       },
     ],
     callouts: callouts(facts, words, right),
-    weld: weldMark(facts, words),
+    weld: weldFromSide(facts, words),
     keptClear: keptClear(facts, right),
     face: {
       x: -facts.g,

@@ -72,6 +72,8 @@ export interface Room {
   readonly width: number;
   /** Width that is enough, in text heights. */
   readonly heights: number;
+  /** Absent: the first line there. */
+  readonly lane?: number;
 }
 
 /** A size between two points of the piece. */
@@ -104,11 +106,20 @@ export interface Callout {
   readonly align: 'start' | 'end';
 }
 
-/** A fillet weld on both sides of the plate: the arrow ends at one of the spots; ISO 2553. */
+/** A fillet weld: its symbol's arrow ends at one of the spots, the symbol stands to the given side of it. */
 export interface WeldMark {
   readonly targets: readonly Point[];
   readonly line: Line;
+  readonly towards: 'left' | 'right';
+  /** Fillets on both sides of the joint, or on the side of the arrow alone. */
+  readonly sides: 'both' | 'arrow';
+  readonly practice: WeldPractice;
+  /** Said in the symbol's tail. */
+  readonly tail?: Line;
 }
+
+/** ISO 2553, system A: size before the triangle, a dashed line for the other side. AWS A2.4: the arrow side below the line, each side sized. */
+export type WeldPractice = 'iso' | 'aws';
 
 /** A straight cut of the beam where the drawing stops. */
 export interface Break {
@@ -124,12 +135,26 @@ export interface Box {
   readonly bottom: number;
 }
 
-export interface Drawing {
+/** A part that is cut through, hatched; parts beside each other slant apart. */
+export interface CutPart {
+  readonly outline: readonly Point[];
+  readonly slant: 1 | -1;
+}
+
+/** From the side; or from the beam toward the support, cut through the beam just inside its end: x then runs across, 0 in the web's middle. */
+export type ViewName = 'side' | 'support';
+
+/** One view of the end. Heights are the same in all of them. */
+export interface View {
+  readonly name: ViewName;
+  /** Stands over the view where there are several. */
+  readonly title: Line;
   /** Box of the piece and of the support's section, without dimensions. */
   readonly box: Box;
   /** Box of the beam alone. */
   readonly beam: Box;
   readonly strokes: readonly Stroke[];
+  readonly cuts: readonly CutPart[];
   readonly holes: readonly Circle[];
   readonly breaks: readonly Break[];
   readonly dimensions: readonly Dimension[];
@@ -138,7 +163,13 @@ export interface Drawing {
   /** Lines along which paths of failing will run: words keep off them if they can. */
   readonly keptClear: readonly (readonly [Point, Point])[];
   /** The support's face with its name, and the reaction on it. */
-  readonly face: { readonly x: number; readonly top: number; readonly bottom: number; readonly line: Line };
+  readonly face?: { readonly x: number; readonly top: number; readonly bottom: number; readonly line: Line };
+  readonly reaction?: Line;
+}
+
+/** The end from the side, and the whole end in words. */
+export interface Drawing extends View {
+  readonly face: NonNullable<View['face']>;
   readonly reaction: Line;
   /** The drawing in sentences, for those who cannot see it. */
   readonly sentences: readonly string[];
@@ -153,6 +184,8 @@ export interface Tag {
 
 /** The path along which one check tears, yields or shears, drawn over the piece, with its lengths. */
 export interface FailurePath {
+  /** The view that it is drawn over; absent: from the side. */
+  readonly view?: ViewName;
   readonly strokes: readonly Stroke[];
   readonly circles: readonly Circle[];
   readonly areas: readonly Area[];

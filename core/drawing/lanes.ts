@@ -48,7 +48,9 @@ const edgeKey = ({ side, base }: Lane): string => `${side} ${base}`;
 /** The space near the piece where it is wide and, for an upright line, high enough; else the lane further out. */
 const choose = ({ em }: Pad, { at, room, axis, value }: Dimension): { lane: Lane; inRoom: boolean } => {
   const enough = room !== undefined && room.width >= room.heights * em && (axis === 'x' || value >= 2.2 * em);
-  return enough ? { lane: { side: room.side, base: room.base, lane: 1 }, inRoom: true } : { lane: at, inRoom: false };
+  return enough
+    ? { lane: { side: room.side, base: room.base, lane: room.lane ?? 1 }, inRoom: true }
+    : { lane: at, inRoom: false };
 };
 
 /** Half of what an upright line needs to each side: its value stands across it, or along it. */

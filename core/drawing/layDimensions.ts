@@ -1,4 +1,4 @@
-import type { Box, Dimension, Drawing, Point } from './drawing.ts';
+import type { Box, Dimension, Point, View } from './drawing.ts';
 import { layExtensions } from './extensions.ts';
 import { WORDS } from './ground.ts';
 import { intoLanes, type Placed } from './lanes.ts';
@@ -15,7 +15,7 @@ const GAP = 0.25;
 const ON = 0.85;
 
 /** All dimensions: extension lines, dimension lines with oblique strokes, values. */
-export const layDimensions = (pad: Pad, { dimensions }: Drawing): Placed[] => {
+export const layDimensions = (pad: Pad, { dimensions }: View): Placed[] => {
   const placed = intoLanes(pad, dimensions);
   layExtensions(pad, placed);
   for (const it of placed) keepOff(pad, [pointOn(it, startOf(it)), pointOn(it, endOf(it))], LINE_WEIGHT, it);

@@ -1,4 +1,4 @@
-import type { Drawing, Line, Point } from './drawing.ts';
+import type { Line, Point, View } from './drawing.ts';
 import type { Placed } from './lanes.ts';
 import { drawStroke, type Pad, setLine, widthOf } from './pad.ts';
 import { blockBox, cheapest } from './place.ts';
@@ -6,7 +6,7 @@ import { blockBox, cheapest } from './place.ts';
 /** Levels of the upper end of the face's line, of its foot, and of the tail of the reaction's arrow below it. */
 export const arrowOf = (
   { em }: Pad,
-  { face }: Drawing,
+  face: NonNullable<View['face']>,
   placed: readonly Placed[],
 ): { head: number; foot: number; tail: number } => {
   const under = placed.filter((it) => it.side === 'bottom' && !it.inRoom).map((it) => it.level + 0.5 * em);
@@ -15,11 +15,11 @@ export const arrowOf = (
 };
 
 /** The support's face with its name, and the reaction below it: beyond whatever dimensions stand under the beam. */
-export const layFace = (pad: Pad, drawing: Drawing, placed: readonly Placed[]): void => {
+export const layFace = (pad: Pad, { face, reaction }: View, placed: readonly Placed[]): void => {
+  if (face === undefined || reaction === undefined) return;
   const { em } = pad;
-  const { face, reaction } = drawing;
   const { x, bottom } = face;
-  const { head, foot, tail } = arrowOf(pad, drawing, placed);
+  const { head, foot, tail } = arrowOf(pad, face, placed);
   drawStroke(pad, 'piece', { kind: 'neighbour', from: { x, y: head }, to: [{ x, y: foot }] });
   drawStroke(pad, 'words', { kind: 'force', from: { x, y: tail }, to: [{ x, y: foot + 0.25 * em }], arrow: true });
   write(pad, reaction, [

@@ -1,11 +1,23 @@
-import type { Break, Circle, Drawing, Point } from './drawing.ts';
+import type { Break, Circle, CutPart, Point, View } from './drawing.ts';
+import { hatchLines } from './hatch.ts';
 import { drawStroke, keepOff, type Pad } from './pad.ts';
 
-/** Lines of the piece, its holes, and the breaks. */
-export const layPiece = (pad: Pad, drawing: Drawing): void => {
+/** Spacing of the hatch of a part that is cut through, in text heights. */
+const HATCH = 0.36;
+
+/** Lines of the piece, what is cut through, holes, and the breaks. */
+export const layPiece = (pad: Pad, drawing: View): void => {
+  for (const cut of drawing.cuts) layCut(pad, cut);
   for (const stroke of drawing.strokes) drawStroke(pad, 'piece', stroke);
   for (const hole of drawing.holes) layHole(pad, hole);
   for (const it of drawing.breaks) layBreak(pad, it);
+};
+
+const layCut = (pad: Pad, { outline, slant }: CutPart): void => {
+  const turned = ({ x, y }: Point): Point => ({ x: slant * x, y });
+  for (const [from, to] of hatchLines(outline.map(turned), HATCH * pad.em, [])) {
+    drawStroke(pad, 'piece', { kind: 'hatch', from: turned(from), to: [turned(to)] });
+  }
 };
 
 const HOLE_WEIGHT = 40;

@@ -1,4 +1,4 @@
-import type { Drawing, FailurePath } from './drawing.ts';
+import type { FailurePath, View } from './drawing.ts';
 import type { Laid, Mark } from './laid.ts';
 import { layCallouts } from './layCallouts.ts';
 import { layDimensions } from './layDimensions.ts';
@@ -26,10 +26,11 @@ const CLEAR = 2.5;
 export const AIR = 0.35;
 
 /**
- * Gives every line and word of a drawing its place, the same for every pen. The box holds the drawing, and the path's words where these had
- * to stand outside.
+ * Gives every line and word of one view its place, the same for every pen. The box holds the view, and the path's words where these had
+ * to stand outside. A path that belongs to another view is left out.
  */
-export const layoutDrawing = (drawing: Drawing, options: LayoutOptions, path: FailurePath | null = null): Laid => {
+export const layoutDrawing = (drawing: View, options: LayoutOptions, shown: FailurePath | null = null): Laid => {
+  const path = (shown?.view ?? 'side') === drawing.name ? shown : null;
   const pad = createPad(options.textHeight, options.measure ?? condensed, options.values);
   const { pathStays = false } = options;
   layPiece(pad, drawing);

@@ -11,9 +11,12 @@ export interface Cut {
 export const topCut = (it: Facts): Cut => cut(it.ct, it.dt, it.rt);
 export const bottomCut = (it: Facts): Cut => cut(it.cb, it.db, it.rb);
 
-/** The elevation: outline open at the break, lines of the flanges' inner faces, and of the ends of the root fillets. `right`: where the drawing stops. */
-export const elevation = (it: Facts, right: number): Stroke[] => [
-  outline(it, right),
+/**
+ * The elevation: outline open at the break, lines of the flanges' inner faces, and of the ends of the root fillets. `right`: where the drawing
+ * stops; `before`: levels between which something stands before the beam's end.
+ */
+export const elevation = (it: Facts, right: number, before: readonly [number, number] | null = null): Stroke[] => [
+  ...(before === null ? [outline(it, right)] : outlineBehind(it, right, before)),
   ...levels(it).flatMap(({ y, kind }) => {
     const left = edgeAt(it, y);
     return left < right ? [{ kind, from: { x: left, y }, to: [{ x: right, y }] }] : [];
@@ -43,6 +46,17 @@ const outline = (it: Facts, right: number): Stroke => ({
   from: { x: right, y: 0 },
   to: [...cornerRun(topCut(it)), ...mirrored(cornerRun(bottomCut(it)), it.h), { x: right, y: it.h }],
 });
+
+/** The outline where something hides a part of the end's own edge. */
+const outlineBehind = (it: Facts, right: number, before: readonly [number, number]): Stroke[] => {
+  const edge = (y: number): Point => ({ x: 0, y: Math.min(Math.max(y, it.dt), it.h - it.db) });
+  const [top, foot] = [edge(before[0]), edge(before[1])];
+  return [
+    { kind: 'outline', from: { x: right, y: 0 }, to: [...cornerRun(topCut(it)), top] },
+    { kind: 'hidden', from: top, to: [foot] },
+    { kind: 'outline', from: foot, to: [...mirrored(cornerRun(bottomCut(it)), it.h), { x: right, y: it.h }] },
+  ];
+};
 
 /** From the flange along the cope to the beam's end. */
 const cornerRun = ({ length, depth, radius }: Cut): (Point | Arc)[] => {

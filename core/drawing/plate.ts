@@ -3,15 +3,20 @@ import { lastColumnX } from './bolts.ts';
 import type { Box, Point, Stroke } from './drawing.ts';
 import { behindWeb } from './outline.ts';
 
-/** The plate or ply on the far side of the web, from the support's face to its free edge. */
+/** Plate, ply or a cleat's web leg, from the support's face to its free edge; of an end plate, which fills the setback, its edge. */
 export const plateBox = (it: Facts): Box => ({
   left: -it.g,
-  top: it.y1 - it.eTop,
-  right: lastColumnX(it) + it.ex,
-  bottom: it.yn + it.eBot,
+  top: it.yp,
+  right: freeEdge(it),
+  bottom: it.yp + it.hp,
 });
 
-/** Its edges: dashed where the web hides them, else in full. The edge at the support is the support's own line. */
+const freeEdge = (it: Facts): number => {
+  if (it.bp > 0) return 0;
+  return it.legWeb > 0 ? it.legWeb - it.g : lastColumnX(it) + it.ex;
+};
+
+/** Edges of a plate on the far side: dashed where the web hides them, else in full. The edge at the support is the support's own line. */
 export const plateEdges = (it: Facts): Stroke[] => {
   const { left, top, right, bottom } = plateBox(it);
   return [

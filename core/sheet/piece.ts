@@ -5,9 +5,10 @@ import { failurePath } from '../drawing/failurePath.ts';
 import type { LayoutOptions } from '../drawing/layout.ts';
 import { leastBox } from '../drawing/leastBox.ts';
 import type { DrawingWords } from '../drawing/words.ts';
-import { supportBoltsOf, webBoltsOf } from '../end/jointParts.ts';
+import { drawingWordsOf } from '../drawing/wordsOf.ts';
+import { standards } from '../standards/known.ts';
 import type { Context } from './context.ts';
-import { holesAssumed, sectionName } from './given.ts';
+import { sectionName } from './given.ts';
 import { POINT } from './pen.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { governingOf } from './verdictLine.ts';
@@ -18,21 +19,13 @@ const SIZE = 2.5 / 0.698 / POINT;
 const REACH = 30;
 
 /** What the drawing writes, as it stands in the end. */
-const drawingWords = (context: Context): DrawingWords => {
-  const { input, numbers, words } = context;
-  const { end, designation } = input;
-  const bolts = webBoltsOf(end.joint)?.bolts ?? supportBoltsOf(end.joint)!;
-  return {
+const drawingWords = ({ input, numbers, words }: Context): DrawingWords =>
+  drawingWordsOf(input.end, {
     units: numbers.units,
-    section: sectionName(designation).replaceAll(' × ', '×') || say.ownSize,
-    boltSize: bolts.size,
-    boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
-    holes: bolts.holes ?? holesAssumed(context),
-    cope: words.cope,
-    gauge: words.gauge,
-    plate: end.joint.kind === 'fin-plate' ? words.finPlate : say.labels.ply.toLowerCase(),
-  };
-};
+    section: sectionName(input.designation).replaceAll(' × ', '×') || say.ownSize,
+    words,
+    standard: standards[input.report.standard.id]!,
+  });
 
 /** The end as drawn, with the path of the check that governs; none for rules of fit. */
 export interface Piece {

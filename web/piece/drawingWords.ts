@@ -1,20 +1,14 @@
 import type { ExaminedNumbers } from '../../core/check/examined.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
-import { fittingOf, supportBoltsOf, webBoltsOf } from '../../core/end/jointParts.ts';
+import { drawingWordsOf } from '../../core/drawing/wordsOf.ts';
 import { standards } from '../../core/standards/known.ts';
-import { fieldName, type Words } from '../../core/words/words.ts';
+import type { Words } from '../../core/words/words.ts';
 
 /** What the drawing of an end writes beside its sizes. */
-export const drawingWords = ({ end, designation, report }: ExaminedNumbers, words: Words): DrawingWords => {
-  const bolts = webBoltsOf(end.joint)?.bolts ?? supportBoltsOf(end.joint)!;
-  return {
+export const drawingWords = ({ end, designation, report }: ExaminedNumbers, words: Words): DrawingWords =>
+  drawingWordsOf(end, {
     units: report.units,
     section: designation.replace(/(?<=\d)\s*x\s*(?=\d)/gi, ' × ') || 'own section',
-    boltSize: bolts.size,
-    boltGrade: typeof bolts.grade === 'string' ? bolts.grade : '',
-    holes: bolts.holes ?? standards[report.standard.id]?.materials.holesAssumed ?? '',
-    cope: words.cope,
-    gauge: words.gauge,
-    plate: fieldName(words, fittingOf(end.joint).path),
-  };
-};
+    words,
+    standard: standards[report.standard.id]!,
+  });

@@ -1,8 +1,9 @@
 import { lastColumnX } from '../bolts.ts';
 import type { Area, Point, Stroke } from '../drawing.ts';
+import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
-import { type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+import { type PathMaker, path, tag, torn } from './pathMaker.ts';
 import { copeRupture, cutOf, faceOf } from './shear.ts';
 
 /** Width of the stress figure over its depth. */

@@ -1,9 +1,10 @@
 import { columnX, lastColumnX } from '../bolts.ts';
 import type { FailurePath } from '../drawing.ts';
+import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
-import { block, type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+import { block, type PathMaker, path, tag, torn } from './pathMaker.ts';
 
 /** Sheared along the inner column up to the cut edge, pulled apart along the last row to the beam's end; columns inside the cope only. */
 export const webBlock: PathMaker = (it, words) => {

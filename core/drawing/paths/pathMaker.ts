@@ -35,15 +35,3 @@ export const block = (left: number, top: number, right: number, bottom: number):
     { x: left, y: bottom },
   ],
 });
-
-const fittings: Readonly<Record<Facts['kind'], string>> = {
-  'fin-plate': 'joint.plate',
-  'web-bolts': 'joint.ply',
-  'double-cleat': 'joint.cleat',
-  'single-cleat': 'joint.cleat',
-  'end-plate': 'joint.plate',
-  'full-end-plate': 'joint.plate',
-};
-
-/** Field names of the plate, ply or cleat. */
-export const plateField = ({ kind }: Facts, name: string): string => `${fittings[kind]}.${name}`;

@@ -2,10 +2,11 @@ import type { CutFacts, Facts } from '../../end/facts.ts';
 import { columnX, rowY } from '../bolts.ts';
 import type { FailurePath, Stroke } from '../drawing.ts';
 import { drawnLength } from '../drawnLength.ts';
+import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
-import { type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+import { type PathMaker, path, tag, torn } from './pathMaker.ts';
 
 /** Through the full depth, beyond copes and plate. */
 export const webGrossShear: PathMaker = (it, words) => {

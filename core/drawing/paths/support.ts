@@ -1,6 +1,7 @@
+import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
-import { type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+import { type PathMaker, path, tag, torn } from './pathMaker.ts';
 
 /** Two planes through the support, beside the welds of the plate. */
 export const supportShear: PathMaker = (it, words) => {

@@ -1,10 +1,11 @@
 import type { Facts } from '../../end/facts.ts';
 import { columnX, lastColumnX } from '../bolts.ts';
 import type { FailurePath, Stroke } from '../drawing.ts';
+import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
-import { block, type PathMaker, path, plateField, tag, torn } from './pathMaker.ts';
+import { block, type PathMaker, path, tag, torn } from './pathMaker.ts';
 
 /** Two planes beside the bolts: `up` to the cut edge beside every column inside the cope (of the `first row` alone, or of all), or `along` the last row to the beam's end. */
 export const webTearout: PathMaker = (it, words, of) => {

@@ -1,6 +1,7 @@
+import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
-import { type PathMaker, path, plateField, tag } from './pathMaker.ts';
+import { type PathMaker, path, tag } from './pathMaker.ts';
 
 /** Two fillets along the plate at the support's face. */
 export const weld: PathMaker = (it, words) => {

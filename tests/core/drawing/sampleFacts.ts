@@ -174,6 +174,7 @@ export const sampleWords: DrawingWords = {
   cope: 'notch',
   gauge: 'gauge',
   plate: 'fin plate',
+  weldSymbols: 'iso',
 };
 
 /** A supporting beam whose top is level with the beam's. */

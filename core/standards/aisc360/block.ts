@@ -15,7 +15,7 @@ const noForce = constant('0', 0, '0,1');
 const uniform = constant('1.0', 1);
 
 /** 1 where the tension plane is pulled evenly: along one bolt column. */
-const evenness = (oneColumnOnly: Condition) =>
+export const evenness = (oneColumnOnly: Condition) =>
   step('U_bs', pick([[oneColumnOnly, uniform]], constant('0.5', 0.5)), source, 'one column 1.0, more 0.5');
 
 /** Block shear J4-5, N: nothing where the holes leave no net area in shear or in tension. */

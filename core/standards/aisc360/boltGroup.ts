@@ -3,17 +3,19 @@ import { flag, found, m, n, p, q } from '../../end/given.ts';
 import { boltCurve, coefficientsBy, pureMoment } from '../../end/instantaneousCentre.ts';
 import { over, pick, plus, root, squared, step, times } from '../../formula/tree.ts';
 import { manual } from './clauses.ts';
-import { e } from './conventional.ts';
+import { concentric, e } from './conventional.ts';
 
 const source = manual(7);
-const elastic = flag('option bolt-group: elastic', (f) => f.options['bolt-group'] === 'elastic');
-const solved = coefficientsBy(boltCurve);
+export const elastic = flag('option bolt-group: elastic', (f) => f.options['bolt-group'] === 'elastic');
+/** C of a pattern at an arm. */
+export const solved = coefficientsBy(boltCurve);
 
 /** How many bolts' worth an eccentric group carries: instantaneous centre per R_ult, not rescaled; or the elastic vector sum. */
 export const C = step(
   'C',
   pick(
     [
+      [concentric, N],
       [
         elastic,
         over(1, root(plus(squared(over(times(e, yMax), J)), squared(plus(over(1, N), over(times(e, xMax), J)))))),

@@ -6,16 +6,18 @@ import type { Force } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { C } from './boltGroup.ts';
 import { clause } from './clauses.ts';
-import { extended } from './conventional.ts';
+import { concentric, extended } from './conventional.ts';
 import { wideHoleRefers } from './limits.ts';
 import { type Method, rupture } from './method.ts';
 import { rp, rpEdge, rpFoot, rv, rw, rwEnd, rwTop, rwWeakest } from './oneBolt.ts';
 
 const shear = clause('J3.7');
 const bearing = clause('J3.11');
-const sumAsked = flag('option eccentric-bearing: sum', (f) => f.options['eccentric-bearing'] === 'sum');
+export const sumAsked = flag('option eccentric-bearing: sum', (f) => f.options['eccentric-bearing'] === 'sum');
 /** An eccentric group carries C times its weakest bolt; one that is nearly concentric C/N times the sum of its bolts. */
-const byWeakest = all(extended, not(sumAsked));
+const byWeakest = all(extended, not(concentric), not(sumAsked));
+
+const oneBoltAtArm: Limit = { ...oneBoltRefers, when: all(not(concentric), oneBoltRefers.when) };
 
 const group = (weakest: Tree<Force>, sum: Tree<Force>): Tree<Force> =>
   step('R_n', pick([[byWeakest, times(C, weakest)]], times(over(C, N), sum)), bearing);
@@ -27,7 +29,7 @@ const way = (resistance: Tree<Force>, limits: readonly Limit[], off: Way['off'] 
   demand: V,
   resistance,
   off,
-  limits: [oneBoltRefers, ...limits],
+  limits: [oneBoltAtArm, ...limits],
 });
 
 const rule = (source: Source, one: Way): StrengthRule => ({ source, ways: [one] });

@@ -5,6 +5,7 @@ import { atMost, over, pick, step } from '../../formula/tree.ts';
 import { INCH } from '../../units/systems.ts';
 import { leastEdge } from './boltTable.ts';
 import { manual } from './clauses.ts';
+import { noLength } from './given.ts';
 
 /** Sizes that meet a bound exactly keep meeting it after conversion from inches, mm. */
 const NOISE = 1e-9;
@@ -51,11 +52,18 @@ export const fits = within;
 
 export const conventionalPlate: Gate = { when: conventional, reason: 'conventional-plate' };
 
+/** Angles with one column within 3 in of the support: the Manual leaves the arm of their web bolts out. */
+export const concentric = flag(
+  'angles, one column within 3 in: no arm',
+  (f) => f.legWeb > 0 && f.m === 1 && within(f.z1, 3 * INCH),
+);
+
 /** Arm of the reaction to the centroid of the bolts. */
 export const e = step(
   'e',
   pick(
     [
+      [concentric, noLength],
       [extended, z],
       [atMost(n, 5), over(z1, 2)],
     ],

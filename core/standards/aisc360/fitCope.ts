@@ -1,5 +1,5 @@
 import type { Facts } from '../../end/facts.ts';
-import { type Gate, uncoped } from '../../end/gates.ts';
+import { type Gate, noWebHoles, uncoped } from '../../end/gates.ts';
 import { cb, ct, d0, db, dt, flag, found, g, h, rb, rt, support, tf } from '../../end/given.ts';
 import { constant, minus, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
@@ -35,7 +35,7 @@ export const fitCopeLength: FitRule = {
   parts: [
     { of: 'top', given: ct, most: times(2, h), off: [uncoped, noTop] },
     { of: 'bottom', given: cb, most: times(2, h), off: [uncoped, noBottom] },
-    { of: 'face to hole', given: apart, least: over(d0, 2), off: [uncoped] },
+    { of: 'face to hole', given: apart, least: over(d0, 2), off: [uncoped, noWebHoles] },
   ],
 };
 

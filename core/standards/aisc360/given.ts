@@ -16,6 +16,8 @@ export const Fup = given('F_up', '-2,1', (f) => f.fup);
 export const Fus = given('F_us', '-2,1', (f) => f.fus);
 /** Nominal shear strength of the bolts, threads as they lie. */
 export const Fnv = given('F_nv', '-2,1', (f) => f.fnv);
+/** Of the bolts into the support. */
+export const Fnvs = given('F_nv', '-2,1', (f) => f.supportBolts.fnv);
 export const FEXX = given('F_EXX', '-2,1', (f) => f.Xu);
 
 /** A length that the standard gives in inches; `said` as it is written there. */

@@ -6,25 +6,39 @@ import { fitWrench } from '../methods/fitWrench.ts';
 import { noRule, type Standard } from '../standard.ts';
 import { plateBlock, webBlock } from './block.ts';
 import { boltShear, plateBearing, webBearing, webTearout } from './bolts.ts';
+import { cleatBending } from './cleatBending.ts';
 import { conventional, extended } from './conventional.ts';
 import { copeBending } from './copeBending.ts';
 import { copeBuckling, toTop } from './copeBuckling.ts';
 import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitBolts.ts';
 import { fitCopeClearance, fitCopeDepth, fitCopeLength, fitCopeRadius, twoCopes } from './fitCope.ts';
-import { fitPlateDepth, fitRotation, fitSetback } from './fitPlate.ts';
+import { fitPlateDepth, fitSetback } from './fitPlate.ts';
+import { fitRotation } from './fitRotation.ts';
+import { cleatBearing, endplateBearing } from './fittingBearing.ts';
+import {
+  cleatBlock,
+  cleatGrossShear,
+  cleatNetShear,
+  endplateBlock,
+  endplateGrossShear,
+  endplateNetShear,
+} from './fittingShear.ts';
+import { jointNotes } from './jointNotes.ts';
 import { materials } from './materials.ts';
 import { asd, lrfd, type Method } from './method.ts';
 import { plateBending, plateBuckling } from './plate.ts';
 import { copeShear, plateGrossShear, plateNetShear, webNetShear } from './shear.ts';
+import { supportBearing, supportBoltShear } from './supportBolts.ts';
 import { supportShear } from './supportShear.ts';
 import { webTie } from './tie.ts';
 import { verified } from './verified.ts';
 import { webGrossShear } from './webGrossShear.ts';
+import { endplateWebShear, weldWeb } from './webWeld.ts';
 import { weld } from './weld.ts';
 
 const { stressFull, stressCope } = elasticStress({ clause: 'elastic', basis: 'memory' });
 const finPlate = flag('', (f) => f.kind === 'fin-plate', 'fin plate');
-const tied = flag('', (f) => f.T > 0, 'a tie force');
+const tied = flag('', (f) => f.T > 0 && f.n > 0, 'a tie force');
 
 /** ANSI/AISC 360-22 by either method: one set of rules, with φ and factored reactions or with Ω and service reactions. */
 export const aisc360 = (method: Method): Standard => ({
@@ -63,22 +77,22 @@ export const aisc360 = (method: Method): Standard => ({
     'plate-bending': plateBending(method),
     'plate-buckling': plateBuckling(method),
     weld: weld(method),
-    'cleat-bearing': noRule(),
-    'cleat-tearout': noRule(),
-    'cleat-gross-shear': noRule(),
-    'cleat-net-shear': noRule(),
-    'cleat-block': noRule(),
-    'cleat-bending': noRule(),
+    'cleat-bearing': cleatBearing(method),
+    'cleat-tearout': noRule('cleat-bearing'),
+    'cleat-gross-shear': cleatGrossShear(method),
+    'cleat-net-shear': cleatNetShear(method),
+    'cleat-block': cleatBlock(method),
+    'cleat-bending': cleatBending(method),
     'cleat-buckling': noRule(),
-    'endplate-bearing': noRule(),
-    'endplate-tearout': noRule(),
-    'endplate-gross-shear': noRule(),
-    'endplate-net-shear': noRule(),
-    'endplate-block': noRule(),
-    'endplate-web-shear': noRule(),
-    'weld-web': noRule(),
-    'support-bolt-shear': noRule(),
-    'support-bearing': noRule(),
+    'endplate-bearing': endplateBearing(method),
+    'endplate-tearout': noRule('endplate-bearing'),
+    'endplate-gross-shear': endplateGrossShear(method),
+    'endplate-net-shear': endplateNetShear(method),
+    'endplate-block': endplateBlock(method),
+    'endplate-web-shear': endplateWebShear(method),
+    'weld-web': weldWeb(method),
+    'support-bolt-shear': supportBoltShear(method),
+    'support-bearing': supportBearing(method),
     'support-shear': supportShear(method),
   },
   fit: {
@@ -102,6 +116,7 @@ export const aisc360 = (method: Method): Standard => ({
     { code: 'extended-plate', when: all(finPlate, extended) },
     { code: 'double-cope-arm', when: all(twoCopes, not(toTop)) },
     { code: 'tie-in-web-only', when: tied },
+    ...jointNotes,
   ],
 });
 

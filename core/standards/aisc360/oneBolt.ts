@@ -1,55 +1,23 @@
 import { noColumnInCope, oneColumn, oneRow } from '../../end/gates.ts';
-import { at, d, d0, eBot, ex, flag, n, p, q, tp, tw } from '../../end/given.ts';
-import {
-  atMost,
-  constant,
-  least,
-  minus,
-  most,
-  over,
-  pick,
-  squared,
-  step,
-  type Tree,
-  times,
-} from '../../formula/tree.ts';
+import { at, d, d0, eBot, ex, n, p, q, tw } from '../../end/given.ts';
+import { least, minus, most, over, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force, Length, Stress } from '../../units/dimension.ts';
+import { either } from './bearingShares.ts';
 import { clause } from './clauses.ts';
-import { Fnv, Fu, Fup, inches, noLength } from './given.ts';
+import { Fnv, Fu, Fup, noLength } from './given.ts';
+import { pair, plies } from './plies.ts';
+import { inOnePlane, shank } from './shearOfBolt.ts';
 import { endUsed } from './webEnd.ts';
 
 /** Nominal strengths of one bolt: in shear, J3.7; in bearing on a ply and tearing out of it, J3.11. N */
 const shear = clause('J3.7');
 const bearing = clause('J3.11');
 
-const area = step('A_b', over(times(constant('π', Math.PI), squared(d)), 4));
-const long = step('L', times(minus(n, 1), p));
-
-/** In one plane, threads as they lie; less in rows longer than 38 in. */
-export const rv = step(
-  'r_v',
-  pick([[atMost(long, inches('38', 38)), times(Fnv, area)]], times(0.833, Fnv, area)),
-  shear,
-);
-export const boltArea = area;
-
-const freely = flag(
-  'option hole-deformation: not-considered',
-  (f) => f.options['hole-deformation'] === 'not-considered',
-);
-
-/** Bearing and tear-out where the deformation of the hole counts, 2.4 and 1.2, or does not, 3.0 and 1.5. */
-interface Shares {
-  readonly borne: (t: Tree<Length>, Fu: Tree<Stress>) => Tree<Force>;
-  readonly torn: (clear: Tree<Length>, t: Tree<Length>, Fu: Tree<Stress>) => Tree<Force>;
-}
-const shares = (said: readonly [string, string]): Shares => {
-  const [b, t] = said.map((one) => constant(one, Number(one))) as [Tree<'0,0'>, Tree<'0,0'>];
-  return { borne: (ply, Fu) => times(b, d, ply, Fu), torn: (clear, ply, Fu) => times(t, clear, ply, Fu) };
-};
-const counted = shares(['2.4', '1.2']);
-const notCounted = shares(['3.0', '1.5']);
-const either = (force: (by: Shares) => Tree<Force>): Tree<Force> => pick([[freely, force(notCounted)]], force(counted));
+/** Shank area, mm2. */
+export const boltArea = shank(d);
+const onePlane = inOnePlane(Fnv, boltArea, n, p);
+/** In all its planes: two where a pair of angles holds the web. */
+export const rv = step('r_v', pick([[pair, times(2, onePlane)]], onePlane), shear);
 
 const between = minus(p, d0);
 const beside = minus(q, d0);
@@ -59,7 +27,7 @@ const half = over(d0, 2);
 const inner = (symbol: string, t: Tree<Length>, Fu: Tree<Stress>, note: string): Tree<Force> =>
   step(
     symbol,
-    either(({ borne, torn }) => pick([[oneRow, borne(t, Fu)]], least(borne(t, Fu), torn(between, t, Fu)))),
+    either(({ borne, torn }) => pick([[oneRow, borne(d, t, Fu)]], least(borne(d, t, Fu), torn(between, t, Fu)))),
     bearing,
     note,
   );
@@ -72,18 +40,18 @@ export const rwTop = step(
   bearing,
   'first row, to the cut edge',
 );
-export const rp = inner('r_p', tp, Fup, 'bolt in the plate');
+export const rp = inner('r_p', plies, Fup, 'bolt in plate or angles');
 /** Last row: tear-out down to the plate's edge. */
 export const rpFoot = step(
   'r_pn',
-  either(({ borne, torn }) => least(borne(tp, Fup), torn(minus(eBot, half), tp, Fup))),
+  either(({ borne, torn }) => least(borne(d, plies, Fup), torn(minus(eBot, half), plies, Fup))),
   bearing,
-  'last row, to the edge of the plate',
+  'last row, to the foot of plate or angles',
 );
 
 /** Clear distance to the beam's end and to the plate's free edge, none where the end distance used is too short. */
 const endClear = step('l_cw', most(minus(endUsed, half), noLength), bearing, "to the beam's end");
-const edgeClear = step('l_cp', minus(ex, half), bearing, "to the plate's free edge");
+const edgeClear = step('l_cp', minus(ex, half), bearing, 'to the free edge');
 const nearer = (symbol: string, clear: Tree<Length>): Tree<Length> =>
   step(symbol, pick([[oneColumn, clear]], least(clear, beside)), bearing, 'along the row');
 
@@ -98,15 +66,15 @@ export const rwEnd = step(
 );
 export const rpEdge = step(
   'r_pe',
-  either(({ torn }) => torn(plateAlong, tp, Fup)),
+  either(({ torn }) => torn(plateAlong, plies, Fup)),
   bearing,
-  'along the row, plate',
+  'along the row, plate or angles',
 );
 
 const along = (symbol: string, clear: Tree<Length>, t: Tree<Length>, Fu: Tree<Stress>, note: string): Tree<Force> =>
   step(
     symbol,
-    either(({ borne, torn }) => least(borne(t, Fu), torn(clear, t, Fu))),
+    either(({ borne, torn }) => least(borne(d, t, Fu), torn(clear, t, Fu))),
     bearing,
     note,
   );
@@ -115,8 +83,8 @@ const along = (symbol: string, clear: Tree<Length>, t: Tree<Length>, Fu: Tree<St
 export const pulled = {
   webLast: along('r_we', endClear, tw, Fu, "to the beam's end"),
   webInner: along('r_w', beside, tw, Fu, 'in the web, to the next column'),
-  plateLast: along('r_pe', edgeClear, tp, Fup, "to the plate's free edge"),
-  plateInner: along('r_p', beside, tp, Fup, 'in the plate, to the next column'),
+  plateLast: along('r_pe', edgeClear, plies, Fup, 'to the free edge'),
+  plateInner: along('r_p', beside, plies, Fup, 'in plate or angles, to the next column'),
 };
 
 /** The web's first row where some column stands inside the cope, else any of its bolts. */

@@ -1,8 +1,9 @@
-import { boltNotListed, noTieForce, oneColumn, singleRow } from '../../end/gates.ts';
+import { boltNotListed, noTieForce, noWebHoles, oneColumn, singleRow } from '../../end/gates.ts';
 import { dn, ho, m, n, T, tw } from '../../end/given.ts';
 import { pulled as pulledBlock } from '../../end/tearPaths.ts';
 import { least, minus, most, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
+import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { blockForce } from './block.ts';
 import { clause } from './clauses.ts';
@@ -36,7 +37,10 @@ const webBlock = blockForce(pulledBlock(tw, endUsed), Fy, Fu);
 const net = step('R_n', times(Fu, tw, most(minus(ho, times(n, dn)), noLength)), tension);
 const gross = step('R_n', times(Fy, tw, ho), tension);
 
-/** Tie force along the beam, acting alone: ordinary strengths of bolts and web; plate, weld and support are not in this check. */
+/**
+ * Tie force along the beam, acting alone: ordinary strengths of the web's bolts and of the web; plate, angles' legs, weld, support and its bolts
+ * are not in this check. Welded legs and end plates refer.
+ */
 export const webTie = ({ available }: Method): StrengthRule => {
   const way = (of: string, resistance: Tree<Force>, source: Way['source'] & object, more: Partial<Way> = {}): Way => ({
     of,
@@ -46,7 +50,7 @@ export const webTie = ({ available }: Method): StrengthRule => {
     resistance,
     source,
     ...more,
-    off: [noTieForce, ...(more.off ?? [])],
+    off: [noTieForce, noWebHoles, ...(more.off ?? [])],
   });
   return {
     source: tension,
@@ -55,6 +59,7 @@ export const webTie = ({ available }: Method): StrengthRule => {
       way('block, web', available(webBlock, rupture, block), block, { off: [singleRow] }),
       way('net tension, web', available(net, rupture, tension), tension),
       way('gross tension, web', available(gross, tensionYielding, tension), tension),
+      tieNotCovered,
     ],
   };
 };

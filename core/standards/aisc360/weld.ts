@@ -1,52 +1,27 @@
 import type { Gate, Limit } from '../../end/gates.ts';
 import { flag, hp, leg, tp, V, z } from '../../end/given.ts';
-import {
-  all,
-  atMost,
-  below,
-  constant,
-  most,
-  not,
-  over,
-  pick,
-  plus,
-  root,
-  squared,
-  step,
-  times,
-} from '../../formula/tree.ts';
+import { all, below, constant, most, not, over, plus, root, squared, step, times } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
 import { clause, manual } from './clauses.ts';
-import { FEXX, Fyp, inches, KSI } from './given.ts';
+import { FEXX, Fyp, KSI } from './given.ts';
+import { leastLeg } from './leastLeg.ts';
 import { type Method, rupture } from './method.ts';
+import { supportLegWeld } from './supportLegWeld.ts';
 
 const practice = manual(10);
-const table = clause('Table J2.4');
 const line = clause('J2.4');
 
 const ksi = (strength: number) => constant(`${strength} ksi`, strength * KSI, '-2,1');
-/** Least leg by the plate's thickness. */
-const leastLeg = step(
-  's_min',
-  pick(
-    [
-      [atMost(tp, inches('1/4', 1 / 4)), inches('1/8', 1 / 8)],
-      [atMost(tp, inches('1/2', 1 / 2)), inches('3/16', 3 / 16)],
-      [atMost(tp, inches('3/4', 3 / 4)), inches('1/4', 1 / 4)],
-    ],
-    inches('5/16', 5 / 16),
-  ),
-  table,
-);
 /** Leg with which the plate yields before its welds, both sides. */
 const legAsked = step(
   's_req',
-  most(times(constant('5/8', 0.625), tp, most(1, over(ksi(70), FEXX)), most(1, over(Fyp, ksi(50)))), leastLeg),
+  most(times(constant('5/8', 0.625), tp, most(1, over(ksi(70), FEXX)), most(1, over(Fyp, ksi(50)))), leastLeg(tp)),
   practice,
 );
 
 const byStrength = flag('option weld: strength', (f) => f.options.weld === 'strength');
 const tooSmall = below(leg, legAsked);
+const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'fin-plates-only' };
 const bySize: Gate = { when: all(not(byStrength), not(tooSmall)), reason: 'weld-by-size' };
 const notBySize: Gate = { when: not(bySize.when), reason: 'weld-by-strength' };
 const belowLeast: Limit = { when: tooSmall, reason: 'weld-leg-below-least', always: false };
@@ -59,20 +34,31 @@ const share = step(
   'on a length of weld, of each unit of V',
 );
 
-/** Two fillets of the plate's depth: sized so that the plate yields first; smaller ones as an elastic line under V and V z. */
-export const weld = ({ available }: Method): StrengthRule => ({
+/**
+ * Welds to the support. A plate's two fillets: sized so that it yields first; smaller ones as an elastic line under V and V z. Angles: a line
+ * along the toe of each leg.
+ */
+export const weld = (method: Method): StrengthRule => ({
   source: practice,
   ways: [
-    { of: 'size', symbol: 's', load: 'none', demand: legAsked, resistance: step('s', leg), off: [notBySize] },
+    {
+      of: 'size',
+      symbol: 's',
+      load: 'none',
+      demand: legAsked,
+      resistance: step('s', leg),
+      off: [notFinPlate, notBySize],
+    },
     {
       of: 'strength',
       symbol: 'v',
       load: 'V',
       demand: step('v', times(V, share), practice),
-      resistance: available(perLength, rupture, line, 'R_nw'),
-      off: [bySize],
+      resistance: method.available(perLength, rupture, line, 'R_nw'),
+      off: [notFinPlate, bySize],
       limits: [belowLeast],
       source: line,
     },
+    ...supportLegWeld(method),
   ],
 });

@@ -1,6 +1,6 @@
-import { noTieForce } from '../../end/gates.ts';
-import { flag, fys, hp, ts } from '../../end/given.ts';
-import { constant, least, not, step, times } from '../../formula/tree.ts';
+import { noSupportBolts, noTieForce } from '../../end/gates.ts';
+import { d, flag, fys, hp, supportBolts, ts } from '../../end/given.ts';
+import { constant, least, not, pick, step, times } from '../../formula/tree.ts';
 import { listedOf } from '../listed.ts';
 import { copeBuckling } from '../methods/copeBuckling.ts';
 import { elasticStress } from '../methods/elasticStress.ts';
@@ -9,9 +9,9 @@ import {
   fitCopeDepth,
   fitCopeLengthToCentres,
   fitPlateDepth,
-  fitRotation,
   fitSetback,
 } from '../methods/fitPractice.ts';
+import { fitRotationBy } from '../methods/fitRotation.ts';
 import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { supportShear } from '../methods/supportShear.ts';
@@ -110,7 +110,7 @@ export const as4100: Standard = {
     'fit-cope-radius': fitCopeRadius,
     'fit-cope-clearance': fitCopeClearance,
     'fit-setback': fitSetback,
-    'fit-rotation': fitRotation,
+    'fit-rotation': fitRotationBy(pick([[noSupportBolts.when, d]], supportBolts.d)),
     'fit-wrench': fitWrench,
   },
   verified,

@@ -1,5 +1,14 @@
-import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
-import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fyp, p, q, tp, tw } from '../../end/given.ts';
+import {
+  type Gate,
+  intactFlange,
+  noSupportBolts,
+  noWebHoles,
+  oneSupportRow,
+  singleColumn,
+  singleRow,
+} from '../../end/gates.ts';
+import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fyp, p, q, supportBolts, tp, tw } from '../../end/given.ts';
+import { oneLine } from '../../end/supportGroup.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
@@ -11,34 +20,42 @@ const noBottomCope: Gate = {
   when: flag('no column inside a bottom cope', (f) => f.mBottom === 0),
   reason: 'no-bottom-cope',
 };
+const oneLineOfBolts: Gate = { when: oneLine, reason: 'single-column' };
 
-const leastSpacing = step('p_min', times(2.5, d), spacing);
-const greatestSpacing = step(
-  'p_max',
-  least(times(16, least(tp, tw)), constant('200 mm', 200, '1,0')),
-  spacing,
-  'the thinner ply',
-);
+const leastSpacing = (d: Tree<Length>) => step('p_min', times(2.5, d), spacing);
+const greatestSpacing = (t: Tree<Length>, ply: string) =>
+  step('p_max', least(times(16, t), constant('200 mm', 200, '1,0')), spacing, ply);
+
+const inWeb = { least: leastSpacing(d), most: greatestSpacing(least(tp, tw), 'the thinner ply') };
+const inSupport = { least: leastSpacing(supportBolts.d), most: greatestSpacing(tp, 'leg or plate') };
 
 export const fitPitch: FitRule = {
   source: spacing,
   breach: 'fails',
-  parts: [{ of: '', given: p, least: leastSpacing, most: greatestSpacing, off: [singleRow] }],
+  parts: [
+    { of: '', given: p, ...inWeb, off: [noWebHoles, singleRow] },
+    { of: 'support bolts', given: supportBolts.p, ...inSupport, off: [noSupportBolts, oneSupportRow] },
+  ],
 };
 
+/** Between columns; the two lines of support bolts, with the web between them, need their least alone. */
 export const fitGauge: FitRule = {
   source: spacing,
   breach: 'fails',
-  parts: [{ of: '', given: q, least: leastSpacing, most: greatestSpacing, off: [singleColumn] }],
+  parts: [
+    { of: '', given: q, ...inWeb, off: [noWebHoles, singleColumn] },
+    { of: 'cross centres', given: supportBolts.cc, least: inSupport.least, off: [noSupportBolts, oneLineOfBolts] },
+  ],
 };
 
 const machined = flag('option edges: machine', (f) => f.options.edges === 'machine');
 /** An edge sheared or flame cut by hand, unless the shop cuts by machine; an edge sawn. */
-const cutEdge = step('e_min', pick([[machined, times(1.5, d0)]], times(1.7, d0)), edges);
+const cutEdgeBy = (d0: Tree<Length>): Tree<Length> =>
+  step('e_min', pick([[machined, times(1.5, d0)]], times(1.7, d0)), edges);
+const cutEdge = cutEdgeBy(d0);
 const sawnEdge = step('e_min', times(1.5, d0), edges);
 const greatestEdge = (t: Tree<Length>, fy: Tree<Stress>): Tree<Length> =>
   step('e_max', times(12, t, epsilon(fy)), { ...edges, basis: 'memory' });
-const plateMost = greatestEdge(tp, fyp);
 
 /** Edge distances of the cut web, IS 800:2007 cl. 10.2.4, by the hole's diameter. */
 export const fitEdgeWeb: FitRule = {
@@ -56,12 +73,28 @@ export const fitEnd: FitRule = {
   parts: [{ of: '', given: eEnd, least: sawnEdge, most: greatestEdge(tw, fyw) }],
 };
 
+const rolledToe = (d0: Tree<Length>): Tree<Length> => step('e_min', times(1.5, d0), edges, 'rolled toe');
+const cleat = flag('', (f) => f.legWeb > 0, 'a cleat');
+const most = greatestEdge(tp, fyp);
+const atWeb = { most, off: [noWebHoles] };
+const atSupport = { most, off: [noSupportBolts] };
+const cutAtSupport = cutEdgeBy(supportBolts.d0);
+
+/** Edges of plate, ply, or cleat, whose toes are rolled: beside the bolts through the web, and beside those into the support. */
 export const fitEdgePlate: FitRule = {
   source: edges,
   breach: 'fails',
   parts: [
-    { of: 'top', given: eTop, least: cutEdge, most: plateMost },
-    { of: 'bottom', given: eBot, least: cutEdge, most: plateMost },
-    { of: 'free edge', given: ex, least: cutEdge, most: plateMost },
+    { of: 'top', given: eTop, least: cutEdge, ...atWeb },
+    { of: 'bottom', given: eBot, least: cutEdge, ...atWeb },
+    { of: 'free edge', given: ex, least: pick([[cleat, rolledToe(d0)]], cutEdge), ...atWeb },
+    { of: 'top, support bolts', given: supportBolts.eTop, least: cutAtSupport, ...atSupport },
+    { of: 'bottom, support bolts', given: supportBolts.eBot, least: cutAtSupport, ...atSupport },
+    {
+      of: 'free edge, support bolts',
+      given: supportBolts.eh,
+      least: pick([[cleat, rolledToe(supportBolts.d0)]], cutAtSupport),
+      ...atSupport,
+    },
   ],
 };

@@ -1,6 +1,6 @@
-import { noTieForce } from '../../end/gates.ts';
-import { flag, fys, hp, ts } from '../../end/given.ts';
-import { all, not, over, step, times } from '../../formula/tree.ts';
+import { noSupportBolts, noTieForce } from '../../end/gates.ts';
+import { d, flag, fys, hp, supportBolts, ts } from '../../end/given.ts';
+import { all, not, over, pick, step, times } from '../../formula/tree.ts';
 import { listedOf } from '../listed.ts';
 import { copeBuckling } from '../methods/copeBuckling.ts';
 import { elasticStress } from '../methods/elasticStress.ts';
@@ -10,9 +10,9 @@ import {
   fitCopeLengthToCentres,
   fitCopeRadius,
   fitPlateDepth,
-  fitRotation,
   fitSetback,
 } from '../methods/fitPractice.ts';
+import { fitRotationBy } from '../methods/fitRotation.ts';
 import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { supportShear } from '../methods/supportShear.ts';
@@ -112,7 +112,7 @@ export const is800: Standard = {
     'fit-cope-radius': fitCopeRadius,
     'fit-cope-clearance': fitCopeClearance,
     'fit-setback': fitSetback,
-    'fit-rotation': fitRotation,
+    'fit-rotation': fitRotationBy(pick([[noSupportBolts.when, d]], supportBolts.d)),
     'fit-wrench': fitWrench,
   },
   verified,

@@ -42,7 +42,7 @@ const m = step(
 const edge = step('n′', least(eh, times(1.25, m)), guide);
 /** Clear width between the welds or roots. Without a radius the thickness stands in its place. mm */
 const s = step(
-  's',
+  's_c',
   pick([[isCleat, minus(gap, times(2, pick([[noRadius, tp]], rootRadius)))]], minus(gap, times(2, leg))),
   guide,
 );

@@ -15,8 +15,8 @@ const yielding = memory('1-1 6.2.6');
 
 /** The weaker of web and plate, and of the weld metal where it is told; the larger factor of the two. */
 export const webWeldStrength = filletStrength(
-  step('f_u', leastOf([fup, fu], [metal]), source),
-  step('β_w', most(betaOf(fup), betaOf(fu)), source),
+  step('f_uw', leastOf([fup, fu], [metal]), source),
+  step('β_w', most(step('β_1', betaOf(fup), source), step('β_2', betaOf(fu), source)), source),
 );
 
 /**

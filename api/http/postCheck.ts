@@ -1,3 +1,4 @@
+import type { Outcome } from '../../core/check/report.ts';
 import { checkText, END_MOST_BYTES, lineOf } from '../checkText.ts';
 import { reportJson } from '../json/reportJson.ts';
 import { linesOf } from '../linesOf.ts';
@@ -16,15 +17,19 @@ const countLines = (body: Uint8Array): number => {
   return body.at(-1) === 0x0a ? count - 1 : count;
 };
 
+const NEWLINE = Buffer.from('\n');
+
+const lineBytes = (outcome: Outcome): readonly Uint8Array[] =>
+  'report' in outcome ? [reportJson(outcome.report), NEWLINE] : [Buffer.from(lineOf(outcome))];
+
 /** One line back for each line of the body, as fast as the caller takes them. */
 const answered = (body: Uint8Array, working: boolean): ReadableStream<Uint8Array> => {
   const batches = linesOf([body], END_MOST_BYTES);
-  const encoder = new TextEncoder();
   return new ReadableStream<Uint8Array>({
     async pull(controller) {
       const { done, value } = await batches.next();
       if (done) controller.close();
-      else controller.enqueue(encoder.encode(value.map((line) => lineOf(checkText(line, { working }))).join('')));
+      else controller.enqueue(Buffer.concat(value.flatMap((line) => lineBytes(checkText(line, { working })))));
     },
   });
 };

@@ -3,11 +3,11 @@ import { connect } from 'node:net';
 
 const END_OF_HEAD = Buffer.from('\r\n\r\n');
 
-/** What is asked, again and again. */
+/** What is asked, the bodies one after the other, again and again. */
 export interface Request {
   readonly port: number;
   readonly path: string;
-  readonly body: string;
+  readonly bodies: readonly string[];
 }
 
 export interface Load {
@@ -18,26 +18,27 @@ export interface Load {
   readonly bytes: number;
 }
 
-const written = ({ port, path, body }: Request): string =>
-  [
-    `POST ${path} HTTP/1.1`,
-    `Host: 127.0.0.1:${port}`,
-    'Content-Type: application/json',
-    `Content-Length: ${Buffer.byteLength(body)}`,
-    '',
-    body,
-  ].join('\r\n');
+const written = ({ port, path, bodies }: Request): string[] =>
+  bodies.map((body) =>
+    [
+      `POST ${path} HTTP/1.1`,
+      `Host: 127.0.0.1:${port}`,
+      'Content-Type: application/json',
+      `Content-Length: ${Buffer.byteLength(body)}`,
+      '',
+      body,
+    ].join('\r\n'),
+  );
 
 /** Asks over one connection until `until`; the times of the answers are added to `times`. */
-const asking = async (request: Request, until: number, times: number[]): Promise<number> => {
-  const socket = connect(request.port, '127.0.0.1').setNoDelay(true);
+const asking = async (port: number, next: () => string, until: number, times: number[]): Promise<number> => {
+  const socket = connect(port, '127.0.0.1').setNoDelay(true);
   await once(socket, 'connect');
-  const text = written(request);
   let bytes = 0;
   await new Promise<void>((resolve, reject) => {
     let pending: Buffer = Buffer.alloc(0);
     let asked = performance.now();
-    socket.write(text);
+    socket.write(next());
     socket.on('error', reject);
     socket.on('data', (chunk: Buffer) => {
       pending = pending.length === 0 ? chunk : Buffer.concat([pending, chunk]);
@@ -55,7 +56,7 @@ const asking = async (request: Request, until: number, times: number[]): Promise
       const now = performance.now();
       times.push(now - asked);
       asked = now;
-      if (now < until) socket.write(text);
+      if (now < until) socket.write(next());
       else resolve();
     });
   });
@@ -66,8 +67,11 @@ const asking = async (request: Request, until: number, times: number[]): Promise
 /** Keeps a server busy over so many connections for so long, ms. */
 export const load = async (request: Request, connections: number, duration: number): Promise<Load> => {
   const times: number[] = [];
+  const texts = written(request);
+  let asked = 0;
+  const next = (): string => texts[asked++ % texts.length]!;
   const start = performance.now();
-  const ask = () => asking(request, start + duration, times);
+  const ask = () => asking(request.port, next, start + duration, times);
   const [bytes = 0] = await Promise.all(Array.from({ length: connections }, ask));
   const seconds = (performance.now() - start) / 1000;
   times.sort((a, b) => a - b);

@@ -153,7 +153,9 @@ const jsonOf = (end: SecondEnd, beside: SupportName | undefined) => {
     joint: end.weld
       ? { kind: 'fin-plate', ...place, plate: ply, weld: end.weld }
       : { kind: 'web-bolts', ...place, ply },
-    ...(beside && { support: { kind: 'beam-web', section: beside, topOfSteel: end.support?.topOfSteel } }),
+    ...(beside && {
+      support: { kind: 'beam-web', section: beside, grade: end.web, topOfSteel: end.support?.topOfSteel },
+    }),
     options: end.options,
   };
 };

@@ -397,6 +397,9 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
       resistance: line,
       limit: (weld?.leg ?? 0) < leastLeg && 'weld-leg-below-least',
     }),
+    'support-shear': support
+      ? strength(V, { per: 1, resistance: 2 * 0.6 * 0.9 * fy * support.web * hp })
+      : no('no-support'),
     'fit-pitch': n > 1 ? size('fails', p, 2.7 * d) : no('single-row'),
     'fit-gauge': m > 1 ? size('fails', q, 2.7 * d) : no('single-column'),
     'fit-edge-web':

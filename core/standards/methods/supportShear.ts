@@ -22,6 +22,9 @@ export const sharedWeb = flag(
 const shared: Gate = { when: sharedWeb, reason: 'beam-opposite' };
 const alone: Gate = { when: not(sharedWeb), reason: 'no-beam-opposite' };
 
+/** The formula of a step without its name: leaned on so, the step itself stays the last line of a working. */
+const bare = (tree: Tree<Force>): Tree<Force> => (tree.op === 'step' ? (tree.of[0] as Tree<Force>) : tree);
+
 /**
  * What a web of the support carries, N, against V or, where a beam on the other side hangs on the same web, against V + V_o: its reaction is
  * taken as given, so that V may grow to what it leaves.
@@ -33,7 +36,7 @@ export const onSupport = (way: Omit<Way, 'symbol' | 'demand' | 'load'> & { resis
     symbol: 'V + V_o',
     load: 'V',
     demand: step('V_s', plus(V, Vo), undefined, 'with the beam on the other side'),
-    failsAt: step('V_fail', minus(way.resistance, Vo), undefined, 'what the beam on the other side leaves'),
+    failsAt: step('V_fail', minus(bare(way.resistance), Vo), undefined, 'what the beam on the other side leaves'),
     off: [...(way.off ?? []), alone],
   },
 ];

@@ -1,9 +1,9 @@
-import { copeLimits, intactFlange } from '../../end/gates.ts';
-import { flag, fu, fup, fy, fyp, V } from '../../end/given.ts';
-import { type Block, plateBlock as plate, webBlock as web } from '../../end/tearPaths.ts';
+import { copeLimits, fullDepthPlate, intactFlange, noSupportBolts, noWebHoles } from '../../end/gates.ts';
+import { flag, fu, fup, fy, fyp, k, V } from '../../end/given.ts';
+import { type Block, plateBlock as plate, supportBlock, webBlock as web } from '../../end/tearPaths.ts';
 import { constant, least, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
-import type { Stress } from '../../units/dimension.ts';
-import type { StrengthRule } from '../standard.ts';
+import type { Pure, Stress } from '../../units/dimension.ts';
+import type { StrengthRule, Way } from '../standard.ts';
 import { phi } from './factors.ts';
 
 const source = { clause: '13.11', basis: 'memory' } as const;
@@ -48,4 +48,27 @@ export const webBlock: StrengthRule = {
 export const plateBlock: StrengthRule = {
   source,
   ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: generalBlock(plate, fyp, fup) }],
+};
+
+const fitting = (of: string, count: Tree<Pure> | 2, block: Block): Way => ({
+  of,
+  symbol: 'V',
+  load: 'V',
+  demand: V,
+  resistance: step('V_r', times(count, generalBlock(block, fyp, fup)), source),
+});
+
+/** Block tearing of each cleat, cl. 13.11: its web leg as a plate, its support leg pushed up beside the line of bolts. */
+export const cleatBlock: StrengthRule = {
+  source,
+  ways: [
+    { ...fitting('web leg', k, plate), off: [noWebHoles] },
+    { ...fitting('support leg', k, supportBlock), off: [noSupportBolts] },
+  ],
+};
+
+/** Block tearing of an end plate, cl. 13.11: pushed up beside each of the two lines of bolts. */
+export const endPlateBlock: StrengthRule = {
+  source,
+  ways: [{ ...fitting('', 2, supportBlock), limits: [fullDepthPlate] }],
 };

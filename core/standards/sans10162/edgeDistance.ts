@@ -1,4 +1,4 @@
-import { flag } from '../../end/given.ts';
+import { flag, supportBolts } from '../../end/given.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import { type EdgeRow, edgeTable } from '../methods/edgeTable.ts';
@@ -17,6 +17,7 @@ const rows: readonly EdgeRow[] = [
 
 const source = { clause: '22.3', basis: 'memory' } as const;
 const table = edgeTable(rows, [1.75, 1.25], 'table of cl. 22.3', source);
+const supportTable = edgeTable(rows, [1.75, 1.25], 'table of cl. 22.3', source, supportBolts.d);
 
 export const shearedEdge: Tree<Length> = table.sheared;
 export const cutEdge: Tree<Length> = table.cut;
@@ -25,6 +26,10 @@ const cutPlates = flag('option plate-edges: cut', (f) => f.options['plate-edges'
 
 /** Least edge distance of a plate. */
 export const plateEdge: Tree<Length> = pick([[cutPlates, cutEdge]], shearedEdge);
+
+/** The same beside the bolts into the support; the toe of a cleat is rolled. */
+export const supportCutEdge: Tree<Length> = supportTable.cut;
+export const supportPlateEdge: Tree<Length> = pick([[cutPlates, supportTable.cut]], supportTable.sheared);
 
 /** Greatest edge distance in a ply of this thickness. */
 export const greatestEdge = (t: Tree<Length>): Tree<Length> =>

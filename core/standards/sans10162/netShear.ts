@@ -1,7 +1,8 @@
-import { copeLimits } from '../../end/gates.ts';
-import { dn, fu, fup, ho, hp, n, tp, tw, V } from '../../end/given.ts';
-import { minus, step, times } from '../../formula/tree.ts';
-import type { StrengthRule } from '../standard.ts';
+import { copeLimits, fullDepthPlate, noSupportBolts, noWebHoles } from '../../end/gates.ts';
+import { dn, fu, fup, ho, hp, k, n, supportBolts, tp, tw, V } from '../../end/given.ts';
+import { minus, step, type Tree, times } from '../../formula/tree.ts';
+import type { Length, Pure } from '../../units/dimension.ts';
+import type { StrengthRule, Way } from '../standard.ts';
 import { phi } from './factors.ts';
 
 /** Rupture in shear through one bolt column: the net-shear term of SANS 10162-1:2011 cl. 13.11 on its own. */
@@ -32,4 +33,30 @@ export const plateNetShear: StrengthRule = {
       resistance: step('V_r', times(0.6, phi, fup, tp, minus(hp, times(n, dn))), source),
     },
   ],
+};
+
+const depthLeft = (rows: Tree<Pure>, hole: Tree<Length>): Tree<Length> => minus(hp, times(rows, hole));
+const inSupport = depthLeft(supportBolts.n, supportBolts.dn);
+
+const fitting = (of: string, count: Tree<Pure> | 2, left: Tree<Length>): Way => ({
+  of,
+  symbol: 'V',
+  load: 'V',
+  demand: V,
+  resistance: step('V_r', times(count, 0.6, phi, fup, tp, left), source),
+});
+
+/** Through the bolts of each leg of the cleats. */
+export const cleatNetShear: StrengthRule = {
+  source,
+  ways: [
+    { ...fitting('web leg', k, depthLeft(n, dn)), off: [noWebHoles] },
+    { ...fitting('support leg', k, inSupport), off: [noSupportBolts] },
+  ],
+};
+
+/** Through both lines of bolts of an end plate. */
+export const endPlateNetShear: StrengthRule = {
+  source,
+  ways: [{ ...fitting('', 2, inSupport), limits: [fullDepthPlate] }],
 };

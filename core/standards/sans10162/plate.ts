@@ -1,5 +1,7 @@
-import { fyp, hp, tp, V, z } from '../../end/given.ts';
+import { fullDepthPlate } from '../../end/gates.ts';
+import { fyp, fys, hp, k, tp, ts, V, z } from '../../end/given.ts';
 import { over, squared, step, times } from '../../formula/tree.ts';
+import { supportShear as ofSupport } from '../methods/supportShear.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phi } from './factors.ts';
 
@@ -11,6 +13,35 @@ export const plateGrossShear: StrengthRule = {
   source: gross,
   ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: step('V_r', times(0.6, phi, fyp, tp, hp), gross) }],
 };
+
+/** Each cleat's full depth. */
+export const cleatGrossShear: StrengthRule = {
+  source: gross,
+  ways: [
+    { of: '', symbol: 'V', load: 'V', demand: V, resistance: step('V_r', times(k, 0.6, phi, fyp, tp, hp), gross) },
+  ],
+};
+
+/** Two planes of an end plate, beside the web. */
+export const endPlateGrossShear: StrengthRule = {
+  source: gross,
+  ways: [
+    {
+      of: '',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('V_r', times(2, 0.6, phi, fyp, tp, hp), gross, 'both sides of the web'),
+      limits: [fullDepthPlate],
+    },
+  ],
+};
+
+/** Two planes of the support's web, beside plate or cleats. */
+export const supportShear: StrengthRule = ofSupport(
+  gross,
+  step('V_r', times(2, 0.6, phi, fys, ts, hp), gross, 'both sides of plate or cleats'),
+);
 
 /** First yield of the plate in bending under V at the centroid of the bolts. */
 export const plateBending: StrengthRule = {

@@ -1,9 +1,12 @@
 import { N } from '../../end/boltGroup.ts';
-import { type Gate, noTieForce, singleRow } from '../../end/gates.ts';
-import { dn, flag, fu, fup, fy, fyp, ho, hp, n, T, tp, tw } from '../../end/given.ts';
+import { noTieForce, noWebHoles, singleRow } from '../../end/gates.ts';
+import { dn, fu, fup, fy, fyp, ho, hp, k, n, T, tp, tw } from '../../end/given.ts';
 import { type Block, platePulled, webPulled } from '../../end/tearPaths.ts';
 import { least, minus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force, Length, Stress } from '../../units/dimension.ts';
+import { notCleat, notFinPlate, ofCleat } from '../methods/kinds.ts';
+import { supportLegsBent } from '../methods/supportLegsBent.ts';
+import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { generalBlock } from './block.ts';
 import { bearingOn, boltResistance } from './bolts.ts';
@@ -18,7 +21,8 @@ const way = (of: string, resistance: Tree<Force>, off: Way['off'] = []): Way => 
   load: 'T',
   demand: T,
   resistance,
-  off: [noTieForce, ...off],
+  off: [noTieForce, noWebHoles, ...off],
+  limits: [supportLegsBent],
 });
 
 const netTension = (t: Tree<Length>, depth: Tree<Length>, fu: Tree<Stress>) =>
@@ -28,13 +32,17 @@ const netTension = (t: Tree<Length>, depth: Tree<Length>, fu: Tree<Stress>) =>
 const rowByRow = ({ Agv, Anv }: Block, fy: Tree<Stress>, fu: Tree<Stress>) =>
   step('T_r', times(n, least(times(0.6, phi, Agv, fy), times(0.6, phi, Anv, fu))), source);
 
-const noWeld: Gate = { when: flag('no weld', (f) => f.kind === 'web-bolts'), reason: 'no-weld' };
-
 const bolts = step('T_r', times(N, boltResistance), source);
+const bearing = step('T_r', times(N, bearingOn(tp, fup)), source);
+const block = generalBlock(platePulled, fyp, fup);
+const rows = rowByRow(platePulled, fyp, fup);
+const net = netTension(tp, hp, fup);
+const eachCleat = (one: Tree<Force>): Tree<Force> => step('T_r', times(k, one), source, 'each cleat');
 
 /**
  * Tie force along the beam, acting alone: bolts in shear shared evenly, bearing, a block or each row pulled out to the end, net tension;
- * in the web and, as the same joint hangs on them, in the plate and its weld.
+ * in the web and, as the same joint hangs on them, in the plate and its weld, or in the web legs of cleats. Their support legs, bent open, and
+ * the bolts there have no formula, nor have welded legs and end plates: these refer.
  */
 export const webTie: StrengthRule = {
   source,
@@ -44,10 +52,15 @@ export const webTie: StrengthRule = {
     way('block, web', generalBlock(webPulled, fy, fu), [singleRow]),
     way('rows, web', rowByRow(webPulled, fy, fu)),
     way('net tension, web', netTension(tw, ho, fu)),
-    way('bearing, plate', step('T_r', times(N, bearingOn(tp, fup)), source)),
-    way('block, plate', generalBlock(platePulled, fyp, fup), [singleRow]),
-    way('rows, plate', rowByRow(platePulled, fyp, fup)),
-    way('net tension, plate', netTension(tp, hp, fup)),
-    way('weld', step('T_r', times(2, hp, filletLine), source), [noWeld]),
+    way('bearing, plate', bearing, [ofCleat]),
+    way('block, plate', block, [ofCleat, singleRow]),
+    way('rows, plate', rows, [ofCleat]),
+    way('net tension, plate', net, [ofCleat]),
+    way('weld', step('T_r', times(2, hp, filletLine), source), [notFinPlate]),
+    way('bearing, web leg', eachCleat(bearing), [notCleat]),
+    way('block, web leg', eachCleat(block), [notCleat, singleRow]),
+    way('rows, web leg', eachCleat(rows), [notCleat]),
+    way('net tension, web leg', eachCleat(net), [notCleat]),
+    tieNotCovered,
   ],
 };

@@ -1,12 +1,14 @@
 import { hp, leg, V, Xu, z } from '../../end/given.ts';
+import { supportLegWeldForce } from '../../end/weldGroup.ts';
 import { over, plus, root, squared, step, times } from '../../formula/tree.ts';
+import { notCleat, ofCleat } from '../methods/kinds.ts';
 import { leastLeg, legBelow } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiW } from './factors.ts';
 
 const source = { clause: '13.13.2.2', basis: 'memory' } as const;
 /** Least leg by the thicker part, mm. */
-const least = leastLeg(
+export const least = leastLeg(
   [
     [12, 5],
     [20, 6],
@@ -18,7 +20,10 @@ const least = leastLeg(
 /** Strength of one fillet along its length, N/mm: weld metal, no gain for the angle of the force. */
 export const filletLine = step('v_r', over(times(0.67, phiW, Xu, leg), root(2)), source);
 
-/** Two upright fillets of the plate's depth under V and V z, elastic line, SANS 10162-1:2011 cl. 13.13.2.2 with θ = 0. */
+/**
+ * SANS 10162-1:2011 cl. 13.13.2.2 with θ = 0: two upright fillets of the plate's depth under V and V z, elastic line; or one fillet along the
+ * toe of a cleat's support leg with its share of V at the length of that leg.
+ */
 export const weld: StrengthRule = {
   source,
   ways: [
@@ -33,6 +38,16 @@ export const weld: StrengthRule = {
         'elastic line: shear, and bending at its ends',
       ),
       resistance: filletLine,
+      off: [ofCleat],
+      limits: [legBelow(least)],
+    },
+    {
+      of: 'support leg',
+      symbol: 'q_w',
+      load: 'V',
+      demand: supportLegWeldForce,
+      resistance: filletLine,
+      off: [notCleat],
       limits: [legBelow(least)],
     },
   ],

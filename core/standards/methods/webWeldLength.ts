@@ -1,0 +1,5 @@
+import { hp, leg } from '../../end/given.ts';
+import { minus, step, times } from '../../formula/tree.ts';
+
+/** What counts of an end plate's welds along the web, mm: its depth without a leg at each end. */
+export const webWeldLength = step('L_w', minus(hp, times(2, leg)), undefined, 'without a leg at each end');

@@ -1,29 +1,20 @@
-import { fittingOf, webBoltsOf, weldOf } from '../end/jointParts.ts';
+import { fittingOf } from '../end/jointParts.ts';
 import { fixed, plain } from '../units/figures.ts';
 import { capital } from '../words/capital.ts';
 import type { Context, Zone } from './context.ts';
+import { assumed, gradeName, type Row } from './givenWords.ts';
+import { jointRows } from './jointRows.ts';
 import { body } from './page.ts';
 import type { TextStyle } from './pen.ts';
 import { richText } from './richText.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { plainRun, setLines, wrap } from './textBlock.ts';
 
-type Row = readonly [label: string, value: string];
-
 const { labels } = say;
 /** Between the labels and what they name, mm. */
 const AIR = 1.5;
 const LEADING = 3.68;
 const HEADING = 4.4;
-
-/** ` (assumed)` where the report says that nothing was given at this path. */
-export const assumed = ({ input }: Context, path: string): string =>
-  input.report.assumptions.some((one) => one.path === path) ? say.assumed : '';
-
-const gradeName = ({ numbers }: Context, grade: string | { fy?: number; fu: number }): string => {
-  if (typeof grade === 'string') return grade;
-  return grade.fy === undefined ? `f_u ${numbers.load(grade.fu)}` : `f_y ${numbers.load(grade.fy)}`;
-};
 
 /** A designation with the sign of multiplication, as a drawing writes it. */
 export const sectionName = (designation: string): string => designation.replace(/(?<=\d)x(?=\d)/g, ' × ');
@@ -34,7 +25,7 @@ const beamRows = (context: Context): Row[] => {
   const { mm, mpa } = numbers;
   const name = sectionName(designation) || `${say.ownSize} ${mm(facts.h)} × ${mm(facts.b)}`;
   const sizes = `h ${mm(facts.h)}, b ${mm(facts.b)}, t_f ${mm(facts.tf)}, t_w ${mm(facts.tw)}, r ${mm(facts.r)}`;
-  const other = end.joint.kind === 'fin-plate' ? say.plateInSteel : say.plyInSteel;
+  const other = say.inSteel[fittingOf(end.joint).path] ?? '';
   const steel = `f_y ${mpa(facts.fy)}, f_u ${mpa(facts.fu)}; ${other} ${mpa(facts.fyp)}, ${mpa(facts.fup)}`;
   return [
     [labels.beam, `${name}, ${gradeName(context, end.beam.grade)}`],
@@ -56,56 +47,6 @@ const copeRow = (context: Context): Row => {
   ];
 };
 
-const boltRows = (context: Context): Row[] => {
-  const { input, numbers } = context;
-  const { end, facts } = input;
-  const { mm, mpa } = numbers;
-  const bolts = webBoltsOf(end.joint)?.bolts;
-  if (!bolts) return [];
-  const columns = facts.m > 1 ? `${facts.m} × ` : '';
-  const grade = typeof bolts.grade === 'string' ? ` ${bolts.grade}` : '';
-  const threads = say.threads[facts.threadsIn ? 'in' : 'out'] + assumed(context, 'joint.bolts.threads');
-  const made = (bolts.holes ?? holesAssumed(context)) + assumed(context, 'joint.bolts.holes');
-  const gauge = facts.m > 1 ? `, q ${mm(facts.q)}` : '';
-  const pitch = facts.n > 1 ? `, p ${mm(facts.p)}` : '';
-  return [
-    [labels.bolts, `${columns}${facts.n} ${bolts.size}${grade}, f_ub ${mpa(facts.fub)}, ${threads}`],
-    [labels.holes, `d_0 ${mm(facts.d0)} ${made}, d′ ${mm(facts.dn)}`],
-    [labels.rows, `y_1 ${mm(facts.y1)}${pitch}, e_end ${mm(facts.eEnd)}${gauge}; ${say.setback} g ${mm(facts.g)}`],
-  ];
-};
-
-/** How holes were taken, as the report's assumption states it. */
-export const holesAssumed = ({ input }: Context): string => {
-  const note = input.report.assumptions.find(({ code }) => code === 'holes-assumed');
-  return /punched/.test(note?.text ?? '') ? 'punched' : 'drilled';
-};
-
-const plateRows = (context: Context): Row[] => {
-  const { input, numbers, words } = context;
-  const { end, facts } = input;
-  const { mm, mpa } = numbers;
-  const { joint } = end;
-  const edges = `e_top ${mm(facts.eTop)}, e_bot ${mm(facts.eBot)}, e_x ${mm(facts.ex)}`;
-  if (joint.kind === 'web-bolts') {
-    const size = `${mm(facts.tp)} × ${mm(facts.hp)}, ${gradeName(context, fittingOf(joint).grade)}`;
-    return [
-      [labels.ply, size],
-      ['', edges],
-    ];
-  }
-  const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
-  const metal = facts.Xu > 0 ? `, X_u ${mpa(facts.Xu)}${assumed(context, `${weldOf(joint)?.path}.electrode`)}` : '';
-  return [
-    [
-      capital(words.finPlate),
-      `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${gradeName(context, fittingOf(joint).grade)}`,
-    ],
-    ['', edges],
-    [labels.weld, `${say.fillets} s ${mm(facts.leg)}${metal}`],
-  ];
-};
-
 const loadRows = (context: Context): Row[] => {
   const { input, numbers, words } = context;
   const { end, facts, report } = input;
@@ -113,12 +54,17 @@ const loadRows = (context: Context): Row[] => {
   const level = `${report.level}${assumed(context, 'level')}`;
   const tie = `${say.tie} T ${numbers.load(end.tie ?? 0)}`;
   const arm = facts.tee.here ? facts.tee : facts.rectangle;
-  const toCope = arm.here ? `, e_c ${numbers.mm(arm.ec)} ${say.toCope(words.cope)}` : '';
+  const arms = [
+    facts.n > 0 ? `z ${numbers.mm(facts.z)} ${say.toBolts}` : '',
+    arm.here ? `e_c ${numbers.mm(arm.ec)} ${say.toCope(words.cope)}` : '',
+  ]
+    .filter(Boolean)
+    .join(', ');
   const loadCase = end.sheet?.loadCase;
   return [
     [labels.reaction, `V ${numbers.load(report.reaction)}${share}, ${level}; ${tie}`],
     ...(loadCase ? [[labels.loadCase, loadCase] as Row] : []),
-    [labels.arms, `z ${numbers.mm(facts.z)} ${say.toBolts}${toCope}`],
+    ...(arms ? [[labels.arms, arms] as Row] : []),
   ];
 };
 
@@ -129,7 +75,9 @@ const otherRows = (context: Context): Row[] => {
   if (support) {
     const name = support.section ?? (support.thickness === undefined ? '' : plain(support.thickness, 3));
     const level = support.topOfSteel === undefined ? '' : `, ${say.topOfSteel} ${numbers.load(support.topOfSteel)}`;
-    rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${level}`]);
+    const opposite =
+      support.otherReaction === undefined ? '' : `, ${say.opposite} V_o ${numbers.load(support.otherReaction)}`;
+    rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${level}${opposite}`]);
   }
   const off = quantity === undefined ? '' : `${quantity} ${say.off}`;
   const words = [piece, end && say.ends[end], off].filter(Boolean).join(', ');
@@ -147,8 +95,7 @@ export const givenZone = (context: Context, width: number): Zone => {
   const given = [
     ...beamRows(context),
     copeRow(context),
-    ...boltRows(context),
-    ...plateRows(context),
+    ...jointRows(context),
     ...loadRows(context),
     ...otherRows(context),
   ];

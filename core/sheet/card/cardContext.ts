@@ -2,9 +2,9 @@ import type { MadeCard } from '../../card/card.ts';
 import { fromSystem } from '../../units/systems.ts';
 import { wordsFor } from '../../words/wordsFor.ts';
 import type { Context } from '../context.ts';
+import { fittingName } from '../givenWords.ts';
 import { numbersOf } from '../numbers.ts';
 import type { Pen } from '../pen.ts';
-import { sheetWords as say } from '../sheetWords.ts';
 
 /** What every zone of the card draws with and from. */
 export interface CardContext extends Context {
@@ -31,5 +31,4 @@ export const size = ({ numbers }: CardContext, value: number): string =>
   numbers.mm(fromSystem(value, '1,0', numbers.units));
 
 /** What the bolts pass through beside the web, in the region's word. */
-export const plateName = ({ words, made }: CardContext): string =>
-  made.card.joint === 'fin-plate' ? words.finPlate : say.labels.ply.toLowerCase();
+export const plateName = ({ words, made }: CardContext): string => fittingName(words, made.card.joint);

@@ -1,8 +1,9 @@
-import { fittingOf, type PlacedBolts, webBoltsOf, weldOf } from '../../end/jointParts.ts';
+import { fittingOf, type PlacedBolts, webBoltsOf } from '../../end/jointParts.ts';
 import type { Cope, GradeGiven } from '../../end/schema.ts';
 import { capital } from '../../words/capital.ts';
 import type { Zone } from '../context.ts';
-import { assumed, holesAssumed } from '../given.ts';
+import { assumed, holesAssumed } from '../givenWords.ts';
+import { supportBoltRows, weldRows } from '../jointRows.ts';
 import { body, LEFT, WIDTH } from '../page.ts';
 import type { TextStyle } from '../pen.ts';
 import { richText } from '../richText.ts';
@@ -54,20 +55,36 @@ const columnText = (context: CardContext, { endDistance, bolts }: PlacedBolts): 
 };
 
 const fittingRows = (context: CardContext): Row[] => {
-  const { words, numbers, input } = context;
+  const { numbers, input } = context;
   const { joint } = input.end;
   const { facts } = input;
   const { thickness } = fittingOf(joint);
   const edges = say.edges(numbers.mm(facts.eTop), numbers.mm(facts.eBot), numbers.mm(facts.ex));
   const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
-  if (joint.kind === 'web-bolts')
-    return [[sheetWords.labels.ply, `${size(context, thickness)}; ${say.byRows}; ${edges}`]];
-  const metal =
-    facts.Xu > 0 ? `, X_u ${numbers.mpa(facts.Xu)}${assumed(context, `${weldOf(joint)?.path}.electrode`)}` : '';
-  return [
-    [capital(words.finPlate), `${size(context, thickness)} × ${numbers.mm(width)}, ${say.byRows}; ${edges}`],
-    [sheetWords.labels.weld, `${sheetWords.fillets} ${numbers.mm(facts.leg)}${metal}`],
-  ];
+  const thick = size(context, thickness);
+  const name = capital(plateName(context));
+  const { mm } = numbers;
+  switch (joint.kind) {
+    case 'web-bolts':
+      return [[name, `${thick}; ${say.byRows}; ${edges}`]];
+    case 'fin-plate': {
+      const metal = facts.Xu > 0 ? `, X_u ${numbers.mpa(facts.Xu)}${assumed(context, 'joint.weld.electrode')}` : '';
+      return [
+        [name, `${thick} × ${mm(width)}, ${say.byRows}; ${edges}`],
+        [sheetWords.labels.weld, `${sheetWords.fillets} ${mm(facts.leg)}${metal}`],
+      ];
+    }
+    case 'double-cleat':
+    case 'single-cleat': {
+      const legs = `${facts.k > 1 ? `${facts.k}: ` : ''}${mm(facts.legWeb)} × ${mm(facts.legSupport)} × ${thick}`;
+      const place = facts.n > 0 ? edges : `y_p ${mm(facts.yp)}`;
+      return [[name, `${legs}, ${say.byRows}; ${place}`], ...weldRows(context), ...supportBoltRows(context, false)];
+    }
+    default: {
+      const plate = `${thick} × ${mm(facts.bp)}, ${say.byRows}; y_p ${mm(facts.yp)}`;
+      return [[name, plate], ...weldRows(context), ...supportBoltRows(context, false)];
+    }
+  }
 };
 
 const supportRows = ({ input, numbers }: CardContext): Row[] => {
@@ -93,7 +110,7 @@ const columnsOf = (context: CardContext): readonly (readonly Row[])[] => {
     [
       [labels.steel, steel],
       ...copeRows(context),
-      [labels.setback, size(context, end.setback)],
+      [labels.setback, numbers.mm(input.facts.g)],
       [labels.reaction, `${level}; ${sheetWords.tie} ${numbers.load(end.tie ?? 0)}`],
       ...supportRows(context),
     ],

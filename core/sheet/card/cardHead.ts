@@ -1,5 +1,6 @@
 import { supportBoltsOf, webBoltsOf } from '../../end/jointParts.ts';
 import { capital } from '../../words/capital.ts';
+import { choiceText } from '../../words/choiceWords.ts';
 import { drawJob, drawStandard, STANDARD } from '../head.ts';
 import { FRAME, LEFT, TOP, VERDICT_TOP, WIDE, WIDTH } from '../page.ts';
 import type { TextStyle } from '../pen.ts';
@@ -30,7 +31,7 @@ const fittingText = (context: CardContext): string => {
   const { input, words, numbers } = context;
   const { joint } = input.end;
   const bolts = webBoltsOf(joint)?.bolts ?? supportBoltsOf(joint)!;
-  const plate = joint.kind === 'fin-plate' ? capital(words.finPlate) : say.joints['web-bolts'];
+  const plate = capital(choiceText(words, 'joint.kind', joint.kind));
   const columns = input.facts.m > 1 ? `${input.facts.m} ${say.columns} ` : '';
   const grade = typeof bolts.grade === 'string' ? ` ${bolts.grade}` : '';
   return `${plate} ${numbers.mm(input.facts.tp)}, ${columns}${bolts.size}${grade}`;

@@ -3,7 +3,6 @@ export const cardWords = {
   name: 'Shop card',
   title: 'Checked to',
   subject: 'Shop card of one joint',
-  joints: { 'web-bolts': 'Web bolted to a ply' },
   carries: (force: string, level: string): string => `Reaction that each section carries, ${force}, ${level}`,
   columns: 'columns',
   uncoped: (cope: string): string => `no ${cope}`,

@@ -9,7 +9,6 @@ import { WorkingLines } from '../ladder/WorkingLines.tsx';
 import { workingLines } from '../ladder/workingLines.ts';
 import { singleKeys } from '../shell/singleKeys.ts';
 import { region, units, words } from '../state/bench.ts';
-import styles from '../style/copes.css?url';
 import { isTaken, proposal, takeable } from './proposal.ts';
 import { takeProposal } from './takeProposal.ts';
 
@@ -96,7 +95,6 @@ export const CopeProposal = () => {
   if (!it) return null;
   return (
     <section class="proposed" aria-labelledby="proposed-title">
-      <link rel="stylesheet" href={styles} />
       <h3 id="proposed-title">Cut that the support asks for</h3>
       {'sentences' in it ? (
         it.sentences.map((text) => <p key={text}>{text}</p>)

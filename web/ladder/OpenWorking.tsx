@@ -1,7 +1,7 @@
-import { later } from '../state/later.ts';
+import { laterPart } from '../style/laterPart.ts';
 import type { WorkingProps } from './Working.tsx';
 
-const part = later(async () => (await import('./Working.tsx')).Working);
+const part = laterPart(async () => (await import('./Working.tsx')).Working);
 
 /** The working of a rung that is open; its writer is no part of the first view. */
 export const OpenWorking = (props: WorkingProps) => {

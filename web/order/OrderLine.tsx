@@ -3,8 +3,8 @@ import { useEffect, useLayoutEffect, useRef } from 'preact/hooks';
 import { enter, WALK_END, type WalkEnd } from '../field/walk.ts';
 import { faults } from '../state/bench.ts';
 import { faultAt } from '../state/fieldText.ts';
-import { later } from '../state/later.ts';
 import { type LineName, lineOf } from '../state/tradeOrder.ts';
+import { laterPart } from '../style/laterPart.ts';
 import { goOn, openLine, takeWanted, wants } from './goTo.ts';
 
 interface OrderLineProps {
@@ -16,7 +16,7 @@ interface OrderLineProps {
   readonly stacked?: boolean;
 }
 
-const fields = later(async () => (await import('./lineFields.ts')).lineFields);
+const fields = laterPart(async () => (await import('./lineFields.ts')).lineFields);
 
 const focusWanted = (line: HTMLElement): void => {
   const wanted = takeWanted();

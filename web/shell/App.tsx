@@ -1,10 +1,10 @@
-import { later } from '../state/later.ts';
+import { laterPart } from '../style/laterPart.ts';
 import { page } from './address.ts';
 import { Bench } from './Bench.tsx';
 
-const standardsPage = later(async () => (await import('../standards/StandardsPage.tsx')).StandardsPage);
-const cardPage = later(async () => (await import('../card/CardPage.tsx')).CardPage);
-const proofPage = later(async () => (await import('../proof/ProofPage.tsx')).ProofPage);
+const standardsPage = laterPart(async () => (await import('../standards/StandardsPage.tsx')).StandardsPage);
+const cardPage = laterPart(async () => (await import('../card/CardPage.tsx')).CardPage);
+const proofPage = laterPart(async () => (await import('../proof/ProofPage.tsx')).ProofPage);
 
 const coming = <p role="status">The page is on its way.</p>;
 

@@ -2,10 +2,10 @@ import { Footing, Ladder, VerdictStrip } from '../ladder/index.ts';
 import { Order } from '../order/Order.tsx';
 import { Piece } from '../piece/index.ts';
 import { confirmShown } from '../state/confirming.ts';
-import { later } from '../state/later.ts';
 import { newVersion, otherTab } from '../state/network.ts';
 import { notice } from '../state/notice.ts';
 import { Stress } from '../stress/index.ts';
+import { laterPart } from '../style/laterPart.ts';
 import { Announcer } from './Announcer.tsx';
 import { Foot } from './Foot.tsx';
 import { fileOver } from './fileOver.ts';
@@ -13,14 +13,14 @@ import { Head } from './Head.tsx';
 import { finderShown, keysShown } from './keys.ts';
 import { TopBand } from './TopBand.tsx';
 
-const dialogs = later(async () => (await import('./Dialogs.tsx')).Dialogs);
+const dialogs = laterPart(async () => (await import('./Dialogs.tsx')).Dialogs);
 
 const OpenDialogs = () => {
   const Dialogs = (keysShown.value || finderShown.value || confirmShown.value || fileOver.value) && dialogs.value;
   return Dialogs && <Dialogs />;
 };
 
-const notices = later(async () => (await import('./Notices.tsx')).Notices);
+const notices = laterPart(async () => (await import('./Notices.tsx')).Notices);
 
 const OpenNotices = () => {
   const Notices = (notice.value || otherTab.value || newVersion.value) && notices.value;

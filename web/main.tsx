@@ -5,9 +5,8 @@ import { figure } from './piece/figure.ts';
 import { App } from './shell/App.tsx';
 import { followAddress } from './shell/address.ts';
 import { listenForKeys } from './shell/keys.ts';
-import { entry, lastGood } from './state/bench.ts';
+import { awaited, entry, lastGood } from './state/bench.ts';
 import { carried } from './state/carried.ts';
-import { demoEntry } from './state/demo.ts';
 import { begin } from './state/edits.ts';
 import { textOf } from './state/entry.ts';
 import { isLink } from './state/isLink.ts';
@@ -16,6 +15,8 @@ import { loadTheRest, tryAgain } from './state/later.ts';
 
 /** After the piece stands, what the first view does without is fetched, ms. */
 const ONCE_IT_STANDS = 500;
+/** The page stays empty at most this long for what a kept end asks for, so that it is drawn once and as a whole, ms. */
+const PATIENCE = 1000;
 
 /** A link opens as a step on top of what was kept, and leaves the address, so that loading again does not open it twice. */
 const openLink = async (): Promise<void> => {
@@ -35,7 +36,8 @@ const bringTheRest = async (): Promise<void> => {
   }
 };
 
-begin(readKept() ?? demoEntry());
+const kept = readKept();
+if (kept) begin(kept);
 startKeeping();
 effect(() => {
   document.title = `${textOf(entry.value, 'mark') || 'Bench'} – Copewright`;
@@ -43,7 +45,13 @@ effect(() => {
 listenForKeys();
 watchPointer();
 followAddress();
-render(<App />, document.getElementById('bench')!);
+const known = new Promise<void>((done) => {
+  effect(() => {
+    if (awaited.value !== 'coming') done();
+  });
+  setTimeout(done, PATIENCE);
+});
+void known.then(() => render(<App />, document.getElementById('bench')!));
 addEventListener('online', tryAgain);
 addEventListener('hashchange', () => {
   followAddress();

@@ -33,12 +33,19 @@ const UNUSED = ['html2canvas', 'canvg', 'dompurify'];
 /** Fetches styles and further chunks ahead of a part that is loaded later; no part here has any. */
 const PRELOAD = '\0vite/preload-helper.js';
 
-/** Leaves both out of the build; the writer asks for the former only when such a page is given to it. */
+/** The core's checks read every end and say its faults; on the bench what does so comes after the first view. */
+const comesLater = (id: string, importer = ''): boolean =>
+  /\/(?:end\/readEnd|words\/faults)\.ts$/.test(id) && importer.endsWith('/core/check/examineNumbers.ts');
+
+/** Leaves the first two out of the build; the writer asks for the former only when such a page is given to it. */
 const lean = (): Plugin => ({
   name: 'lean',
   apply: 'build',
   enforce: 'pre',
-  resolveId: (id) => (UNUSED.includes(id) ? `\0unused:${id}` : null),
+  resolveId: (id, importer) => {
+    if (comesLater(id, importer)) return here('state/readEnd.ts');
+    return UNUSED.includes(id) ? `\0unused:${id}` : null;
+  },
   load: (id) => {
     if (id === PRELOAD) return 'export const __vitePreload = (load) => load();';
     return id.startsWith('\0unused:') ? 'export default undefined;' : null;
@@ -73,7 +80,7 @@ export default defineConfig({
     target: 'es2022',
     assetsInlineLimit: 0,
     modulePreload: false,
-    // All styles in the page's one file: no part that is loaded later waits for its own.
+    // Two files of styles: the page's, and that of what opens later (`style/laterPart.ts`).
     cssCodeSplit: false,
     rollupOptions: {
       input: { index: here('index.html'), sw: here('sw.ts') },

@@ -6,9 +6,13 @@ const tables: SectionTable[] = [];
 
 let index: Index | undefined;
 
-/** Puts families at hand. */
+/** Puts families at hand. An excerpt gives way to its whole family, never the other way round. */
 export const admit = (...families: readonly SectionTable[]): void => {
-  tables.push(...families.filter((one) => !tables.includes(one)));
+  for (const one of families) {
+    const at = tables.findIndex(({ family }) => family === one.family);
+    if (at < 0) tables.push(one);
+    else if (!one.excerpt) tables[at] = one;
+  }
   index = undefined;
 };
 

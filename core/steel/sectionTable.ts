@@ -26,6 +26,8 @@ export interface SectionTable {
   /** The label is read without its mass too, where that names one section of the library alone. */
   readonly readWithoutMass?: true;
   readonly rows: string;
+  /** Some of the family's rows alone. */
+  readonly excerpt?: true;
 }
 
 /** A section found by name. */

@@ -6,6 +6,7 @@ import { faultSentences } from '../../core/words/faults.ts';
 import { faultText } from '../../core/words/words.ts';
 import { awaited, entry, input, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import '../state/reader.ts';
 import { otherFamilies } from '../state/sections.ts';
 
 /** How the sections of a card are named: a family of the library, or a list. */

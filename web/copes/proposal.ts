@@ -5,6 +5,7 @@ import { writeQuantity } from '../../core/units/printQuantity.ts';
 import { adviceWordsFor } from '../../core/words/adviceWords.ts';
 import { awaited, entry, input, region } from '../state/bench.ts';
 import { type Entry, textOf, withText } from '../state/entry.ts';
+import '../state/reader.ts';
 
 /** Copes proposed from the support, or why none are, in sentences; none of these where the faults stand at fields of their own. */
 export type Proposal = { readonly advice: CopeAdvice } | { readonly sentences: readonly string[] };

@@ -6,20 +6,21 @@ import type { CheckName } from '../../core/end/checkNames.ts';
 import type { Listed } from '../../core/standards/listed.ts';
 import type { Standard } from '../../core/standards/standard.ts';
 import type { UnitSystem } from '../../core/units/systems.ts';
-import { faultSentences } from '../../core/words/faults.ts';
 import { type Region, regions } from '../../core/words/regions.ts';
 import { faultText, type Words } from '../../core/words/words.ts';
 import { wordsFor } from '../../core/words/wordsFor.ts';
 import { type Awaited, awaitedOf } from './awaited.ts';
+import { demoEntry } from './demo.ts';
 import { endOf } from './endOf.ts';
-import { type Entry, emptyEntry, textOf } from './entry.ts';
+import { type Entry, textOf } from './entry.ts';
 import { filledFrom } from './filledFrom.ts';
+import { faultSentences } from './readEnd.ts';
 import { listedAs, rulesOf } from './rules.ts';
 import { newTimeline, type Timeline } from './timeline.ts';
 import { inTradeOrder } from './tradeOrder.ts';
 
-/** The state of the bench: one timeline of entries, and everything that follows from the entry in force. */
-export const timeline = signal<Timeline>(newTimeline(emptyEntry('sans-10162-1', 'mm-kN')));
+/** The state of the bench: one timeline of entries, and everything that follows from the entry in force. The demo stands first. */
+export const timeline = signal<Timeline>(newTimeline(demoEntry()));
 
 /** What stands in the fields. */
 export const entry = computed<Entry>(() => timeline.value.entry);

@@ -9,6 +9,7 @@ import { entryOf } from './entryOf.ts';
 import { fileText } from './fileText.ts';
 import { notice, refuse, tell } from './notice.ts';
 import { type Opened, openedFile, openedLink } from './opened.ts';
+import './reader.ts';
 
 /** The end as it stands, looked at in full; where it is not complete, that is said and its faults are shown. */
 const whole = (wanted: string, { working = false } = {}): Examined | undefined => {

@@ -1,10 +1,10 @@
 import { admit, findSection } from '../../core/steel/knownSections.ts';
-import { ub } from '../../core/steel/sections/ub.ts';
+import { demoSections } from './demo.ts';
 import { later } from './later.ts';
 
-admit(ub);
+admit(demoSections);
 
-/** All other families of sections. */
+/** All families of sections. */
 export const otherFamilies = later(async () => {
   await import('../../core/steel/findSection.ts');
   return true as const;

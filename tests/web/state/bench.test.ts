@@ -10,6 +10,7 @@ import * as fieldText from '../../../web/state/fieldText.ts';
 import { entryFrom } from '../../../web/state/keep.ts';
 import { notice } from '../../../web/state/notice.ts';
 import { openedFile, openedLink, openedText } from '../../../web/state/opened.ts';
+import '../../../web/state/reader.ts';
 import { otherFamilies } from '../../../web/state/sections.ts';
 
 const bench = { ...state, ...edits, ...fieldText, choose };

@@ -8,6 +8,7 @@ import * as edits from '../../../web/state/edits.ts';
 import { type Entry, withText } from '../../../web/state/entry.ts';
 import { faultAt } from '../../../web/state/fieldText.ts';
 import { tryAgain } from '../../../web/state/later.ts';
+import '../../../web/state/reader.ts';
 
 /** Two invented standards whose rules are those of the first view under other names; each is loaded when the test lets it. */
 const { invented, loads } = vi.hoisted(() => ({

@@ -37,7 +37,7 @@ export type Choice = Readonly<Partial<Record<Place, Sizes>>>;
 const choicesOf = (at: readonly Place[], facts: Facts, manner: CopeManner): Choice[] => {
   const lengths = lengthsOf('c', manner);
   const clear = lengths.filter(({ size }) => {
-    const length = numberOf(size)(facts as never);
+    const length = numberOf(size, facts);
     return Number.isFinite(length) && Number.isNaN(columnCut(facts, length));
   });
   return depthsOf('d', 'top', manner).flatMap((_, deep) =>
@@ -62,7 +62,7 @@ export interface Tried {
 
 /** A size in the end's own unit, free of conversion noise. */
 const inFile = ({ size }: SizeByRule, facts: Facts, end: End): number =>
-  Number((numberOf(size)(facts as never) / lengthSize(end)).toPrecision(10));
+  Number((numberOf(size, facts) / lengthSize(end)).toPrecision(10));
 
 /** The sizes as the end's JSON has them. */
 export const copeOf = ({ length, depth, radius }: Sizes, facts: Facts, end: End): CopeSizes => ({

@@ -4,7 +4,7 @@ import type { Facts } from '../end/facts.ts';
 import { lengthSize } from '../end/factsOf.ts';
 import { type Fault, fault } from '../end/fault.ts';
 import type { End } from '../end/schema.ts';
-import { newRun, numberOf } from '../formula/number.ts';
+import { numberOf } from '../formula/number.ts';
 import { type WorkingRow, workingOf } from '../formula/working.ts';
 import { standards } from '../standards/known.ts';
 import { adviceWordsFor } from '../words/adviceWords.ts';
@@ -59,7 +59,7 @@ const NOISE = 1e-6;
 const meets = (place: Place, facts: Facts, clearance: number): boolean => {
   const { support, g } = facts;
   const overhang = (support.b - support.tw) / 2;
-  return overhang + clearance > g + NOISE && numberOf(reachOf[place])(facts as never) > NOISE;
+  return overhang + clearance > g + NOISE && numberOf(reachOf[place], facts) > NOISE;
 };
 
 const proposed = (place: Place, sizes: Sizes, facts: Facts, end: End): ProposedCope => {
@@ -103,7 +103,6 @@ export const copeFromSupport = (
     const words = regionOf(end, standard);
     return { faults: [{ ...wrong, text: faultText(wordsFor(words), adviceWordsFor(words).faults, wrong) }] };
   }
-  newRun();
   const { region } = standard;
   const at = places.filter((place) => meets(place, facts, copePractice[region].clearance.value));
   const { choice, unmet, faults } = bestCopes(at, facts, end, { region, units: end.units, step: multiple });

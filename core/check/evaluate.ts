@@ -1,5 +1,6 @@
 import type { Facts } from '../end/facts.ts';
-import { newRun } from '../formula/number.ts';
+import { Values } from '../formula/number.ts';
+import { run } from '../formula/run.ts';
 import { evaluateFit } from './evaluateFit.ts';
 import { evaluateStrength, stateAtReaction } from './evaluateStrength.ts';
 import type { Plan } from './plan.ts';
@@ -42,7 +43,7 @@ const firstUsedUp = (results: readonly Result[]): Result | undefined => {
 /** A way that may not be the first to fail refers where it is. */
 const referWhereFirst = (plan: Plan, facts: Facts, first: Result): void => {
   const way = plan.strength.find(({ id }) => id === first.id)?.ways[first.way];
-  if (first.state !== 'holds' || !way?.whereFirst?.test(facts as never)) return;
+  if (first.state !== 'holds' || !way?.whereFirst || !new Values(facts as never).met(way.whereFirst.when)) return;
   first.state = 'refer';
   first.reason = way.whereFirst.reason;
 };
@@ -62,16 +63,19 @@ const worstWithoutV = (...lists: readonly (readonly Result[])[]): Result | undef
 /** Evaluates every check of a plan on one end at the reaction given, or at the least that the standard asks for. N */
 export const evaluate = (plan: Plan, facts: Facts, given: number): Evaluation => {
   facts.V = 1;
-  newRun();
-  const V = Math.max(given, plan.leastReaction(facts as never));
+  const { program, leastReaction } = plan;
+  run(program, facts as never);
+  const { cells } = program;
+  const V = leastReaction === undefined ? given : Math.max(given, cells[leastReaction]!);
   const strength: Result[] = [];
-  for (let at = 0; at < plan.strength.length; at += 1) strength.push(evaluateStrength(plan.strength[at]!, facts, V));
+  for (let at = 0; at < plan.strength.length; at += 1) strength.push(evaluateStrength(plan.strength[at]!, cells, V));
   const fit: Result[] = [];
-  for (let at = 0; at < plan.fit.length; at += 1) fit.push(evaluateFit(plan.fit[at]!, facts));
+  for (let at = 0; at < plan.fit.length; at += 1) fit.push(evaluateFit(plan.fit[at]!, cells));
   facts.V = V;
   if (plan.atReaction) {
-    newRun();
-    for (let at = 0; at < plan.strength.length; at += 1) stateAtReaction(plan.strength[at]!, facts, strength[at]!);
+    run(plan.atReaction, facts as never);
+    const { cells } = plan.atReaction;
+    for (let at = 0; at < plan.strength.length; at += 1) stateAtReaction(plan.strength[at]!, cells, strength[at]!);
   }
   const first = firstUsedUp(strength);
   if (first) referWhereFirst(plan, facts, first);

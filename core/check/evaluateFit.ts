@@ -1,6 +1,5 @@
-import type { Facts } from '../end/facts.ts';
 import type { FitPartPlan, FitPlan } from './plan.ts';
-import { blank, firstMet, type Result, severity } from './result.ts';
+import { blank, type Result, severity } from './result.ts';
 
 const trial = blank('fit-pitch');
 
@@ -14,14 +13,16 @@ const used = (needed: number, there: number): number => {
 const CONVERSION_NOISE = 1e-9;
 
 /** One comparison: the nearer of its bounds stands as the requirement. */
-const evaluateFitPart = (part: FitPartPlan, facts: Facts, into: Result): void => {
-  const given = part.given(facts as never);
-  const toLeast = part.least ? used(part.least(facts as never), given) : Number.NEGATIVE_INFINITY;
-  const toMost = part.most ? used(given, part.most(facts as never)) : Number.NEGATIVE_INFINITY;
+const evaluateFitPart = (part: FitPartPlan, cells: Float64Array, into: Result): void => {
+  const given = cells[part.given]!;
+  const least = part.least === undefined ? Number.NaN : cells[part.least]!;
+  const most = part.most === undefined ? Number.NaN : cells[part.most]!;
+  const toLeast = part.least === undefined ? Number.NEGATIVE_INFINITY : used(least, given);
+  const toMost = part.most === undefined ? Number.NEGATIVE_INFINITY : used(given, most);
   const low = toLeast >= toMost;
-  const clash = part.clash?.(facts as never) ?? false;
+  const clash = part.clash !== undefined && cells[part.clash] === 1;
   into.resistance = given;
-  into.demand = (low ? part.least : part.most)?.(facts as never) ?? Number.NaN;
+  into.demand = low ? least : most;
   into.utilisation = low ? toLeast : toMost;
   if (into.utilisation <= 1 + CONVERSION_NOISE) {
     into.state = 'holds';
@@ -33,7 +34,7 @@ const evaluateFitPart = (part: FitPartPlan, facts: Facts, into: Result): void =>
 };
 
 /** The worst state of the parts of one rule of geometry, with the part that is nearest to its bound. */
-export const evaluateFit = (plan: FitPlan, facts: Facts): Result => {
+export const evaluateFit = (plan: FitPlan, cells: Float64Array): Result => {
   const result = blank(plan.id);
   if (plan.noRule) {
     result.reason = plan.noRule;
@@ -41,12 +42,12 @@ export const evaluateFit = (plan: FitPlan, facts: Facts): Result => {
   }
   for (let at = 0; at < plan.parts.length; at += 1) {
     const part = plan.parts[at]!;
-    const off = firstMet(part.off, facts);
+    const off = part.off[cells[part.gate]!];
     if (off) {
       if (result.way < 0 && result.reason === '') result.reason = off.reason;
       continue;
     }
-    evaluateFitPart(part, facts, trial);
+    evaluateFitPart(part, cells, trial);
     const worse = severity[trial.state] - severity[result.state];
     if (result.way < 0 || worse > 0 || (worse === 0 && trial.utilisation > result.utilisation)) {
       result.way = at;

@@ -1,11 +1,10 @@
-import type { Facts } from '../end/facts.ts';
 import type { StrengthPlan, WayPlan } from './plan.ts';
-import { blank, firstMet, type Result, severity } from './result.ts';
+import { blank, type Result, severity } from './result.ts';
 
 /** A way for which the standard sets no limit: its demand at V, for information; no rule where a verdict is asked for. */
-const inform = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
-  into.demand = plan.demand(facts as never) * V;
-  const told = plan.informs?.(facts as never) ?? true;
+const inform = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
+  into.demand = cells[plan.demand]! * V;
+  const told = plan.informs === undefined || cells[plan.informs] === 1;
   into.state = told ? 'information' : 'notApplicable';
   if (!told) into.reason = 'no-rule';
 };
@@ -18,12 +17,12 @@ const useUp = (plan: WayPlan, reason: string, into: Result): void => {
   if (plan.load === 'V') into.reactionAtFailure = 0;
 };
 
-const measure = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
-  if (plan.failsAt) {
+const measure = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
+  if (plan.failsAt !== undefined) {
     into.utilisation = V / into.reactionAtFailure;
     return;
   }
-  const demand = plan.demand(facts as never);
+  const demand = cells[plan.demand]!;
   if (plan.load !== 'V') {
     into.demand = demand;
     into.utilisation = demand / into.resistance;
@@ -34,40 +33,41 @@ const measure = (plan: WayPlan, facts: Facts, V: number, into: Result): void => 
   into.utilisation = V / into.reactionAtFailure;
 };
 
-/** One way at the reaction V: its demand grows in proportion, so it is measured at 1 N (or at the tie force itself). */
-const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void => {
+/** One way at the reaction V: its demand grows in proportion, so it was measured at 1 N (or at the tie force itself). */
+const evaluateWay = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
   into.reason = '';
   into.demand = into.resistance = into.reactionAtFailure = into.utilisation = Number.NaN;
-  const off = firstMet(plan.off, facts);
+  const gate = cells[plan.gate]!;
+  const off = plan.off[gate];
   if (off) {
     into.state = 'notApplicable';
     into.reason = off.reason;
     return;
   }
-  const limit = firstMet(plan.limits, facts);
+  const limit = plan.limits[gate - plan.off.length];
+  const informs = plan.informs !== undefined && cells[plan.informs] === 1;
   if (limit?.noNumber) {
-    into.state = plan.informs?.(facts as never) ? 'information' : 'refer';
+    into.state = informs ? 'information' : 'refer';
     into.reason = limit.reason;
     return;
   }
-  if (!plan.resistance) {
-    inform(plan, facts, V, into);
+  if (plan.failsAt !== undefined) into.reactionAtFailure = cells[plan.failsAt]!;
+  else if (plan.resistance !== undefined) into.resistance = cells[plan.resistance]!;
+  else {
+    inform(plan, cells, V, into);
     return;
   }
-  if (plan.unbounded?.(facts as never)) {
-    into.resistance = plan.resistance(facts as never);
+  if (plan.unbounded !== undefined && cells[plan.unbounded] === 1) {
     useUp(plan, 'one-bolt', into);
     return;
   }
-  if (plan.failsAt) into.reactionAtFailure = plan.failsAt(facts as never);
-  else into.resistance = plan.resistance(facts as never);
   if (!(into.resistance > 0 || into.reactionAtFailure > 0)) {
     useUp(plan, 'nothing-left', into);
     return;
   }
-  measure(plan, facts, V, into);
+  measure(plan, cells, V, into);
   const holds = into.utilisation <= 1;
-  if (plan.informs?.(facts as never)) into.state = 'information';
+  if (informs) into.state = 'information';
   else if (limit && (limit.always || holds)) {
     into.state = 'refer';
     into.reason = limit.reason;
@@ -77,7 +77,7 @@ const evaluateWay = (plan: WayPlan, facts: Facts, V: number, into: Result): void
 const trial = blank('weld');
 
 /** The worst state of the ways, with the numbers of the way used up first. */
-export const evaluateStrength = (plan: StrengthPlan, facts: Facts, V: number): Result => {
+export const evaluateStrength = (plan: StrengthPlan, cells: Float64Array, V: number): Result => {
   const result = blank(plan.id);
   if (plan.noRule) {
     result.reason = plan.noRule;
@@ -85,23 +85,23 @@ export const evaluateStrength = (plan: StrengthPlan, facts: Facts, V: number): R
   }
   const { ways } = plan;
   if (ways.length === 1) {
-    evaluateWay(ways[0]!, facts, V, result);
+    evaluateWay(ways[0]!, cells, V, result);
     if (hasNumbers(result)) result.way = 0;
     return result;
   }
   for (let at = 0; at < ways.length; at += 1) {
-    evaluateWay(ways[at]!, facts, V, trial);
+    evaluateWay(ways[at]!, cells, V, trial);
     take(result, trial, at);
   }
   return result;
 };
 
 /** States demand and resistance at V (now in the facts) where they do not change in proportion. */
-export const stateAtReaction = (plan: StrengthPlan, facts: Facts, result: Result): void => {
+export const stateAtReaction = (plan: StrengthPlan, cells: Float64Array, result: Result): void => {
   const way = plan.ways[result.way];
-  if (!way?.failsAt || Number.isNaN(result.utilisation)) return;
-  result.demand = way.demand(facts as never);
-  result.resistance = way.resistance!(facts as never);
+  if (way?.failsAt === undefined || Number.isNaN(result.utilisation)) return;
+  result.demand = cells[way.demand]!;
+  result.resistance = cells[way.resistance!]!;
 };
 
 /** False for a way that does not apply to the end and says nothing of it. */

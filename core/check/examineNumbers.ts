@@ -3,7 +3,7 @@ import { type Fault, fault } from '../end/fault.ts';
 import { fittingOf, supportBoltsOf, webBoltsOf } from '../end/jointParts.ts';
 import { readEnd } from '../end/readEnd.ts';
 import type { End } from '../end/schema.ts';
-import { testOf } from '../formula/number.ts';
+import { Values } from '../formula/number.ts';
 import { standards } from '../standards/known.ts';
 import { listed } from '../standards/listed.ts';
 import type { Standard } from '../standards/standard.ts';
@@ -94,7 +94,8 @@ const notesOf = (
     if (typeof grade === 'object') say('strength-given', { field: capital(fieldName(words, path)) }, path);
   }
   for (const { code, name } of gradeNotes(end, plan.standard)) say(code, { value: name });
-  for (const { code, when } of plan.standard.notes) if (testOf(when)(resolved.facts as never)) say(code);
+  const values = new Values(resolved.facts as never);
+  for (const { code, when } of plan.standard.notes) if (values.met(when)) say(code);
   return notes;
 };
 

@@ -1,8 +1,8 @@
 import type { FitName, PartName, StrengthName } from '../end/checkNames.ts';
 import type { Gate, Limit } from '../end/gates.ts';
 import type { Joint } from '../end/schema.ts';
-import { type NumberReader, numberOf, testOf } from '../formula/number.ts';
-import { markShared } from '../formula/shared.ts';
+import { type Group, type Place, programOf } from '../formula/program.ts';
+import type { Program } from '../formula/run.ts';
 import { joints } from '../joints/index.ts';
 import {
   type FitPart,
@@ -11,32 +11,28 @@ import {
   type NoRule,
   type Standard,
   type StrengthRule,
-  treesOf,
   type Way,
 } from '../standards/standard.ts';
 
-type Test = (facts: never) => boolean;
-
-export interface GatePlan {
-  readonly test: Test;
-  readonly reason: string;
-}
-
-interface LimitPlan extends GatePlan {
-  readonly always: boolean;
-  readonly noNumber: boolean;
-}
+/** A cell of the plan's program; undefined for what a rule has not got. */
+type Cell = number | undefined;
 
 export interface WayPlan {
-  readonly demand: NumberReader;
-  readonly resistance?: NumberReader;
   readonly load: 'V' | 'T' | 'none';
-  readonly failsAt?: NumberReader;
-  readonly off: readonly GatePlan[];
-  readonly limits: readonly LimitPlan[];
-  readonly whereFirst?: GatePlan;
-  readonly unbounded?: Test;
-  readonly informs?: Test;
+  /** Conditions under which the way does not apply, then its limits, in the order in which they are looked at. */
+  readonly off: readonly Gate[];
+  readonly limits: readonly Limit[];
+  /** Holds the number of the first of them that is met; -1 where none is. */
+  readonly gate: number;
+  readonly failsAt: Cell;
+  /** Of a way with `failsAt` cells of the program at the reaction, else at 1 N. */
+  readonly demand: number;
+  readonly resistance: Cell;
+  /** Holds 1 where any load at all uses it up. */
+  readonly unbounded: Cell;
+  /** Holds 1 where its numbers are without a verdict. */
+  readonly informs: Cell;
+  readonly whereFirst: Gate | undefined;
 }
 
 export interface StrengthPlan {
@@ -49,12 +45,15 @@ export interface StrengthPlan {
 }
 
 export interface FitPartPlan {
-  readonly given: NumberReader;
-  readonly least?: NumberReader;
-  readonly most?: NumberReader;
-  readonly off: readonly GatePlan[];
+  readonly off: readonly Gate[];
+  /** Holds the number of the first of them that is met; -1 where none is. */
+  readonly gate: number;
+  readonly given: number;
+  readonly least: Cell;
+  readonly most: Cell;
+  /** Holds 1 where it cannot be built. */
+  readonly clash: Cell;
   readonly breach: 'fails' | 'refer';
-  readonly clash?: Test;
 }
 
 export interface FitPlan {
@@ -65,99 +64,108 @@ export interface FitPlan {
   readonly parts: readonly FitPartPlan[];
 }
 
-/** A joint's list joined with a standard's rules, composed once into closures. */
+/** A joint's list joined with a standard's rules, written once as one program. */
 export interface Plan {
   readonly standard: Standard;
+  /** Everything at a reaction of 1 N. */
+  readonly program: Program;
+  /** Demand and resistance of ways that are not in proportion to V, at V itself; absent where there are none. */
+  readonly atReaction: Program | undefined;
   readonly strength: readonly StrengthPlan[];
   readonly fit: readonly FitPlan[];
-  /** Least reaction to check for, N; 0 where the standard asks for none. */
-  readonly leastReaction: NumberReader;
-  /** True where some way's demand or resistance has to be stated at V itself. */
-  readonly atReaction: boolean;
+  /** Least reaction to check for, N. */
+  readonly leastReaction: Cell;
 }
 
-const gatePlan = ({ when, reason }: Gate): GatePlan => ({ test: testOf(when), reason });
-const limitPlan = (limit: Limit): LimitPlan => ({
-  ...gatePlan(limit),
-  always: limit.always,
-  noNumber: limit.noNumber ?? false,
+const offOf = (off: Gate | undefined, own: readonly Gate[] = []): readonly Gate[] => (off ? [off, ...own] : own);
+
+const wayGroup = (way: Way, joint: Gate | undefined): Group => ({
+  always: [way.informs],
+  gates: [
+    ...offOf(joint, way.off).map(({ when }) => ({ when, closes: true })),
+    ...(way.limits ?? []).map(({ when, noNumber = false }) => ({ when, closes: noNumber })),
+  ],
+  of: way.failsAt ? [way.failsAt] : [undefined, way.unbounded, way.demand, way.resistance],
 });
 
-const wayPlan = (way: Way, off: Gate | undefined): WayPlan => ({
-  demand: numberOf(way.demand),
-  load: way.load,
-  off: [...(off ? [off] : []), ...(way.off ?? [])].map(gatePlan),
-  limits: (way.limits ?? []).map(limitPlan),
-  ...(way.resistance && { resistance: numberOf(way.resistance) }),
-  ...(way.whereFirst && { whereFirst: gatePlan(way.whereFirst) }),
-  ...(way.failsAt && { failsAt: numberOf(way.failsAt) }),
-  ...(way.unbounded && { unbounded: testOf(way.unbounded) }),
-  ...(way.informs && { informs: testOf(way.informs) }),
+const atReactionGroup = ({ demand, resistance }: Way): Group => ({ always: [], gates: [], of: [demand, resistance] });
+
+const wayPlan = (way: Way, joint: Gate | undefined, place: Place, atReaction: Place | undefined): WayPlan => {
+  const [failsAt, unbounded, ...atOne] = place.of;
+  const [demand, resistance] = atReaction?.of ?? atOne;
+  const { load, limits = [], whereFirst } = way;
+  const [informs] = place.always;
+  const { gate } = place;
+  const off = offOf(joint, way.off);
+  return { load, off, limits, gate, demand: demand!, resistance, failsAt, unbounded, informs, whereFirst };
+};
+
+const partGroup = ({ off, given, least, most, clash }: FitPart, joint: Gate | undefined): Group => ({
+  always: [],
+  gates: offOf(joint, off).map(({ when }) => ({ when, closes: true })),
+  of: [given, least, most, clash],
 });
 
-const fitPartPlan = (part: FitPart, breach: 'fails' | 'refer', off: Gate | undefined): FitPartPlan => ({
-  given: numberOf(part.given),
-  ...(part.least && { least: numberOf(part.least) }),
-  ...(part.most && { most: numberOf(part.most) }),
-  off: [...(off ? [off] : []), ...(part.off ?? [])].map(gatePlan),
-  breach: part.breach ?? breach,
-  ...(part.clash && { clash: testOf(part.clash) }),
-});
+const partPlan = (part: FitPart, rule: FitRule, joint: Gate | undefined, { gate, of }: Place): FitPartPlan => {
+  const [given, least, most, clash] = of;
+  const breach = part.breach ?? rule.breach;
+  return { off: offOf(joint, part.off), gate, given: given!, least, most, clash, breach };
+};
 
 const reasonOf = (rule: StrengthRule | FitRule | NoRule): string =>
   isNoRule(rule) ? (rule.covered ? 'covered' : 'no-rule') : '';
 
-/** Finds the steps that several rules of a standard lean on, before any of them is composed. */
-const markSharedIn = ({ strength, fit, notes, leastReaction }: Standard): void => {
-  for (const rule of [...Object.values(strength), ...Object.values(fit)]) {
-    if (isNoRule(rule)) continue;
-    for (const one of 'ways' in rule ? rule.ways : rule.parts) {
-      const conditions = 'demand' in one ? [...(one.limits ?? []), ...(one.off ?? [])] : (one.off ?? []);
-      const more =
-        'demand' in one ? [...treesOf(one), one.unbounded, one.informs] : [one.given, one.least, one.most, one.clash];
-      markShared(...conditions.map(({ when }) => when), ...more.filter((it) => it !== undefined));
-    }
-  }
-  markShared(...notes.map(({ when }) => when), ...(leastReaction ? [leastReaction] : []));
+const waysOf = (rule: StrengthRule | NoRule): readonly Way[] => (isNoRule(rule) ? [] : rule.ways);
+const partsOf = (rule: FitRule | NoRule): readonly FitPart[] => (isNoRule(rule) ? [] : rule.parts);
+
+/** Hands out places in the order of their groups. */
+const inTurn = (places: readonly Place[]): (() => Place) => {
+  let at = 0;
+  return () => places[at++]!;
+};
+
+const planFor = (standard: Standard, kind: Joint['kind']): Plan => {
+  const strength = joints[kind].strength.map(([id, part, off]) => ({ id, part, off, rule: standard.strength[id] }));
+  const fit = joints[kind].fit.map(([id, part, off]) => ({ id, part, off, rule: standard.fit[id] }));
+  const { program, places } = programOf([
+    ...strength.flatMap(({ rule, off }) => waysOf(rule).map((way) => wayGroup(way, off))),
+    ...fit.flatMap(({ rule, off }) => partsOf(rule).map((part) => partGroup(part, off))),
+    { always: [standard.leastReaction], gates: [], of: [] },
+  ]);
+  const late = strength.flatMap(({ rule }) => waysOf(rule)).filter(({ failsAt }) => failsAt);
+  const atReaction = programOf(late.map(atReactionGroup));
+  const next = inTurn(places);
+  const nextLate = inTurn(atReaction.places);
+  return {
+    standard,
+    program,
+    atReaction: late.length > 0 ? atReaction.program : undefined,
+    strength: strength.map(({ id, part, off, rule }) => ({
+      id,
+      part,
+      rule,
+      noRule: reasonOf(rule),
+      ways: waysOf(rule).map((way) => wayPlan(way, off, next(), way.failsAt && nextLate())),
+    })),
+    fit: fit.map(({ id, part, off, rule }) => ({
+      id,
+      part,
+      rule,
+      noRule: reasonOf(rule),
+      parts: partsOf(rule).map((one) => partPlan(one, rule as FitRule, off, next())),
+    })),
+    leastReaction: next().always[0],
+  };
 };
 
 const made = new Map<string, Plan>();
-const marked = new Set<string>();
 
 /** The plan of one standard and kind of joint, made at first use. */
 export const planOf = (standard: Standard, kind: Joint['kind']): Plan => {
   const key = `${standard.id} ${kind}`;
   const known = made.get(key);
   if (known) return known;
-  if (!marked.has(standard.id)) markSharedIn(standard);
-  marked.add(standard.id);
-  const list = joints[kind];
-  const strength = list.strength.map(([id, part, off]) => {
-    const rule = standard.strength[id];
-    return {
-      id,
-      part,
-      rule,
-      noRule: reasonOf(rule),
-      ways: isNoRule(rule) ? [] : rule.ways.map((way) => wayPlan(way, off)),
-    };
-  });
-  const plan: Plan = {
-    standard,
-    strength,
-    fit: list.fit.map(([id, part, off]) => {
-      const rule = standard.fit[id];
-      return {
-        id,
-        part,
-        rule,
-        noRule: reasonOf(rule),
-        parts: isNoRule(rule) ? [] : rule.parts.map((part) => fitPartPlan(part, rule.breach, off)),
-      };
-    }),
-    atReaction: strength.some(({ ways }) => ways.some(({ failsAt }) => failsAt)),
-    leastReaction: standard.leastReaction ? numberOf(standard.leastReaction) : () => 0,
-  };
+  const plan = planFor(standard, kind);
   made.set(key, plan);
   return plan;
 };

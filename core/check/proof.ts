@@ -1,5 +1,5 @@
 import type { StrengthName } from '../end/checkNames.ts';
-import { newRun, numberOf } from '../formula/number.ts';
+import { numberOf } from '../formula/number.ts';
 import { standards } from '../standards/known.ts';
 import { isNoRule } from '../standards/standard.ts';
 import { toSystem } from '../units/systems.ts';
@@ -51,8 +51,7 @@ const resistanceOf = ({ facts, report }: Examined, id: string, of: string): numb
   const rule = standards[report.standard.id]!.strength[id as StrengthName];
   const resistance = isNoRule(rule) ? undefined : rule.ways.find((way) => way.of === of)?.resistance;
   if (!resistance) return Number.NaN;
-  newRun();
-  return toSystem(numberOf(resistance)(facts as never), resistance.dimension, report.units);
+  return toSystem(numberOf(resistance, facts), resistance.dimension, report.units);
 };
 
 const oursOf = (examined: Examined, { check: id, way, row, field = 'resistance' }: Expectation): number => {

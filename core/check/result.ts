@@ -1,6 +1,4 @@
 import type { CheckName } from '../end/checkNames.ts';
-import type { Facts } from '../end/facts.ts';
-import type { GatePlan } from './plan.ts';
 import type { State } from './report.ts';
 
 /** The numbers of one check: N and mm; demand at V, capacity as the reaction at which it is used up. */
@@ -38,9 +36,3 @@ export const blank = (id: CheckName): Result => ({
   reactionAtFailure: Number.NaN,
   utilisation: Number.NaN,
 });
-
-/** The first of several gates that the facts meet. */
-export const firstMet = <G extends GatePlan>(gates: readonly G[], facts: Facts): G | undefined => {
-  for (let at = 0; at < gates.length; at += 1) if (gates[at]!.test(facts as never)) return gates[at];
-  return undefined;
-};

@@ -1,7 +1,7 @@
 import type { Dimension } from '../units/dimension.ts';
 import { plain, significant } from '../units/figures.ts';
 import { INCH, KIP, type UnitSystem, unitOf } from '../units/systems.ts';
-import { numberOf, testOf } from './number.ts';
+import type { Values } from './number.ts';
 import type { Tree } from './tree.ts';
 
 /** Significant figures of the numbers put into a line, of the value that a line on the way gives, and of the result that closes a working. */
@@ -30,7 +30,7 @@ export const quantity = (value: number, dimension: Dimension, system: UnitSystem
   significant(value / unitOf(dimension, system).size, figures);
 
 /** The leaves that stand in a line: steps count as leaves, untaken branches do not. */
-const leavesOf = (tree: Tree, facts: never): readonly Tree[] => {
+const leavesOf = (tree: Tree, values: Values): readonly Tree[] => {
   switch (tree.op) {
     case 'literal':
     case 'constant':
@@ -40,18 +40,15 @@ const leavesOf = (tree: Tree, facts: never): readonly Tree[] => {
     case 'bare':
       return [tree];
     case 'pick':
-      return leavesOf(taken(tree, facts), facts);
+      return leavesOf(values.taken(tree), values);
     default:
-      return tree.of.flatMap((one) => leavesOf(one, facts));
+      return tree.of.flatMap((one) => leavesOf(one, values));
   }
 };
 
-const taken = (tree: Tree & { op: 'pick' }, facts: never): Tree =>
-  tree.branches.find(({ when }) => testOf(when)(facts))?.then ?? tree.otherwise;
-
-const forceUnitOf = (tree: Tree, facts: never, result: Dimension): ForceUnit => {
+const forceUnitOf = (tree: Tree, values: Values, result: Dimension): ForceUnit => {
   if (result !== '0,1' && result !== '1,1') return 'N';
-  const carriers = leavesOf(tree, facts).filter((leaf) => !leaf.dimension.endsWith(',0'));
+  const carriers = leavesOf(tree, values).filter((leaf) => !leaf.dimension.endsWith(',0'));
   const alike = carriers.every((leaf) => leaf.dimension === '0,1') && (result === '0,1' || result === '1,1');
   const moments = carriers.every((leaf) => leaf.dimension === '1,1') && result === '1,1';
   return carriers.length > 0 && (alike || moments) ? 'kN' : 'N';
@@ -59,7 +56,7 @@ const forceUnitOf = (tree: Tree, facts: never, result: Dimension): ForceUnit => 
 
 class Writer {
   constructor(
-    private readonly facts: never,
+    private readonly values: Values,
     private readonly system: UnitSystem,
     private readonly mode: Mode,
     private readonly force: ForceUnit,
@@ -102,12 +99,12 @@ class Writer {
       case 'stress':
         return this.stress(this.write(tree.of[0]));
       case 'pick':
-        return this.write(taken(tree, this.facts));
+        return this.write(this.values.taken(tree));
     }
   }
 
   private leaf(tree: Tree): Line {
-    const value = numberOf(tree)(this.facts) / this.sizeOf(tree.dimension);
+    const value = this.values.of(tree) / this.sizeOf(tree.dimension);
     const text = significant(value, LINE_FIGURES);
     return { text, binds: value < 0 ? 1 : 4 };
   }
@@ -141,7 +138,7 @@ class Writer {
   }
 
   private bare(tree: Tree): Line {
-    return { text: significant(numberOf(tree)(this.facts), LINE_FIGURES), binds: 4 };
+    return { text: significant(this.values.of(tree), LINE_FIGURES), binds: 4 };
   }
 
   private stress(line: Line): Line {
@@ -152,10 +149,10 @@ class Writer {
 }
 
 /** Power of ten that takes a metric line's N and mm to the unit its value is stated in. */
-const scaleOf = (force: ForceUnit, tree: Tree, facts: never, result: Dimension): string => {
+const scaleOf = (force: ForceUnit, tree: Tree, values: Values, result: Dimension): string => {
   if (result !== '0,1' && result !== '1,1') return '';
   if (force === 'N') return result === '0,1' ? '10³' : '10⁶';
-  const moments = leavesOf(tree, facts).some((leaf) => leaf.dimension === '1,1');
+  const moments = leavesOf(tree, values).some((leaf) => leaf.dimension === '1,1');
   return result === '1,1' && !moments ? '10³' : '';
 };
 
@@ -173,20 +170,20 @@ const isChoiceFree = (tree: Tree): boolean => {
 
 const symbolLines = new WeakMap<Tree, Line>();
 
-/** The formula in symbols, with the branches that the facts take. */
-export const symbolsOf = (tree: Tree, facts: never): Line => {
+/** The formula in symbols, with the branches that the values take. */
+export const symbolsOf = (tree: Tree, values: Values): Line => {
   const known = symbolLines.get(tree);
   if (known) return known;
-  const line = new Writer(facts, 'mm-kN', 'symbols', 'N').write(tree);
+  const line = new Writer(values, 'mm-kN', 'symbols', 'N').write(tree);
   if (isChoiceFree(tree)) symbolLines.set(tree, line);
   return line;
 };
 
 /** The formula with numbers in place; they work out to the system's unit of `result`. */
-export const numbersOf = (tree: Tree, facts: never, system: UnitSystem, result: Dimension = tree.dimension): Line => {
-  if (system === 'in-kip') return new Writer(facts, system, 'numbers', 'N').write(tree);
-  const force = forceUnitOf(tree, facts, result);
-  const line = new Writer(facts, system, 'numbers', force).write(tree);
-  const scale = scaleOf(force, tree, facts, result);
+export const numbersOf = (tree: Tree, values: Values, system: UnitSystem, result: Dimension = tree.dimension): Line => {
+  if (system === 'in-kip') return new Writer(values, system, 'numbers', 'N').write(tree);
+  const force = forceUnitOf(tree, values, result);
+  const line = new Writer(values, system, 'numbers', force).write(tree);
+  const scale = scaleOf(force, tree, values, result);
   return scale ? { text: `${parenthesised(line, 2)} / ${scale}`, binds: 2 } : line;
 };

@@ -1,170 +1,91 @@
-import { leastOf, mostOf, type NumberReader, raised, solved, sum } from './readers.ts';
-import { isShared } from './shared.ts';
+import { greater, lesser } from './lesser.ts';
 import type { Condition, Tree } from './tree.ts';
 
-export type { NumberReader } from './readers.ts';
+/**
+ * Values of formulas from one set of facts, tree by tree, in N and mm: for workings and for a formula alone. A step is worked out once. Many
+ * formulas on many ends are better written as a program, which gives the same bits.
+ */
+export class Values {
+  private readonly known = new Map<Tree, number>();
 
-type Test = (facts: never) => boolean;
+  constructor(private readonly facts: never) {}
 
-/** Most steps that all standards and joints together may have. */
-const CELLS = 1 << 14;
-
-/** Shared steps are computed once a run, however many checks lean on them: the run in which each was computed, and its value. */
-const ranAt = new Int32Array(CELLS);
-const kept = new Float64Array(CELLS);
-let cells = 0;
-let run = 0;
-
-/** Starts a run over new facts: what the last run kept is forgotten. */
-export const newRun = (): void => {
-  run = (run + 1) | 0;
-};
-
-const newCell = (): number => {
-  if (cells === CELLS) throw new RangeError('more steps than there are cells');
-  cells += 1;
-  return cells - 1;
-};
-
-const readers = new WeakMap<Tree, NumberReader>();
-/** Composes a tree into closures, once; the same tree always gives the same reader. */
-export const numberOf = (tree: Tree): NumberReader => {
-  const known = readers.get(tree);
-  if (known) return known;
-  const made = compose(tree);
-  readers.set(tree, made);
-  return made;
-};
-
-const compose = (tree: Tree): NumberReader => {
-  switch (tree.op) {
-    case 'literal':
-    case 'constant': {
-      const { value } = tree;
-      return () => value;
+  of(tree: Tree): number {
+    switch (tree.op) {
+      case 'literal':
+      case 'constant':
+        return tree.value;
+      case 'given':
+        return tree.read(this.facts);
+      case 'times':
+        return this.joined(tree.of, (x, y) => x * y);
+      case 'plus':
+        return this.joined(tree.of, (x, y) => x + y);
+      case 'least':
+        return this.joined(tree.of, lesser);
+      case 'most':
+        return this.joined(tree.of, greater);
+      case 'over':
+        return this.of(tree.of[0]) / this.of(tree.of[1]);
+      case 'minus':
+        return this.of(tree.of[0]) - this.of(tree.of[1]);
+      case 'root':
+        return Math.sqrt(this.of(tree.of[0]));
+      case 'power': {
+        const base = this.of(tree.of[0]);
+        return tree.exponent === 2 ? base * base : base ** tree.exponent;
+      }
+      // N/mm2 is MPa, so both directions are the same number.
+      case 'bare':
+      case 'stress':
+        return this.of(tree.of[0]);
+      case 'pick':
+        return this.of(this.taken(tree));
+      case 'found':
+        return this.remembered(tree, () => tree.solve(this.facts, ...tree.of.map((one) => this.of(one))));
+      case 'step':
+        return this.remembered(tree, () => this.of(tree.of[0]));
     }
-    case 'given':
-      return tree.read;
-    case 'times':
-      return product(tree.of);
-    case 'plus':
-      return sum(tree.of.map(numberOf));
-    case 'least':
-      return leastOf(tree.of.map(numberOf));
-    case 'most':
-      return mostOf(tree.of.map(numberOf));
-    case 'over': {
-      const [a, b] = [numberOf(tree.of[0]), numberOf(tree.of[1])];
-      return (facts) => a(facts) / b(facts);
-    }
-    case 'minus': {
-      const [a, b] = [numberOf(tree.of[0]), numberOf(tree.of[1])];
-      return (facts) => a(facts) - b(facts);
-    }
-    case 'root': {
-      const a = numberOf(tree.of[0]);
-      return (facts) => Math.sqrt(a(facts));
-    }
-    case 'power':
-      return raised(numberOf(tree.of[0]), tree.exponent);
-    // N/mm2 is MPa, so both directions are the same number.
-    case 'bare':
-    case 'stress':
-      return numberOf(tree.of[0]);
-    case 'pick':
-      return chosen(tree.branches, numberOf(tree.otherwise));
-    case 'found':
-      return solved(tree.of.map(numberOf), tree.solve);
-    case 'step':
-      return isShared(tree) ? remembered(numberOf(tree.of[0])) : numberOf(tree.of[0]);
   }
-};
 
-const remembered = (inner: NumberReader): NumberReader => {
-  const cell = newCell();
-  return (facts) => {
-    if (ranAt[cell] === run) return kept[cell]!;
-    const value = inner(facts);
-    ranAt[cell] = run;
-    kept[cell] = value;
+  /** The branch that the facts take. */
+  taken({ branches, otherwise }: Tree & { op: 'pick' }): Tree {
+    for (const { when, then } of branches) if (this.met(when)) return then;
+    return otherwise;
+  }
+
+  met(condition: Condition): boolean {
+    switch (condition.op) {
+      case 'flag':
+        return condition.read(this.facts);
+      case 'atMost':
+        return this.of(condition.of[0]) <= this.of(condition.of[1]);
+      case 'below':
+        return this.of(condition.of[0]) < this.of(condition.of[1]);
+      case 'not':
+        return !this.met(condition.of[0]);
+      case 'all':
+        return condition.of.every((one) => this.met(one));
+      case 'any':
+        return condition.of.some((one) => this.met(one));
+    }
+  }
+
+  /** From left to right. */
+  private joined(of: readonly Tree[], join: (x: number, y: number) => number): number {
+    let value = this.of(of[0]!);
+    for (let at = 1; at < of.length; at += 1) value = join(value, this.of(of[at]!));
     return value;
-  };
-};
-
-/** Multiplies from left to right; constants that lead are multiplied once, in the same order, so no bit changes. */
-const product = (of: readonly Tree[]): NumberReader => {
-  let leading = 1;
-  let at = 0;
-  for (; at < of.length; at += 1) {
-    const one = of[at]!;
-    if (one.op !== 'literal' && one.op !== 'constant') break;
-    leading *= one.value;
   }
-  const rest = of.slice(at).map(numberOf);
-  const k = leading;
-  const [a, b, c, d] = rest as [NumberReader, NumberReader, NumberReader, NumberReader];
-  switch (rest.length) {
-    case 0:
-      return () => k;
-    case 1:
-      return (facts) => k * a(facts);
-    case 2:
-      return (facts) => k * a(facts) * b(facts);
-    case 3:
-      return (facts) => k * a(facts) * b(facts) * c(facts);
-    case 4:
-      return (facts) => k * a(facts) * b(facts) * c(facts) * d(facts);
-    default:
-      return (facts) => {
-        let value = k;
-        for (let i = 0; i < rest.length; i += 1) value *= rest[i]!(facts);
-        return value;
-      };
+
+  private remembered(tree: Tree, read: () => number): number {
+    const known = this.known.get(tree);
+    if (known !== undefined) return known;
+    const value = read();
+    this.known.set(tree, value);
+    return value;
   }
-};
+}
 
-const chosen = (branches: readonly { when: Condition; then: Tree }[], otherwise: NumberReader): NumberReader => {
-  const tests = branches.map(({ when }) => testOf(when));
-  const values = branches.map(({ then }) => numberOf(then));
-  const [firstTest, firstValue] = [tests[0]!, values[0]!];
-  if (tests.length === 1) return (facts) => (firstTest(facts) ? firstValue(facts) : otherwise(facts));
-  return (facts) => {
-    for (let at = 0; at < tests.length; at += 1) if (tests[at]!(facts)) return values[at]!(facts);
-    return otherwise(facts);
-  };
-};
-
-/** Composes a condition into a closure. */
-export const testOf = (condition: Condition): Test => {
-  switch (condition.op) {
-    case 'flag':
-      return condition.read;
-    case 'atMost': {
-      const [a, b] = [numberOf(condition.of[0]), numberOf(condition.of[1])];
-      return (facts) => a(facts) <= b(facts);
-    }
-    case 'below': {
-      const [a, b] = [numberOf(condition.of[0]), numberOf(condition.of[1])];
-      return (facts) => a(facts) < b(facts);
-    }
-    case 'not': {
-      const one = testOf(condition.of[0]);
-      return (facts) => !one(facts);
-    }
-    case 'all': {
-      return combined(condition.of, false);
-    }
-    case 'any': {
-      return combined(condition.of, true);
-    }
-  }
-};
-
-/** All or any of several conditions: the first that comes out as `decisive` settles it. */
-const combined = (conditions: readonly Condition[], decisive: boolean): Test => {
-  const tests = conditions.map(testOf);
-  return (facts) => {
-    for (let at = 0; at < tests.length; at += 1) if (tests[at]!(facts) === decisive) return decisive;
-    return !decisive;
-  };
-};
+/** The value of one formula, N and mm. */
+export const numberOf = (tree: Tree, facts: object): number => new Values(facts as never).of(tree);

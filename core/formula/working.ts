@@ -1,7 +1,7 @@
 import type { UnitSystem } from '../units/systems.ts';
 import { toSystem, unitOf } from '../units/systems.ts';
 import { numbersOf, quantity, symbolsOf } from './line.ts';
-import { newRun, numberOf, testOf } from './number.ts';
+import { Values } from './number.ts';
 import type { Basis, Condition, Tree } from './tree.ts';
 
 /** One line of a working: symbol = expression = numbers = value unit. */
@@ -22,22 +22,22 @@ export interface WorkingRow {
 const relation = { atMost: '≤', below: '<' } as const;
 
 /** A condition in words and numbers, for the branch that it opened or closed. */
-const said = (condition: Condition, met: boolean, facts: never, system: UnitSystem): string => {
+const said = (condition: Condition, met: boolean, values: Values, system: UnitSystem): string => {
   switch (condition.op) {
     case 'flag':
       return met ? condition.text : '';
     case 'not':
-      return said(condition.of[0], !met, facts, system);
+      return said(condition.of[0], !met, values, system);
     case 'all':
     case 'any':
       return condition.of
-        .map((one) => said(one, testOf(one)(facts), facts, system))
+        .map((one) => said(one, values.met(one), values, system))
         .filter(Boolean)
         .join('; ');
     default: {
       const [left, right] = condition.of.map((one) => {
-        const text = symbolsOf(one, facts).text;
-        const value = quantity(numberOf(one)(facts), one.dimension, system);
+        const text = symbolsOf(one, values).text;
+        const value = quantity(values.of(one), one.dimension, system);
         return one.op === 'literal' || one.op === 'constant' ? value : `${text} = ${value}`;
       });
       const sign = met ? relation[condition.op] : condition.op === 'atMost' ? '>' : '≥';
@@ -51,7 +51,7 @@ class Writer {
   private readonly written = new Map<Tree, WorkingRow>();
 
   constructor(
-    private readonly facts: never,
+    private readonly values: Values,
     private readonly system: UnitSystem,
   ) {}
 
@@ -84,7 +84,7 @@ class Writer {
   private branch(tree: Tree & { op: 'pick' }, rows: Set<WorkingRow>): Tree {
     for (const { when, then } of tree.branches) {
       for (const one of comparedIn(when)) this.visit(one, rows);
-      if (testOf(when)(this.facts)) return then;
+      if (this.values.met(when)) return then;
     }
     return tree.otherwise;
   }
@@ -95,9 +95,9 @@ class Writer {
     const notes = [...new Set([tree.note ?? '', ...this.choices(tree.of[0])])].filter(Boolean).join('; ');
     const row: WorkingRow = {
       symbol: tree.symbol,
-      expression: symbolsOf(tree.of[0], this.facts).text,
-      numbers: numbersOf(tree.of[0], this.facts, this.system, tree.dimension).text,
-      value: toSystem(numberOf(tree)(this.facts), tree.dimension, this.system),
+      expression: symbolsOf(tree.of[0], this.values).text,
+      numbers: numbersOf(tree.of[0], this.values, this.system, tree.dimension).text,
+      value: toSystem(this.values.of(tree), tree.dimension, this.system),
       unit: unitOf(tree.dimension, this.system).name,
       clause: tree.source?.clause ?? '',
       basis: tree.source?.basis ?? '',
@@ -109,7 +109,7 @@ class Writer {
 
   /** In inches and kips, a formula fitted in MPa takes its stress in MPa all the same: said where it does. */
   private inMPa(stress: Tree): string[] {
-    return this.system === 'in-kip' ? [`${symbolsOf(stress, this.facts).text} in MPa`] : [];
+    return this.system === 'in-kip' ? [`${symbolsOf(stress, this.values).text} in MPa`] : [];
   }
 
   /** The choices made within one step, in words and numbers. */
@@ -126,8 +126,8 @@ class Writer {
         const words: string[] = [];
         for (const { when, then } of tree.branches) {
           words.push(...comparedIn(when).flatMap((one) => this.choices(one)));
-          const met = testOf(when)(this.facts);
-          words.push(said(when, met, this.facts, this.system));
+          const met = this.values.met(when);
+          words.push(said(when, met, this.values, this.system));
           if (met) return [...words, ...this.choices(then)];
         }
         return [...words, ...this.choices(tree.otherwise)];
@@ -152,8 +152,7 @@ const comparedIn = (condition: Condition): readonly Tree[] => {
 
 /** Makes the writer of workings for one set of facts: it gives the steps of one or more results, in the order of use. */
 export const workingsOf = (facts: object, system: UnitSystem): ((trees: readonly Tree[]) => WorkingRow[]) => {
-  newRun();
-  const writer = new Writer(facts as never, system);
+  const writer = new Writer(new Values(facts as never), system);
   return (trees) => writer.rows(trees);
 };
 

@@ -7,7 +7,9 @@ import type { Facts } from '../../core/end/facts.ts';
 import { coefficientOf, instantaneousCentre } from '../../core/end/instantaneousCentre.ts';
 import { readEnd } from '../../core/end/readEnd.ts';
 import type { End } from '../../core/end/schema.ts';
-import { newRun, numberOf, testOf } from '../../core/formula/number.ts';
+import { Values } from '../../core/formula/number.ts';
+import { programOf } from '../../core/formula/program.ts';
+import { run } from '../../core/formula/run.ts';
 import type { Tree } from '../../core/formula/tree.ts';
 import type { Standard } from '../../core/standards/standard.ts';
 import { isNoRule, treesOf, type Way } from '../../core/standards/standard.ts';
@@ -56,20 +58,21 @@ const formulasOf = (standard: Standard, ends: readonly End[]): { trees: Tree[]; 
     return found.resolved.facts;
   });
   // The ends of a schedule differ in sizes alone, so that what applies to the first applies to all.
-  const applies = ({ off = [] }: Way): boolean => !off.some(({ when }) => testOf(when)(facts[0] as never));
+  const first = new Values(facts[0] as never);
+  const applies = ({ off = [] }: Way): boolean => !off.some(({ when }) => first.met(when));
   const ways = Object.values(standard.strength).flatMap((rule) => (isNoRule(rule) ? [] : rule.ways));
   return { trees: ways.filter(applies).flatMap(treesOf), facts };
 };
 
-/** All these formulas worked out once, as closures. */
+/** All these formulas worked out once, as one program. */
 const reading = ({ trees, facts }: ReturnType<typeof formulasOf>): (() => number) => {
-  const readers = trees.map(numberOf);
+  const { program, places } = programOf([{ always: [], gates: [], of: trees }]);
+  const { of } = places[0]!;
   const next = turning(facts);
   return () => {
-    const one = next() as never;
-    newRun();
+    run(program, next() as never);
     let sum = 0;
-    for (const read of readers) sum += read(one) > 0 ? 1 : 0;
+    for (const cell of of) sum += program.cells[cell!]! > 0 ? 1 : 0;
     return sum;
   };
 };
@@ -107,7 +110,7 @@ export const coreBench = (standard: Standard): Figure[] => {
     { name: 'formulas', turns: 1000, turn: reading(formulas) },
     { name: 'read', turns: 500, turn: () => ('end' in readEnd(four()) ? 1 : 0) },
   ];
-  const [quick, full, workings, centre, again, closures, read] = interleaved(contestants) as never as {
+  const [quick, full, workings, centre, again, alone, read] = interleaved(contestants) as never as {
     median: number;
     least: number;
   }[];
@@ -130,8 +133,8 @@ export const coreBench = (standard: Standard): Figure[] => {
   return [
     figure('numbers of a whole end (names looked up, facts, every check), median', quick!.median, 'µs', 8, 25),
     figure('the same, least of the rounds', quick!.least, 'µs', 8, 25),
-    figure('the formulas alone, worked out from the facts', closures!.median, 'µs', 8, 25),
-    figure('general spreadsheet engine, same formulas, over these', engine / closures!.median, 'times', 100, 33, true),
+    figure('the formulas alone, worked out from the facts', alone!.median, 'µs', 8, 25),
+    figure('general spreadsheet engine, same formulas, over these', engine / alone!.median, 'times', 100, 33, true),
     figure('bolt-group centre, 6 x 2 bolts, not solved before', centre!.median, 'µs', 52, 180),
     figure('bolt-group centre, solved before', again!.median, 'µs', 1, 3),
     figure('reading one end from JSON values (schema)', read!.median, 'µs', 10, 30),

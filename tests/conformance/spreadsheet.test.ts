@@ -1,7 +1,7 @@
 import { HyperFormula } from 'hyperformula';
 import { describe, expect, test } from 'vitest';
 import { examine } from '../../core/check/examine.ts';
-import { newRun, numberOf, testOf } from '../../core/formula/number.ts';
+import { Values } from '../../core/formula/number.ts';
 import { standards } from '../../core/standards/index.ts';
 import { isNoRule, treesOf } from '../../core/standards/standard.ts';
 import { sheetRow } from '../support/spreadsheet.ts';
@@ -30,15 +30,14 @@ describe.each(Object.values(standards))(
     });
 
     test.each(ends.map(({ name }, at) => ({ name, at })))('$name', ({ at }) => {
-      newRun();
-      const one = facts[at] as never;
+      const values = new Values(facts[at] as never);
       let counted = 0;
       ways.forEach((way, index) => {
         const { off = [], limits = [], unbounded } = way;
-        const closed = [...off, ...limits.filter(({ noNumber }) => noNumber)].some(({ when }) => testOf(when)(one));
-        if (closed || (unbounded && testOf(unbounded)(one))) return;
+        const closed = [...off, ...limits.filter(({ noNumber }) => noNumber)].some(({ when }) => values.met(when));
+        if (closed || (unbounded && values.met(unbounded))) return;
         treesOf(way).forEach((tree, side) => {
-          const ours = numberOf(tree)(one);
+          const ours = values.of(tree);
           const theirs = engine.getCellValue({ sheet: 0, row: at, col: row.results[firstOf[index]! + side]! });
           expect(typeof theirs).toBe('number');
           expect(Math.abs((theirs as number) - ours)).toBeLessThanOrEqual(1e-9 * Math.max(1, Math.abs(ours)));

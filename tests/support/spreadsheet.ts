@@ -1,4 +1,4 @@
-import { newRun, numberOf } from '../../core/formula/number.ts';
+import { numberOf } from '../../core/formula/number.ts';
 import type { Condition, Tree } from '../../core/formula/tree.ts';
 
 /** The same formulas as a spreadsheet row: input cells, and one formula cell for each step and result. */
@@ -117,10 +117,7 @@ class Builder {
 }
 
 /** What a solver is given: its own number, as the solver is no formula of the sheet either. */
-const evaluate = (tree: Tree, facts: never): number => {
-  newRun();
-  return numberOf(tree)(facts);
-};
+const evaluate = (tree: Tree, facts: never): number => numberOf(tree, facts);
 
 /** Writes trees as the formulas of one spreadsheet row. */
 export const sheetRow = (trees: readonly Tree[]): SheetRow => {

@@ -28,7 +28,7 @@ export const inUse = ({ facts, report }: ExaminedNumbers, { working = [] }: Chec
     .filter((tree) => named.has(symbolOf(tree)))
     .map((tree) => {
       const unit = unitOf(tree.dimension, report.units).name;
-      const value = quantity(numberOf(tree)(facts as never), tree.dimension, report.units);
+      const value = quantity(numberOf(tree, facts), tree.dimension, report.units);
       return { symbol: symbolOf(tree), value: unit ? `${value} ${unit}` : value };
     });
 };

@@ -1,0 +1,114 @@
+import type { Condition, Tree } from './tree.ts';
+
+export type Read = (facts: never) => number;
+export type Flag = (facts: never) => boolean;
+export type Solve = (facts: never, ...values: number[]) => number;
+
+type Leaf = 'literal' | 'given' | 'flag';
+type Operation = 'times' | 'over' | 'plus' | 'minus' | 'least' | 'most' | 'root' | 'square' | 'power';
+type Choice = 'pick' | 'atMost' | 'below' | 'not' | 'all' | 'any';
+
+/** One operation of a formula; formulas that say the same are one node, wherever they stand. */
+export interface Node {
+  readonly op: Leaf | Operation | Choice | 'found';
+  readonly of: readonly Node[];
+  /** Its place among all. */
+  readonly at: number;
+  /** What a leaf is or reads, or a solver. */
+  readonly is?: number | Read | Flag | Solve;
+  /** True where it leans on a solver, which costs much and must not run needlessly. */
+  readonly solved: boolean;
+  /** How many nodes lean on it. */
+  uses: number;
+}
+
+const settled: Readonly<Partial<Record<Node['op'], (a: number, b: number) => number>>> = {
+  times: (a, b) => a * b,
+  over: (a, b) => a / b,
+  plus: (a, b) => a + b,
+  minus: (a, b) => a - b,
+};
+
+/** Takes trees and conditions apart into nodes with at most three arguments each; the order of every sum and product is kept. */
+export class Nodes {
+  /** Each after those that it leans on. */
+  readonly all: Node[] = [];
+  private readonly known = new Map<string, Node>();
+  private readonly seen = new Map<Tree | Condition, Node>();
+  private readonly numbers = new Map<unknown, number>();
+
+  of(one: Tree | Condition): Node {
+    const seen = this.seen.get(one);
+    if (seen) return seen;
+    const made = this.take(one);
+    this.seen.set(one, made);
+    return made;
+  }
+
+  literal(value: number): Node {
+    return this.node('literal', [], value);
+  }
+
+  private take(one: Tree | Condition): Node {
+    switch (one.op) {
+      case 'literal':
+      case 'constant':
+        return this.literal(one.value);
+      case 'given':
+      case 'flag':
+        return this.node(one.op, [], one.read);
+      case 'bare':
+      case 'stress':
+      case 'step':
+        // N/mm2 is MPa, so both directions are the same number.
+        return this.of(one.of[0]);
+      case 'power':
+        if (one.exponent === 2) return this.node('square', [this.of(one.of[0])]);
+        return this.node('power', [this.of(one.of[0]), this.literal(one.exponent)]);
+      case 'pick':
+        return one.branches.reduceRight(
+          (rest, { when, then }) => this.node('pick', [this.of(when), this.of(then), rest]),
+          this.of(one.otherwise),
+        );
+      case 'found':
+        return this.node('found', this.each(one.of), one.solve);
+      case 'root':
+      case 'not':
+        return this.node(one.op, this.each(one.of));
+      default:
+        return this.each(one.of).reduce((a, b) => this.pair(one.op, a, b));
+    }
+  }
+
+  private each(of: readonly (Tree | Condition)[]): Node[] {
+    return of.map((one) => this.of(one));
+  }
+
+  private pair(op: Node['op'], a: Node, b: Node): Node {
+    const settle = settled[op];
+    const fixed = settle && typeof a.is === 'number' && typeof b.is === 'number';
+    return fixed ? this.literal(settle(a.is as number, b.is as number)) : this.node(op, [a, b]);
+  }
+
+  private node(op: Node['op'], of: readonly Node[], is?: Node['is']): Node {
+    let key: string = op;
+    for (const one of of) key += ` ${one.at}`;
+    if (is !== undefined) key += typeof is === 'number' ? ` ${Object.is(is, -0) ? '-0' : is}` : ` f${this.number(is)}`;
+    const known = this.known.get(key);
+    if (known) return known;
+    const solved = op === 'found' || of.some((one) => one.solved);
+    const made: Node = { op, of, at: this.all.length, solved, uses: 0, ...(is !== undefined && { is }) };
+    for (const one of of) one.uses += 1;
+    this.known.set(key, made);
+    this.all.push(made);
+    return made;
+  }
+
+  /** Tells one reader or solver from another. */
+  private number(one: unknown): number {
+    const known = this.numbers.get(one);
+    if (known !== undefined) return known;
+    this.numbers.set(one, this.numbers.size);
+    return this.numbers.size - 1;
+  }
+}

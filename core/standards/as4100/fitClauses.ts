@@ -8,11 +8,11 @@ import {
   singleRow,
 } from '../../end/gates.ts';
 import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, supportBolts, tp, tw } from '../../end/given.ts';
-import { oneLine } from '../../end/supportGroup.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import { fitCopeRadius as practiceRadius } from '../methods/fitPractice.ts';
-import type { FitRule } from '../standard.ts';
+import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import type { FitPart, FitRule } from '../standard.ts';
 
 const spacing = { clause: '9.5.1, 9.5.3', basis: 'seen' } as const;
 const edges = { clause: '9.5.2, 9.5.4', basis: 'seen' } as const;
@@ -21,7 +21,6 @@ const noBottomCope: Gate = {
   when: flag('no column inside a bottom cope', (f) => f.mBottom === 0),
   reason: 'no-bottom-cope',
 };
-const oneLineOfBolts: Gate = { when: oneLine, reason: 'single-column' };
 
 const leastSpacing = (d: Tree<Length>) => step('p_min', times(2.5, d), spacing);
 const greatestSpacing = (t: Tree<Length>, ply: string) => step('p_max', least(times(15, t), mm(200)), spacing, ply);
@@ -44,7 +43,7 @@ export const fitGauge: FitRule = {
   breach: 'fails',
   parts: [
     { of: '', given: q, ...inWeb, off: [noWebHoles, singleColumn] },
-    { of: 'cross centres', given: supportBolts.cc, least: inSupport.least, off: [noSupportBolts, oneLineOfBolts] },
+    { of: 'cross centres', given: supportBolts.cc, least: inSupport.least, off: [noSupportBolts, oneLineOnly] },
   ],
 };
 
@@ -73,10 +72,14 @@ export const fitEnd: FitRule = {
 };
 
 const rolledToe = (d: Tree<Length>): Tree<Length> => step('e_min', times(1.25, d), edges, 'rolled toe');
-const cleat = flag('', (f) => f.legWeb > 0, 'a cleat');
 const most = greatestEdge(tp);
-const atWeb = { most, off: [noWebHoles] };
-const atSupport = { most, off: [noSupportBolts] };
+const edge = (of: string, given: Tree<Length>, least: Tree<Length>, off: readonly Gate[]): FitPart => ({
+  of,
+  given,
+  least,
+  most,
+  off,
+});
 const cutAtSupport = cutEdgeBy(supportBolts.d);
 
 /** Edges of plate, ply, or cleat, whose toes are rolled: beside the bolts through the web, and beside those into the support. */
@@ -84,17 +87,14 @@ export const fitEdgePlate: FitRule = {
   source: edges,
   breach: 'fails',
   parts: [
-    { of: 'top', given: eTop, least: cutEdge, ...atWeb },
-    { of: 'bottom', given: eBot, least: cutEdge, ...atWeb },
-    { of: 'free edge', given: ex, least: pick([[cleat, rolledToe(d)]], cutEdge), ...atWeb },
-    { of: 'top, support bolts', given: supportBolts.eTop, least: cutAtSupport, ...atSupport },
-    { of: 'bottom, support bolts', given: supportBolts.eBot, least: cutAtSupport, ...atSupport },
-    {
-      of: 'free edge, support bolts',
-      given: supportBolts.eh,
-      least: pick([[cleat, rolledToe(supportBolts.d)]], cutAtSupport),
-      ...atSupport,
-    },
+    edge('top', eTop, cutEdge, [noWebHoles]),
+    edge('bottom', eBot, cutEdge, [noWebHoles]),
+    edge('free edge', ex, cutEdge, [noWebHoles, ofCleat]),
+    edge('toe of the web leg', ex, rolledToe(d), [noWebHoles, notCleat]),
+    edge('top, support bolts', supportBolts.eTop, cutAtSupport, [noSupportBolts]),
+    edge('bottom, support bolts', supportBolts.eBot, cutAtSupport, [noSupportBolts]),
+    edge('side, support bolts', supportBolts.eh, cutAtSupport, [noSupportBolts, ofCleat]),
+    edge('toe of the support leg', supportBolts.eh, rolledToe(supportBolts.d), [noSupportBolts, notCleat]),
   ],
 };
 

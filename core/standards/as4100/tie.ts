@@ -4,6 +4,7 @@ import { dn, ho, n, T, tw } from '../../end/given.ts';
 import { webPulled } from '../../end/tearPaths.ts';
 import { least, minus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
+import { supportLegsBent } from '../methods/supportLegsBent.ts';
 import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { webPull } from './bearing.ts';
@@ -22,7 +23,7 @@ const way = (of: string, resistance: Tree<Force>, off: Way['off'] = [], limits: 
   demand: T,
   resistance,
   off: [noTieForce, noWebHoles, ...off],
-  limits,
+  limits: [...limits, supportLegsBent],
 });
 
 const gross = step('φN_y', times(phi, fyw, tw, ho), member);
@@ -30,7 +31,8 @@ const net = step('φN_u', times(phi, 0.85, fu, tw, minus(ho, times(n, dn))), mem
 
 /**
  * Tie force along the beam, acting alone, in bolts and web: bolts in shear shared evenly, bearing and tear-out along the rows, the block
- * pulled out to the beam's end, the web in tension. Plate, cleat, weld and support are not covered; a welded leg or an end plate refers.
+ * pulled out to the beam's end, the web in tension. Plate, weld and support are not covered; cleats, whose support legs it bends, and end
+ * plates refer.
  */
 export const webTie: StrengthRule = {
   source,

@@ -8,10 +8,10 @@ import {
   singleRow,
 } from '../../end/gates.ts';
 import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fyp, p, q, supportBolts, tp, tw } from '../../end/given.ts';
-import { oneLine } from '../../end/supportGroup.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
-import type { FitRule } from '../standard.ts';
+import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import type { FitPart, FitRule } from '../standard.ts';
 import { epsilon, fyw } from './given.ts';
 
 const spacing = { clause: '10.2.2, 10.2.3', basis: 'seen' } as const;
@@ -20,7 +20,6 @@ const noBottomCope: Gate = {
   when: flag('no column inside a bottom cope', (f) => f.mBottom === 0),
   reason: 'no-bottom-cope',
 };
-const oneLineOfBolts: Gate = { when: oneLine, reason: 'single-column' };
 
 const leastSpacing = (d: Tree<Length>) => step('p_min', times(2.5, d), spacing);
 const greatestSpacing = (t: Tree<Length>, ply: string) =>
@@ -44,7 +43,7 @@ export const fitGauge: FitRule = {
   breach: 'fails',
   parts: [
     { of: '', given: q, ...inWeb, off: [noWebHoles, singleColumn] },
-    { of: 'cross centres', given: supportBolts.cc, least: inSupport.least, off: [noSupportBolts, oneLineOfBolts] },
+    { of: 'cross centres', given: supportBolts.cc, least: inSupport.least, off: [noSupportBolts, oneLineOnly] },
   ],
 };
 
@@ -74,10 +73,14 @@ export const fitEnd: FitRule = {
 };
 
 const rolledToe = (d0: Tree<Length>): Tree<Length> => step('e_min', times(1.5, d0), edges, 'rolled toe');
-const cleat = flag('', (f) => f.legWeb > 0, 'a cleat');
 const most = greatestEdge(tp, fyp);
-const atWeb = { most, off: [noWebHoles] };
-const atSupport = { most, off: [noSupportBolts] };
+const edge = (of: string, given: Tree<Length>, least: Tree<Length>, off: readonly Gate[]): FitPart => ({
+  of,
+  given,
+  least,
+  most,
+  off,
+});
 const cutAtSupport = cutEdgeBy(supportBolts.d0);
 
 /** Edges of plate, ply, or cleat, whose toes are rolled: beside the bolts through the web, and beside those into the support. */
@@ -85,16 +88,13 @@ export const fitEdgePlate: FitRule = {
   source: edges,
   breach: 'fails',
   parts: [
-    { of: 'top', given: eTop, least: cutEdge, ...atWeb },
-    { of: 'bottom', given: eBot, least: cutEdge, ...atWeb },
-    { of: 'free edge', given: ex, least: pick([[cleat, rolledToe(d0)]], cutEdge), ...atWeb },
-    { of: 'top, support bolts', given: supportBolts.eTop, least: cutAtSupport, ...atSupport },
-    { of: 'bottom, support bolts', given: supportBolts.eBot, least: cutAtSupport, ...atSupport },
-    {
-      of: 'free edge, support bolts',
-      given: supportBolts.eh,
-      least: pick([[cleat, rolledToe(supportBolts.d0)]], cutAtSupport),
-      ...atSupport,
-    },
+    edge('top', eTop, cutEdge, [noWebHoles]),
+    edge('bottom', eBot, cutEdge, [noWebHoles]),
+    edge('free edge', ex, cutEdge, [noWebHoles, ofCleat]),
+    edge('toe of the web leg', ex, rolledToe(d0), [noWebHoles, notCleat]),
+    edge('top, support bolts', supportBolts.eTop, cutAtSupport, [noSupportBolts]),
+    edge('bottom, support bolts', supportBolts.eBot, cutAtSupport, [noSupportBolts]),
+    edge('side, support bolts', supportBolts.eh, cutAtSupport, [noSupportBolts, ofCleat]),
+    edge('toe of the support leg', supportBolts.eh, rolledToe(supportBolts.d0), [noSupportBolts, notCleat]),
   ],
 };

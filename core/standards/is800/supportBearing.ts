@@ -2,7 +2,8 @@ import { fullDepthPlate, oneSupportRow, wideSupportHole } from '../../end/gates.
 import { fup, fus, supportBolts, tp, ts } from '../../end/given.ts';
 import { oneRowOfSupport, supportForce, supportH, supportUpright } from '../../end/supportGroup.ts';
 import { pick } from '../../formula/tree.ts';
-import { oneSupportBoltRefers, supportPly, twoLines } from '../methods/supportPly.ts';
+import { twoLines } from '../methods/supportBearing.ts';
+import { oneSupportBoltRefers, supportPly } from '../methods/supportPly.ts';
 import type { StrengthRule } from '../standard.ts';
 import { inPly, source } from './plyBearing.ts';
 

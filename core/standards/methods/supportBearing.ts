@@ -1,4 +1,4 @@
-import { fullDepthPlate, type Gate, noSupportBolts, wideSupportHole } from '../../end/gates.ts';
+import { fullDepthPlate, type Gate, type Limit, noSupportBolts, wideSupportHole } from '../../end/gates.ts';
 import { flag, supportBolts } from '../../end/given.ts';
 import { oneLine, oneRowOfSupport, supportForce } from '../../end/supportGroup.ts';
 import { all, not, type Source, step, type Tree, times } from '../../formula/tree.ts';
@@ -7,13 +7,20 @@ import type { StrengthRule, Way } from '../standard.ts';
 import { notCleat, ofCleat } from './kinds.ts';
 import { onSupport, sharedWeb } from './supportShear.ts';
 
-const noSupport: Gate = { when: flag('no support is given', (f) => f.supportKind === 'none'), reason: 'no-support' };
-const notTold: Gate = {
+export const noSupport: Gate = {
+  when: flag('no support is given', (f) => f.supportKind === 'none'),
+  reason: 'no-support',
+};
+export const notTold: Gate = {
   when: flag('thickness or grade of the support not told', (f) => f.ts === 0 || f.fus === 0),
   reason: 'support-not-told',
 };
-const single: Gate = { when: oneLine, reason: 'one-line' };
-const twoLines: Gate = { when: not(oneLine), reason: 'pair-of-cleats' };
+/** One line of support bolts, whose arm counts; or two, which balance each other. */
+export const single: Gate = { when: oneLine, reason: 'one-line' };
+export const twoLines: Gate = { when: not(oneLine), reason: 'pair-of-cleats' };
+
+/** How a beam opposite shares in the line of one cleat, which holds V at an arm, is not known. */
+export const oneLineOpposite: Limit = { when: sharedWeb, reason: 'one-line-opposite', always: true, noNumber: true };
 
 /** One bolt of one line holds no moment: used up by any load at all. */
 export const oneSupportBolt = all(oneLine, oneRowOfSupport);
@@ -49,7 +56,7 @@ export const supportBearing = (source: Source, fitting: Tree<Force>, ply: Tree<F
     {
       ...perBolt('support', ply),
       off: [noSupportBolts, noSupport, notTold, twoLines],
-      limits: [{ when: sharedWeb, reason: 'one-line-opposite', always: true, noNumber: true }, ...limits],
+      limits: [oneLineOpposite, ...limits],
     },
   ],
 });

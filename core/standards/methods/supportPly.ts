@@ -1,29 +1,14 @@
-import { fullDepthPlate, type Gate, type Limit, oneSupportRow, wideSupportHole } from '../../end/gates.ts';
-import { flag, supportBolts } from '../../end/given.ts';
-import { oneLine, oneRowOfSupport, supportForce, supportUpright } from '../../end/supportGroup.ts';
-import { all, least, not, pick, type Source, step, type Tree, times } from '../../formula/tree.ts';
+import { fullDepthPlate, type Limit, oneSupportRow, wideSupportHole } from '../../end/gates.ts';
+import { supportBolts } from '../../end/given.ts';
+import { oneRowOfSupport, supportForce, supportUpright } from '../../end/supportGroup.ts';
+import { least, pick, type Source, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
 import type { Way } from '../standard.ts';
-import { onSupport, sharedWeb } from './supportShear.ts';
+import { noSupport, notTold, oneLineOpposite, oneSupportBolt, single, twoLines } from './supportBearing.ts';
+import { onSupport } from './supportShear.ts';
 
 /** One bolt of a single line holds no moment: no force on it can be stated. */
-export const oneSupportBoltRefers: Limit = {
-  when: all(oneLine, oneRowOfSupport),
-  reason: 'one-bolt',
-  always: true,
-  noNumber: true,
-};
-/** Two lines of bolts, one on either side of the web: what is eccentric in one is balanced by the other. */
-export const twoLines: Gate = { when: not(oneLine), reason: 'pair-of-cleats' };
-
-const noSupport: Gate = { when: flag('no support is given', (f) => f.supportKind === 'none'), reason: 'no-support' };
-const notTold: Gate = {
-  when: flag('thickness or grade of the support not told', (f) => f.ts === 0 || f.fus === 0),
-  reason: 'support-not-told',
-};
-const single: Gate = { when: oneLine, reason: 'one-line' };
-/** The line of one cleat's bolts holds V at its arm; how the beam opposite shares in that no formula here says. */
-const oneLineOpposite: Limit = { when: sharedWeb, reason: 'one-line-opposite', always: true };
+export const oneSupportBoltRefers: Limit = { when: oneSupportBolt, reason: 'one-bolt', always: true, noNumber: true };
 
 /**
  * Bearing of the support's own ply at the joint's bolts, N a bolt: `full` whatever its direction, `upright` towards the next hole. A beam on

@@ -167,10 +167,18 @@ describe('a tie force under AS 4100', () => {
   test.each([
     ['an end plate', endPlate],
     ['a welded web leg', webWelded],
-    ['a welded support leg', supportWelded],
-  ])('through %s refers', (_, end) => {
+  ])('through %s refers without a number', (_, end) => {
     expect(stateOf(end, { tie: 0 }, 'web-tie')).toBe('notApplicable, no-tie');
     expect(stateOf(end, { tie: 20 }, 'web-tie')).toBe('refer, tie-not-covered');
+    expect(checkOf(end, { tie: 20 }, 'web-tie').resistance).toBeNull();
+  });
+
+  test('bends the support legs of cleats: it refers where bolts and web would hold, and fails where they do not', () => {
+    for (const end of [pair, single, supportWelded]) {
+      expect(stateOf(end, { tie: 20 }, 'web-tie')).toBe('refer, tie-bends-legs');
+      expect(checkOf(end, { tie: 20 }, 'web-tie').resistance).not.toBeNull();
+    }
+    expect(stateOf(pair, { tie: 500 }, 'web-tie')).toBe('fails');
   });
 });
 

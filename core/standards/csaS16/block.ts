@@ -1,8 +1,16 @@
-import { copeLimits, type Gate, intactFlange, oneColumn } from '../../end/gates.ts';
-import { mTop, V } from '../../end/given.ts';
-import { type Block, plateBlock as plate, webBlock as web } from '../../end/tearPaths.ts';
+import {
+  copeLimits,
+  fullDepthPlate,
+  type Gate,
+  intactFlange,
+  noSupportBolts,
+  noWebHoles,
+  oneColumn,
+} from '../../end/gates.ts';
+import { k, mTop, V } from '../../end/given.ts';
+import { type Block, plateBlock as plate, supportBlock, webBlock as web } from '../../end/tearPaths.ts';
 import { atMost, below, constant, not, plus, type Source, step, type Tree, times } from '../../formula/tree.ts';
-import type { Force, Stress } from '../../units/dimension.ts';
+import type { Force, Pure, Stress } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { phiU } from './factors.ts';
 import { Fu, Fup } from './given.ts';
@@ -21,17 +29,23 @@ export const tornBlock = (
 
 const severalInside: Gate = { when: below(1, mTop), reason: 'several-columns' };
 const oneInside: Gate = { when: atMost(mTop, 1), reason: 'single-column' };
-const several: Gate = { when: not(oneColumn), reason: 'several-columns' };
+const severalColumns: Gate = { when: not(oneColumn), reason: 'several-columns' };
 const single: Gate = { when: oneColumn, reason: 'single-column' };
 
-const way = (block: Block, Ut: number, Fu: Tree<Stress>, Fm: Tree<Stress>, source: Source): Way => ({
+const torn = (block: Block, Ut: number, Fu: Tree<Stress>, Fm: Tree<Stress>, source: Source): Tree<Force> =>
+  tornBlock(step('P_t', times(phiU, constant('U_t', Ut), block.Ant, Fu), source), block, Fm, source);
+
+const against = (resistance: Tree<Force>, source: Source): Way => ({
   of: '',
   symbol: 'V',
   load: 'V',
   demand: V,
-  resistance: tornBlock(step('P_t', times(phiU, constant('U_t', Ut), block.Ant, Fu), source), block, Fm, source),
+  resistance,
   source,
 });
+
+const way = (block: Block, Ut: number, Fu: Tree<Stress>, Fm: Tree<Stress>, source: Source): Way =>
+  against(torn(block, Ut, Fu, Fm, source), source);
 
 /** Block tearing of the coped web, CSA S16:19 cl. 13.11, columns inside the cope: U_t 0.9 with one, 0.3 with two or more. */
 export const webBlock: StrengthRule = {
@@ -46,7 +60,27 @@ export const webBlock: StrengthRule = {
 export const plateBlock: StrengthRule = {
   source,
   ways: [
-    { ...way(plate, 0.6, Fup, Fmp, source), off: [several] },
+    { ...way(plate, 0.6, Fup, Fmp, source), off: [severalColumns] },
     { ...way(plate, 0.3, Fup, Fmp, memory), off: [single] },
   ],
+};
+
+/** Blocks of the same kind, one in each cleat or on each side of the web. */
+const several = (count: Tree<Pure> | 2, block: Block, Ut: number, source: Source): Way =>
+  against(step('V_r', times(count, torn(block, Ut, Fup, Fmp, source)), source), source);
+
+/** Block tearing of each cleat: its web leg as a plate, its support leg one-sided beside the line of bolts, U_t 0.6. */
+export const cleatBlock: StrengthRule = {
+  source,
+  ways: [
+    { ...several(k, plate, 0.6, source), of: 'web leg', off: [noWebHoles, severalColumns] },
+    { ...several(k, plate, 0.3, memory), of: 'web leg', off: [noWebHoles, single] },
+    { ...several(k, supportBlock, 0.6, source), of: 'support leg', off: [noSupportBolts] },
+  ],
+};
+
+/** Block tearing of an end plate, one-sided beside each of the two lines of bolts, U_t 0.6. */
+export const endPlateBlock: StrengthRule = {
+  source,
+  ways: [{ ...several(2, supportBlock, 0.6, source), limits: [fullDepthPlate] }],
 };

@@ -1,9 +1,18 @@
-import { type Gate, intactFlange, singleColumn, singleRow } from '../../end/gates.ts';
-import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, tp, tw } from '../../end/given.ts';
+import {
+  type Gate,
+  intactFlange,
+  noSupportBolts,
+  noWebHoles,
+  oneSupportRow,
+  singleColumn,
+  singleRow,
+} from '../../end/gates.ts';
+import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, supportBolts, tp, tw } from '../../end/given.ts';
 import { step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
+import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
 import type { FitPart, FitRule } from '../standard.ts';
-import { cutEdge, greatestEdge, plateEdge } from './edgeDistance.ts';
+import { cutEdge, greatestEdge, plateEdge, supportCutEdge, supportPlateEdge } from './edgeDistance.ts';
 
 const spacing = { clause: '22.3.1', basis: 'seen' } as const;
 const edges = { clause: 'Table 6, 22.3.3', basis: 'memory' } as const;
@@ -13,29 +22,40 @@ const noBottomCope: Gate = {
   reason: 'no-bottom-cope',
 };
 const manyRows: Gate = { when: flag('', (f) => f.n > 2, 'three bolt rows or more'), reason: 'three-in-line' };
+const manySupportRows: Gate = {
+  when: flag('', (f) => f.supportBolts.n > 2, 'three rows of support bolts or more'),
+  reason: 'three-in-line',
+};
 const manyColumns: Gate = { when: flag('', (f) => f.m > 2, 'three bolt columns or more'), reason: 'three-in-line' };
 const untied: Gate = { when: flag('', (f) => f.T === 0, 'no tie force'), reason: 'no-tie' };
 
 /** Least spacing of bolts 2.7 d, CSA S16:19 cl. 22.3.1. */
 const leastSpacing = step('p_min', times(2.7, d), spacing);
+const leastOfSupport = step('p_min', times(2.7, supportBolts.d), spacing);
 
 export const fitPitch: FitRule = {
   source: spacing,
   breach: 'fails',
-  parts: [{ of: '', given: p, least: leastSpacing, off: [singleRow] }],
+  parts: [
+    { of: '', given: p, least: leastSpacing, off: [noWebHoles, singleRow] },
+    { of: 'support bolts', given: supportBolts.p, least: leastOfSupport, off: [noSupportBolts, oneSupportRow] },
+  ],
 };
 
 export const fitGauge: FitRule = {
   source: spacing,
   breach: 'fails',
-  parts: [{ of: '', given: q, least: leastSpacing, off: [singleColumn] }],
+  parts: [
+    { of: '', given: q, least: leastSpacing, off: [noWebHoles, singleColumn] },
+    { of: 'cross centres', given: supportBolts.cc, least: leastOfSupport, off: [noSupportBolts, oneLineOnly] },
+  ],
 };
 
 /** With one or two bolts in the line of the force the end beyond them is 1.5 d at least, cl. 22.3.4. */
-const endInLine = (of: string, given: Tree<Length>, off: readonly Gate[]): FitPart => ({
+const endInLine = (of: string, given: Tree<Length>, off: readonly Gate[], bolt = d): FitPart => ({
   of,
   given,
-  least: step('e_min', times(1.5, d), inLine),
+  least: step('e_min', times(1.5, bolt), inLine),
   off,
   source: inLine,
 });
@@ -60,14 +80,32 @@ export const fitEnd: FitRule = {
   ],
 };
 
-/** Edge distances of the plate: sheared edges unless option `plate-edges: cut`; the end in the line of V. */
+const edge = (of: string, given: Tree<Length>, least: Tree<Length>, off: readonly Gate[]): FitPart => ({
+  of,
+  given,
+  least,
+  most: greatestEdge(tp),
+  off,
+});
+const { eTop: above, eBot: below, eh: beside, ev: nearer } = supportBolts;
+
+/**
+ * Edge distances of plate or cleat at its bolts: sheared edges unless option `plate-edges: cut`, the toes of a cleat rolled; the end in the line
+ * of V.
+ */
 export const fitEdgePlate: FitRule = {
   source: edges,
   breach: 'fails',
   parts: [
-    { of: 'top', given: eTop, least: plateEdge, most: greatestEdge(tp) },
-    { of: 'bottom', given: eBot, least: plateEdge, most: greatestEdge(tp) },
-    { of: 'free edge', given: ex, least: plateEdge, most: greatestEdge(tp) },
-    endInLine('bottom, in line', eBot, [manyRows]),
+    edge('top', eTop, plateEdge, [noWebHoles]),
+    edge('bottom', eBot, plateEdge, [noWebHoles]),
+    edge('free edge', ex, plateEdge, [noWebHoles, ofCleat]),
+    edge('toe of the web leg', ex, cutEdge, [noWebHoles, notCleat]),
+    endInLine('bottom, in line', eBot, [noWebHoles, manyRows]),
+    edge('top, support bolts', above, supportPlateEdge, [noSupportBolts]),
+    edge('bottom, support bolts', below, supportPlateEdge, [noSupportBolts]),
+    edge('side, support bolts', beside, supportPlateEdge, [noSupportBolts, ofCleat]),
+    edge('toe of the support leg', beside, supportCutEdge, [noSupportBolts, notCleat]),
+    endInLine('in line, support bolts', nearer, [noSupportBolts, manySupportRows], supportBolts.d),
   ],
 };

@@ -8,14 +8,15 @@ import {
   fitCopeLength,
   fitCopeRadius,
   fitPlateDepth,
-  fitRotation,
   fitSetback,
 } from '../methods/fitPractice.ts';
+import { fitRotation } from '../methods/fitRotation.ts';
 import { fitWrench } from '../methods/fitWrench.ts';
 import { plateBuckling } from '../methods/plateBuckling.ts';
 import { noRule, type Standard } from '../standard.ts';
-import { plateBlock, webBlock } from './block.ts';
-import { boltShear, plateBearing, webBearing } from './bolts.ts';
+import { cleatBlock, endPlateBlock, plateBlock, webBlock } from './block.ts';
+import { boltShear, cleatBearing, plateBearing, webBearing } from './bolts.ts';
+import { cleatBending, cleatBuckling } from './cleat.ts';
 import { copeBending } from './copeBending.ts';
 import { copeShear } from './copeShear.ts';
 import { stressCope, stressFull } from './elasticStress.ts';
@@ -23,13 +24,15 @@ import { E, phi, phiB, phiBr, phiU, phiW } from './factors.ts';
 import { fitEdgePlate, fitEdgeWeb, fitEnd, fitGauge, fitPitch } from './fitClauses.ts';
 import { Fy, Fyp } from './given.ts';
 import { materials } from './materials.ts';
-import { plateNetShear, webNetShear } from './netShear.ts';
-import { plateBending, plateGrossShear } from './plate.ts';
-import { plateTearout, webTearout } from './tearOut.ts';
+import { cleatNetShear, endPlateNetShear, plateNetShear, webNetShear } from './netShear.ts';
+import { cleatGrossShear, endPlateGrossShear, plateBending, plateGrossShear, supportShear } from './plate.ts';
+import { supportBearing, supportBoltShear } from './supportBolts.ts';
+import { cleatTearout, endPlateTearout, plateTearout, webTearout } from './tearOut.ts';
 import { webTie } from './tie.ts';
 import { verified } from './verified.ts';
 import { webGrossShear } from './webGrossShear.ts';
 import { weld } from './weld.ts';
+import { endPlateWebShear, weldWeb } from './weldWeb.ts';
 
 const twoColumns = flag('two bolt columns', (f) => f.m === 2);
 const threeColumns = flag('three bolt columns or more', (f) => f.m > 2);
@@ -69,23 +72,23 @@ export const csaS16: Standard = {
     'plate-bending': plateBending,
     'plate-buckling': plateBuckling((Q, fy, W) => times(phi, Q, fy, W), Fyp),
     weld,
-    'cleat-bearing': noRule(),
-    'cleat-tearout': noRule(),
-    'cleat-gross-shear': noRule(),
-    'cleat-net-shear': noRule(),
-    'cleat-block': noRule(),
-    'cleat-bending': noRule(),
-    'cleat-buckling': noRule(),
-    'endplate-bearing': noRule(),
-    'endplate-tearout': noRule(),
-    'endplate-gross-shear': noRule(),
-    'endplate-net-shear': noRule(),
-    'endplate-block': noRule(),
-    'endplate-web-shear': noRule(),
-    'weld-web': noRule(),
-    'support-bolt-shear': noRule(),
-    'support-bearing': noRule(),
-    'support-shear': noRule(),
+    'cleat-bearing': cleatBearing,
+    'cleat-tearout': cleatTearout,
+    'cleat-gross-shear': cleatGrossShear,
+    'cleat-net-shear': cleatNetShear,
+    'cleat-block': cleatBlock,
+    'cleat-bending': cleatBending,
+    'cleat-buckling': cleatBuckling,
+    'endplate-bearing': noRule('support-bearing'),
+    'endplate-tearout': endPlateTearout,
+    'endplate-gross-shear': endPlateGrossShear,
+    'endplate-net-shear': endPlateNetShear,
+    'endplate-block': endPlateBlock,
+    'endplate-web-shear': endPlateWebShear,
+    'weld-web': weldWeb,
+    'support-bolt-shear': supportBoltShear,
+    'support-bearing': supportBearing,
+    'support-shear': supportShear,
   },
   fit: {
     'fit-pitch': fitPitch,

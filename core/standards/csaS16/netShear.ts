@@ -1,5 +1,5 @@
-import { copeLimits } from '../../end/gates.ts';
-import { dn, flag, ho, hp, n, tp, tw, V } from '../../end/given.ts';
+import { copeLimits, fullDepthPlate } from '../../end/gates.ts';
+import { dn, flag, ho, hp, k, n, tp, tw, V } from '../../end/given.ts';
 import { minus, pick, step, times } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiU } from './factors.ts';
@@ -33,4 +33,27 @@ export const webNetShear: StrengthRule = {
 export const plateNetShear: StrengthRule = {
   source,
   ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: step('V_r', times(0.6, phiU, Fmp, tp, hp), source) }],
+};
+
+/** Of each cleat: the same in both legs, as the gross length counts. */
+export const cleatNetShear: StrengthRule = {
+  source,
+  ways: [
+    { of: '', symbol: 'V', load: 'V', demand: V, resistance: step('V_r', times(k, 0.6, phiU, Fmp, tp, hp), source) },
+  ],
+};
+
+/** Through both lines of bolts of an end plate. */
+export const endPlateNetShear: StrengthRule = {
+  source,
+  ways: [
+    {
+      of: '',
+      symbol: 'V',
+      load: 'V',
+      demand: V,
+      resistance: step('V_r', times(2, 0.6, phiU, Fmp, tp, hp), source, 'both sides of the web'),
+      limits: [fullDepthPlate],
+    },
+  ],
 };

@@ -1,9 +1,12 @@
 import { N } from '../../end/boltGroup.ts';
-import { type Gate, noTieForce, singleRow } from '../../end/gates.ts';
-import { dn, flag, ho, hp, n, T, tp, tw } from '../../end/given.ts';
+import { noTieForce, noWebHoles, singleRow } from '../../end/gates.ts';
+import { dn, ho, hp, k, n, T, tp, tw } from '../../end/given.ts';
 import { type Block, platePulled, webPulled } from '../../end/tearPaths.ts';
 import { minus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force, Length, Stress } from '../../units/dimension.ts';
+import { notCleat, notFinPlate, ofCleat } from '../methods/kinds.ts';
+import { supportLegsBent } from '../methods/supportLegsBent.ts';
+import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { tornBlock } from './block.ts';
 import { bearingOn, boltTied } from './bolts.ts';
@@ -20,7 +23,8 @@ const way = (of: string, resistance: Tree<Force>, off: Way['off'] = []): Way => 
   load: 'T',
   demand: T,
   resistance,
-  off: [noTieForce, ...off],
+  off: [noTieForce, noWebHoles, ...off],
+  limits: [supportLegsBent],
 });
 
 /** Pulled straight, so the whole tension plane counts: U_t = 1.0. */
@@ -35,11 +39,17 @@ const netTension = (t: Tree<Length>, depth: Tree<Length>, Fu: Tree<Stress>) =>
 const grossTension = (t: Tree<Length>, depth: Tree<Length>, Fy: Tree<Stress>) =>
   step('T_r', times(phi, Fy, t, depth), source);
 
-const noWeld: Gate = { when: flag('no weld', (f) => f.kind === 'web-bolts'), reason: 'no-weld' };
+const bearing = step('T_r', times(N, bearingOn(tp, Fup)), source);
+const plateBlock = block(platePulled, Fmp, Fup);
+const rows = rowByRow(platePulled, Fmp);
+const net = netTension(tp, hp, Fup);
+const gross = grossTension(tp, hp, Fyp);
+const eachCleat = (one: Tree<Force>): Tree<Force> => step('T_r', times(k, one), source, 'each cleat');
 
 /**
  * Tie force along the beam, acting alone: bolts in shear shared evenly, bearing, a block or each row pulled out to the end, net and gross
- * tension of the web alone, flanges not counted; in the web and, as the same joint hangs on them, in the plate and its weld.
+ * tension of the web alone, flanges not counted; in the web and, as the same joint hangs on them, in the plate and its weld, or in the web legs
+ * of cleats. Their support legs, bent open, and the bolts there have no formula, nor have welded legs and end plates: these refer.
  */
 export const webTie: StrengthRule = {
   source,
@@ -50,11 +60,17 @@ export const webTie: StrengthRule = {
     way('rows, web', rowByRow(webPulled, Fm)),
     way('net tension, web', netTension(tw, ho, Fu)),
     way('gross tension, web', grossTension(tw, ho, Fy)),
-    way('bearing, plate', step('T_r', times(N, bearingOn(tp, Fup)), source)),
-    way('block, plate', block(platePulled, Fmp, Fup), [singleRow]),
-    way('rows, plate', rowByRow(platePulled, Fmp)),
-    way('net tension, plate', netTension(tp, hp, Fup)),
-    way('gross tension, plate', grossTension(tp, hp, Fyp)),
-    way('weld', step('T_r', times(2, hp, filletLine), source), [noWeld]),
+    way('bearing, plate', bearing, [ofCleat]),
+    way('block, plate', plateBlock, [ofCleat, singleRow]),
+    way('rows, plate', rows, [ofCleat]),
+    way('net tension, plate', net, [ofCleat]),
+    way('gross tension, plate', gross, [ofCleat]),
+    way('weld', step('T_r', times(2, hp, filletLine), source), [notFinPlate]),
+    way('bearing, web leg', eachCleat(bearing), [notCleat]),
+    way('block, web leg', eachCleat(plateBlock), [notCleat, singleRow]),
+    way('rows, web leg', eachCleat(rows), [notCleat]),
+    way('net tension, web leg', eachCleat(net), [notCleat]),
+    way('gross tension, web leg', eachCleat(gross), [notCleat]),
+    tieNotCovered,
   ],
 };

@@ -1,5 +1,8 @@
 import { flag, hp, leg, V, Xu, z } from '../../end/given.ts';
-import { least, over, pick, plus, root, squared, step, times } from '../../formula/tree.ts';
+import { supportLegWeldForce } from '../../end/weldGroup.ts';
+import { least, over, pick, plus, root, squared, step, type Tree, times } from '../../formula/tree.ts';
+import type { Stress } from '../../units/dimension.ts';
+import { notCleat, ofCleat } from '../methods/kinds.ts';
 import { leastLeg, legBelow } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiW } from './factors.ts';
@@ -9,7 +12,7 @@ const source = { clause: '13.13.2.2', basis: 'seen' } as const;
 const memory = { clause: '13.13.2.2', basis: 'memory' } as const;
 
 /** Least leg by the thicker part, mm. */
-const leastLegSize = leastLeg(
+export const leastLegSize = leastLeg(
   [
     [12, 5],
     [20, 6],
@@ -24,9 +27,14 @@ const supportTold = flag("the support's grade is told", (f) => f.fus > 0);
 const base = step('F_u', pick([[supportTold, least(Fup, Fus)]], Fup), memory, 'parts joined');
 
 /** Strength of one fillet along its length, N/mm: the weaker of the throat and of the leg in the parts joined, θ = 0, M_w = 1. */
-export const filletLine = step('v_r', times(0.67, phiW, leg, least(over(Xu, root(2)), base)), source);
+export const filletOn = (base: Tree<Stress>): Tree<'-1,1'> =>
+  step('v_r', times(0.67, phiW, leg, least(over(Xu, root(2)), base)), source);
+export const filletLine = filletOn(base);
 
-/** Two upright fillets of the plate's depth under V and V z, elastic line, CSA S16:19 cl. 13.13.2.2. */
+/**
+ * CSA S16:19 cl. 13.13.2.2: two upright fillets of the plate's depth under V and V z, elastic line; or one fillet along the toe of a cleat's
+ * support leg with its share of V at the length of that leg.
+ */
 export const weld: StrengthRule = {
   source,
   ways: [
@@ -41,6 +49,16 @@ export const weld: StrengthRule = {
         'elastic line: shear, and bending at its ends',
       ),
       resistance: filletLine,
+      off: [ofCleat],
+      limits: [legBelow(leastLegSize)],
+    },
+    {
+      of: 'support leg',
+      symbol: 'q_w',
+      load: 'V',
+      demand: supportLegWeldForce,
+      resistance: filletLine,
+      off: [notCleat],
       limits: [legBelow(leastLegSize)],
     },
   ],

@@ -1,5 +1,5 @@
-import { noColumnInCope, oneColumn, oneRow } from '../../end/gates.ts';
-import { ab, at, eBot, eEnd, eTop, ex, flag, fu, fub, fup, k, p, q, tp, tw, V } from '../../end/given.ts';
+import { noColumnInCope, noWebHoles, oneColumn, oneRow } from '../../end/gates.ts';
+import { ab, at, eBot, eEnd, eTop, ex, flag, fu, fub, fup, k, p, q, tp, tw } from '../../end/given.ts';
 import {
   type Condition,
   constant,
@@ -23,6 +23,7 @@ import { boltLimits } from './limits.ts';
 import { bearingOf, bearingTermsOf, webBolt } from './oneBolt.ts';
 import { leastOf } from './optional.ts';
 import { guide, seen } from './sources.ts';
+import { underV } from './underV.ts';
 
 const source = seen('1-8 3.6.1');
 const most1 = constant('1', 1);
@@ -115,7 +116,7 @@ export const plateGroup: Tree<Force> = group(onPlate);
 
 const rule = (resistance: Tree<Force>): StrengthRule => ({
   source,
-  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance, limits: boltLimits }],
+  ways: [underV('', resistance, [noWebHoles], boltLimits)],
 });
 
 /** Bearing, EN 1993-1-8 3.6.1 Table 3.4: the web is pressed up, the plate down, both along the beam. */

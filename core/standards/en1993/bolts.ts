@@ -1,11 +1,12 @@
 import { J, N, xMax, yMax } from '../../end/boltGroup.ts';
-import { oneColumn, pairOfCleats } from '../../end/gates.ts';
-import { k, V, z } from '../../end/given.ts';
+import { noWebHoles, oneColumn, pairOfCleats } from '../../end/gates.ts';
+import { k, z } from '../../end/given.ts';
 import { over, pick, plus, root, squared, step, times } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
 import { boltLimits } from './limits.ts';
 import { longShearOf, webBolt } from './oneBolt.ts';
 import { guide, seen } from './sources.ts';
+import { underV } from './underV.ts';
 
 /** Force on the farthest bolt for each unit of V, upright and along the beam: elastic, V at arm z. */
 export const v = step('v', pick([[oneColumn, over(1, N)]], plus(over(1, N), over(times(z, xMax), J))), guide);
@@ -23,5 +24,5 @@ export const boltGroup = step(
 /** Bolts in shear, in two planes between a pair of cleats: EN 1993-1-8 3.6.1 and 3.8, elastic group of the joint guide. */
 export const boltShear: StrengthRule = {
   source: seen('1-8 3.6.1'),
-  ways: [{ of: '', symbol: 'V', load: 'V', demand: V, resistance: boltGroup, limits: boltLimits }],
+  ways: [underV('', boltGroup, [noWebHoles], boltLimits)],
 };

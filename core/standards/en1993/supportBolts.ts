@@ -1,4 +1,4 @@
-import { oneSupportRow } from '../../end/gates.ts';
+import { noSupportBolts, oneSupportRow } from '../../end/gates.ts';
 import { fup, fus, supportBolts, tp, ts } from '../../end/given.ts';
 import {
   atMost,
@@ -38,7 +38,7 @@ export const supportBoltShear: StrengthRule = {
     underV(
       '',
       step('V_Rd', times(0.8, all, onePlane), guide, '0.8 stands for tension in the bolts'),
-      [],
+      [noSupportBolts],
       supportBoltLimits,
     ),
   ],
@@ -86,11 +86,11 @@ const inSupport = onPly(
 export const supportBearing: StrengthRule = {
   source: table34,
   ways: [
-    underV('leg or plate', legGroup, [], supportBoltLimits),
+    underV('leg or plate', legGroup, [noSupportBolts], supportBoltLimits),
     ...onSupport({
       of: 'support',
       resistance: step('V_Rd', times(all, inSupport), table34),
-      off: supportGates,
+      off: [noSupportBolts, ...supportGates],
       limits: supportBoltLimits,
     }),
   ],

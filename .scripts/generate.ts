@@ -1,14 +1,15 @@
 /**
- * Writes what is generated from the fixtures: how far each check is verified, the table of published examples, and the README's table of
- * bases. With --check it writes nothing and fails where a file is not as it would be written.
+ * Writes what is generated from the fixtures: how far each check is verified, the table of published examples, the README's table of
+ * bases, and the golden drawings. With --check it writes nothing and fails where a file is not as it would be written.
  */
-import { existsSync, readFileSync, writeFileSync } from 'node:fs';
+import { existsSync, mkdirSync, readFileSync, writeFileSync } from 'node:fs';
 import { type CheckName, type FitName, fitNames, type StrengthName, strengthNames } from '../core/end/checkNames.ts';
 import { RESULT_FIGURES } from '../core/formula/line.ts';
 import { standards } from '../core/standards/index.ts';
 import { isNoRule, type Standard } from '../core/standards/standard.ts';
 import { significant } from '../core/units/figures.ts';
 import { wordsFor } from '../core/words/wordsFor.ts';
+import { goldenDrawings } from '../tests/core/drawing/goldenDrawings.ts';
 import { compared } from '../tests/support/compare.ts';
 import { type PublishedFixture, publishedFixtures } from '../tests/support/published.ts';
 
@@ -146,6 +147,7 @@ const files: [path: string, text: string][] = [
   ),
   ['fixtures/published/README.md', publishedTable()],
   ['fixtures/published/bases.md', basesPage()],
+  ...[...goldenDrawings()].map(([name, svg]): [string, string] => [`fixtures/golden/${name}.svg`, svg]),
   ...(existsSync(new URL('README.md', root))
     ? [['README.md', between(read('README.md'), 'bases', basesTable())] as [string, string]]
     : []),
@@ -157,6 +159,9 @@ for (const [path, text] of files) {
   if (process.argv.includes('--check')) {
     process.stdout.write(`${path} is not as generated: run npm run generate\n`);
     stale += 1;
-  } else writeFileSync(new URL(path, root), text);
+  } else {
+    mkdirSync(new URL('.', new URL(path, root)), { recursive: true });
+    writeFileSync(new URL(path, root), text);
+  }
 }
 process.exitCode = stale > 0 ? 1 : 0;

@@ -5,30 +5,46 @@ import { copeBending, plateBending } from './paths/bending.ts';
 import { plateBlock, webBlock } from './paths/block.ts';
 import { boltShear, plateBearing, webBearing } from './paths/bolts.ts';
 import { copeBuckling, plateBuckling } from './paths/buckling.ts';
+import {
+  cleatBearing,
+  cleatBending,
+  cleatBlock,
+  cleatBuckling,
+  cleatGrossShear,
+  cleatNetShear,
+  cleatTearout,
+  throughWeb,
+} from './paths/cleats.ts';
+import { supportLegBlock, supportLegNet, supportLegShear, supportLegTearout } from './paths/onSupport.ts';
 import type { PathMaker } from './paths/pathMaker.ts';
 import { copeShear, plateGrossShear, plateNetShear, webGrossShear, webNetShear } from './paths/shear.ts';
 import { stressCope, stressFull } from './paths/stress.ts';
 import { supportShear } from './paths/support.ts';
+import { supportBearing, supportBoltShear } from './paths/supportBolts.ts';
 import { plateTearout, webTearout } from './paths/tearOut.ts';
 import { webTie } from './paths/tie.ts';
-import { weld } from './paths/weld.ts';
+import { endPlateWebShear, weld, weldWeb } from './paths/weld.ts';
 import type { DrawingWords } from './words.ts';
 
-const noPath: PathMaker = () => null;
+/** Makers of the paths that an end plate has: its bolts hold it on both sides of the web. */
+const onPlate =
+  (maker: PathMaker): PathMaker =>
+  (it, words, of) =>
+    it.bp > 0 ? maker(it, words, of) : null;
 
 const makers: Readonly<Record<StrengthName, PathMaker>> = {
   'web-gross-shear': webGrossShear,
   'cope-shear': copeShear,
-  'web-net-shear': webNetShear,
-  'web-block': webBlock,
-  'web-tearout': webTearout,
+  'web-net-shear': throughWeb(webNetShear),
+  'web-block': throughWeb(webBlock),
+  'web-tearout': throughWeb(webTearout),
   'cope-bending': copeBending,
   'cope-buckling': copeBuckling,
-  'web-bearing': webBearing,
+  'web-bearing': throughWeb(webBearing),
   'web-tie': webTie,
   'stress-full': stressFull,
   'stress-cope': stressCope,
-  'bolt-shear': boltShear,
+  'bolt-shear': throughWeb(boltShear),
   'plate-bearing': plateBearing,
   'plate-tearout': plateTearout,
   'plate-gross-shear': plateGrossShear,
@@ -37,22 +53,22 @@ const makers: Readonly<Record<StrengthName, PathMaker>> = {
   'plate-bending': plateBending,
   'plate-buckling': plateBuckling,
   weld,
-  'cleat-bearing': plateBearing,
-  'cleat-tearout': plateTearout,
-  'cleat-gross-shear': plateGrossShear,
-  'cleat-net-shear': plateNetShear,
-  'cleat-block': plateBlock,
-  'cleat-bending': plateBending,
-  'cleat-buckling': plateBuckling,
-  'endplate-bearing': noPath,
-  'endplate-tearout': noPath,
-  'endplate-gross-shear': noPath,
-  'endplate-net-shear': noPath,
-  'endplate-block': noPath,
-  'endplate-web-shear': noPath,
-  'weld-web': noPath,
-  'support-bolt-shear': noPath,
-  'support-bearing': noPath,
+  'cleat-bearing': cleatBearing,
+  'cleat-tearout': cleatTearout,
+  'cleat-gross-shear': cleatGrossShear,
+  'cleat-net-shear': cleatNetShear,
+  'cleat-block': cleatBlock,
+  'cleat-bending': cleatBending,
+  'cleat-buckling': cleatBuckling,
+  'endplate-bearing': onPlate(supportBearing),
+  'endplate-tearout': onPlate(supportLegTearout),
+  'endplate-gross-shear': onPlate(supportLegShear),
+  'endplate-net-shear': onPlate(supportLegNet),
+  'endplate-block': onPlate(supportLegBlock),
+  'endplate-web-shear': endPlateWebShear,
+  'weld-web': weldWeb,
+  'support-bolt-shear': supportBoltShear,
+  'support-bearing': supportBearing,
   'support-shear': supportShear,
 };
 

@@ -11,3 +11,7 @@ const fittings: Readonly<Record<Facts['kind'], string>> = {
 
 /** Field names of the plate, ply or cleat. */
 export const plateField = ({ kind }: Facts, name: string): string => `${fittings[kind]}.${name}`;
+
+/** Fields that make the depth of the plate, ply or cleat. */
+export const depthFields = (it: Facts): string[] =>
+  it.n > 0 ? [plateField(it, 'topEdge'), plateField(it, 'bottomEdge'), 'joint.bolts.pitch'] : [plateField(it, 'depth')];

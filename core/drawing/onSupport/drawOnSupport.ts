@@ -122,7 +122,7 @@ const callouts = (it: Facts, { inSupport, units }: DrawingWords, box: Box): Call
         .map((y) => ({ x: x + (d0 / 2) * Math.cos(0.25), y: y + (d0 / 2) * Math.sin(0.25) })),
       end: 'arrow',
       variants: [words],
-      near: { x: box.right + d0, y: levels.at(-1)! + 2 * d0 },
+      near: { x: (x > 0 ? it.tw / 2 : box.left) + d0 / 2, y: it.yp + it.hp + 1.5 * d0 },
       onBeam: false,
       align: 'start',
     },

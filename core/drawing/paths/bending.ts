@@ -1,9 +1,11 @@
+import type { Facts } from '../../end/facts.ts';
+import { capital } from '../../words/capital.ts';
 import { lastColumnX } from '../bolts.ts';
 import type { Area, Point, Stroke } from '../drawing.ts';
-import { plateField } from '../fields.ts';
+import { depthFields } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
-import { type PathMaker, path, tag, torn } from './pathMaker.ts';
+import { fitting, type PathMaker, path, tag, torn } from './pathMaker.ts';
 import { copeRupture, cutOf, faceOf } from './shear.ts';
 
 /** Width of the stress figure over its depth. */
@@ -49,20 +51,24 @@ const webBesidePlate: PathMaker = (it, words) => {
 /** V bends the plate, at the middle of the bolts; where a standard names a way of it, at the first column. */
 export const plateBending: PathMaker = (it, words, of) => {
   const { left, top, bottom } = plateBox(it);
-  const reach = of === '' ? it.z : it.z1;
+  const reach = it.n === 0 ? legWeldArm(it) : of === '' ? it.z : it.z1;
   const x = left + reach;
   const [head, foot] = [
     { x, y: top },
     { x, y: bottom },
   ];
   const arm = level({ x: left, y: bottom - 0.1 * (bottom - top) }, x);
-  return path(`The ${words.plate} bends; its edges yield first.`, {
+  return path(`${capital(fitting(it, words))} bends; its edges yield first.`, {
     strokes: [torn(head, foot), ...arm.strokes],
     areas: stressFigure(head, foot, (top + bottom) / 2),
     tags: [tag(...arm.ends, `arm ${length(reach, words.units)}`)],
-    fields: ['setback', 'joint.endDistance', plateField(it, 'topEdge'), plateField(it, 'bottomEdge')],
+    fields: ['setback', 'joint.endDistance', ...depthFields(it)],
   });
 };
+
+/** From a cleat's heel to the middle of the weld around its web leg. */
+const legWeldArm = ({ legWeb, weldReturn, hp }: Facts): number =>
+  legWeb - (hp > 0 ? weldReturn ** 2 / (hp + 2 * weldReturn) : 0);
 
 /** Two triangles on the section: pushed on one side of the centroid, pulled on the other. */
 const stressFigure = (top: Point, foot: Point, centroid: number): Area[] => {

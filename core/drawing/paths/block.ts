@@ -4,7 +4,7 @@ import { plateField } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
-import { block, type PathMaker, path, tag, torn } from './pathMaker.ts';
+import { block, fitting, type PathMaker, path, tag, torn } from './pathMaker.ts';
 
 /** Sheared along the inner column up to the cut edge, pulled apart along the last row to the beam's end; columns inside the cope only. */
 export const webBlock: PathMaker = (it, words) => {
@@ -35,7 +35,7 @@ export const plateBlock: PathMaker = (it, words) => {
   ];
   const size = (mm: number): string => length(mm, words.units);
   return path(
-    `The hatched block tears out of the ${words.plate}: sheared along the bolts down to its bottom edge, pulled apart along the first row.`,
+    `The hatched block tears out of ${fitting(it, words)}: sheared along the bolts down to its bottom edge, pulled apart along the first row.`,
     {
       strokes: [torn(end, corner, foot)],
       areas: [block(x, it.y1, right, bottom)],
@@ -79,7 +79,7 @@ export const platePulled: PathMaker = (it, words) => {
     { x, y: it.yn },
     { x: right, y: it.yn },
   ] as const;
-  return path(`The tie force pulls the hatched block out of the ${words.plate} to its free edge.`, {
+  return path(`The tie force pulls the hatched block out of ${fitting(it, words)} to its free edge.`, {
     strokes: [torn(...corners)],
     areas: [block(x, it.y1, right, it.yn)],
     tags: [

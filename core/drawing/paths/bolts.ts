@@ -4,7 +4,7 @@ import type { Area, Circle, FailurePath, Point, Stroke, Tag } from '../drawing.t
 import { force, forceUnit, length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
 import { type BoltForce, boltForces, shares } from './boltForces.ts';
-import { type PathMaker, path, tag } from './pathMaker.ts';
+import { fitting, type PathMaker, path, tag } from './pathMaker.ts';
 
 /** As many bolts as can all bear their number; of more, those that carry the most. */
 const NUMBERED = 8;
@@ -16,11 +16,12 @@ export const boltShear: PathMaker = (it, words) => {
   const unit = forceUnit(words.units);
   const alone = forces.length === 1 ? ' One bolt alone holds no moment.' : '';
   const arm = length(it.z, words.units);
+  const spacing = Math.min(it.n > 1 ? it.p : Infinity, it.m > 1 ? it.q : Infinity, 3.2 * it.d0);
   return path(
-    `Bolts cut in one plane, black. Arrows: force of each bolt on the web, ${unit}; V at arm ${arm}.${alone}`,
+    `Bolts cut in ${it.k > 1 ? 'two planes' : 'one plane'}, black. Arrows: force of each bolt on the web, ${unit}; V at arm ${arm}.${alone}`,
     {
       circles: blackBolts(it),
-      ...arrows(it, forces, words),
+      ...arrowsOf(forces, { d0: it.d0, spacing }, words),
       fields: boltFields,
     },
   );
@@ -28,14 +29,21 @@ export const boltShear: PathMaker = (it, words) => {
 
 /** Where the bolts press on the web: on the side to which each pushes it. */
 export const webBearing: PathMaker = (it, words) =>
-  bearing(it, words, 1, 'Bolts press on the web where it is black, on the side to which they push it.');
+  bearing(it, words, 1, 'Bolts press on the web where it is black, on the side to which they push it.', 1);
 
 export const plateBearing: PathMaker = (it, words) =>
-  bearing(it, words, -1, `Bolts press on the ${words.plate} where it is black, on the side to which they push it.`);
+  bearing(
+    it,
+    words,
+    -1,
+    `Bolts press on ${fitting(it, words)} where it is black, on the side to which they push it.`,
+    it.k,
+  );
 
 const boltFields = ['setback', 'joint.endDistance', 'joint.bolts.pitch', 'joint.bolts.gauge'];
 
-const bearing = (it: Facts, words: DrawingWords, way: 1 | -1, caption: string): FailurePath => {
+/** `plies`: those that share the force of each bolt. */
+const bearing = (it: Facts, words: DrawingWords, way: 1 | -1, caption: string, plies: number): FailurePath => {
   const forces = boltForces(it);
   const part = shares(forces);
   const worst = forces.filter((_, i) => part[i]! > NEARLY_MOST);
@@ -43,7 +51,7 @@ const bearing = (it: Facts, words: DrawingWords, way: 1 | -1, caption: string): 
     areas: forces.map(({ at, towards }) => halfMoon(at, it.d0 / 2, { x: way * towards.x, y: way * towards.y })),
     tags: worst.slice(0, 1).map(({ at, towards, size }) => {
       const tip = { x: at.x + way * towards.x * it.d0, y: at.y + way * towards.y * it.d0 };
-      return tag(tip, tip, force(size, words.units));
+      return tag(tip, tip, force(size / plies, words.units));
     }),
     fields: boltFields,
   });
@@ -71,16 +79,20 @@ export const halfMoon = (centre: Point, radius: number, towards: Point): Area =>
   };
 };
 
-const arrows = (it: Facts, forces: readonly BoltForce[], words: DrawingWords): { strokes: Stroke[]; tags: Tag[] } => {
-  const spacing = Math.min(it.n > 1 ? it.p : Infinity, it.m > 1 ? it.q : Infinity, 3.2 * it.d0);
-  const longest = Math.max(0.75 * spacing, 1.2 * it.d0);
+/** An arrow at each hole by the share of the largest force, and the size beside it. */
+export const arrowsOf = (
+  forces: readonly BoltForce[],
+  { d0, spacing }: { readonly d0: number; readonly spacing: number },
+  words: DrawingWords,
+): { strokes: Stroke[]; tags: Tag[] } => {
+  const longest = Math.max(0.75 * spacing, 1.2 * d0);
   const part = shares(forces);
   const strokes: Stroke[] = [];
   const tags: Tag[] = [];
   forces.forEach(({ at, towards, size }, i) => {
     const reach = (r: number): Point => ({ x: at.x + towards.x * r, y: at.y + towards.y * r });
-    const tip = reach(it.d0 / 2 + longest * part[i]!);
-    strokes.push({ kind: 'force', from: reach(it.d0 / 2), to: [tip], arrow: true });
+    const tip = reach(d0 / 2 + longest * part[i]!);
+    strokes.push({ kind: 'force', from: reach(d0 / 2), to: [tip], arrow: true });
     if (forces.length <= NUMBERED || part[i]! > NEARLY_MOST) tags.push(tag(tip, tip, force(size, words.units)));
   });
   return { strokes, tags };

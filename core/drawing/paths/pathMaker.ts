@@ -35,3 +35,6 @@ export const block = (left: number, top: number, right: number, bottom: number):
     { x: left, y: bottom },
   ],
 });
+
+/** The plate, ply or cleat as a sentence names it; of a pair each one. */
+export const fitting = ({ k }: Facts, { plate }: DrawingWords): string => `${k > 1 ? 'each' : 'the'} ${plate}`;

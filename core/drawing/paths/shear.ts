@@ -1,12 +1,13 @@
 import type { CutFacts, Facts } from '../../end/facts.ts';
+import { capital } from '../../words/capital.ts';
 import { columnX, rowY } from '../bolts.ts';
 import type { FailurePath, Stroke } from '../drawing.ts';
 import { drawnLength } from '../drawnLength.ts';
-import { plateField } from '../fields.ts';
+import { depthFields } from '../fields.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
-import { type PathMaker, path, tag, torn } from './pathMaker.ts';
+import { fitting, type PathMaker, path, tag, torn } from './pathMaker.ts';
 
 /** Through the full depth, beyond copes and plate. */
 export const webGrossShear: PathMaker = (it, words) => {
@@ -48,10 +49,10 @@ export const plateGrossShear: PathMaker = (it, words) => {
     { x, y: top },
     { x, y: bottom },
   ];
-  return path(`The ${words.plate} shears beside the support.`, {
+  return path(`${capital(fitting(it, words))} shears beside the support.`, {
     strokes: [torn(head, foot)],
     tags: [tag(head, foot, `${length(bottom - top, words.units)} in shear`)],
-    fields: [plateField(it, 'topEdge'), plateField(it, 'bottomEdge'), 'joint.bolts.pitch'],
+    fields: depthFields(it),
   });
 };
 

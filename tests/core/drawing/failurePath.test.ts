@@ -8,6 +8,7 @@ import { layoutDrawing } from '../../../core/drawing/layout.ts';
 import { boltForces } from '../../../core/drawing/paths/boltForces.ts';
 import { type CheckName, fitNames, strengthNames } from '../../../core/end/checkNames.ts';
 import type { Facts } from '../../../core/end/facts.ts';
+import { finPlate } from '../../../core/joints/finPlate.ts';
 import { collide, pointsOf, textsOf } from './marks.ts';
 import { plausibleEnds } from './plausibleEnds.ts';
 import { sampleFacts, sampleWords, variedEnds } from './sampleFacts.ts';
@@ -60,7 +61,7 @@ const ways: Readonly<Record<string, readonly string[]>> = {
 describe('the path of a failure', () => {
   it('is drawn for every strength check of a coped fin plate, and for no rule of fit', () => {
     const both = sampleFacts(variedEnds['two copes, top the longer']);
-    for (const id of strengthNames) for (const of of ways[id] ?? ['']) pathOf(id, of, both);
+    for (const [id] of finPlate.strength) for (const of of ways[id] ?? ['']) pathOf(id, of, both);
     for (const id of fitNames) expect(failurePath(id, '', both, sampleWords)).toBeNull();
   });
 

@@ -1,5 +1,5 @@
 import type { FitPartPlan, FitPlan } from './plan.ts';
-import { blank, type Result, severity } from './result.ts';
+import { blank, gateAt, type Result, severity } from './result.ts';
 
 const trial = blank('fit-pitch');
 
@@ -42,7 +42,7 @@ export const evaluateFit = (plan: FitPlan, cells: Float64Array): Result => {
   }
   for (let at = 0; at < plan.parts.length; at += 1) {
     const part = plan.parts[at]!;
-    const off = part.off[cells[part.gate]!];
+    const off = gateAt(part.off, cells[part.gate]!);
     if (off) {
       if (result.way < 0 && result.reason === '') result.reason = off.reason;
       continue;

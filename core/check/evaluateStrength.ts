@@ -1,5 +1,5 @@
 import type { StrengthPlan, WayPlan } from './plan.ts';
-import { blank, type Result, severity } from './result.ts';
+import { blank, gateAt, type Result, severity } from './result.ts';
 
 /** A way for which the standard sets no limit: its demand at V, for information; no rule where a verdict is asked for. */
 const inform = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
@@ -38,13 +38,13 @@ const evaluateWay = (plan: WayPlan, cells: Float64Array, V: number, into: Result
   into.reason = '';
   into.demand = into.resistance = into.reactionAtFailure = into.utilisation = Number.NaN;
   const gate = cells[plan.gate]!;
-  const off = plan.off[gate];
+  const off = gateAt(plan.off, gate);
   if (off) {
     into.state = 'notApplicable';
     into.reason = off.reason;
     return;
   }
-  const limit = plan.limits[gate - plan.off.length];
+  const limit = gateAt(plan.limits, gate - plan.off.length);
   const informs = plan.informs !== undefined && cells[plan.informs] === 1;
   if (limit?.noNumber) {
     into.state = informs ? 'information' : 'refer';

@@ -36,3 +36,7 @@ export const blank = (id: CheckName): Result => ({
   reactionAtFailure: Number.NaN,
   utilisation: Number.NaN,
 });
+
+/** The gate of that number; undefined where it is none of them. (To read a list beyond its ends costs as much as a whole check.) */
+export const gateAt = <G>(gates: readonly G[], at: number): G | undefined =>
+  at >= 0 && at < gates.length ? gates[at] : undefined;

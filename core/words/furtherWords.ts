@@ -17,7 +17,6 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'slender-cut': 'the cut web may buckle before it yields in shear',
     'block-as-clause': 'the clause as it stands over-predicts such ends: it may not be what fails first',
     'one-line': 'one line of bolts, whose arm counts',
-    'one-line-opposite': 'one cleat alone, with a beam on the other side of the same web',
     'grip-too-long': 'the grip is longer than 8 d',
     'short-weld': 'without a leg at each end the weld is shorter than four legs',
     'thin-throat': 'the throat is below 3 mm',

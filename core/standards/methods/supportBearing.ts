@@ -19,8 +19,8 @@ export const notTold: Gate = {
 export const single: Gate = { when: oneLine, reason: 'one-line' };
 export const twoLines: Gate = { when: not(oneLine), reason: 'pair-of-cleats' };
 
-/** How a beam opposite shares in the line of one cleat, which holds V at an arm, is not known. */
-export const oneLineOpposite: Limit = { when: sharedWeb, reason: 'one-line-opposite', always: true, noNumber: true };
+/** How a beam opposite shares in the line of one cleat, which holds V at an arm, is not known: the number is that of V alone. */
+export const oneLineOpposite: Limit = { when: sharedWeb, reason: 'one-line-opposite', always: true };
 
 /** One bolt of one line holds no moment: used up by any load at all. */
 export const oneSupportBolt = all(oneLine, oneRowOfSupport);
@@ -40,7 +40,7 @@ const perBolt = (of: string, resistance: Tree<Force>): Way => ({
 /**
  * Bearing at the bolts into the support, N a bolt: of the leg or end plate, and of the support's own ply where it is told. A beam on the other
  * side of the same web hangs on the same bolts: its reaction is added. How it shares in the line of one cleat, which holds V at an arm, is not
- * known: that refers, without a number. A column's flange bears one beam alone.
+ * known: that refers. A column's flange bears one beam alone.
  */
 export const supportBearing = (source: Source, fitting: Tree<Force>, ply: Tree<Force>): StrengthRule => ({
   source,

@@ -147,5 +147,3 @@ export const fitSetback: FitRule = {
   breach: 'refer',
   parts: [{ of: '', given: g, least: mm(8), most: mm(20), off: [fillsSetback] }],
 };
-
-export { fitRotation } from './fitRotation.ts';

@@ -44,7 +44,7 @@ import { gammaM0, gammaMu } from './factors.ts';
 import { notCleat, notEndPlate, notPlate } from './kinds.ts';
 import { holeLimits } from './limits.ts';
 import { shearOf, webBolt } from './oneBolt.ts';
-import { guide } from './sources.ts';
+import { guide, memory, seen } from './sources.ts';
 import { stubWays } from './tieStub.ts';
 import { fullLength, weldLimits } from './weld.ts';
 import { webWeldStrength } from './weldWeb.ts';
@@ -110,7 +110,7 @@ const covered: Gate = {
 const notCovered: Limit = { when: not(covered.when), reason: 'tie-not-covered', always: true, noNumber: true };
 
 const onEndPlate = (of: string, resistance: Tree<Force>, limits: readonly Limit[]): Way =>
-  underT(of, step('T_Rd', resistance, guide), [notEndPlate], [...limits, fullDepthPlate]);
+  underT(of, resistance, [notEndPlate], [...limits, fullDepthPlate]);
 
 /**
  * Tie force acting alone, joint guide with f_u and γ_Mu: bolts, bearing, net tension and blocks of web and plate or cleats; bending of end
@@ -129,7 +129,7 @@ export const webTie: StrengthRule = {
     ...beside('plate', notPlate, (one) => one),
     ...beside('cleat', notCleat, (one) => times(k, one)),
     ...stubWays,
-    onEndPlate('web at the plate', over(times(tw, hp, fu), gammaMu), []),
-    onEndPlate('weld', times(2, fullLength, webWeldStrength), weldLimits),
+    onEndPlate('web at the plate', step('T_Rd', over(times(tw, hp, fu), gammaMu), memory(guide.clause)), []),
+    onEndPlate('weld', step('T_Rd', times(2, fullLength, webWeldStrength), seen('1-8 4.5.3.3')), weldLimits),
   ],
 };

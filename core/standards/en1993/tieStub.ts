@@ -18,7 +18,7 @@ import type { Force } from '../../units/dimension.ts';
 import type { Way } from '../standard.ts';
 import { gammaMu } from './factors.ts';
 import { supportBoltLimits } from './limits.ts';
-import { guide } from './sources.ts';
+import { guide, memory } from './sources.ts';
 
 /** Outside diameters of washers by bolt, mm. */
 const washers: Readonly<Record<number, number>> = { 12: 24, 16: 30, 20: 37, 22: 39, 24: 44, 27: 50, 30: 56, 36: 66 };
@@ -41,10 +41,9 @@ const m = step(
 );
 const edge = step('n′', least(eh, times(1.25, m)), guide);
 /** Clear width between the welds or roots. Without a radius the thickness stands in its place. mm */
-const s = step(
-  's_c',
-  pick([[isCleat, minus(gap, times(2, pick([[noRadius, tp]], rootRadius)))]], minus(gap, times(2, leg))),
-  guide,
+const s = pick(
+  [[isCleat, step('s_c', minus(gap, times(2, pick([[noRadius, tp]], rootRadius))), guide)]],
+  step('s_c', minus(gap, times(2, leg)), memory(guide.clause)),
 );
 const length = step(
   'Σl',

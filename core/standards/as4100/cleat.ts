@@ -5,8 +5,8 @@ import type { StrengthRule } from '../standard.ts';
 import { bending, moment, shear, Vc } from './plate.ts';
 import { withMoment } from './withMoment.ts';
 
-const inShear = step('k φV_c', times(k, Vc), shear);
-const inBending = step('k φM_s', times(k, moment), bending);
+const inShear = step('ΣφV_c', times(k, Vc), shear);
+const inBending = step('ΣφM_s', times(k, moment), bending);
 
 /** Shear of the cleats' whole depth, with the moment that comes with it, as of a plate. */
 export const cleatGrossShear: StrengthRule = {

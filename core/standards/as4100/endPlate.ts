@@ -15,7 +15,7 @@ const inShear = (resistance: Tree<Force>): StrengthRule => ({
 });
 
 /** Shear of the end plate beside the web, on both sides of it, AS 4100:2020 cl. 5.11.3. */
-export const endPlateGrossShear: StrengthRule = inShear(step('2 φV_c', times(2, Vc), source));
+export const endPlateGrossShear: StrengthRule = inShear(step('ΣφV_c', times(2, Vc), source));
 
 /** Shear of the beam's web beside the weld, over the plate's depth, as a rectangle. */
 export const endPlateWebShear: StrengthRule = inShear(

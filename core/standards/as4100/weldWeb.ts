@@ -30,9 +30,9 @@ export const weldWeb: StrengthRule = {
     },
     {
       of: 'web',
-      symbol: 'k v*',
+      symbol: 'Σv*',
       load: 'V',
-      demand: step('k v*', times(k, legWeldForce), source),
+      demand: step('Σv*', times(k, legWeldForce), source),
       resistance: step('φv_y', times(phi, 0.6, fyw, tw), { clause: '5.11.4', basis: 'practice' }, 'yield in shear'),
       off: [endPlate],
       source: { clause: '5.11.4', basis: 'practice' },

@@ -4,7 +4,7 @@ import { cleatArm } from '../methods/cleatArm.ts';
 import type { StrengthRule } from '../standard.ts';
 import { bending, bendingUnder, shear, Vd, Z, Zp } from './plate.ts';
 
-const inShear = step('k V_d', times(k, Vd), shear);
+const inShear = step('ΣV_d', times(k, Vd), shear);
 
 /** Shear of the cleats' whole depth, IS 800:2007 cl. 8.4.1. */
 export const cleatGrossShear: StrengthRule = {
@@ -21,7 +21,7 @@ export const cleatBending: StrengthRule = {
       symbol: 'V e',
       load: 'V',
       demand: step('M', times(V, cleatArm), bending),
-      resistance: bendingUnder(cleatArm, step('k Z', times(k, Z)), step('k Z_p', times(k, Zp)), inShear),
+      resistance: bendingUnder(cleatArm, step('ΣZ', times(k, Z)), step('ΣZ_p', times(k, Zp)), inShear),
     },
   ],
 };

@@ -12,7 +12,7 @@ const inShear = (resistance: Tree<Force>): StrengthRule => ({
 });
 
 /** Shear of the end plate beside the web, on both sides of it, IS 800:2007 cl. 8.4.1. */
-export const endPlateGrossShear: StrengthRule = inShear(step('2 V_d', times(2, Vd), source));
+export const endPlateGrossShear: StrengthRule = inShear(step('ΣV_d', times(2, Vd), source));
 
 /** Shear of the beam's web beside the weld, over the plate's depth. */
 export const endPlateWebShear: StrengthRule = inShear(step('V_d', yieldShear(times(hp, tw), fyw), source));

@@ -39,9 +39,9 @@ export const weldWeb: StrengthRule = {
     },
     {
       of: 'web',
-      symbol: 'k q_w',
+      symbol: 'Σq_w',
       load: 'V',
-      demand: step('k q_w', times(k, legWeldForce), source),
+      demand: step('Σq_w', times(k, legWeldForce), source),
       resistance: step('q_y', over(times(fyw, tw), times(root(3), gm0)), yields, 'yield in shear'),
       off: [endPlate],
       source: yields,

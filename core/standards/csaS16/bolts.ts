@@ -56,7 +56,7 @@ const onePlane = inOnePlane({ d, Fub, threadsIn: flag('threads in the shear plan
 /** One bolt through the web, N: in one plane, in two between a pair of cleats. */
 const throughWeb = (length: Tree<Length>): Tree<Force> => {
   const one = onePlane(length);
-  return pick([[pairOfCleats.when, step('V_r', times(k, one), shear, 'two planes')]], one);
+  return pick([[pairOfCleats.when, step('k V_r', times(k, one), shear, 'two planes')]], one);
 };
 
 /** Along the rows under V, along the columns under a tie force. */

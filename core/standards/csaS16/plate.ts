@@ -41,7 +41,7 @@ export const endPlateGrossShear: StrengthRule = {
 /** Two planes of the support's web, beside plate or cleats. */
 export const supportShear: StrengthRule = ofSupport(
   gross,
-  step('V_r', times(2, 0.66, phi, Fys, ts, hp), gross, 'both sides of plate or cleats'),
+  step('V_r', times(2, 0.66, phi, Fys, ts, hp), gross, 'both sides of the joint'),
 );
 
 /** First yield of the plate in bending under V at the centroid of the bolts. */

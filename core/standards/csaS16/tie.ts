@@ -44,7 +44,7 @@ const plateBlock = block(platePulled, Fmp, Fup);
 const rows = rowByRow(platePulled, Fmp);
 const net = netTension(tp, hp, Fup);
 const gross = grossTension(tp, hp, Fyp);
-const eachCleat = (one: Tree<Force>): Tree<Force> => step('T_r', times(k, one), source, 'each cleat');
+const eachCleat = (one: Tree<Force>): Tree<Force> => step('T_r', times(k, one), source, 'each angle');
 
 /**
  * Tie force along the beam, acting alone: bolts in shear shared evenly, bearing, a block or each row pulled out to the end, net and gross

@@ -61,7 +61,7 @@ const onePlane = inOnePlane({ d, fub, n, p, threadsIn: flag('threads in the shea
 
 /** One bolt through the web, N: in one plane, in two between a pair of cleats. */
 export const boltResistance: Tree<Force> = pick(
-  [[pairOfCleats.when, step('V_r', times(k, onePlane), shear, 'two planes')]],
+  [[pairOfCleats.when, step('k V_r', times(k, onePlane), shear, 'two planes')]],
   onePlane,
 );
 

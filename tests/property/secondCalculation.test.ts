@@ -2,7 +2,8 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { checkEnd } from '../../core/check/checkEnd.ts';
 import type { Check, Report } from '../../core/check/report.ts';
-import { type Answer, type SecondEnd, secondCalculation } from '../support/secondCalculation.ts';
+import type { Answer } from '../support/secondAnswers.ts';
+import { type SecondEnd, secondCalculation } from '../support/secondCalculation.ts';
 
 /** Sizes of three sections as the published tables give them: the program knows supports by name only. */
 const supports = {

@@ -1,3 +1,8 @@
+import { type Answer, no, type Part, size, sizes, strength } from './secondAnswers.ts';
+import { centreCoefficient, edges, sockets } from './secondBolts.ts';
+import { cutOf, limitingStress, type OwnSection, type Sizes } from './secondSections.ts';
+import { sum } from './sum.ts';
+
 /**
  * A second calculation of a fin-plate or web-bolts end to SANS 10162-1, written from the rules and not from the program: plain arithmetic on
  * given sizes and strengths, sections as thin strips, nothing of `core`. Reactions in kN; everything else, and every answer, in N, mm, MPa.
@@ -27,159 +32,8 @@ export interface SecondEnd {
   readonly support?: OwnSection & Sizes<'topOfSteel'>;
   readonly options: Readonly<Record<string, string>>;
 }
-type Sizes<Name extends string> = Readonly<Record<Name, number>>;
-type OwnSection = Sizes<'depth' | 'width' | 'flange' | 'web' | 'radius'> & { readonly family: 'I' | 'channel' };
 type Strengths = Sizes<'fy' | 'fu'>;
 type Cope = Sizes<'length' | 'depth'> & { readonly radius?: number };
-
-/** For sizes `demand` is what is required and `resistance` what is given. Absent where there is no number. */
-export interface Answer {
-  readonly state: 'holds' | 'fails' | 'refer' | 'notApplicable' | 'information';
-  readonly reason?: string | undefined;
-  readonly demand?: number | undefined;
-  readonly resistance?: number | undefined;
-  readonly reactionAtFailure?: number | undefined;
-  readonly utilisation?: number | undefined;
-  /** Parts that are used up at the same reaction, or share the nearest bound: the numbers may be those of any. */
-  readonly level?: readonly Answer[];
-}
-
-const no = (reason: string): Answer => ({ state: 'notApplicable', reason });
-const rank = ({ state }: Answer): number => ['holds', 'refer', 'fails'].indexOf(state);
-const worst = (parts: readonly Answer[]): Answer => parts.reduce((a, b) => (rank(b) > rank(a) ? b : a));
-const sum = (list: readonly number[]): number => list.reduce((a, b) => a + b, 0);
-
-/** One section, leg or direction: demand for each newton of reaction, resistance, and the limits it may lie outside of. */
-interface Part {
-  readonly per: number;
-  readonly resistance: number;
-  /** Refers where the number holds. */
-  readonly limit?: string | false | undefined;
-  /** Refers whatever the number. */
-  readonly always?: string | false | undefined;
-}
-
-const partAt = (V: number, { per, resistance, limit, always }: Part): Answer => {
-  if (Number.isNaN(resistance)) return { state: 'refer', reason: always || '' };
-  if (resistance <= 0) return { state: 'fails', reason: 'nothing-left', resistance, reactionAtFailure: 0 };
-  const reactionAtFailure = resistance / per;
-  const numbers = { demand: per * V, resistance, reactionAtFailure, utilisation: V / reactionAtFailure };
-  if (always) return { state: 'refer', reason: always, ...numbers };
-  if (V > reactionAtFailure) return { state: 'fails', ...numbers };
-  return limit ? { state: 'refer', reason: limit, ...numbers } : { state: 'holds', ...numbers };
-};
-
-/** The worst state of the parts with the numbers of the part used up first. */
-const strength = (V: number, ...parts: readonly Part[]): Answer => {
-  const all = parts.map((one) => partAt(V, one));
-  const numbered = all.filter((one) => one.reactionAtFailure !== undefined);
-  const least = Math.min(...numbered.map((one) => one.reactionAtFailure!));
-  const level = numbered.filter((one) => one.reactionAtFailure! <= least * (1 + 1e-9));
-  const { state, reason } = worst(all);
-  return { ...level[0], state, reason, level };
-};
-
-/** A size against its bounds; `breach` is what breaking one means. */
-const size = (breach: 'fails' | 'refer', given: number, least: number, most = Number.POSITIVE_INFINITY): Answer => {
-  const used = given > 0 ? least / given : least > 0 ? Number.POSITIVE_INFINITY : 0;
-  const low = used >= given / most;
-  const utilisation = low ? used : given / most;
-  const broken = utilisation > 1 + 1e-9;
-  const reason = broken ? (low ? 'too-little' : 'too-much') : undefined;
-  return { state: broken ? breach : 'holds', reason, demand: low ? least : most, resistance: given, utilisation };
-};
-const sizes = (...parts: readonly Answer[]): Answer => {
-  const same = parts.filter((one) => rank(one) === rank(worst(parts)));
-  const most = Math.max(...same.map((one) => one.utilisation!));
-  const level = same.filter((one) => one.utilisation! >= most * (1 - 1e-9));
-  return { ...level[0]!, level };
-};
-
-const SLICES = 200;
-
-/** What a section is between two levels, mm down from top of steel, summed over strips. */
-const cutOf = (s: OwnSection, top: number, bottom: number) => {
-  const { depth: h, flange: tf, radius: r, web: tw } = s;
-  const list = [
-    { from: 0, to: tf, width: s.width },
-    { from: tf, to: h - tf, width: tw },
-    { from: h - tf, to: h, width: s.width },
-  ];
-  const sides = s.family === 'channel' ? 1 : 2;
-  for (let i = 0; r > 0 && i < SLICES; i += 1) {
-    const angle = (at: number) => (at / SLICES) * (Math.PI / 2);
-    const [from, to] = [tf + r * (1 - Math.cos(angle(i))), tf + r * (1 - Math.cos(angle(i + 1)))];
-    const width = sides * r * (1 - Math.sin(angle(i + 0.5)));
-    list.push({ from, to, width }, { from: h - to, to: h - from, width });
-  }
-  const strips = list
-    .map(({ from, to, width }) => ({ from: Math.max(from, top), to: Math.min(to, bottom), width }))
-    .filter(({ from, to }) => to > from);
-  const A = sum(strips.map(({ from, to, width }) => width * (to - from)));
-  const y = sum(strips.map(({ from, to, width }) => (width * (to ** 2 - from ** 2)) / 2)) / A;
-  const I = sum(strips.map(({ from, to, width }) => (width * ((to - y) ** 3 - (from - y) ** 3)) / 3));
-  const stressAt = (level: number) => {
-    const above = strips.filter(({ from }) => from < level).map((one) => ({ ...one, to: Math.min(one.to, level) }));
-    const Q = sum(above.map(({ from, to, width }) => width * (to - from) * (y - (from + to) / 2)));
-    return Q / (I * sum(strips.map(({ from, to, width }) => (from <= level && level < to ? width : 0))));
-  };
-  // Largest at the neutral axis; where that lies in a flange or among fillets, somewhere in the fillets or at the flange.
-  const [webTop, webBottom] = [Math.max(top, tf), Math.min(bottom, h - tf)];
-  const levels =
-    y >= tf + r && y <= h - tf - r
-      ? [y]
-      : [webTop, y, webBottom - 1e-9, ...strips.map((one) => (one.from + one.to) / 2)];
-  const inWeb = levels.filter((level) => level >= webTop && level < webBottom);
-  const peak = Math.max(...(inWeb.length > 0 ? inWeb : [y]).map(stressAt));
-  return { depth: bottom - top, Wtop: I / (y - top), Wbottom: I / (bottom - y), peak };
-};
-
-/** Limiting shear stress of an unstiffened web, MPa, and whether the first limit is passed. */
-const limitingStress = (slenderness: number, fy: number) => {
-  const x = slenderness / Math.sqrt(5.34 / fy);
-  const beyond = x <= 620 ? (290 * Math.sqrt(5.34 * fy)) / slenderness : (180_000 * 5.34) / slenderness ** 2;
-  return { fs: x <= 440 ? 0.66 * fy : beyond, slender: x > 440 };
-};
-
-/** Load at arm z over the force on the farthest bolt: instantaneous centre, halved to the end of the digits. */
-const centreCoefficient = (bolts: readonly (readonly [number, number])[], z: number): number => {
-  const at = (r0: number) => {
-    const arms = bolts.map(([x, y]) => Math.hypot(x + r0, y));
-    const R = arms.map((arm) => (1 - Math.exp((-0.394 * 8.64 * arm) / Math.max(...arms))) ** 0.55);
-    const up = sum(bolts.map(([x], i) => (arms[i]! > 0 ? (R[i]! * (x + r0)) / arms[i]! : 0)));
-    return { up, spare: (z + r0) * up - sum(R.map((one, i) => one * arms[i]!)) };
-  };
-  let [near, far] = [1e-6, 1e7];
-  for (let turn = 0; turn < 60; turn += 1) {
-    const middle = Math.sqrt(near * far);
-    if (at(middle).spare < 0) near = middle;
-    else far = middle;
-  }
-  return at(far).up;
-};
-
-/** Least edge distances, mm: bolts up to this diameter, sheared edge, cut edge. */
-const edges: readonly (readonly [d: number, sheared: number, cut: number])[] = [
-  [16, 28, 22],
-  [20, 34, 26],
-  [22, 38, 28],
-  [24, 42, 30],
-  [27, 48, 34],
-  [30, 52, 38],
-  [36, 64, 46],
-];
-
-/** Bolts, mm: outside of the socket, width of the wide nut across its flats. */
-const sockets: readonly (readonly [d: number, socket: number, flats: number])[] = [
-  [12, 30, 22],
-  [16, 38, 27],
-  [20, 46, 32],
-  [22, 50, 36],
-  [24, 54, 41],
-  [27, 61, 46],
-  [30, 68, 50],
-  [36, 82, 60],
-];
 
 /** Every check of the end, by name. */
 export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answer>> => {

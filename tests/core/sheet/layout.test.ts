@@ -1,53 +1,12 @@
 import fc from 'fast-check';
 import { beforeAll, describe, expect, it } from 'vitest';
-import { type Examined, examine } from '../../../core/check/examine.ts';
-import type { Check } from '../../../core/check/report.ts';
-import { closingLines } from '../../../core/sheet/closing.ts';
-import { numbersOf } from '../../../core/sheet/numbers.ts';
+import { examine } from '../../../core/check/examine.ts';
 import { sheetPages, sheetPdf } from '../../../core/sheet/sheet.ts';
-import { blockHeight } from '../../../core/sheet/titleBlock.ts';
-import { wordsFor } from '../../../core/words/wordsFor.ts';
 import { endOf, plausibleEnd } from '../../support/arbitraryEnd.ts';
 import { end, examined, fullest, withSheet } from './ends.ts';
-import { boxOf, type FoundBox, type FoundText, pathsOf, textsOf, wholeText } from './readPdf.ts';
+import { A4, covering, EDGE, LETTER, outside, pagesOf, windowOf } from './onPage.ts';
+import { type FoundText, pathsOf, textsOf, wholeText } from './readPdf.ts';
 import { onPaper, pairs } from './twoStandards.ts';
-
-const A4 = { width: 210, height: 297 };
-const LETTER = { width: 215.9, height: 279.4 };
-/** Filing edge 20 mm; 180 mm wide; 10 mm above and below. */
-const windowOf = ({ height }: { height: number }): FoundBox => ({ left: 20, right: 200, top: 10, bottom: height - 10 });
-
-/** Text and marks may touch the edge of the window, not cross it; coordinates are whole fortieths of a mm. */
-const EDGE = 0.4;
-const outside = (texts: readonly FoundText[], window: FoundBox): string[] =>
-  texts
-    .filter((one) => {
-      const { left, right, top, bottom } = boxOf(one);
-      return (
-        left < window.left - EDGE ||
-        right > window.right + EDGE ||
-        top < window.top - EDGE ||
-        bottom > window.bottom + EDGE
-      );
-    })
-    .map(({ text }) => text);
-
-/** Pairs of texts that cover each other by more than a hair. */
-const covering = (texts: readonly FoundText[]): string[] => {
-  const boxes = texts.map((one) => ({ ...boxOf(one), text: one.text }));
-  const found: string[] = [];
-  boxes.forEach((a, i) => {
-    for (const b of boxes.slice(i + 1)) {
-      const wide = Math.min(a.right, b.right) - Math.max(a.left, b.left);
-      const high = Math.min(a.bottom, b.bottom) - Math.max(a.top, b.top);
-      if (wide > 0.1 && high > 0.1) found.push(`${a.text} | ${b.text}`);
-    }
-  });
-  return found;
-};
-
-const pagesOf = async (input: Examined, workings: 'governing' | 'all' = 'governing') =>
-  textsOf(await sheetPdf(input, { workings }));
 
 const ends: readonly (readonly [name: string, input: object])[] = [
   ['holds', end],
@@ -159,115 +118,6 @@ describe('the figure', () => {
     const letter = await pagesOf(examined(withSheet({ ...end.sheet, paper: 'Letter' })));
     expect(letter.length).toBe(1);
     expect(wholeText(letter[0]!)).toMatch(/scale 1:(5|10);/);
-  });
-});
-
-describe('what is too much for one page', () => {
-  const longest = {
-    ...end,
-    mark: 'WWWWWWWWWW-MMMMMMMMMM-XXXXXXXXXX-YYYYYYY',
-    piece: 'P'.repeat(40),
-    end: 'far',
-    quantity: 99999,
-    support: { kind: 'beam-web', section: 'UB 610x229x125', topOfSteel: 0 },
-    sheet: {
-      job: 'W'.repeat(200),
-      drawing: 'D'.repeat(200),
-      number: 'N'.repeat(200),
-      revision: 'R2345678',
-      reason: `because ${'reason '.repeat(27)}`.slice(0, 200),
-      loadCase: 'L'.repeat(200),
-      date: '2031-12-31',
-      prepared: 'P'.repeat(200),
-      checked: 'C'.repeat(200),
-      approved: `${'Name '.repeat(40)}`.trim(),
-    },
-  };
-
-  it('the longest names do not leave their places', async () => {
-    for (const paper of ['A4', 'Letter'] as const) {
-      const pages = await pagesOf(examined({ ...longest, sheet: { ...longest.sheet, paper } }));
-      for (const page of pages) {
-        expect(outside(page, windowOf(paper === 'A4' ? A4 : LETTER))).toEqual([]);
-        expect(covering(page)).toEqual([]);
-      }
-      expect(wholeText(pages[0]!)).toContain('…');
-    }
-  });
-
-  /** A report with so many rows as no joint of ours has yet: the checks of the fullest end with longer names and reasons. */
-  const withRows = (count: number): Examined => {
-    const whole = examined(fullest);
-    const { checks } = whole.report;
-    const model = checks.filter(({ id, state }) => state === 'holds' && !id.startsWith('fit-'));
-    const rows = Array.from({ length: count }, (_, i): Check => {
-      const one = model[i % model.length]!;
-      return {
-        ...one,
-        title: `${one.title} of a part with a name that is long`,
-        state: i % 5 === 4 ? 'refer' : 'holds',
-        reasonText: 'a reason that fills its line',
-        verified: 'none',
-      };
-    });
-    const others = checks.filter(({ id, state }) => id.startsWith('fit-') || state !== 'holds');
-    return { ...whole, report: { ...whole.report, checks: [...rows, ...others] } };
-  };
-
-  it.each([24, 40, 90])('%i rows go on further sheets in the same type, and none is lost', async (count) => {
-    const pages = await pagesOf(withRows(count));
-    pages.forEach((page, i) => {
-      expect(outside(page, windowOf(A4))).toEqual([]);
-      expect(covering(page)).toEqual([]);
-      expect(wholeText(page)).toContain(`${i + 1} of ${pages.length}`);
-    });
-    const bases = pages.flat().filter(({ text }) => ['memory', 'practice', 'research', 'seen'].includes(text));
-    expect(bases.filter(({ size }) => Math.abs(size - 8) < 0.05).length).toBe(count);
-    expect(wholeText(pages[0]!)).toContain('on sheet 2');
-  });
-
-  it('numbers of six digits take no room of their neighbours: the columns are as wide as they', async () => {
-    const whole = examined(fullest);
-    const checks = whole.report.checks.map((one) => ({
-      ...one,
-      demand: one.demand === null ? null : 1000 * one.demand,
-      resistance: one.resistance === null ? null : 1000 * one.resistance,
-    }));
-    const pages = await pagesOf({ ...whole, report: { ...whole.report, checks } });
-    expect(wholeText(pages[0]!)).toMatch(/\d{3}\s\d{3}\.\d/);
-    for (const page of pages) expect(covering(page)).toEqual([]);
-  });
-
-  it('cautions of several lines are set in full, above what else stands at the foot', async () => {
-    const whole = examined({ ...fullest, sheet: { paper: 'Letter' } });
-    const pen = await sheetPages(whole, { workings: 'all' });
-    const under = { pen, input: whole, numbers: numbersOf('mm-kN', '.'), words: wordsFor(whole.report.words) };
-    const context = { ...under, second: null, fault: '' };
-    const long = {
-      ...context,
-      words: { ...context.words, cautions: Array.from({ length: 9 }, () => 'Ask the designer first.') },
-    };
-    const block = { code: null, lost: true };
-    const lines = closingLines(long, 180, true);
-    expect(lines.length).toBeGreaterThan(1);
-    expect(lines.map((line) => line.map(({ text }) => text).join('')).join(' ')).toBe(
-      `${'Ask the designer first. '.repeat(9)}No square code: the file has the data.`,
-    );
-    // 3.65 mm for each line more than one.
-    const more = blockHeight(long, block) - blockHeight(context, { code: null, lost: false });
-    expect(more).toBeCloseTo(3.65 * (lines.length - 1), 6);
-  });
-
-  it('a formula that no number from outside has confirmed is marked, and the mark explained', async () => {
-    const text = wholeText((await pagesOf(withRows(6)))[0]!);
-    expect(text).toContain('*');
-    expect(text).toContain('* not yet compared with numbers from outside the program.');
-    const checked = examined(end);
-    const all = {
-      ...checked.report,
-      checks: checked.report.checks.map((one) => ({ ...one, verified: 'hand' as const })),
-    };
-    expect(wholeText((await pagesOf({ ...checked, report: all }))[0]!)).not.toContain('*');
   });
 });
 

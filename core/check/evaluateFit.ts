@@ -48,7 +48,7 @@ export const evaluateFit = (plan: FitPlan, cells: Float64Array): Result => {
       continue;
     }
     evaluateFitPart(part, cells, trial);
-    const worse = severity[trial.state] - severity[result.state];
+    const worse = trial.state === result.state ? 0 : severity[trial.state] - severity[result.state];
     if (result.way < 0 || worse > 0 || (worse === 0 && trial.utilisation > result.utilisation)) {
       result.way = at;
       result.state = trial.state;

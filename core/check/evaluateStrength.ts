@@ -122,7 +122,7 @@ const take = (result: Result, found: Result, at: number): void => {
     return;
   }
   const first = none || sooner(found, result);
-  const worse = severity[found.state] - severity[result.state];
+  const worse = none || found.state === result.state ? 0 : severity[found.state] - severity[result.state];
   if (none || worse > 0 || (worse === 0 && first)) {
     result.state = found.state;
     result.reason = found.reason;

@@ -20,6 +20,9 @@ export interface Place {
   readonly always: readonly (number | undefined)[];
 }
 
+/** Numbers that a gate takes in a row. */
+const GATE = 3;
+
 interface Asked {
   readonly gates: readonly { readonly when: Node; readonly closes: boolean }[];
   readonly of: readonly (Node | undefined)[];
@@ -36,16 +39,18 @@ class Writer {
   private readonly solverOf = new Map<Node, { readonly at: number; readonly cell: number }>();
   private readonly code: number[] = [];
   private readonly solvers: Solver[] = [];
+  /** Of each gate: the cell of its condition, its number, where to go on if it is met. */
+  private readonly rows: number[] = [];
   private cells = 0;
 
   write(groups: readonly Group[]): { readonly program: Program; readonly places: readonly Place[] } {
     const asked = groups.map(({ gates, of, always }) => ({
       always: always.map((one) => one && this.ask(one)),
-      gates: gates.map(({ when, closes }) => ({ when: this.ask(when), closes })),
+      gates: gates.map(({ when, closes }) => ({ when: this.askGate(when), closes })),
       of: of.map((one) => one && this.ask(one)),
     }));
-    const most = Math.max(1, ...groups.map(({ gates }) => gates.length));
-    for (let at = -1; at <= most; at += 1) this.nodes.literal(at);
+    this.nodes.literal(0);
+    this.nodes.literal(1);
     const leaves = (op: Node['op']): Node[] => {
       const found = this.nodes.all.filter((one) => one.op === op);
       for (const one of found) this.cellOf.set(one, this.newCell());
@@ -61,12 +66,26 @@ class Writer {
     cells.set(constants);
     const { solvers } = this;
     const solvedAt = new Int32Array(solvers.length);
-    const code = Int32Array.from(this.code);
+    const code = this.codeWithRows();
     return { places, program: { code, cells, reads, flags, firstFact: constants.length, solvers, solvedAt } };
+  }
+
+  /** Rows of gates stand behind the instructions. */
+  private codeWithRows(): Int32Array {
+    const { code, rows } = this;
+    for (let at = 0; at < code.length; at += 4) if (code[at] === does.gates) code[at + 2]! += code.length;
+    return Int32Array.from([...code, ...rows]);
   }
 
   private ask(one: Tree | Condition): Node {
     const node = this.nodes.of(one);
+    node.uses += 1;
+    return node;
+  }
+
+  /** A gate is looked at in a row with others, so its condition is settled at the head. */
+  private askGate(when: Condition): Node {
+    const node = this.ask(when);
     node.uses += 1;
     return node;
   }
@@ -80,9 +99,9 @@ class Writer {
     return this.code.push(what, to, a, b) - 4;
   }
 
-  /** Lets jumps written before go on from here. */
-  private land(jumps: readonly number[]): void {
-    for (const at of jumps) this.code[at + 1] = this.code.length;
+  /** Lets a jump written before go on from here. */
+  private land(jump: number): void {
+    this.code[jump + 1] = this.code.length;
   }
 
   private literal(value: number): number {
@@ -101,19 +120,26 @@ class Writer {
   private group({ gates, of, always }: Asked): Place {
     const free = always.map((one) => one && this.value(one));
     const gate = this.newCell();
-    const closed: number[] = [];
-    const open: number[] = [];
+    const ends: { readonly row: number; readonly closes: boolean }[] = [];
+    let first = 0;
     gates.forEach(({ when, closes }, at) => {
-      const past = this.go(when, false);
-      this.put(does.copy, gate, this.literal(at));
-      (closes ? closed : open).push(this.put(does.go, 0));
-      this.land(past);
+      // What leans on a solver is looked at only where no gate before it is met.
+      if (when.solved) {
+        this.putGates(gate, at - first);
+        first = at;
+      }
+      ends.push({ row: this.rows.push(this.value(when), at, 0) - 1, closes });
     });
-    this.put(does.copy, gate, this.literal(-1));
-    this.land(open);
+    this.putGates(gate, gates.length - first);
+    const open = this.code.length;
     const cells = of.map((one) => one && this.value(one));
-    this.land(closed);
+    for (const { row, closes } of ends) this.rows[row] = closes ? this.code.length : open;
     return { gate, of: cells, always: free };
+  }
+
+  /** Looks at the gates written down last. */
+  private putGates(gate: number, count: number): void {
+    this.put(does.gates, gate, this.rows.length - GATE * count, count);
   }
 
   /** The cell that holds a node's value from here on. */
@@ -142,31 +168,32 @@ class Writer {
           () => this.fillFrom(c, cell),
         );
         return;
-      case 'atMost':
-      case 'below':
-      case 'not':
       case 'all':
-      case 'any': {
-        const node = { op, of } as Node;
         this.choose(
-          node,
-          () => this.put(does.copy, cell, this.literal(1)),
+          a,
+          () => this.fillFrom(b, cell),
           () => this.put(does.copy, cell, this.literal(0)),
         );
         return;
-      }
+      case 'any':
+        this.choose(
+          a,
+          () => this.put(does.copy, cell, this.literal(1)),
+          () => this.fillFrom(b, cell),
+        );
+        return;
       default:
         this.put(does[op as 'times'], cell, this.value(a), b ? this.value(b) : 0);
     }
   }
 
   private choose(when: Node, then: () => void, otherwise: () => void): void {
-    const no = this.go(when, false);
+    const no = this.put(does.goUnless, 0, this.value(when));
     then();
     const end = this.put(does.go, 0);
     this.land(no);
     otherwise();
-    this.land([end]);
+    this.land(end);
   }
 
   /** A solver's values stand in the same cells wherever it is needed first. */
@@ -183,29 +210,6 @@ class Writer {
     });
     this.put(does.solve, found.cell, found.at);
     return found.cell;
-  }
-
-  /** Jumps to land, taken where the condition comes out as `met`. */
-  private go(when: Node, met: boolean): number[] {
-    const known = this.cellOf.get(when);
-    if (known !== undefined) return [this.put(met ? does.goIf : does.goUnless, 0, known)];
-    const [a, b] = when.of as [Node, Node];
-    switch (when.op) {
-      case 'atMost':
-        return [this.put(met ? does.goIfAtMost : does.goUnlessAtMost, 0, this.value(a), this.value(b))];
-      case 'below':
-        return [this.put(met ? does.goIfBelow : does.goUnlessBelow, 0, this.value(a), this.value(b))];
-      case 'not':
-        return this.go(a, !met);
-      default: {
-        const decisive = when.op === 'any';
-        if (met === decisive) return [...this.go(a, met), ...this.go(b, met)];
-        const past = this.go(a, decisive);
-        const out = this.go(b, met);
-        this.land(past);
-        return out;
-      }
-    }
   }
 }
 

@@ -33,15 +33,14 @@ export const does = {
   root: 7,
   square: 8,
   power: 9,
-  copy: 10,
-  go: 11,
-  goIf: 12,
-  goUnless: 13,
-  goIfAtMost: 14,
-  goUnlessAtMost: 15,
-  goIfBelow: 16,
-  goUnlessBelow: 17,
-  solve: 18,
+  atMost: 10,
+  below: 11,
+  not: 12,
+  copy: 13,
+  go: 14,
+  goUnless: 15,
+  solve: 16,
+  gates: 17,
 } as const;
 
 const solved = ({ solve, of }: Solver, cells: Float64Array, facts: never): number => {
@@ -111,53 +110,45 @@ export const run = (program: Program, facts: never): void => {
         cell[to] = cell[a]! ** cell[b]!;
         break;
       case 10:
-        cell[to] = cell[a]!;
+        cell[to] = cell[a]! <= cell[b]! ? 1 : 0;
         break;
       case 11:
-        at = to;
-        continue;
+        cell[to] = cell[a]! < cell[b]! ? 1 : 0;
+        break;
       case 12:
-        if (cell[a] !== 0) {
-          at = to;
-          continue;
-        }
+        cell[to] = cell[a] === 0 ? 1 : 0;
         break;
       case 13:
+        cell[to] = cell[a]!;
+        break;
+      case 14:
+        at = to;
+        continue;
+      case 15:
         if (cell[a] === 0) {
           at = to;
           continue;
         }
         break;
-      case 14:
-        if (cell[a]! <= cell[b]!) {
-          at = to;
-          continue;
-        }
-        break;
-      case 15:
-        if (!(cell[a]! <= cell[b]!)) {
-          at = to;
-          continue;
-        }
-        break;
       case 16:
-        if (cell[a]! < cell[b]!) {
-          at = to;
-          continue;
-        }
-        break;
-      case 17:
-        if (!(cell[a]! < cell[b]!)) {
-          at = to;
-          continue;
-        }
-        break;
-      case 18:
         if (solvedAt[a] !== runs) {
           cell[to] = solved(solvers[a]!, cell, facts);
           solvedAt[a] = runs;
         }
         break;
+      case 17: {
+        // From `a` on, `b` gates: the condition's cell, the gate's number, where to go on if it is met.
+        let gate = a;
+        const end = a + 3 * b;
+        while (gate < end && cell[code[gate]!] === 0) gate += 3;
+        if (gate < end) {
+          cell[to] = code[gate + 1]!;
+          at = code[gate + 2]!;
+          continue;
+        }
+        cell[to] = -1;
+        break;
+      }
     }
     at += 4;
   }

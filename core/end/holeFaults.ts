@@ -90,10 +90,22 @@ export const holeFaults = (end: End, f: Facts): Fault[] => [
   ...besideSupport(end, f),
 ];
 
-/** A plate or cleat that reaches above or below the beam. */
+/** A leg that does not reach the web, or a weld along it that reaches past the beam's end. */
+const legFaults = (end: End, f: Facts): Fault[] => {
+  if (f.legWeb === 0 || f.weldTo !== 'web') return [];
+  const file = inFile(end);
+  const onWeb = f.legWeb - f.g;
+  if (onWeb <= NOISE) return [fault('leg-off-web', 'joint.cleat.legWeb', file(f.legWeb), { above: file(f.g) })];
+  if (f.weldReturn <= onWeb + NOISE) return [];
+  return [fault('return-too-long', 'joint.cleat.webWeld.return', file(f.weldReturn), { most: file(onWeb) })];
+};
+
+/** A plate or cleat that reaches below the beam, or past its web. */
 export const fittingFaults = (end: End, f: Facts): Fault[] => {
   const file = inFile(end);
   const { path } = fittingOf(end.joint);
+  const ofLeg = legFaults(end, f);
+  if (ofLeg.length > 0) return ofLeg;
   if (f.kind === 'full-end-plate' || f.n > 0) return [];
   if (f.yp + f.hp <= f.h + NOISE) return [];
   return [fault('fitting-below-beam', `${path}.depth`, file(f.hp), { most: file(f.h - f.yp) })];

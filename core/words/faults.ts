@@ -45,6 +45,8 @@ export const faultSentences: Readonly<Record<string, string>> = {
   'hole-outside-plate': '{field} of {given} puts a hole over the edge of the plate; it must be {limit}.',
   'one-of-two': '{field} cannot stand beside {limit}: a leg is bolted or welded.',
   'both-legs-welded': 'A cleat with both legs welded leaves the end no way to turn; bolt one of them.',
+  'leg-off-web': '{field} of {given} does not reach the web; it must be {limit}.',
+  'return-too-long': '{field} of {given} is longer than the leg on the web; it must be {limit}.',
   'fitting-below-beam': '{field} of {given} reaches below the beam; it must be {limit}.',
   'rows-overlap': 'A pitch of {given} lets the holes of two rows run together; it must be {limit}.',
   'columns-overlap': 'A gauge of {given} lets the holes of two columns run together; it must be {limit}.',

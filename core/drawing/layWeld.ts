@@ -10,6 +10,9 @@ const FORK = 0.45;
 const LIFT = 0.25;
 const OTHER_SIDE = 0.22;
 
+/** Dislike of places far above or below, for where the near ones are taken. */
+const CROWDED = 15;
+
 interface Spot {
   readonly target: Point;
   readonly knee: Point;
@@ -37,6 +40,10 @@ const spots = function* ({ em }: Pad, weld: WeldMark): Generator<Spot & { cost: 
       for (const down of i === 1 ? [-1.6, -2.6, -4] : [1.6, 2.4, 3.4, 5, -1.6]) {
         const knee = { x: target.x + out * away * em, y: target.y + down * em };
         yield { target, knee, cost: i * 3 + away + Math.abs(down) * 0.5 };
+      }
+      for (const down of [-7, -5, 7, 9]) {
+        const knee = { x: target.x + out * away * em, y: target.y + down * em };
+        yield { target, knee, cost: CROWDED + i * 3 + away + Math.abs(down) };
       }
     }
   }

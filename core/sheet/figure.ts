@@ -1,18 +1,28 @@
 import type { Point } from '../drawing/drawing.ts';
-import { layoutDrawing } from '../drawing/layout.ts';
+import { boxOfViews, layViews } from '../drawing/layViews.ts';
 import { fromSystem, type UnitSystem } from '../units/systems.ts';
 import type { Context, Zone } from './context.ts';
 import { drawMarks } from './figureMarks.ts';
 import { besideWidth, captionsOf, type FigureWords, LEADING, placeWords, style } from './figureWords.ts';
 import { NARROW, WIDE } from './page.ts';
 import type { Spot } from './pen.ts';
-import { leastAt, longerPiece, type PaperSize, type Piece, penAt, pieceOf, unlabelled } from './piece.ts';
+import {
+  leastAt,
+  longerPiece,
+  type PaperSize,
+  type Piece,
+  penAt,
+  pieceOf,
+  unlabelled,
+  type ViewsShown,
+  viewsOf,
+} from './piece.ts';
 import { type Code, drawCode } from './qr.ts';
 import { standardScales } from './scales.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { setLines } from './textBlock.ts';
 
-/** A piece drawn less deep than this cannot be read, mm. */
+/** A beam drawn less deep than this cannot be read, mm. */
 const LEAST_DEPTH = 26;
 
 /** The end to scale with its dimensions and the governing path, its caption and the scale bar. */
@@ -25,6 +35,8 @@ export interface Figure extends Zone {
 
 /** The figures of one end at the standard scales, each laid out at first use. */
 export interface Figures {
+  /** How many views of the end stand in each. */
+  readonly views: number;
   /** Scales at which the piece alone would fit and can still be read, the largest first. */
   readonly scales: readonly number[];
   /** What no figure at this scale goes below: known without laying one out. */
@@ -35,11 +47,24 @@ export interface Figures {
   readonly smallest: () => Figure;
 }
 
-/** `width` and `height`: room on the paper, mm; `code`: a square code that looks for room beside the piece. */
-export const figuresOf = (context: Context, width: number, height: number, code: Code | null): Figures => {
-  const usual = pieceOf(context);
-  const { box } = usual.drawing;
+/** Room on the paper, mm. */
+export interface FigureRoom {
+  readonly width: number;
+  readonly height: number;
+}
+
+/** `code`: a square code that looks for room beside the piece. */
+export const figuresOf = (
+  context: Context,
+  shown: ViewsShown,
+  { width, height }: FigureRoom,
+  code: Code | null,
+): Figures => {
+  const usual = pieceOf(context, shown);
+  const box = boxOfViews(viewsOf(usual));
   const [wide, high] = [box.right - box.left, box.bottom - box.top];
+  const { beam } = usual.drawing;
+  const deep = beam.bottom - beam.top;
   const first = standardScales.find((scale) => wide / scale <= width && high / scale <= height);
   const words: FigureWords = { captions: captionsOf(context, usual.path), code, room: width };
   const leasts = new Map<number, PaperSize>();
@@ -51,7 +76,7 @@ export const figuresOf = (context: Context, width: number, height: number, code:
   const laid = (scale: number, labelled: boolean): Figure => {
     if (!labelled) return figureAt(context, unlabelled(usual), words, scale);
     const free = width - besideWidth(code) - least(scale).width;
-    const longer = longerPiece(context, scale, free);
+    const longer = longerPiece(context, shown, scale, free);
     const figure = longer && figureAt(context, longer, words, scale);
     // Words beside the beam may still take the code's place; those that the data repeat give way to it.
     if (figure && (figure.coded || !code)) return figure;
@@ -65,18 +90,18 @@ export const figuresOf = (context: Context, width: number, height: number, code:
     made.set(key, known);
     return known;
   };
-  const scales = standardScales.filter((scale) => scale === first || (scale > first! && high / scale >= LEAST_DEPTH));
+  const scales = standardScales.filter((scale) => scale === first || (scale > first! && deep / scale >= LEAST_DEPTH));
   const smallest = (): Figure => {
     const fits = standardScales.find((scale) => scale >= scales.at(-1)! && at(scale, false).width <= width);
     return at(fits ?? standardScales.at(-1)!, false);
   };
-  return { scales, least, at, smallest };
+  return { views: viewsOf(usual).length, scales, least, at, smallest };
 };
 
-const figureAt = (context: Context, { drawing, path }: Piece, words: FigureWords, scale: number): Figure => {
+const figureAt = (context: Context, piece: Piece, words: FigureWords, scale: number): Figure => {
   const { pen } = context;
   const { code } = words;
-  const laid = layoutDrawing(drawing, penAt(context, scale), path);
+  const laid = layViews(viewsOf(piece), penAt(context, scale), piece.path);
   const { box, marks } = laid;
   const placed = placeWords(laid, words, scale);
   const draw = (x: number, y: number): void => {

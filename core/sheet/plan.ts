@@ -2,9 +2,11 @@ import { type Row, rowsOf, rowsWithin } from './checkRows.ts';
 import { tableZone } from './checkTable.ts';
 import type { Context, Zone } from './context.ts';
 import { type Figure, type Figures, figuresOf } from './figure.ts';
+import { type Choice, choices, type Showing } from './figureChoices.ts';
 import { footingZones } from './footing.ts';
 import { givenZone } from './given.ts';
 import { limitsZones } from './limitsZone.ts';
+import type { ViewsShown } from './piece.ts';
 import type { Code } from './qr.ts';
 import { figureTop } from './secondVerdict.ts';
 import { stressNumbers, stressProfiles } from './stressZone.ts';
@@ -63,20 +65,11 @@ interface Parts {
   readonly widths: Widths;
 }
 
-/** How the shear stress is shown: profiles, or numbers where these leave no room. */
-type Showing = 'profiles' | 'numbers';
-
 /** The largest that fits a height; the smallest where none does. */
 const stressWithin = ({ profiles, stressInNumbers }: Parts, showing: Showing, height: number): Zone => {
   if (showing === 'numbers') return stressInNumbers;
   return profiles.find((zone) => zone.height <= Math.min(height, STRESS_HEIGHT)) ?? profiles.at(-1)!;
 };
-
-interface Choice {
-  readonly showing: Showing;
-  readonly scale: number;
-  readonly labelled: boolean;
-}
 
 /** What stands below figure and data. */
 interface Below extends Texts {
@@ -126,16 +119,6 @@ const planned = (parts: Parts, { showing, scale, labelled }: Choice, below: Belo
   return fits(figure) ? laidOut(parts, figure, showing, below) : null;
 };
 
-/** Every choice: a large figure matters more than profiles, these more than words that the data repeat. */
-const choices = ({ figures }: Parts): Choice[] => {
-  const [large, small] = [figures.scales.slice(0, 2), figures.scales.slice(2)];
-  return [large, small].flatMap((scales) =>
-    (['profiles', 'numbers'] as const).flatMap((showing) =>
-      scales.flatMap((scale) => [true, false].map((labelled) => ({ showing, scale, labelled }))),
-    ),
-  );
-};
-
 /** What may stand below the figure, the fullest first: of text and working the text gives way first. */
 const belows = ({ rows, texts }: Parts, workings: readonly (Zone | null)[]): Below[] =>
   workings.flatMap((working) => texts.map((text) => ({ rows, working, ...text })));
@@ -143,7 +126,7 @@ const belows = ({ rows, texts }: Parts, workings: readonly (Zone | null)[]): Bel
 /** All on one sheet: the largest figure first, then the fullest text. */
 const onOneSheet = (parts: Parts, workings: readonly (Zone | null)[]): Plan | null => {
   const all = belows(parts, workings);
-  for (const choice of choices(parts)) {
+  for (const choice of choices(parts.figures)) {
     for (const below of all) {
       const plan = planned(parts, choice, below);
       if (plan) return plan;
@@ -178,10 +161,18 @@ const pairedOnOneSheet = (parts: Parts): Plan | null => {
   return onOneSheet(parts, workingsInLines(context)) ?? onOneSheet(parts, [workingWithAll(context)]);
 };
 
-/** Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on further sheets. */
+const wholeOn = (parts: Parts): Plan | null =>
+  onOneSheet(parts, workingZones(parts.context)) ?? pairedOnOneSheet(parts);
+
+/**
+ * Shares the first sheet out, with a square code beside the piece where there is room; text never gets smaller, what does not fit goes on
+ * further sheets. The view on the support gives way before that.
+ */
 export const planOf = (context: Context, blockTop: number, code: Code | null): Plan => {
   const room = blockTop - figureTop(context) - 0.6;
   const widths = widthsOf(context);
+  const figures = (shown: ViewsShown): Figures =>
+    figuresOf(context, shown, { width: widths.figure, height: room }, code);
   const parts: Parts = {
     context,
     rows: rowsOf(context),
@@ -189,9 +180,13 @@ export const planOf = (context: Context, blockTop: number, code: Code | null): P
     texts: textsOf(context),
     profiles: stressProfiles(context, widths.data, STRESS_SCALES),
     stressInNumbers: stressNumbers(context, widths.data),
-    figures: figuresOf(context, widths.figure, room, code),
+    figures: figures('all'),
     room,
     widths,
   };
-  return onOneSheet(parts, workingZones(context)) ?? pairedOnOneSheet(parts) ?? onMore(parts);
+  const plan = wholeOn(parts);
+  if (plan || parts.figures.views === 1) return plan ?? onMore(parts);
+  const side = { ...parts, figures: figures('side') };
+  const { scales, smallest } = parts.figures;
+  return wholeOn(side) ?? onMore(smallest().scale === scales.at(-1) ? parts : side);
 };

@@ -80,4 +80,24 @@ describe('the first view of the bench', () => {
       expect([part, holds(part)]).toEqual([part, false]);
     }
   });
+
+  test('leaves nothing that checks ends of its own without what reads them', () => {
+    const checking = /core\/(?:check\/examine|card\/cellOf|advice\/\w+)\.ts$/;
+    const parts = [...files.values()].filter((file) => file.type === 'chunk' && file.isDynamicEntry);
+    const modulesOf = (part: File): string[] =>
+      [...withImports([part.fileName])].flatMap((name) => {
+        const file = files.get(name);
+        return file?.type === 'chunk' ? file.moduleIds : [];
+      });
+    const [readers, others] = [true, false].map((reads) =>
+      parts.filter((part) => {
+        const modules = modulesOf(part);
+        return (
+          modules.some((id) => checking.test(id)) && modules.some((id) => id.endsWith('web/state/reader.ts')) === reads
+        );
+      }),
+    );
+    expect(others!.map(({ fileName }) => fileName)).toEqual([]);
+    expect(readers!.length).toBeGreaterThan(2);
+  });
 });

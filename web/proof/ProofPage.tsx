@@ -11,6 +11,7 @@ import { fixed, significant } from '../../core/units/figures.ts';
 import { wordsFor } from '../../core/words/wordsFor.ts';
 import { RichText } from '../ladder/RichText.tsx';
 import { PageHead } from '../shell/PageHead.tsx';
+import '../state/reader.ts';
 import { titled } from '../state/rules.ts';
 import { examples } from './examples.ts';
 

@@ -14,6 +14,7 @@ describe('words of the drawing', () => {
       cope: 'notch',
       gauge: 'gauge',
       plate: 'fin plate',
+      weldSymbols: 'iso',
     });
   });
 

@@ -7,7 +7,8 @@ import { shown, stale } from '../ladder/shown.ts';
 import { focused } from '../state/bench.ts';
 import { DrawnLines, DrawnWords } from './Drawn.tsx';
 import { DrawnFields } from './DrawnFields.tsx';
-import { type Figure, figure, path } from './figure.ts';
+import { type Figure, figure, path, topOf } from './figure.ts';
+import { BETWEEN, type LaidView, TITLE } from './fitRoom.ts';
 import { measureRoom } from './measureRoom.ts';
 import { type Penned, penned, type ToScreen, toScreen } from './pen.ts';
 
@@ -35,12 +36,40 @@ const isField = (word: LaidText): word is LaidText & { readonly path: string } =
 /** A reaction given as a share of the web's shear is no field of kN. */
 const isShare = (name: string): boolean => name === 'reaction' && typeof shown.value?.end.reaction !== 'number';
 
+/** The views, each with its title where there are several. */
 const Drawn = ({ it }: { it: Figure }) => {
-  const { laid, scale, shrink, fields } = it;
+  const { views, standing, scale, shrink } = it;
+  if (views.length === 1) return <DrawnView it={it} of={views[0]!} />;
+  const top = standing === 'beside' ? topOf(it) : null;
+  return (
+    <div class={`piece-views ${standing}`} style={{ gap: `${BETWEEN}px` }}>
+      {views.map((one) => (
+        <div key={one.view.name}>
+          <p class="piece-title" style={{ height: `${TITLE}px` }}>
+            {one.view.title.map(({ text }) => text)}
+          </p>
+          <div style={{ paddingTop: top === null ? 0 : `${px((one.laid.box.top - top) * scale * shrink)}px` }}>
+            <DrawnView it={it} of={one} />
+          </div>
+        </div>
+      ))}
+    </div>
+  );
+};
+
+/** How each view is called for those who cannot see it. */
+const names = {
+  side: 'The beam end, drawn to scale',
+  support: 'What lies on the support, drawn to scale',
+} as const;
+
+const DrawnView = ({ it, of }: { it: Figure; of: LaidView }) => {
+  const { scale, shrink, fields } = it;
+  const { view, laid } = of;
   const place = toScreen(laid, scale);
   const { lines, words } = penned(laid, scale, focused.value);
   const [width, height] = [(laid.box.right - laid.box.left) * scale, (laid.box.bottom - laid.box.top) * scale];
-  const over = pathOver(it);
+  const over = pathOver(of, scale);
   const sizes = fields ? words.filter(isField) : [];
   return (
     <div class="piece-sheet" style={{ width: `${px(width * shrink)}px`, height: `${px(height * shrink)}px` }}>
@@ -50,7 +79,7 @@ const Drawn = ({ it }: { it: Figure }) => {
         width={px(width * shrink)}
         height={px(height * shrink)}
         role="img"
-        aria-label="The beam end, drawn to scale"
+        aria-label={names[view.name]}
         aria-describedby="piece-sentences"
       >
         <DrawnLines lines={lines} />
@@ -83,7 +112,7 @@ const groundOf = (sizes: readonly LaidText[], place: ToScreen): string =>
     .join('');
 
 /** The path of the chosen rung; the box of the drawing without it governs, so that nothing moves when a rung is touched. */
-const pathOver = ({ laid, over, scale }: Figure): Penned | null =>
+const pathOver = ({ laid, over }: LaidView, scale: number): Penned | null =>
   over && penned({ ...over, box: laid.box }, scale, null, 'path');
 
 /** What the drawing shows, said in sentences. */

@@ -1,17 +1,16 @@
 import { computed, signal } from '@preact/signals';
 import { drawEnd } from '../../core/drawing/drawEnd.ts';
-import type { Drawing, FailurePath } from '../../core/drawing/drawing.ts';
-import type { Laid } from '../../core/drawing/laid.ts';
+import type { Drawing, FailurePath, View } from '../../core/drawing/drawing.ts';
+import { liesOnSupport } from '../../core/drawing/onSupport/liesOnSupport.ts';
 import type { DrawingWords } from '../../core/drawing/words.ts';
 import { chosenCheck, shown, words } from '../ladder/shown.ts';
 import { focused } from '../state/bench.ts';
 import { later } from '../state/later.ts';
 import { drawingWords } from './drawingWords.ts';
 import { type Fit, fitRoom, LARGEST, layAt, type Room, taken } from './fitRoom.ts';
-import { withoutPath } from './withoutPath.ts';
 
 /** Room that the page gives the drawing, px; 0 until it is measured. */
-export const room = signal({ width: 0, height: 0 });
+export const room = signal({ width: 0, height: 0, narrow: false });
 
 /** Columns narrower than this carry plain numbers: the order holds the fields there. */
 const FIELDS_FROM = 380;
@@ -25,8 +24,6 @@ export interface Figure extends Fit {
   readonly drawing: Drawing;
   /** Sizes are fields. */
   readonly fields: boolean;
-  /** The same with the path of the chosen check over it; null where none is chosen. */
-  readonly over: Laid | null;
 }
 
 /** What the drawing writes beside its sizes. */
@@ -38,6 +35,18 @@ const drawing = computed<Drawing | null>(() =>
   shown.value && spoken.value ? drawEnd(shown.value.facts, spoken.value) : null,
 );
 
+const drawOnSupport = later(async () => (await import('../../core/drawing/onSupport/drawOnSupport.ts')).drawOnSupport);
+
+/** Null too where nothing lies on the support: such an end does not ask for what draws the view. */
+const onSupport = computed<View | null>(() =>
+  shown.value && spoken.value && liesOnSupport(shown.value.facts)
+    ? (drawOnSupport.value?.(shown.value.facts, spoken.value) ?? null)
+    : null,
+);
+
+/** The views there are, the one from the side first. */
+export const views = computed<readonly View[]>(() => [drawing.value, onSupport.value].filter((view) => view !== null));
+
 const drawPath = later(async () => (await import('../../core/drawing/failurePath.ts')).failurePath);
 
 /** The path along which the chosen check fails; no part of the first view. */
@@ -47,39 +56,33 @@ export const path = computed<FailurePath | null>(() => {
   return drawPath.value?.(check.id, check.of ?? '', shown.value.facts, spoken.value) ?? null;
 });
 
-type Laying = Pick<Figure, 'laid' | 'over'>;
-
-const lay = (piece: Drawing, scale: number, within: Room, over: FailurePath | null): Laying => {
-  const laid = layAt(piece, scale, within, over);
-  return over ? { laid: withoutPath(laid), over: laid } : { laid, over: null };
-};
-
 /** The fit is kept from one keystroke to the next, so that fields do not wander while one types in them. */
-let kept: Pick<Fit, 'scale' | 'shrink'> | null = null;
+let kept: Fit | null = null;
 
-/** The drawing at the kept scale, where it still goes in and does not leave too much room. */
-const asBefore = (piece: Drawing, within: Room, over: FailurePath | null): (Fit & Laying) | null => {
-  if (kept === null) return null;
-  const { scale, shrink } = kept;
-  const laying = lay(piece, scale, within, over);
-  const share = taken(laying.laid, scale, within) * shrink;
+/** The views at the kept scale, where they still go in and do not leave too much room. */
+const asBefore = (all: readonly View[], within: Room, over: FailurePath | null): Fit | null => {
+  if (kept?.views.length !== all.length) return null;
+  const { scale, shrink, standing } = kept;
+  const laid = { views: layAt(all, scale, within, over), standing, scale };
+  const share = taken(laid, within) * shrink;
   const typing = focused.value !== null;
-  return share <= 1.001 && (typing || share >= LOOSE || scale >= LARGEST) ? { ...laying, scale, shrink } : null;
-};
-
-const fresh = (piece: Drawing, within: Room, over: FailurePath | null): Fit & Laying => {
-  const fit = fitRoom(piece, within);
-  return over ? { ...fit, ...lay(piece, fit.scale, within, over) } : { ...fit, over };
+  return share <= 1.001 && (typing || share >= LOOSE || scale >= LARGEST) ? { ...laid, shrink } : null;
 };
 
 /** The drawing in the room there is; null until both are known. */
 export const figure = computed<Figure | null>(() => {
-  const { width, height } = room.value;
+  const { width, height, narrow } = room.value;
   const piece = drawing.value;
   if (piece === null || width <= 0) return null;
   const fields = width >= FIELDS_FROM;
-  const within: Room = { width, height, textSize: fields ? TEXT.wide : TEXT.narrow };
-  const fit = asBefore(piece, within, path.value) ?? fresh(piece, within, path.value);
+  const within: Room = { width, height, narrow, textSize: fields ? TEXT.wide : TEXT.narrow };
+  const fit = asBefore(views.value, within, path.value) ?? fitRoom(views.value, within, path.value);
   kept = fit;
   return { drawing: piece, fields, ...fit };
 });
+
+/** Level at the upper edge of the views, mm: of the highest of those beside each other, or of the first. */
+export const topOf = ({ views: all, standing }: Fit): number => {
+  const tops = all.map(({ laid }) => laid.box.top);
+  return standing === 'beside' ? Math.min(...tops) : tops[0]!;
+};

@@ -8,15 +8,18 @@ const MOST = 760;
 const NARROW = 700;
 const TALL = 1.55;
 
-const heightFor = (width: number): number =>
-  window.innerWidth < NARROW ? Math.round(width * TALL) : Math.max(LEAST, Math.min(MOST, window.innerHeight - HEAD));
+const heightFor = (width: number, narrow: boolean): number =>
+  narrow ? Math.round(width * TALL) : Math.max(LEAST, Math.min(MOST, window.innerHeight - HEAD));
 
 /** Keeps the room of the drawing at what its frame and the window give; gives back what ends it. */
 export const measureRoom = (frame: HTMLElement): (() => void) => {
   const measure = (): void => {
     const width = Math.floor(frame.clientWidth);
-    const height = heightFor(width);
-    if (width !== room.value.width || height !== room.value.height) room.value = { width, height };
+    const narrow = window.innerWidth < NARROW;
+    const height = heightFor(width, narrow);
+    const before = room.value;
+    if (width !== before.width || height !== before.height || narrow !== before.narrow)
+      room.value = { width, height, narrow };
   };
   measure();
   const observer = new ResizeObserver(measure);

@@ -5,7 +5,8 @@ import { unitOf } from '../../core/units/systems.ts';
 import { Heading } from '../ladder/Heading.tsx';
 import { OpenWorking } from '../ladder/OpenWorking.tsx';
 import { shown, stale } from '../ladder/shown.ts';
-import { type Figure, figure, spoken } from '../piece/figure.ts';
+import { type Figure, figure, spoken, topOf } from '../piece/figure.ts';
+import { TITLE } from '../piece/fitRoom.ts';
 import { chosen } from '../state/bench.ts';
 import { ProfileDrawn } from './ProfileDrawn.tsx';
 import { ProfileCaption, ProfileName } from './ProfileWords.tsx';
@@ -14,6 +15,8 @@ import { GAP, isBeside, LEAST, LEFT, measureShared, profileWidth, shared } from 
 
 /** Room for a name over a profile, px. */
 const NAME = 24;
+
+const titleOver = ({ views }: Figure): number => (views.length > 1 ? TITLE : 0);
 
 const profiles = computed(() => (shown.value && spoken.value ? profilesOf(shown.value, spoken.value) : []));
 
@@ -61,7 +64,7 @@ const Profiles = ({ it, report }: { it: Figure; report: Numbers }) => {
   const scale = it.scale * it.shrink;
   const reach = reachOf(all);
   // Beside the piece the levels stand where they stand on the piece; below it the air over top of steel is left out.
-  const above = beside ? -it.laid.box.top * scale : NAME;
+  const above = beside ? titleOver(it) - topOf(it) * scale : NAME;
   const deepest = Math.max(...all.map(({ bottom }) => bottom));
   const y = (level: number): number => above + level * scale;
   const leftOf = (at: number): number => LEFT + at * (column + GAP);

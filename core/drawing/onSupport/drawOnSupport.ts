@@ -10,6 +10,7 @@ import type { DrawingWords } from '../words.ts';
 import { beamCut } from './beamCut.ts';
 import { seenEdges } from './behind.ts';
 import { fixedBox, sidesOf, supportLegBox, webLegBox } from './legs.ts';
+import { liesOnSupport } from './liesOnSupport.ts';
 import { onSupportDimensions } from './onSupportDimensions.ts';
 import { linesX, rowsY, supportCentreLines, supportHoles } from './supportBolts.ts';
 
@@ -18,7 +19,7 @@ import { linesX, rowsY, supportCentreLines, supportHoles } from './supportBolts.
  * the beam. Null where nothing lies on it: a plate on edge, a web bolted to a ply. On the levels of `drawEnd`.
  */
 export const drawOnSupport = (it: Facts, words: DrawingWords): View | null => {
-  if (it.bp === 0 && it.legSupport === 0) return null;
+  if (!liesOnSupport(it)) return null;
   const beam = beamCut(it);
   const fixed = fixedBox(it);
   const box = around([fixed, ...beam.boxes]);

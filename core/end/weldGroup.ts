@@ -1,5 +1,6 @@
-import { minus, over, plus, root, squared, step, times } from '../formula/tree.ts';
-import { hp, k, legSupport, legWeb, V, weldReturn } from './given.ts';
+import { minus, over, pick, plus, root, squared, step, times } from '../formula/tree.ts';
+import { pairOfCleats } from './gates.ts';
+import { hp, k, legSupport, legWeb, tw, V, weldReturn } from './given.ts';
 
 /** Length of the C-shaped weld of a cleat's web leg, mm: the line along its toe and the two returns. */
 export const legWeldLength = step(
@@ -46,11 +47,14 @@ export const legWeldForce = step(
   ),
 );
 
-/**
- * Force per length of the weld along the toe of one cleat's support leg, N/mm: elastic line of the cleat's depth, with its share of V at the
- * length of that leg.
- */
+/** Arm of V to the weld along the toe of a support leg, mm: a pair shares V at the faces of the web; one cleat alone has it in the web's middle. */
+export const supportLegArm = pick(
+  [[pairOfCleats.when, legSupport]],
+  step('e_s', plus(legSupport, over(tw, 2)), undefined, 'middle of the web to the weld'),
+);
+
+/** Force per length of the weld along the toe of one cleat's support leg, N/mm: elastic line of the cleat's depth, its share of V at that arm. */
 export const supportLegWeldForce = step(
   'q_w',
-  root(plus(squared(over(share, hp)), squared(over(times(6, share, legSupport), squared(hp))))),
+  root(plus(squared(over(share, hp)), squared(over(times(6, share, supportLegArm), squared(hp))))),
 );

@@ -1,7 +1,8 @@
 import { noSupportBolts, pairOfCleats } from '../../end/gates.ts';
-import { found, hp, legSupport, supportBolts, tp, tw, V } from '../../end/given.ts';
+import { found, hp, supportBolts, tp, V } from '../../end/given.ts';
 import { supportArm } from '../../end/supportGroup.ts';
-import { over, pick, plus, squared, step, times } from '../../formula/tree.ts';
+import { supportLegArm } from '../../end/weldGroup.ts';
+import { over, pick, squared, step, times } from '../../formula/tree.ts';
 import { netPlasticModulus } from '../../shape/netSection.ts';
 import type { StrengthRule } from '../standard.ts';
 import { clause, manual } from './clauses.ts';
@@ -12,10 +13,7 @@ const source = manual(10);
 const ruptured = clause('J4.5');
 
 /** From the middle of the web to what holds the leg on the support: its line of bolts, or the weld along its toe, mm. */
-export const cleatArm = pick(
-  [[noSupportBolts.when, step('e_s', plus(legSupport, over(tw, 2)), source, 'middle of the web to the weld')]],
-  supportArm,
-);
+export const cleatArm = pick([[noSupportBolts.when, supportLegArm]], supportArm);
 
 const plastic = step('M_n', over(times(Fyp, tp, squared(hp)), 4), source);
 const { eTop, n, p, dn } = supportBolts;

@@ -58,7 +58,7 @@ const alongPlate = root(plus(squared(over(V, times(2, hp))), squared(over(times(
 
 /**
  * Weld to the support, elastic line of the depth, AS 4100:2020 cl. 9.6.3.10: two upright fillets of a plate under V and V z, or one along the
- * toe of each cleat's leg under its share of V and of V times that leg.
+ * toe of each cleat's leg under its share of V at the arm of that leg.
  */
 export const weld: StrengthRule = {
   source,

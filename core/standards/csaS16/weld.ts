@@ -33,7 +33,7 @@ export const filletLine = filletOn(base);
 
 /**
  * CSA S16:19 cl. 13.13.2.2: two upright fillets of the plate's depth under V and V z, elastic line; or one fillet along the toe of a cleat's
- * support leg with its share of V at the length of that leg.
+ * support leg with its share of V at the arm of that leg.
  */
 export const weld: StrengthRule = {
   source,

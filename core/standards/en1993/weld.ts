@@ -1,5 +1,6 @@
 import type { Limit } from '../../end/gates.ts';
-import { flag, fup, fus, hp, k, leg, legSupport, V, Xu, z } from '../../end/given.ts';
+import { flag, fup, fus, hp, k, leg, V, Xu, z } from '../../end/given.ts';
+import { supportLegArm } from '../../end/weldGroup.ts';
 import {
   atMost,
   below,
@@ -80,7 +81,7 @@ const note = 'elastic line: shear, and bending at its ends';
 
 /**
  * Fillets to the support, EN 1993-1-8 4.5.3.3: two along a fin plate under V and V z; one along the toe of each cleat under its share of V,
- * which stands that leg's length from it.
+ * at the arm of that leg.
  */
 export const weld: StrengthRule = {
   source,
@@ -108,7 +109,7 @@ export const weld: StrengthRule = {
         root(
           plus(
             squared(over(V, times(k, fullLength))),
-            squared(over(times(6, V, legSupport), times(k, squared(fullLength)))),
+            squared(over(times(6, V, supportLegArm), times(k, squared(fullLength)))),
           ),
         ),
         guide,

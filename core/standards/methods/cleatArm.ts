@@ -1,11 +1,11 @@
 import { noSupportBolts, noWebHoles, pairOfCleats } from '../../end/gates.ts';
-import { legSupport, legWeb, weldReturn, z, z1 } from '../../end/given.ts';
+import { legWeb, weldReturn, z, z1 } from '../../end/given.ts';
 import { supportArm } from '../../end/supportGroup.ts';
-import { legWeldArm } from '../../end/weldGroup.ts';
+import { legWeldArm, supportLegArm } from '../../end/weldGroup.ts';
 import { minus, most, pick, step } from '../../formula/tree.ts';
 
 const toWeb = pick([[noWebHoles.when, legWeldArm]], z);
-const toSupport = pick([[noSupportBolts.when, legSupport]], supportArm);
+const toSupport = pick([[noSupportBolts.when, supportLegArm]], supportArm);
 
 /**
  * Arm at which V bends cleats, mm: from the support's face to the centroid of what holds the web leg; of one cleat alone also from the web to

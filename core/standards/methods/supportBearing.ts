@@ -19,8 +19,11 @@ export const notTold: Gate = {
 export const single: Gate = { when: oneLine, reason: 'one-line' };
 export const twoLines: Gate = { when: not(oneLine), reason: 'pair-of-cleats' };
 
-/** How a beam opposite shares in the line of one cleat, which holds V at an arm, is not known: the number is that of V alone. */
-export const oneLineOpposite: Limit = { when: sharedWeb, reason: 'one-line-opposite', always: true };
+/**
+ * How a beam opposite shares in the line of one cleat, which holds V at an arm, is not known: the number is that of V alone, and what fails
+ * under that fails.
+ */
+export const oneLineOpposite: Limit = { when: sharedWeb, reason: 'one-line-opposite', always: false };
 
 /** One bolt of one line holds no moment: used up by any load at all. */
 export const oneSupportBolt = all(oneLine, oneRowOfSupport);

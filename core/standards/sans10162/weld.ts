@@ -22,7 +22,7 @@ export const filletLine = step('v_r', over(times(0.67, phiW, Xu, leg), root(2)),
 
 /**
  * SANS 10162-1:2011 cl. 13.13.2.2 with θ = 0: two upright fillets of the plate's depth under V and V z, elastic line; or one fillet along the
- * toe of a cleat's support leg with its share of V at the length of that leg.
+ * toe of a cleat's support leg with its share of V at the arm of that leg.
  */
 export const weld: StrengthRule = {
   source,

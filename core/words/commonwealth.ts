@@ -140,7 +140,7 @@ export const commonwealth: Words = {
     'support-not-told': 'thickness or grade of the support is not told',
     'beam-opposite': 'a beam on the other side of the same web',
     'no-beam-opposite': 'no beam on the other side of the same web',
-    'tie-bends-legs': 'a tie force bends the support legs and pulls at their bolts: not covered',
+    'tie-bends-legs': 'a tie force bends the support legs and pulls at what holds them: not covered',
     'one-line-opposite': 'one cleat alone, with a beam on the other side of the same web',
     'hole-above-standard': 'the holes are wider than the standard ones',
     'short-plate': 'short plate, z_1 ≤ t_p/0.15',

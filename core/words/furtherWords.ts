@@ -81,8 +81,6 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'pair-no-arm': 'The two cleats hold each other at the support: the arm of their support bolts is left out.',
     'beam-opposite-added':
       'The beam on the other side of the same web is added in bearing and shear of that web; the handbook leaves that to the reader.',
-    'tie-not-in-legs':
-      "Under the tie force the bending of the cleats' legs, and the support bolts in tension with the prying that goes with it, are not checked.",
     'joint-guide':
       'Joint guide 2008: Steel Buildings in Europe, Multi-Storey Steel Buildings, Part 5. Clauses 1-1, 1-5 and 1-8: parts of EN 1993.',
     'notch-in-buckling':

@@ -3,6 +3,7 @@ import { dn, ho, m, n, T, tw } from '../../end/given.ts';
 import { pulled as pulledBlock } from '../../end/tearPaths.ts';
 import { least, minus, most, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
+import { supportLegsBent } from '../methods/supportLegsBent.ts';
 import { tieNotCovered } from '../methods/tieNotCovered.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { blockForce } from './block.ts';
@@ -39,7 +40,7 @@ const gross = step('R_n', times(Fy, tw, ho), tension);
 
 /**
  * Tie force along the beam, acting alone: ordinary strengths of the web's bolts and of the web; plate, angles' legs, weld, support and its bolts
- * are not in this check. Welded legs and end plates refer.
+ * are not in this check. Angles, whose support legs it bends, and end plates refer.
  */
 export const webTie = ({ available }: Method): StrengthRule => {
   const way = (of: string, resistance: Tree<Force>, source: Way['source'] & object, more: Partial<Way> = {}): Way => ({
@@ -51,6 +52,7 @@ export const webTie = ({ available }: Method): StrengthRule => {
     source,
     ...more,
     off: [noTieForce, noWebHoles, ...(more.off ?? [])],
+    limits: [...(more.limits ?? []), supportLegsBent],
   });
   return {
     source: tension,

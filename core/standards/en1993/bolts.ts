@@ -3,7 +3,7 @@ import { noWebHoles, oneColumn, pairOfCleats } from '../../end/gates.ts';
 import { k, z } from '../../end/given.ts';
 import { over, pick, plus, root, squared, step, times } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
-import { boltLimits } from './limits.ts';
+import { boltLimits, noStressArea } from './limits.ts';
 import { longShearOf, webBolt } from './oneBolt.ts';
 import { guide, seen } from './sources.ts';
 import { underV } from './underV.ts';
@@ -24,5 +24,5 @@ export const boltGroup = step(
 /** Bolts in shear, in two planes between a pair of cleats: EN 1993-1-8 3.6.1 and 3.8, elastic group of the joint guide. */
 export const boltShear: StrengthRule = {
   source: seen('1-8 3.6.1'),
-  ways: [underV('', boltGroup, [noWebHoles], boltLimits)],
+  ways: [underV('', boltGroup, [noWebHoles], [noStressArea, ...boltLimits])],
 };

@@ -42,6 +42,13 @@ export const groupLimits: readonly Limit[] = [
 
 export const boltLimits: readonly Limit[] = [...groupLimits, boltNotListed, ...holeLimits];
 
+/** With threads in the plane a size whose tensile stress area is not listed has no strength in shear. */
+export const noStressArea: Limit = {
+  ...boltNotListed,
+  when: flag('no tensile stress area is listed', (f) => f.threadsIn && f.As === 0),
+  noNumber: true,
+};
+
 /** The line of bolts of one cleat alone stands beside the web: the joint guide has pairs and end plates only. */
 export const oneCleat: Limit = {
   when: flag('one cleat alone', (f) => f.kind === 'single-cleat'),
@@ -56,3 +63,15 @@ export const supportBoltLimits: readonly Limit[] = [
   supportBoltNotListed,
   ...supportHoleLimits,
 ];
+
+/** The same of the bolts into the support, in shear; and in tension, threads as they may lie. */
+export const noSupportStressArea: Limit = {
+  ...supportBoltNotListed,
+  when: flag('no tensile stress area is listed', ({ supportBolts: { threadsIn, As } }) => threadsIn && As === 0),
+  noNumber: true,
+};
+export const noSupportTensileArea: Limit = {
+  ...supportBoltNotListed,
+  when: flag('no tensile stress area is listed', (f) => f.supportBolts.As === 0),
+  noNumber: true,
+};

@@ -18,7 +18,7 @@ import type { Length, Pure, Stress } from '../../units/dimension.ts';
 import { onSupport } from '../methods/supportShear.ts';
 import type { StrengthRule } from '../standard.ts';
 import { gammaM2 } from './factors.ts';
-import { supportBoltLimits } from './limits.ts';
+import { noSupportStressArea, supportBoltLimits } from './limits.ts';
 import { bearingOf, bearingTermsOf, longShearOf, supportBolt } from './oneBolt.ts';
 import { leastOf } from './optional.ts';
 import { guide, memory, seen } from './sources.ts';
@@ -39,7 +39,7 @@ export const supportBoltShear: StrengthRule = {
       '',
       step('V_Rd', times(0.8, all, onePlane), guide, '0.8 stands for tension in the bolts'),
       [noSupportBolts],
-      supportBoltLimits,
+      [noSupportStressArea, ...supportBoltLimits],
     ),
   ],
 };

@@ -42,7 +42,7 @@ import type { StrengthRule, Way } from '../standard.ts';
 import { plateTieBearing, webTieBearing } from './bearing.ts';
 import { gammaM0, gammaMu } from './factors.ts';
 import { notCleat, notEndPlate, notPlate } from './kinds.ts';
-import { holeLimits } from './limits.ts';
+import { holeLimits, noStressArea } from './limits.ts';
 import { shearOf, webBolt } from './oneBolt.ts';
 import { guide, memory, seen } from './sources.ts';
 import { stubWays } from './tieStub.ts';
@@ -120,7 +120,10 @@ export const webTie: StrengthRule = {
   source: guide,
   ways: [
     { of: '', symbol: 'T', load: 'T', demand: T, off: [noTieForce, covered], limits: [notCovered] },
-    bolted('bolts', step('T_Rd', pick([[pairOfCleats.when, times(k, bolts)]], bolts), guide)),
+    {
+      ...bolted('bolts', step('T_Rd', pick([[pairOfCleats.when, times(k, bolts)]], bolts), guide)),
+      limits: [noStressArea, ...limits],
+    },
     bolted('bearing, web', step('T_Rd', times(N, webTieBearing), guide)),
     bolted('net tension, web', step('T_Rd', net(tw, least(ho, hp), fu), guide)),
     bolted('block, web', step('T_Rd', torn(webPulled, fy, fu), guide)),

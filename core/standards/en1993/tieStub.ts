@@ -17,7 +17,7 @@ import {
 import type { Force } from '../../units/dimension.ts';
 import type { Way } from '../standard.ts';
 import { gammaMu } from './factors.ts';
-import { supportBoltLimits } from './limits.ts';
+import { noSupportTensileArea, supportBoltLimits } from './limits.ts';
 import { guide, memory } from './sources.ts';
 
 /** Outside diameters of washers by bolt, mm. */
@@ -65,19 +65,19 @@ const tooNear: Limit = {
   noNumber: true,
 };
 
-const way = (of: string, resistance: Tree<Force>): Way => ({
+const way = (of: string, resistance: Tree<Force>, limits: readonly Limit[] = []): Way => ({
   of,
   symbol: 'T',
   load: 'T',
   demand: T,
   resistance: step('T_Rd', resistance, guide),
   off: [noTieForce, noSupportBolts],
-  limits: [tooNear, ...supportBoltLimits],
+  limits: [tooNear, ...limits, ...supportBoltLimits],
 });
 
 /** The three ways in which end plate or cleats, and their bolts into the support, give under the tie force, as a T-stub. */
 export const stubWays: readonly Way[] = [
   way('bending beside the bolts', over(times(minus(times(8, edge), times(2, ew)), M), divisor)),
-  way('bending and support bolts', over(plus(times(2, M), times(edge, bolts)), plus(m, edge))),
-  way('support bolts', bolts),
+  way('bending and support bolts', over(plus(times(2, M), times(edge, bolts)), plus(m, edge)), [noSupportTensileArea]),
+  way('support bolts', bolts, [noSupportTensileArea]),
 ];

@@ -124,6 +124,19 @@ describe('cleats', () => {
     expect(stateOf('bolt-shear', own)[0]).toBe('holds');
   });
 
+  test('an inch size has no tensile stress area: its shear and tension refer without a number, in web and support', () => {
+    const inch = { size: '7/8', grade: { fu: 800 } };
+    const joint = cleats({ bolts: inch, supportBolts: inch });
+    for (const id of ['bolt-shear', 'support-bolt-shear']) {
+      expect(check(id, joint)).toMatchObject({ state: 'refer', reason: 'bolt-not-listed', resistance: null });
+    }
+    expect(stateOf('web-tie', joint, { tie: 75 })).toEqual(['refer', 'bolt-not-listed']);
+    const out = cleats({ bolts: { ...inch, threads: 'out' }, supportBolts: { ...inch, threads: 'out' } });
+    for (const id of ['bolt-shear', 'support-bolt-shear']) {
+      expect(check(id, out)).toMatchObject({ state: 'refer', resistance: expect.any(Number) });
+    }
+  });
+
   test('the cleats of a pair are the outer plies: their thickness bounds the pitch, the web does not', () => {
     // 14 x 10 = 140 for the pair; 14 x 7.9 = 110.6 for one cleat beside the web.
     const wide = { bolts: { rows: 3, pitch: 120 }, supportBolts: { rows: 3, pitch: 100 } };

@@ -171,6 +171,8 @@ describe('a tie force under AS 4100', () => {
     expect(stateOf(end, { tie: 0 }, 'web-tie')).toBe('notApplicable, no-tie');
     expect(stateOf(end, { tie: 20 }, 'web-tie')).toBe('refer, tie-not-covered');
     expect(checkOf(end, { tie: 20 }, 'web-tie').resistance).toBeNull();
+    const notes = reportOf(changed(end, { tie: 20 }), false).notes.map(({ code }) => code);
+    expect(notes).not.toContain('tie-in-web-only');
   });
 
   test('bends the support legs of cleats: it refers where bolts and web would hold, and fails where they do not', () => {

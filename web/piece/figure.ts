@@ -57,11 +57,13 @@ export const path = computed<FailurePath | null>(() => {
 });
 
 /** The fit is kept from one keystroke to the next, so that fields do not wander while one types in them. */
-let kept: Fit | null = null;
+let kept: (Fit & { readonly within: Room }) | null = null;
+
+const same = (a: Room, b: Room): boolean => a.width === b.width && a.height === b.height && a.narrow === b.narrow;
 
 /** The views at the kept scale, where they still go in and do not leave too much room. */
 const asBefore = (all: readonly View[], within: Room, over: FailurePath | null): Fit | null => {
-  if (kept?.views.length !== all.length) return null;
+  if (kept?.views.length !== all.length || !same(kept.within, within)) return null;
   const { scale, shrink, standing } = kept;
   const laid = { views: layAt(all, scale, within, over), standing, scale };
   const share = taken(laid, within) * shrink;
@@ -77,7 +79,7 @@ export const figure = computed<Figure | null>(() => {
   const fields = width >= FIELDS_FROM;
   const within: Room = { width, height, narrow, textSize: fields ? TEXT.wide : TEXT.narrow };
   const fit = asBefore(views.value, within, path.value) ?? fitRoom(views.value, within, path.value);
-  kept = fit;
+  kept = { ...fit, within };
   return { drawing: piece, fields, ...fit };
 });
 

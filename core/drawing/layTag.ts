@@ -8,6 +8,8 @@ const APART = 1;
 const MIDDLE = 0.12;
 const LEADER = 2;
 const OUTSIDE = 25;
+/** How much more than other words these keep off a line: a force with a line through it is misread. */
+const STRUCK = 8;
 /** Words this near need no leader, in text heights. */
 const NEAR = 0.9;
 /** How much other words keep off a leader. */
@@ -40,7 +42,7 @@ export const layTag = (pad: Pad, { along, text }: Tag, drawing: Box): void => {
       const apart = apartOf(point, box) / em;
       const before = walk + apart * APART + (apart > NEAR ? LEADER : 0) + outside;
       if (before >= least) continue;
-      let cost = before + ground.cost(box, undefined, least - before);
+      let cost = before + STRUCK * ground.cost(box, undefined, (least - before) / STRUCK);
       if (apart > NEAR && cost < least) cost += ground.crossing(leaderStart(pad, box, point), point);
       if (cost < least) [best, least] = [{ at: { x: left, y: top }, box: { ...box }, apart, point }, cost];
     }

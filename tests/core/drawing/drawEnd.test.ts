@@ -133,10 +133,25 @@ describe('the drawing of one end', () => {
   });
 
   it("outlines the supporting beam behind its web's face", () => {
-    const { strokes, box, face } = drawEnd(sampleFacts({ support: sampleSupport, g: 12 }), sampleWords);
+    const support = { ...sampleSupport, h: 454.6 };
+    const { strokes, box, face } = drawEnd(sampleFacts({ support, g: 12 }), sampleWords);
     expect(strokes.filter((one) => one.kind === 'neighbour')).toHaveLength(3);
-    expect(face).toMatchObject({ x: -12, top: 0, bottom: 533.1 });
+    expect(face).toMatchObject({ x: -12, top: 0, bottom: 454.6 });
+    expect(box).toMatchObject({ bottom: 454.6 });
     expect(box.left).toBeCloseTo(-12 - 10.1, 9);
+  });
+
+  it('breaks off a supporting beam that reaches far below the end, whose sizes then stand under the end', () => {
+    const support = { ...sampleSupport, h: 911.4 };
+    const facts = sampleFacts({ support, g: 12 });
+    const { strokes, box, face } = drawEnd(facts, sampleWords);
+    expect(strokes.filter((one) => one.kind === 'neighbour')).toHaveLength(2);
+    const across = strokes.find((one) => one.kind === 'break')!;
+    expect(across.from.x).toBeLessThan(-12 - 10.1);
+    expect(across.from.y).toBe(box.bottom);
+    expect(box.bottom).toBeGreaterThan(facts.h);
+    expect(box.bottom).toBeLessThan(1.1 * facts.h);
+    expect(face).toMatchObject({ bottom: box.bottom });
   });
 
   it('writes inches as the shop does where the file speaks inches', () => {

@@ -1,3 +1,4 @@
+import type { Facts } from '../end/facts.ts';
 import { fault } from '../end/fault.ts';
 import type { End } from '../end/schema.ts';
 import { standards } from '../standards/known.ts';
@@ -12,6 +13,7 @@ import { listedIds, numbersOf, regionOf, said } from './examineNumbers.ts';
 import { planOf } from './plan.ts';
 import type { Check, Note, Numbers, SaidFault } from './report.ts';
 import { resolve } from './resolve.ts';
+import { withheld } from './withheld.ts';
 
 /** The same end under a second standard. */
 export interface Beside {
@@ -45,6 +47,9 @@ const carriedNote = (examined: ExaminedNumbers, standard: Standard): Note => {
   return { code: 'strengths-carried', text };
 };
 
+/** N: more than any web carries. */
+const ANY_WEB = 1e12;
+
 const besideUnder = (
   examined: ExaminedNumbers,
   standard: Standard,
@@ -53,8 +58,9 @@ const besideUnder = (
   const { facts, report } = examined;
   const { options: _, level: __, ...rest } = examined.end;
   const sameLevel = standard.level === report.level;
-  // The tie force is given at the first standard's level.
-  const end: End = { ...rest, standard: standard.id, ...(!sameLevel && { tie: 0 }) };
+  // The tie force and the beam opposite are given at the first standard's level.
+  const alone = { tie: 0, ...(rest.support && { support: { ...rest.support, otherReaction: 0 } }) };
+  const end: End = { ...rest, standard: standard.id, ...(!sameLevel && alone) };
   const found = resolve(end, standard, {
     web: { fy: facts.fy, fu: facts.fu },
     fyf: facts.fyf,
@@ -70,7 +76,12 @@ const besideUnder = (
   const V = fromSystem(sameLevel ? own : (given ?? 0), '0,1', end.units);
   const tied = (examined.end.tie ?? 0) > 0;
   const { resolved } = found;
-  const numbers = numbersOf(end, planOf(standard, end.joint.kind), resolved, V);
+  const plan = planOf(standard, end.joint.kind);
+  const of = (facts: Facts) => numbersOf(end, plan, { ...resolved, facts }, V);
+  const numbers =
+    sameLevel || facts.Vo === 0
+      ? of(resolved.facts)
+      : withheld(of(resolved.facts), of({ ...resolved.facts, Vo: ANY_WEB }), 'opposite-other-level', words);
   const told: Numbers = {
     ...numbers,
     checks: sameLevel

@@ -10,6 +10,7 @@ import type { Words } from './words.ts';
 const further: Pick<Words, 'reasons' | 'notes'> = {
   reasons: {
     'tie-other-level': 'the tie force is given at the other level',
+    'opposite-other-level': 'the reaction of the beam opposite is given at the other level',
     'several-columns': 'two bolt columns or more',
     'three-in-line': 'three bolts or more in line',
     'stocky-web': 'the web yields before it buckles in shear',

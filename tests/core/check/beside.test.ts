@@ -97,6 +97,41 @@ describe('across levels', () => {
   test('the tie force is left out, and this is said', () => {
     expect(check(beside(100), 'web-tie')).toMatchObject({ state: 'notApplicable', reason: 'tie-other-level' });
   });
+
+  describe('with a beam opposite', () => {
+    const { end: pair } = goodEnds().find(({ name }) => name === 'double-cleat-other-beam')!;
+    const under = (standard: string, support: Record<string, unknown> = {}) => {
+      const whole = { ...pair, tie: 0, support: { ...(pair.support as object), ...support } };
+      return second(whole, 'aisc-360-asd', { standard, reaction: 165 });
+    };
+    const withheldIn = ({ examined }: Beside) =>
+      examined.report.checks.filter(({ reason }) => reason === 'opposite-other-level').map(({ id }) => id);
+
+    test('what it takes part in refers without a number, as its reaction stands at the other level; all else is as alone', () => {
+      expect(withheldIn(under('sans-10162-1')).sort()).toEqual(['support-bearing', 'support-shear']);
+      expect(withheldIn(under('aisc-360-lrfd')).sort()).toEqual(['cleat-bearing', 'support-bearing', 'support-shear']);
+      const found = under('sans-10162-1');
+      expect(check(found, 'support-shear')).toMatchObject({ state: 'refer', reactionAtFailure: null, demand: null });
+      const alone = under('sans-10162-1', { otherReaction: 0 });
+      expect(withheldIn(alone)).toEqual([]);
+      expect(check(found, 'cleat-block')).toEqual(check(alone, 'cleat-block'));
+      expect(found.examined.report.verdict).not.toBe('holds');
+    });
+
+    test('the first of the other checks governs; what V alone uses up fails', () => {
+      const thin = { section: undefined, thickness: 1 };
+      const found = under('sans-10162-1', thin).examined.report;
+      expect(found.checks.find(({ id }) => id === 'support-shear')!.state).toBe('fails');
+      const { governing, capacity } = under('sans-10162-1', { section: undefined, thickness: 3 }).examined.report;
+      expect(governing).not.toMatch(/^support/);
+      expect(capacity).toBe(under('sans-10162-1', { otherReaction: 0 }).examined.report.capacity);
+    });
+
+    test("behind a column's flange it takes part in nothing", () => {
+      const flange = { kind: 'column-flange', section: undefined, thickness: 12, topOfSteel: undefined };
+      expect(withheldIn(under('sans-10162-1', flange))).toEqual([]);
+    });
+  });
 });
 
 describe('what cannot stand beside', () => {

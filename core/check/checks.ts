@@ -4,7 +4,7 @@ import type { Words } from '../words/words.ts';
 import type { Evaluation } from './evaluate.ts';
 import type { FitPlan, StrengthPlan } from './plan.ts';
 import type { Check } from './report.ts';
-import type { Result } from './result.ts';
+import { type Result, resultAt } from './result.ts';
 import { type Context, type Said, sayings } from './saidOf.ts';
 
 /** Nothing that is not finite leaves the program. */
@@ -59,21 +59,16 @@ const byReaction = (a: Check, b: Check): number => {
 const weakest = (a: Check, b: Check): number => byReaction(a, b) || (b.utilisation ?? 0) - (a.utilisation ?? 0);
 
 /** Checks of like rank together, in the order of the plan. */
-const ranked = (context: Context, { strength, fit }: Evaluation): Check[][] => {
+const ranked = (context: Context, { rows }: Evaluation): Check[][] => {
   const { plan, units, words } = context;
   const said = sayings(context);
   const force = unitOf('0,1', units).size;
   const ranks: Check[][] = [[], [], [], []];
-  for (const [ones, results] of [
-    [plan.strength, strength],
-    [plan.fit, fit],
-  ] as const) {
-    for (let at = 0; at < ones.length; at += 1) {
-      const [one, result] = [ones[at]!, results[at]!];
-      const check = checkOf(one, said(one, result.way), result, words, force);
-      ranks[rank(check)]!.push(check);
-    }
-  }
+  [...plan.strength, ...plan.fit].forEach((one, at) => {
+    const result = resultAt(rows, at);
+    const check = checkOf(one, said(one, result.way), result, words, force);
+    ranks[rank(check)]!.push(check);
+  });
   return ranks;
 };
 

@@ -1,7 +1,8 @@
 import type { FitPartPlan, FitPlan } from './plan.ts';
-import { blank, gateAt, type Result, severity } from './result.ts';
+import { reasonNumber } from './reasons.ts';
+import { DEMAND, FAILS, HOLDS, REASON, REFER, RESISTANCE, STATE, UTILISATION, WAY } from './row.ts';
 
-const trial = blank('fit-pitch');
+const [CLASH, TOO_LITTLE, TOO_MUCH] = [reasonNumber('clash'), reasonNumber('too-little'), reasonNumber('too-much')];
 
 /** What is needed over what is there; no room at all where something is needed uses it up without bound. */
 const used = (needed: number, there: number): number => {
@@ -12,51 +13,37 @@ const used = (needed: number, there: number): number => {
 /** Sizes that meet a bound exactly keep meeting it after conversion from inches. */
 const CONVERSION_NOISE = 1e-9;
 
-/** One comparison: the nearer of its bounds stands as the requirement. */
-const evaluateFitPart = (part: FitPartPlan, cells: Float64Array, into: Result): void => {
+/** One comparison, put into the row where it is the worst so far: the nearer of its bounds stands as the requirement. */
+const evaluatePart = (part: FitPartPlan, cells: Float64Array, rows: number[], row: number, at: number): void => {
   const given = cells[part.given]!;
   const least = part.least === undefined ? Number.NaN : cells[part.least]!;
   const most = part.most === undefined ? Number.NaN : cells[part.most]!;
   const toLeast = part.least === undefined ? Number.NEGATIVE_INFINITY : used(least, given);
   const toMost = part.most === undefined ? Number.NEGATIVE_INFINITY : used(given, most);
   const low = toLeast >= toMost;
+  const utilisation = low ? toLeast : toMost;
+  const holds = utilisation <= 1 + CONVERSION_NOISE;
   const clash = part.clash !== undefined && cells[part.clash] === 1;
-  into.resistance = given;
-  into.demand = low ? least : most;
-  into.utilisation = low ? toLeast : toMost;
-  if (into.utilisation <= 1 + CONVERSION_NOISE) {
-    into.state = 'holds';
-    into.reason = '';
-  } else {
-    into.state = clash ? 'fails' : part.breach;
-    into.reason = clash ? 'clash' : low ? 'too-little' : 'too-much';
-  }
+  const breach = clash || part.breach === 'fails' ? FAILS : REFER;
+  const state = holds ? HOLDS : breach;
+  const worse = state - rows[row + STATE]!;
+  if (rows[row + WAY]! >= 0 && worse <= 0 && !(worse === 0 && utilisation > rows[row + UTILISATION]!)) return;
+  rows[row + WAY] = at;
+  rows[row + STATE] = state;
+  const reason = clash ? CLASH : low ? TOO_LITTLE : TOO_MUCH;
+  rows[row + REASON] = holds ? 0 : reason;
+  rows[row + DEMAND] = low ? least : most;
+  rows[row + RESISTANCE] = given;
+  rows[row + UTILISATION] = utilisation;
 };
 
-/** The worst state of the parts of one rule of geometry, with the part that is nearest to its bound. */
-export const evaluateFit = (plan: FitPlan, cells: Float64Array): Result => {
-  const result = blank(plan.id);
-  if (plan.noRule) {
-    result.reason = plan.noRule;
-    return result;
+/** The worst state of the parts of one rule of geometry, with the part that is nearest to its bound, into the row that begins at `row`. */
+export const evaluateFit = ({ noRule, parts }: FitPlan, cells: Float64Array, rows: number[], row: number): void => {
+  rows[row + REASON] = noRule;
+  for (let at = 0; at < parts.length; at += 1) {
+    const part = parts[at]!;
+    const gate = cells[part.gate]!;
+    if (gate < 0) evaluatePart(part, cells, rows, row, at);
+    else if (rows[row + WAY]! < 0 && rows[row + REASON] === 0) rows[row + REASON] = part.reasons[gate]!;
   }
-  for (let at = 0; at < plan.parts.length; at += 1) {
-    const part = plan.parts[at]!;
-    const off = gateAt(part.off, cells[part.gate]!);
-    if (off) {
-      if (result.way < 0 && result.reason === '') result.reason = off.reason;
-      continue;
-    }
-    evaluateFitPart(part, cells, trial);
-    const worse = trial.state === result.state ? 0 : severity[trial.state] - severity[result.state];
-    if (result.way < 0 || worse > 0 || (worse === 0 && trial.utilisation > result.utilisation)) {
-      result.way = at;
-      result.state = trial.state;
-      result.reason = trial.reason;
-      result.demand = trial.demand;
-      result.resistance = trial.resistance;
-      result.utilisation = trial.utilisation;
-    }
-  }
-  return result;
 };

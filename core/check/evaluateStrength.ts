@@ -1,136 +1,143 @@
 import type { StrengthPlan, WayPlan } from './plan.ts';
-import { blank, gateAt, type Result, severity } from './result.ts';
+import { reasonNumber } from './reasons.ts';
+import {
+  blankRow,
+  DEMAND,
+  FAILS,
+  FAILS_AT,
+  HOLDS,
+  INFORMATION,
+  NOT_APPLICABLE,
+  REASON,
+  REFER,
+  RESISTANCE,
+  STATE,
+  UTILISATION,
+  WAY,
+} from './row.ts';
+
+const [NO_RULE, ONE_BOLT, NOTHING_LEFT] = [
+  reasonNumber('no-rule'),
+  reasonNumber('one-bolt'),
+  reasonNumber('nothing-left'),
+];
 
 /** A way for which the standard sets no limit: its demand at V, for information; no rule where a verdict is asked for. */
-const inform = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
-  into.demand = cells[plan.demand]! * V;
+const inform = (plan: WayPlan, cells: Float64Array, V: number, rows: number[], row: number): void => {
+  rows[row + DEMAND] = cells[plan.demand]! * V;
   const told = plan.informs === undefined || cells[plan.informs] === 1;
-  into.state = told ? 'information' : 'notApplicable';
-  if (!told) into.reason = 'no-rule';
+  rows[row + STATE] = told ? INFORMATION : NOT_APPLICABLE;
+  if (!told) rows[row + REASON] = NO_RULE;
 };
 
 /** Used up by any load at all. */
-const useUp = (plan: WayPlan, reason: string, into: Result): void => {
-  into.state = 'fails';
-  into.reason = reason;
-  into.utilisation = Number.POSITIVE_INFINITY;
-  if (plan.load === 'V') into.reactionAtFailure = 0;
+const useUp = (plan: WayPlan, reason: number, rows: number[], row: number): void => {
+  rows[row + STATE] = FAILS;
+  rows[row + REASON] = reason;
+  rows[row + UTILISATION] = Number.POSITIVE_INFINITY;
+  if (plan.load === 'V') rows[row + FAILS_AT] = 0;
 };
 
-const measure = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
-  if (plan.failsAt !== undefined) {
-    into.utilisation = V / into.reactionAtFailure;
-    return;
-  }
+/** How much of the way is used: its demand grows in proportion to V, so it was measured at 1 N (or at the tie force itself). */
+const measure = (plan: WayPlan, cells: Float64Array, V: number, rows: number[], row: number): number => {
+  if (plan.failsAt !== undefined) return V / rows[row + FAILS_AT]!;
   const demand = cells[plan.demand]!;
   if (plan.load !== 'V') {
-    into.demand = demand;
-    into.utilisation = demand / into.resistance;
-    return;
+    rows[row + DEMAND] = demand;
+    return demand / rows[row + RESISTANCE]!;
   }
-  into.demand = demand * V;
-  into.reactionAtFailure = into.resistance / demand;
-  into.utilisation = V / into.reactionAtFailure;
+  rows[row + DEMAND] = demand * V;
+  const failsAt = rows[row + RESISTANCE]! / demand;
+  rows[row + FAILS_AT] = failsAt;
+  return V / failsAt;
 };
 
-/** One way at the reaction V: its demand grows in proportion, so it was measured at 1 N (or at the tie force itself). */
-const evaluateWay = (plan: WayPlan, cells: Float64Array, V: number, into: Result): void => {
-  into.reason = '';
-  into.demand = into.resistance = into.reactionAtFailure = into.utilisation = Number.NaN;
+/** One way that applies, at the reaction V, into a row whose numbers are blank. */
+const evaluateWay = (plan: WayPlan, cells: Float64Array, V: number, rows: number[], row: number): void => {
+  const { off, limits } = plan;
   const gate = cells[plan.gate]!;
-  const off = gateAt(plan.off, gate);
-  if (off) {
-    into.state = 'notApplicable';
-    into.reason = off.reason;
-    return;
-  }
-  const limit = gateAt(plan.limits, gate - plan.off.length);
+  const limit = gate < 0 ? undefined : limits[gate - off.length]!;
   const informs = plan.informs !== undefined && cells[plan.informs] === 1;
+  rows[row + REASON] = 0;
   if (limit?.noNumber) {
-    into.state = informs ? 'information' : 'refer';
-    into.reason = limit.reason;
+    rows[row + STATE] = informs ? INFORMATION : REFER;
+    rows[row + REASON] = plan.reasons[gate]!;
     return;
   }
-  if (plan.failsAt !== undefined) into.reactionAtFailure = cells[plan.failsAt]!;
-  else if (plan.resistance !== undefined) into.resistance = cells[plan.resistance]!;
-  else {
-    inform(plan, cells, V, into);
+  if (plan.failsAt === undefined && plan.resistance === undefined) {
+    inform(plan, cells, V, rows, row);
     return;
   }
+  const column = plan.failsAt === undefined ? RESISTANCE : FAILS_AT;
+  const held = cells[plan.failsAt ?? plan.resistance!]!;
+  rows[row + column] = held;
   if (plan.unbounded !== undefined && cells[plan.unbounded] === 1) {
-    useUp(plan, 'one-bolt', into);
+    useUp(plan, ONE_BOLT, rows, row);
     return;
   }
-  if (!(into.resistance > 0 || into.reactionAtFailure > 0)) {
-    useUp(plan, 'nothing-left', into);
+  if (!(held > 0)) {
+    useUp(plan, NOTHING_LEFT, rows, row);
     return;
   }
-  measure(plan, cells, V, into);
-  const holds = into.utilisation <= 1;
-  if (informs) into.state = 'information';
+  const utilisation = measure(plan, cells, V, rows, row);
+  rows[row + UTILISATION] = utilisation;
+  const holds = utilisation <= 1;
+  if (informs) rows[row + STATE] = INFORMATION;
   else if (limit && (limit.always || holds)) {
-    into.state = 'refer';
-    into.reason = limit.reason;
-  } else into.state = holds ? 'holds' : 'fails';
+    rows[row + STATE] = REFER;
+    rows[row + REASON] = plan.reasons[gate]!;
+  } else rows[row + STATE] = holds ? HOLDS : FAILS;
 };
 
-const trial = blank('weld');
+const trial = blankRow();
 
-/** The worst state of the ways, with the numbers of the way used up first. */
-export const evaluateStrength = (plan: StrengthPlan, cells: Float64Array, V: number): Result => {
-  const result = blank(plan.id);
-  if (plan.noRule) {
-    result.reason = plan.noRule;
-    return result;
-  }
-  const { ways } = plan;
-  if (ways.length === 1) {
-    evaluateWay(ways[0]!, cells, V, result);
-    if (hasNumbers(result)) result.way = 0;
-    return result;
-  }
+/** The worst state of the ways, with the numbers of the way used up first, into the blank row that begins at `row`. */
+export const evaluateStrength = (
+  { noRule, ways }: StrengthPlan,
+  cells: Float64Array,
+  V: number,
+  rows: number[],
+  row: number,
+): void => {
+  rows[row + REASON] = noRule;
   for (let at = 0; at < ways.length; at += 1) {
-    evaluateWay(ways[at]!, cells, V, trial);
-    take(result, trial, at);
+    const way = ways[at]!;
+    const gate = cells[way.gate]!;
+    const none = rows[row + WAY]! < 0;
+    if (gate >= 0 && gate < way.off.length) {
+      if (none) rows[row + REASON] = way.reasons[gate]!;
+    } else if (none) {
+      evaluateWay(way, cells, V, rows, row);
+      if (hasNumbers(rows, row)) rows[row + WAY] = at;
+    } else {
+      trial[DEMAND] = trial[RESISTANCE] = trial[FAILS_AT] = trial[UTILISATION] = Number.NaN;
+      evaluateWay(way, cells, V, trial, 0);
+      if (hasNumbers(trial, 0)) take(rows, row, at);
+    }
   }
-  return result;
 };
 
-/** States demand and resistance at V (now in the facts) where they do not change in proportion. */
-export const stateAtReaction = (plan: StrengthPlan, cells: Float64Array, result: Result): void => {
-  const way = plan.ways[result.way];
-  if (way?.failsAt === undefined || Number.isNaN(result.utilisation)) return;
-  result.demand = cells[way.demand]!;
-  result.resistance = cells[way.resistance!]!;
+/** False for a way that says nothing of the end. */
+const hasNumbers = (rows: readonly number[], row: number): boolean =>
+  rows[row + STATE] !== NOT_APPLICABLE || !Number.isNaN(rows[row + DEMAND]!);
+
+/** True where the trial is used up before what the row holds; of two for information, the one with the larger demand. */
+const sooner = (rows: readonly number[], row: number): boolean => {
+  const utilisation = rows[row + UTILISATION]!;
+  if (Number.isNaN(trial[UTILISATION]!)) return Number.isNaN(utilisation) && trial[DEMAND]! > rows[row + DEMAND]!;
+  if (Number.isNaN(utilisation)) return true;
+  const mixed = Number.isNaN(trial[FAILS_AT]!) || Number.isNaN(rows[row + FAILS_AT]!);
+  return mixed ? trial[UTILISATION]! > utilisation : trial[FAILS_AT]! < rows[row + FAILS_AT]!;
 };
 
-/** False for a way that does not apply to the end and says nothing of it. */
-const hasNumbers = ({ state, demand }: Result): boolean => state !== 'notApplicable' || !Number.isNaN(demand);
-
-/** True where `found` is used up before what `result` holds; of two for information, the one with the larger demand. */
-const sooner = (found: Result, result: Result): boolean => {
-  if (Number.isNaN(found.utilisation)) return Number.isNaN(result.utilisation) && found.demand > result.demand;
-  if (Number.isNaN(result.utilisation)) return true;
-  const mixed = Number.isNaN(found.reactionAtFailure) || Number.isNaN(result.reactionAtFailure);
-  return mixed ? found.utilisation > result.utilisation : found.reactionAtFailure < result.reactionAtFailure;
-};
-
-const take = (result: Result, found: Result, at: number): void => {
-  const none = result.way < 0;
-  if (!hasNumbers(found)) {
-    if (none) result.reason = found.reason;
-    return;
-  }
-  const first = none || sooner(found, result);
-  const worse = none || found.state === result.state ? 0 : severity[found.state] - severity[result.state];
-  if (none || worse > 0 || (worse === 0 && first)) {
-    result.state = found.state;
-    result.reason = found.reason;
+const take = (rows: number[], row: number, at: number): void => {
+  const first = sooner(rows, row);
+  const worse = trial[STATE]! - rows[row + STATE]!;
+  if (worse > 0 || (worse === 0 && first)) {
+    rows[row + STATE] = trial[STATE]!;
+    rows[row + REASON] = trial[REASON]!;
   }
   if (!first) return;
-  result.way = at;
-  result.demand = found.demand;
-  result.resistance = found.resistance;
-  result.reactionAtFailure = found.reactionAtFailure;
-  result.utilisation = found.utilisation;
+  rows[row + WAY] = at;
+  for (let column = DEMAND as number; column <= UTILISATION; column += 1) rows[row + column] = trial[column]!;
 };

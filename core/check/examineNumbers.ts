@@ -24,6 +24,7 @@ import type { ExaminedNumbers } from './examined.ts';
 import { type Plan, planOf } from './plan.ts';
 import type { Note, Numbers, SaidFault } from './report.ts';
 import { type Resolved, resolve } from './resolve.ts';
+import { resultAt } from './result.ts';
 import { sectionStresses } from './sectionStresses.ts';
 import { VERSION } from './version.ts';
 
@@ -39,14 +40,14 @@ export const said = (faults: readonly Fault[], words: Words = commonwealth): { f
 });
 
 /** Reaction at which the full section fails in shear, N. */
-const grossShearOf = (evaluation: Evaluation): number =>
-  evaluation.strength.find(({ id }) => id === 'web-gross-shear')!.reactionAtFailure;
+const grossShearOf = ({ grossShear }: Plan, { rows }: Evaluation): number =>
+  resultAt(rows, grossShear).reactionAtFailure;
 
 /** The reaction as given, or what a share of the full section's shear comes to. N */
 const reactionOf = ({ reaction, units }: End, plan: Plan, facts: Facts): number =>
   typeof reaction === 'number'
     ? fromSystem(reaction, '0,1', units)
-    : reaction.ofWebShear * grossShearOf(evaluate(plan, facts, 0));
+    : reaction.ofWebShear * grossShearOf(plan, evaluate(plan, facts, 0));
 
 /** What is to be said of the grades named: from memory, or not listed by the standard; each once. */
 const gradeNotes = (end: End, { materials }: Standard): { readonly code: string; readonly name: string }[] => {
@@ -116,10 +117,10 @@ export const numbersOf = (end: End, plan: Plan, resolved: Resolved, given?: numb
     units: end.units,
     words: region,
     verdict: evaluation.verdict,
-    governing: evaluation.governing.id,
+    governing: evaluation.governing,
     reaction: kN(reaction),
     capacity: Number.isFinite(evaluation.capacity) ? kN(evaluation.capacity) : null,
-    shareOfWebShear: reaction / grossShearOf(evaluation),
+    shareOfWebShear: reaction / grossShearOf(plan, evaluation),
     checks: checksOf({ plan, units: end.units, words }, evaluation),
     shape: { sections: sectionStresses(facts, end.units) },
     assumptions: assumptionsOf(end, standard, facts.channel, words),

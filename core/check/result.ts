@@ -1,42 +1,31 @@
-import type { CheckName } from '../end/checkNames.ts';
+import { reasonCode } from './reasons.ts';
 import type { State } from './report.ts';
+import { DEMAND, FAILS_AT, REASON, RESISTANCE, STATE, states, UTILISATION, WAY, WIDTH } from './row.ts';
 
 /** The numbers of one check: N and mm; demand at V, capacity as the reaction at which it is used up. */
 export interface Result {
-  readonly id: CheckName;
-  state: State;
+  readonly state: State;
   /** Code of the reason, where it refers or does not apply. */
-  reason: string;
+  readonly reason: string;
   /** Which of the rule's ways or parts the numbers speak of; -1 where none applies. */
-  way: number;
-  demand: number;
-  resistance: number;
+  readonly way: number;
+  readonly demand: number;
+  readonly resistance: number;
   /** NaN for checks that do not depend on V. Inside core only: reports turn what is not finite into null. */
-  reactionAtFailure: number;
-  utilisation: number;
+  readonly reactionAtFailure: number;
+  readonly utilisation: number;
 }
 
-/** How bad a state is: the worst of several parts stands for all. */
-export const severity: Readonly<Record<State, number>> = {
-  fails: 4,
-  refer: 3,
-  holds: 2,
-  information: 1,
-  notApplicable: 0,
+/** The result of one check out of the rows of all. */
+export const resultAt = (rows: readonly number[], check: number): Result => {
+  const at = check * WIDTH;
+  return {
+    state: states[rows[at + STATE]!]!,
+    reason: reasonCode(rows[at + REASON]!),
+    way: rows[at + WAY]!,
+    demand: rows[at + DEMAND]!,
+    resistance: rows[at + RESISTANCE]!,
+    reactionAtFailure: rows[at + FAILS_AT]!,
+    utilisation: rows[at + UTILISATION]!,
+  };
 };
-
-/** A result that nothing has been found out about. */
-export const blank = (id: CheckName): Result => ({
-  id,
-  state: 'notApplicable',
-  reason: '',
-  way: -1,
-  demand: Number.NaN,
-  resistance: Number.NaN,
-  reactionAtFailure: Number.NaN,
-  utilisation: Number.NaN,
-});
-
-/** The gate of that number; undefined where it is none of them. (To read a list beyond its ends costs as much as a whole check.) */
-export const gateAt = <G>(gates: readonly G[], at: number): G | undefined =>
-  at >= 0 && at < gates.length ? gates[at] : undefined;

@@ -6,7 +6,7 @@ import { isNoRule, treesOf as treesOfWay } from '../standards/standard.ts';
 import { evaluate } from './evaluate.ts';
 import type { ExaminedNumbers } from './examined.ts';
 import { type FitPlan, type Plan, planOf, type StrengthPlan } from './plan.ts';
-import type { Result } from './result.ts';
+import { type Result, resultAt } from './result.ts';
 
 /** What a working leads to: demand and resistance of the way that the numbers speak of; none where the method gives no number. */
 const ofStrength = ({ rule }: StrengthPlan, { way, demand, resistance }: Result): readonly Tree[] | undefined => {
@@ -24,13 +24,17 @@ const ofFit = ({ rule }: FitPlan, { way }: Result): readonly Tree[] | undefined 
 
 /** What the workings of an end lead to, by check; a check that does not apply has none. */
 const treesOf = (plan: Plan, { facts }: ExaminedNumbers): Map<CheckName, readonly Tree[]> => {
-  const { strength, fit } = evaluate(plan, facts, facts.V);
+  const { rows } = evaluate(plan, facts, facts.V);
   const all = new Map<CheckName, readonly Tree[]>();
   const put = (id: CheckName, trees: readonly Tree[] | undefined): void => {
     if (trees) all.set(id, trees);
   };
-  for (const [at, one] of plan.strength.entries()) put(one.id, ofStrength(one, strength[at]!));
-  for (const [at, one] of plan.fit.entries()) put(one.id, ofFit(one, fit[at]!));
+  plan.strength.forEach((one, at) => {
+    put(one.id, ofStrength(one, resultAt(rows, at)));
+  });
+  plan.fit.forEach((one, at) => {
+    put(one.id, ofFit(one, resultAt(rows, plan.strength.length + at)));
+  });
   return all;
 };
 

@@ -34,18 +34,23 @@ interface Balance {
   readonly moment: number;
 }
 
-/** Sums over the bolts for a centre l0 beyond the centroid, away from the load, in units of one bolt's strength R_u. */
+/**
+ * Sums over the bolts for a centre l0 beyond the centroid, away from the load, in units of one bolt's strength R_u. Rows lie in pairs above and
+ * below the centroid, so half of them are worked out.
+ */
 const balance = ({ n, m, p, q }: Pattern, l0: number, { mu, lambda, slip }: BoltCurve): Balance => {
-  const far = Math.hypot(((m - 1) * q) / 2 + l0, ((n - 1) * p) / 2);
+  const xFar = ((m - 1) * q) / 2 + l0;
+  const yFar = ((n - 1) * p) / 2;
+  const perLength = (-mu * slip) / Math.sqrt(xFar * xFar + yFar * yFar);
   let vertical = 0;
   let moment = 0;
   for (let j = 0; j < m; j += 1) {
     const x = (j - (m - 1) / 2) * q + l0;
-    for (let i = 0; i < n; i += 1) {
+    for (let i = 0; 2 * i < n; i += 1) {
       const y = (i - (n - 1) / 2) * p;
-      const l = Math.hypot(x, y);
+      const l = Math.sqrt(x * x + y * y);
       if (l === 0) continue;
-      const R = (1 - Math.exp((-mu * slip * l) / far)) ** lambda;
+      const R = (2 * i === n - 1 ? 1 : 2) * (1 - Math.exp(perLength * l)) ** lambda;
       vertical += (R * x) / l;
       moment += R * l;
     }
@@ -53,9 +58,12 @@ const balance = ({ n, m, p, q }: Pattern, l0: number, { mu, lambda, slip }: Bolt
   return { vertical, moment };
 };
 
+/** Share of the distance within which the centre is known. */
+const CLOSE = 1e-13;
+
 /**
  * Instantaneous centre of a bolt group under an upright load at arm e from its centroid: the centre at which the bolts' forces, each at
- * right angles to its radius and grown by the curve, balance the load. Bracketed and halved; e > 0 and two bolts or more.
+ * right angles to its radius and grown by the curve, balance the load. Kept between two bounds; e > 0 and two bolts or more.
  */
 export const instantaneousCentre = (pattern: Pattern, e: number, curve: BoltCurve = boltCurve): CentreFound => {
   // Positive while the centre is too near: the bolts then hold more moment about it than the load brings.
@@ -63,16 +71,36 @@ export const instantaneousCentre = (pattern: Pattern, e: number, curve: BoltCurv
     const { vertical, moment } = balance(pattern, l0, curve);
     return moment - (e + l0) * vertical;
   };
-  const size = Math.hypot((pattern.n - 1) * pattern.p, (pattern.m - 1) * pattern.q);
   let near = 0;
-  let far = size;
-  while (excess(far) > 0 && far < 1e9) far *= 2;
-  for (let turn = 0; turn < 200 && far - near > 1e-13 * far; turn += 1) {
-    const middle = (near + far) / 2;
-    if (excess(middle) > 0) near = middle;
-    else far = middle;
+  let atNear = excess(near);
+  let far = Math.hypot((pattern.n - 1) * pattern.p, (pattern.m - 1) * pattern.q);
+  let atFar = excess(far);
+  while (atFar > 0 && far < 1e9) {
+    near = far;
+    atNear = atFar;
+    far *= 2;
+    atFar = excess(far);
   }
-  const l0 = (near + far) / 2;
+  let kept = 0;
+  for (let turn = 0; turn < 200 && far - near > CLOSE * far && atFar !== 0; turn += 1) {
+    // The chord's root; every third turn the middle, so that the bounds close in whatever the curve.
+    const chord = near + ((far - near) * atNear) / (atNear - atFar);
+    const l0 = turn % 3 < 2 && chord > near && chord < far ? chord : (near + far) / 2;
+    const found = excess(l0);
+    // A bound that stays twice counts for half (the Illinois rule), else the chord would creep.
+    if (found > 0) {
+      near = l0;
+      atNear = found;
+      if (kept === 1) atFar /= 2;
+      kept = 1;
+    } else {
+      far = l0;
+      atFar = found;
+      if (kept === -1) atNear /= 2;
+      kept = -1;
+    }
+  }
+  const l0 = atFar === 0 ? far : (near + far) / 2;
   return { C: balance(pattern, l0, curve).vertical, l0 };
 };
 

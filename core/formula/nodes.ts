@@ -15,9 +15,11 @@ export interface Node {
   /** Its place among all. */
   readonly at: number;
   /** What a leaf is or reads, or a solver. */
-  readonly is?: number | Read | Flag | Solve;
+  readonly is: number | Read | Flag | Solve | undefined;
   /** True where it leans on a solver, which costs much and must not run needlessly. */
   readonly solved: boolean;
+  /** True where it leans on the quantity that may change after a run. */
+  readonly changes: boolean;
   /** How many nodes lean on it. */
   uses: number;
 }
@@ -36,6 +38,9 @@ export class Nodes {
   private readonly known = new Map<string, Node>();
   private readonly seen = new Map<Tree | Condition, Node>();
   private readonly numbers = new Map<unknown, number>();
+
+  /** `changing`: how the quantity that may change after a run is read. */
+  constructor(private readonly changing?: Read) {}
 
   of(one: Tree | Condition): Node {
     const seen = this.seen.get(one);
@@ -97,7 +102,8 @@ export class Nodes {
     const known = this.known.get(key);
     if (known) return known;
     const solved = op === 'found' || of.some((one) => one.solved);
-    const made: Node = { op, of, at: this.all.length, solved, uses: 0, ...(is !== undefined && { is }) };
+    const changes = (op === 'given' && is === this.changing) || of.some((one) => one.changes);
+    const made: Node = { op, of, at: this.all.length, is, solved, changes, uses: 0 };
     for (const one of of) one.uses += 1;
     this.known.set(key, made);
     this.all.push(made);

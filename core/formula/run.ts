@@ -16,6 +16,8 @@ export interface Program {
   readonly reads: readonly Read[];
   readonly flags: readonly Flag[];
   readonly firstFact: number;
+  /** Cell of the quantity that may change after a run; before `firstFact` where no formula reads it. */
+  readonly changing: number;
   readonly solvers: readonly Solver[];
   /** The run in which each solver last ran. */
   readonly solvedAt: Int32Array;
@@ -41,6 +43,7 @@ export const does = {
   goUnless: 15,
   solve: 16,
   gates: 17,
+  solveAnew: 18,
 } as const;
 
 const solved = ({ solve, of }: Solver, cells: Float64Array, facts: never): number => {
@@ -73,8 +76,18 @@ let runs = 0;
 export const run = (program: Program, facts: never): void => {
   readFacts(program, facts);
   runs = (runs + 1) | 0;
-  const { code, cells: cell, solvers, solvedAt } = program;
-  let at = 0;
+  follow(program, facts, 0);
+};
+
+/** Works out what is asked for after a run from these instructions on, at another value of the quantity that may change. */
+export const runAgain = (program: Program, facts: never, from: number, value: number): void => {
+  const { cells, changing, firstFact } = program;
+  if (changing >= firstFact) cells[changing] = value;
+  follow(program, facts, from);
+};
+
+const follow = ({ code, cells: cell, solvers, solvedAt }: Program, facts: never, from: number): void => {
+  let at = from;
   for (;;) {
     const to = code[at + 1]!;
     const a = code[at + 2]!;
@@ -135,6 +148,9 @@ export const run = (program: Program, facts: never): void => {
           cell[to] = solved(solvers[a]!, cell, facts);
           solvedAt[a] = runs;
         }
+        break;
+      case 18:
+        cell[to] = solved(solvers[a]!, cell, facts);
         break;
       case 17: {
         // From `a` on, `b` gates: the condition's cell, the gate's number, where to go on if it is met.

@@ -26,9 +26,10 @@ const holeFoot = ({ first, pitch, diameter }: Holes, i: number, most: number): n
 export const netModulus = ({ h, b, tf, tw, from, to }: PlainCut, holes: Holes): number => {
   let [area, first, second] = [0, 0, 0];
   const add = (width: number, a: number, z: number): void => {
-    area += width * (z - a);
-    first += (width * (z ** 2 - a ** 2)) / 2;
-    second += (width * (z ** 3 - a ** 3)) / 3;
+    const part = width * (z - a);
+    area += part;
+    first += (part * (z + a)) / 2;
+    second += (part * (z * z + z * a + a * a)) / 3;
   };
   const [webTop, webFoot] = [from > 0 ? from : tf, to < h ? to : h - tf];
   if (from === 0) add(b, 0, tf);

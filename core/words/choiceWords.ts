@@ -7,7 +7,7 @@ const choiceWords = (words: Words): Readonly<Record<string, Readonly<Record<stri
     'double-cleat': 'two cleats',
     'single-cleat': 'one cleat',
     'end-plate': 'end plate',
-    'full-end-plate': 'end plate of the full depth',
+    'full-end-plate': 'full end plate',
     'web-bolts': 'web bolted to a ply',
   },
   'joint.cleat.legs': {

@@ -1,6 +1,6 @@
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
-import { joinedIn } from '../state/joined.ts';
+import { type Joined, joinedIn } from '../state/joined.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { several } from './several.ts';
 import { Value } from './Value.tsx';
@@ -44,23 +44,28 @@ const InWeb = () => {
   );
 };
 
-const InSupport = () => (
+const tops: Readonly<Record<string, string>> = { 'double-cleat': "the cleats'", 'single-cleat': "the cleat's" };
+
+const InSupport = ({ kind }: Joined) => (
   <>
-    Into the support <Rows path="joint.supportBolts" />,{' '}
-    <Value path="joint.supportBolts.crossCentres" missing="how far?" /> apart across the web, first row{' '}
-    <Value path="joint.supportBolts.topEdge" missing="edge?" /> below the top.
+    Into the support <Rows path="joint.supportBolts" />
+    {kind === 'single-cleat' ? ' in one line, cross centres ' : ' in two lines, '}
+    <Value path="joint.supportBolts.crossCentres" missing="how far?" />
+    {kind !== 'single-cleat' && ' apart'}; first row <Value path="joint.supportBolts.topEdge" missing="edge?" /> below{' '}
+    {tops[kind] ?? "the plate's"} top.
   </>
 );
 
 const Sentence = () => {
-  const { webBolts, supportBolts } = joinedIn(entry.value);
+  const joined = joinedIn(entry.value);
+  const { webBolts, supportBolts } = joined;
   return (
     <>
       {webBolts && <InWeb />}
       {supportBolts && (
         <>
           {webBolts && ' '}
-          <InSupport />
+          <InSupport {...joined} />
         </>
       )}
     </>

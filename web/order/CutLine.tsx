@@ -1,5 +1,6 @@
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { joinedIn } from '../state/joined.ts';
 import { OrderLine } from './OrderLine.tsx';
 import { Value } from './Value.tsx';
 
@@ -27,6 +28,13 @@ const Said = ({ edge }: { readonly edge: Edge }) => {
   );
 };
 
+/** How far the end is set back; an end plate fills that. */
+const Setback = () => (
+  <>
+    ; set back <Value path="setback" missing="setback?" />
+  </>
+);
+
 /** What is cut off the end: the copes, and how far it is set back. */
 export const CutLine = () => (
   <OrderLine
@@ -34,7 +42,8 @@ export const CutLine = () => (
     title="Cut"
     sentence={
       <>
-        <Said edge="top" />; <Said edge="bottom" />; set back <Value path="setback" missing="setback?" />.
+        <Said edge="top" />; <Said edge="bottom" />
+        {!joinedIn(entry.value).endPlate && <Setback />}.
       </>
     }
   />

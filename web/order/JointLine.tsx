@@ -105,27 +105,29 @@ const Placed = ({ path }: { readonly path: string }) => (
   </>
 );
 
-const sides: Readonly<Record<string, string>> = {
-  'joint.weld': '',
-  'joint.webWeld': ' to the web',
-  'joint.cleat.webWeld': ' round the leg on the web',
-  'joint.cleat.supportWeld': ' to the support',
+/** The fillets of a plate, and of one leg: how many there are, and where. */
+const Weld = ({ joined: { weld, kind, cleat } }: { readonly joined: Joined }) => {
+  const legs = kind === 'double-cleat' ? 'each leg' : 'the leg';
+  const places: Readonly<Record<string, string>> = {
+    'joint.webWeld': ' to the web',
+    'joint.cleat.webWeld': ` round ${legs} on the web`,
+    'joint.cleat.supportWeld': ` along ${legs} on the support`,
+  };
+  return (
+    <>
+      ; {cleat ? 'a' : 'two'} <Value path={`${weld}.leg`} missing="leg?" /> {unitAt(`${weld}.leg`)}{' '}
+      {cleat ? 'fillet' : 'fillets'}
+      {places[weld]}
+    </>
+  );
 };
-
-const Weld = ({ joined: { weld, kind } }: { readonly joined: Joined }) => (
-  <>
-    ; {kind === 'single-cleat' ? 'a' : 'two'} <Value path={`${weld}.leg`} missing="leg?" /> {unitAt(`${weld}.leg`)}{' '}
-    {kind === 'single-cleat' ? 'fillet' : 'fillets'}
-    {sides[weld]}
-  </>
-);
 
 const Fitting = ({ joined }: { readonly joined: Joined }) => {
   const { fitting, cleat, endPlate, webBolts } = joined;
   if (endPlate) {
     return (
       <>
-        <Value path="joint.plate.width" missing="width?" /> wide, <Steel path={fitting} />
+        , <Value path="joint.plate.width" missing="width?" /> wide, <Steel path={fitting} />
         <Placed path={fitting} />
       </>
     );
@@ -133,6 +135,7 @@ const Fitting = ({ joined }: { readonly joined: Joined }) => {
   if (!cleat) {
     return (
       <>
+        {' '}
         <Steel path={fitting} />
         <Edges path={fitting} free />
       </>
@@ -140,8 +143,8 @@ const Fitting = ({ joined }: { readonly joined: Joined }) => {
   }
   return (
     <>
-      <Value path="joint.cleat.legWeb" missing="leg?" /> on the web by{' '}
-      <Value path="joint.cleat.legSupport" missing="leg?" />, <Steel path={fitting} />
+      , <Value path="joint.cleat.legWeb" missing="leg?" /> on the web by{' '}
+      <Value path="joint.cleat.legSupport" missing="leg?" /> on the support, <Steel path={fitting} />
       {webBolts ? <Edges path={fitting} free={false} /> : <Placed path={fitting} />}
     </>
   );
@@ -151,7 +154,7 @@ const Sentence = () => {
   const joined = joinedIn(entry.value);
   return (
     <>
-      <Value path="joint.kind" text={capital(choiceText(words.value, 'joint.kind', joined.kind))} />{' '}
+      <Value path="joint.kind" text={capital(choiceText(words.value, 'joint.kind', joined.kind))} />
       <Fitting joined={joined} />
       {joined.weld !== '' && <Weld joined={joined} />}.
       <Support />

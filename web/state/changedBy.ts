@@ -19,12 +19,17 @@ const byStandard = (entry: Entry, id: string): Record<string, string> => {
   ]);
 };
 
+/** Where an end plate stands and how deep it is, as far as the bench proposed it: each kind has its own. */
+const plateProposed = ({ assumed }: Entry): Record<string, string> =>
+  emptied(['joint.plate.depth', 'joint.plate.top'].filter((path) => assumed.includes(path)));
+
 /**
- * What is emptied when a standard is chosen in place of another, by path. All else stays: a grade or a bolt that the new standard does not
+ * What is emptied when a standard or a kind of joint is chosen in place of another, by path. All else stays: a grade or a bolt that the new standard does not
  * know gets its fault, with the nearest that it does.
  */
 export const changedBy = (entry: Entry, path: string, value: string): Readonly<Record<string, string>> => {
   if (textOf(entry, path) === value) return {};
+  if (path === 'joint.kind') return plateProposed(entry);
   if (path === 'standard') return byStandard(entry, value);
   const turned = path === BESIDE && levelOf(entry, BESIDE) !== listedAs(value)?.level;
   return turned ? emptied(['sheet.beside.reaction']) : {};

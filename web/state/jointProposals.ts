@@ -27,11 +27,21 @@ const carried = (entry: Entry, names: readonly string[], from: readonly string[]
     ]),
   );
 
-const plate = (facts: Facts | undefined, at: Size, round: (mm: number) => string): Texts => ({
-  'joint.plate.width': at(200, '8'),
-  'joint.plate.depth': facts && facts.hp > 0 ? round(facts.hp) : at(220, '9'),
-  'joint.plate.top': facts && facts.yp > 0 ? round(facts.yp) : at(60, '2-1/2'),
-});
+/** Of the full depth, the plate covers what the copes leave; else it ends as far below its bolts as above them. */
+const plate = (kind: Joined['kind'], facts: Facts | undefined, at: Size, round: (mm: number) => string): Texts => {
+  const width = { 'joint.plate.width': at(220, '8-1/2') };
+  if (!facts) return { ...width, 'joint.plate.depth': at(220, '9'), 'joint.plate.top': at(60, '2-1/2') };
+  if (kind === 'full-end-plate') {
+    return { ...width, 'joint.plate.depth': round(facts.h - facts.dt - facts.db), 'joint.plate.top': round(facts.dt) };
+  }
+  const { n, p, eTop } = facts.supportBolts;
+  const depth = n > 0 ? 2 * eTop + (n - 1) * p : facts.hp;
+  return {
+    ...width,
+    'joint.plate.depth': depth > 0 ? round(depth) : at(220, '9'),
+    'joint.plate.top': facts.yp > 0 ? round(facts.yp) : at(60, '2-1/2'),
+  };
+};
 
 /** Legs that take the bolts with an edge of the usual size beyond them. */
 const cleat = (facts: Facts | undefined, at: Size, round: (mm: number) => string): Texts => ({
@@ -71,7 +81,7 @@ export const jointProposals = (
   round: (mm: number) => string,
 ): Texts => {
   const joined = joinedIn(entry);
-  const { fitting, weld, endPlate } = joined;
+  const { kind, fitting, weld, endPlate } = joined;
   const inSupport = {
     ...carried(entry, bolt, ['joint.supportBolts', 'joint.bolts'], 'joint.supportBolts'),
     'joint.supportBolts.crossCentres': at(140, '5-1/2'),
@@ -83,7 +93,7 @@ export const jointProposals = (
   };
   return {
     ...carried(entry, steel, kinds, fitting),
-    ...(endPlate ? plate(facts, at, round) : edges(entry, joined, at)),
+    ...(endPlate ? plate(kind, facts, at, round) : edges(entry, joined, at)),
     ...(joined.cleat && cleat(facts, at, round)),
     ...(joined.supportBolts && inSupport),
     ...(joined.webBolts && webBolts(entry, facts, at, round)),

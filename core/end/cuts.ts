@@ -50,21 +50,24 @@ const cutAt = (shape: Shape, cut: 'top' | 'bottom' | 'both', c: number, dc: numb
   };
 };
 
+const teeTopCut = (section: Section, { g, ct, dt }: Copes): CutFacts =>
+  cutAt(cutShape(section, dt, 0), 'top', ct, dt, g);
+const teeBottomCut = (section: Section, { g, cb, db }: Copes): CutFacts =>
+  cutAt(cutShape(section, 0, db), 'bottom', cb, db, g);
+
 /**
  * The sections behind the copes: a tee behind a single cope; the web cut at both edges at the shorter cope's face,
  * and the tee beyond it at the longer one's where the lengths differ.
  */
 export const cutsOf = (section: Section, copes: Copes): { rectangle: CutFacts; tee: CutFacts } => {
   const { g, ct, dt, cb, db } = copes;
-  const top = () => cutAt(cutShape(section, dt, 0), 'top', ct, dt, g);
-  const bottom = () => cutAt(cutShape(section, 0, db), 'bottom', cb, db, g);
   if (dt > 0 && db > 0) {
     const [c, dc] = ct <= cb ? [ct, dt] : [cb, db];
     const rectangle = cutAt(cutShape(section, dt, db), 'both', c, dc, g);
     if (ct === cb) return { rectangle, tee: noCut };
-    return { rectangle, tee: ct > cb ? top() : bottom() };
+    return { rectangle, tee: ct > cb ? teeTopCut(section, copes) : teeBottomCut(section, copes) };
   }
-  if (dt > 0) return { rectangle: noCut, tee: top() };
-  if (db > 0) return { rectangle: noCut, tee: bottom() };
+  if (dt > 0) return { rectangle: noCut, tee: teeTopCut(section, copes) };
+  if (db > 0) return { rectangle: noCut, tee: teeBottomCut(section, copes) };
   return { rectangle: noCut, tee: noCut };
 };

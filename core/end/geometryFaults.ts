@@ -39,20 +39,29 @@ export const copeFaults = (end: End, { h }: Section): Fault[] => {
   ];
 };
 
+/** Bolts in a line that run into each other, or whose spacing is not told; `hole`: diameter, mm. */
+const spacingFault = (
+  end: End,
+  line: { readonly count: number | undefined; readonly value: number | undefined; readonly path: string },
+  hole: number,
+  code: string,
+): Fault | undefined => {
+  const { count = 0, value, path } = line;
+  if (count < 2 || hole === 0) return undefined;
+  if (value === undefined) return fault('missing', path, null, 'number');
+  return value * lengthSize(end) <= hole + NOISE ? fault(code, path, value, { above: inFile(end)(hole) }) : undefined;
+};
+
 /** Rows and columns that are not told, or that run into each other; `holes`: diameters in web and support, mm, 0 where there are none. */
 export const patternFaults = (end: End, holes: { readonly web: number; readonly support: number }): Fault[] => {
-  const k = lengthSize(end);
-  const file = inFile(end);
-  const found: Fault[] = [];
-  const spaced = (count: number, value: number | undefined, path: string, hole: number, code: string) => {
-    if (count < 2 || hole === 0) return;
-    if (value === undefined) found.push(fault('missing', path, null, 'number'));
-    else if (value * k <= hole + NOISE) found.push(fault(code, path, value, { above: file(hole) }));
-  };
   const bolts = webBoltsOf(end.joint)?.bolts;
-  spaced(bolts?.rows ?? 0, bolts?.pitch, 'joint.bolts.pitch', holes.web, 'rows-overlap');
-  spaced(bolts?.columns ?? 0, bolts?.gauge, 'joint.bolts.gauge', holes.web, 'columns-overlap');
   const inSupport = supportBoltsOf(end.joint);
-  spaced(inSupport?.rows ?? 0, inSupport?.pitch, 'joint.supportBolts.pitch', holes.support, 'rows-overlap');
-  return found;
+  const rows = { count: bolts?.rows, value: bolts?.pitch, path: 'joint.bolts.pitch' };
+  const columns = { count: bolts?.columns, value: bolts?.gauge, path: 'joint.bolts.gauge' };
+  const supportRows = { count: inSupport?.rows, value: inSupport?.pitch, path: 'joint.supportBolts.pitch' };
+  return [
+    spacingFault(end, rows, holes.web, 'rows-overlap'),
+    spacingFault(end, columns, holes.web, 'columns-overlap'),
+    spacingFault(end, supportRows, holes.support, 'rows-overlap'),
+  ].filter((one) => one !== undefined);
 };

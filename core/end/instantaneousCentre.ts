@@ -58,6 +58,12 @@ const balance = ({ n, m, p, q }: Pattern, l0: number, { mu, lambda, slip }: Bolt
   return { vertical, moment };
 };
 
+/** Positive while the centre is too near: the bolts then hold more moment about it than the load brings. */
+const excess = (pattern: Pattern, e: number, curve: BoltCurve, l0: number): number => {
+  const { vertical, moment } = balance(pattern, l0, curve);
+  return moment - (e + l0) * vertical;
+};
+
 /** Share of the distance within which the centre is known. */
 const CLOSE = 1e-13;
 
@@ -66,27 +72,22 @@ const CLOSE = 1e-13;
  * right angles to its radius and grown by the curve, balance the load. Kept between two bounds; e > 0 and two bolts or more.
  */
 export const instantaneousCentre = (pattern: Pattern, e: number, curve: BoltCurve = boltCurve): CentreFound => {
-  // Positive while the centre is too near: the bolts then hold more moment about it than the load brings.
-  const excess = (l0: number): number => {
-    const { vertical, moment } = balance(pattern, l0, curve);
-    return moment - (e + l0) * vertical;
-  };
   let near = 0;
-  let atNear = excess(near);
+  let atNear = excess(pattern, e, curve, near);
   let far = Math.hypot((pattern.n - 1) * pattern.p, (pattern.m - 1) * pattern.q);
-  let atFar = excess(far);
+  let atFar = excess(pattern, e, curve, far);
   while (atFar > 0 && far < 1e9) {
     near = far;
     atNear = atFar;
     far *= 2;
-    atFar = excess(far);
+    atFar = excess(pattern, e, curve, far);
   }
   let kept = 0;
   for (let turn = 0; turn < 200 && far - near > CLOSE * far && atFar !== 0; turn += 1) {
     // The chord's root; every third turn the middle, so that the bounds close in whatever the curve.
     const chord = near + ((far - near) * atNear) / (atNear - atFar);
     const l0 = turn % 3 < 2 && chord > near && chord < far ? chord : (near + far) / 2;
-    const found = excess(l0);
+    const found = excess(pattern, e, curve, l0);
     // A bound that stays twice counts for half (the Illinois rule), else the chord would creep.
     if (found > 0) {
       near = l0;

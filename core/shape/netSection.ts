@@ -22,26 +22,36 @@ const holeTop = ({ first, pitch, diameter }: Holes, i: number, before: number): 
 const holeFoot = ({ first, pitch, diameter }: Holes, i: number, most: number): number =>
   Math.min(first + i * pitch + diameter / 2, most);
 
+/** Area, first and second moment about the section's top of what was laid so far. */
+interface Moments {
+  area: number;
+  first: number;
+  second: number;
+}
+
+/** Lays a rectangle of that width between two levels; a negative width takes it out. */
+const lay = (sum: Moments, width: number, a: number, z: number): void => {
+  const part = width * (z - a);
+  sum.area += part;
+  sum.first += (part * (z + a)) / 2;
+  sum.second += (part * (z * z + z * a + a * a)) / 3;
+};
+
 /** Elastic modulus of a cut I with a column of holes out of its web, to the farther edge, mm³; 0 where the holes leave nothing. */
 export const netModulus = ({ h, b, tf, tw, from, to }: PlainCut, holes: Holes): number => {
-  let [area, first, second] = [0, 0, 0];
-  const add = (width: number, a: number, z: number): void => {
-    const part = width * (z - a);
-    area += part;
-    first += (part * (z + a)) / 2;
-    second += (part * (z * z + z * a + a * a)) / 3;
-  };
+  const sum = { area: 0, first: 0, second: 0 };
   const [webTop, webFoot] = [from > 0 ? from : tf, to < h ? to : h - tf];
-  if (from === 0) add(b, 0, tf);
-  if (to === h) add(b, h - tf, h);
-  add(tw, webTop, webFoot);
+  if (from === 0) lay(sum, b, 0, tf);
+  if (to === h) lay(sum, b, h - tf, h);
+  lay(sum, tw, webTop, webFoot);
   let before = webTop;
   for (let i = 0; i < holes.count; i += 1) {
     const [a, z] = [holeTop(holes, i, before), holeFoot(holes, i, webFoot)];
     if (z <= a) continue;
-    add(-tw, a, z);
+    lay(sum, -tw, a, z);
     before = z;
   }
+  const { area, first, second } = sum;
   if (!(area > 0)) return 0;
   const centroid = first / area;
   return Math.max(0, second - first * centroid) / Math.max(centroid - from, to - centroid);

@@ -152,6 +152,7 @@ export const commonwealth: Words = {
     'cope-longer-than-method': 'the notch is longer than the method covers, 2 h',
     'cope-deeper-than-method': 'the notch is deeper than the method covers',
     'weld-leg-below-least': 'the weld leg is below the least for this thickness',
+    'weld-above-edge': 'the weld leg is above the most for this thickness',
     coped: 'notched',
     'one-bolt': 'one bolt alone holds no moment',
     'nothing-left': 'nothing is left to resist it',

@@ -48,7 +48,6 @@ const further: Pick<Words, 'reasons' | 'notes'> = {
     'bolts-first': 'the plies are too thick for the bolts to plough',
     ploughing: 'the bolts plough a thin ply before they break',
     'no-end-plate': 'no end plate in this joint',
-    'weld-above-edge': 'the weld leg is larger than the edge it runs along allows',
     'one-cleat': 'the bolts of one cleat stand beside the web: the rules have pairs and end plates only',
     'cleats-only': 'a rule for cleats',
     'end-plates-only': 'a rule for end plates',

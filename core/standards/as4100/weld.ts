@@ -14,7 +14,7 @@ import {
   times,
 } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
-import { leastLeg, legBelow } from '../methods/leastLeg.ts';
+import { leastLeg, legAboveEdge, legBelow } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiW } from './factors.ts';
 import { fuw } from './given.ts';
@@ -74,7 +74,7 @@ export const weld: StrengthRule = {
         'elastic line: shear, and bending at its ends',
       ),
       resistance: filletStrength(hp),
-      limits: [belowLeast],
+      limits: [belowLeast, legAboveEdge],
     },
   ],
 };

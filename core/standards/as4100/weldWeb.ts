@@ -2,6 +2,7 @@ import { fullDepthPlate, type Gate } from '../../end/gates.ts';
 import { flag, hp, k, tw, V } from '../../end/given.ts';
 import { legWeldForce, legWeldLength } from '../../end/weldGroup.ts';
 import { over, pick, step, times } from '../../formula/tree.ts';
+import { legAboveEdge } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phi } from './factors.ts';
 import { fyw } from './given.ts';
@@ -26,7 +27,7 @@ export const weldWeb: StrengthRule = {
       load: 'V',
       demand: force,
       resistance: filletStrength(length),
-      limits: [fullDepthPlate, belowLeast],
+      limits: [fullDepthPlate, belowLeast, legAboveEdge],
     },
     {
       of: 'web',

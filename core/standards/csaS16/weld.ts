@@ -3,7 +3,7 @@ import { supportLegWeldForce } from '../../end/weldGroup.ts';
 import { least, over, pick, plus, root, squared, step, type Tree, times } from '../../formula/tree.ts';
 import type { Stress } from '../../units/dimension.ts';
 import { notCleat, ofCleat } from '../methods/kinds.ts';
-import { leastLeg, legBelow } from '../methods/leastLeg.ts';
+import { leastLeg, legAboveEdge, legBelow } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiW } from './factors.ts';
 import { Fup, Fus } from './given.ts';
@@ -59,7 +59,7 @@ export const weld: StrengthRule = {
       demand: supportLegWeldForce,
       resistance: filletLine,
       off: [notCleat],
-      limits: [legBelow(leastLegSize)],
+      limits: [legBelow(leastLegSize), legAboveEdge],
     },
   ],
 };

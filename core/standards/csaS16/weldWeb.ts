@@ -3,7 +3,7 @@ import { k, tw, V } from '../../end/given.ts';
 import { legWeldForce } from '../../end/weldGroup.ts';
 import { least, step, times } from '../../formula/tree.ts';
 import { notCleat, ofCleat } from '../methods/kinds.ts';
-import { legBelow } from '../methods/leastLeg.ts';
+import { legAboveEdge, legBelow } from '../methods/leastLeg.ts';
 import { webWeldLength } from '../methods/webWeldLength.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phi } from './factors.ts';
@@ -43,7 +43,7 @@ export const weldWeb: StrengthRule = {
       demand: legWeldForce,
       resistance: filletLine,
       off: [notCleat],
-      limits: [legBelow(leastLegSize)],
+      limits: [legBelow(leastLegSize), legAboveEdge],
     },
     {
       of: 'web',

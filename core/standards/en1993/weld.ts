@@ -19,6 +19,7 @@ import {
   times,
 } from '../../formula/tree.ts';
 import type { Pure, Stress } from '../../units/dimension.ts';
+import { legAboveEdge } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { upTo } from './bound.ts';
 import { gammaM2 } from './factors.ts';
@@ -71,6 +72,7 @@ export const weldLimits: readonly Limit[] = [
   { when: atMost(fullLength, mm(0)), reason: 'weld-too-short', always: true, noNumber: true },
   { when: below(throat, mm(3)), reason: 'weld-throat-below-least', always: false },
   { when: below(fullLength, most(mm(30), times(6, throat))), reason: 'weld-too-short', always: false },
+  legAboveEdge,
 ];
 
 /** How a cleat welded to its support turns with the end, no rule says. */

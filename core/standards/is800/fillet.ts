@@ -2,7 +2,7 @@ import type { Limit } from '../../end/gates.ts';
 import { leg } from '../../end/given.ts';
 import { atMost, below, constant, minus, over, pick, root, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
-import { leastLeg, legBelow } from '../methods/leastLeg.ts';
+import { leastLeg, legAboveEdge, legBelow } from '../methods/leastLeg.ts';
 import { gmw } from './factors.ts';
 
 export const source = { clause: '10.5', basis: 'seen' } as const;
@@ -40,9 +40,10 @@ const sizeLimits: readonly Limit[] = [
     ),
   ),
   { when: below(throat, mm(3)), reason: 'thin-throat', always: false },
+  legAboveEdge,
 ];
 
-/** A weld too short, or a leg below the least for the thicker part. */
+/** A weld too short, or a leg below the least for the thicker part, or above what the edge of a cleat has room for. */
 export const limitsOf = (length: Tree<Length>): readonly Limit[] => [
   { when: atMost(length, mm(0)), reason: 'short-weld', always: true, noNumber: true },
   { when: below(length, times(4, leg)), reason: 'short-weld', always: true },

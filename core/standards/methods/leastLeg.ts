@@ -34,3 +34,10 @@ export const legBelow = (least: Tree<Length>): Limit => ({
   reason: 'weld-leg-below-least',
   always: false,
 });
+
+/** A fillet along the toe of a cleat's leg, whose edge has no room for more than the cleat's thickness: a larger one refers where it would hold. */
+export const legAboveEdge: Limit = {
+  when: flag('a leg above the thickness of a cleat', (f) => f.legWeb > 0 && f.leg > f.tp + NOISE),
+  reason: 'weld-above-edge',
+  always: false,
+};

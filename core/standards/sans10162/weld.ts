@@ -2,7 +2,7 @@ import { hp, leg, V, Xu, z } from '../../end/given.ts';
 import { supportLegWeldForce } from '../../end/weldGroup.ts';
 import { over, plus, root, squared, step, times } from '../../formula/tree.ts';
 import { notCleat, ofCleat } from '../methods/kinds.ts';
-import { leastLeg, legBelow } from '../methods/leastLeg.ts';
+import { leastLeg, legAboveEdge, legBelow } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phiW } from './factors.ts';
 
@@ -48,7 +48,7 @@ export const weld: StrengthRule = {
       demand: supportLegWeldForce,
       resistance: filletLine,
       off: [notCleat],
-      limits: [legBelow(least)],
+      limits: [legBelow(least), legAboveEdge],
     },
   ],
 };

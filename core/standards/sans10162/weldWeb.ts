@@ -3,7 +3,7 @@ import { fy, k, tw, V } from '../../end/given.ts';
 import { legWeldForce } from '../../end/weldGroup.ts';
 import { step, times } from '../../formula/tree.ts';
 import { notCleat, ofCleat } from '../methods/kinds.ts';
-import { legBelow } from '../methods/leastLeg.ts';
+import { legAboveEdge, legBelow } from '../methods/leastLeg.ts';
 import { webWeldLength } from '../methods/webWeldLength.ts';
 import type { StrengthRule } from '../standard.ts';
 import { phi } from './factors.ts';
@@ -38,7 +38,7 @@ export const weldWeb: StrengthRule = {
       demand: legWeldForce,
       resistance: filletLine,
       off: [notCleat],
-      limits: [legBelow(least)],
+      limits: [legBelow(least), legAboveEdge],
     },
     {
       of: 'web',

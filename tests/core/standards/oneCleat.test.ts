@@ -11,6 +11,7 @@ type Json = Record<string, unknown>;
 const endOf = (name: string): Json => goodEnds().find((one) => one.name === name)!.end;
 const single = endOf('single-cleat');
 const welded = endOf('double-cleat-support-welded');
+const webWelded = endOf('double-cleat-web-welded');
 
 const checkOf = (id: string, end: Json, change: Json, check: string): Check =>
   reportOf(underStandard(changed(end, change), standards[id]!), false).checks.find((one) => one.id === check)!;
@@ -47,5 +48,19 @@ describe('one cleat alone', () => {
     const { reactionAtFailure: one } = checkOf('is-800', welded, { joint: { kind: 'single-cleat' } }, 'weld');
     const used = (arm: number) => Math.min(Math.hypot((6 * arm) / 208, Math.sqrt(3)), (6 * arm) / 208 + 1);
     expect(two! / one!).toBeCloseTo((2 * used(93.95)) / used(90), 9);
+  });
+});
+
+describe('a fillet along the toe of a cleat', () => {
+  test.each(Object.keys(standards))('%s: larger than the cleat is thick it refers where it would hold', (id) => {
+    const toSupport = (leg: number) => ({ reaction: 40, joint: { cleat: { thickness: 8, supportWeld: { leg } } } });
+    const toWeb = (leg: number) => ({ reaction: 40, joint: { cleat: { thickness: 8, webWeld: { leg } } } });
+    const reasons = (leg: number) => [
+      checkOf(id, welded, toSupport(leg), 'weld').reason,
+      checkOf(id, webWelded, toWeb(leg), 'weld-web').reason,
+    ];
+    expect(reasons(8.5)).toEqual(['weld-above-edge', 'weld-above-edge']);
+    expect(reasons(6)).not.toContain('weld-above-edge');
+    expect(checkOf(id, welded, { ...toSupport(8.5), reaction: 5000 }, 'weld').state).not.toBe('holds');
   });
 });

@@ -3,13 +3,14 @@ import { flag, supportBolts, V, Vo } from '../../end/given.ts';
 import { oneLine } from '../../end/supportGroup.ts';
 import { least, minus, not, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
-import { onSupport, sharedWeb } from '../methods/supportShear.ts';
+import { notTold } from '../methods/supportBearing.ts';
+import { noSupport, onSupport, sharedWeb } from '../methods/supportShear.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { sumAsked } from './bolts.ts';
 import { clause } from './clauses.ts';
 import { type Method, rupture } from './method.ts';
 import { alike, Cs, rLeg, rLegSide, rLegTop, rSupport, rvs } from './supportBolt.ts';
-import { noSupport, notTold, oneLineOpposite, supportBoltLimits, supportHoleLimits, told } from './supportGates.ts';
+import { oneLineOpposite, supportBoltLimits, supportHoleLimits, told } from './supportGates.ts';
 
 const { n, lines } = supportBolts;
 const shear = clause('J3.7');

@@ -1,17 +1,9 @@
-import { type Gate, type Limit, supportBoltNotListed, wideSupportHole } from '../../end/gates.ts';
-import { flag } from '../../end/given.ts';
+import { type Limit, supportBoltNotListed, wideSupportHole } from '../../end/gates.ts';
 import { oneLine, oneRowOfSupport } from '../../end/supportGroup.ts';
 import { all, not } from '../../formula/tree.ts';
-import { sharedWeb } from '../methods/supportShear.ts';
+import { notTold } from '../methods/supportBearing.ts';
+import { noSupport, sharedWeb } from '../methods/supportShear.ts';
 
-export const noSupport: Gate = {
-  when: flag('', (f) => f.supportKind === 'none', 'no support given'),
-  reason: 'no-support',
-};
-export const notTold: Gate = {
-  when: flag('', (f) => f.ts === 0 || f.fus === 0, 'thickness or grade of the support not told'),
-  reason: 'support-not-told',
-};
 /** The support's own ply is known. */
 export const told = all(not(noSupport.when), not(notTold.when));
 

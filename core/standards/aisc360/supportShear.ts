@@ -1,12 +1,12 @@
 import { fullDepthPlate, noSupportBolts } from '../../end/gates.ts';
 import { hp, supportBolts, ts } from '../../end/given.ts';
 import { minus, most, pick, step, times } from '../../formula/tree.ts';
-import { onSupport } from '../methods/supportShear.ts';
+import { notTold } from '../methods/supportBearing.ts';
+import { noSupport, onSupport } from '../methods/supportShear.ts';
 import type { StrengthRule } from '../standard.ts';
 import { clause } from './clauses.ts';
 import { Fus, noLength } from './given.ts';
 import { type Method, rupture } from './method.ts';
-import { noSupport, notTold } from './supportGates.ts';
 
 const source = clause('J4.2, J4-4');
 const net = most(minus(hp, times(supportBolts.n, supportBolts.dn)), noLength);

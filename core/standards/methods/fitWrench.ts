@@ -1,9 +1,18 @@
-import { type Gate, noSupportBolts, noWebHoles, singleColumn, singleRow } from '../../end/gates.ts';
+import {
+  type Gate,
+  noSupportBolts,
+  noWebHoles,
+  oneSupportRow,
+  pairOfCleats,
+  singleColumn,
+  singleRow,
+} from '../../end/gates.ts';
 import { flag, given, h, leg, n, p, q, r, supportBolts, tf, tp, tw, y1, yp, z1 } from '../../end/given.ts';
 import { minus, over, plus, step, type Tree, times } from '../../formula/tree.ts';
 import { wrenchRoom } from '../../steel/wrenchRoom.ts';
 import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
+import { notFinPlate } from './kinds.ts';
 import { bottomCut, headsApart, supportBottomCut, supportTopCut, topCut } from './wrenchGates.ts';
 
 /** Practice, no clause: an end without room for the wrench is referred, never failed, for another tool may do. */
@@ -28,15 +37,8 @@ const roomOf = ({ socket, spare, corners }: typeof inWeb) => {
 const web = roomOf(inWeb);
 const support = roomOf(inSupport);
 
-const noFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'no-weld' };
-const cleatsBothSides: Gate = { when: flag('', (f) => f.k > 1, 'a pair of cleats'), reason: 'pair-of-cleats' };
 const noCleat: Gate = { when: flag('', (f) => f.legWeb === 0, 'no cleat'), reason: 'no-cleat' };
 const cleat: Gate = { when: flag('', (f) => f.legWeb > 0, 'a cleat'), reason: 'cleats' };
-const oneSupportRow: Gate = {
-  when: flag('', (f) => f.supportBolts.n < 2, 'one row of support bolts'),
-  reason: 'single-row',
-};
-
 const root = plus(tf, r);
 const toTop = step('y_w', minus(y1, root), source, 'from the first row to the root of the top flange');
 const toBottom = step(
@@ -82,8 +84,8 @@ export const fitWrench: FitRule = {
   parts: [
     { of: 'top flange', given: toTop, least: web.toFace, off: [noWebHoles, topCut] },
     { of: 'bottom flange', given: toBottom, least: web.toFace, off: [noWebHoles, bottomCut] },
-    { of: 'support, web side', given: z1, least: web.toFace, off: [noWebHoles, cleatsBothSides] },
-    { of: 'support, plate side', given: toWeld, least: web.toFace, off: [noFinPlate] },
+    { of: 'support, web side', given: z1, least: web.toFace, off: [noWebHoles, pairOfCleats] },
+    { of: 'support, plate side', given: toWeld, least: web.toFace, off: [notFinPlate] },
     { of: 'support leg', given: toOtherLeg, least: web.toFace, off: [noWebHoles, noCleat] },
     { of: 'rows', given: p, least: web.toBolt, off: [noWebHoles, singleRow] },
     { of: 'columns', given: q, least: web.toBolt, off: [noWebHoles, singleColumn] },

@@ -5,12 +5,8 @@ import { all, not, type Source, step, type Tree, times } from '../../formula/tre
 import type { Force } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { notCleat, ofCleat } from './kinds.ts';
-import { onSupport, sharedWeb } from './supportShear.ts';
+import { noSupport, onSupport, sharedWeb } from './supportShear.ts';
 
-export const noSupport: Gate = {
-  when: flag('no support is given', (f) => f.supportKind === 'none'),
-  reason: 'no-support',
-};
 export const notTold: Gate = {
   when: flag('thickness or grade of the support not told', (f) => f.ts === 0 || f.fus === 0),
   reason: 'support-not-told',

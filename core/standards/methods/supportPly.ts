@@ -4,8 +4,8 @@ import { oneRowOfSupport, supportForce, supportUpright } from '../../end/support
 import { least, pick, type Source, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
 import type { Way } from '../standard.ts';
-import { noSupport, notTold, oneLineOpposite, oneSupportBolt, single, twoLines } from './supportBearing.ts';
-import { onSupport } from './supportShear.ts';
+import { notTold, oneLineOpposite, oneSupportBolt, single, twoLines } from './supportBearing.ts';
+import { noSupport, onSupport } from './supportShear.ts';
 
 /** One bolt of a single line holds no moment: no force on it can be stated. */
 export const oneSupportBoltRefers: Limit = { when: oneSupportBolt, reason: 'one-bolt', always: true, noNumber: true };

@@ -4,7 +4,10 @@ import { minus, not, plus, type Source, step, type Tree } from '../../formula/tr
 import type { Force } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 
-const noSupport: Gate = { when: flag('no support is given', (f) => f.supportKind === 'none'), reason: 'no-support' };
+export const noSupport: Gate = {
+  when: flag('no support is given', (f) => f.supportKind === 'none'),
+  reason: 'no-support',
+};
 const columnFlange: Gate = {
   when: flag("fixed to a column's flange", (f) => f.supportKind === 'column-flange'),
   reason: 'support-flange',

@@ -23,10 +23,13 @@ const notCopedAbove = gate('not coped above', 'no-top-cope', (f) => f.dt === 0);
 const notCopedBelow = gate('not coped below', 'no-bottom-cope', (f) => f.db === 0);
 const notWelded = gate('the web is not welded', 'web-bolted', (f) => f.weldTo !== 'web');
 
+const notBoltedAngle = gate('no angle bolted to the web', 'no-cleat', (f) => f.legWeb === 0 || f.n === 0);
+
 const root = step('t_f + r', plus(tf, r), source);
 const foot = step('y_q', minus(h, plus(yp, hp)), source, 'foot of the plate, from below');
 
-/** A plate of half the clear web's depth at least, between the fillets where the flanges stand; what is welded to the web on the cut web. */
+/** A plate of half the clear web's depth at least, between the fillets where the flanges stand; what is welded to the web on the cut web.
+ * An angle bolted to the web that stands past a cope's edge comes near the support's flange: it refers. */
 export const fitPlateDepth: FitRule = {
   source,
   breach: 'fails',
@@ -41,6 +44,8 @@ export const fitPlateDepth: FitRule = {
     { of: 'bottom', given: foot, least: root, off: [fullDepthPlate, copedBelow] },
     { of: 'top', given: yp, least: dt, off: [fullDepthPlate, notWelded, notCopedAbove] },
     { of: 'bottom', given: foot, least: db, off: [fullDepthPlate, notWelded, notCopedBelow] },
+    { of: 'top', given: yp, least: dt, off: [notBoltedAngle, notCopedAbove], breach: 'refer' },
+    { of: 'bottom', given: foot, least: db, off: [notBoltedAngle, notCopedBelow], breach: 'refer' },
   ],
 };
 

@@ -1,8 +1,9 @@
-import { fullDepthPlate, type Gate, noWebWeld } from '../../end/gates.ts';
+import { fullDepthPlate, type Gate, noWebHoles, noWebWeld } from '../../end/gates.ts';
 import { ct, db, dt, flag, g, h, hp, r, rb, rt, support, tf, yp } from '../../end/given.ts';
 import { atMost, constant, minus, most, over, pick, plus, step, times } from '../../formula/tree.ts';
 import type { FitRule } from '../standard.ts';
 import { upTo } from './bound.ts';
+import { notCleat } from './kinds.ts';
 import { guide, memory } from './sources.ts';
 
 const holes = memory('EN 1090-2');
@@ -28,7 +29,8 @@ const noPlate: Gate = {
 
 /**
  * The plate, or cleat, is deep enough to hold the end against twisting, and lies on the flat of the web beside a flange that is not cut; what
- * is welded along the web lies on what a cope leaves. An end plate of the full depth covers the flanges.
+ * is welded along the web lies on what a cope leaves. A bolted cleat past the cut edge comes near the flange of the support: it refers. An end
+ * plate of the full depth covers the flanges.
  */
 export const fitPlateDepth: FitRule = {
   source: guide,
@@ -39,6 +41,8 @@ export const fitPlateDepth: FitRule = {
     { of: 'bottom', given: foot, least: flangeAndRoot, off: [noPlate, fullDepthPlate, bottomCut] },
     { of: 'top, welded', given: yp, least: dt, off: [noWebWeld, fullDepthPlate, noTop] },
     { of: 'bottom, welded', given: foot, least: db, off: [noWebWeld, fullDepthPlate, noBottom] },
+    { of: 'top, cleat', given: yp, least: dt, breach: 'refer', off: [notCleat, noWebHoles, noTop] },
+    { of: 'bottom, cleat', given: foot, least: db, breach: 'refer', off: [notCleat, noWebHoles, noBottom] },
   ],
 };
 

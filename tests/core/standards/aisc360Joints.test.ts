@@ -367,6 +367,12 @@ describe('fit of angles', () => {
     expect(stateOf(pair, 'fit-setback', { setback: 1.1, joint: { cleat: { legWeb: 5 } } })).toBe('refer, too-much');
   });
 
+  test('above the edge of the cope, where the flange of the support is near, they refer', () => {
+    // top of the angles 3.2 - 1.25 = 1.95, the cope 2 deep
+    expect(stateOf(pair, 'fit-plate-depth', { joint: { firstRow: 3.2 } })).toBe('refer, too-little');
+    expect(stateOf(pair, 'fit-plate-depth')).toBe('holds');
+  });
+
   test('a leg that reaches farther than the cope stays clear of the fillet', () => {
     const high = { joint: { firstRow: 2.1, supportBolts: { topEdge: 1.25 } }, top: { depth: 0.8 } };
     expect(stateOf(pair, 'fit-plate-depth', high)).toBe('holds');

@@ -8,6 +8,7 @@ import type { Outcome, SaidFault } from '../../../core/check/report.ts';
 import { joints } from '../../../core/joints/index.ts';
 import { standards } from '../../../core/standards/index.ts';
 import { listSections } from '../../../core/steel/findSection.ts';
+import { goodEnds } from '../../support/published.ts';
 import { goodEndsUnder } from '../../support/underStandard.ts';
 import { end } from '../sheet/ends.ts';
 import { inches } from '../sheet/twoStandards.ts';
@@ -28,11 +29,27 @@ const faultsOf = (input: unknown): readonly SaidFault[] => {
 const cellsOf = (card: Card, section: string): readonly Cell[] =>
   card.sections.find((one) => one.section === section)?.cells ?? [];
 
-/** A full check of the template's end in this section with so many rows, written by hand into its JSON. */
+interface Template {
+  beam: Json;
+  joint: { bolts?: Bolts; supportBolts?: Bolts; plate?: Json; cleat?: Json };
+  reaction: unknown;
+}
+interface Bolts {
+  rows: number;
+  pitch: number;
+}
+
+/** A full check of the template's end in this section with so many rows, written by hand into its JSON: web and support have as many. */
 const fullCheck = (template: unknown, section: string, rows: number, reaction: number): Outcome => {
-  const one = structuredClone(template) as { beam: Json; joint: { bolts: Json }; reaction: unknown };
+  const one = structuredClone(template) as Template;
+  const { bolts, supportBolts, plate, cleat } = one.joint;
+  for (const fitting of [plate, cleat]) {
+    if (supportBolts && typeof fitting?.depth === 'number')
+      fitting.depth += (rows - supportBolts.rows) * supportBolts.pitch;
+  }
+  if (bolts) bolts.rows = rows;
+  if (supportBolts) supportBolts.rows = rows;
   one.beam.section = section;
-  one.joint.bolts.rows = rows;
   one.reaction = reaction;
   return checkEnd(one);
 };
@@ -110,6 +127,27 @@ describe('a cell of the shop card', () => {
       const capacity = 'report' in full ? full.report.capacity! : 0;
       expect(cells[0]).toMatchObject({ verdict: 'holds', reaction: Math.floor(capacity * 10) / 10 });
     }
+  });
+
+  test.each([
+    // Top edge, (n - 1) pitches of 70, bottom edge; the end plate and the welded cleat say their depth of 220 with three rows.
+    ['double-cleat', 'UB 533x210x92', 4, 290],
+    ['double-cleat', 'UB 406x178x60', 3, 220],
+    ['single-cleat', 'UB 533x210x92', 4, 290],
+    ['double-cleat-web-welded', 'UB 533x210x92', 4, 290],
+    ['double-cleat-web-welded', 'UB 406x178x60', 3, 220],
+    ['end-plate', 'UB 533x210x92', 4, 290],
+    ['end-plate', 'UB 406x178x60', 3, 220],
+  ] as const)('of %s in %s with %i rows, %i deep, holds in a full check at its number and not 1 kN on', (...asked) => {
+    const [name, section, rows, deep] = asked;
+    const template = goodEnds().find((one) => one.name === name)!.end;
+    const { plateDepths, sections } = made({ end: template, sections: [section], rows: [rows] });
+    expect(plateDepths).toEqual([deep]);
+    const cell = sections[0]!.cells[0]!;
+    if (cell.verdict !== 'holds') throw new Error(JSON.stringify(cell));
+    const at = fullCheck(template, section, rows, cell.reaction);
+    expect('report' in at && [at.report.verdict, at.report.governing]).toEqual(['holds', cell.governing]);
+    expect(verdictOf(fullCheck(template, section, rows, cell.reaction + 1))).toBe('fails');
   });
 
   test('has no number where the geometry cannot be, and says so', () => {

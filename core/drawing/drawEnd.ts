@@ -8,7 +8,6 @@ import { drawnLength } from './drawnLength.ts';
 import { before, fittingFromSide } from './fitting.ts';
 import { elevation } from './outline.ts';
 import { plateBox } from './plate.ts';
-import { sentences } from './sentences.ts';
 import { forceUnit, length, reaction } from './sizes.ts';
 import { faceSpan, supportBox, supportSection } from './support.ts';
 import { weldFromSide } from './weldMarks.ts';
@@ -56,7 +55,6 @@ export const drawEnd = (facts: Facts, words: DrawingWords): Drawing => {
       line: [{ text: 'support face', role: 'second' }],
     },
     reaction: reactionLine(facts, words),
-    sentences: sentences(facts, words),
   };
 };
 

@@ -167,12 +167,10 @@ export interface View {
   readonly reaction?: Line;
 }
 
-/** The end from the side, and the whole end in words. */
+/** The end from the side, with the support's face and the reaction. */
 export interface Drawing extends View {
   readonly face: NonNullable<View['face']>;
   readonly reaction: Line;
-  /** The drawing in sentences, for those who cannot see it. */
-  readonly sentences: readonly string[];
 }
 
 /** Words beside a part of a failure path. */

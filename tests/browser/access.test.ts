@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { findings, sideways } from './accessible.ts';
 import type { Bench } from './bench.ts';
-import { demoEnd, linkOf } from './demoEnd.ts';
+import { demoEnd, endAt, linkOf } from './demoEnd.ts';
 import { eventually } from './eventually.ts';
 import { onTheBench } from './onTheBench.ts';
 
@@ -153,6 +153,24 @@ describe('the accessibility checker has no serious and no critical finding', () 
       }
     },
   );
+
+  test.each([
+    [1440, 'end-plate'],
+    [390, 'end-plate'],
+    [1440, 'double-cleat'],
+  ])('for an end with two views, its bolts and joint open, %i px wide: %s', async (width, name) => {
+    const bench = await (await visit({ viewport: { width, height: 900 } })).tab(linkOf(endAt(name)));
+    await bench.onSupport.waitFor();
+    await bench.turn('Bolts');
+    expect(await findings(bench)).toEqual([]);
+    await bench.turn('Joint');
+    await bench.rung('Support bolts').click();
+    await bench.page
+      .getByRole('group', { name: /^Support bolts|^Shear of the support bolts/ })
+      .first()
+      .waitFor();
+    expect(await findings(bench)).toEqual([]);
+  });
 
   test('for an end that is not complete, with its list of faults, and for the dialogs', async () => {
     const bench = await (await visit()).tab();

@@ -66,6 +66,11 @@ export class Bench {
     return this.page.getByRole('img', { name: 'The beam end, drawn to scale' });
   }
 
+  /** The view on the support, beside or below the other; none where nothing lies on it. */
+  get onSupport(): Locator {
+    return this.page.getByRole('img', { name: 'What lies on the support, drawn to scale' });
+  }
+
   get ladder(): Locator {
     return this.page.getByRole('list', { name: 'Ways of failing, the weakest last' });
   }

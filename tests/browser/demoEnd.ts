@@ -11,10 +11,12 @@ export const demoEnd: Readonly<Record<string, unknown>> = JSON.parse(
   readFileSync(new URL('../../fixtures/demo/citrus-packhouse.json', import.meta.url), 'utf8'),
 );
 
+/** A good end of the fixtures by the name of its file. */
+export const endAt = (name: string): Readonly<Record<string, unknown>> =>
+  JSON.parse(readFileSync(new URL(`../../fixtures/input/good/${name}.json`, import.meta.url), 'utf8'));
+
 /** An end under a standard whose rules are no part of the first view, with a section that is none either. */
-export const australianEnd: Readonly<Record<string, unknown>> = JSON.parse(
-  readFileSync(new URL('../../fixtures/input/good/as-4100-fin-plate.json', import.meta.url), 'utf8'),
-);
+export const australianEnd = endAt('as-4100-fin-plate');
 
 /** The report on an end, made in Node. */
 export const reportOf = (end: unknown): Report => {

@@ -1,6 +1,8 @@
+import type { Locator } from 'playwright-core';
 import { describe, expect, test } from 'vitest';
+import { sideways } from './accessible.ts';
 import type { Bench } from './bench.ts';
-import { reportOf, rungsOf } from './demoEnd.ts';
+import { endAt, linkOf, reportOf, rungsOf } from './demoEnd.ts';
 import { eventually } from './eventually.ts';
 import { onTheBench } from './onTheBench.ts';
 
@@ -8,6 +10,9 @@ const { visit } = onTheBench();
 
 /** The kinds in the order of their list, from the fin plate of the first visit down. */
 const kinds = ['double-cleat', 'single-cleat', 'end-plate', 'full-end-plate', 'web-bolts'] as const;
+
+const cleats = endAt('double-cleat');
+const endPlate = endAt('end-plate');
 
 interface Saved {
   readonly joint: Readonly<Record<string, unknown>>;
@@ -92,5 +97,60 @@ describe('every kind of joint without a mouse', () => {
     expect(end.support).toMatchObject({ thickness: 8, grade: 'S355JR', otherReaction: 150 });
     await agrees(bench);
     expect((await bench.rungs).map(({ name }) => name)).toContain('Bearing, support bolts');
+  });
+});
+
+/** Where a view stands on the page. */
+const boxOf = async (view: Locator) => {
+  const box = await view.boundingBox();
+  if (!box) throw new Error('the view is not on the page');
+  return box;
+};
+
+/** Lines of a failure path in a view. */
+const pathIn = (view: Locator): Locator => view.locator('.layer-path');
+
+describe('what lies on the support', () => {
+  test('is drawn beside the side view; a fin plate on edge has no such view', async () => {
+    const bench = await (await visit()).tab();
+    expect(await bench.onSupport.count()).toBe(0);
+    await bench.follow(linkOf(cleats));
+    await bench.onSupport.waitFor();
+    await eventually(async () => {
+      const [side, support] = [await boxOf(bench.drawing), await boxOf(bench.onSupport)];
+      return support.x >= side.x + side.width;
+    }).toBe(true);
+  });
+
+  test('carries its sizes as fields: typed over, they count in ladder, drawing and file', async () => {
+    const bench = await (await visit()).tab(linkOf(cleats));
+    await bench.onSupport.waitFor();
+    await bench.type('Cross centres, mm', '150');
+    await bench.type('Pitch of the support bolts, mm', '75');
+    await bench.type('Leg on the support, mm', '110');
+    const { cleat, supportBolts } = (await saved(bench)).joint;
+    expect(supportBolts).toMatchObject({ crossCentres: 150, pitch: 75 });
+    expect(cleat).toMatchObject({ legSupport: 110 });
+    await agrees(bench);
+  });
+
+  test('shows the path of a rung that fails there, and the side view that of a rung in the web', async () => {
+    const bench = await (await visit()).tab(linkOf(cleats));
+    await bench.onSupport.waitFor();
+    await bench.rung('Support bolts').click();
+    await eventually(() => pathIn(bench.onSupport).count()).toBeGreaterThan(0);
+    expect(await pathIn(bench.drawing).count()).toBe(0);
+    await bench.rung('Block tearing, web').click();
+    await eventually(() => pathIn(bench.drawing).count()).toBeGreaterThan(0);
+    expect(await pathIn(bench.onSupport).count()).toBe(0);
+  });
+
+  test.each([390, 320])('stands below the side view on a page %i px wide, and nothing goes sideways', async (width) => {
+    const bench = await (await visit({ viewport: { width, height: 844 } })).tab(linkOf(endPlate));
+    await bench.onSupport.waitFor();
+    const [side, support] = [await boxOf(bench.drawing), await boxOf(bench.onSupport)];
+    expect(support.y).toBeGreaterThanOrEqual(side.y + side.height);
+    expect(support.x + support.width).toBeLessThanOrEqual(width);
+    expect(await sideways(bench)).toBe(0);
   });
 });

@@ -13,6 +13,9 @@ interface ValueProps {
   readonly missing?: string;
 }
 
+/** Whole inches and their fraction stay on one line. */
+const unbroken = (text: string): string => text.replace(/ (?=\d+\/)/, '\u00a0');
+
 /** A value within a sentence of the order: touching it opens its field. Assumed values are marked until they are touched. */
 export const Value = ({ path, text, missing }: ValueProps) => {
   const empty = text === undefined && textOf(entry.value, path) === '';
@@ -20,7 +23,7 @@ export const Value = ({ path, text, missing }: ValueProps) => {
   const open = openLine.value !== null && openLine.value === lineOf(path);
   return (
     <FieldLink path={path} kind="value" class={`${assumed ? 'assumed' : ''}${empty ? ' empty' : ''}`} skipped={open}>
-      {empty ? (missing ?? '?') : (text ?? shown(path))}
+      {empty ? (missing ?? '?') : (text ?? unbroken(shown(path)))}
       {assumed && <span class="unseen"> (assumed)</span>}
     </FieldLink>
   );

@@ -7,7 +7,7 @@ import { shown, stale } from '../ladder/shown.ts';
 import { focused } from '../state/bench.ts';
 import { DrawnLines, DrawnWords } from './Drawn.tsx';
 import { DrawnFields } from './DrawnFields.tsx';
-import { type Figure, figure, path, topOf } from './figure.ts';
+import { type Figure, figure, path, sentences, topOf } from './figure.ts';
 import { BETWEEN, type LaidView, TITLE } from './fitRoom.ts';
 import { measureRoom } from './measureRoom.ts';
 import { type Penned, penned, type ToScreen, toScreen } from './pen.ts';
@@ -25,7 +25,7 @@ export const Piece = () => {
       <div class="piece-frame" ref={frame}>
         {it && <Drawn it={it} />}
       </div>
-      {it && <InWords it={it} />}
+      {it && <InWords />}
     </section>
   );
 };
@@ -116,7 +116,7 @@ const pathOver = ({ laid, over }: LaidView, scale: number): Penned | null =>
   over && penned({ ...over, box: laid.box }, scale, null, 'path');
 
 /** What the drawing shows, said in sentences. */
-const InWords = ({ it }: { it: Figure }) => (
+const InWords = () => (
   <>
     {path.value && (
       <p class="piece-caption">
@@ -126,7 +126,7 @@ const InWords = ({ it }: { it: Figure }) => (
     <details class="piece-words">
       <summary>The piece in words</summary>
       <ul id="piece-sentences">
-        {it.drawing.sentences.map((text) => (
+        {sentences.value.map((text) => (
           <li>{text}</li>
         ))}
       </ul>

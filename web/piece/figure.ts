@@ -21,7 +21,6 @@ const LOOSE = 0.93;
 
 /** The end as drawn and laid out. */
 export interface Figure extends Fit {
-  readonly drawing: Drawing;
   /** Sizes are fields. */
   readonly fields: boolean;
 }
@@ -46,6 +45,13 @@ const onSupport = computed<View | null>(() =>
 
 /** The views there are, the one from the side first. */
 export const views = computed<readonly View[]>(() => [drawing.value, onSupport.value].filter((view) => view !== null));
+
+const say = later(async () => (await import('../../core/drawing/sentences.ts')).sentences);
+
+/** The end in sentences, for those who cannot see it; no part of the first view. */
+export const sentences = computed<readonly string[]>(() =>
+  shown.value && spoken.value ? (say.value?.(shown.value.facts, spoken.value) ?? []) : [],
+);
 
 const drawPath = later(async () => (await import('../../core/drawing/failurePath.ts')).failurePath);
 
@@ -74,13 +80,12 @@ const asBefore = (all: readonly View[], within: Room, over: FailurePath | null):
 /** The drawing in the room there is; null until both are known. */
 export const figure = computed<Figure | null>(() => {
   const { width, height, narrow } = room.value;
-  const piece = drawing.value;
-  if (piece === null || width <= 0) return null;
+  if (views.value.length === 0 || width <= 0) return null;
   const fields = width >= FIELDS_FROM;
   const within: Room = { width, height, narrow, textSize: fields ? TEXT.wide : TEXT.narrow };
   const fit = asBefore(views.value, within, path.value) ?? fitRoom(views.value, within, path.value);
   kept = { ...fit, within };
-  return { drawing: piece, fields, ...fit };
+  return { fields, ...fit };
 });
 
 /** Level at the upper edge of the views, mm: of the highest of those beside each other, or of the first. */

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { endOf, isArc, swept } from '../../../core/drawing/arcs.ts';
 import { drawEnd } from '../../../core/drawing/drawEnd.ts';
 import type { Arc, Point, Stroke } from '../../../core/drawing/drawing.ts';
+import { sentences } from '../../../core/drawing/sentences.ts';
 import { sampleFacts, sampleSupport, sampleWords, variedEnds } from './sampleFacts.ts';
 
 const draw = (name: string) => drawEnd(sampleFacts(variedEnds[name]), sampleWords);
@@ -162,7 +163,7 @@ describe('the drawing of one end', () => {
   });
 
   it('says the drawing in sentences for those who cannot see it', () => {
-    expect(draw('K-207/L').sentences).toEqual([
+    expect(sentences(sampleFacts(variedEnds['K-207/L']), sampleWords)).toEqual([
       'UB 406 × 178 × 60, 406.4 deep, web 7.9, flange 12.8, root radius 10.2. All sizes in millimetres.',
       "The beam runs to the right; its end stands 10 off the support's face.",
       'Top notch 110 long and 45 deep, corner radius 10.',

@@ -1,12 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { endOf } from '../../../core/drawing/arcs.ts';
-import { drawEnd } from '../../../core/drawing/drawEnd.ts';
 import type { Line, View } from '../../../core/drawing/drawing.ts';
 import { layoutDrawing } from '../../../core/drawing/layout.ts';
 import { boxOfViews, layViews } from '../../../core/drawing/layViews.ts';
 import { leastBox } from '../../../core/drawing/leastBox.ts';
 import { drawOnSupport } from '../../../core/drawing/onSupport/drawOnSupport.ts';
+import { sentences } from '../../../core/drawing/sentences.ts';
 import { standards } from '../../../core/standards/index.ts';
 import { viewsOf } from './goldenDrawings.ts';
 import { drawable, endNamed, inTwoViews, type JointName, jointEnd, jointNames } from './jointEnds.ts';
@@ -295,7 +295,7 @@ describe('the symbols of welds', () => {
 describe('cleats and end plates in words', () => {
   const said = (name: JointName): string => {
     const { facts, words } = jointEnd(name);
-    return drawEnd(facts, words).sentences.join(' ');
+    return sentences(facts, words).join(' ');
   };
 
   it('say what stands where', () => {

@@ -1,5 +1,6 @@
 import { CodeWriter } from './codeWriter.ts';
 import { type Flag, type Node, Nodes, type Read } from './nodes.ts';
+import { ownersOf, SHARED } from './ownersOf.ts';
 import type { Program } from './run.ts';
 import type { Condition, Tree } from './tree.ts';
 
@@ -30,10 +31,25 @@ export interface Place {
 
 type Nodal = readonly (Node | undefined)[];
 
+const there = (of: Nodal): Node[] => of.filter((one) => one !== undefined);
+
+/** What more than one formula leans on, by its owner; solvers run where they are needed. */
+const commonOf = (nodes: readonly Node[], owners: Int32Array): ReadonlyMap<number, readonly Node[]> => {
+  const common = new Map<number, Node[]>();
+  for (const node of nodes) {
+    if (node.uses < 2 || node.solved) continue;
+    const owner = owners[node.at]!;
+    const known = common.get(owner);
+    if (known) known.push(node);
+    else common.set(owner, [node]);
+  }
+  return common;
+};
+
 /**
- * Writes groups of formulas as one program, and says where their values stand after a run. What several lean on is worked out once, at the
- * head; a solver runs when it is first needed, and once a run; what only one leans on is worked out behind its gates and within the branch
- * that the facts take. `changing`: the quantity that `after` is asked for at another value.
+ * Writes groups of formulas as one program, and says where their values stand after a run. What several groups lean on is worked out once, at
+ * the head; what several formulas of one group lean on, once behind its gates; what only one leans on, within the branch that the facts take.
+ * A solver runs when it is first needed, and once a run. `changing`: the quantity that `after` is asked for at another value.
  */
 export const programOf = (
   groups: readonly Group[],
@@ -67,16 +83,23 @@ export const programOf = (
   const constants = leaves('literal').map(({ is }) => is as number);
   const given = leaves('given');
   const flags = leaves('flag').map(({ is }) => is as Flag);
-  for (let at = 0; at < run; at += 1) {
-    const node = nodes.all[at]!;
-    if (node.uses > 1 && !node.solved && !cellOf.has(node)) writer.settle(node);
-  }
+  const owners = ownersOf(
+    nodes.all.length,
+    asked.flatMap(({ gates, always }) => [...gates.map(({ when }) => when), ...there(always)]),
+    asked.map(({ of }, at) => there([...of, ...afters[at]!])),
+  );
+  const common = commonOf(nodes.all.slice(0, run), owners);
+  const settle = (owner: number): void => {
+    for (const node of common.get(owner) ?? []) if (!cellOf.has(node)) writer.settle(node);
+  };
+  settle(SHARED);
 
   const values = (of: Nodal) => of.map((one) => one && writer.value(one));
-  const places = asked.map(({ gates, of, always }) => {
+  const places = asked.map(({ gates, of, always }, at) => {
     const free = values(always);
     let cells: Place['of'] = [];
     const gate = writer.behind(gates, () => {
+      settle(at);
       cells = values(of);
     });
     return { gate, of: cells, always: free };

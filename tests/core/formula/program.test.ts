@@ -1,7 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { numberOf } from '../../../core/formula/number.ts';
 import { type Group, programOf } from '../../../core/formula/program.ts';
-import { run } from '../../../core/formula/run.ts';
+import { run, runAgain } from '../../../core/formula/run.ts';
 import {
   all,
   any,
@@ -136,4 +136,40 @@ describe('gates', () => {
     const closed = { gates: [{ when: sawn, closes: true }], of: [times(2, w)], always: [below(t, w)] };
     expect(ran([closed])[0]).toMatchObject({ gate: 0, always: [1] });
   });
+});
+
+describe('what is asked for after a run', () => {
+  const grown = step('g', plus(times(t, w), t));
+  const group: Group = {
+    gates: [{ when: sawn, closes: true }],
+    of: [over(1, grown), root(grown)],
+    always: [],
+    after: [grown, over(solver().tree, t), times(2, w)],
+  };
+  const after = (facts: Plate, value: number) => {
+    const { program, places } = programOf([group], t);
+    run(program, facts as never);
+    const { from, after } = places[0]!;
+    runAgain(program, facts as never, from, value);
+    return after.map((cell) => program.cells[cell!]);
+  };
+
+  test('is worked out at the other value, solvers too', () => {
+    const facts = { ...plate, sawn: false };
+    expect(after(facts, 0.4)).toEqual(group.after!.map((one) => numberOf(one as Tree, { ...facts, t: 0.4 })));
+  });
+
+  test('costs nothing before: the run itself solves nothing for it', () => {
+    const { tree, runs } = solver();
+    const { program } = programOf([{ gates: [], of: [t], always: [], after: [tree] }], t);
+    run(program, plate as never);
+    expect(runs()).toBe(0);
+  });
+});
+
+test('what several formulas of a group lean on stands behind its gates, and what another group leans on too does not', () => {
+  const shared = times(t, w);
+  const gates = [{ when: sawn, closes: true }];
+  const [, open] = ran([{ gates, of: [plus(shared, 1), plus(shared, 2)] }, { of: [plus(shared, 3)] }]);
+  expect(open!.of).toEqual([numberOf(plus(shared, 3), plate)]);
 });

@@ -1,4 +1,5 @@
-import type { Box, Dimension, Point, View } from './drawing.ts';
+import { endOf, middleOf, overAnother, pointOn, startOf } from './dimensionLine.ts';
+import type { Box, Point, View } from './drawing.ts';
 import { layExtensions } from './extensions.ts';
 import { WORDS } from './ground.ts';
 import { intoLanes, type Placed } from './lanes.ts';
@@ -13,6 +14,8 @@ const AWAY = 10;
 const TICK = 0.3;
 const GAP = 0.25;
 const ON = 0.85;
+/** Lines this near lie in one chain. */
+const CHAIN = 0.5;
 
 /** All dimensions: extension lines, dimension lines with oblique strokes, values. */
 export const layDimensions = (pad: Pad, { dimensions }: View): Placed[] => {
@@ -22,7 +25,7 @@ export const layDimensions = (pad: Pad, { dimensions }: View): Placed[] => {
   layTicks(pad, placed);
   const fits = (it: Placed): boolean => candidates(pad, it)[0]!.manner === 'in';
   for (const it of [...placed.filter(fits), ...placed.filter((one) => !fits(one))]) {
-    layValue(pad, it);
+    layValue(pad, it, placed);
   }
   return placed;
 };
@@ -36,10 +39,10 @@ interface Spot {
   readonly cost: number;
 }
 
-const layValue = (pad: Pad, it: Placed): void => {
+const layValue = (pad: Pad, it: Placed, placed: readonly Placed[]): void => {
   const { dimension } = it;
-  const close = cheapest(pad, it, candidates(pad, it));
-  const far = close.cost < AWAY ? close : cheapest(pad, it, anywhere(pad, it));
+  const close = cheapest(pad, it, candidates(pad, it), placed);
+  const far = close.cost < AWAY ? close : cheapest(pad, it, anywhere(pad, it), placed);
   const best = far.cost < close.cost ? far.spot : close.spot;
   drawOwnLine(pad, it, best);
   const width = widthOf(pad, dimension.line);
@@ -52,28 +55,37 @@ const layValue = (pad: Pad, it: Placed): void => {
   }
 };
 
-const cheapest = (pad: Pad, it: Placed, spots: readonly Spot[]): { spot: Spot; cost: number } => {
+const cheapest = (
+  pad: Pad,
+  it: Placed,
+  spots: readonly Spot[],
+  placed: readonly Placed[],
+): { spot: Spot; cost: number } => {
   let best = spots[0]!;
   let least = Number.POSITIVE_INFINITY;
   for (const spot of spots) {
     if (spot.cost >= least) continue;
     const cost = spot.cost + pad.ground.cost(valueBox(pad, it, spot), it, least - spot.cost);
     if (cost >= least) continue;
-    const whole = cost + linesCost(pad, it, spot);
+    const whole = cost + linesCost(pad, it, spot, placed);
     if (whole < least) [best, least] = [spot, whole];
   }
   return { spot: best, cost: least };
 };
 
-/** What the value's own lines cost: the leader, and the dimension line drawn on beyond its end, which should not pass close by other words. */
-const linesCost = (pad: Pad, it: Placed, spot: Spot): number => {
+/**
+ * What the value's own lines cost: the leader, and the dimension line drawn on beyond its end, which should not pass close by other words, nor lie
+ * where another line of its chain does.
+ */
+const linesCost = (pad: Pad, it: Placed, spot: Spot, placed: readonly Placed[]): number => {
   const { em, ground } = pad;
   if (spot.manner === 'away') return ground.crossing(leaderEnd(pad, it, spot), middleOf(it));
   if (spot.manner !== 'on') return 0;
   const drawn = drawnOn(pad, it, spot);
-  const [from, to] = spot.along < startOf(it) ? [drawn[0], startOf(it)] : [endOf(it), drawn[1]];
+  const beyond: [number, number] = spot.along < startOf(it) ? [drawn[0], startOf(it)] : [endOf(it), drawn[1]];
   const beside = [-GAP * em, 0, GAP * em].map((off) => ({ ...it, level: it.level + off }));
-  return WORDS * Math.max(...beside.map((line) => ground.words(pointOn(line, from), pointOn(line, to))));
+  const words = beside.map((line) => ground.words(pointOn(line, beyond[0]), pointOn(line, beyond[1])));
+  return WORDS * (Math.max(...words) + (overAnother(it, beyond, placed, CHAIN * em) ? 1 : 0));
 };
 
 /** From where to where a line runs that is drawn on beyond its end. */
@@ -184,12 +196,3 @@ const layTicks = (pad: Pad, placed: readonly Placed[]): void => {
 
 const spotPoint = (it: Placed, { along, across }: Spot): Point =>
   it.dimension.axis === 'x' ? { x: along, y: it.level + across } : { x: it.level + across, y: along };
-
-const pointOn = ({ dimension, level }: Placed, along: number): Point =>
-  dimension.axis === 'x' ? { x: along, y: level } : { x: level, y: along };
-
-const middleOf = (it: Placed): Point => pointOn(it, (startOf(it) + endOf(it)) / 2);
-
-const ends = ({ axis, from, to }: Dimension): [number, number] => [from[axis], to[axis]];
-const startOf = ({ dimension }: Placed): number => Math.min(...ends(dimension));
-const endOf = ({ dimension }: Placed): number => Math.max(...ends(dimension));

@@ -121,14 +121,15 @@ export const heightOf = (context: Context, row: Row): number => {
 export const linesOf = ({ name, clause, second }: Pick<CheckRow, 'name' | 'clause' | 'second'>): number =>
   Math.max(name.length, clause.length, second?.clause.length ?? 0);
 
-/** How many rows fit a height. */
+/** How many rows fit a height; a heading stays with what it heads. */
 export const rowsWithin = (context: Context, rows: readonly Row[], height: number): number => {
   let left = height - headerOf(context);
   const count = rows.findIndex((row) => {
     left -= heightOf(context, row);
     return left < 0;
   });
-  return count < 0 ? rows.length : count;
+  if (count < 0) return rows.length;
+  return rows[count - 1]?.kind === 'fit' ? count - 1 : count;
 };
 
 /** Rules of fit have no bar. */

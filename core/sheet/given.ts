@@ -2,7 +2,7 @@ import { fittingOf } from '../end/jointParts.ts';
 import { fixed, plain } from '../units/figures.ts';
 import { capital } from '../words/capital.ts';
 import type { Context, Zone } from './context.ts';
-import { assumed, gradeName, type Row } from './givenWords.ts';
+import { assumed, gradeName, kept, levelText, type Row } from './givenWords.ts';
 import { jointRows } from './jointRows.ts';
 import { body } from './page.ts';
 import type { TextStyle } from './pen.ts';
@@ -18,6 +18,9 @@ const HEADING = 4.4;
 
 /** A designation with the sign of multiplication, as a drawing writes it. */
 export const sectionName = (designation: string): string => designation.replace(/(?<=\d)x(?=\d)/g, ' × ');
+
+/** The same without blanks, where room is short. */
+export const tightName = (designation: string): string => sectionName(designation).replaceAll(' × ', '×');
 
 const beamRows = (context: Context): Row[] => {
   const { input, numbers } = context;
@@ -73,20 +76,17 @@ const otherRows = (context: Context): Row[] => {
   const { support, piece, end, quantity } = input.end;
   const rows: Row[] = [];
   if (support) {
-    const name = support.section ?? (support.thickness === undefined ? '' : plain(support.thickness, 3));
-    const level = support.topOfSteel === undefined ? '' : `, ${say.topOfSteel} ${numbers.load(support.topOfSteel)}`;
+    const { section, thickness } = support;
+    const name = (section && tightName(section)) ?? (thickness === undefined ? '' : plain(thickness, 3));
     const opposite =
       support.otherReaction === undefined ? '' : `, ${say.opposite} V_o ${numbers.load(support.otherReaction)}`;
-    rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${level}${opposite}`]);
+    rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${levelText(context)}${opposite}`]);
   }
   const off = quantity === undefined ? '' : `${quantity} ${say.off}`;
   const words = [piece, end && say.ends[end], off].filter(Boolean).join(', ');
   if (words) rows.push([labels.piece, words]);
   return rows;
 };
-
-/** A symbol and its number stay on one line. */
-const kept = (value: string): string => value.replace(/(?<![\p{L}\d_])(\p{L}(?:_\w+)?′?) (?=\d)/gu, '$1\u00a0');
 
 /** The data that the checks stand on; `width` mm wide. */
 export const givenZone = (context: Context, width: number): Zone => {

@@ -36,3 +36,14 @@ export const fittingName = (words: Words, kind: Joint['kind']): string => {
       return say.labels.endPlate.toLowerCase();
   }
 };
+
+/** How far the support's top of steel stands below the beam's, after a comma; nothing where it is not told. */
+export const levelText = ({ input, numbers }: Pick<Context, 'input' | 'numbers'>): string => {
+  const { topOfSteel } = input.end.support ?? {};
+  if (topOfSteel === undefined) return '';
+  return `, ${topOfSteel === 0 ? say.topsLevel : `${say.topOfSteel} ${numbers.load(topOfSteel)}`}`;
+};
+
+/** A symbol and its number stay on one line. */
+export const kept = (value: string): string =>
+  value.replace(/(?<![\p{L}\d_])(\p{L}(?:′?_[\w,]+)?′?) (?=\d)/gu, '$1\u00a0');

@@ -46,21 +46,23 @@ const webBoltRows = (context: Context): Row[] => {
   ];
 };
 
-/** Bolts into the support; `counted`: with how many there are. */
-export const supportBoltRows = (context: Context, counted = true): Row[] => {
+/**
+ * Bolts into the support. `ofOne`: of one end, with its rows and the edge beside its bolts; else of many, whose cleats stand apart by webs of different
+ * thickness.
+ */
+export const supportBoltRows = (context: Context, ofOne = true): Row[] => {
   const { facts, end } = context.input;
   const { mm } = context.numbers;
   const bolts = supportBoltsOf(end.joint);
   if (!bolts) return [];
   const own = facts.supportBolts;
   const pitch = own.n > 1 ? `, p_s ${mm(own.p)}` : '';
-  const edges = `e_v ${mm(own.ev)}, e_h ${mm(own.eh)}`;
+  const edges = `e_v ${mm(own.ev)}${ofOne || facts.legWeb === 0 ? `, e_h ${mm(own.eh)}` : ''}`;
   const told = assumed(context, 'joint.supportBolts.threads');
   const holes = holeText(context, bolts, 'joint.supportBolts', own).replace('d_0 ', 'd_0,s ').replace('d′ ', 'd′_s ');
-  return [
-    [labels.supportBolts, `${counted ? `${own.lines} × ${own.n} ` : ''}${boltText(context, bolts, own, told)}`],
-    ['', `${holes}${pitch}, c_c ${mm(own.cc)}, ${edges}`],
-  ];
+  const count = ofOne ? `${own.lines} × ${own.n} ` : say.lines(own.lines);
+  const bolt = `${count}${boltText(context, bolts, own, told)}`;
+  return [[labels.supportBolts, `${bolt}; ${holes}${pitch}, c_c ${mm(own.cc)}, ${edges}`]];
 };
 
 const fittingRows = (context: Context): Row[] => {
@@ -70,23 +72,25 @@ const fittingRows = (context: Context): Row[] => {
   const { path, grade } = fittingOf(end.joint);
   const steel = gradeName(context, grade);
   const edges = `e_top ${mm(facts.eTop)}, e_bot ${mm(facts.eBot)}, e_x ${mm(facts.ex)}`;
-  const bolted: Row[] =
-    facts.n > 0 ? [['', edges]] : [['', `y_p ${mm(facts.yp)}${facts.legWeb > 0 ? '' : `; g ${mm(facts.g)}`}`]];
+  const place = facts.n > 0 ? edges : `y_p ${mm(facts.yp)}`;
   switch (facts.kind) {
     case 'web-bolts':
-      return [[labels.ply, `${mm(facts.tp)} × ${mm(facts.hp)}, ${steel}`], ...bolted];
+      return [[labels.ply, `${mm(facts.tp)} × ${mm(facts.hp)}, ${steel}; ${place}`]];
     case 'fin-plate': {
       const width = facts.z1 + (facts.m - 1) * facts.q + facts.ex;
-      return [[capital(words.finPlate), `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${steel}`], ...bolted];
+      return [[capital(words.finPlate), `${mm(facts.tp)} × ${mm(width)} × ${mm(facts.hp)}, ${steel}; ${place}`]];
     }
     case 'double-cleat':
     case 'single-cleat': {
-      const count = facts.k > 1 ? `${facts.k}: ` : '';
+      const count = facts.k > 1 ? `${say.pair} ` : '';
       const legs = `${mm(facts.legWeb)} × ${mm(facts.legSupport)} × ${mm(facts.tp)}`;
-      return [[capital(words.fields[path] ?? ''), `${count}${legs}, ${say.long} ${mm(facts.hp)}, ${steel}`], ...bolted];
+      const cleat = `${count}${legs}, ${say.long} ${mm(facts.hp)}, ${steel}`;
+      return [[capital(words.fields[path] ?? ''), `${cleat}; ${place}`]];
     }
     default:
-      return [[labels.endPlate, `${mm(facts.tp)} × ${mm(facts.bp)} × ${mm(facts.hp)}, ${steel}`], ...bolted];
+      return [
+        [labels.endPlate, `${mm(facts.tp)} × ${mm(facts.bp)} × ${mm(facts.hp)}, ${steel}; ${place}, g ${mm(facts.g)}`],
+      ];
   }
 };
 
@@ -98,13 +102,8 @@ export const weldRows = (context: Context): Row[] => {
   if (!weld) return [];
   const metal = facts.Xu > 0 ? `, X_u ${mpa(facts.Xu)}${assumed(context, `${weld.path}.electrode`)}` : '';
   const returns = facts.weldReturn > 0 && facts.weldTo === 'web' ? `, l_r ${mm(facts.weldReturn)}` : '';
-  const fillets = facts.kind === 'single-cleat' ? say.fillet : say.fillets;
-  return [
-    [
-      labels.weld,
-      `${fillets} s ${mm(facts.leg)}${returns}${facts.legWeb > 0 ? `, ${say.weldTo[weld.to]}` : ''}${metal}`,
-    ],
-  ];
+  const fillets = facts.legWeb > 0 ? say.weldTo[weld.to] : say.fillets;
+  return [[labels.weld, `${fillets} s ${mm(facts.leg)}${returns}${metal}`]];
 };
 
 /** The data of the joint: bolts through the web, plate or cleat, weld, bolts into the support. */

@@ -9,7 +9,7 @@ import type { DrawingWords } from '../drawing/words.ts';
 import { drawingWordsOf } from '../drawing/wordsOf.ts';
 import { standards } from '../standards/known.ts';
 import type { Context } from './context.ts';
-import { sectionName } from './given.ts';
+import { tightName } from './given.ts';
 import { POINT } from './pen.ts';
 import { sheetWords as say } from './sheetWords.ts';
 import { governingOf } from './verdictLine.ts';
@@ -23,7 +23,7 @@ const REACH = 30;
 const drawingWords = ({ input, numbers, words }: Context): DrawingWords =>
   drawingWordsOf(input.end, {
     units: numbers.units,
-    section: sectionName(input.designation).replaceAll(' × ', '×') || say.ownSize,
+    section: tightName(input.designation) || say.ownSize,
     words,
     standard: standards[input.report.standard.id]!,
   });

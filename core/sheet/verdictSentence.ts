@@ -9,11 +9,11 @@ export const titleOf = ({ title, ofText }: Pick<Check, 'title' | 'ofText'>): str
   ofText ? `${title}, ${ofText}` : title;
 
 /** The same for a narrow column. */
-export const shortTitleOf = (words: Words, check: Check): string =>
-  titleOf({
-    title: shortOf(words, check),
-    ...(check.ofText && { ofText: say.shortWays[check.of ?? ''] ?? check.ofText }),
-  });
+export const shortTitleOf = (words: Words, check: Check): string => {
+  const { id, of = '', ofText } = check;
+  const way = ofText && (say.shortWays[of] ?? ofText);
+  return say.shortTitles[`${id}, ${of}`] ?? titleOf({ title: shortOf(words, check), ...(way && { ofText: way }) });
+};
 
 /** What refers and why: by name where one or two do for the same reason, else by their number. */
 const refersText = (checks: readonly Check[]): string => {

@@ -16,6 +16,7 @@ export const commonwealth: Words = {
     'cope-buckling': 'Web buckling at the notch',
     'web-bearing': 'Bearing on the web',
     'web-tie': 'Tie force, acting alone',
+    'weld-web, web': 'Web behind the weld',
     'stress-full': 'Elastic stress, full section',
     'stress-cope': 'Elastic stress at the notch',
     'bolt-shear': 'Bolt shear',
@@ -171,8 +172,7 @@ export const commonwealth: Words = {
     static: 'Static load: no fatigue, seismic or fire.',
     bearing: 'Bolts in bearing.',
     'no-axial': 'No axial force with V; a tie force acts alone.',
-    support:
-      'Support not rotating, reaction at its face; its own strength is not checked, but where a check of it stands in the list.',
+    support: 'Support not rotating, reaction at its face; its strength is checked only where the list says so.',
     square: 'Square end, cut as drawn.',
     material: 'Material as named.',
     'channel-shear-centre': 'Reaction assumed through the shear centre of the channel.',
@@ -204,7 +204,7 @@ export const commonwealth: Words = {
       "With two columns this form's nominal strength equals the present US one, but φ 0.90 stands where that takes 0.75: the design value is a fifth higher. Option web-block: cautious takes 0.3.",
     'weld-slimmer-than-plate': 'The weld is sized for V z; a leg below 0.625 t_p cannot make the plate yield first.',
     'support-outline':
-      "Of the support, the section's outline serves for clearances and its thickness for the weld's least leg; its own strength is not checked, but where a check of it stands in the list; a beam opposite counts only where such a check adds it.",
+      "The support's outline serves for clearances, its thickness for the weld's least leg; a beam opposite counts only where a check of the support adds it.",
     'strength-given': '{field}: strength as given, not from a table.',
     'memory-grade': 'The strengths of {value} are from memory of their product standard: confirm them.',
   },

@@ -2,7 +2,8 @@ import { fittingOf, type PlacedBolts, webBoltsOf } from '../../end/jointParts.ts
 import type { Cope, GradeGiven } from '../../end/schema.ts';
 import { capital } from '../../words/capital.ts';
 import type { Zone } from '../context.ts';
-import { assumed, holesAssumed } from '../givenWords.ts';
+import { tightName } from '../given.ts';
+import { assumed, holesAssumed, kept, levelText } from '../givenWords.ts';
 import { supportBoltRows, weldRows } from '../jointRows.ts';
 import { body, LEFT, WIDTH } from '../page.ts';
 import type { TextStyle } from '../pen.ts';
@@ -76,7 +77,7 @@ const fittingRows = (context: CardContext): Row[] => {
     }
     case 'double-cleat':
     case 'single-cleat': {
-      const legs = `${facts.k > 1 ? `${facts.k}: ` : ''}${mm(facts.legWeb)} × ${mm(facts.legSupport)} × ${thick}`;
+      const legs = `${facts.k > 1 ? `${sheetWords.pair} ` : ''}${mm(facts.legWeb)} × ${mm(facts.legSupport)} × ${thick}`;
       const place = facts.n > 0 ? edges : `y_p ${mm(facts.yp)}`;
       return [[name, `${legs}, ${say.byRows}; ${place}`], ...weldRows(context), ...supportBoltRows(context, false)];
     }
@@ -87,13 +88,13 @@ const fittingRows = (context: CardContext): Row[] => {
   }
 };
 
-const supportRows = ({ input, numbers }: CardContext): Row[] => {
+const supportRows = (context: CardContext): Row[] => {
+  const { input, numbers } = context;
   const { support } = input.end;
   if (!support) return [];
-  const name = support.section ?? (support.thickness === undefined ? '' : numbers.load(support.thickness));
-  const level =
-    support.topOfSteel === undefined ? '' : `, ${sheetWords.topOfSteel} ${numbers.load(support.topOfSteel)}`;
-  return [[sheetWords.labels.support, `${sheetWords.supportKinds[support.kind]} ${name}${level}`.trim()]];
+  const { section, thickness } = support;
+  const name = (section && tightName(section)) ?? (thickness === undefined ? '' : numbers.load(thickness));
+  return [[sheetWords.labels.support, `${sheetWords.supportKinds[support.kind]} ${name}${levelText(context)}`.trim()]];
 };
 
 /** What every end of the card has in common: beam and place of the bolts, and the fitting; each in one column. */
@@ -136,7 +137,7 @@ export const cardGivenZone = (context: CardContext): Zone => {
     const inset = AIR + Math.max(...rows.map(([label]) => pen.width(label, style)));
     const set = rows.map(([label, value]) => ({
       label,
-      lines: wrap(pen, richText(value, 'prose'), style, width - inset),
+      lines: wrap(pen, richText(kept(value), 'prose'), style, width - inset),
     }));
     return { inset, rows: set, lines: set.reduce((sum, { lines }) => sum + lines.length, 0) };
   });

@@ -37,6 +37,8 @@ export const LARGEST = 2;
 /** Over each of several views its title, and the space between two, px. */
 export const TITLE = 22;
 export const BETWEEN = 20;
+/** Views beside each other share their levels: below each other they have to be worth so much more. */
+const LEVELS = 1.25;
 /** Layouts tried before the best is taken. */
 const TURNS = 7;
 /** Scales differ by this share at least, from one that does not fit to the next. */
@@ -117,5 +119,5 @@ export const fitRoom = (views: readonly View[], room: Room, path: FailurePath | 
   const beside = fitStanding(views, 'beside', room, path);
   if (views.length === 1) return beside;
   const other = below();
-  return worth(other) > worth(beside) ? other : beside;
+  return worth(other) > LEVELS * worth(beside) ? other : beside;
 };

@@ -64,12 +64,13 @@ describe('the square code of the sheet', () => {
     }
   });
 
-  it('keeps its place beside words that stand on the beam: no good end is without it but two whose pieces are as wide or as high as their room', async () => {
+  it('keeps its place beside words that stand on the beam: no good end is without it but those with two views, and two whose pieces are as wide or as high as their room', async () => {
     for (const one of goodEnds().filter(({ name }) => !['long-cope', 'slender-web'].includes(name))) {
       const input = examined(one.end);
       const link = encodeLink(input.end, input.report.fingerprint);
       const { pages } = await sheetPages({ ...input, link }, { workings: 'governing' });
-      expect(pages[0]!.filter((mark) => mark.kind === 'grid').length, one.name).toBe(1);
+      const views = pages[0]!.some((mark) => mark.kind === 'text' && mark.text === 'on the support') ? 2 : 1;
+      expect(pages[0]!.filter((mark) => mark.kind === 'grid').length, one.name).toBe(2 - views);
     }
   });
 

@@ -1,0 +1,65 @@
+import { describe, expect, test } from 'vitest';
+import { standards } from '../../../core/standards/index.ts';
+import { goodEnds } from '../../support/published.ts';
+import { underStandard } from '../../support/underStandard.ts';
+import { examined } from './ends.ts';
+import { pagesOf } from './onPage.ts';
+import { wholeText } from './readPdf.ts';
+
+const names = [
+  'double-cleat',
+  'double-cleat-other-beam',
+  'single-cleat',
+  'double-cleat-web-welded',
+  'double-cleat-support-welded',
+  'end-plate',
+  'full-end-plate',
+];
+const endOf = (name: string): Record<string, unknown> => goodEnds().find((one) => one.name === name)!.end;
+
+const sheetOf = async (end: unknown): Promise<string[]> => (await pagesOf(examined(end))).map(wholeText);
+
+describe('the sheet of cleats and end plates', () => {
+  const plain = ['sans-10162-1', 'as-4100'].flatMap((id) => names.map((name) => [name, id] as const));
+
+  test.each(plain)('of %s under %s is one page with the working of the check that governs', async (name, id) => {
+    const pages = await sheetOf(underStandard(endOf(name), standards[id]!));
+    expect(pages).toHaveLength(1);
+    if (name !== 'full-end-plate') expect(pages[0]).toMatch(/Governing working: .* ratio [\d./]+ = [\d.]+, printed/);
+  });
+
+  test.each(names)('of %s says once that the support is checked only where the list says so', async (name) => {
+    const [page] = await sheetOf(endOf(name));
+    expect(page!.match(/support/gi)!.length).toBeGreaterThan(1);
+    expect(page!.match(/checked only where the list says so/g)).toHaveLength(1);
+  });
+
+  test('names a leg in place of the cleat where the column is narrow', async () => {
+    const [page] = await sheetOf(endOf('double-cleat'));
+    for (const title of ['Block tearing, support leg', 'Tear-out, web leg, along', 'Net shear, web leg'])
+      expect(page).toContain(title);
+  });
+
+  test('tells bolts into the support and cleats by count, and a support whose top is level as such', async () => {
+    const [page] = await sheetOf(endOf('double-cleat'));
+    expect(page).toContain('two 100 × 100 × 10, long 220');
+    expect(page).toMatch(/2 × 3 M20 8\.8, f ?ub/);
+    expect(page).toContain('beam web UB 610×229×125, tops level');
+    const lower = {
+      ...endOf('double-cleat'),
+      support: { ...(endOf('double-cleat').support as object), topOfSteel: 5 },
+    };
+    expect((await sheetOf(lower))[0]).toContain('top of steel 5');
+  });
+
+  test('leaves no heading of the table without a row under it at the foot of a sheet', async () => {
+    for (const standard of Object.values(standards)) {
+      for (const name of names) {
+        for (const page of await sheetOf(underStandard(endOf(name), standard)))
+          expect(page, `${standard.id} ${name}`).not.toMatch(
+            /Fit, not held limit given (Fit|Other|Not applicable|\(a\))/,
+          );
+      }
+    }
+  });
+});

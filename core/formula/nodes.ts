@@ -31,13 +31,16 @@ const settled: Readonly<Partial<Record<Node['op'], (a: number, b: number) => num
   minus: (a, b) => a - b,
 };
 
+/** More than there are nodes; its cube is still a whole number that is told from the next. */
+const PLACES = 2 ** 17;
+
 /** Takes trees and conditions apart into nodes with at most three arguments each; the order of every sum and product is kept. */
 export class Nodes {
   /** Each after those that it leans on. */
   readonly all: Node[] = [];
-  private readonly known = new Map<string, Node>();
+  private readonly known = new Map<Node['op'], Map<unknown, Node>>();
   private readonly seen = new Map<Tree | Condition, Node>();
-  private readonly numbers = new Map<unknown, number>();
+  private readonly solvers = new Map<unknown, number>();
 
   /** `changing`: how the quantity that may change after a run is read. */
   constructor(private readonly changing?: Read) {}
@@ -48,6 +51,11 @@ export class Nodes {
     const made = this.take(one);
     this.seen.set(one, made);
     return made;
+  }
+
+  /** Every node of one kind, in the order in which they were met. */
+  kind(op: Node['op']): Node[] {
+    return [...this.alike(op).values()];
   }
 
   literal(value: number): Node {
@@ -96,25 +104,39 @@ export class Nodes {
   }
 
   private node(op: Node['op'], of: readonly Node[], is?: Node['is']): Node {
-    let key: string = op;
-    for (const one of of) key += ` ${one.at}`;
-    if (is !== undefined) key += typeof is === 'number' ? ` ${Object.is(is, -0) ? '-0' : is}` : ` f${this.number(is)}`;
-    const known = this.known.get(key);
+    const alike = this.alike(op);
+    const key = this.keyOf(of, is);
+    const known = alike.get(key);
     if (known) return known;
     const solved = op === 'found' || of.some((one) => one.solved);
     const changes = (op === 'given' && is === this.changing) || of.some((one) => one.changes);
     const made: Node = { op, of, at: this.all.length, is, solved, changes, uses: 0 };
     for (const one of of) one.uses += 1;
-    this.known.set(key, made);
+    alike.set(key, made);
     this.all.push(made);
     return made;
   }
 
-  /** Tells one reader or solver from another. */
-  private number(one: unknown): number {
-    const known = this.numbers.get(one);
-    if (known !== undefined) return known;
-    this.numbers.set(one, this.numbers.size);
-    return this.numbers.size - 1;
+  /** Every node of one kind. */
+  private alike(op: Node['op']): Map<unknown, Node> {
+    let alike = this.known.get(op);
+    if (!alike) {
+      alike = new Map();
+      this.known.set(op, alike);
+    }
+    return alike;
+  }
+
+  /** Tells one node from others of its kind: a leaf by what it is, a solver by itself and its places, an operation by up to three places. */
+  private keyOf(of: readonly Node[], is: Node['is']): unknown {
+    const [a, b, c] = of;
+    if (!a) return Object.is(is, -0) ? '-0' : is;
+    if (is === undefined) return a.at + PLACES * ((b ? b.at + 1 : 0) + PLACES * (c ? c.at + 1 : 0));
+    let solver = this.solvers.get(is);
+    if (solver === undefined) {
+      solver = this.solvers.size;
+      this.solvers.set(is, solver);
+    }
+    return `${solver} ${of.map(({ at }) => at).join(' ')}`;
   }
 }

@@ -76,7 +76,7 @@ export const programOf = (
   const writer = new CodeWriter((value) => nodes.literal(value));
   const { cellOf } = writer;
   const leaves = (op: Node['op']): Node[] => {
-    const found = nodes.all.filter((one) => one.op === op);
+    const found = nodes.kind(op);
     for (const one of found) cellOf.set(one, writer.newCell());
     return found;
   };

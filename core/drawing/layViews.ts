@@ -6,7 +6,7 @@ import { condensed } from './measure.ts';
 import { createPad, setLine, widthOf } from './pad.ts';
 
 /** In text heights: between two views, and the titles over them. */
-const BETWEEN = 1;
+const BETWEEN = 0.5;
 const TITLE = 1.2;
 
 /** Several views side by side on their own levels, a title over each; one alone stands without a title. */

@@ -64,9 +64,13 @@ export const placeWords = (laid: Laid, { captions, code, room }: FigureWords, sc
     const spot = placeCode([...boxes, words], code, room, high);
     return { lines: beside, x: left, y, code: spot, width: Math.max(wide, room), height: high };
   }
-  const x = Math.max(36, Math.min(wide, room) - CAPTION);
-  const top = lowestRightOf(boxes, x) + 1.5;
-  const height = Math.max(high, top + below.length * LEADING + SCALE_HEIGHT);
+  // Under the right end of the piece, or further right where it then stands higher.
+  const spots = [Math.min(wide, room), room].map((right) => {
+    const x = Math.max(36, right - CAPTION);
+    const top = lowestRightOf(boxes, x) + 1.5;
+    return { x, top, height: Math.max(high, top + below.length * LEADING + SCALE_HEIGHT) };
+  });
+  const { x, top, height } = spots[1]!.height < spots[0]!.height ? spots[1]! : spots[0]!;
   return {
     lines: below,
     x,

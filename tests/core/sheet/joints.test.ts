@@ -34,6 +34,13 @@ describe('the sheet of cleats and end plates', () => {
     expect(page!.match(/checked only where the list says so/g)).toHaveLength(1);
   });
 
+  test.each(['double-cleat', 'single-cleat', 'double-cleat-support-welded', 'end-plate', 'full-end-plate'])(
+    'of %s shows the face of the support beside the side view',
+    async (name) => {
+      expect((await sheetOf(endOf(name)))[0]).toMatch(/side view.* on the support/);
+    },
+  );
+
   test('names a leg in place of the cleat where the column is narrow', async () => {
     const [page] = await sheetOf(endOf('double-cleat'));
     for (const title of ['Block tearing, support leg', 'Tear-out, web leg, along', 'Net shear, web leg'])

@@ -17,44 +17,34 @@ export interface Line {
 
 type Mode = 'symbols' | 'numbers';
 /** In metric lines, forces are written in kN when nothing else carries newtons; otherwise all is in N and mm. */
-type ForceUnit = 'kN' | 'N';
+export type ForceUnit = 'kN' | 'N';
 
 const MPA_IN_KSI = KIP / INCH ** 2;
 const raisedDigits = '⁰¹²³⁴⁵⁶⁷⁸⁹';
 const superscript = (exponent: number): string => [...String(exponent)].map((d) => raisedDigits[Number(d)]).join('');
 
-const parenthesised = (line: Line, least: number): string => (line.binds >= least ? line.text : `(${line.text})`);
+export const parenthesised = (line: Line, least: number): string =>
+  line.binds >= least ? line.text : `(${line.text})`;
 
 /** A value as a working states it, in the system's unit. */
 export const quantity = (value: number, dimension: Dimension, system: UnitSystem, figures = LINE_FIGURES): string =>
   significant(value / unitOf(dimension, system).size, figures);
 
-/** The leaves that stand in a line: steps count as leaves, untaken branches do not. */
-const leavesOf = (tree: Tree, values: Values): readonly Tree[] => {
-  switch (tree.op) {
-    case 'literal':
-    case 'constant':
-    case 'given':
-    case 'found':
-    case 'step':
-    case 'bare':
-      return [tree];
-    case 'pick':
-      return leavesOf(values.taken(tree), values);
-    default:
-      return tree.of.flatMap((one) => leavesOf(one, values));
-  }
+const literals = new WeakMap<Tree, Line>();
+
+const literalLine = (tree: Tree & { op: 'literal' }): Line => {
+  const known = literals.get(tree);
+  if (known) return known;
+  const line: Line = { text: plain(tree.value, 6), binds: 4 };
+  literals.set(tree, line);
+  return line;
 };
 
-const forceUnitOf = (tree: Tree, values: Values, result: Dimension): ForceUnit => {
-  if (result !== '0,1' && result !== '1,1') return 'N';
-  const carriers = leavesOf(tree, values).filter((leaf) => !leaf.dimension.endsWith(',0'));
-  const alike = carriers.every((leaf) => leaf.dimension === '0,1') && (result === '0,1' || result === '1,1');
-  const moments = carriers.every((leaf) => leaf.dimension === '1,1') && result === '1,1';
-  return carriers.length > 0 && (alike || moments) ? 'kN' : 'N';
-};
+/** Writes formulas as lines, in symbols or with the numbers of one end in place. */
+export class LineWriter {
+  /** Quantities stand in many lines of an end, with one figure in all. */
+  private readonly leaves = new Map<Tree, Line>();
 
-class Writer {
   constructor(
     private readonly values: Values,
     private readonly system: UnitSystem,
@@ -65,7 +55,7 @@ class Writer {
   write(tree: Tree): Line {
     switch (tree.op) {
       case 'literal':
-        return { text: plain(tree.value, 6), binds: 4 };
+        return literalLine(tree);
       case 'constant':
       case 'given':
       case 'step':
@@ -104,9 +94,12 @@ class Writer {
   }
 
   private leaf(tree: Tree): Line {
+    const known = this.leaves.get(tree);
+    if (known) return known;
     const value = this.values.of(tree) / this.sizeOf(tree.dimension);
-    const text = significant(value, LINE_FIGURES);
-    return { text, binds: value < 0 ? 1 : 4 };
+    const line: Line = { text: significant(value, LINE_FIGURES), binds: value < 0 ? 1 : 4 };
+    this.leaves.set(tree, line);
+    return line;
   }
 
   /** Size of the unit in which numbers of this dimension stand within the line. */
@@ -148,25 +141,24 @@ class Writer {
   }
 }
 
-/** Power of ten that takes a metric line's N and mm to the unit its value is stated in. */
-const scaleOf = (force: ForceUnit, tree: Tree, values: Values, result: Dimension): string => {
-  if (result !== '0,1' && result !== '1,1') return '';
-  if (force === 'N') return result === '0,1' ? '10³' : '10⁶';
-  const moments = leavesOf(tree, values).some((leaf) => leaf.dimension === '1,1');
-  return result === '1,1' && !moments ? '10³' : '';
+/** Remembers what is so of a formula's own operations, steps and leaves left aside, whatever the facts. */
+const ofOperations = (breaks: (tree: Tree) => boolean): ((tree: Tree) => boolean) => {
+  const known = new WeakMap<Tree, boolean>();
+  const holds = (tree: Tree): boolean => {
+    const before = known.get(tree);
+    if (before !== undefined) return before;
+    const leaf = tree.op === 'step' || !('of' in tree);
+    const found = !breaks(tree) && (leaf || (tree as { of: readonly Tree[] }).of.every(holds));
+    known.set(tree, found);
+    return found;
+  };
+  return holds;
 };
-
-const choiceFree = new WeakMap<Tree, boolean>();
 
 /** True where a line's symbols are the same whatever the facts. */
-const isChoiceFree = (tree: Tree): boolean => {
-  const known = choiceFree.get(tree);
-  if (known !== undefined) return known;
-  const leaf = tree.op === 'step' || !('of' in tree);
-  const free = tree.op !== 'pick' && (leaf || (tree as { of: readonly Tree[] }).of.every(isChoiceFree));
-  choiceFree.set(tree, free);
-  return free;
-};
+export const isChoiceFree = ofOperations(({ op }) => op === 'pick');
+/** True where a line needs no word beside it: no choice is made, no unit differs. */
+export const isSilent = ofOperations(({ op }) => op === 'pick' || op === 'bare');
 
 const symbolLines = new WeakMap<Tree, Line>();
 
@@ -174,16 +166,7 @@ const symbolLines = new WeakMap<Tree, Line>();
 export const symbolsOf = (tree: Tree, values: Values): Line => {
   const known = symbolLines.get(tree);
   if (known) return known;
-  const line = new Writer(values, 'mm-kN', 'symbols', 'N').write(tree);
+  const line = new LineWriter(values, 'mm-kN', 'symbols', 'N').write(tree);
   if (isChoiceFree(tree)) symbolLines.set(tree, line);
   return line;
-};
-
-/** The formula with numbers in place; they work out to the system's unit of `result`. */
-export const numbersOf = (tree: Tree, values: Values, system: UnitSystem, result: Dimension = tree.dimension): Line => {
-  if (system === 'in-kip') return new Writer(values, system, 'numbers', 'N').write(tree);
-  const force = forceUnitOf(tree, values, result);
-  const line = new Writer(values, system, 'numbers', force).write(tree);
-  const scale = scaleOf(force, tree, values, result);
-  return scale ? { text: `${parenthesised(line, 2)} / ${scale}`, binds: 2 } : line;
 };

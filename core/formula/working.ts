@@ -1,7 +1,8 @@
 import type { UnitSystem } from '../units/systems.ts';
 import { toSystem, unitOf } from '../units/systems.ts';
-import { numbersOf, quantity, symbolsOf } from './line.ts';
+import { isSilent, quantity, symbolsOf } from './line.ts';
 import { Values } from './number.ts';
+import { NumberLines } from './numberLines.ts';
 import type { Basis, Condition, Tree } from './tree.ts';
 
 /** One line of a working: symbol = expression = numbers = value unit. */
@@ -48,12 +49,16 @@ const said = (condition: Condition, met: boolean, values: Values, system: UnitSy
 
 /** Writes workings from one set of facts: a step that several checks lean on is written once and shared. */
 class Writer {
-  private readonly written = new Map<Tree, WorkingRow>();
+  /** By step: the rows that lead to it, in the order of use, and its own. */
+  private readonly written = new Map<Tree, readonly WorkingRow[]>();
+  private readonly lines: NumberLines;
 
   constructor(
     private readonly values: Values,
     private readonly system: UnitSystem,
-  ) {}
+  ) {
+    this.lines = new NumberLines(values, system);
+  }
 
   /** The steps that trees lean on, each once, before the trees' own. */
   rows(trees: readonly Tree[]): WorkingRow[] {
@@ -72,8 +77,7 @@ class Writer {
         this.visit(this.branch(tree, rows), rows);
         return;
       case 'step':
-        this.visit(tree.of[0], rows);
-        rows.add(this.row(tree));
+        for (const row of this.leadingTo(tree)) rows.add(row);
         return;
       default:
         for (const one of tree.of) this.visit(one, rows);
@@ -89,22 +93,34 @@ class Writer {
     return tree.otherwise;
   }
 
-  private row(tree: Tree & { op: 'step' }): WorkingRow {
+  private leadingTo(tree: Tree & { op: 'step' }): readonly WorkingRow[] {
     const known = this.written.get(tree);
     if (known) return known;
-    const notes = [...new Set([tree.note ?? '', ...this.choices(tree.of[0])])].filter(Boolean).join('; ');
-    const row: WorkingRow = {
+    const rows = new Set<WorkingRow>();
+    this.visit(tree.of[0], rows);
+    rows.add(this.row(tree));
+    const all = [...rows];
+    this.written.set(tree, all);
+    return all;
+  }
+
+  private notes({ note = '', of: [formula] }: Tree & { op: 'step' }): string {
+    if (isSilent(formula)) return note;
+    return [...new Set([note, ...this.choices(formula)])].filter(Boolean).join('; ');
+  }
+
+  private row(tree: Tree & { op: 'step' }): WorkingRow {
+    const notes = this.notes(tree);
+    return {
       symbol: tree.symbol,
       expression: symbolsOf(tree.of[0], this.values).text,
-      numbers: numbersOf(tree.of[0], this.values, this.system, tree.dimension).text,
+      numbers: this.lines.line(tree.of[0], tree.dimension).text,
       value: toSystem(this.values.of(tree), tree.dimension, this.system),
       unit: unitOf(tree.dimension, this.system).name,
       clause: tree.source?.clause ?? '',
       basis: tree.source?.basis ?? '',
       ...(notes && { note: notes }),
     };
-    this.written.set(tree, row);
-    return row;
   }
 
   /** In inches and kips, a formula fitted in MPa takes its stress in MPa all the same: said where it does. */

@@ -13,9 +13,20 @@ const grouped = (digits: string): string => {
 const signed = (value: number, digits: string): string =>
   (value < 0 && Number(digits) !== 0 ? MINUS : '') + grouped(digits);
 
+/** Closing zeros after the point dropped. */
+const unpadded = (digits: string): string => {
+  if (!digits.includes('.')) return digits;
+  let end = digits.length;
+  while (digits[end - 1] === '0') end -= 1;
+  return digits.slice(0, digits[end - 1] === '.' ? end - 1 : end);
+};
+
 /** A value to so many significant digits, closing zeros dropped, without exponent. */
 export const significant = (value: number, digits: number): string => {
-  const size = Number(Math.abs(value).toPrecision(digits));
+  const figures = Math.abs(value).toPrecision(digits);
+  // Most numbers need no way round by their value, which takes twice as long.
+  if (!figures.includes('e') && value !== 0) return signed(value, unpadded(figures));
+  const size = Number(figures);
   if (size === 0) return '0';
   const text = size >= 1e-6 && size < 1e21 ? String(size) : size.toFixed(20).replace(/\.?0+$/, '');
   return signed(value, text);

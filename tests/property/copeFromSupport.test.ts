@@ -95,6 +95,16 @@ const flanges = ({ beam, support, above, setback }: Pair) => {
   };
 };
 
+/** What refuses the end once this cope is as long as asked; empty where nothing does. */
+const lengthened = <E extends Partial<Record<'top' | 'bottom', object | null | undefined>>>(
+  end: E,
+  place: 'top' | 'bottom',
+  length: number,
+): string => {
+  const outcome = checkEnd({ ...end, [place]: { ...end[place], length } });
+  return 'faults' in outcome ? outcome.faults.map(({ code }) => code).join(' ') : '';
+};
+
 const broken = (checks: readonly Check[]): string[] =>
   checks.filter(({ id, state }) => rules.includes(id) && (state === 'fails' || state === 'refer')).map(({ id }) => id);
 
@@ -141,9 +151,12 @@ describe('copes proposed from the support', () => {
         expect(advice.faults).toEqual([]);
         const unmet = broken(outcome.report.checks);
         expect(broken(advice.unmet)).toEqual(unmet);
-        // Only a method that covers no deeper or longer cope is ever left unmet.
-        for (const { id, reason } of advice.unmet.filter(({ id }) => rules.includes(id)))
-          expect(`${id} ${reason}`).toMatch(/^fit-cope-(depth|length) too-much$/);
+        // Only a method that covers no deeper or longer cope is ever left unmet, or a length that would cut into the holes.
+        for (const { id, reason, of, demand } of advice.unmet.filter(({ id }) => rules.includes(id))) {
+          if (`${id} ${reason}` === 'fit-cope-length too-little') {
+            expect(lengthened(withCopes(end, advice), of as 'top' | 'bottom', demand!)).toContain('hole');
+          } else expect(`${id} ${reason}`).toMatch(/^fit-cope-(depth|length) too-much$/);
+        }
         if (unmet.length > 0) short += 1;
         else met += 1;
       }),

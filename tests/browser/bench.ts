@@ -87,6 +87,11 @@ export class Bench {
       .then((all) => all.map(rungOf));
   }
 
+  /** Waits until ladder and verdict are those of the end as it stands in the fields. */
+  current(): Promise<void> {
+    return this.page.getByRole('heading', { level: 2, name: /^Ladder(?! as last complete| nothing yet)/ }).waitFor();
+  }
+
   /** Word and ratio of the verdict, such as `HOLDS 0.81`: over the ladder, on narrow pages in the strip at the foot. */
   get verdict(): Promise<string> {
     const whole = new RegExp(`${VERDICT.source}\\s*$`);

@@ -28,6 +28,7 @@ describe('the shop card', () => {
   test("of the end on the bench carries in that end's own cell what the bench says it carries, in whole kN rounded down", async () => {
     const bench = await (await visit()).tab();
     await bench.type('Pitch, mm', '75');
+    await bench.current();
     const weakest = (await bench.rungs).find((one) => one.weakest)!;
     await toCard(bench);
     await table(bench).waitFor();

@@ -63,6 +63,7 @@ describe('units', () => {
     const bench = await (await visit()).tab();
     await bench.type('Setback, mm', '1/2 in');
     await bench.type('Pitch, mm', '77,7');
+    await bench.current();
     const before = { saved: await bench.saved(), verdict: await bench.verdict, rungs: await bench.rungs };
     await bench.page.getByRole('radio', { name: 'in · kip' }).check();
     await bench.size('Pitch, in').waitFor();
@@ -84,6 +85,7 @@ describe('the end is kept on this device', () => {
     const bench = await (await visit()).tab();
     await bench.type('Pitch, mm', '90');
     await bench.type('Setback, mm', '1/2 in');
+    await bench.current();
     const before = { saved: await bench.saved(), verdict: await bench.verdict };
     await bench.page
       .getByRole('contentinfo')

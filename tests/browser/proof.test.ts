@@ -1,6 +1,7 @@
 import { describe, expect, test } from 'vitest';
 import { listed } from '../../core/standards/listed.ts';
 import { publishedFixtures } from '../support/published.ts';
+import { eventually } from './eventually.ts';
 import { onTheBench } from './onTheBench.ts';
 
 const { visit } = onTheBench();
@@ -15,7 +16,7 @@ describe('the proof', () => {
       await page.getByRole('combobox', { name: 'Standard' }).selectOption(id);
       const own = publishedFixtures().filter(({ standard }) => standard === id);
       const rows = own.reduce((sum, { expect: all }) => sum + all.length, 0);
-      await expect.poll(() => page.locator('tbody tr').count()).toBe(rows);
+      await eventually(() => page.locator('tbody tr').count()).toBe(rows);
       expect(await page.getByText('OUTSIDE').count()).toBe(0);
       for (const source of new Set(own.map((one) => one.source))) {
         expect(await page.getByText(source, { exact: true }).count(), source).toBeGreaterThan(0);

@@ -4,6 +4,7 @@ import type { AxeResults } from 'axe-core';
 import type { Page } from 'playwright-core';
 import { describe, expect, test } from 'vitest';
 import { listed } from '../../core/standards/listed.ts';
+import { eventually } from './eventually.ts';
 import { onTheBench } from './onTheBench.ts';
 
 const { visit } = onTheBench();
@@ -24,7 +25,7 @@ describe('the page of a standard', () => {
     await bench.page.getByRole('link', { name: 'Standards' }).click();
     await bench.page.getByRole('heading', { level: 1, name: 'SANS 10162-1:2011' }).waitFor();
     const shear = rule(bench.page, 'Shear of the full section');
-    await expect.poll(() => shear.textContent()).toMatch(/13\.4\.1\.1; memory; held against published/);
+    await eventually(() => shear.textContent()).toMatch(/13\.4\.1\.1; memory; held against published/);
     expect(((await shear.textContent()) ?? '').replace(/\s+/g, ' ')).toMatch(
       /= 0\.66 f ?y where λ ?w ≤ 440 √\(5\.34 \/ f ?y\)/,
     );
@@ -52,7 +53,7 @@ describe('the page of a standard', () => {
     await bench.page.getByRole('link', { name: 'the rule in full' }).click();
     const shown = rule(bench.page, 'Bolt shear');
     await shown.waitFor();
-    await expect.poll(async () => (await shown.boundingBox())?.y).toBeLessThan(200);
+    await eventually(async () => (await shown.boundingBox())?.y).toBeLessThan(200);
   });
 
   test('an unknown standard is said, and another can be chosen', async () => {

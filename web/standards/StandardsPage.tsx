@@ -1,5 +1,5 @@
 import { Fragment, type TargetedEvent } from 'preact';
-import { useEffect } from 'preact/hooks';
+import { useEffect, useLayoutEffect } from 'preact/hooks';
 import { type StandardPage, standardPage } from '../../core/check/standardPage.ts';
 import { listed } from '../../core/standards/listed.ts';
 import type { Standard } from '../../core/standards/standard.ts';
@@ -67,7 +67,7 @@ const Facts = ({ page }: { readonly page: StandardPage }) => (
 
 const Rules = ({ standard, rule }: { readonly standard: Standard; readonly rule: string }) => {
   const page = standardPage(standard);
-  useEffect(() => {
+  useLayoutEffect(() => {
     if (rule) document.getElementById(`rule-${rule}`)?.scrollIntoView();
     else scrollTo(0, 0);
   }, [page.id, rule]);

@@ -33,17 +33,24 @@ export const install = () => {
   must('Installing what the project needs (npm ci).', 'npm', args, process.platform === 'win32');
 };
 
-/** Builds the bench, unless what is built is newer than its sources. */
+const parts = [
+  { said: 'Building the bench.', made: 'dist/web/index.html', sources: 'web' },
+  { said: 'Building API and command line.', made: 'dist/api/cli.js', sources: 'api' },
+];
+
+const isNew = ({ made, sources }) => {
+  const at = written(made);
+  return at > 0 && at >= Math.max(newest('core'), newest(sources), written('package-lock.json'));
+};
+
+/** True where the command line is built, and from the sources as they are. */
+export const programIsBuilt = () => isNew(parts[1]);
+
+/** Builds the bench and the program behind it, unless what is built is newer than its sources. */
 export const build = () => {
-  const sources = Math.max(newest('core'), newest('web'), written('package-lock.json'));
-  if (written('dist/web/index.html') >= sources) return;
   const vite = `${root}node_modules/vite/bin/vite.js`;
-  must('Building the bench.', process.execPath, [
-    vite,
-    'build',
-    '--config',
-    'web/vite.config.ts',
-    '--logLevel',
-    'warn',
-  ]);
+  for (const part of parts.filter((one) => !isNew(one))) {
+    const config = `${part.sources}/vite.config.ts`;
+    must(part.said, process.execPath, [vite, 'build', '--config', config, '--logLevel', 'warn']);
+  }
 };

@@ -79,6 +79,7 @@ describe('the program as it is started from any folder', () => {
     mkdirSync(join(folder, 'api'));
     const bare = join(folder, 'api', 'copewright.js');
     copyFileSync(launcher, bare);
+    copyFileSync(fileURLToPath(new URL('../../api/setup.js', import.meta.url)), join(folder, 'api', 'setup.js'));
     writeFileSync(join(folder, 'package.json'), '{ "type": "module" }');
     const { status, out, err } = await ended(start(['check', 'x.json'], bare));
     expect([status, out]).toEqual([2, '']);

@@ -27,9 +27,14 @@ beforeEach(() => {
     copyFileSync(fileURLToPath(new URL(`../../api/${name}`, import.meta.url)), join(mkdirAt('api'), name));
   }
   put('api/copewright.js', "console.log('serving', process.argv.slice(2).join(' '));");
-  const vite =
-    "import fs from 'node:fs'; fs.mkdirSync('dist/web', { recursive: true }); fs.writeFileSync('dist/web/index.html', '');";
-  put('built-by.js', vite);
+  put('api/cli.ts', '');
+  put(
+    'built-by.js',
+    `import fs from 'node:fs';
+    const [part] = process.argv.find((one) => one.endsWith('vite.config.ts')).split('/');
+    fs.mkdirSync('dist/' + part, { recursive: true });
+    fs.writeFileSync('dist/' + part + (part === 'web' ? '/index.html' : '/cli.js'), '');`,
+  );
   put(
     'bin/npm',
     '#!/bin/sh\n[ "$1" = ci ] || exit 9\nmkdir -p node_modules/vite/bin\ncp built-by.js node_modules/vite/bin/vite.js\necho {} > node_modules/.package-lock.json\n',
@@ -52,12 +57,13 @@ const start = (...args: readonly string[]): { status: number | null; lines: stri
 
 const INSTALLS = 'Installing what the project needs (npm ci).';
 const BUILDS = 'Building the bench.';
+const BUILDS_PROGRAM = 'Building API and command line.';
 const SERVES = 'serving serve';
 
 describe.skipIf(process.platform === 'win32')('npm start', () => {
   test('on a clean clone installs, builds and serves, in any folder, and hands its arguments on', () => {
     const { status, lines } = start('--port', '0', '--host', '::1');
-    expect([status, lines]).toEqual([0, [INSTALLS, BUILDS, `${SERVES} --port 0 --host ::1`]]);
+    expect([status, lines]).toEqual([0, [INSTALLS, BUILDS, BUILDS_PROGRAM, `${SERVES} --port 0 --host ::1`]]);
   });
 
   test('a second time only serves', () => {
@@ -65,16 +71,25 @@ describe.skipIf(process.platform === 'win32')('npm start', () => {
     expect(start().lines).toEqual([SERVES]);
   });
 
-  test('builds again when a source is newer than what was built', () => {
+  test('builds again what has a source newer than what was built', () => {
     start();
     put('core/new.ts', '', -5);
+    expect(start().lines).toEqual([BUILDS, BUILDS_PROGRAM, SERVES]);
+  });
+
+  test('builds the bench alone when only its own sources are newer, and the program alone when only its own are', () => {
+    start();
+    put('web/main.ts', '', -5);
     expect(start().lines).toEqual([BUILDS, SERVES]);
+    put('web/main.ts', '');
+    put('api/cli.ts', '', -5);
+    expect(start().lines).toEqual([BUILDS_PROGRAM, SERVES]);
   });
 
   test('installs and builds again when the lock file is newer', () => {
     start();
     put('package-lock.json', '{}', -5);
-    expect(start().lines).toEqual([INSTALLS, BUILDS, SERVES]);
+    expect(start().lines).toEqual([INSTALLS, BUILDS, BUILDS_PROGRAM, SERVES]);
   });
 
   test('ends where installing fails, with its status', () => {

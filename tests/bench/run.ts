@@ -1,9 +1,10 @@
+import { spawn } from 'node:child_process';
 import { loadavg } from 'node:os';
-import { standards } from '../../core/standards/index.ts';
+import { createInterface } from 'node:readline';
 import { apiBench } from './apiBench.ts';
 import { benchBench } from './benchBench.ts';
-import { coreBench } from './coreBench.ts';
 import { sheetBench } from './sheetBench.ts';
+import { type Script, shipped } from './shipped.ts';
 import type { Figure } from './timing.ts';
 
 const kept = ({ value, ceiling, more }: Figure): boolean => (more ? value >= ceiling : value <= ceiling);
@@ -21,10 +22,18 @@ const collect = (rows: readonly Figure[]) => {
   for (const row of rows) process.stdout.write(`${show(row)}\n`);
 };
 
+/** Figures of the core as they come, a line for each standard. */
+const core = async (script: Script): Promise<void> => {
+  const child = spawn(process.execPath, [script('coreRun')], { stdio: ['ignore', 'pipe', 'inherit'] });
+  for await (const line of createInterface({ input: child.stdout })) collect(JSON.parse(line));
+};
+
 process.stdout.write(`Node ${process.version}, load ${loadavg()[0]!.toFixed(2)}; medians of interleaved rounds\n`);
-for (const standard of Object.values(standards)) collect(coreBench(standard));
-collect(await sheetBench());
-collect(await apiBench());
+await shipped(['coreRun', 'sheetRun', 'apiServers'], async (script) => {
+  await core(script);
+  collect(sheetBench(script));
+  collect(await apiBench(script));
+});
 collect(await benchBench());
 
 process.stdout.write(`load ${loadavg()[0]!.toFixed(2)} at the end\n`);

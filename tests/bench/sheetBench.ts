@@ -1,8 +1,6 @@
 import { spawnSync } from 'node:child_process';
-import { mkdtempSync, rmSync } from 'node:fs';
-import { join } from 'node:path';
 import { fileURLToPath } from 'node:url';
-import { build } from 'vite';
+import type { Script } from './shipped.ts';
 import type { Figure } from './timing.ts';
 
 /** Sheets of a short-lived process; of a long-running one, and how many of those are printed before it is taken to be warm. */
@@ -24,7 +22,7 @@ interface Run {
   readonly bytes: number;
 }
 
-/** Prints so many sheets in a fresh process, from the code as it ships: bundled, not transpiled on the way. */
+/** Prints so many sheets in a fresh process. */
 const printing = (script: string, count: number): Run => {
   const args = [script, here('../../fixtures/input/good/example.json'), String(count)];
   const { stdout, status } = spawnSync(process.execPath, args, { encoding: 'utf8' });
@@ -32,22 +30,10 @@ const printing = (script: string, count: number): Run => {
   return JSON.parse(stdout) as Run;
 };
 
-const runs = async (): Promise<{ short: Run[]; long: Run }> => {
-  const folder = mkdtempSync(here('../../node_modules/.cache-sheet-'));
-  try {
-    const outDir = join(folder, 'out');
-    await build({
-      configFile: false,
-      logLevel: 'silent',
-      build: { ssr: here('./sheetRun.ts'), outDir, emptyOutDir: true, target: 'node20' },
-    });
-    const script = join(outDir, 'sheetRun.js');
-    // The first process of all reads the files from the disk.
-    printing(script, 1);
-    return { short: Array.from({ length: PROCESSES }, () => printing(script, SHORT)), long: printing(script, LONG) };
-  } finally {
-    rmSync(folder, { recursive: true, force: true });
-  }
+const runs = (script: string): { short: Run[]; long: Run } => {
+  // The first process of all reads the files from the disk.
+  printing(script, 1);
+  return { short: Array.from({ length: PROCESSES }, () => printing(script, SHORT)), long: printing(script, LONG) };
 };
 
 /** Values in their order, so many at a time. */
@@ -58,8 +44,8 @@ const blocks = (values: readonly number[], size: number): number[][] =>
  * The sheet from JSON to PDF: in a short-lived process and in a long-running one, from the start of a process to its first, and its size.
  * Other work on the machine only ever adds to the time, so the best of several processes stands, and of the medians of several blocks.
  */
-export const sheetBench = async (): Promise<Figure[]> => {
-  const { short, long } = await runs();
+export const sheetBench = (script: Script): Figure[] => {
+  const { short, long } = runs(script('sheetRun'));
   const cold = Math.min(...short.map(({ later }) => middle(later)));
   const warm = Math.min(...blocks(long.later.slice(WARMED - 1), BLOCK).map(middle));
   const start = Math.min(...short.map(({ first }) => first));

@@ -39,7 +39,7 @@ const NOISE = 1e-6;
 /** Up to the next whole multiple of so many mm or inches. */
 const roundedUp = (symbol: string, size: Tree<Length>, multiple: number, units: UnitSystem): Tree<Length> => {
   const mm = fromSystem(multiple, '1,0', units);
-  const said = `${symbolsOf(size, undefined as never).text} up to the next ${plain(multiple, 6)} ${unitOf('1,0', units).name}`;
+  const said = `${symbolsOf(size, undefined as never)} up to the next ${plain(multiple, 6)} ${unitOf('1,0', units).name}`;
   const next = found('1,0', said, [size], (_, x) => Math.ceil(x! / mm - NOISE) * mm);
   return step(symbol, next, source);
 };

@@ -1,4 +1,5 @@
 import { unitOf } from '../units/systems.ts';
+import { comparedIn } from './comparedIn.ts';
 import { quantity, symbolsOf } from './line.ts';
 import type { Basis, Condition, Tree } from './tree.ts';
 
@@ -41,7 +42,7 @@ export const conditionText = (condition: Condition, met = true): string => {
     default: {
       const [left, right] = condition.of.map((one) => {
         const first = variantsOf(one)[0]!.tree;
-        return symbolsOf(first, undefined as never).text;
+        return symbolsOf(first, undefined as never);
       });
       return `${left} ${relation[condition.op][met ? 0 : 1]} ${right}`;
     }
@@ -91,7 +92,7 @@ const valuesIn = (tree: Tree, factors: ReadonlySet<Tree>): string[] => {
 
 const casesOf = (tree: Tree, factors: ReadonlySet<Tree>): FormulaCase[] => {
   const cases = variantsOf(tree).map(({ tree: one, when }) => ({
-    expression: [symbolsOf(one, undefined as never).text, ...new Set(valuesIn(one, factors))].join(', '),
+    expression: [symbolsOf(one, undefined as never), ...new Set(valuesIn(one, factors))].join(', '),
     when: [...new Set(when)].filter(Boolean).join('; '),
   }));
   const [first] = cases;
@@ -108,18 +109,6 @@ const rowOf = (tree: Step, under: string, factors: ReadonlySet<Tree>): FormulaRo
   basis: tree.source?.basis ?? '',
   note: tree.note ?? '',
 });
-
-const comparedIn = (condition: Condition): readonly Tree[] => {
-  switch (condition.op) {
-    case 'flag':
-      return [];
-    case 'atMost':
-    case 'below':
-      return condition.of;
-    default:
-      return (condition.of as readonly Condition[]).flatMap(comparedIn);
-  }
-};
 
 /** Notes each step in the order of use, with the choice that leads to it; a step that several lead to stands under none. */
 const visit = (tree: Tree, under: string, steps: Map<Step, string>): void => {

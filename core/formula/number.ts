@@ -48,10 +48,16 @@ export class Values {
     }
   }
 
+  /** Place of the branch that the facts take; past the last for what is taken otherwise. */
+  branch({ branches }: Tree & { op: 'pick' }): number {
+    let at = 0;
+    while (at < branches.length && !this.met(branches[at]!.when)) at += 1;
+    return at;
+  }
+
   /** The branch that the facts take. */
-  taken({ branches, otherwise }: Tree & { op: 'pick' }): Tree {
-    for (const { when, then } of branches) if (this.met(when)) return then;
-    return otherwise;
+  taken(pick: Tree & { op: 'pick' }): Tree {
+    return pick.branches[this.branch(pick)]?.then ?? pick.otherwise;
   }
 
   met(condition: Condition): boolean {

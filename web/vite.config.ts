@@ -33,9 +33,10 @@ const UNUSED = ['html2canvas', 'canvg', 'dompurify'];
 /** Fetches styles and further chunks ahead of a part that is loaded later; no part here has any. */
 const PRELOAD = '\0vite/preload-helper.js';
 
-/** The core's checks read every end and say its faults; on the bench what does so comes after the first view. */
+/** The core's checks read every end, find its faults and say them; on the bench what does so comes after the first view. */
 const comesLater = (id: string, importer = ''): boolean =>
-  /\/(?:end\/readEnd|words\/faults)\.ts$/.test(id) && importer.endsWith('/core/check/examineNumbers.ts');
+  /\/(?:end\/(?:readEnd|geometryFaults|holeFaults)|words\/faults)\.ts$/.test(id) &&
+  /\/core\/check\/(?:examineNumbers|resolve)\.ts$/.test(importer);
 
 /** Leaves the first two out of the build; the writer asks for the former only when such a page is given to it. */
 const lean = (): Plugin => ({

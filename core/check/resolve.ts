@@ -206,7 +206,7 @@ class Resolver {
     return inForce;
   }
 
-  /** Outline of a supporting beam; thickness and strength of what the joint is fixed to. */
+  /** Outline of the support; thickness and strength of what the joint is fixed to. */
   support(carried?: Carried): SupportGiven {
     const { support } = this.end;
     if (!support) return noSupportGiven;
@@ -223,10 +223,11 @@ class Resolver {
     const ofWeb = section && support.kind !== 'column-flange' ? webStrengthAt(section) : 0;
     const steel = carried?.support ?? this.supportSteel(Math.max(fixedTo, ofWeb));
     const given = { kind: support.kind, thickness: fixedTo, steel };
-    if (!section || support.kind !== 'beam-web') return { ...given, outline: noSupport };
+    if (!section) return { ...given, outline: noSupport };
     const { h, b, tw, tf, r } = section;
-    const topOfSteel = (support.topOfSteel ?? 0) * k;
-    return { ...given, outline: { here: true, h, b, tw, tf, r, topOfSteel } };
+    const here = support.kind === 'beam-web';
+    const topOfSteel = here ? (support.topOfSteel ?? 0) * k : 0;
+    return { ...given, outline: { here, h, b, tw, tf, r, topOfSteel } };
   }
 
   private supportSteel(thickness: number): Steel {

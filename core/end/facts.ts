@@ -25,8 +25,9 @@ export interface CutFacts {
   readonly t: number;
 }
 
-/** The supporting member's flange, where a supporting beam's section is known; heights as the beam's own. */
+/** The supporting member's outline, where its section is known, else zeros; heights as the beam's own. */
 export interface SupportFacts {
+  /** True for a supporting beam: its flanges may lie within the beam's depth. */
   readonly here: boolean;
   readonly b: number;
   readonly tw: number;

@@ -35,7 +35,7 @@ export interface Strengths {
   readonly supportBolt: SupportBoltGiven;
 }
 
-/** No supporting beam's section is known. */
+/** No supporting member's section is known. */
 export const noSupport: SupportFacts = { here: false, b: 0, tw: 0, tf: 0, r: 0, h: 0, topOfSteel: 0 };
 
 export const noSupportGiven: SupportGiven = {

@@ -128,7 +128,7 @@ export type Cut = ReturnType<typeof cut>;
 export const rectangle = cut((f) => f.rectangle);
 export const tee = cut((f) => f.tee);
 
-/** Supporting beam's section and level, mm. */
+/** Supporting member's section, and the level of a supporting beam, mm. */
 export const support = {
   h: given('h_s', '1,0', (f) => f.support.h),
   b: given('b_s', '1,0', (f) => f.support.b),

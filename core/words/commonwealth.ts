@@ -159,7 +159,7 @@ export const commonwealth: Words = {
     'nothing-left': 'nothing is left to resist it',
     'too-little': 'less than required',
     'too-much': 'more than allowed',
-    clash: 'cannot be built: it clashes with the supporting flange',
+    clash: 'cannot be built so: parts clash, or lie off the support',
   },
   bases: {
     seen: 'formula read in a published secondary source',

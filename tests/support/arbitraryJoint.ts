@@ -14,6 +14,7 @@ export interface PlausibleJoint extends PlausibleEnd {
   readonly supportSize: string;
   readonly supportEdge: number;
   readonly supportKind: 'none' | 'beam-web' | 'column-flange' | 'column-web';
+  readonly supportSection: string | undefined;
   readonly ts: number;
   readonly Vo: number;
   readonly T: number;
@@ -34,6 +35,7 @@ export const plausibleJoint: fc.Arbitrary<PlausibleJoint> = fc
       supportSize: fc.constantFrom('M16', 'M20', 'M24'),
       supportEdge: between(25, 60),
       supportKind: fc.constantFrom('none', 'beam-web', 'column-flange', 'column-web'),
+      supportSection: fc.constantFrom(undefined, 'UB 610x229x101', 'UC 254x254x73'),
       ts: between(6, 25),
       Vo: fc.oneof(fc.constant(0), between(1, 300)),
       T: fc.oneof(fc.constant(0), between(1, 200)),
@@ -114,7 +116,13 @@ const jointOf = (x: PlausibleJoint, kind: Joint['kind'], { joint }: End): Joint 
 /** The end joined in this way, as JSON. */
 export const jointEndOf = (x: PlausibleJoint, kind: Joint['kind']): End & Record<string, unknown> => {
   const end = endOf(x);
-  const support = { kind: x.supportKind, thickness: x.ts, grade: steel, otherReaction: x.Vo };
+  const support = {
+    kind: x.supportKind,
+    ...(x.supportSection && { section: x.supportSection }),
+    thickness: x.ts,
+    grade: steel,
+    otherReaction: x.Vo,
+  };
   return {
     ...end,
     tie: x.T,

@@ -189,6 +189,14 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
     return gap > 0 ? size('refer', gap, 10) : { ...size('fails', gap, 10), reason: 'clash' };
   };
 
+  /** The plate on the flat of the supporting web; over a flange it cannot be welded. */
+  const onWeb = ({ depth, flange, radius, topOfSteel }: NonNullable<typeof support>): Answer[] =>
+    [topOfSteel + y1 - eTop, depth - topOfSteel - yn - eBot].map((given) =>
+      given < flange
+        ? { ...size('fails', given, flange + radius), reason: 'clash' }
+        : size('refer', given, flange + radius),
+    );
+
   /** Only a flange of the support that lies within the beam's depth can meet a cope's face. */
   const clearance = (): Answer => {
     const { flange, radius, topOfSteel, depth } = support!;
@@ -269,6 +277,7 @@ export const secondCalculation = (end: SecondEnd): Readonly<Record<string, Answe
       size('refer', hp, 0.5 * (h - 2 * (tf + r))),
       size('refer', y1 - eTop, top ? dt : tf + r),
       size('refer', h - yn - eBot, bottom ? db : tf + r),
+      ...(support && weld ? onWeb(support) : []),
     ),
     'fit-cope-length': each(({ length }) => size('refer', length, eEnd + wide + d0 / 2)),
     'fit-cope-depth': deepEnough.length > 0 ? sizes(...deepEnough) : no('no-cope'),

@@ -10,6 +10,7 @@ import {
 import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, found, p, q, supportBolts, tp, ts, tw } from '../../end/given.ts';
 import { least, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
+import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { leastEdge } from './boltTable.ts';
 import { clause } from './clauses.ts';
@@ -91,4 +92,7 @@ export const fitEdgePlate = rule([
   ...nearSupport('support bolts, top', supportBolts.eTop),
   ...nearSupport('support bolts, bottom', supportBolts.eBot),
   ...nearSupport('support bolts, side edge', supportBolts.eh),
+  insideFlange(supportTabled),
+  insideFlange(supportBolts.d, 'fails'),
+  ...onColumn,
 ]);

@@ -4,6 +4,7 @@ import { cb, ct, d0, db, dt, flag, found, g, h, rb, rt, support, tf } from '../.
 import { constant, minus, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import { INCH } from '../../units/systems.ts';
+import { betweenFlanges } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { clause, manual } from './clauses.ts';
 import { older } from './copeBending.ts';
@@ -126,7 +127,7 @@ const underTop = step('d_min', minus(plus(support.tf, support.r), support.above)
 const overBottom = step('d_min', minus(h, minus(support.h, plus(support.tf, support.r, support.above))), method);
 const pastFlange = step('c_min', plus(minus(over(minus(support.b, support.tw), 2), g), inches('1/2', 1 / 2)), method);
 
-/** Copes that clear the flanges of the supporting beam, where these reach into the depth of this one. */
+/** Copes that clear the flanges of the supporting beam, where these reach into the depth of this one; room beside a beam between a column's flanges. */
 export const fitCopeClearance: FitRule = {
   source: method,
   breach: 'fails',
@@ -135,6 +136,7 @@ export const fitCopeClearance: FitRule = {
     { of: 'top, length', given: ct, least: pastFlange, off: [noSupport, beyondFlange, topFlangeClear] },
     { of: 'bottom, depth', given: db, least: overBottom, off: [noSupport, beyondFlange, bottomFlangeClear] },
     { of: 'bottom, length', given: cb, least: pastFlange, off: [noSupport, beyondFlange, bottomFlangeClear] },
+    ...betweenFlanges,
   ],
 };
 

@@ -2,6 +2,7 @@ import type { Facts } from '../../end/facts.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
 import { db, dt, flag, g, h, hp, r, tf, yp } from '../../end/given.ts';
 import { all, minus, not, over, plus, step, times } from '../../formula/tree.ts';
+import { onBeamWeb } from '../methods/supportOutline.ts';
 import type { FitRule } from '../standard.ts';
 import { manual } from './clauses.ts';
 import { extended } from './conventional.ts';
@@ -46,6 +47,7 @@ export const fitPlateDepth: FitRule = {
     { of: 'bottom', given: foot, least: db, off: [fullDepthPlate, notWelded, notCopedBelow] },
     { of: 'top', given: yp, least: dt, off: [notBoltedAngle, notCopedAbove], breach: 'refer' },
     { of: 'bottom', given: foot, least: db, off: [notBoltedAngle, notCopedBelow], breach: 'refer' },
+    ...onBeamWeb,
   ],
 };
 

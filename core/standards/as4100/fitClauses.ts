@@ -12,6 +12,7 @@ import { constant, least, pick, step, type Tree, times } from '../../formula/tre
 import type { Length } from '../../units/dimension.ts';
 import { fitCopeRadius as practiceRadius } from '../methods/fitPractice.ts';
 import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 
 const spacing = { clause: '9.5.1, 9.5.3', basis: 'seen' } as const;
@@ -95,6 +96,8 @@ export const fitEdgePlate: FitRule = {
     edge('bottom, support bolts', supportBolts.eBot, cutAtSupport, [noSupportBolts]),
     edge('side, support bolts', supportBolts.eh, cutAtSupport, [noSupportBolts, ofCleat]),
     edge('toe of the support leg', supportBolts.eh, rolledToe(supportBolts.d), [noSupportBolts, notCleat]),
+    insideFlange(rolledToe(supportBolts.d)),
+    ...onColumn,
   ],
 };
 

@@ -1,6 +1,7 @@
 import { fullDepthPlate, type Gate, noWebHoles, noWebWeld } from '../../end/gates.ts';
 import { ct, db, dt, flag, g, h, hp, r, rb, rt, support, tf, yp } from '../../end/given.ts';
 import { atMost, constant, minus, most, over, pick, plus, step, times } from '../../formula/tree.ts';
+import { betweenFlanges, onBeamWeb } from '../methods/supportOutline.ts';
 import type { FitRule } from '../standard.ts';
 import { upTo } from './bound.ts';
 import { notCleat } from './kinds.ts';
@@ -43,6 +44,7 @@ export const fitPlateDepth: FitRule = {
     { of: 'bottom, welded', given: foot, least: db, off: [noWebWeld, fullDepthPlate, noBottom] },
     { of: 'top, cleat', given: yp, least: dt, breach: 'refer', off: [notCleat, noWebHoles, noTop] },
     { of: 'bottom, cleat', given: foot, least: db, breach: 'refer', off: [notCleat, noWebHoles, noBottom] },
+    ...onBeamWeb,
   ],
 };
 
@@ -92,6 +94,7 @@ export const fitCopeClearance: FitRule = {
       least: step('d_min', most(minus(plus(support.tf, support.r), support.above), mm(0)), guide),
       off: [noSupport, noTop],
     },
+    ...betweenFlanges,
   ],
 };
 

@@ -11,6 +11,7 @@ import {
 import { ab, at, d0, eBot, eEnd, eTop, ex, flag, p, q, supportBolts, tp, tw } from '../../end/given.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
+import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitRule } from '../standard.ts';
 import { notEndPlate } from './kinds.ts';
 import { guide, seen } from './sources.ts';
@@ -90,5 +91,7 @@ export const fitEdgePlate: FitRule = {
     { of: 'support bolts, top', given: supportBolts.eTop, least: supportEdge, off: [noSupportBolts] },
     { of: 'support bolts, bottom', given: supportBolts.eBot, least: supportEdge, off: [noSupportBolts] },
     { of: 'support bolts, free edge', given: supportBolts.eh, least: supportEdge, off: [noSupportBolts] },
+    insideFlange(supportEdge),
+    ...onColumn,
   ],
 };

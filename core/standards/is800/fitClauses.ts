@@ -11,6 +11,7 @@ import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fyp, p, q, supportBolts, tp,
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
 import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { epsilon, fyw } from './given.ts';
 
@@ -96,5 +97,7 @@ export const fitEdgePlate: FitRule = {
     edge('bottom, support bolts', supportBolts.eBot, cutAtSupport, [noSupportBolts]),
     edge('side, support bolts', supportBolts.eh, cutAtSupport, [noSupportBolts, ofCleat]),
     edge('toe of the support leg', supportBolts.eh, rolledToe(supportBolts.d0), [noSupportBolts, notCleat]),
+    insideFlange(rolledToe(supportBolts.d0)),
+    ...onColumn,
   ],
 };

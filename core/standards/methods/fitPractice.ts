@@ -3,6 +3,7 @@ import { cb, ct, d0, db, dt, eEnd, flag, g, h, hp, m, q, r, rb, rt, support, tf,
 import { atMost, constant, minus, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
+import { betweenFlanges, onBeamWeb } from './supportOutline.ts';
 
 /** Rules of good practice, no clauses: an end that breaks one is referred, never failed, unless it cannot be built. */
 const source = { clause: 'practice', basis: 'practice' } as const;
@@ -20,7 +21,7 @@ const outsideSupport: Gate = {
 const root = step('t_f + r', plus(tf, r), source);
 const plateFoot = step('y_q', minus(h, plus(yp, hp)), source, 'foot of the plate, from below');
 
-/** Plate or cleat takes half of the clear web and stands between the fillets, or the cut edges. */
+/** Plate or cleat takes half of the clear web and stands between the fillets, or the cut edges, and on the flat of a supporting web. */
 export const fitPlateDepth: FitRule = {
   source,
   breach: 'refer',
@@ -43,6 +44,7 @@ export const fitPlateDepth: FitRule = {
       least: pick([[flag('', (f) => f.db > 0, 'coped below'), db]], root),
       off: [fullDepthPlate],
     },
+    ...onBeamWeb,
   ],
 };
 
@@ -118,7 +120,7 @@ const clearance = (c: Tree<Length>): Tree<Length> =>
 const clearTop = clearance(ct);
 const clearBottom = clearance(cb);
 
-/** Room between a cope's face and the supporting beam's flange. */
+/** Room between a cope's face and the supporting beam's flange, and beside a beam between a column's flanges. */
 export const fitCopeClearance: FitRule = {
   source,
   breach: 'refer',
@@ -137,6 +139,7 @@ export const fitCopeClearance: FitRule = {
       off: [noSupport, uncoped, noBottom, flangeBelow],
       clash: atMost(clearBottom, mm(0)),
     },
+    ...betweenFlanges,
   ],
 };
 

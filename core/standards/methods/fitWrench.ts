@@ -7,12 +7,30 @@ import {
   singleColumn,
   singleRow,
 } from '../../end/gates.ts';
-import { flag, given, h, leg, n, p, q, r, supportBolts, tf, tp, tw, y1, yp, z1 } from '../../end/given.ts';
+import {
+  flag,
+  given,
+  h,
+  leg,
+  n,
+  support as outline,
+  p,
+  q,
+  r,
+  supportBolts,
+  tf,
+  tp,
+  tw,
+  y1,
+  yp,
+  z1,
+} from '../../end/given.ts';
 import { minus, over, plus, step, type Tree, times } from '../../formula/tree.ts';
 import { wrenchRoom } from '../../steel/wrenchRoom.ts';
 import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
 import { notFinPlate } from './kinds.ts';
+import { columnFace, notBeamWeb, notColumnWeb } from './supportOutline.ts';
 import { bottomCut, headsApart, supportBottomCut, supportTopCut, topCut } from './wrenchGates.ts';
 
 /** Practice, no clause: an end without room for the wrench is referred, never failed, for another tool may do. */
@@ -52,11 +70,25 @@ const toOtherLeg = step('x_w', minus(z1, tp), source, 'from the first column to 
 
 const firstRow = plus(yp, supportBolts.eTop);
 const supportToTop = step('y_w', minus(firstRow, root), source, 'from the first row to the root of the top flange');
+const lastRow = plus(firstRow, times(minus(supportBolts.n, 1), supportBolts.p));
 const supportToBottom = step(
   'y_w',
-  minus(h, plus(firstRow, times(minus(supportBolts.n, 1), supportBolts.p), tf, r)),
+  minus(h, plus(lastRow, tf, r)),
   source,
   'from the last row to the root of the bottom flange',
+);
+const itsRoot = plus(outline.tf, outline.r);
+const supportToItsTop = step(
+  'y_w',
+  minus(plus(firstRow, outline.above), itsRoot),
+  source,
+  "from the first row to the root of the support's top flange",
+);
+const supportToItsFoot = step(
+  'y_w',
+  minus(outline.h, plus(lastRow, outline.above, itsRoot)),
+  source,
+  "from the last row to the root of the support's bottom flange",
 );
 const beside: Tree<Length> = over(minus(supportBolts.cc, tw), 2);
 const toWebLeg = step('x_w', minus(beside, tp), source, 'from the line to the leg on the web');
@@ -75,8 +107,8 @@ const toHeads = step('x_w', minus(toWebLeg, projection), source, 'from the line 
 
 /**
  * Room for head, washer, nut and wrench about every bolt, across its axis, mm: to the beam's flanges where these are not cut back, to the
- * support or to the cleat's other leg, past welds and the nuts of the other bolts, and to the next bolt. Along its axis the space is taken
- * to be open: a column's flanges or a beam opposite are not looked at. Bolts M12 to M36, 1/2 to 1-1/4 in.
+ * support or to the cleat's other leg, to the flanges of the support, past welds and the nuts of the other bolts, and to the next bolt. Along its axis the space is taken
+ * to be open. Bolts M12 to M36, 1/2 to 1-1/4 in.
  */
 export const fitWrench: FitRule = {
   source,
@@ -109,6 +141,24 @@ export const fitWrench: FitRule = {
       off: [noSupportBolts, noWebHoles, headsApart],
     },
     { of: 'support bolts, web', given: toWebWeld, least: support.toFace, off: [noSupportBolts, cleat] },
+    {
+      of: "support bolts, column's flange",
+      given: step('x_w', minus(columnFace, over(supportBolts.cc, 2)), source, "from the line to the column's flange"),
+      least: support.toFace,
+      off: [noSupportBolts, notColumnWeb],
+    },
+    {
+      of: "support bolts, support's top flange",
+      given: supportToItsTop,
+      least: support.toFace,
+      off: [noSupportBolts, notBeamWeb],
+    },
+    {
+      of: "support bolts, support's bottom flange",
+      given: supportToItsFoot,
+      least: support.toFace,
+      off: [noSupportBolts, notBeamWeb],
+    },
     { of: 'support bolts, rows', given: supportBolts.p, least: support.toBolt, off: [noSupportBolts, oneSupportRow] },
   ],
 };

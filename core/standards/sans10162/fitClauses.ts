@@ -11,6 +11,7 @@ import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, supportBolts, tp, tw } fro
 import { step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { cutEdge, greatestEdge, plateEdge, supportCutEdge, supportPlateEdge } from './edgeDistance.ts';
 
@@ -78,5 +79,7 @@ export const fitEdgePlate: FitRule = {
     edge('bottom, support bolts', below, supportPlateEdge, [noSupportBolts]),
     edge('side, support bolts', beside, supportPlateEdge, [noSupportBolts, ofCleat]),
     edge('toe of the support leg', beside, supportCutEdge, [noSupportBolts, notCleat]),
+    insideFlange(supportCutEdge),
+    ...onColumn,
   ],
 };

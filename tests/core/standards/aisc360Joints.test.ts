@@ -374,9 +374,10 @@ describe('fit of angles', () => {
   });
 
   test('a leg that reaches farther than the cope stays clear of the fillet', () => {
-    const high = { joint: { firstRow: 2.1, supportBolts: { topEdge: 1.25 } }, top: { depth: 0.8 } };
+    const placed = { firstRow: 2.1, supportBolts: { topEdge: 1.25 } };
+    const high = { joint: placed, top: { depth: 0.8 }, support: undefined };
     expect(stateOf(pair, 'fit-plate-depth', high)).toBe('holds');
-    const short = { ...high, top: { depth: 0.8, length: 2.5 }, support: undefined };
+    const short = { ...high, top: { depth: 0.8, length: 2.5 } };
     expect(stateOf(pair, 'fit-plate-depth', short)).toBe('fails, too-little');
   });
 });

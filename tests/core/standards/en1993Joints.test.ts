@@ -156,7 +156,7 @@ describe('cleats', () => {
   test('a cleat that reaches past a short notch must keep clear of the root of the flange there', () => {
     // Leg 110, setback 10: 100 on the web. The top of the cleat stands 15 below the top of steel, flange and root reach 23.
     const near = cleats({ cleat: { topEdge: 75 } });
-    const notch = (length: number) => ({ top: { length, depth: 50, radius: 10 } });
+    const notch = (length: number) => ({ top: { length, depth: 50, radius: 10 }, support: undefined });
     expect(check('fit-plate-depth', near, notch(100))).toMatchObject({ state: 'refer', of: 'top, cleat' });
     expect(check('fit-plate-depth', near, notch(99))).toMatchObject({ state: 'fails', of: 'top' });
   });

@@ -158,7 +158,7 @@ const planFor = (standard: Standard, kind: Joint['kind']): Plan => {
       ...fit.flatMap(({ rule, off }) => partsOf(rule).map((part) => partGroup(part, off))),
       { always: [standard.leastReaction], gates: [], of: [] },
     ],
-    V,
+    { kind, changing: V },
   );
   const next = inTurn(places);
   return {

@@ -1,4 +1,6 @@
 import { type Condition, not } from '../formula/tree.ts';
+import { byKind, isCleat, isEndPlate, isPlate, settledByKind } from './byKind.ts';
+import type { Facts } from './facts.ts';
 import { flag } from './given.ts';
 
 /** A condition under which a check says something else than a number's verdict; `reason` is a code of core/words. */
@@ -41,21 +43,34 @@ export const singleRow: Gate = { when: oneRow, reason: 'single-row' };
 export const singleColumn: Gate = { when: oneColumn, reason: 'single-column' };
 export const noTieForce: Gate = { when: noTie, reason: 'no-tie' };
 
+// Cleats alone may be bolted or welded on either side.
+const unlessCleats =
+  (holds: (kind: Facts['kind']) => boolean) =>
+  (kind: Facts['kind']): boolean | undefined =>
+    isCleat(kind) ? undefined : holds(kind);
+const noHoles = unlessCleats(isEndPlate);
+const offTheWeb = unlessCleats(isPlate);
+const offTheSupport = unlessCleats((kind) => kind !== 'fin-plate');
+const supportUndrilled = unlessCleats(isPlate);
+
 /** The web is welded to its plate or cleat: nothing is drilled in it. */
-export const noWebHoles: Gate = { when: flag('', (f) => f.n === 0, 'no bolts in the web'), reason: 'no-web-holes' };
+export const noWebHoles: Gate = {
+  when: settledByKind('', noHoles, (f) => f.n === 0, 'no bolts in the web'),
+  reason: 'no-web-holes',
+};
 /** The web is bolted: no weld runs along it. */
 export const noWebWeld: Gate = {
-  when: flag('', (f) => f.weldTo !== 'web', 'no weld along the web'),
+  when: settledByKind('', offTheWeb, (f) => f.weldTo !== 'web', 'no weld along the web'),
   reason: 'web-bolted',
 };
 /** No weld joins plate or cleat to the support. */
 export const noSupportWeld: Gate = {
-  when: flag('', (f) => f.weldTo !== 'support', 'no weld to the support'),
+  when: settledByKind('', offTheSupport, (f) => f.weldTo !== 'support', 'no weld to the support'),
   reason: 'no-weld',
 };
 /** Plate or cleat is welded to the support. */
 export const noSupportBolts: Gate = {
-  when: flag('', (f) => f.supportBolts.n === 0, 'no bolts in the support'),
+  when: settledByKind('', supportUndrilled, (f) => f.supportBolts.n === 0, 'no bolts in the support'),
   reason: 'no-support-bolts',
 };
 export const oneSupportRow: Gate = {
@@ -63,10 +78,13 @@ export const oneSupportRow: Gate = {
   reason: 'single-row',
 };
 /** One angle alone: what it hangs on stands beside the web. */
-export const pairOfCleats: Gate = { when: flag('', (f) => f.k === 2, 'a pair of cleats'), reason: 'pair-of-cleats' };
+export const pairOfCleats: Gate = {
+  when: byKind('', (kind) => kind === 'double-cleat', 'a pair of cleats'),
+  reason: 'pair-of-cleats',
+};
 /** An end plate of the beam's full depth is no simple joint: what would hold refers. */
 export const fullDepthPlate: Limit = {
-  when: flag('an end plate of the full depth', (f) => f.kind === 'full-end-plate'),
+  when: byKind('an end plate of the full depth', (kind) => kind === 'full-end-plate'),
   reason: 'full-depth-plate',
   always: false,
 };

@@ -4,6 +4,13 @@ import { does, type Solver } from './run.ts';
 /** Numbers that a gate takes in a row. */
 const GATE = 3;
 
+/** A condition, the number under which it is noted, and whether it closes. */
+interface NodeGate {
+  readonly when: Node;
+  readonly closes: boolean;
+  readonly number: number;
+}
+
 /** Writes nodes as instructions over numbered cells. */
 export class CodeWriter {
   /** Cells whose value stands wherever they are read. */
@@ -51,17 +58,17 @@ export class CodeWriter {
   }
 
   /** Looks at gates, then writes what stands behind those that close. The cell for the number of the first that is met. */
-  behind(gates: readonly { readonly when: Node; readonly closes: boolean }[], write: () => void): number {
+  behind(gates: readonly NodeGate[], write: () => void): number {
     const gate = this.newCell();
     const ends: { readonly row: number; readonly closes: boolean }[] = [];
     let first = 0;
-    gates.forEach(({ when, closes }, at) => {
+    gates.forEach(({ when, closes, number }, at) => {
       // What leans on a solver is looked at only where no gate before it is met.
       if (when.solved) {
         this.putGates(gate, at - first);
         first = at;
       }
-      ends.push({ row: this.rows.push(this.value(when), at, 0) - 1, closes });
+      ends.push({ row: this.rows.push(this.value(when), number, 0) - 1, closes });
     });
     this.putGates(gate, gates.length - first);
     const open = this.next;

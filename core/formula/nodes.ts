@@ -1,4 +1,4 @@
-import type { Condition, Tree } from './tree.ts';
+import type { Branch, Condition, Tree } from './tree.ts';
 
 export type Read = (facts: never) => number;
 export type Flag = (facts: never) => boolean;
@@ -38,12 +38,15 @@ const PLACES = 2 ** 17;
 export class Nodes {
   /** Each after those that it leans on. */
   readonly all: Node[] = [];
-  private readonly known = new Map<Node['op'], Map<unknown, Node>>();
+  private readonly made = new Map<Node['op'], Map<unknown, Node>>();
   private readonly seen = new Map<Tree | Condition, Node>();
   private readonly solvers = new Map<unknown, number>();
 
-  /** `changing`: how the quantity that may change after a run is read. */
-  constructor(private readonly changing?: Read) {}
+  /** `known`: the kind of all facts to come; `changing`: how the quantity that may change after a run is read. */
+  constructor(
+    private readonly known: string,
+    private readonly changing?: Read,
+  ) {}
 
   of(one: Tree | Condition): Node {
     const seen = this.seen.get(one);
@@ -68,8 +71,11 @@ export class Nodes {
       case 'constant':
         return this.literal(one.value);
       case 'given':
-      case 'flag':
         return this.node(one.op, [], one.read);
+      case 'flag': {
+        const settled = one.beforehand?.(this.known);
+        return settled === undefined ? this.node(one.op, [], one.read) : this.literal(Number(settled));
+      }
       case 'bare':
       case 'stress':
       case 'step':
@@ -79,18 +85,41 @@ export class Nodes {
         if (one.exponent === 2) return this.node('square', [this.of(one.of[0])]);
         return this.node('power', [this.of(one.of[0]), this.literal(one.exponent)]);
       case 'pick':
-        return one.branches.reduceRight(
-          (rest, { when, then }) => this.node('pick', [this.of(when), this.of(then), rest]),
-          this.of(one.otherwise),
-        );
+        return this.choice(one.branches, one.otherwise);
       case 'found':
         return this.node('found', this.each(one.of), one.solve);
       case 'root':
-      case 'not':
         return this.node(one.op, this.each(one.of));
+      case 'not': {
+        const inner = this.of(one.of[0]);
+        return typeof inner.is === 'number' ? this.literal(1 - inner.is) : this.node('not', [inner]);
+      }
+      case 'all':
+      case 'any':
+        return this.together(one.op, one.of);
       default:
         return this.each(one.of).reduce((a, b) => this.pair(one.op, a, b));
     }
+  }
+
+  /** Branches whose conditions are settled beforehand are taken or left out here. */
+  private choice([first, ...rest]: readonly Branch[], otherwise: Tree): Node {
+    if (!first) return this.of(otherwise);
+    const when = this.of(first.when);
+    if (when.is === 1) return this.of(first.then);
+    if (when.is === 0) return this.choice(rest, otherwise);
+    return this.node('pick', [when, this.of(first.then), this.choice(rest, otherwise)]);
+  }
+
+  private together(op: 'all' | 'any', conditions: readonly Condition[]): Node {
+    const decides = op === 'all' ? 0 : 1;
+    const open: Node[] = [];
+    for (const one of conditions) {
+      const node = this.of(one);
+      if (node.is === decides) return node;
+      if (typeof node.is !== 'number') open.push(node);
+    }
+    return open.length === 0 ? this.literal(1 - decides) : open.reduce((a, b) => this.node(op, [a, b]));
   }
 
   private each(of: readonly (Tree | Condition)[]): Node[] {
@@ -119,10 +148,10 @@ export class Nodes {
 
   /** Every node of one kind. */
   private alike(op: Node['op']): Map<unknown, Node> {
-    let alike = this.known.get(op);
+    let alike = this.made.get(op);
     if (!alike) {
       alike = new Map();
-      this.known.set(op, alike);
+      this.made.set(op, alike);
     }
     return alike;
   }

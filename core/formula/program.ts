@@ -29,6 +29,14 @@ export interface Place {
   readonly from: number;
 }
 
+/** What is known of all facts that a program will meet. */
+interface Known {
+  /** Their kind: what it settles is no part of the program. */
+  readonly kind?: string;
+  /** The quantity that `after` is asked for at another value. */
+  readonly changing?: Tree | undefined;
+}
+
 type Nodal = readonly (Node | undefined)[];
 
 const there = (of: Nodal): Node[] => of.filter((one) => one !== undefined);
@@ -49,27 +57,31 @@ const commonOf = (nodes: readonly Node[], owners: Int32Array): ReadonlyMap<numbe
 /**
  * Writes groups of formulas as one program, and says where their values stand after a run. What several groups lean on is worked out once, at
  * the head; what several formulas of one group lean on, once behind its gates; what only one leans on, within the branch that the facts take.
- * A solver runs when it is first needed, and once a run. `changing`: the quantity that `after` is asked for at another value.
+ * A solver runs when it is first needed, and once a run.
  */
 export const programOf = (
   groups: readonly Group[],
-  changing?: Tree,
+  { kind = '', changing }: Known = {},
 ): { readonly program: Program; readonly places: readonly Place[] } => {
   const read = changing?.op === 'given' ? changing.read : undefined;
-  const nodes = new Nodes(read);
+  const nodes = new Nodes(kind, read);
   const ask = (one: Asked, uses = 1): Node | undefined => {
     const node = one && nodes.of(one);
     if (node) node.uses += uses;
     return node;
   };
-  const asked = groups.map(({ gates, of, always }) => ({
-    always: always.map((one) => ask(one)),
+  const asked = groups.map(({ gates: all, of, always }) => {
     // A gate is looked at in a row with others, so its condition is settled at the head.
-    gates: gates.map(({ when, closes }) => ({ when: ask(when, 2)!, closes })),
-    of: of.map((one) => ask(one)),
-  }));
+    const gates = all
+      .map(({ when, closes }, number) => ({ when: ask(when, 2)!, closes, number }))
+      .filter(({ when }) => when.is !== 0);
+    const [first] = gates;
+    const shut = first?.closes && first.when.is === 1 ? nodes.literal(first.number) : undefined;
+    const free = always.map((one) => ask(one));
+    return shut ? { shut, always: free, gates: [], of: [] } : { always: free, gates, of: of.map((one) => ask(one)) };
+  });
   const run = nodes.all.length;
-  const afters = groups.map(({ after = [] }) => after.map((one) => ask(one, 0)));
+  const afters = groups.map(({ after = [] }, at) => (asked[at]!.shut ? [] : after.map((one) => ask(one, 0))));
   nodes.literal(0);
   nodes.literal(1);
 
@@ -95,8 +107,9 @@ export const programOf = (
   settle(SHARED);
 
   const values = (of: Nodal) => of.map((one) => one && writer.value(one));
-  const places = asked.map(({ gates, of, always }, at) => {
+  const places = asked.map(({ shut, gates, of, always }, at) => {
     const free = values(always);
+    if (shut) return { gate: cellOf.get(shut)!, of: [], always: free };
     let cells: Place['of'] = [];
     const gate = writer.behind(gates, () => {
       settle(at);

@@ -10,7 +10,8 @@ export interface Source {
   readonly basis: Basis;
 }
 
-interface Branch {
+/** One way that a choice may go. */
+export interface Branch {
   readonly when: Condition;
   readonly then: Tree;
 }
@@ -53,6 +54,8 @@ export type Condition =
       readonly read: (facts: never) => boolean;
       readonly text: string;
       readonly called: string;
+      /** What it comes to where no more than the kind of facts is known; undefined where they decide. */
+      readonly beforehand?: (kind: string) => boolean | undefined;
     }
   | { readonly op: 'not'; readonly of: readonly [Condition] }
   | { readonly op: 'all' | 'any'; readonly of: readonly Condition[] };
@@ -97,11 +100,17 @@ export const givenOf =
  */
 export const flagOf =
   <F>() =>
-  (text: string, read: (facts: F) => boolean, called: string = text): Condition => ({
+  (
+    text: string,
+    read: (facts: F) => boolean,
+    called: string = text,
+    beforehand?: (kind: string) => boolean | undefined,
+  ): Condition => ({
     op: 'flag',
     text,
     called,
     read: read as (facts: never) => boolean,
+    ...(beforehand && { beforehand }),
   });
 
 export const times = <const T extends readonly Term[]>(...of: T): Tree<Known<Product<DimensionsOf<T>>>> => {

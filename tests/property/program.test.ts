@@ -11,9 +11,9 @@ import type { Condition, Tree } from '../../core/formula/tree.ts';
 import { joints } from '../../core/joints/index.ts';
 import { standards } from '../../core/standards/index.ts';
 import { isNoRule } from '../../core/standards/standard.ts';
-import { endOf, plausibleEnd } from '../support/arbitraryEnd.ts';
+import { jointEndOf, plausibleJoint } from '../support/arbitraryJoint.ts';
+import { underStandard } from '../support/underStandard.ts';
 
-/** What a joint's list asks for can be worked out from the facts of any end. */
 const kinds = Object.keys(joints) as (keyof typeof joints)[];
 
 /** Facts of a random end under one standard; none where it is refused. */
@@ -41,8 +41,8 @@ describe.each(Object.values(standards))(
       const { program, strength, fit } = planOf(standard, kind);
       let compared = 0;
       fc.assert(
-        fc.property(plausibleEnd, fc.constantFrom(0, 120), (end, tie) => {
-          const facts = factsOf({ ...endOf({ ...end, standard: standard.id }), tie });
+        fc.property(plausibleJoint, (end) => {
+          const facts = factsOf(underStandard(jointEndOf(end, kind), standard));
           if (!facts) return;
           const values = new Values(facts as never);
           run(program, facts as never);

@@ -1,3 +1,4 @@
+import { byKind, isCleat, isEndPlate } from '../../end/byKind.ts';
 import type { Facts } from '../../end/facts.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
 import { d, flag, hp, m, n, supportBolts, tp, tw } from '../../end/given.ts';
@@ -49,13 +50,13 @@ const Mmax = step('M_max', times(over(Fnv, constant('0.90', 0.9)), boltArea, Cmo
 const weakerThanBolts = step('t_max', over(times(6, Mmax), times(Fyp, squared(hp))), source);
 
 const off = (when: Condition, reason: string): Gate => ({ when, reason });
-const unless = (called: string, is: (f: Facts) => boolean, reason: string): Gate =>
-  off(not(flag('', is, called)), reason);
+const unless = (called: string, is: (kind: Facts['kind']) => boolean, reason: string): Gate =>
+  off(not(byKind('', is, called)), reason);
 
-const notFinPlate = unless('fin plate', (f) => f.kind === 'fin-plate', 'fin-plates-only');
-const noAngles = unless('angles', (f) => f.legWeb > 0, 'no-cleat');
-const notOneAngle = unless('one angle', (f) => f.kind === 'single-cleat', 'no-cleat');
-const noEndPlate = unless('end plate', (f) => f.bp > 0, 'no-end-plate');
+const notFinPlate = unless('fin plate', (kind) => kind === 'fin-plate', 'fin-plates-only');
+const noAngles = unless('angles', isCleat, 'no-cleat');
+const notOneAngle = unless('one angle', (kind) => kind === 'single-cleat', 'no-cleat');
+const noEndPlate = unless('end plate', isEndPlate, 'no-end-plate');
 const endPlateOff = [noEndPlate, fullDepthPlate];
 
 /** One angle alone has 3/8 in, 1/2 in for bolts above 7/8 in. */

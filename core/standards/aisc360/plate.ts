@@ -1,3 +1,4 @@
+import { byKind } from '../../end/byKind.ts';
 import type { Gate } from '../../end/gates.ts';
 import { flag, hp, tp, tw, V, z1 } from '../../end/given.ts';
 import { plateNetPlastic } from '../../end/netSections.ts';
@@ -17,7 +18,10 @@ const source = manual(10);
 const ruptured = clause('J4.5');
 
 /** The ply beyond the bolts is not described: how it bends has to be checked apart. */
-const notDescribed: Gate = { when: flag('', (f) => f.kind === 'web-bolts', 'web bolts'), reason: 'ply-not-described' };
+const notDescribed: Gate = {
+  when: byKind('', (kind) => kind === 'web-bolts', 'web bolts'),
+  reason: 'ply-not-described',
+};
 const off = [notDescribed, conventionalPlate];
 
 const moment = step('M', times(V, z1), source);

@@ -1,5 +1,6 @@
+import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
-import { flag, h, hp, k, leg, r, tf, tp, tw, V } from '../../end/given.ts';
+import { h, hp, k, leg, r, tf, tp, tw, V } from '../../end/given.ts';
 import { legWeldForce } from '../../end/weldGroup.ts';
 import { below, least, minus, most, not, over, pick, plus, root, step, times } from '../../formula/tree.ts';
 import type { StrengthRule, Way } from '../standard.ts';
@@ -12,7 +13,7 @@ import { edgeTooThin } from './supportLegWeld.ts';
 const line = clause('J2.4');
 const base = clause('J4.2, J4-4');
 
-const notEndPlate: Gate = { when: flag('', (f) => f.bp === 0, 'no end plate'), reason: 'no-weld' };
+const notEndPlate: Gate = { when: byKind('', (kind) => !isEndPlate(kind), 'no end plate'), reason: 'no-weld' };
 const endPlate: Gate = { when: not(notEndPlate.when), reason: 'no-weld' };
 const fullDepth = fullDepthPlate.when;
 

@@ -1,3 +1,4 @@
+import { byKind } from '../../end/byKind.ts';
 import type { Gate, Limit } from '../../end/gates.ts';
 import { flag, hp, leg, tp, V, z } from '../../end/given.ts';
 import { all, below, constant, most, not, over, plus, root, squared, step, times } from '../../formula/tree.ts';
@@ -21,7 +22,10 @@ const legAsked = step(
 
 const byStrength = flag('option weld: strength', (f) => f.options.weld === 'strength');
 const tooSmall = below(leg, legAsked);
-const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate', 'no fin plate'), reason: 'fin-plates-only' };
+const notFinPlate: Gate = {
+  when: byKind('', (kind) => kind !== 'fin-plate', 'no fin plate'),
+  reason: 'fin-plates-only',
+};
 const bySize: Gate = { when: all(not(byStrength), not(tooSmall)), reason: 'weld-by-size' };
 const notBySize: Gate = { when: not(bySize.when), reason: 'weld-by-strength' };
 const belowLeast: Limit = { when: tooSmall, reason: 'weld-leg-below-least', always: false };

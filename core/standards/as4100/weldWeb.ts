@@ -1,5 +1,6 @@
+import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
-import { flag, hp, k, tw, V } from '../../end/given.ts';
+import { hp, k, tw, V } from '../../end/given.ts';
 import { legWeldForce, legWeldLength } from '../../end/weldGroup.ts';
 import { over, pick, step, times } from '../../formula/tree.ts';
 import { legAboveEdge } from '../methods/leastLeg.ts';
@@ -8,7 +9,7 @@ import { phi } from './factors.ts';
 import { fyw } from './given.ts';
 import { belowLeast, filletStrength, source } from './weld.ts';
 
-const endPlate: Gate = { when: flag('', (f) => f.bp > 0, 'an end plate'), reason: 'covered' };
+const endPlate: Gate = { when: byKind('', isEndPlate, 'an end plate'), reason: 'covered' };
 
 /** Two fillets of the end plate's depth share V; the C-shaped weld of a cleat's web leg holds it at its arm too. */
 const force = step('v*', pick([[endPlate.when, over(V, times(2, hp))]], legWeldForce), source);

@@ -1,3 +1,4 @@
+import { byKind } from '../../end/byKind.ts';
 import {
   boltNotListed,
   fullDepthPlate,
@@ -51,7 +52,7 @@ export const noStressArea: Limit = {
 
 /** The line of bolts of one cleat alone stands beside the web: the joint guide has pairs and end plates only. */
 export const oneCleat: Limit = {
-  when: flag('one cleat alone', (f) => f.kind === 'single-cleat'),
+  when: byKind('one cleat alone', (kind) => kind === 'single-cleat'),
   reason: 'one-cleat',
   always: true,
   noNumber: true,

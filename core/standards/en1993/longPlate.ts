@@ -1,5 +1,6 @@
+import { byKind } from '../../end/byKind.ts';
 import { coped, type Gate, singleRow } from '../../end/gates.ts';
-import { d0, eEnd, flag, found, fu, fy, m, n, p, q, tw, V, z1 } from '../../end/given.ts';
+import { d0, eEnd, found, fu, fy, m, n, p, q, tw, V, z1 } from '../../end/given.ts';
 import {
   atMost,
   below,
@@ -55,7 +56,7 @@ export const webBesideRoot = (e: number, couple: number, M0: number, FBC: number
   return (low + high) / 2;
 };
 
-const notFinPlate: Gate = { when: flag('no fin plate', (f) => f.kind !== 'fin-plate'), reason: 'fin-plates-only' };
+const notFinPlate: Gate = { when: byKind('no fin plate', (kind) => kind !== 'fin-plate'), reason: 'fin-plates-only' };
 const isCoped: Gate = { when: coped, reason: 'coped' };
 
 /**

@@ -1,3 +1,4 @@
+import { byKind, isCleat } from '../../end/byKind.ts';
 import { type Limit, noSupportBolts, noTieForce } from '../../end/gates.ts';
 import { flag, fup, given, leg, supportBolts, T, tp, tw } from '../../end/given.ts';
 import {
@@ -25,7 +26,7 @@ const washers: Readonly<Record<number, number>> = { 12: 24, 16: 30, 20: 37, 22: 
 const dw = given('d_w', '1,0', (f) => washers[f.supportBolts.d] ?? 0);
 const rootRadius = given('r_a', '1,0', (f) => f.rootRadius);
 const noRadius = flag('no root radius given', (f) => f.rootRadius === 0);
-const isCleat = flag('', (f) => f.legWeb > 0, 'cleats');
+const withCleats = byKind('', isCleat, 'cleats');
 
 const { n, p, cc, d0, fub, As, ev, eh } = supportBolts;
 const gap = minus(cc, tw);
@@ -34,7 +35,7 @@ const gap = minus(cc, tw);
 const m = step(
   'm′',
   pick(
-    [[isCleat, over(minus(minus(gap, times(2, tp)), times(1.6, rootRadius)), 2)]],
+    [[withCleats, over(minus(minus(gap, times(2, tp)), times(1.6, rootRadius)), 2)]],
     over(minus(gap, times(1.6, leg)), 2),
   ),
   guide,
@@ -42,7 +43,7 @@ const m = step(
 const edge = step('n′', least(eh, times(1.25, m)), guide);
 /** Clear width between the welds or roots. Without a radius the thickness stands in its place. mm */
 const s = pick(
-  [[isCleat, step('s_c', minus(gap, times(2, pick([[noRadius, tp]], rootRadius))), guide)]],
+  [[withCleats, step('s_c', minus(gap, times(2, pick([[noRadius, tp]], rootRadius))), guide)]],
   step('s_c', minus(gap, times(2, leg)), memory(guide.clause)),
 );
 const length = step(

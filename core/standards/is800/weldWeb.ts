@@ -1,5 +1,6 @@
+import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
-import { flag, fu, fup, hp, k, tw, V } from '../../end/given.ts';
+import { fu, fup, hp, k, tw, V } from '../../end/given.ts';
 import { legWeldForce, legWeldLength } from '../../end/weldGroup.ts';
 import { least, over, pick, root, step, times } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -8,7 +9,7 @@ import { countedOf, filletStrength, limitsOf, source } from './fillet.ts';
 import { fuw, fyw } from './given.ts';
 
 const yields = { clause: '8.4.1', basis: 'practice' } as const;
-const endPlate: Gate = { when: flag('', (f) => f.bp > 0, 'an end plate'), reason: 'covered' };
+const endPlate: Gate = { when: byKind('', isEndPlate, 'an end plate'), reason: 'covered' };
 
 const length = countedOf(pick([[endPlate.when, hp]], legWeldLength));
 const mild = step('f_u', least(fuw, fup, fu), source, 'weld metal, plate or web');

@@ -1,5 +1,6 @@
+import { byKind, isPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate, noSupportBolts, noWebHoles, oneColumn } from '../../end/gates.ts';
-import { d, flag, h, hp, leg, r, supportBolts, tf, tp, tw } from '../../end/given.ts';
+import { d, h, hp, leg, r, supportBolts, tf, tp, tw } from '../../end/given.ts';
 import { constant, least, minus, most, not, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
@@ -8,9 +9,9 @@ import type { FitRule } from '../standard.ts';
 const source = { clause: 'practice', basis: 'practice' } as const;
 
 const thinner = pick([[oneColumn, least(tp, tw)]], most(tp, tw));
-const notFinPlate: Gate = { when: flag('', (f) => f.kind !== 'fin-plate'), reason: 'fin-plates-only' };
+const notFinPlate: Gate = { when: byKind('', (kind) => kind !== 'fin-plate'), reason: 'fin-plates-only' };
 const noThinPart: Gate = {
-  when: flag('neither cleat nor end plate', (f) => f.bp === 0 && f.legWeb === 0),
+  when: byKind('neither cleat nor end plate', isPlate),
   reason: 'fin-plates-only',
 };
 const partDepth: Gate = { when: not(fullDepthPlate.when), reason: 'fin-plates-only' };

@@ -147,7 +147,7 @@ describe('what is asked for after a run', () => {
     after: [grown, over(solver().tree, t), times(2, w)],
   };
   const after = (facts: Plate, value: number) => {
-    const { program, places } = programOf([group], t);
+    const { program, places } = programOf([group], { changing: t });
     run(program, facts as never);
     const { from, after } = places[0]!;
     runAgain(program, facts as never, from, value);
@@ -161,7 +161,7 @@ describe('what is asked for after a run', () => {
 
   test('costs nothing before: the run itself solves nothing for it', () => {
     const { tree, runs } = solver();
-    const { program } = programOf([{ gates: [], of: [t], always: [], after: [tree] }], t);
+    const { program } = programOf([{ gates: [], of: [t], always: [], after: [tree] }], { changing: t });
     run(program, plate as never);
     expect(runs()).toBe(0);
   });

@@ -48,14 +48,13 @@ const stateAtReaction = (plan: Plan, facts: Facts, rows: number[], check: number
 };
 
 /** The check with the least reaction at failure, of those that hold, fail or refer; -1 where there is none. */
-const firstUsedUp = (plan: Plan, rows: readonly number[]): number => {
+const firstUsedUp = (strength: number, rows: readonly number[]): number => {
   let first = -1;
-  let least = Number.NaN;
-  for (let check = 0; check < plan.strength.length; check += 1) {
-    const failsAt = rows[check * WIDTH + FAILS_AT]!;
-    if (rows[check * WIDTH + STATE]! <= INFORMATION || Number.isNaN(failsAt)) continue;
-    if (first >= 0 && !(failsAt < least)) continue;
-    first = check;
+  let least = Number.POSITIVE_INFINITY;
+  for (let row = 0; row < strength * WIDTH; row += WIDTH) {
+    const failsAt = rows[row + FAILS_AT]!;
+    if (rows[row + STATE]! <= INFORMATION || !(failsAt < least || (first < 0 && failsAt === least))) continue;
+    first = row / WIDTH;
     least = failsAt;
   }
   return first;
@@ -102,8 +101,8 @@ export const evaluate = (plan: Plan, facts: Facts, given: number): Evaluation =>
   for (let at = 0; at < strength.length; at += 1, row += WIDTH) evaluateStrength(strength[at]!, cells, V, rows, row);
   for (let at = 0; at < fit.length; at += 1, row += WIDTH) evaluateFit(fit[at]!, cells, rows, row);
   facts.V = V;
-  for (let check = 0; check < strength.length; check += 1) stateAtReaction(plan, facts, rows, check);
-  const first = firstUsedUp(plan, rows);
+  for (const check of plan.notInProportion) stateAtReaction(plan, facts, rows, check);
+  const first = firstUsedUp(strength.length, rows);
   if (first >= 0) referWhereFirst(plan, facts, rows, first);
   const worst = worstWithoutV(rows);
   return {

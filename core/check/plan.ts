@@ -81,6 +81,8 @@ export interface Plan {
   /** Place of the full section's shear among the strength checks. */
   readonly grossShear: number;
   readonly strength: readonly StrengthPlan[];
+  /** Places of the strength checks that have ways not in proportion to V. */
+  readonly notInProportion: readonly number[];
   readonly fit: readonly FitPlan[];
   /** Least reaction to check for, N. */
   readonly leastReaction: Cell;
@@ -166,6 +168,7 @@ const planFor = (standard: Standard, kind: Joint['kind']): Plan => {
     program,
     blank: [...strength, ...fit].flatMap(blankRow),
     grossShear: strength.findIndex(({ id }) => id === 'web-gross-shear'),
+    notInProportion: strength.flatMap(({ rule }, at) => (waysOf(rule).some((way) => way.failsAt) ? [at] : [])),
     strength: strength.map(({ id, part, off, rule }) => ({
       id,
       part,

@@ -1,6 +1,6 @@
 import type { CutFacts, Facts } from '../end/facts.ts';
 import { plasticModulus } from '../shape/plasticModulus.ts';
-import { firstMoment, type Shape } from '../shape/shape.ts';
+import type { Shape } from '../shape/shape.ts';
 import { shearPeak, shearProfile } from '../shape/shearStress.ts';
 import { toSystem, type UnitSystem } from '../units/systems.ts';
 import type { SectionStress } from './report.ts';
@@ -26,7 +26,7 @@ const stressesOf = (
     inertia: toSystem(shape.inertia, '4,0', units),
     modulusCut: toSystem(cut, '3,0', units),
     plasticModulus: toSystem(plasticModulus(shape), '3,0', units),
-    firstMoment: toSystem(firstMoment(shape, peak.at), '3,0', units),
+    firstMoment: toSystem(peak.Q, '3,0', units),
     peakStress: toSystem(peak.perNewton * f.V, '-2,1', units),
     peakAt: toSystem(peak.at, '1,0', units),
     meanStress: toSystem(f.V / (f.tw * shape.depth), '-2,1', units),

@@ -1,5 +1,5 @@
 import type { Section } from '../shape/section.ts';
-import { cutShape, firstMoment, type Shape, thickness } from '../shape/shape.ts';
+import { cutShape, type Shape, thickness } from '../shape/shape.ts';
 import { shearPeak } from '../shape/shearStress.ts';
 import type { CutFacts } from './facts.ts';
 
@@ -33,7 +33,7 @@ const modulusOf = ({ modulusTop, modulusBottom }: Shape, cut: 'top' | 'bottom' |
   cut === 'both' ? Math.min(modulusTop, modulusBottom) : cut === 'top' ? modulusTop : modulusBottom;
 
 const cutAt = (shape: Shape, cut: 'top' | 'bottom' | 'both', c: number, dc: number, g: number): CutFacts => {
-  const { at } = shearPeak(shape);
+  const { at, Q } = shearPeak(shape);
   return {
     here: true,
     shape,
@@ -45,7 +45,7 @@ const cutAt = (shape: Shape, cut: 'top' | 'bottom' | 'both', c: number, dc: numb
     A: shape.area,
     I: shape.inertia,
     W: modulusOf(shape, cut),
-    Q: firstMoment(shape, at),
+    Q,
     t: thickness(shape, at),
   };
 };

@@ -7,25 +7,21 @@ export interface ShearPeak {
   readonly perNewton: number;
   /** Its level, mm below top of steel. */
   readonly at: number;
+  /** First moment of what lies above that level, mm³. */
+  readonly Q: number;
 }
-
-const peaks = new WeakMap<Shape, ShearPeak>();
 
 /**
  * Where V Q/(I t) is largest in the web, root fillets included. The flange is left out: where the width jumps from flange to web the
  * formula speaks of no real stress. The peak stands at the centroid if that lies in the plain web; with the centroid in a flange or
- * among the fillets it stands in the fillets, found by halving to a rounding error. Where no web is left, the centroid is taken. Worked
- * out once for each shape.
+ * among the fillets it stands in the fillets, found by halving to a rounding error. Where no web is left, the centroid is taken.
  */
 export const shearPeak = (shape: Shape): ShearPeak => {
-  const seen = peaks.get(shape);
-  if (seen !== undefined) return seen;
   const level = Math.min(Math.max(shape.centroid, shape.webTop), shape.webBottom);
   const it = webBandAt(shape, level);
   const at = it.factor < 0 ? peakInFillets(shape, it, level) : level;
-  const peak = { perNewton: firstMoment(shape, at) / (shape.inertia * widthAt(it, at)), at };
-  peaks.set(shape, peak);
-  return peak;
+  const Q = firstMoment(shape, at);
+  return { perNewton: Q / (shape.inertia * widthAt(it, at)), at, Q };
 };
 
 /** A level of the curve, mm; first moment above it, mm³; width there, mm. */

@@ -1,5 +1,6 @@
+import { byKind, isCleat, isEndPlate, settledByKind } from '../../end/byKind.ts';
 import type { Facts } from '../../end/facts.ts';
-import { fullDepthPlate, type Gate } from '../../end/gates.ts';
+import { fullDepthPlate, type Gate, noWebWeld } from '../../end/gates.ts';
 import { db, dt, flag, g, h, hp, r, tf, yp } from '../../end/given.ts';
 import { all, minus, not, over, plus, step, times } from '../../formula/tree.ts';
 import { onBeamWeb } from '../methods/supportOutline.ts';
@@ -22,9 +23,16 @@ const copedAbove = gate('coped above', 'coped-above', (f) => clears(f, f.ct, f.d
 const copedBelow = gate('coped below', 'coped-below', (f) => clears(f, f.cb, f.db));
 const notCopedAbove = gate('not coped above', 'no-top-cope', (f) => f.dt === 0);
 const notCopedBelow = gate('not coped below', 'no-bottom-cope', (f) => f.db === 0);
-const notWelded = gate('the web is not welded', 'web-bolted', (f) => f.weldTo !== 'web');
 
-const notBoltedAngle = gate('no angle bolted to the web', 'no-cleat', (f) => f.legWeb === 0 || f.n === 0);
+const notBoltedAngle: Gate = {
+  when: settledByKind(
+    '',
+    (kind) => (isCleat(kind) ? undefined : true),
+    (f) => f.legWeb === 0 || f.n === 0,
+    'no angle bolted to the web',
+  ),
+  reason: 'no-cleat',
+};
 
 const root = step('t_f + r', plus(tf, r), source);
 const foot = step('y_q', minus(h, plus(yp, hp)), source, 'foot of the plate, from below');
@@ -43,8 +51,8 @@ export const fitPlateDepth: FitRule = {
     },
     { of: 'top', given: yp, least: root, off: [fullDepthPlate, copedAbove] },
     { of: 'bottom', given: foot, least: root, off: [fullDepthPlate, copedBelow] },
-    { of: 'top', given: yp, least: dt, off: [fullDepthPlate, notWelded, notCopedAbove] },
-    { of: 'bottom', given: foot, least: db, off: [fullDepthPlate, notWelded, notCopedBelow] },
+    { of: 'top', given: yp, least: dt, off: [fullDepthPlate, noWebWeld, notCopedAbove] },
+    { of: 'bottom', given: foot, least: db, off: [fullDepthPlate, noWebWeld, notCopedBelow] },
     { of: 'top', given: yp, least: dt, off: [notBoltedAngle, notCopedAbove], breach: 'refer' },
     { of: 'bottom', given: foot, least: db, off: [notBoltedAngle, notCopedBelow], breach: 'refer' },
     ...onBeamWeb,
@@ -52,10 +60,10 @@ export const fitPlateDepth: FitRule = {
 };
 
 const longPlate: Gate = {
-  when: all(extended, not(flag('', (f) => f.legWeb > 0, 'angles'))),
+  when: all(extended, not(byKind('', isCleat, 'angles'))),
   reason: 'extended-plate',
 };
-const fills = gate('an end plate', 'fills-setback', (f) => f.bp > 0);
+const fills: Gate = { when: byKind('', isEndPlate, 'an end plate'), reason: 'fills-setback' };
 
 /** Gap between support and beam; long plates have no upper limit. */
 export const fitSetback: FitRule = {

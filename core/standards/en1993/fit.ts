@@ -1,3 +1,4 @@
+import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate, noWebHoles, noWebWeld } from '../../end/gates.ts';
 import { ct, db, dt, flag, g, h, hp, r, rb, rt, support, tf, yp } from '../../end/given.ts';
 import { atMost, constant, minus, most, over, pick, plus, step, times } from '../../formula/tree.ts';
@@ -24,7 +25,7 @@ const cutBack = (c: number, d: number, legWeb: number, g: number): boolean => d 
 const topCut: Gate = { when: flag('a top cope', (f) => cutBack(f.ct, f.dt, f.legWeb, f.g)), reason: 'coped' };
 const bottomCut: Gate = { when: flag('a bottom cope', (f) => cutBack(f.cb, f.db, f.legWeb, f.g)), reason: 'coped' };
 const noPlate: Gate = {
-  when: flag('a web bolted to a ply', (f) => f.kind === 'web-bolts'),
+  when: byKind('a web bolted to a ply', (kind) => kind === 'web-bolts'),
   reason: 'plates-and-cleats',
 };
 
@@ -99,7 +100,7 @@ export const fitCopeClearance: FitRule = {
 };
 
 /** An end plate fills the setback. */
-const fills: Gate = { when: flag('an end plate', (f) => f.bp > 0), reason: 'fills-setback' };
+const fills: Gate = { when: byKind('an end plate', isEndPlate), reason: 'fills-setback' };
 
 export const fitSetback: FitRule = {
   source: ductility,

@@ -1,3 +1,4 @@
+import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate, noWebHoles, uncoped } from '../../end/gates.ts';
 import { cb, ct, d0, db, dt, eEnd, flag, g, h, hp, m, q, r, rb, rt, support, tf, yp } from '../../end/given.ts';
 import { atMost, constant, minus, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
@@ -143,7 +144,7 @@ export const fitCopeClearance: FitRule = {
   ],
 };
 
-const fillsSetback: Gate = { when: flag('an end plate', (f) => f.bp > 0), reason: 'fills-setback' };
+const fillsSetback: Gate = { when: byKind('an end plate', isEndPlate), reason: 'fills-setback' };
 
 export const fitSetback: FitRule = {
   source,

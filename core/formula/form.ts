@@ -88,12 +88,19 @@ const scaleOf = (force: ForceUnit, leaves: readonly Tree[], result: Dimension): 
   return result === '1,1' && !moments ? '10³' : '';
 };
 
+/** A line, and the unit in which it states forces. */
+interface NumberLine {
+  readonly line: Line;
+  readonly force: ForceUnit;
+}
+
 /** The form that a formula, or that of a step, takes once its choices are made: all of its working but the numbers. */
 export class Form {
   /** The steps that it leans on, in the order of use. */
   readonly leads: readonly Step[];
   readonly remarks: readonly Remark[];
-  private readonly lines = new Map<string, { readonly line: Line; readonly force: ForceUnit }>();
+  private inSymbols: string | undefined;
+  private readonly inNumbers: { [system in UnitSystem]?: NumberLine } = {};
 
   constructor(
     private readonly formula: Tree,
@@ -105,27 +112,24 @@ export class Form {
   }
 
   get symbols(): string {
-    return this.kept('symbols', () => ({ line: this.line('symbols'), force: 'N' })).line.parts.join('');
+    this.inSymbols ??= this.line('symbols').parts.join('');
+    return this.inSymbols;
   }
 
-  /** The line whose numbers work out to the system's unit of the result, and the unit of its forces. */
-  numbers(system: UnitSystem): { readonly line: Line; readonly force: ForceUnit } {
-    return this.kept(system, () => {
-      const line = this.line(system);
-      if (system === 'in-kip') return { line, force: 'kN' };
-      const leaves = leavesOf(this.formula, this.choices);
-      const force = forceUnitOf(leaves, this.result);
-      const scale = scaleOf(force, leaves, this.result);
-      return { line: scale ? scaled(line, scale) : line, force };
-    });
+  /** The line whose numbers work out to the system's unit of the result. */
+  numbers(system: UnitSystem): NumberLine {
+    this.inNumbers[system] ??= this.laidOut(system);
+    return this.inNumbers[system];
   }
 
-  private kept(key: string, make: () => { readonly line: Line; readonly force: ForceUnit }) {
-    const known = this.lines.get(key);
-    if (known) return known;
-    const made = make();
-    this.lines.set(key, made);
-    return made;
+  private laidOut(system: UnitSystem): NumberLine {
+    const line = this.line(system);
+    // Every quantity stands in the system's own unit, as in a metric line whose forces are in kN.
+    if (system === 'in-kip') return { line, force: 'kN' };
+    const leaves = leavesOf(this.formula, this.choices);
+    const force = forceUnitOf(leaves, this.result);
+    const scale = scaleOf(force, leaves, this.result);
+    return { line: scale ? scaled(line, scale) : line, force };
   }
 
   private line(mode: 'symbols' | UnitSystem): Line {

@@ -7,6 +7,9 @@ import { capital } from '../words/capital.ts';
 import { fieldName, filled, type Words } from '../words/words.ts';
 import type { Note } from './report.ts';
 
+/** A beam on the other side hangs on the same web. */
+const sharesWeb = ({ support }: End): boolean => (support?.otherReaction ?? 0) > 0 && support?.kind !== 'column-flange';
+
 /** Everything that was taken as true without being given, and the limits that hold for every end. */
 export const assumptionsOf = (end: End, standard: Standard, channel: boolean, words: Words): Note[] => {
   const notes: Note[] = [];
@@ -49,6 +52,9 @@ export const assumptionsOf = (end: End, standard: Standard, channel: boolean, wo
   }
   if (end.support?.kind === 'beam-web' && end.support.section !== undefined && end.support.topOfSteel === undefined) {
     say('top-of-steel-assumed', {}, 'support.topOfSteel');
+  }
+  if (sharesWeb(end) && inSupport && !end.support?.opposite) {
+    say('opposite-shares-assumed', {}, 'support.opposite.firstRow');
   }
   return notes;
 };

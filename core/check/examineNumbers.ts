@@ -67,6 +67,10 @@ const gradeNotes = (end: End, { materials }: Standard): { readonly code: string;
   return [...found.values()];
 };
 
+/** Bolts that hold a beam opposite too, as told or, where it is not told, as assumed. */
+const boltsShared = ({ opposite, supportBolts, supportKind, Vo }: Facts): boolean =>
+  opposite.told ? opposite.shared > 0 : supportBolts.n > 0 && Vo > 0 && supportKind !== 'column-flange';
+
 const notesOf = (
   end: End,
   plan: Plan,
@@ -85,6 +89,7 @@ const notesOf = (
   if (V.used > V.given) say('least-reaction', { given: force(V.given), value: force(V.used) }, 'reaction');
   if (resolved.readAs) say('section-read-as', { ...resolved.readAs, value: resolved.designation }, 'beam.section');
   if (end.support) say('support-outline', {}, 'support');
+  if (boltsShared(resolved.facts)) say('opposite-erection', {}, 'support.otherReaction');
   const fitting = fittingOf(end.joint);
   for (const [path, grade] of [
     ['beam.grade', end.beam.grade],

@@ -18,6 +18,7 @@ export const sentences = (it: Facts, words: DrawingWords): string[] => {
     ...(it.n > 0 ? [boltSentence(it, words)] : []),
     ...fittingSentences(it, words),
     ...(words.inSupport && it.supportBolts.n > 0 ? [supportBoltSentence(it, words, words.inSupport)] : []),
+    ...(it.opposite.apart.length > 0 ? [oppositeSentence(it, words)] : []),
     ...(it.support.here
       ? [
           `The support is a beam ${mm(it.support.h)} deep with a flange ${mm(it.support.b)} wide, its top ${levelOf(it, words)}.`,
@@ -92,6 +93,14 @@ const supportBoltSentence = (it: Facts, words: DrawingWords, bolt: BoltWords): s
     lines === 2 ? `two lines at cross centres ${mm(cc)}` : `one line ${mm(cc / 2)} from the middle of the web`;
   const pitch = n > 1 ? `, pitch ${mm(p)}` : '';
   return `${rowsOf(n)} of ${bolt.boltSize} ${bolt.boltGrade} bolts into the support in ${across}${pitch}: edge ${mm(eTop)} above the first row, ${mm(eBot)} below the last, ${mm(eh)} beside; holes ${mm(d0)} ${bolt.holes}.`;
+};
+
+const oppositeSentence = ({ opposite: { apart, shared } }: Facts, words: DrawingWords): string => {
+  const places = apart.map(
+    ({ x, y }) =>
+      `${length(Math.abs(x), words.units)} to the ${x < 0 ? 'left' : 'right'}, ${length(y, words.units)} down`,
+  );
+  return `The beam opposite shares ${shared} of these bolts; ${apart.length === 1 ? 'another stands' : `${apart.length} others stand`}, from the middle of the web and from top of steel, at ${places.join('; ')}.`;
 };
 
 const levelOf = (it: Facts, words: DrawingWords): string => {

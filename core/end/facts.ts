@@ -68,6 +68,25 @@ export interface SupportBoltFacts {
   readonly eh: number;
 }
 
+/** A place on the support's face, mm: x across from the middle of the beam's web, y down from top of steel. */
+export interface OnFace {
+  readonly x: number;
+  readonly y: number;
+}
+
+/** Bolts of a beam on the other side of the same web. mm */
+export interface OppositeFacts {
+  /** True where they are told; distances are nothing where there is none to measure. */
+  readonly told: boolean;
+  /** How many go through holes of ours, and whether every bolt of either side does. */
+  readonly shared: number;
+  readonly all: boolean;
+  /** The others; the least distance of one to a bolt of ours, and to what lies on the support on this side, less than nothing under it. */
+  readonly apart: readonly OnFace[];
+  readonly toBolt: number;
+  readonly toFitting: number;
+}
+
 /**
  * What is known of one end once its names are looked up: no standard owns these numbers. N, mm, MPa; symbols of the trade.
  * Heights run down from top of steel, lengths along the beam from its own end.
@@ -154,6 +173,7 @@ export interface Facts {
   readonly weldTo: 'none' | 'support' | 'web';
   readonly weldReturn: number;
   readonly supportBolts: SupportBoltFacts;
+  readonly opposite: OppositeFacts;
   readonly kind: Joint['kind'];
   /** Full section: second moment, and first moment and thickness where V Q/(I t) peaks in the web. */
   readonly whole: Shape;

@@ -6,6 +6,7 @@ import { cutsOf } from './cuts.ts';
 import type { Facts, SupportFacts } from './facts.ts';
 import { fittingSizes } from './fittingSizes.ts';
 import { cleatsIn, webBoltsOf, weldOf } from './jointParts.ts';
+import { oppositeFacts } from './oppositeFacts.ts';
 import type { End } from './schema.ts';
 import { type SupportBoltGiven, supportBoltFacts } from './supportBoltFacts.ts';
 
@@ -112,6 +113,7 @@ export const factsOf = (
   const cuts = cutsOf(section, { g, ct, dt, cb, db });
   const shear = wholeShear(section);
   const weld = weldOf(joint);
+  const supportBolts = supportBoltFacts(end, k, sizes, tw, strengths.supportBolt);
   return {
     V: 1,
     T: fromSystem(end.tie ?? 0, '0,1', end.units),
@@ -175,7 +177,8 @@ export const factsOf = (
     k: cleatsIn(joint),
     leg: (weld?.leg ?? 0) * k,
     weldTo: weld?.to ?? 'none',
-    supportBolts: supportBoltFacts(end, k, sizes, tw, strengths.supportBolt),
+    supportBolts,
+    opposite: oppositeFacts(end, k, { ...sizes, tw, supportBolts }),
     kind: joint.kind,
     whole: shear.whole,
     I: shear.I,

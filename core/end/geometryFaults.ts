@@ -59,9 +59,14 @@ export const patternFaults = (end: End, holes: { readonly web: number; readonly 
   const rows = { count: bolts?.rows, value: bolts?.pitch, path: 'joint.bolts.pitch' };
   const columns = { count: bolts?.columns, value: bolts?.gauge, path: 'joint.bolts.gauge' };
   const supportRows = { count: inSupport?.rows, value: inSupport?.pitch, path: 'joint.supportBolts.pitch' };
+  const opposite = end.support?.opposite;
+  const otherRows = { count: opposite?.rows, value: opposite?.pitch, path: 'support.opposite.pitch' };
+  const otherLines = { count: opposite && 2, value: opposite?.gauge, path: 'support.opposite.gauge' };
   return [
     spacingFault(end, rows, holes.web, 'rows-overlap'),
     spacingFault(end, columns, holes.web, 'columns-overlap'),
     spacingFault(end, supportRows, holes.support, 'rows-overlap'),
+    spacingFault(end, otherRows, holes.support, 'rows-overlap'),
+    spacingFault(end, otherLines, holes.support, 'columns-overlap'),
   ].filter((one) => one !== undefined);
 };

@@ -103,6 +103,12 @@ export const supportBolts = {
   eh: given('e_h', '1,0', (f) => f.supportBolts.eh),
 };
 
+/** Bolts of the beam opposite that go through no hole of ours: nearest to a bolt of ours, and to what lies on the support here, mm. */
+export const opposite = {
+  toBolt: given('p_o', '1,0', (f) => f.opposite.toBolt),
+  toFitting: given('x_o', '1,0', (f) => f.opposite.toFitting),
+};
+
 /** Full section: area, second moment; first moment and thickness at the peak of V Q/(I t). */
 export const whole = {
   A: given('A', '2,0', (f) => f.whole.area),

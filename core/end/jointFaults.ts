@@ -1,4 +1,5 @@
 import { type Fault, fault } from './fault.ts';
+import { supportBoltsOf } from './jointParts.ts';
 import type { End, Joint } from './schema.ts';
 
 type Cleats = Extract<Joint, { cleat: unknown }>;
@@ -34,5 +35,17 @@ const cleatFaults = (joint: Cleats): Fault[] => {
   return found;
 };
 
+/** The beam opposite is told with its reaction, and where its bolts and those of the joint go through one web. */
+const oppositeFaults = ({ joint, support }: End): Fault[] => {
+  if (!support?.opposite) return [];
+  const path = 'support.opposite';
+  if (support.kind === 'column-flange') return [fault('opposite-flange', path, 'an object', support.kind)];
+  if (!supportBoltsOf(joint)) return [fault('opposite-welded', path, 'an object', joint.kind)];
+  return support.otherReaction === undefined ? [missing('support.otherReaction')] : [];
+};
+
 /** What a joint leaves out, or says twice. */
-export const jointFaults = ({ joint }: End): Fault[] => ('cleat' in joint ? cleatFaults(joint) : []);
+export const jointFaults = (end: End): Fault[] => [
+  ...('cleat' in end.joint ? cleatFaults(end.joint) : []),
+  ...oppositeFaults(end),
+];

@@ -135,6 +135,17 @@ const ownSection = z.strictObject({
   family: z.optional(z.enum(['I', 'channel'])),
 });
 
+/** Bolts of a beam on the other side of the same web. */
+const opposite = z.strictObject({
+  firstRow: about(
+    z.number().check(z.gte(-LARGEST), z.lte(LARGEST)),
+    "Its first row of support bolts, down from this beam's top of steel",
+  ),
+  rows: count(30),
+  pitch: z.optional(about(atLeastZero(), 'Between rows; needed from two rows up')),
+  gauge: about(positive(), "Cross centres of its bolts, as far on either side of this beam's web"),
+});
+
 const support = z.strictObject({
   kind: z.enum(['beam-web', 'column-flange', 'column-web']),
   section: z.optional(name()),
@@ -144,6 +155,7 @@ const support = z.strictObject({
     about(z.number().check(z.gte(-LARGEST), z.lte(LARGEST)), "Support's top flange above the beam's, positive up"),
   ),
   otherReaction: z.optional(atLeastZero()),
+  opposite: z.optional(opposite),
 });
 
 const beside = z.strictObject({

@@ -71,6 +71,15 @@ const loadRows = (context: Context): Row[] => {
   ];
 };
 
+/** Bolts of the beam opposite, after a comma; nothing where they are not told. */
+const oppositeBolts = ({ input, numbers }: Context): string => {
+  const given = input.end.support?.opposite;
+  if (!given) return '';
+  const { rows, firstRow, pitch, gauge } = given;
+  const pitches = rows > 1 ? `, p ${numbers.load(pitch ?? 0)}` : '';
+  return `, ${say.itsBolts} 2 × ${rows}, y_1 ${numbers.load(firstRow)}${pitches}, c_c ${numbers.load(gauge)}`;
+};
+
 const otherRows = (context: Context): Row[] => {
   const { input, numbers } = context;
   const { support, piece, end, quantity } = input.end;
@@ -79,7 +88,9 @@ const otherRows = (context: Context): Row[] => {
     const { section, thickness } = support;
     const name = (section && tightName(section)) ?? (thickness === undefined ? '' : plain(thickness, 3));
     const opposite =
-      support.otherReaction === undefined ? '' : `, ${say.opposite} V_o ${numbers.load(support.otherReaction)}`;
+      support.otherReaction === undefined
+        ? ''
+        : `, ${say.opposite} V_o ${numbers.load(support.otherReaction)}${oppositeBolts(context)}`;
     rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${levelText(context)}${opposite}`]);
   }
   const off = quantity === undefined ? '' : `${quantity} ${say.off}`;

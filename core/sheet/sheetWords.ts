@@ -39,6 +39,7 @@ export const sheetWords = {
   lines: (count: number): string => (count > 1 ? `${count} lines of ` : 'one line of '),
   long: 'long',
   opposite: 'opposite',
+  itsBolts: 'its bolts',
   top: 'top',
   bottom: 'bottom',
   tie: 'tie',

@@ -1,3 +1,5 @@
+import './otherJoints.ts';
+
 /** Sentences of faults, by code; `{field}` is the field's name, `{given}` and `{limit}` as in the fault. The same in every region. */
 export const faultSentences: Readonly<Record<string, string>> = {
   'not-json': 'This is not readable as JSON: {given}.',
@@ -45,6 +47,8 @@ export const faultSentences: Readonly<Record<string, string>> = {
   'hole-outside-plate': '{field} of {given} puts a hole over the edge of the plate; it must be {limit}.',
   'one-of-two': '{field} cannot stand beside {limit}: a leg is bolted or welded.',
   'both-legs-welded': 'A cleat with both legs welded leaves the end no way to turn; bolt one of them.',
+  'opposite-flange': "A column's flange carries one beam: leave the bolts of a beam opposite out, or name its web.",
+  'opposite-welded': 'No bolt of this joint goes through the support: leave the bolts of a beam opposite out.',
   'leg-off-web': '{field} of {given} does not reach the web; it must be {limit}.',
   'return-too-long': '{field} of {given} is longer than the leg on the web; it must be {limit}.',
   'fitting-below-beam': '{field} of {given} reaches below the beam; it must be {limit}.',

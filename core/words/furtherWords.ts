@@ -1,3 +1,4 @@
+import './otherJoints.ts';
 import { commonwealth } from './commonwealth.ts';
 import { northAmerica, saidThere } from './northAmerica.ts';
 import { admitOptions } from './optionWords.ts';

@@ -98,6 +98,24 @@ describe('every kind of joint without a mouse', () => {
     await agrees(bench);
     expect((await bench.rungs).map(({ name }) => name)).toContain('Bearing, support bolts');
   });
+
+  test('bolts of a beam opposite are typed where there is one, and count', async () => {
+    const bench = await (await visit()).tab();
+    await openJoint(bench);
+    await bench.press('ArrowDown');
+    for (const [field, text] of [
+      ['Support: Beam opposite', '150'],
+      ['Support: Its first row', '400'],
+      ['Support: Its rows', '1'],
+      ['Support: Its cross centres', '140'],
+    ] as const) {
+      await bench.tabTo(field);
+      await write(bench, text);
+    }
+    const end = (await saved(bench)) as Saved & { readonly support: Readonly<Record<string, unknown>> };
+    expect(end.support).toMatchObject({ otherReaction: 150, opposite: { firstRow: 400, rows: 1, gauge: 140 } });
+    await agrees(bench);
+  });
 });
 
 /** Where a view stands on the page. */

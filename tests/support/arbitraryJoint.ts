@@ -17,6 +17,8 @@ export interface PlausibleJoint extends PlausibleEnd {
   readonly supportSection: string | undefined;
   readonly ts: number;
   readonly Vo: number;
+  /** How far the rows and lines of a beam opposite stand off ours; undefined where they are not told. */
+  readonly opposite: { readonly down: number; readonly across: number; readonly rows: number } | undefined;
   readonly T: number;
 }
 
@@ -38,6 +40,14 @@ export const plausibleJoint: fc.Arbitrary<PlausibleJoint> = fc
       supportSection: fc.constantFrom(undefined, 'UB 610x229x101', 'UC 254x254x73'),
       ts: between(6, 25),
       Vo: fc.oneof(fc.constant(0), between(1, 300)),
+      opposite: fc.option(
+        fc.record({
+          down: fc.oneof(fc.constant(0), between(-150, 150)),
+          across: fc.oneof(fc.constant(0), between(-40, 40)),
+          rows: between(1, 6),
+        }),
+        { nil: undefined },
+      ),
       T: fc.oneof(fc.constant(0), between(1, 200)),
     }),
   )
@@ -113,20 +123,34 @@ const jointOf = (x: PlausibleJoint, kind: Joint['kind'], { joint }: End): Joint 
   }
 };
 
+/** Bolts of a beam on the other side of the same web, where those of the joint go through it. */
+const oppositeOf = ({ opposite, supportKind }: PlausibleJoint, joint: Joint) => {
+  if (!opposite || supportKind === 'column-flange' || !('supportBolts' in joint) || !joint.supportBolts)
+    return undefined;
+  const { pitch, crossCentres, topEdge } = joint.supportBolts;
+  const placed =
+    'cleat' in joint ? (joint.cleat.top ?? (joint.firstRow ?? 0) - (joint.cleat.topEdge ?? 0)) : joint.plate.top;
+  const { down, across, rows } = opposite;
+  return { firstRow: placed + topEdge + down, rows, pitch, gauge: crossCentres + across };
+};
+
 /** The end joined in this way, as JSON. */
 export const jointEndOf = (x: PlausibleJoint, kind: Joint['kind']): End & Record<string, unknown> => {
   const end = endOf(x);
+  const joint = jointOf(x, kind, end);
+  const opposite = oppositeOf(x, joint);
   const support = {
     kind: x.supportKind,
     ...(x.supportSection && { section: x.supportSection }),
     thickness: x.ts,
     grade: steel,
     otherReaction: x.Vo,
+    ...(opposite && { opposite }),
   };
   return {
     ...end,
     tie: x.T,
-    joint: jointOf(x, kind, end),
+    joint,
     ...(x.supportKind !== 'none' && { support: support as End['support'] }),
   };
 };

@@ -3,7 +3,7 @@ import { choiceText } from '../../core/words/choiceWords.ts';
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
 import { shown, unitAt } from '../state/fieldText.ts';
-import { type Joined, joinedIn } from '../state/joined.ts';
+import { type Joined, joinedIn, OPPOSITE, oppositeFits, oppositeTold } from '../state/joined.ts';
 import { isFault, readField } from '../state/readField.ts';
 import { GradeValue } from './GradeValue.tsx';
 import { OrderLine } from './OrderLine.tsx';
@@ -41,6 +41,11 @@ const Opposite = () =>
   textOf(entry.value, 'support.otherReaction') === '' ? null : (
     <>
       , a beam opposite with <Value path="support.otherReaction" /> {unitAt('support.otherReaction')}
+      {oppositeFits(entry.value) && oppositeTold(entry.value) && (
+        <>
+          , its bolts from <Value path={`${OPPOSITE}.firstRow`} missing="first row?" /> down
+        </>
+      )}
     </>
   );
 

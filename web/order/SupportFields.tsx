@@ -4,6 +4,8 @@ import { Field } from '../field/Field.tsx';
 import { SectionField } from '../field/SectionField.tsx';
 import { entry, words } from '../state/bench.ts';
 import { textOf } from '../state/entry.ts';
+import { oppositeFits } from '../state/joined.ts';
+import { OppositeFields } from './OppositeFields.tsx';
 import { SteelField } from './SteelField.tsx';
 
 /** What carries the end: its face, by section or by thickness, its steel, its level, and a beam on its other side. */
@@ -18,6 +20,7 @@ export const SupportFields = () => {
       <SteelField path="support.grade" />
       {kind === 'beam-web' && <Field path="support.topOfSteel" label="Top above" empty="level, assumed" />}
       {kind !== 'column-flange' && <Field path="support.otherReaction" label="Beam opposite" empty="none" />}
+      {oppositeFits(entry.value) && <OppositeFields />}
     </fieldset>
   );
 };

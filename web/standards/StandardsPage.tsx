@@ -1,3 +1,4 @@
+import '../../core/words/otherJoints.ts';
 import { Fragment, type TargetedEvent } from 'preact';
 import { useEffect, useLayoutEffect } from 'preact/hooks';
 import { type StandardPage, standardPage } from '../../core/check/standardPage.ts';

@@ -1,6 +1,6 @@
 import { type Fault, fault } from '../../core/end/fault.ts';
 import { type Entry, textOf } from './entry.ts';
-import { fittingSizes, type Joined, joinedIn, weldSizes } from './joined.ts';
+import { fittingSizes, type Joined, joinedIn, OPPOSITE, oppositeFits, oppositeTold, weldSizes } from './joined.ts';
 import { isFault, readField } from './readField.ts';
 
 /** The end that an entry describes, as the JSON of a file, and the fields whose text could not be read. */
@@ -117,6 +117,8 @@ const support = (reader: EntryReader): Tree | undefined =>
         thickness: reader.number('support.thickness'),
         grade: reader.grade('support.grade'),
         ...reader.numbers('support', ['topOfSteel', 'otherReaction']),
+        ...(oppositeFits(reader.entry) &&
+          oppositeTold(reader.entry) && { opposite: reader.numbers(OPPOSITE, ['firstRow', 'rows', 'pitch', 'gauge']) }),
       }
     : undefined;
 

@@ -89,6 +89,10 @@ export const numberFields: Readonly<Record<string, QuantityField | CountField>> 
   'support.grade.fu': strength,
   'support.topOfSteel': size(5, Number.NEGATIVE_INFINITY),
   'support.otherReaction': force(),
+  'support.opposite.firstRow': size(5, Number.NEGATIVE_INFINITY),
+  'support.opposite.rows': count(30),
+  'support.opposite.pitch': size(5, 0),
+  'support.opposite.gauge': size(5),
   quantity: count(100000),
   'sheet.beside.reaction': force(),
 };

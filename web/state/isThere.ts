@@ -1,5 +1,5 @@
 import { type Entry, textOf } from './entry.ts';
-import { fittingSizes, type Joined, joinedIn, weldSizes } from './joined.ts';
+import { fittingSizes, type Joined, joinedIn, OPPOSITE, oppositeFits, weldSizes } from './joined.ts';
 
 /** Fields that every fitting has. */
 const always: readonly string[] = ['thickness', 'grade'];
@@ -24,6 +24,7 @@ const inJoint = (joined: Joined, path: string): boolean => {
 export const isThere = (entry: Entry, path: string): boolean => {
   const [first = ''] = path.split('.');
   if (path === 'sheet.beside.reaction') return textOf(entry, 'sheet.beside.standard') !== '';
+  if (within(path, OPPOSITE) && !oppositeFits(entry)) return false;
   if (/^(top|bottom|support)\./.test(path)) return textOf(entry, first) === 'on';
   if (first === 'joint') return inJoint(joinedIn(entry), path);
   return path !== 'setback' || !joinedIn(entry).endPlate;

@@ -35,6 +35,19 @@ export const joinedIn = (entry: Entry): Joined => {
   };
 };
 
+/** Bolts of a beam opposite. */
+export const OPPOSITE = 'support.opposite';
+
+/** Whether an entry has bolts of a beam opposite: through the web that carries both, where the joint is bolted to it. */
+export const oppositeFits = (entry: Entry): boolean =>
+  textOf(entry, 'support.otherReaction') !== '' &&
+  textOf(entry, 'support.kind') !== 'column-flange' &&
+  joinedIn(entry).supportBolts;
+
+/** Told by the first of its sizes; before that they are taken as shared. */
+export const oppositeTold = (entry: Entry): boolean =>
+  Object.keys(entry.texts).some((path) => path.startsWith(`${OPPOSITE}.`));
+
 /** Names of a fitting's own fields beside thickness and grade. */
 export const fittingSizes = ({ cleat, endPlate, webBolts }: Joined): readonly string[] => {
   if (endPlate) return ['width', 'depth', 'top'];

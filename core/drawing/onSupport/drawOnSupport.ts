@@ -1,6 +1,7 @@
 import type { Facts } from '../../end/facts.ts';
+import { linesX, rowsY } from '../../end/supportPattern.ts';
 import { note, second } from '../callouts.ts';
-import type { Box, Callout, CutPart, Line, Stroke, View, WeldMark } from '../drawing.ts';
+import type { Box, Callout, Circle, CutPart, Line, Stroke, View, WeldMark } from '../drawing.ts';
 import { plateField } from '../fields.ts';
 import { outlineOf, webAtPlate } from '../fitting.ts';
 import { seam } from '../seam.ts';
@@ -12,7 +13,7 @@ import { seenEdges } from './behind.ts';
 import { fixedBox, sidesOf, supportLegBox, webLegBox } from './legs.ts';
 import { liesOnSupport } from './liesOnSupport.ts';
 import { onSupportDimensions } from './onSupportDimensions.ts';
-import { linesX, rowsY, supportCentreLines, supportHoles } from './supportBolts.ts';
+import { oppositeHoles, supportCentreLines, supportHoles } from './supportBolts.ts';
 
 /**
  * The view from the beam toward the support, cut just inside the beam's end: what lies on the support, its bolts or welds, and what is left of
@@ -22,7 +23,9 @@ export const drawOnSupport = (it: Facts, words: DrawingWords): View | null => {
   if (!liesOnSupport(it)) return null;
   const beam = beamCut(it);
   const fixed = fixedBox(it);
-  const box = around([fixed, ...beam.boxes]);
+  const piece = around([fixed, ...beam.boxes]);
+  const opposite = oppositeHoles(it).filter((one) => isNear(boxOf(one), piece));
+  const box = around([piece, ...opposite.map(boxOf)]);
   return {
     name: 'support',
     title: [second('on the support')],
@@ -30,7 +33,7 @@ export const drawOnSupport = (it: Facts, words: DrawingWords): View | null => {
     beam: box,
     strokes: [...beam.strokes, ...fixedStrokes(it, beam.boxes), ...welds(it), middle(box), ...supportCentreLines(it)],
     cuts: [beam.part, ...(it.bp > 0 ? [] : sidesOf(it).map((side) => cutLeg(it, side)))],
-    holes: supportHoles(it),
+    holes: [...supportHoles(it), ...opposite],
     breaks: [],
     dimensions: onSupportDimensions(it, words, box),
     callouts: callouts(it, words, box),
@@ -45,6 +48,19 @@ const around = (boxes: readonly Box[]): Box => ({
   right: Math.max(...boxes.map((one) => one.right)),
   bottom: Math.max(...boxes.map((one) => one.bottom)),
 });
+
+const boxOf = ({ centre: { x, y }, radius }: Circle): Box => ({
+  left: x - radius,
+  top: y - radius,
+  right: x + radius,
+  bottom: y + radius,
+});
+
+/** A bolt farther off than half the depth of the piece is left out: it would shrink all else. */
+const isNear = (one: Box, { left, top, right, bottom }: Box): boolean => {
+  const off = (bottom - top) / 2;
+  return one.left >= left - off && one.right <= right + off && one.top >= top - off && one.bottom <= bottom + off;
+};
 
 const middle = ({ top, bottom }: Box): Stroke => {
   const over = 0.03 * (bottom - top);

@@ -1,11 +1,11 @@
 import type { Facts } from '../../end/facts.ts';
+import { linesX, rowsY } from '../../end/supportPattern.ts';
 import { CROSS } from '../bolts.ts';
 import type { Box, Dimension, Lane, Point } from '../drawing.ts';
 import { plateField } from '../fields.ts';
 import { type Make, maker } from '../sized.ts';
 import type { DrawingWords } from '../words.ts';
 import { fixedBox, sidesOf, supportLegBox } from './legs.ts';
-import { linesX, rowsY } from './supportBolts.ts';
 
 /** Sizes that the view on the support adds to those from the side, each once. */
 export const onSupportDimensions = (it: Facts, words: DrawingWords, box: Box): Dimension[] => {

@@ -1,20 +1,14 @@
 import type { Facts } from '../../end/facts.ts';
+import { linesX, rowsY, supportCentres } from '../../end/supportPattern.ts';
 import { CROSS } from '../bolts.ts';
-import type { Circle, Point, Stroke } from '../drawing.ts';
-
-/** Lines of bolts, across from the web's middle; the one line of a single cleat stands on its side, the near one. */
-export const linesX = ({ supportBolts: { lines, cc } }: Facts): number[] =>
-  lines === 2 ? [-cc / 2, cc / 2] : lines === 1 ? [-cc / 2] : [];
-
-/** Rows, below top of steel. */
-export const rowsY = ({ yp, supportBolts: { n, p, eTop } }: Facts): number[] =>
-  Array.from({ length: n }, (_, i) => yp + eTop + i * p);
-
-/** Line by line, each from the top. */
-export const supportCentres = (it: Facts): Point[] => linesX(it).flatMap((x) => rowsY(it).map((y) => ({ x, y })));
+import type { Circle, Stroke } from '../drawing.ts';
 
 export const supportHoles = (it: Facts): Circle[] =>
   supportCentres(it).map((centre) => ({ kind: 'outline', centre, radius: it.supportBolts.d0 / 2 }));
+
+/** Bolts of the beam opposite that go through no hole of ours, as thin circles. */
+export const oppositeHoles = ({ opposite, supportBolts }: Facts): Circle[] =>
+  opposite.apart.map((centre) => ({ kind: 'narrow', centre, radius: supportBolts.d0 / 2 }));
 
 /** A centre line along each line, a short one across each hole. */
 export const supportCentreLines = (it: Facts): Stroke[] => {

@@ -1,6 +1,6 @@
 import type { Facts } from '../../end/facts.ts';
+import { supportCentres } from '../../end/supportPattern.ts';
 import type { BoltForce } from '../paths/boltForces.ts';
-import { supportCentres } from './supportBolts.ts';
 
 /**
  * Force of each support bolt on the leg or end plate that it holds, N; x across from the web's middle, y down. Two lines share V evenly, as

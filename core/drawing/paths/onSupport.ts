@@ -1,8 +1,8 @@
 import type { Facts } from '../../end/facts.ts';
+import { linesX, rowsY } from '../../end/supportPattern.ts';
 import { capital } from '../../words/capital.ts';
 import type { FailurePath, Point, Stroke } from '../drawing.ts';
 import { fixedBox, sidesOf } from '../onSupport/legs.ts';
-import { linesX, rowsY } from '../onSupport/supportBolts.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';
 import { block, fitting, type PathMaker, path, tag, torn } from './pathMaker.ts';

@@ -1,8 +1,8 @@
 import type { Facts } from '../../end/facts.ts';
+import { linesX, rowsY } from '../../end/supportPattern.ts';
 import type { FailurePath, Point } from '../drawing.ts';
 import { depthFields } from '../fields.ts';
 import { fixedBox } from '../onSupport/legs.ts';
-import { linesX, rowsY } from '../onSupport/supportBolts.ts';
 import { plateBox } from '../plate.ts';
 import { length } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';

@@ -1,6 +1,6 @@
 import type { Facts } from '../../end/facts.ts';
+import { supportCentres } from '../../end/supportPattern.ts';
 import type { Circle, Point } from '../drawing.ts';
-import { supportCentres } from '../onSupport/supportBolts.ts';
 import { supportForces } from '../onSupport/supportForces.ts';
 import { force, forceUnit } from '../sizes.ts';
 import type { DrawingWords } from '../words.ts';

@@ -10,6 +10,7 @@ import {
 import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, found, p, q, supportBolts, tp, ts, tw } from '../../end/given.ts';
 import { least, most, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
+import { besideOpposite } from '../methods/opposite.ts';
 import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { leastEdge } from './boltTable.ts';
@@ -44,6 +45,7 @@ export const fitPitch: FitRule = {
   parts: [
     ...spaced('', p, inWeb, [noWebHoles, singleRow]),
     ...spaced('support bolts', supportBolts.p, inSupport, [noSupportBolts, oneSupportRow]),
+    besideOpposite(inSupport[0]!),
   ],
 };
 export const fitGauge: FitRule = {

@@ -1,8 +1,10 @@
+import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate, noWebHoles } from '../../end/gates.ts';
-import { flag, supportBolts, V, Vo } from '../../end/given.ts';
+import { supportBolts, V, Vo } from '../../end/given.ts';
 import { oneLine } from '../../end/supportGroup.ts';
 import { least, minus, not, over, pick, plus, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
+import { oppositeApart } from '../methods/opposite.ts';
 import { notTold } from '../methods/supportBearing.ts';
 import { noSupport, onSupport, sharedWeb } from '../methods/supportShear.ts';
 import type { StrengthRule, Way } from '../standard.ts';
@@ -63,7 +65,7 @@ export const supportSide = (method: Method): Way => ({
   load: 'V',
   demand: V,
   resistance: weakestBolts(method),
-  limits: [...supportBoltLimits, oneLineOpposite, fullDepthPlate],
+  limits: [...supportBoltLimits, oppositeApart, oneLineOpposite, fullDepthPlate],
 });
 
 const plyForce = step('R_n', alike(rSupport), bearing);
@@ -74,12 +76,12 @@ const plyForce = step('R_n', alike(rSupport), bearing);
 export const supportBearing = (method: Method): StrengthRule => ({
   source: bearing,
   ways: [
-    { ...supportSide(method), off: [{ when: flag('', (f) => f.bp > 0, 'an end plate'), reason: 'covered' }, bolted] },
+    { ...supportSide(method), off: [{ when: byKind('', isEndPlate, 'an end plate'), reason: 'covered' }, bolted] },
     ...onSupport({
       of: 'support',
       resistance: method.available(plyForce, rupture, bearing),
       off: [noSupport, notTold],
-      limits: [...supportHoleLimits, oneLineOpposite, fullDepthPlate],
+      limits: [...supportHoleLimits, oppositeApart, oneLineOpposite, fullDepthPlate],
     }),
   ],
 });

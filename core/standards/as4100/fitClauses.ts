@@ -12,6 +12,7 @@ import { constant, least, pick, step, type Tree, times } from '../../formula/tre
 import type { Length } from '../../units/dimension.ts';
 import { fitCopeRadius as practiceRadius } from '../methods/fitPractice.ts';
 import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import { besideOpposite } from '../methods/opposite.ts';
 import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 
@@ -35,6 +36,7 @@ export const fitPitch: FitRule = {
   parts: [
     { of: '', given: p, ...inWeb, off: [noWebHoles, singleRow] },
     { of: 'support bolts', given: supportBolts.p, ...inSupport, off: [noSupportBolts, oneSupportRow] },
+    besideOpposite(inSupport.least),
   ],
 };
 

@@ -11,6 +11,7 @@ import { ab, at, d, eBot, eEnd, eTop, ex, flag, p, q, supportBolts, tp, tw } fro
 import { step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
 import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import { besideOpposite } from '../methods/opposite.ts';
 import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { cutEdge, greatestEdge, plateEdge, supportCutEdge, supportPlateEdge } from './edgeDistance.ts';
@@ -40,6 +41,7 @@ export const fitPitch: FitRule = {
   parts: [
     { of: '', given: p, least: leastSpacing, off: [noWebHoles, singleRow] },
     { of: 'support bolts', given: supportBolts.p, least: leastOfSupport, off: [noSupportBolts, oneSupportRow] },
+    besideOpposite(leastOfSupport),
   ],
 };
 

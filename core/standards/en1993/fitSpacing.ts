@@ -11,6 +11,7 @@ import {
 import { ab, at, d0, eBot, eEnd, eTop, ex, flag, p, q, supportBolts, tp, tw } from '../../end/given.ts';
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length } from '../../units/dimension.ts';
+import { besideOpposite } from '../methods/opposite.ts';
 import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitRule } from '../standard.ts';
 import { notEndPlate } from './kinds.ts';
@@ -29,6 +30,8 @@ const widest = (t: Tree<Length>): Tree<Length> => step('p_max', least(times(14, 
 /** The cleats of a pair are the outer plies; else the web and what lies beside it. */
 const inWeb = widest(pick([[pairOfCleats.when, tp]], least(tw, tp)));
 
+const leastInSupport = step('p_min', times(2.2, supportBolts.d0), spacing);
+
 /** EN 1993-1-8 Table 3.3, steel not exposed to the weather. */
 export const fitPitch: FitRule = {
   source: spacing,
@@ -44,10 +47,11 @@ export const fitPitch: FitRule = {
     {
       of: 'support bolts',
       given: supportBolts.p,
-      least: step('p_min', times(2.2, supportBolts.d0), spacing),
+      least: leastInSupport,
       most: widest(tp),
       off: [noSupportBolts, oneSupportRow],
     },
+    besideOpposite(leastInSupport),
   ],
 };
 /** The same between columns; the lines of an end plate stand as the joint guide has them. */

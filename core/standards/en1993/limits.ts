@@ -58,12 +58,13 @@ export const oneCleat: Limit = {
   noNumber: true,
 };
 
-export const supportBoltLimits: readonly Limit[] = [
-  oneCleat,
+/** What the joint guide's two lines of support bolts cover. */
+export const twoLineLimits: readonly Limit[] = [
   { when: oneSupportRow.when, reason: 'rows-below-two', always: true },
   supportBoltNotListed,
   ...supportHoleLimits,
 ];
+export const supportBoltLimits: readonly Limit[] = [oneCleat, ...twoLineLimits];
 
 /** The same of the bolts into the support, in shear; and in tension, threads as they may lie. */
 export const noSupportStressArea: Limit = {

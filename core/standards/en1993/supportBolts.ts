@@ -15,10 +15,11 @@ import {
   times,
 } from '../../formula/tree.ts';
 import type { Length, Pure, Stress } from '../../units/dimension.ts';
+import { oppositeApart } from '../methods/opposite.ts';
 import { onSupport } from '../methods/supportShear.ts';
 import type { StrengthRule } from '../standard.ts';
 import { gammaM2 } from './factors.ts';
-import { noSupportStressArea, supportBoltLimits } from './limits.ts';
+import { noSupportStressArea, oneCleat, supportBoltLimits, twoLineLimits } from './limits.ts';
 import { bearingOf, bearingTermsOf, longShearOf, supportBolt } from './oneBolt.ts';
 import { leastOf } from './optional.ts';
 import { guide, memory, seen } from './sources.ts';
@@ -91,7 +92,7 @@ export const supportBearing: StrengthRule = {
       of: 'support',
       resistance: step('V_Rd', times(all, inSupport), table34),
       off: [noSupportBolts, ...supportGates],
-      limits: supportBoltLimits,
+      limits: [oneCleat, oppositeApart, ...twoLineLimits],
     }),
   ],
 };

@@ -11,6 +11,7 @@ import { ab, at, d, d0, eBot, eEnd, eTop, ex, flag, fyp, p, q, supportBolts, tp,
 import { constant, least, pick, step, type Tree, times } from '../../formula/tree.ts';
 import type { Length, Stress } from '../../units/dimension.ts';
 import { notCleat, ofCleat, oneLineOnly } from '../methods/kinds.ts';
+import { besideOpposite } from '../methods/opposite.ts';
 import { insideFlange, onColumn } from '../methods/supportOutline.ts';
 import type { FitPart, FitRule } from '../standard.ts';
 import { epsilon, fyw } from './given.ts';
@@ -35,6 +36,7 @@ export const fitPitch: FitRule = {
   parts: [
     { of: '', given: p, ...inWeb, off: [noWebHoles, singleRow] },
     { of: 'support bolts', given: supportBolts.p, ...inSupport, off: [noSupportBolts, oneSupportRow] },
+    besideOpposite(inSupport.least),
   ],
 };
 

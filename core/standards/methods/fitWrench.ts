@@ -30,6 +30,7 @@ import { wrenchRoom } from '../../steel/wrenchRoom.ts';
 import type { Length } from '../../units/dimension.ts';
 import type { FitRule } from '../standard.ts';
 import { notFinPlate } from './kinds.ts';
+import { underFitting } from './opposite.ts';
 import { columnFace, notBeamWeb, notColumnWeb } from './supportOutline.ts';
 import { bottomCut, headsApart, supportBottomCut, supportTopCut, topCut } from './wrenchGates.ts';
 
@@ -159,6 +160,7 @@ export const fitWrench: FitRule = {
       least: support.toFace,
       off: [noSupportBolts, notBeamWeb],
     },
+    underFitting(over(inSupport.socket, 2)),
     { of: 'support bolts, rows', given: supportBolts.p, least: support.toBolt, off: [noSupportBolts, oneSupportRow] },
   ],
 };

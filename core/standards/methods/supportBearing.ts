@@ -5,6 +5,7 @@ import { all, not, type Source, step, type Tree, times } from '../../formula/tre
 import type { Force } from '../../units/dimension.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { notCleat, ofCleat } from './kinds.ts';
+import { oppositeApart } from './opposite.ts';
 import { noSupport, onSupport, sharedWeb } from './supportShear.ts';
 
 export const notTold: Gate = {
@@ -39,7 +40,7 @@ const perBolt = (of: string, resistance: Tree<Force>): Way => ({
 /**
  * Bearing at the bolts into the support, N a bolt: of the leg or end plate, and of the support's own ply where it is told. A beam on the other
  * side of the same web hangs on the same bolts: its reaction is added. How it shares in the line of one cleat, which holds V at an arm, is not
- * known: that refers. A column's flange bears one beam alone.
+ * known: that refers, and so does a beam opposite that is told not to share every bolt. A column's flange bears one beam alone.
  */
 export const supportBearing = (source: Source, fitting: Tree<Force>, ply: Tree<Force>): StrengthRule => ({
   source,
@@ -50,12 +51,12 @@ export const supportBearing = (source: Source, fitting: Tree<Force>, ply: Tree<F
       of: 'support',
       resistance: step('R_b', times(supportBolts.lines, supportBolts.n, ply), source, 'all bolts'),
       off: [noSupportBolts, noSupport, notTold, single],
-      limits,
+      limits: [oppositeApart, ...limits],
     }),
     {
       ...perBolt('support', ply),
       off: [noSupportBolts, noSupport, notTold, twoLines],
-      limits: [oneLineOpposite, ...limits],
+      limits: [oppositeApart, oneLineOpposite, ...limits],
     },
   ],
 });

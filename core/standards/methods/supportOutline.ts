@@ -1,3 +1,4 @@
+import { byKind, isEndPlate, isPlate } from '../../end/byKind.ts';
 import type { Facts } from '../../end/facts.ts';
 import { type Gate, noSupportBolts, noSupportWeld } from '../../end/gates.ts';
 import { b, bp, flag, hp, leg, legSupport, support, supportBolts, tp, tw, yp } from '../../end/given.ts';
@@ -19,7 +20,7 @@ const notColumnFlange = unlessFixedTo("a column's flange", 'column-flange');
 export const notColumnWeb = unlessFixedTo("a column's web", 'column-web');
 export const notBeamWeb = unlessFixedTo("a beam's web", 'beam-web');
 const plyOfSupport: Gate = {
-  when: flag('', (f) => f.kind === 'web-bolts', 'a ply of the support'),
+  when: byKind('', (kind) => kind === 'web-bolts', 'a ply of the support'),
   reason: 'no-weld',
 };
 
@@ -49,8 +50,8 @@ const outer = step(
   'x_o',
   pick(
     [
-      [flag('', (f) => f.bp > 0, 'an end plate'), over(bp, 2)],
-      [flag('', (f) => f.legWeb === 0, 'a fin plate'), plus(over(tw, 2), tp, leg)],
+      [byKind('', isEndPlate, 'an end plate'), over(bp, 2)],
+      [byKind('', isPlate, 'a fin plate'), plus(over(tw, 2), tp, leg)],
       [flag('', (f) => f.weldTo === 'support', 'a weld to the support'), plus(over(tw, 2), legSupport, leg)],
     ],
     plus(over(tw, 2), legSupport),

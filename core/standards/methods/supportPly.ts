@@ -4,6 +4,7 @@ import { oneRowOfSupport, supportForce, supportUpright } from '../../end/support
 import { least, pick, type Source, step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
 import type { Way } from '../standard.ts';
+import { oppositeApart } from './opposite.ts';
 import { notTold, oneLineOpposite, oneSupportBolt, single, twoLines } from './supportBearing.ts';
 import { noSupport, onSupport } from './supportShear.ts';
 
@@ -12,7 +13,7 @@ export const oneSupportBoltRefers: Limit = { when: oneSupportBolt, reason: 'one-
 
 /**
  * Bearing of the support's own ply at the joint's bolts, N a bolt: `full` whatever its direction, `upright` towards the next hole. A beam on
- * the other side of the same web is taken to hang on the same bolts: its reaction is added. A column's flange bears one beam alone.
+ * the other side of the same web is taken to hang on the same bolts: its reaction is added; where it is told not to, that refers. A column's flange bears one beam alone.
  */
 export const supportPly = (full: Tree<Force>, upright: Tree<Force>, source: Source): readonly Way[] => {
   const bolts = times(supportBolts.lines, supportBolts.n);
@@ -21,14 +22,14 @@ export const supportPly = (full: Tree<Force>, upright: Tree<Force>, source: Sour
   const ofOneLine = {
     load: 'V',
     off: [noSupport, notTold, twoLines],
-    limits: [oneSupportBoltRefers, oneLineOpposite, ...limits],
+    limits: [oneSupportBoltRefers, oppositeApart, oneLineOpposite, ...limits],
   } as const;
   return [
     ...onSupport({
       of: 'support',
       resistance: step('R_b', times(bolts, weaker), source, 'all bolts'),
       off: [noSupport, notTold, single],
-      limits,
+      limits: [oppositeApart, ...limits],
     }),
     { of: 'support, in full', symbol: 'R_s', demand: supportForce, resistance: full, ...ofOneLine },
     {

@@ -8,6 +8,8 @@ import { leastBox } from '../../../core/drawing/leastBox.ts';
 import { drawOnSupport } from '../../../core/drawing/onSupport/drawOnSupport.ts';
 import { sentences } from '../../../core/drawing/sentences.ts';
 import { standards } from '../../../core/standards/index.ts';
+import { changed } from '../../support/changed.ts';
+import { goodEnds } from '../../support/published.ts';
 import { viewsOf } from './goldenDrawings.ts';
 import { drawable, endNamed, inTwoViews, type JointName, jointEnd, jointNames } from './jointEnds.ts';
 import { collide, contains, pointsOf, textsOf } from './marks.ts';
@@ -289,6 +291,39 @@ describe('the symbols of welds', () => {
       expect(words(name, american), name).toEqual(expect.arrayContaining(['6', 'each angle']));
     }
     expect(dashed('end-plate')).toHaveLength(0);
+  });
+});
+
+describe('a beam opposite', () => {
+  /** The end plate with bolts at 100, 170 and 240 down, lines at 140; the beam opposite has a fourth row, at 310. */
+  const given = goodEnds().find(({ name }) => name === 'end-plate-opposite')!.end;
+  const { facts, words } = drawable(given)!;
+
+  it('shows those of its bolts that we do not share as thin circles, within the view', () => {
+    const { holes, box } = drawOnSupport(facts, words)!;
+    const thin = holes.filter(({ kind }) => kind === 'narrow').map(({ centre }) => centre);
+    expect(thin).toEqual([
+      { x: -70, y: 310 },
+      { x: 70, y: 310 },
+    ]);
+    expect(holes.filter(({ kind }) => kind === 'outline')).toHaveLength(6);
+    expect(box.bottom).toBeGreaterThanOrEqual(321);
+    const plain = jointEnd('end-plate');
+    expect(drawOnSupport(plain.facts, plain.words)!.holes.every(({ kind }) => kind === 'outline')).toBe(true);
+  });
+
+  it('leaves out bolts far off, which would shrink all else', () => {
+    const far = changed(given, { support: { opposite: { firstRow: 5000, rows: 1 } } });
+    const it = drawable(far)!;
+    const view = drawOnSupport(it.facts, it.words)!;
+    expect(view.holes).toHaveLength(6);
+    expect(view.box.bottom).toBeLessThan(500);
+  });
+
+  it('is told in words', () => {
+    expect(sentences(facts, words).join(' ')).toContain(
+      'The beam opposite shares 6 of these bolts; 2 others stand, from the middle of the web and from top of steel, at 70 to the left, 310 down; 70 to the right, 310 down.',
+    );
   });
 });
 

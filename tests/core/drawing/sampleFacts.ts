@@ -149,6 +149,7 @@ export const sampleFacts = (given: Sample = {}): Facts => {
     weldTo: kind === 'fin-plate' ? 'support' : 'none',
     weldReturn: 0,
     supportBolts: noSupportBolts,
+    opposite: { told: false, shared: 0, all: false, apart: [], toBolt: 0, toFitting: 0 },
     Vo: 0,
     kind,
     whole,

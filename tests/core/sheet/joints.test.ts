@@ -13,6 +13,7 @@ const names = [
   'double-cleat-web-welded',
   'double-cleat-support-welded',
   'end-plate',
+  'end-plate-opposite',
   'full-end-plate',
 ];
 const endOf = (name: string): Record<string, unknown> => goodEnds().find((one) => one.name === name)!.end;
@@ -20,12 +21,21 @@ const endOf = (name: string): Record<string, unknown> => goodEnds().find((one) =
 const sheetOf = async (end: unknown): Promise<string[]> => (await pagesOf(examined(end))).map(wholeText);
 
 describe('the sheet of cleats and end plates', () => {
-  const plain = ['sans-10162-1', 'as-4100'].flatMap((id) => names.map((name) => [name, id] as const));
+  // One has a tie force and a beam opposite: there is more to say of it than a page holds.
+  const short = names.filter((name) => name !== 'double-cleat-other-beam');
+  const plain = ['sans-10162-1', 'as-4100'].flatMap((id) => short.map((name) => [name, id] as const));
 
   test.each(plain)('of %s under %s is one page with the working of the check that governs', async (name, id) => {
     const pages = await sheetOf(underStandard(endOf(name), standards[id]!));
     expect(pages).toHaveLength(1);
     if (name !== 'full-end-plate') expect(pages[0]).toMatch(/Governing working: .* ratio [\d./]+ = [\d.]+, printed/);
+  });
+
+  test('of a pair with a tie force and a beam opposite has that working on its second page', async () => {
+    const pages = await sheetOf(endOf('double-cleat-other-beam'));
+    expect(pages).toHaveLength(2);
+    expect(pages[0]).toContain('Governing working: on sheet 2');
+    expect(pages[1]).toMatch(/Bearing on the web .* = 149\.3 kN/);
   });
 
   test.each(names)('of %s says once that the support is checked only where the list says so', async (name) => {
@@ -57,6 +67,16 @@ describe('the sheet of cleats and end plates', () => {
       support: { ...(endOf('double-cleat').support as object), topOfSteel: 5 },
     };
     expect((await sheetOf(lower))[0]).toContain('top of steel 5');
+  });
+
+  test('tells the bolts of a beam opposite after its reaction', async () => {
+    const [page] = await sheetOf(endOf('end-plate-opposite'));
+    expect(page).toMatch(/tops level, opposite V ?o 90, its bolts 2 × 4, y ?1 100, p 70, c ?c 140/);
+    expect(page).toContain('the beam opposite does not share every bolt');
+    const told = endOf('end-plate-opposite');
+    const { opposite: _, ...untold } = told.support as Record<string, unknown>;
+    const assumed = (await sheetOf({ ...told, support: untold })).join(' ');
+    expect(assumed).toContain('The beam opposite shares these bolts, row for row (assumed)');
   });
 
   test('leaves no heading of the table without a row under it at the foot of a sheet', async () => {

@@ -5,6 +5,7 @@ import { webBoltsOf } from '../../../core/end/jointParts.ts';
 import { readEnd } from '../../../core/end/readEnd.ts';
 import type { End } from '../../../core/end/schema.ts';
 import demo from '../../../fixtures/demo/citrus-packhouse.json' with { type: 'json' };
+import endPlate from '../../../fixtures/input/good/end-plate.json' with { type: 'json' };
 import { endOf } from '../../../web/state/endOf.ts';
 import { type Entry, textOf, withText } from '../../../web/state/entry.ts';
 import { entryOf } from '../../../web/state/entryOf.ts';
@@ -163,6 +164,25 @@ describe('an end and the fields of the bench', () => {
     expect(endOf(off).input).not.toHaveProperty('joint.weld');
     const on = withText(withText(off, 'top', 'on'), 'joint.kind', 'fin-plate');
     expect(endOf(on).input).toEqual(endOf(entry).input);
+  });
+
+  test('bolts of a beam opposite are in the end once one of their sizes is there, while the joint is bolted to a web with a beam on its other side', () => {
+    const bare = { kind: 'beam-web', thickness: 10, otherReaction: 90 } as const;
+    const opposite = { firstRow: 100, rows: 3, pitch: 70, gauge: 140 };
+    const entry = entryOf(read({ ...endPlate, support: { ...bare, opposite } }));
+    const inEnd = (of: Entry) => (endOf(of).input.support as Record<string, unknown>).opposite;
+    expect(inEnd(entry)).toEqual(opposite);
+    expect(inEnd(entryOf(read({ ...endPlate, support: bare })))).toBeUndefined();
+    for (const [path, text] of [
+      ['support.otherReaction', ''],
+      ['support.kind', 'column-flange'],
+      ['joint.kind', 'fin-plate'],
+    ] as const) {
+      expect(inEnd(withText(entry, path, text)), path).toBeUndefined();
+      expect(textOf(withText(entry, path, text), 'support.opposite.firstRow')).toBe('100');
+    }
+    const inches = endOf(switchUnits(entry, 'in-kip')).input.support as { opposite: typeof opposite };
+    expect(inches.opposite).toMatchObject({ rows: 3, firstRow: 100 / 25.4 });
   });
 
   test('the file is readable JSON in the order of the trade', () => {

@@ -6,7 +6,7 @@ import { cutsOf } from './cuts.ts';
 import type { Facts, SupportFacts } from './facts.ts';
 import { fittingSizes } from './fittingSizes.ts';
 import { cleatsIn, webBoltsOf, weldOf } from './jointParts.ts';
-import { oppositeFacts } from './oppositeFacts.ts';
+import { noOpposite, oppositeFacts } from './oppositeFacts.ts';
 import type { End } from './schema.ts';
 import { type SupportBoltGiven, supportBoltFacts } from './supportBoltFacts.ts';
 
@@ -114,6 +114,7 @@ export const factsOf = (
   const shear = wholeShear(section);
   const weld = weldOf(joint);
   const supportBolts = supportBoltFacts(end, k, sizes, tw, strengths.supportBolt);
+  const told = end.support?.opposite;
   return {
     V: 1,
     T: fromSystem(end.tie ?? 0, '0,1', end.units),
@@ -178,7 +179,7 @@ export const factsOf = (
     leg: (weld?.leg ?? 0) * k,
     weldTo: weld?.to ?? 'none',
     supportBolts,
-    opposite: oppositeFacts(end, k, { ...sizes, tw, supportBolts }),
+    opposite: told ? oppositeFacts(told, k, { ...sizes, tw, supportBolts }) : noOpposite,
     kind: joint.kind,
     whole: shear.whole,
     I: shear.I,

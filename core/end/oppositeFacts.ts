@@ -1,5 +1,5 @@
 import type { Facts, OnFace, OppositeFacts } from './facts.ts';
-import type { End } from './schema.ts';
+import type { OppositeGiven } from './schema.ts';
 import { supportCentres } from './supportPattern.ts';
 
 /** Centres no farther apart are those of one hole; sizes that meet in inches meet in mm. mm */
@@ -8,7 +8,8 @@ const ONE_HOLE = 0.5 + 1e-9;
 /** What is known of this side. */
 type Side = Pick<Facts, 'yp' | 'hp' | 'bp' | 'tw' | 'legSupport' | 'supportBolts'>;
 
-const none: OppositeFacts = { told: false, shared: 0, all: false, apart: [], toBolt: 0, toFitting: 0 };
+/** No beam opposite is told. */
+export const noOpposite: OppositeFacts = { told: false, shared: 0, all: false, apart: [], toBolt: 0, toFitting: 0 };
 
 const distance = (a: OnFace, b: OnFace): number => Math.hypot(a.x - b.x, a.y - b.y);
 const nearest = (to: OnFace, all: readonly OnFace[]): number => Math.min(...all.map((one) => distance(one, to)));
@@ -23,17 +24,18 @@ const clear = ({ x, y }: OnFace, { yp, hp, bp, tw, legSupport, supportBolts }: S
 };
 
 /** Bolts of the beam opposite beside those of this one; `k`: mm in one length unit of the file. */
-export const oppositeFacts = ({ support }: End, k: number, side: Side): OppositeFacts => {
-  const given = support?.opposite;
-  if (!given) return none;
-  const { firstRow, rows, pitch = 0, gauge } = given;
+export const oppositeFacts = (
+  { firstRow, rows, pitch = 0, gauge }: OppositeGiven,
+  k: number,
+  side: Side,
+): OppositeFacts => {
   const ours = supportCentres(side);
   const theirs = [-gauge / 2, gauge / 2].flatMap((x) =>
     Array.from({ length: rows }, (_, i) => ({ x: x * k, y: (firstRow + i * pitch) * k })),
   );
   const apart = theirs.filter((one) => nearest(one, ours) > ONE_HOLE);
   const shared = theirs.length - apart.length;
-  if (apart.length === 0) return { ...none, told: true, shared, all: shared === ours.length };
+  if (apart.length === 0) return { ...noOpposite, told: true, shared, all: shared === ours.length };
   return {
     told: true,
     shared,

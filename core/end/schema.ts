@@ -215,3 +215,4 @@ export type GradeGiven = End['beam']['grade'];
 
 export type WebBolts = z.infer<typeof bolts>;
 export type SupportBolts = z.infer<typeof supportBolts>;
+export type OppositeGiven = z.infer<typeof opposite>;

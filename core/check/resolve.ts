@@ -222,12 +222,12 @@ class Resolver {
     const { webStrengthAt } = this.standard.materials;
     const ofWeb = section && support.kind !== 'column-flange' ? webStrengthAt(section) : 0;
     const steel = carried?.support ?? this.supportSteel(Math.max(fixedTo, ofWeb));
-    const given = { kind: support.kind, thickness: fixedTo, steel };
-    if (!section) return { ...given, outline: noSupport };
+    const { kind } = support;
+    if (!section) return { kind, thickness: fixedTo, steel, outline: noSupport };
     const { h, b, tw, tf, r } = section;
     const here = support.kind === 'beam-web';
     const topOfSteel = here ? (support.topOfSteel ?? 0) * k : 0;
-    return { ...given, outline: { here, h, b, tw, tf, r, topOfSteel } };
+    return { kind, thickness: fixedTo, steel, outline: { here, h, b, tw, tf, r, topOfSteel } };
   }
 
   private supportSteel(thickness: number): Steel {

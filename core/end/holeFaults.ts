@@ -49,7 +49,8 @@ const broken = (end: End, half: number, edges: readonly Edge[]): Fault[] => {
 
 /** Edges of plate, ply or cleat beside the bolts through the web. */
 const besideWeb = (end: End, f: Facts): Fault[] => {
-  if (f.n === 0) return [];
+  // Nearly every end of a schedule leaves here.
+  if (f.n === 0 || Math.min(f.eTop, f.eBot, f.ex) > f.d0 / 2 + NOISE) return [];
   const { path } = fittingOf(end.joint);
   const last = f.kind === 'fin-plate' || f.kind === 'web-bolts' ? 'edge' : 'legWeb';
   return broken(end, f.d0 / 2, [

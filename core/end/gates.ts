@@ -52,6 +52,7 @@ const noHoles = unlessCleats(isEndPlate);
 const offTheWeb = unlessCleats(isPlate);
 const offTheSupport = unlessCleats((kind) => kind !== 'fin-plate');
 const supportUndrilled = unlessCleats(isPlate);
+const neverOfPlates = (kind: Facts['kind']): boolean | undefined => (isPlate(kind) ? false : undefined);
 
 /** The web is welded to its plate or cleat: nothing is drilled in it. */
 export const noWebHoles: Gate = {
@@ -74,7 +75,7 @@ export const noSupportBolts: Gate = {
   reason: 'no-support-bolts',
 };
 export const oneSupportRow: Gate = {
-  when: flag('', (f) => f.supportBolts.n === 1, 'one row of bolts in the support'),
+  when: settledByKind('', neverOfPlates, (f) => f.supportBolts.n === 1, 'one row of bolts in the support'),
   reason: 'single-row',
 };
 /** One angle alone: what it hangs on stands beside the web. */

@@ -1,3 +1,4 @@
+import { byKind, isCleat } from '../../end/byKind.ts';
 import {
   type Gate,
   noSupportBolts,
@@ -8,7 +9,6 @@ import {
   singleRow,
 } from '../../end/gates.ts';
 import {
-  flag,
   given,
   h,
   leg,
@@ -56,8 +56,8 @@ const roomOf = ({ socket, spare, corners }: typeof inWeb) => {
 const web = roomOf(inWeb);
 const support = roomOf(inSupport);
 
-const noCleat: Gate = { when: flag('', (f) => f.legWeb === 0, 'no cleat'), reason: 'no-cleat' };
-const cleat: Gate = { when: flag('', (f) => f.legWeb > 0, 'a cleat'), reason: 'cleats' };
+const noCleat: Gate = { when: byKind('', (kind) => !isCleat(kind), 'no cleat'), reason: 'no-cleat' };
+const cleat: Gate = { when: byKind('', isCleat, 'a cleat'), reason: 'cleats' };
 const root = plus(tf, r);
 const toTop = step('y_w', minus(y1, root), source, 'from the first row to the root of the top flange');
 const toBottom = step(

@@ -81,7 +81,7 @@ const plateLines = (it: Facts, words: DrawingWords): Line[] => {
   if (it.legWeb === 0) return [[note(`${words.plate} ${thickness}`)], [second('far side')]];
   const name = it.k > 1 ? `${it.k} ${words.plate}s` : words.plate;
   const size: Word = { text: thickness, role: 'size', path: plateField(it, 'thickness') };
-  return [[note(name), size], [second(it.k > 1 ? 'one on each side' : 'near side')]];
+  return [[note(name), size], [second(it.k > 1 ? 'both sides' : 'near side')]];
 };
 
 const section = (it: Facts, words: DrawingWords, right: number): Callout => {

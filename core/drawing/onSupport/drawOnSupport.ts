@@ -127,10 +127,8 @@ const callouts = (it: Facts, { inSupport, units }: DrawingWords, box: Box): Call
   if (n === 0 || inSupport === undefined) return [];
   const x = linesX(it).at(-1)!;
   const levels = rowsY(it);
-  const words: Line[] = [
-    [note(`${n * lines} × ${inSupport.boltSize} ${inSupport.boltGrade}`)],
-    [second(`holes ${length(d0, units)} ${inSupport.holes}`)],
-  ];
+  const bolts: Line = [note(`${n * lines} × ${inSupport.boltSize} ${inSupport.boltGrade}`)];
+  const holes = `holes ${length(d0, units)}`;
   return [
     {
       name: 'support-bolts',
@@ -138,8 +136,11 @@ const callouts = (it: Facts, { inSupport, units }: DrawingWords, box: Box): Call
         .reverse()
         .map((y) => ({ x: x + (d0 / 2) * Math.cos(0.25), y: y + (d0 / 2) * Math.sin(0.25) })),
       end: 'arrow',
-      variants: [words],
-      near: { x: (x > 0 ? it.tw / 2 : box.left) + d0 / 2, y: it.yp + it.hp + 1.5 * d0 },
+      variants: [
+        [bolts, [second(`${holes} ${inSupport.holes}`)]],
+        [bolts, [second(holes)], [second(inSupport.holes)]],
+      ],
+      near: { x: (x > 0 ? it.tw / 2 : box.left) + d0 / 4, y: it.yp + it.hp + 1.5 * d0 },
       onBeam: false,
       align: 'start',
     },

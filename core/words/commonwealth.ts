@@ -152,7 +152,7 @@ export const commonwealth: Words = {
       "With two columns this form's nominal strength equals the present US one, but φ 0.90 stands where that takes 0.75: the design value is a fifth higher. Option web-block: cautious takes 0.3.",
     'weld-slimmer-than-plate': 'The weld is sized for V z; a leg below 0.625 t_p cannot make the plate yield first.',
     'support-outline':
-      "The support's outline serves for clearances, its thickness for the weld's least leg; a beam opposite counts only where a check of the support adds it.",
+      "The support's outline serves for clearances, its thickness for the least weld leg; a beam opposite counts only where a check adds it.",
     'strength-given': '{field}: strength as given, not from a table.',
     'memory-grade': 'The strengths of {value} are from memory of their product standard: confirm them.',
   },

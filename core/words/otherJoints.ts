@@ -70,11 +70,11 @@ const ofOtherJoints: Pick<Words, (typeof tables)[number]> = {
     'end-plate-setback': 'The end plate fills the setback: g is its thickness.',
     'heel-at-support': "The cleat's heel stands at the face of the support.",
     'opposite-shares-assumed':
-      'The beam opposite shares these bolts, row for row (assumed); else both ends are to be looked at together.',
+      'The beam opposite shares these bolts, row for row (assumed); else look at both ends together.',
   },
   notes: {
     'opposite-erection':
-      'Of two beams on shared bolts the first stays held, by a bolt of its own or a seat, until the second is bolted: law in places (29 CFR 1926.756 in the United States, memory).',
+      'Shared bolts: the first beam stays held, by a bolt of its own or a seat, until the second is bolted (law in places: 29 CFR 1926.756, memory).',
   },
   fields: {
     'joint.ply': 'ply',

@@ -137,6 +137,6 @@ test('what is said of a beam opposite is there in both regions', () => {
     const words = wordsFor(region);
     expect(words.reasons['opposite-apart']).toMatch(/does not share every bolt/);
     expect(words.assumptions['opposite-shares-assumed']).toMatch(/row for row \(assumed\)/);
-    expect(words.notes['opposite-erection']).toMatch(/the first stays held, by a bolt of its own or a seat/);
+    expect(words.notes['opposite-erection']).toMatch(/the first beam stays held, by a bolt of its own or a seat/);
   }
 });

@@ -1,8 +1,9 @@
 import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
-import { h, hp, k, leg, r, tf, tp, tw, V } from '../../end/given.ts';
+import { k, leg, tp, tw, V } from '../../end/given.ts';
+import { plateOnWeb } from '../../end/plateOnWeb.ts';
 import { legWeldForce } from '../../end/weldGroup.ts';
-import { below, least, minus, most, not, over, pick, plus, root, step, times } from '../../formula/tree.ts';
+import { below, least, minus, most, not, over, root, step, times } from '../../formula/tree.ts';
 import type { StrengthRule, Way } from '../standard.ts';
 import { clause } from './clauses.ts';
 import { FEXX, Fu, noLength } from './given.ts';
@@ -15,7 +16,6 @@ const base = clause('J4.2, J4-4');
 
 const notEndPlate: Gate = { when: byKind('', (kind) => !isEndPlate(kind), 'no end plate'), reason: 'no-weld' };
 const endPlate: Gate = { when: not(notEndPlate.when), reason: 'no-weld' };
-const fullDepth = fullDepthPlate.when;
 
 /** Least leg by the thinner of web and plate or angle: a smaller fillet is no fillet of the standard and fails. */
 const legAsked = leastLeg(step('t', least(tp, tw), undefined, 'the thinner part'));
@@ -23,12 +23,7 @@ const tooSmall = below(leg, legAsked);
 const legSmall: Gate = { when: tooSmall, reason: 'weld-leg-below-least' };
 const legEnough: Gate = { when: not(tooSmall), reason: 'weld-by-strength' };
 
-const along = step(
-  'L',
-  most(minus(pick([[fullDepth, minus(h, times(2, plus(tf, r)))]], hp), times(2, leg)), noLength),
-  line,
-  'one leg less at each end',
-);
+const along = step('L', most(minus(plateOnWeb, times(2, leg)), noLength), line, 'one leg less at each end');
 const perLength = step('R_nw', over(times(0.6, FEXX, leg), root(2)), line, 'along one weld, k_ds = 1.0');
 const filletForce = step('R_n', times(2, perLength, along), line, 'both sides of the web');
 const webForce = step('R_n', times(0.6, Fu, tw, along), base);

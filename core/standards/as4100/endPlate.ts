@@ -1,5 +1,6 @@
 import { fullDepthPlate } from '../../end/gates.ts';
-import { hp, tw, V } from '../../end/given.ts';
+import { tw, V } from '../../end/given.ts';
+import { plateOnWeb } from '../../end/plateOnWeb.ts';
 import { step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -19,5 +20,5 @@ export const endPlateGrossShear: StrengthRule = inShear(step('ΣφV_c', times(2,
 
 /** Shear of the beam's web beside the weld, over the plate's depth, as a rectangle. */
 export const endPlateWebShear: StrengthRule = inShear(
-  step('φV_c', times(0.5, phi, fyw, tw, hp), source, 'rectangle: greatest 1.5 times the mean'),
+  step('φV_c', times(0.5, phi, fyw, tw, plateOnWeb), source, 'rectangle: greatest 1.5 times the mean'),
 );

@@ -1,5 +1,6 @@
 import { fullDepthPlate } from '../../end/gates.ts';
 import { fup, fy, fyp, hp, supportBolts, tp, tw } from '../../end/given.ts';
+import { plateOnWeb } from '../../end/plateOnWeb.ts';
 import { oneRowOfSupport } from '../../end/supportGroup.ts';
 import { supportBlock } from '../../end/tearPaths.ts';
 import { all, below, constant, minus, not, over, pick, root, step, type Tree, times } from '../../formula/tree.ts';
@@ -43,7 +44,7 @@ export const endPlateBlock = (gammaM2n: Tree<Pure>): StrengthRule => {
 const web = memory('1-1 6.2.6');
 const webArea = step(
   'A_v',
-  pick([[fullWeb, times(hp, tw)]], times(0.9, hp, tw)),
+  pick([[fullWeb, times(plateOnWeb, tw)]], times(0.9, plateOnWeb, tw)),
   web,
   'published notes differ: all of it, or 0.9',
 );

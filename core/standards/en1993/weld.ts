@@ -1,5 +1,6 @@
 import type { Limit } from '../../end/gates.ts';
 import { flag, fup, fus, hp, k, leg, V, Xu, z } from '../../end/given.ts';
+import { plateOnWeb } from '../../end/plateOnWeb.ts';
 import { supportLegArm } from '../../end/weldGroup.ts';
 import {
   atMost,
@@ -18,7 +19,7 @@ import {
   type Tree,
   times,
 } from '../../formula/tree.ts';
-import type { Pure, Stress } from '../../units/dimension.ts';
+import type { Length, Pure, Stress } from '../../units/dimension.ts';
 import { legAboveEdge } from '../methods/leastLeg.ts';
 import type { StrengthRule } from '../standard.ts';
 import { upTo } from './bound.ts';
@@ -62,7 +63,10 @@ export const weldedFu = step(
 );
 
 /** Full-size length, without a throat at either end, mm. */
-export const fullLength = step('l', minus(hp, times(2, throat)), source);
+const fullLengthOf = (depth: Tree<Length>) => step('l', minus(depth, times(2, throat)), source);
+export const fullLength = fullLengthOf(hp);
+/** That of an end plate's fillets along the beam's web. */
+export const fullWebLength = fullLengthOf(plateOnWeb);
 
 /** Strength of a fillet whatever the direction of its force, simplified method, N/mm. */
 export const filletStrength = (fu: Tree<Stress>, betaW: Tree<Pure>) =>

@@ -7,7 +7,7 @@ import { gammaM0 } from './factors.ts';
 import { notCleat, notEndPlate } from './kinds.ts';
 import { leastOf } from './optional.ts';
 import { guide, memory, seen } from './sources.ts';
-import { betaOf, filletStrength, fullLength, metal, weldLimits } from './weld.ts';
+import { betaOf, filletStrength, fullWebLength, metal, weldLimits } from './weld.ts';
 
 const source = seen('1-8 4.5.3.3');
 const elastic = { clause: 'elastic weld group', basis: 'practice' } as const;
@@ -30,7 +30,7 @@ export const weldWeb: StrengthRule = {
       of: '',
       symbol: 'v',
       load: 'V',
-      demand: step('v', over(times(1.27, V), times(2, fullLength)), guide, '1.27 stands for bending'),
+      demand: step('v', over(times(1.27, V), times(2, fullWebLength)), guide, '1.27 stands for bending'),
       resistance: webWeldStrength,
       off: [notEndPlate],
       limits: [...weldLimits, fullDepthPlate],

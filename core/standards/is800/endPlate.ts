@@ -1,5 +1,6 @@
 import { fullDepthPlate } from '../../end/gates.ts';
-import { hp, tw, V } from '../../end/given.ts';
+import { tw, V } from '../../end/given.ts';
+import { plateOnWeb } from '../../end/plateOnWeb.ts';
 import { step, type Tree, times } from '../../formula/tree.ts';
 import type { Force } from '../../units/dimension.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -15,4 +16,4 @@ const inShear = (resistance: Tree<Force>): StrengthRule => ({
 export const endPlateGrossShear: StrengthRule = inShear(step('ΣV_d', times(2, Vd), source));
 
 /** Shear of the beam's web beside the weld, over the plate's depth. */
-export const endPlateWebShear: StrengthRule = inShear(step('V_d', yieldShear(times(hp, tw), fyw), source));
+export const endPlateWebShear: StrengthRule = inShear(step('V_d', yieldShear(times(plateOnWeb, tw), fyw), source));

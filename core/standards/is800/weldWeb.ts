@@ -1,6 +1,7 @@
 import { byKind, isEndPlate } from '../../end/byKind.ts';
 import { fullDepthPlate, type Gate } from '../../end/gates.ts';
-import { fu, fup, hp, k, tw, V } from '../../end/given.ts';
+import { fu, fup, k, tw, V } from '../../end/given.ts';
+import { plateOnWeb } from '../../end/plateOnWeb.ts';
 import { legWeldForce, legWeldLength } from '../../end/weldGroup.ts';
 import { least, over, pick, root, step, times } from '../../formula/tree.ts';
 import type { StrengthRule } from '../standard.ts';
@@ -11,7 +12,7 @@ import { fuw, fyw } from './given.ts';
 const yields = { clause: '8.4.1', basis: 'practice' } as const;
 const endPlate: Gate = { when: byKind('', isEndPlate, 'an end plate'), reason: 'covered' };
 
-const length = countedOf(pick([[endPlate.when, hp]], legWeldLength));
+const length = countedOf(pick([[endPlate.when, plateOnWeb]], legWeldLength));
 const mild = step('f_u', least(fuw, fup, fu), source, 'weld metal, plate or web');
 /**
  * Two fillets of the end plate's depth share V. The C-shaped weld of a cleat's web leg holds it at its arm too; its force, found on the whole

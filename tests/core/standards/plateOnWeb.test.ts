@@ -9,7 +9,7 @@ import { underStandard } from '../../support/underStandard.ts';
 const whole = goodEnds().find(({ name }) => name.startsWith('full-end-plate'))!.end;
 
 describe.each(Object.values(standards))('an end plate of the full depth, $id', (standard) => {
-  const failsAt = (change: object): (number | null | undefined)[] => {
+  const failsAt = (change: Record<string, unknown>): (number | null | undefined)[] => {
     const outcome = checkEnd(underStandard(changed(whole, change), standard));
     if ('faults' in outcome) throw new Error(outcome.faults.map(({ text }) => text).join(' '));
     const { checks } = outcome.report;

@@ -36,7 +36,7 @@ const PRELOAD = '\0vite/preload-helper.js';
 /** The core's checks read every end, find its faults and say them; on the bench what does so comes after the first view. */
 const comesLater = (id: string, importer = ''): boolean =>
   /\/(?:end\/(?:readEnd|geometryFaults|holeFaults)|words\/faults)\.ts$/.test(id) &&
-  /\/core\/check\/(?:examineNumbers|resolve)\.ts$/.test(importer);
+  /\/core\/check\/(?:examineNumbers|resolver?)\.ts$/.test(importer);
 
 /** Leaves the first two out of the build; the writer asks for the former only when such a page is given to it. */
 const lean = (): Plugin => ({

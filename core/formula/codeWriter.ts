@@ -5,7 +5,7 @@ import { does, type Solver } from './run.ts';
 const GATE = 3;
 
 /** A condition, the number under which it is noted, and whether it closes. */
-interface NodeGate {
+export interface NodeGate {
   readonly when: Node;
   readonly closes: boolean;
   readonly number: number;

@@ -1,6 +1,9 @@
 import { greater, lesser } from './lesser.ts';
 import type { Condition, Tree } from './tree.ts';
 
+const product = (x: number, y: number): number => x * y;
+const sum = (x: number, y: number): number => x + y;
+
 /**
  * Values of formulas from one set of facts, tree by tree, in N and mm: for workings and for a formula alone. A step is worked out once. Many
  * formulas on many ends are better written as a program, which gives the same bits.
@@ -18,9 +21,9 @@ export class Values {
       case 'given':
         return tree.read(this.facts);
       case 'times':
-        return this.joined(tree.of, (x, y) => x * y);
+        return this.joined(tree.of, product);
       case 'plus':
-        return this.joined(tree.of, (x, y) => x + y);
+        return this.joined(tree.of, sum);
       case 'least':
         return this.joined(tree.of, lesser);
       case 'most':
@@ -42,9 +45,8 @@ export class Values {
       case 'pick':
         return this.of(this.taken(tree));
       case 'found':
-        return this.remembered(tree, () => tree.solve(this.facts, ...tree.of.map((one) => this.of(one))));
       case 'step':
-        return this.remembered(tree, () => this.of(tree.of[0]));
+        return this.remembered(tree);
     }
   }
 
@@ -84,10 +86,11 @@ export class Values {
     return value;
   }
 
-  private remembered(tree: Tree, read: () => number): number {
+  private remembered(tree: Tree & { op: 'found' | 'step' }): number {
     const known = this.known.get(tree);
     if (known !== undefined) return known;
-    const value = read();
+    const value =
+      tree.op === 'step' ? this.of(tree.of[0]) : tree.solve(this.facts, ...tree.of.map((one) => this.of(one)));
     this.known.set(tree, value);
     return value;
   }

@@ -1,4 +1,4 @@
-import { CodeWriter } from './codeWriter.ts';
+import { CodeWriter, type NodeGate } from './codeWriter.ts';
 import { type Flag, type Node, Nodes, type Read } from './nodes.ts';
 import { ownersOf, SHARED } from './ownersOf.ts';
 import type { Program } from './run.ts';
@@ -54,10 +54,46 @@ const commonOf = (nodes: readonly Node[], owners: Int32Array): ReadonlyMap<numbe
   return common;
 };
 
+/** What one group comes to in nodes. */
+interface AskedGroup {
+  /** Number of the gate that is met whatever the facts; none of the formulas is worked out then. */
+  readonly shut: Node | undefined;
+  readonly gates: readonly NodeGate[];
+  readonly of: Nodal;
+  readonly always: Nodal;
+}
+
+/** Asks for a formula that so many lean on. */
+type Ask = (one: Asked, uses?: number) => Node | undefined;
+
+const askedOf = ({ gates: all, of, always }: Group, nodes: Nodes, ask: Ask): AskedGroup => {
+  // A gate is looked at in a row with others, so its condition is settled at the head.
+  const gates = all
+    .map(({ when, closes }, number) => ({ when: ask(when, 2)!, closes, number }))
+    .filter(({ when }) => when.is !== 0);
+  const [first] = gates;
+  const shut = first?.closes && first.when.is === 1 ? nodes.literal(first.number) : undefined;
+  const free = always.map((one) => ask(one));
+  if (shut) return { shut, always: free, gates: [], of: [] };
+  return { shut, always: free, gates, of: of.map((one) => ask(one)) };
+};
+
+/** Places of groups behind the very same gates, which are then looked at once for all of them. */
+const behindTheSame = (asked: readonly AskedGroup[]): readonly (readonly number[])[] => {
+  const sets = new Map<string, number[]>();
+  asked.forEach(({ gates, shut }, at) => {
+    const key = shut ? 'shut' : gates.map(({ when, closes, number }) => `${when.at} ${closes} ${number}`).join();
+    const known = sets.get(key);
+    if (known) known.push(at);
+    else sets.set(key, [at]);
+  });
+  return [...sets.values()];
+};
+
 /**
- * Writes groups of formulas as one program, and says where their values stand after a run. What several groups lean on is worked out once, at
- * the head; what several formulas of one group lean on, once behind its gates; what only one leans on, within the branch that the facts take.
- * A solver runs when it is first needed, and once a run.
+ * Writes groups of formulas as one program, and says where their values stand after a run. What groups behind several gates lean on is worked
+ * out once, at the head; what several formulas behind the same gates lean on, once behind them; what only one leans on, within the branch that
+ * the facts take. A solver runs when it is first needed, and once a run.
  */
 export const programOf = (
   groups: readonly Group[],
@@ -65,21 +101,12 @@ export const programOf = (
 ): { readonly program: Program; readonly places: readonly Place[] } => {
   const read = changing?.op === 'given' ? changing.read : undefined;
   const nodes = new Nodes(kind, read);
-  const ask = (one: Asked, uses = 1): Node | undefined => {
+  const ask: Ask = (one, uses = 1) => {
     const node = one && nodes.of(one);
     if (node) node.uses += uses;
     return node;
   };
-  const asked = groups.map(({ gates: all, of, always }) => {
-    // A gate is looked at in a row with others, so its condition is settled at the head.
-    const gates = all
-      .map(({ when, closes }, number) => ({ when: ask(when, 2)!, closes, number }))
-      .filter(({ when }) => when.is !== 0);
-    const [first] = gates;
-    const shut = first?.closes && first.when.is === 1 ? nodes.literal(first.number) : undefined;
-    const free = always.map((one) => ask(one));
-    return shut ? { shut, always: free, gates: [], of: [] } : { always: free, gates, of: of.map((one) => ask(one)) };
-  });
+  const asked = groups.map((group) => askedOf(group, nodes, ask));
   const run = nodes.all.length;
   const afters = groups.map(({ after = [] }, at) => (asked[at]!.shut ? [] : after.map((one) => ask(one, 0))));
   nodes.literal(0);
@@ -95,10 +122,11 @@ export const programOf = (
   const constants = leaves('literal').map(({ is }) => is as number);
   const given = leaves('given');
   const flags = leaves('flag').map(({ is }) => is as Flag);
+  const sets = behindTheSame(asked);
   const owners = ownersOf(
     nodes.all.length,
     asked.flatMap(({ gates, always }) => [...gates.map(({ when }) => when), ...there(always)]),
-    asked.map(({ of }, at) => there([...of, ...afters[at]!])),
+    sets.map((members) => members.flatMap((at) => there([...asked[at]!.of, ...afters[at]!]))),
   );
   const common = commonOf(nodes.all.slice(0, run), owners);
   const settle = (owner: number): void => {
@@ -107,15 +135,20 @@ export const programOf = (
   settle(SHARED);
 
   const values = (of: Nodal) => of.map((one) => one && writer.value(one));
-  const places = asked.map(({ shut, gates, of, always }, at) => {
-    const free = values(always);
-    if (shut) return { gate: cellOf.get(shut)!, of: [], always: free };
-    let cells: Place['of'] = [];
+  const always = asked.map((one) => values(one.always));
+  const gateOf: number[] = [];
+  const found: Place['of'][] = asked.map(() => []);
+  sets.forEach((members, set) => {
+    const { shut, gates } = asked[members[0]!]!;
+    if (shut) {
+      for (const at of members) gateOf[at] = cellOf.get(asked[at]!.shut!)!;
+      return;
+    }
     const gate = writer.behind(gates, () => {
-      settle(at);
-      cells = values(of);
+      settle(set);
+      for (const at of members) found[at] = values(asked[at]!.of);
     });
-    return { gate, of: cells, always: free };
+    for (const at of members) gateOf[at] = gate;
   });
   writer.stop();
   writer.anew = true;
@@ -139,5 +172,8 @@ export const programOf = (
     solvers: writer.solvers,
     solvedAt: new Int32Array(writer.solvers.length),
   };
-  return { program, places: places.map((one, at) => ({ ...one, ...later[at]! })) };
+  return {
+    program,
+    places: later.map((one, at) => ({ ...one, gate: gateOf[at]!, of: found[at]!, always: always[at]! })),
+  };
 };

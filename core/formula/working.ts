@@ -1,5 +1,5 @@
 import type { UnitSystem } from '../units/systems.ts';
-import { toSystem, unitOf } from '../units/systems.ts';
+import { unitOf } from '../units/systems.ts';
 import { Figures } from './figures.ts';
 import { type Form, formOf, type Remark, type Step } from './form.ts';
 import { quantity, symbolsOf } from './line.ts';
@@ -83,12 +83,13 @@ class Writer {
 
   private row(tree: Step, form: Form): WorkingRow {
     const notes = this.notes(tree, form);
+    const unit = unitOf(tree.dimension, this.system);
     return {
       symbol: tree.symbol,
       expression: form.symbols,
       numbers: this.figures.line(form),
-      value: toSystem(this.values.of(tree), tree.dimension, this.system),
-      unit: unitOf(tree.dimension, this.system).name,
+      value: this.values.of(tree) / unit.size,
+      unit: unit.name,
       clause: tree.source?.clause ?? '',
       basis: tree.source?.basis ?? '',
       ...(notes && { note: notes }),

@@ -140,7 +140,7 @@ const callouts = (it: Facts, { inSupport, units }: DrawingWords, box: Box): Call
         [bolts, [second(`${holes} ${inSupport.holes}`)]],
         [bolts, [second(holes)], [second(inSupport.holes)]],
       ],
-      near: { x: (x > 0 ? it.tw / 2 : box.left) + d0 / 4, y: it.yp + it.hp + 1.5 * d0 },
+      near: { x: (x > 0 ? it.tw / 2 + (it.bp > 0 ? it.leg : 0) : box.left) + d0 / 4, y: it.yp + it.hp + 1.5 * d0 },
       onBeam: false,
       align: 'start',
     },

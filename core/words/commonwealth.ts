@@ -105,7 +105,6 @@ export const commonwealth: Words = {
     'cut-edge-in-tension': 'the cut edge is in tension',
     'hole-at-cope-face': 'a hole cuts the face of the notch',
     'flange-left': 'the notch is shallower than the flange',
-    'channel-cope': 'a notched channel bends about no principal axis',
     'slender-cut-web': 'the cut web is too slender: k_v = 5.34 needs both edges held',
     'cope-longer-than-method': 'the notch is longer than the method covers, 2 h',
     'cope-deeper-than-method': 'the notch is deeper than the method covers',
@@ -131,7 +130,6 @@ export const commonwealth: Words = {
     support: 'Support not rotating, reaction at its face; its strength is checked only where the list says so.',
     square: 'Square end, cut as drawn.',
     material: 'Material as named.',
-    'channel-shear-centre': 'Reaction assumed through the shear centre of the channel.',
     'level-assumed': 'Reaction taken as {value} (assumed).',
     'threads-assumed': 'Threads in the shear plane (assumed).',
     'threads-in': 'Threads in the shear plane.',
@@ -141,19 +139,13 @@ export const commonwealth: Words = {
     'electrode-assumed': 'Weld metal {value} (assumed).',
     'radius-assumed': '{field} taken as 0 (assumed).',
     'tie-assumed': 'No tie force (assumed).',
-    'top-of-steel-assumed': 'Tops of steel level (assumed).',
   },
   notes: {
     'least-reaction':
       'The reaction given, {given}, is below the least action that the standard has joints designed for: {value} was used.',
-    'reaction-from-share': 'The reaction is {share} of the shear of the full section: {value}.',
-    'section-read-as': '{label} ({list}) was read as {value}.',
     'two-column-block':
       "With two columns this form's nominal strength equals the present US one, but φ 0.90 stands where that takes 0.75: the design value is a fifth higher. Option web-block: cautious takes 0.3.",
     'weld-slimmer-than-plate': 'The weld is sized for V z; a leg below 0.625 t_p cannot make the plate yield first.',
-    'support-outline':
-      "The support's outline serves for clearances, its thickness for the least weld leg; a beam opposite counts only where a check adds it.",
-    'strength-given': '{field}: strength as given, not from a table.',
     'memory-grade': 'The strengths of {value} are from memory of their product standard: confirm them.',
   },
   fields: {
@@ -207,12 +199,6 @@ export const commonwealth: Words = {
     'joint.weld.leg': 'weld leg',
     'joint.weld.electrode': 'weld metal',
     support: 'support',
-    'support.kind': 'kind of support',
-    'support.section': 'section of the support',
-    'support.thickness': 'thickness of the support',
-    'support.grade': 'grade of the support',
-    'support.topOfSteel': 'level of the support',
-    'support.otherReaction': 'reaction of the beam opposite',
     options: 'options',
     piece: 'piece',
     end: 'end',

@@ -1,4 +1,4 @@
-import './otherJoints.ts';
+import './otherEnds.ts';
 
 /** Sentences of faults, by code; `{field}` is the field's name, `{given}` and `{limit}` as in the fault. The same in every region. */
 export const faultSentences: Readonly<Record<string, string>> = {

@@ -1,4 +1,4 @@
-import './otherJoints.ts';
+import './otherEnds.ts';
 import { commonwealth } from './commonwealth.ts';
 import { northAmerica, saidThere } from './northAmerica.ts';
 import { admitOptions } from './optionWords.ts';

@@ -1,4 +1,4 @@
-import '../../core/words/otherJoints.ts';
+import '../../core/words/otherEnds.ts';
 import { Fragment, type TargetedEvent } from 'preact';
 import { useEffect, useLayoutEffect } from 'preact/hooks';
 import { type StandardPage, standardPage } from '../../core/check/standardPage.ts';

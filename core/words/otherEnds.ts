@@ -5,10 +5,11 @@ import type { Words } from './words.ts';
 const tables = ['titles', 'short', 'reasons', 'assumptions', 'notes', 'fields'] as const;
 
 /**
- * What is said of joints other than that of the bench's first view, a fin plate on a beam's web, and of a beam opposite. It comes with the
- * sentences of faults, without which no other end is read, and with the rules of further standards.
+ * What is said only of ends other than that of the bench's first view, a rolled I with a fin plate: of other joints, of channels, of a support
+ * that is told and a beam opposite, of own strengths. It comes with the sentences of faults, without which no other end is read, and with the
+ * rules of further standards.
  */
-const ofOtherJoints: Pick<Words, (typeof tables)[number]> = {
+const ofOtherEnds: Pick<Words, (typeof tables)[number]> = {
   titles: {
     'weld-web, web': 'Web behind the weld',
     'cleat-bearing': 'Bearing on the cleat',
@@ -46,6 +47,7 @@ const ofOtherJoints: Pick<Words, (typeof tables)[number]> = {
     'support-bearing': 'Bearing, support bolts',
   },
   reasons: {
+    'channel-cope': 'a notched channel bends about no principal axis',
     'no-support-bolts': 'welded to the support',
     'rows-staggered': 'the rows of web and support pass each other',
     cleats: 'not asked of cleats',
@@ -61,6 +63,8 @@ const ofOtherJoints: Pick<Words, (typeof tables)[number]> = {
     'weld-above-edge': 'the weld leg is above the most for this thickness',
   },
   assumptions: {
+    'channel-shear-centre': 'Reaction assumed through the shear centre of the channel.',
+    'top-of-steel-assumed': 'Tops of steel level (assumed).',
     'threads-assumed-web': 'Web bolts: threads in the shear plane (assumed).',
     'threads-in-web': 'Web bolts: threads in the shear plane.',
     'threads-out-web': 'Web bolts: threads out of the shear plane.',
@@ -73,10 +77,21 @@ const ofOtherJoints: Pick<Words, (typeof tables)[number]> = {
       'The beam opposite shares these bolts, row for row (assumed); else look at both ends together.',
   },
   notes: {
+    'reaction-from-share': 'The reaction is {share} of the shear of the full section: {value}.',
+    'section-read-as': '{label} ({list}) was read as {value}.',
+    'strength-given': '{field}: strength as given, not from a table.',
+    'support-outline':
+      "The support's outline serves for clearances, its thickness for the least weld leg; a beam opposite counts only where a check adds it.",
     'opposite-erection':
       'Shared bolts: the first beam stays held, by a bolt of its own or a seat, until the second is bolted (law in places: 29 CFR 1926.756, memory).',
   },
   fields: {
+    'support.kind': 'kind of support',
+    'support.section': 'section of the support',
+    'support.thickness': 'thickness of the support',
+    'support.grade': 'grade of the support',
+    'support.topOfSteel': 'level of the support',
+    'support.otherReaction': 'reaction of the beam opposite',
     'joint.ply': 'ply',
     'joint.ply.thickness': 'thickness of the ply',
     'joint.ply.grade': 'grade of the ply',
@@ -127,9 +142,9 @@ const ofOtherJoints: Pick<Words, (typeof tables)[number]> = {
   },
 };
 
-const admit = (words: Words, said: typeof ofOtherJoints): void => {
+const admit = (words: Words, said: typeof ofOtherEnds): void => {
   for (const table of tables) Object.assign(words[table], said[table]);
 };
 
-admit(commonwealth, ofOtherJoints);
-admit(northAmerica, saidThere(ofOtherJoints));
+admit(commonwealth, ofOtherEnds);
+admit(northAmerica, saidThere(ofOtherEnds));

@@ -1,5 +1,6 @@
+import { lengthSize } from '../end/factsOf.ts';
 import { fittingOf } from '../end/jointParts.ts';
-import { fixed, plain } from '../units/figures.ts';
+import { fixed } from '../units/figures.ts';
 import { capital } from '../words/capital.ts';
 import type { Context, Zone } from './context.ts';
 import { assumed, gradeName, kept, levelText, type Row } from './givenWords.ts';
@@ -75,9 +76,10 @@ const loadRows = (context: Context): Row[] => {
 const oppositeBolts = ({ input, numbers }: Context): string => {
   const given = input.end.support?.opposite;
   if (!given) return '';
+  const k = lengthSize(input.end);
   const { rows, firstRow, pitch, gauge } = given;
-  const pitches = rows > 1 ? `, p ${numbers.load(pitch ?? 0)}` : '';
-  return `, ${say.itsBolts} 2 × ${rows}, y_1 ${numbers.load(firstRow)}${pitches}, c_c ${numbers.load(gauge)}`;
+  const pitches = rows > 1 ? `, p ${numbers.mm((pitch ?? 0) * k)}` : '';
+  return `, ${say.itsBolts} 2 × ${rows}, y_1 ${numbers.mm(firstRow * k)}${pitches}, c_c ${numbers.mm(gauge * k)}`;
 };
 
 const otherRows = (context: Context): Row[] => {
@@ -86,7 +88,8 @@ const otherRows = (context: Context): Row[] => {
   const rows: Row[] = [];
   if (support) {
     const { section, thickness } = support;
-    const name = (section && tightName(section)) ?? (thickness === undefined ? '' : plain(thickness, 3));
+    const name =
+      (section && tightName(section)) ?? (thickness === undefined ? '' : numbers.mm(thickness * lengthSize(input.end)));
     const opposite =
       support.otherReaction === undefined
         ? ''

@@ -1,3 +1,4 @@
+import { lengthSize } from '../end/factsOf.ts';
 import type { Joint } from '../end/schema.ts';
 import type { Words } from '../words/words.ts';
 import type { Context } from './context.ts';
@@ -41,7 +42,7 @@ export const fittingName = (words: Words, kind: Joint['kind']): string => {
 export const levelText = ({ input, numbers }: Pick<Context, 'input' | 'numbers'>): string => {
   const { topOfSteel } = input.end.support ?? {};
   if (topOfSteel === undefined) return '';
-  return `, ${topOfSteel === 0 ? say.topsLevel : `${say.topOfSteel} ${numbers.load(topOfSteel)}`}`;
+  return `, ${topOfSteel === 0 ? say.topsLevel : `${say.topOfSteel} ${numbers.mm(topOfSteel * lengthSize(input.end))}`}`;
 };
 
 /** A symbol and its number stay on one line. */

@@ -3,6 +3,7 @@ import { standards } from '../../../core/standards/index.ts';
 import { goodEnds } from '../../support/published.ts';
 import { underStandard } from '../../support/underStandard.ts';
 import { examined } from './ends.ts';
+import { inOtherUnits } from './inOtherUnits.ts';
 import { pagesOf } from './onPage.ts';
 import { wholeText } from './readPdf.ts';
 
@@ -73,6 +74,8 @@ describe('the sheet of cleats and end plates', () => {
     const [page] = await sheetOf(endOf('end-plate-opposite'));
     expect(page).toMatch(/tops level, opposite V ?o 90, its bolts 2 × 4, y ?1 100, p 70, c ?c 140/);
     expect(page).toContain('the beam opposite does not share every bolt');
+    const [inches] = await sheetOf(inOtherUnits(endOf('end-plate-opposite') as { units: string }));
+    expect(inches).toMatch(/its bolts 2 × 4, y ?1 3 15\/16, p 2 3\/4, c ?c 5 1\/2/);
     const told = endOf('end-plate-opposite');
     const { opposite: _, ...untold } = told.support as Record<string, unknown>;
     const assumed = (await sheetOf({ ...told, support: untold })).join(' ');

@@ -82,19 +82,26 @@ const oppositeBolts = ({ input, numbers }: Context): string => {
   return `, ${say.itsBolts} 2 × ${rows}, y_1 ${numbers.mm(firstRow * k)}${pitches}, c_c ${numbers.mm(gauge * k)}`;
 };
 
+/** Section or thickness of the support; empty where neither is told. */
+export const supportName = ({ input, numbers }: Pick<Context, 'input' | 'numbers'>): string => {
+  const { section, thickness } = input.end.support ?? {};
+  if (section !== undefined) return tightName(section);
+  return thickness === undefined ? '' : numbers.mm(thickness * lengthSize(input.end));
+};
+
 const otherRows = (context: Context): Row[] => {
   const { input, numbers } = context;
   const { support, piece, end, quantity } = input.end;
   const rows: Row[] = [];
   if (support) {
-    const { section, thickness } = support;
-    const name =
-      (section && tightName(section)) ?? (thickness === undefined ? '' : numbers.mm(thickness * lengthSize(input.end)));
     const opposite =
       support.otherReaction === undefined
         ? ''
         : `, ${say.opposite} V_o ${numbers.load(support.otherReaction)}${oppositeBolts(context)}`;
-    rows.push([labels.support, `${say.supportKinds[support.kind]} ${name}${levelText(context)}${opposite}`]);
+    rows.push([
+      labels.support,
+      `${say.supportKinds[support.kind]} ${supportName(context)}${levelText(context)}${opposite}`,
+    ]);
   }
   const off = quantity === undefined ? '' : `${quantity} ${say.off}`;
   const words = [piece, end && say.ends[end], off].filter(Boolean).join(', ');

@@ -2,7 +2,7 @@ import { fittingOf, type PlacedBolts, webBoltsOf } from '../../end/jointParts.ts
 import type { Cope, GradeGiven } from '../../end/schema.ts';
 import { capital } from '../../words/capital.ts';
 import type { Zone } from '../context.ts';
-import { tightName } from '../given.ts';
+import { supportName } from '../given.ts';
 import { assumed, holesAssumed, kept, levelText } from '../givenWords.ts';
 import { supportBoltRows, weldRows } from '../jointRows.ts';
 import { body, LEFT, WIDTH } from '../page.ts';
@@ -89,12 +89,10 @@ const fittingRows = (context: CardContext): Row[] => {
 };
 
 const supportRows = (context: CardContext): Row[] => {
-  const { input, numbers } = context;
-  const { support } = input.end;
+  const { support } = context.input.end;
   if (!support) return [];
-  const { section, thickness } = support;
-  const name = (section && tightName(section)) ?? (thickness === undefined ? '' : numbers.load(thickness));
-  return [[sheetWords.labels.support, `${sheetWords.supportKinds[support.kind]} ${name}${levelText(context)}`.trim()]];
+  const name = `${sheetWords.supportKinds[support.kind]} ${supportName(context)}${levelText(context)}`;
+  return [[sheetWords.labels.support, name.trim()]];
 };
 
 /** What every end of the card has in common: beam and place of the bolts, and the fitting; each in one column. */
